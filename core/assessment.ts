@@ -1,0 +1,46 @@
+import type { ScheduleRow } from './documents/model.ts';
+import type { Finding, Severity } from './findings/model.ts';
+import type { BarId, Layout } from './layout/model.ts';
+import type { LimitInForce, Practice, Verdict } from './practice/model.ts';
+import type { Project } from './project/model.ts';
+import type { Restraint } from './restraint/model.ts';
+
+/** Everything derived from a project. Plain data (Maps included): it crosses to and from workers as it is. */
+export interface Assessment {
+  readonly project: Project;
+  readonly practice: Practice;
+  readonly layout: Layout;
+  readonly diagonals: ReadonlyMap<BarId, DiagonalAssessment>;
+  /** Must-fix first, then by bay order. */
+  readonly findings: readonly Finding[];
+  readonly schedule: readonly ScheduleRow[];
+  readonly bays: ReadonlyMap<string, BaySummary>;
+  readonly counts: Readonly<Record<Severity, number>>;
+  /** True when some finding breaks a limit. */
+  readonly breaksLimit: boolean;
+}
+
+export interface DiagonalAssessment {
+  readonly bar: BarId;
+  /** Null when the section is not in stock or the bar has no length left: a finding says so. */
+  readonly restraint: Restraint | null;
+  readonly limit: LimitInForce;
+  readonly handling: Verdict | null;
+  readonly inService: Verdict | null;
+  /** 0…: worst asked slenderness over limit. */
+  readonly nearness: number | null;
+  readonly status: 'over' | 'near' | 'within' | 'unknown';
+  /** Why it bows where it does, in a sentence or two, in the project's units. */
+  readonly reason: string;
+  readonly findings: readonly string[];
+}
+
+export interface BaySummary {
+  readonly bay: string;
+  readonly bars: number;
+  readonly diagonals: number;
+  readonly worst: { readonly bar: BarId; readonly slenderness: number; readonly limit: number } | null;
+  readonly mass: number;
+  /** "2 tiers, crossed" */
+  readonly says: string;
+}

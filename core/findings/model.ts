@@ -1,0 +1,38 @@
+import type { BarId, CrossingId } from '../layout/model.ts';
+
+export type FindingKind =
+  | 'too slender in service'
+  | 'too slender to handle'
+  | 'crossing unmarked'
+  | 'hold without a holder'
+  | 'clash'
+  | 'no partner'
+  | 'beam takes the pull'
+  | 'steep or flat'
+  | 'sag'
+  | 'override in force'
+  | 'section unknown'
+  | 'no length left'
+  | 'packer differs';
+
+export type Severity = 'must fix' | 'look into' | 'note';
+
+export interface Finding {
+  /** Lasting while its cause lasts: kind and place. */
+  readonly id: string;
+  readonly kind: FindingKind;
+  readonly severity: Severity;
+  /** True when a limit that the practice or the user set is broken: the command line then ends with 1. */
+  readonly breaksLimit: boolean;
+  readonly bay: string;
+  readonly bars: readonly BarId[];
+  readonly crossing: CrossingId | null;
+  readonly title: string;
+  readonly detail: string;
+  /** The figure that made it, and what it is held against; already without units for slenderness, mm for lengths. */
+  readonly value: number | null;
+  readonly limit: number | null;
+  readonly quantity: 'slenderness' | 'length' | 'angle' | 'ratio' | 'none';
+  /** Path in the project file, where one value is the cause. */
+  readonly path: string | null;
+}
