@@ -1,7 +1,17 @@
 /** A project set out: nodes, bars, crossings, with everything needed to draw them. Lengths mm, global coordinates, Z up. */
 import type { StockAngle } from '../catalogue/model.ts';
 import type { Vec3 } from '../geometry/vector.ts';
-import type { BarMark, DiagonalSpec, EndConnection, Join, JoinKind, LineHolder, Member, RecipeKind, Role } from '../project/model.ts';
+import type {
+  BarMark,
+  DiagonalSpec,
+  EndConnection,
+  Join,
+  JoinKind,
+  LineHolder,
+  Member,
+  RecipeKind,
+  Role,
+} from '../project/model.ts';
 
 /** "W1/t1.rise": the bay's id, a slash, the bar's key inside the bay. Lasting. */
 export type BarId = string;

@@ -1,8 +1,17 @@
 /** Changes to a project as plain data: the store, the remedies and undo all speak this one language. */
-import type {
-  Bay, BarMark, DiagonalSpec, Join, LineHolder, Place, Project, Recipe, Settings,
-} from './model.ts';
+
 import type { OwnAngle } from '../catalogue/model.ts';
+import type {
+  BarMark,
+  Bay,
+  DiagonalSpec,
+  Join,
+  LineHolder,
+  Place,
+  Project,
+  Recipe,
+  Settings,
+} from './model.ts';
 
 export type Edit =
   | { readonly kind: 'name project'; readonly name: string }
@@ -10,12 +19,26 @@ export type Edit =
   | { readonly kind: 'own stock'; readonly rows: readonly OwnAngle[] }
   | { readonly kind: 'add bay'; readonly bay: Bay; readonly after: string | null }
   | { readonly kind: 'remove bay'; readonly bay: string }
-  | { readonly kind: 'bay'; readonly bay: string; readonly change: { readonly name?: string; readonly place?: Place; readonly numberOff?: number } }
+  | {
+      readonly kind: 'bay';
+      readonly bay: string;
+      readonly change: { readonly name?: string; readonly place?: Place; readonly numberOff?: number };
+    }
   | { readonly kind: 'rename bay'; readonly bay: string; readonly to: string }
   | { readonly kind: 'recipe'; readonly bay: string; readonly recipe: Recipe; readonly what: string }
   | { readonly kind: 'diagonals'; readonly bay: string; readonly change: Partial<DiagonalSpec> }
   /** Null or undefined values in `change` are left as they are; `clear` names what goes back to the bay's. */
-  | { readonly kind: 'bars'; readonly bars: readonly string[]; readonly change: BarMark; readonly clear?: readonly (keyof BarMark)[] }
+  | {
+      readonly kind: 'bars';
+      readonly bars: readonly string[];
+      readonly change: BarMark;
+      readonly clear?: readonly (keyof BarMark)[];
+    }
   /** `join` null takes the mark away. Crossing ids as in the layout. */
   | { readonly kind: 'join'; readonly crossings: readonly string[]; readonly join: Join | null }
-  | { readonly kind: 'line holder'; readonly bay: string; readonly line: string; readonly heldBy: LineHolder };
+  | {
+      readonly kind: 'line holder';
+      readonly bay: string;
+      readonly line: string;
+      readonly heldBy: LineHolder;
+    };

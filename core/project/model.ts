@@ -164,7 +164,16 @@ export interface FreeNode {
 }
 
 export type Role =
-  | 'column' | 'beam' | 'strut' | 'rafter' | 'purlin' | 'rail' | 'chord' | 'diagonal' | 'knee' | 'tie';
+  | 'column'
+  | 'beam'
+  | 'strut'
+  | 'rafter'
+  | 'purlin'
+  | 'rail'
+  | 'chord'
+  | 'diagonal'
+  | 'knee'
+  | 'tie';
 
 export interface FreeBar {
   readonly id: string;

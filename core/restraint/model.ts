@@ -58,7 +58,10 @@ export interface Station {
   readonly twistHeld: boolean;
 }
 
-export type Held = { readonly ways: 0 } | { readonly ways: 1; readonly direction: Vec2 } | { readonly ways: 2 };
+export type Held =
+  | { readonly ways: 0 }
+  | { readonly ways: 1; readonly direction: Vec2 }
+  | { readonly ways: 2 };
 
 export interface Piece {
   readonly from: number;

@@ -1,0 +1,189 @@
+import type { Edit } from './edit.ts';
+import type { BarMark, Bay, Join, LineHolder, Project, Recipe } from './model.ts';
+import type { ProjectProblem } from './problem.ts';
+import { readProjectData } from './readProject.ts';
+
+/**
+ * The project with one change made. Bays that an edit does not touch keep their identity.
+ * An edit that names what is not there changes nothing.
+ */
+export function applyEdit(project: Project, edit: Edit): Project {
+  switch (edit.kind) {
+    case 'name project':
+      return { ...project, name: edit.name };
+    case 'settings':
+      return { ...project, settings: { ...project.settings, ...edit.change } };
+    case 'own stock':
+      return { ...project, ownStock: edit.rows };
+    case 'add bay': {
+      const index = edit.after === null ? -1 : project.bays.findIndex((bay) => bay.id === edit.after);
+      const at = index < 0 ? project.bays.length : index + 1;
+      return { ...project, bays: [...project.bays.slice(0, at), edit.bay, ...project.bays.slice(at)] };
+    }
+    case 'remove bay':
+      return { ...project, bays: project.bays.filter((bay) => bay.id !== edit.bay) };
+    case 'bay':
+      return withBay(project, edit.bay, (bay) => ({ ...bay, ...edit.change }));
+    case 'rename bay':
+      return renamed(project, edit.bay, edit.to);
+    case 'recipe':
+      return withBay(project, edit.bay, (bay) => ({ ...bay, recipe: edit.recipe }));
+    case 'diagonals':
+      return withBay(project, edit.bay, (bay) => ({
+        ...bay,
+        diagonals: { ...bay.diagonals, ...edit.change },
+      }));
+    case 'bars':
+      return edit.bars.reduce(
+        (changed, id) => withBarMark(changed, id, edit.change, edit.clear ?? []),
+        project,
+      );
+    case 'join':
+      return edit.crossings.reduce((changed, id) => withJoin(changed, id, edit.join), project);
+    case 'line holder':
+      return withBay(project, edit.bay, (bay) => ({
+        ...bay,
+        recipe: withLineHolder(bay.recipe, edit.line, edit.heldBy),
+      }));
+    default:
+      return edit satisfies never;
+  }
+}
+
+export type EditOutcome =
+  | { readonly ok: true; readonly project: Project }
+  | { readonly ok: false; readonly problems: readonly ProjectProblem[] };
+
+/** As `applyEdit`, but refuses a change after which the project could not be saved and opened again. */
+export function tryEdit(project: Project, edit: Edit): EditOutcome {
+  const read = readProjectData(applyEdit(project, edit));
+  return read.ok ? { ok: true, project: applyEdit(project, edit) } : read;
+}
+
+/** What an edit does, for undo and redo. */
+export function editLabel(edit: Edit): string {
+  switch (edit.kind) {
+    case 'name project':
+      return 'Name the project';
+    case 'settings':
+      return 'Change the settings';
+    case 'own stock':
+      return 'Change the own stock list';
+    case 'add bay':
+      return `Add ${edit.bay.id}`;
+    case 'remove bay':
+      return `Remove ${edit.bay}`;
+    case 'bay':
+      return `Change ${edit.bay}`;
+    case 'rename bay':
+      return `Rename ${edit.bay} to ${edit.to}`;
+    case 'recipe':
+      return `Change ${edit.what} of ${edit.bay}`;
+    case 'diagonals':
+      return `Change the diagonals of ${edit.bay}`;
+    case 'bars':
+      return edit.bars.length === 1 ? `Change ${edit.bars[0]}` : `Change ${edit.bars.length} bars`;
+    case 'join':
+      return edit.join === null ? 'Take the mark away' : `Mark the crossing: ${JOIN_WORDS[edit.join.kind]}`;
+    case 'line holder':
+      return `Change what holds ${edit.line}`;
+    default:
+      return edit satisfies never;
+  }
+}
+
+/** How each join is called on screens and in documents. */
+export const JOIN_WORDS: Readonly<Record<Join['kind'], string>> = {
+  none: 'not joined',
+  bolted: 'bolted through',
+  packed: 'bolted with packer',
+  cut: 'one bar cut and plated',
+  welded: 'welded',
+  purlin: 'bolted to purlin',
+  hung: 'hung, sag only',
+};
+
+function withBay(project: Project, id: string, change: (bay: Bay) => Bay): Project {
+  if (!project.bays.some((bay) => bay.id === id)) return project;
+  return { ...project, bays: project.bays.map((bay) => (bay.id === id ? change(bay) : bay)) };
+}
+
+/** "W1/t1.rise" as bay and key. */
+export function placeOf(id: string): { readonly bay: string; readonly key: string } {
+  const slash = id.indexOf('/');
+  return { bay: id.slice(0, slash), key: id.slice(slash + 1) };
+}
+
+function withBarMark(
+  project: Project,
+  id: string,
+  change: BarMark,
+  clear: readonly (keyof BarMark)[],
+): Project {
+  const { bay: bayId, key } = placeOf(id);
+  return withBay(project, bayId, (bay) => {
+    const merged: Record<string, unknown> = { ...bay.bars[key] };
+    for (const [name, value] of Object.entries(change))
+      if (value !== undefined && value !== null) merged[name] = value;
+    for (const name of clear) delete merged[name];
+    return {
+      ...bay,
+      bars: withEntry(bay.bars, key, Object.keys(merged).length > 0 ? (merged as BarMark) : null),
+    };
+  });
+}
+
+function withJoin(project: Project, id: string, join: Join | null): Project {
+  const { bay: bayId, key } = placeOf(id);
+  return withBay(project, bayId, (bay) => ({ ...bay, joins: withEntry(bay.joins, key, join) }));
+}
+
+function withEntry<T>(
+  entries: Readonly<Record<string, T>>,
+  key: string,
+  value: T | null,
+): Readonly<Record<string, T>> {
+  if (value !== null) return { ...entries, [key]: value };
+  const { [key]: _gone, ...rest } = entries;
+  return rest;
+}
+
+function withLineHolder(recipe: Recipe, line: string, heldBy: LineHolder): Recipe {
+  const held = <L extends { readonly id: string }>(lines: readonly L[]): readonly L[] =>
+    lines.map((each) => (each.id === line ? { ...each, heldBy } : each));
+  switch (recipe.kind) {
+    case 'wall':
+      return { ...recipe, lines: held(recipe.lines) };
+    case 'roof':
+      return { ...recipe, slopes: recipe.slopes.map((slope) => ({ ...slope, lines: held(slope.lines) })) };
+    case 'knee':
+    case 'free':
+      return recipe;
+    default:
+      return recipe satisfies never;
+  }
+}
+
+/** Renames a bay and every mention of it. A name that is taken changes nothing. */
+function renamed(project: Project, from: string, to: string): Project {
+  if (project.bays.some((bay) => bay.id === to)) return project;
+  const follow = <L extends { readonly heldBy: LineHolder }>(line: L): L =>
+    line.heldBy.kind === 'bay' && line.heldBy.bay === from
+      ? { ...line, heldBy: { kind: 'bay', bay: to } }
+      : line;
+  const bays = project.bays.map((bay): Bay => {
+    const named = bay.id === from ? { ...bay, id: to } : bay;
+    const { recipe } = named;
+    if (recipe.kind === 'wall') return { ...named, recipe: { ...recipe, lines: recipe.lines.map(follow) } };
+    if (recipe.kind === 'roof')
+      return {
+        ...named,
+        recipe: {
+          ...recipe,
+          slopes: recipe.slopes.map((slope) => ({ ...slope, lines: slope.lines.map(follow) })),
+        },
+      };
+    return named;
+  });
+  return { ...project, bays };
+}

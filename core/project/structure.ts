@@ -1,0 +1,138 @@
+import type { Bay, FreeRecipe, Project, RoofRecipe, WallRecipe } from './model.ts';
+import type { ProjectProblem } from './problem.ts';
+
+/** What a schema cannot say: names that must differ, ends that must exist, heights that must fit. */
+export function structureProblems(project: Project): readonly ProjectProblem[] {
+  const problems: ProjectProblem[] = [];
+  repeated(project.bays.map((bay) => bay.id)).forEach(({ index, value }) => {
+    problems.push({
+      path: `bays[${index}].id`,
+      what: `Two bays are called "${value}".`,
+      todo: 'Give each bay a name of its own.',
+    });
+  });
+  repeated(project.ownStock.map((row) => row.designation.toLowerCase())).forEach(({ index, value }) => {
+    problems.push({
+      path: `ownStock[${index}].designation`,
+      what: `The own stock list has "${value}" twice.`,
+      todo: 'Keep one of them.',
+    });
+  });
+  project.ownStock.forEach((row, index) => {
+    if (row.thickness >= row.shortLeg || row.shortLeg > row.longLeg)
+      problems.push({
+        path: `ownStock[${index}]`,
+        what: `${row.designation} is no angle: legs ${row.longLeg} and ${row.shortLeg} with thickness ${row.thickness}.`,
+        todo: 'Give the longer leg first and a thickness below the shorter leg.',
+      });
+  });
+  project.bays.forEach((bay, index) => {
+    problems.push(...bayProblems(bay, `bays[${index}].recipe`));
+  });
+  return problems;
+}
+
+function bayProblems(bay: Bay, path: string): readonly ProjectProblem[] {
+  switch (bay.recipe.kind) {
+    case 'wall':
+      return wallProblems(bay.recipe, path);
+    case 'roof':
+      return roofProblems(bay.recipe, path);
+    case 'knee':
+      return [];
+    case 'free':
+      return freeProblems(bay.recipe, path);
+    default:
+      return bay.recipe satisfies never;
+  }
+}
+
+function wallProblems(recipe: WallRecipe, path: string): ProjectProblem[] {
+  const height = recipe.tiers.reduce((sum, tier) => sum + tier.height, 0);
+  return [...sameIds(recipe.tiers, `${path}.tiers`), ...lineProblems(recipe.lines, height, path)];
+}
+
+function roofProblems(recipe: RoofRecipe, path: string): ProjectProblem[] {
+  const slopes = sameIds(recipe.slopes, `${path}.slopes`);
+  // Lines of both slopes share the bay's names.
+  const lines = sameIds(
+    recipe.slopes.flatMap((slope) => slope.lines),
+    `${path}.slopes`,
+  );
+  const each = recipe.slopes.flatMap((slope, index) => {
+    const length = slope.panels.reduce((sum, panel) => sum + panel.height, 0);
+    const at = `${path}.slopes[${index}]`;
+    return [...sameIds(slope.panels, `${at}.panels`), ...tooFar(slope.lines, length, at)];
+  });
+  return [...slopes, ...lines, ...each];
+}
+
+function freeProblems(recipe: FreeRecipe, path: string): ProjectProblem[] {
+  const problems = [...sameIds(recipe.nodes, `${path}.nodes`), ...sameIds(recipe.bars, `${path}.bars`)];
+  const nodes = new Map(recipe.nodes.map((node) => [node.id, node]));
+  recipe.bars.forEach((bar, index) => {
+    for (const end of ['from', 'to'] as const)
+      if (!nodes.has(bar[end]))
+        problems.push({
+          path: `${path}.bars[${index}].${end}`,
+          what: `Bar ${bar.id} goes to node "${bar[end]}", which is not there.`,
+          todo: 'Add the node, or name one that exists.',
+        });
+    const a = nodes.get(bar.from)?.at;
+    const b = nodes.get(bar.to)?.at;
+    if (a && b && Math.hypot(a[0] - b[0], a[1] - b[1], a[2] - b[2]) < 10)
+      problems.push({
+        path: `${path}.bars[${index}]`,
+        what: `Bar ${bar.id} has no length to speak of.`,
+        todo: 'Move one of its nodes at least 10 mm away.',
+      });
+  });
+  if (recipe.normal && Math.hypot(...recipe.normal) < 1e-6)
+    problems.push({
+      path: `${path}.normal`,
+      what: 'The normal has no direction.',
+      todo: 'Give a vector that is not zero, or null.',
+    });
+  return problems;
+}
+
+type Named = { readonly id: string };
+
+function sameIds(things: readonly Named[], path: string): ProjectProblem[] {
+  return repeated(things.map((thing) => thing.id)).map(({ index, value }) => ({
+    path: `${path}[${index}].id`,
+    what: `"${value}" is used twice.`,
+    todo: 'Give each its own name.',
+  }));
+}
+
+function lineProblems(
+  lines: readonly (Named & { at: number })[],
+  most: number,
+  path: string,
+): ProjectProblem[] {
+  return [...sameIds(lines, `${path}.lines`), ...tooFar(lines, most, path)];
+}
+
+function tooFar(lines: readonly (Named & { at: number })[], most: number, path: string): ProjectProblem[] {
+  return lines.flatMap((line, index) =>
+    line.at > most
+      ? [
+          {
+            path: `${path}.lines[${index}].at`,
+            what: `${line.id} is at ${line.at} mm, beyond the end of the bay at ${most} mm.`,
+            todo: `Give at most ${most}.`,
+          },
+        ]
+      : [],
+  );
+}
+
+function repeated(values: readonly string[]): { index: number; value: string }[] {
+  const seen = new Set<string>();
+  return values.flatMap((value, index) => {
+    if (seen.has(value)) return [{ index, value }];
+    seen.add(value);
+    return [];
+  });
+}
