@@ -42,10 +42,20 @@ export interface ScheduleRow {
   readonly limit: number;
   readonly handling: RowVerdict | null;
   readonly inService: RowVerdict | null;
-  readonly overrides: readonly { readonly axis: Axis; readonly length: number | null; readonly factor: number; readonly reason: string }[];
+  readonly overrides: readonly {
+    readonly axis: Axis;
+    readonly length: number | null;
+    readonly factor: number;
+    readonly reason: string;
+  }[];
   readonly reason: string;
   /** Titles of the findings that name this bar. */
-  readonly findings: readonly { readonly id: string; readonly kind: string; readonly severity: string; readonly title: string }[];
+  readonly findings: readonly {
+    readonly id: string;
+    readonly kind: string;
+    readonly severity: string;
+    readonly title: string;
+  }[];
 }
 
 export interface RowVerdict {
