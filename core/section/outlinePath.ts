@@ -1,0 +1,62 @@
+import type { Vec2 } from '../geometry/vector.ts';
+import type { Segment } from './areaIntegrals.ts';
+import type { AngleOutline } from './model.ts';
+
+/**
+ * The outline of an angle, anticlockwise from the heel, in mm.
+ * Coordinates [along the shorter leg, along the longer leg], heel at the origin: sharp heel, root fillet at the inside
+ * corner, a toe radius on the inner edge of each toe (what reproduces the published tables, METHODS.md §1).
+ * Pieces of no length are left out.
+ */
+export function outlinePath(outline: AngleOutline): readonly Segment[] {
+  const { shortLeg: b, longLeg: h, thickness: t, rootRadius: r1, toeRadius: r2 } = outline;
+  const quarter = Math.PI / 2;
+  const pieces: readonly Segment[] = [
+    line([0, 0], [b, 0]),
+    line([b, 0], [b, t - r2]),
+    arc([b - r2, t - r2], r2, 0, quarter),
+    line([b - r2, t], [t + r1, t]),
+    // The fillet is hollow: it is walked clockwise.
+    arc([t + r1, t + r1], r1, -quarter, -quarter),
+    line([t, t + r1], [t, h - r2]),
+    arc([t - r2, h - r2], r2, 0, quarter),
+    line([t - r2, h], [0, h]),
+    line([0, h], [0, 0]),
+  ];
+  return pieces.filter((piece) => !isEmpty(piece));
+}
+
+/**
+ * The outline as straight pieces for drawing: heel at the origin, [along the shorter leg, along the longer leg], anticlockwise,
+ * the first point not repeated at the end. Arcs become `stepsPerArc` (1 or more) chords.
+ */
+export function outlinePolygon(outline: AngleOutline, stepsPerArc: number): readonly Vec2[] {
+  return outlinePath(outline).flatMap((piece) => {
+    if (piece.kind === 'line') return [piece.from];
+    return Array.from({ length: stepsPerArc }, (_, step): Vec2 => {
+      const turn = piece.start + (piece.sweep * step) / stepsPerArc;
+      return [
+        piece.centre[0] + piece.radius * Math.cos(turn),
+        piece.centre[1] + piece.radius * Math.sin(turn),
+      ];
+    });
+  });
+}
+
+function line(from: Vec2, to: Vec2): Segment {
+  return { kind: 'line', from, to };
+}
+
+/** A quarter circle whose ends lie due along the axes from its centre. */
+function arc(centre: Vec2, radius: number, start: number, sweep: number): Segment {
+  const at = (turn: number): Vec2 => [
+    centre[0] + radius * Math.round(Math.cos(turn)),
+    centre[1] + radius * Math.round(Math.sin(turn)),
+  ];
+  return { kind: 'arc', from: at(start), to: at(start + sweep), centre, radius, start, sweep };
+}
+
+function isEmpty(piece: Segment): boolean {
+  if (piece.kind === 'arc') return piece.radius === 0;
+  return piece.from[0] === piece.to[0] && piece.from[1] === piece.to[1];
+}
