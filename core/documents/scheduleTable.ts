@@ -1,0 +1,95 @@
+import type { UnitSystem } from '../project/model.ts';
+import { AXES } from '../section/model.ts';
+import { figure } from './figures.ts';
+import type { RowVerdict, ScheduleRow } from './model.ts';
+import { type TextColumn, textTable } from './textTable.ts';
+
+const ABSENT = '–';
+
+/**
+ * The schedule as a table for the terminal: metres to the centimetre and kg, or feet to the hundredth and lb.
+ * The verdict that the practice asks for stands without brackets, the other within them. Findings follow below, one a line.
+ */
+export function scheduleTable(rows: readonly ScheduleRow[], units: UnitSystem): string {
+  if (rows.length === 0) return 'No diagonals.\n';
+  const table = textTable(
+    columnsFor(units),
+    rows.map((row) => cellsOf(row, units)),
+  );
+  const massTotal = rows.reduce((sum, row) => sum + (row.massTotal ?? 0), 0);
+  const pieces = rows.reduce((sum, row) => sum + row.numberOff * Math.max(1, row.pieces.length), 0);
+  const total = `${pieces} pieces, ${mass(massTotal, units)} ${units === 'us' ? 'lb' : 'kg'} in all`;
+  const found = findingLines(rows);
+  return [table, total, ...(found.length > 0 ? ['', ...found] : [])].join('\n').concat('\n');
+}
+
+function columnsFor(units: UnitSystem): readonly TextColumn[] {
+  const [lengthUnit, massUnit] = units === 'us' ? ['ft', 'lb'] : ['m', 'kg'];
+  const right = (head: string): TextColumn => ({ head, align: 'right' });
+  const left = (head: string): TextColumn => ({ head, align: 'left' });
+  return [
+    left('bay'),
+    left('mark'),
+    right('off'),
+    left('section'),
+    right(`set-out ${lengthUnit}`),
+    right(`cut ${lengthUnit}`),
+    right(`each ${massUnit}`),
+    ...AXES.map((axis) => right(`L${axis} ${lengthUnit}`)),
+    left('axis'),
+    right('L/r'),
+    right('limit'),
+    left('in service'),
+    left('handling'),
+  ];
+}
+
+function cellsOf(row: ScheduleRow, units: UnitSystem): readonly string[] {
+  const { unbraced, governing } = row;
+  return [
+    row.bay,
+    row.mark,
+    String(row.numberOff),
+    row.section,
+    length(row.setOutLength, units),
+    length(row.cutLength, units),
+    row.massEach === null ? ABSENT : mass(row.massEach, units),
+    ...AXES.map((axis) => (unbraced === null ? ABSENT : length(unbraced[axis], units))),
+    governing === null ? ABSENT : axisCell(governing),
+    governing === null ? ABSENT : figure(governing.slenderness, 0),
+    figure(row.limit, 0),
+    verdictCell(row.inService),
+    verdictCell(row.handling),
+  ];
+}
+
+function axisCell({ axis, angle, basis }: NonNullable<ScheduleRow['governing']>): string {
+  const name = axis === 'free' ? `free, ${figure(angle ?? 0, 0)}°` : axis;
+  if (basis === 'span') return name;
+  return basis === 'override' ? `${name}, by hand` : `${name}, bound`;
+}
+
+function verdictCell(verdict: RowVerdict | null): string {
+  if (verdict === null) return 'not assessed';
+  const said = `${figure(verdict.slenderness, 0)} ${verdict.ok ? 'within' : 'OVER'}`;
+  return verdict.asked ? said : `(${said})`;
+}
+
+/** Each finding once, with the marks of the bars it names. */
+function findingLines(rows: readonly ScheduleRow[]): readonly string[] {
+  const lines = new Map<string, string>();
+  for (const row of rows)
+    for (const { id, severity, title } of row.findings) lines.set(id, `${severity}: ${row.bay}: ${title}`);
+  return [...lines.values()];
+}
+
+const MM_PER_FOOT = 304.8;
+const KG_PER_POUND = 0.45359237;
+
+function length(mm: number, units: UnitSystem): string {
+  return figure(units === 'us' ? mm / MM_PER_FOOT : mm / 1000, 2);
+}
+
+function mass(kg: number, units: UnitSystem): string {
+  return figure(units === 'us' ? kg / KG_PER_POUND : kg, 1);
+}
