@@ -1,5 +1,6 @@
 import type { UnitSystem } from '../project/model.ts';
 import { AXES } from '../section/model.ts';
+import { KG_PER_POUND, MM_PER_INCH } from '../units/unitSystem.ts';
 import { type CsvCell, csvText } from './csv.ts';
 import type { RowVerdict, ScheduleRow } from './model.ts';
 import { overrideWords } from './overrideWords.ts';
@@ -117,9 +118,6 @@ function verdictColumns(name: string, verdictOf: (row: ScheduleRow) => RowVerdic
     },
   ];
 }
-
-const MM_PER_INCH = 25.4;
-const KG_PER_POUND = 0.45359237;
 
 function rounded(value: number, decimals: number): number {
   return Number(value.toFixed(decimals));

@@ -1,6 +1,8 @@
 import type { UnitSystem } from '../project/model.ts';
 import { AXES } from '../section/model.ts';
-import { figure } from './figures.ts';
+import { grouped } from '../units/figures.ts';
+import { showSlenderness } from '../units/quantity.ts';
+import { KG_PER_POUND } from '../units/unitSystem.ts';
 import type { RowVerdict, ScheduleRow } from './model.ts';
 import { type TextColumn, textTable } from './textTable.ts';
 
@@ -56,22 +58,22 @@ function cellsOf(row: ScheduleRow, units: UnitSystem): readonly string[] {
     row.massEach === null ? ABSENT : mass(row.massEach, units),
     ...AXES.map((axis) => (unbraced === null ? ABSENT : length(unbraced[axis], units))),
     governing === null ? ABSENT : axisCell(governing),
-    governing === null ? ABSENT : figure(governing.slenderness, 0),
-    figure(row.limit, 0),
+    governing === null ? ABSENT : showSlenderness(governing.slenderness, row.limit),
+    showSlenderness(row.limit),
     verdictCell(row.inService),
     verdictCell(row.handling),
   ];
 }
 
 function axisCell({ axis, angle, basis }: NonNullable<ScheduleRow['governing']>): string {
-  const name = axis === 'free' ? `free, ${figure(angle ?? 0, 0)}°` : axis;
+  const name = axis === 'free' ? `free, ${grouped(angle ?? 0, 0)}°` : axis;
   if (basis === 'span') return name;
   return basis === 'override' ? `${name}, by hand` : `${name}, bound`;
 }
 
 function verdictCell(verdict: RowVerdict | null): string {
   if (verdict === null) return 'not assessed';
-  const said = `${figure(verdict.slenderness, 0)} ${verdict.ok ? 'within' : 'OVER'}`;
+  const said = `${showSlenderness(verdict.slenderness, verdict.limit)} ${verdict.ok ? 'within' : 'OVER'}`;
   return verdict.asked ? said : `(${said})`;
 }
 
@@ -84,12 +86,11 @@ function findingLines(rows: readonly ScheduleRow[]): readonly string[] {
 }
 
 const MM_PER_FOOT = 304.8;
-const KG_PER_POUND = 0.45359237;
 
 function length(mm: number, units: UnitSystem): string {
-  return figure(units === 'us' ? mm / MM_PER_FOOT : mm / 1000, 2);
+  return grouped(units === 'us' ? mm / MM_PER_FOOT : mm / 1000, 2);
 }
 
 function mass(kg: number, units: UnitSystem): string {
-  return figure(units === 'us' ? kg / KG_PER_POUND : kg, 1);
+  return grouped(units === 'us' ? kg / KG_PER_POUND : kg, 1);
 }

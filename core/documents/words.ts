@@ -10,8 +10,11 @@ import type {
   Station,
   TrailStep,
 } from '../restraint/model.ts';
-import { figure, slendernessWorking, spokenLength } from './figures.ts';
+import { grouped } from '../units/figures.ts';
+import { showLength } from '../units/quantity.ts';
 import { listed } from './listed.ts';
+import { factorText } from './overrideWords.ts';
+import { slendernessWorking } from './working.ts';
 
 /** What a join is called. */
 export const JOIN_NAMES: Readonly<Record<JoinKind, string>> = {
@@ -123,19 +126,19 @@ function overrideSentence(bar: Bar, restraint: Restraint, units: UnitSystem): st
   const lane = governing.axis === 'free' ? null : restraint.lanes[governing.axis];
   const override = lane?.override ?? null;
   if (lane === null || override === null) return `${bar.mark} takes a length set by hand: ${working}.`;
-  const found = spokenLength(lane.found, units);
-  const factor = override.factor === 1 ? '' : ` times ${figure(override.factor, 2)}`;
+  const found = showLength(lane.found, units, 'spoken');
+  const factor = override.factor === 1 ? '' : ` times ${factorText(override.factor)}`;
   const taken =
     override.length === null
       ? `the ${found} found from the marks${factor}`
-      : `${spokenLength(override.length, units)}${factor}, set by hand, in place of the ${found} found from the marks`;
+      : `${showLength(override.length, units, 'spoken')}${factor}, set by hand, in place of the ${found} found from the marks`;
   return `About ${lane.axis}, ${bar.mark} takes ${taken}; reason given: “${override.reason}”. ${working}.`;
 }
 
 function boundSentence(bar: Bar, restraint: Restraint, units: UnitSystem): string {
   const { governing, bound } = restraint;
   const working = slendernessWorking(governing.length, governing.radius, governing.slenderness, units);
-  const length = spokenLength(governing.length, units);
+  const length = showLength(governing.length, units, 'spoken');
   const how =
     bound?.route === 'b'
       ? `each of two ways counted alone, the longest gap of ${length} over the least radius`
@@ -206,12 +209,12 @@ function endNames({ from, to }: Governing, stations: readonly Station[]): string
 }
 
 function spanName(bar: Bar, governing: Governing, stations: readonly Station[], units: UnitSystem): string {
-  const length = spokenLength(governing.length, units);
+  const length = showLength(governing.length, units, 'spoken');
   return isWhole(bar, governing) ? `all ${length}` : `the ${length} between ${endNames(governing, stations)}`;
 }
 
 function aboutAxis({ axis, angle, freeDirection }: Governing): string {
-  if (axis === 'free') return `about an axis ${figure(angle ?? 0, 0)}° from x, which is none of the four`;
+  if (axis === 'free') return `about an axis ${grouped(angle ?? 0, 0)}° from x, which is none of the four`;
   return freeDirection === null && axis === 'v' ? 'about v, the axis of least radius' : `about ${axis}`;
 }
 
