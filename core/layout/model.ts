@@ -54,9 +54,15 @@ export interface Node {
   readonly id: string;
   readonly at: Vec3;
   readonly label: string;
-  /** Why this node is taken as held in place, or null when the bracing must hold it. */
-  readonly support: string | null;
+  /** For each bay that takes this node as held in place: why it does. Of the others the bracing must hold it. */
+  readonly supports: Readonly<Record<string, NodeSupport>>;
 }
+
+export type NodeSupport =
+  | { readonly kind: 'foundation' }
+  /** The eaves of a roof bay: held if the bays below hold this node; vouched for if there are none. */
+  | { readonly kind: 'eaves' }
+  | { readonly kind: 'vouched' };
 
 export interface Bar {
   readonly id: BarId;

@@ -1,17 +1,7 @@
 /** Changes to a project as plain data: the store, the remedies and undo all speak this one language. */
 
 import type { OwnAngle } from '../catalogue/model.ts';
-import type {
-  BarMark,
-  Bay,
-  DiagonalSpec,
-  Join,
-  LineHolder,
-  Place,
-  Project,
-  Recipe,
-  Settings,
-} from './model.ts';
+import type { BarMark, Bay, DiagonalSpec, Join, LineHolder, Place, Recipe, Settings } from './model.ts';
 
 export type Edit =
   | { readonly kind: 'name project'; readonly name: string }

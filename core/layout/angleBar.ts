@@ -1,0 +1,78 @@
+import type { Stock, StockAngle } from '../catalogue/model.ts';
+import { dot, type Vec3 } from '../geometry/vector.ts';
+import type { BarMark, Bay, DiagonalSpec, EndConnection } from '../project/model.ts';
+import { usualGauge } from '../section/gauge.ts';
+import type { Placement, Plane } from './model.ts';
+import { placementOf } from './placement.ts';
+import type { SketchBar } from './sketch.ts';
+
+/** A bar of angle before its crossings are known. */
+export interface AngleDraft {
+  readonly spec: DiagonalSpec;
+  readonly mark: BarMark;
+  readonly side: 'near' | 'far';
+  readonly ends: { readonly i: EndConnection; readonly j: EndConnection };
+  readonly stock: StockAngle | null;
+  readonly nearest: readonly string[];
+  readonly inclination: number;
+  readonly placement: Placement;
+}
+
+const NO_MARK: BarMark = {};
+/** Gauge to draw with while the section is unknown, mm. */
+const UNKNOWN_GAUGE = 40;
+
+/** The bay's diagonals with the bar's own marks laid over, its section looked up and put in place. */
+export function angleDraft(
+  bay: Bay,
+  sketch: SketchBar,
+  direction: Vec3,
+  plane: Plane,
+  stock: Stock,
+): AngleDraft {
+  const mark = bay.bars[sketch.key] ?? NO_MARK;
+  const base = bay.diagonals;
+  const spec: DiagonalSpec = {
+    ...base,
+    section: mark.section ?? base.section,
+    grade: mark.grade ?? base.grade,
+    countedOn: mark.countedOn ?? base.countedOn,
+    legInPlane: mark.legInPlane ?? base.legInPlane,
+    heel: mark.heel ?? base.heel,
+  };
+  const side = mark.side ?? (base.arrangement === 'opposite' ? sketch.face.opposite : sketch.face.sameSide);
+  const found = stock.find(spec.section);
+  const angle = found.ok ? found.angle : null;
+  const ends = {
+    i: mark.endI ? { ...base.ends, ...mark.endI } : base.ends,
+    j: mark.endJ ? { ...base.ends, ...mark.endJ } : base.ends,
+  };
+  return {
+    spec,
+    mark,
+    side,
+    ends,
+    stock: angle,
+    nearest: found.ok ? [] : found.nearest,
+    inclination: (Math.acos(Math.min(1, Math.abs(dot(direction, plane.right)))) * 180) / Math.PI,
+    placement: placementOf({
+      direction,
+      plane,
+      spec,
+      side,
+      roll: mark.roll ?? 0,
+      gauge: ends.i.gauge ?? (angle ? gaugeOf(angle, spec.legInPlane) : UNKNOWN_GAUGE),
+    }),
+  };
+}
+
+export function legInPlaneOf(angle: StockAngle, legInPlane: DiagonalSpec['legInPlane']): number {
+  return legInPlane === 'longer' ? angle.outline.longLeg : angle.outline.shortLeg;
+}
+
+export function standingLegOf(angle: StockAngle, legInPlane: DiagonalSpec['legInPlane']): number {
+  return legInPlane === 'longer' ? angle.outline.shortLeg : angle.outline.longLeg;
+}
+
+const gaugeOf = (angle: StockAngle, legInPlane: DiagonalSpec['legInPlane']): number =>
+  usualGauge(legInPlaneOf(angle, legInPlane), angle.catalogue === 'us' ? 'us' : 'metric').gauge;

@@ -1,0 +1,82 @@
+import type { AngleBar, Bar, BarId, BayLayout, Crossing, Layout } from '../layout/model.ts';
+import type { Settings } from '../project/model.ts';
+import type { Axis, SectionProperties } from '../section/model.ts';
+import type { ClaimContext } from './claims.ts';
+import { governingOf } from './governing.ts';
+import { holdingsOf } from './heldNodes.ts';
+import { laneOf } from './lanes.ts';
+import type { Lane, Restraint } from './model.ts';
+import { freeDirectionRule } from './rule.ts';
+import { nodeLiesOn, stationsOf } from './stations.ts';
+
+/** Everything about holds that is the same for all bars of a layout: worked out once. */
+export interface RestraintContext extends ClaimContext {
+  readonly crossingsOf: ReadonlyMap<BarId, readonly Crossing[]>;
+  /** Bars that end on another bar between its ends. */
+  readonly endingOn: ReadonlyMap<BarId, readonly Bar[]>;
+}
+
+export function restraintContext(layout: Layout): RestraintContext {
+  const crossingsOf = new Map<BarId, Crossing[]>();
+  for (const crossing of layout.crossings.values())
+    for (const bar of [crossing.a, crossing.b]) {
+      const list = crossingsOf.get(bar);
+      if (list) list.push(crossing);
+      else crossingsOf.set(bar, [crossing]);
+    }
+  const endingOn = new Map(
+    layout.bays.filter((bay) => bay.kind === 'free').flatMap((bay) => endings(bay, layout)),
+  );
+  return { layout, holdings: holdingsOf(layout), crossingsOf, endingOn };
+}
+
+/** Only a bay drawn freely can have a bar that ends in the middle of a diagonal. */
+function endings(bay: BayLayout, layout: Layout): readonly (readonly [BarId, readonly Bar[]])[] {
+  const bars = bay.bars.flatMap((id) => layout.bars.get(id) ?? []);
+  const byNode = new Map<string, Bar[]>();
+  for (const bar of bars)
+    for (const node of [bar.i, bar.j]) {
+      const list = byNode.get(node);
+      if (list) list.push(bar);
+      else byNode.set(node, [bar]);
+    }
+  return bay.diagonals.flatMap((id) => {
+    const bar = layout.bars.get(id);
+    if (!bar) return [];
+    const touching = bay.nodes
+      .filter((node) => nodeLiesOn(layout, node, bar))
+      .flatMap((node) => byNode.get(node) ?? []);
+    return touching.length > 0 ? [[id, touching] as const] : [];
+  });
+}
+
+/** The bar with its own section, as it lies. Null while its section is not in stock. */
+export function restraintOf(
+  context: RestraintContext,
+  bar: Bar,
+  basis: Settings['lengthBasis'],
+): Restraint | null {
+  const { angle } = bar;
+  if (!angle?.stock) return null;
+  return restraintInPlace(context, bar, angle, angle.stock.properties, basis);
+}
+
+/** The bar with any section in any placement: what the shortlist tries. */
+export function restraintInPlace(
+  context: RestraintContext,
+  bar: Bar,
+  angle: AngleBar,
+  section: SectionProperties,
+  basis: Settings['lengthBasis'],
+): Restraint | null {
+  const crossings = context.crossingsOf.get(bar.id) ?? [];
+  const stations = stationsOf(context, bar, angle, crossings, context.endingOn.get(bar.id) ?? [], basis);
+  const [first, last] = [stations[0], stations.at(-1)];
+  if (!first || !last || last.at <= first.at) return null;
+  const overrides = angle.mark.overrides ?? [];
+  const lane = (axis: Axis): Lane => laneOf(axis, section, stations, overrides);
+  const lanes: Readonly<Record<Axis, Lane>> = { x: lane('x'), y: lane('y'), u: lane('u'), v: lane('v') };
+  const rule = freeDirectionRule(section, stations);
+  const governing = governingOf(section, rule, lanes, bar.length);
+  return { bar: bar.id, stations, lanes, spans: rule.spans, bound: rule.bound, governing };
+}
