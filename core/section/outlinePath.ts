@@ -11,16 +11,19 @@ import type { AngleOutline } from './model.ts';
 export function outlinePath(outline: AngleOutline): readonly Segment[] {
   const { shortLeg: b, longLeg: h, thickness: t, rootRadius: r1, toeRadius: r2 } = outline;
   const quarter = Math.PI / 2;
+  // A toe radius above the thickness, as in thin Australian angles, meets the outer face at a slant; the leg keeps its length.
+  const slant = r2 > t ? Math.asin((r2 - t) / r2) : 0;
+  const reach = r2 * Math.cos(slant);
   const pieces: readonly Segment[] = [
     line([0, 0], [b, 0]),
-    line([b, 0], [b, t - r2]),
-    arc([b - r2, t - r2], r2, 0, quarter),
-    line([b - r2, t], [t + r1, t]),
+    line([b, 0], [b, Math.max(0, t - r2)]),
+    arc([b - reach, t - r2], r2, slant, quarter - slant),
+    line([b - reach, t], [t + r1, t]),
     // The fillet is hollow: it is walked clockwise.
     arc([t + r1, t + r1], r1, -quarter, -quarter),
-    line([t, t + r1], [t, h - r2]),
-    arc([t - r2, h - r2], r2, 0, quarter),
-    line([t - r2, h], [0, h]),
+    line([t, t + r1], [t, h - reach]),
+    arc([t - r2, h - reach], r2, 0, quarter - slant),
+    line([Math.max(0, t - r2), h], [0, h]),
     line([0, h], [0, 0]),
   ];
   return pieces.filter((piece) => !isEmpty(piece));
@@ -47,11 +50,10 @@ function line(from: Vec2, to: Vec2): Segment {
   return { kind: 'line', from, to };
 }
 
-/** A quarter circle whose ends lie due along the axes from its centre. */
 function arc(centre: Vec2, radius: number, start: number, sweep: number): Segment {
   const at = (turn: number): Vec2 => [
-    centre[0] + radius * Math.round(Math.cos(turn)),
-    centre[1] + radius * Math.round(Math.sin(turn)),
+    centre[0] + radius * Math.cos(turn),
+    centre[1] + radius * Math.sin(turn),
   ];
   return { kind: 'arc', from: at(start), to: at(start + sweep), centre, radius, start, sweep };
 }

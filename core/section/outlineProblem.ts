@@ -8,7 +8,10 @@ export type OutlineProblem =
   | { readonly kind: 'toe rounder than thick'; readonly toeRadius: number; readonly thickness: number }
   | { readonly kind: 'radii overlap'; readonly shortLeg: number; readonly needed: number };
 
-/** What is wrong with an outline, or null. Legs and thickness must be above zero, radii zero or more. */
+/**
+ * What is wrong with an outline, or null. Legs and thickness must be above zero, radii zero or more.
+ * A toe radius may pass the thickness (thin Australian angles: 5 on 4.6 mm), but not twice the thickness, which no rolled toe has.
+ */
 export function outlineProblem(outline: AngleOutline): OutlineProblem | null {
   const { longLeg, shortLeg, thickness, rootRadius, toeRadius } = outline;
   for (const which of ['longLeg', 'shortLeg', 'thickness'] as const)
@@ -19,7 +22,7 @@ export function outlineProblem(outline: AngleOutline): OutlineProblem | null {
       return { kind: 'not a size', which, value: outline[which] };
   if (shortLeg > longLeg) return { kind: 'legs swapped', longLeg, shortLeg };
   if (thickness >= shortLeg) return { kind: 'too thick', thickness, shortLeg };
-  if (toeRadius > thickness) return { kind: 'toe rounder than thick', toeRadius, thickness };
+  if (toeRadius > 2 * thickness) return { kind: 'toe rounder than thick', toeRadius, thickness };
   const needed = thickness + rootRadius + toeRadius;
   return needed > shortLeg ? { kind: 'radii overlap', shortLeg, needed } : null;
 }
@@ -42,7 +45,7 @@ export function outlineProblemText(problem: OutlineProblem): string {
     case 'too thick':
       return `a thickness of ${problem.thickness} mm leaves nothing of the ${problem.shortLeg} mm leg; check thickness and leg`;
     case 'toe rounder than thick':
-      return `the toe radius (${problem.toeRadius} mm) is more than the thickness (${problem.thickness} mm); check the radius`;
+      return `the toe radius (${problem.toeRadius} mm) is more than twice the thickness (${problem.thickness} mm); check the radius`;
     case 'radii overlap':
       return `thickness and radii take ${problem.needed} mm of a ${problem.shortLeg} mm leg; check the radii`;
     default:

@@ -9,7 +9,9 @@ export function tapeInches(inches: number, parts: number): string {
 export function feetAndInches(mm: number, parts: number): string {
   const count = Math.round((Math.abs(mm) / MM_PER_INCH) * parts);
   const feet = Math.floor(count / (12 * parts));
-  const rest = countOnTape(count - feet * 12 * parts, parts);
+  const inches = countOnTape(count - feet * 12 * parts, parts);
+  // After feet a bare fraction gets its nought, so that the hyphen cannot be taken for a minus: 24'-0 3/8".
+  const rest = feet > 0 && /^\d+\//.test(inches) ? `0 ${inches}` : inches;
   const sign = mm < 0 && count > 0 ? '−' : '';
   return feet === 0 ? `${sign}${rest}"` : `${sign}${feet}'-${rest}"`;
 }

@@ -13,6 +13,9 @@ export type ParsedLength =
 
 const PER_METRIC_UNIT: Readonly<Record<string, number>> = { mm: 1, cm: 10, m: 1000 };
 
+/** Read lengths are kept to a millionth of a mm, so that 3 1/2" is 88.9 and not 88.89999999999999. */
+const PER_MM = 1e6;
+
 const NUMBER = String.raw`\d+(?:\.\d*)?|\.\d+`;
 const INCHES = String.raw`(?:(\d+)[ -]+)?(\d+)\/(\d+)|(${NUMBER})`;
 const METRIC = new RegExp(`^(${NUMBER}) ?(mm|cm|m)$`);
@@ -36,8 +39,11 @@ export function parseLength(typed: string, units: UnitSystem): ParsedLength {
   const minus = whole.startsWith('-');
   const text = whole.replace(/^[-+] ?/, '').replace(/(\d),(\d)/g, '$1.$2');
   const mm = positiveLength(text, units);
-  if (mm !== null)
-    return Number.isFinite(mm) ? { ok: true, mm: minus ? -mm : mm } : refuse({ kind: 'not a length', typed });
+  if (mm !== null) {
+    if (!Number.isFinite(mm)) return refuse({ kind: 'not a length', typed });
+    const clean = Math.round(mm * PER_MM) / PER_MM;
+    return { ok: true, mm: minus ? -clean : clean };
+  }
   const unit = /^(?:\d+(?:\.\d*)?|\.\d+) ?([a-z°µ]+)$/.exec(text)?.[1];
   return refuse(unit === undefined ? { kind: 'not a length', typed } : { kind: 'unknown unit', typed, unit });
 }
