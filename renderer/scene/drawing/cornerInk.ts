@@ -1,0 +1,89 @@
+import type { Vec2, Vec3 } from '../../../core/geometry/vector.ts';
+import type { UnitSystem } from '../../../core/project/model.ts';
+import type { SheetView } from '../view/sheetView.ts';
+import { from, heading, type Ink, line, polyline } from './ink.ts';
+
+const AXES: readonly (readonly [string, Vec3])[] = [
+  ['X', [1, 0, 0]],
+  ['Y', [0, 1, 0]],
+  ['Z', [0, 0, 1]],
+];
+
+/** Length of a triad arm seen square on, px. */
+const ARM = 26;
+
+/** The directions X, Y and Z of the project, in the lower left corner. */
+export function triadInk(view: SheetView): readonly Ink[] {
+  const foot: Vec2 = [36, view.height - 34];
+  const ink: Ink[] = [{ kind: 'ring', key: 'triad foot', look: 'scene-solid', at: foot, radius: 2.2 }];
+  for (const [name, axis] of AXES) {
+    // Directions alone: the scale of the view has no say in the triad.
+    const run: Vec2 = [
+      axis[0] * view.right[0] + axis[1] * view.right[1] + axis[2] * view.right[2],
+      -(axis[0] * view.up[0] + axis[1] * view.up[1] + axis[2] * view.up[2]),
+    ];
+    const way = heading(run, 0.08);
+    if (way === null) continue;
+    const tip = from(foot, run, ARM);
+    const label = from(tip, way, 8);
+    ink.push({ kind: 'path', key: `triad ${name}`, look: 'scene-triad', d: line(foot, tip) });
+    ink.push({
+      kind: 'words',
+      key: `triad ${name} name`,
+      look: 'scene-words',
+      at: [label[0], label[1] + 4],
+      anchor: 'middle',
+      text: name,
+    });
+  }
+  return ink;
+}
+
+const MM_PER_FOOT = 304.8;
+/** Lengths that a scale may show, in metres or feet. */
+const STEPS = [0.1, 0.2, 0.5, 1, 2, 5, 10, 20, 50, 100, 200, 500, 1000];
+
+/**
+ * A scale of two parts in the lower left corner. It measures what lies square to the view; where uprights are foreshortened it measures
+ * those instead and says so, as they are what one reads off an axonometric.
+ */
+export function scaleInk(view: SheetView, units: UnitSystem): readonly Ink[] {
+  const upright = view.up[2];
+  const foreshortened = upright > 0.3 && upright < 0.9998;
+  const pxPerUnit = view.pxPerMm * (foreshortened ? upright : 1) * (units === 'us' ? MM_PER_FOOT : 1000);
+  const step = STEPS.find((one) => one * pxPerUnit >= 36);
+  if (step === undefined || view.width < 420) return [];
+  const left = 96;
+  const y = view.height - 24;
+  const part = step * pxPerUnit;
+  const unit = `${units === 'us' ? 'ft' : 'm'}${foreshortened ? ' upright' : ''}`;
+  const figure = (parts: number, text: string, key: string): Ink => ({
+    kind: 'words',
+    key,
+    look: 'scene-words quiet',
+    at: [left + parts * part, y + 16],
+    anchor: parts === 2 ? 'start' : 'middle',
+    text,
+  });
+  const box = (start: number): string =>
+    polyline(
+      [
+        [left + start * part, y - 4],
+        [left + (start + 1) * part, y - 4],
+        [left + (start + 1) * part, y],
+        [left + start * part, y],
+      ],
+      true,
+    );
+  return [
+    { kind: 'path', key: 'scale filled', look: 'scene-scale filled', d: box(0) },
+    { kind: 'path', key: 'scale open', look: 'scene-scale', d: box(1) },
+    figure(0, '0', 'scale 0'),
+    figure(1, shown(step), 'scale 1'),
+    figure(2, `${shown(2 * step)} ${unit}`, 'scale 2'),
+  ];
+}
+
+function shown(value: number): string {
+  return String(Math.round(value * 10) / 10);
+}

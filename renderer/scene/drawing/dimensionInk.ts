@@ -1,0 +1,44 @@
+import type { Vec2 } from '../../../core/geometry/vector.ts';
+import type { BayLayout } from '../../../core/layout/model.ts';
+import type { UnitSystem } from '../../../core/project/model.ts';
+import { showLength } from '../../../core/units/quantity.ts';
+import { directionOnSheet, onSheet, type SheetView } from '../view/sheetView.ts';
+import { from, heading, type Ink, line, minus, plus, span, times } from './ink.ts';
+
+/** How far a dimension line stands off the steel, and how far its witness lines begin from the steel and run past it, px. */
+const STAND_OFF = 58;
+const GAP = 10;
+const PAST = 6;
+/** Half a tick, px. */
+const TICK = 4;
+/** From the dimension line to the middle of its figure, px. */
+const FIGURE_OFF = 11;
+
+/** Set-out dimensions beside the bay. A dimension seen nearly end on, or whose stand-off is, is left out. */
+export function dimensionInk(view: SheetView, bay: BayLayout, units: UnitSystem): readonly Ink[] {
+  return bay.dimensions.flatMap((dimension, index): readonly Ink[] => {
+    const out = heading(directionOnSheet(view, dimension.away), 0.25 * view.pxPerMm);
+    const a = onSheet(view, dimension.from);
+    const b = onSheet(view, dimension.to);
+    const text = showLength(dimension.value, units, 'bare');
+    if (out === null || span(minus(b, a)) < 6 * text.length + 8) return [];
+    const p = from(a, out, STAND_OFF);
+    const q = from(b, out, STAND_OFF);
+    const key = `dimension ${index}`;
+    const witness = (end: Vec2): string => line(from(end, out, GAP), from(end, out, STAND_OFF + PAST));
+    const middle = times(plus(p, q), 0.5);
+    const anchor = out[0] < -0.5 ? 'end' : out[0] > 0.5 ? 'start' : 'middle';
+    // Words hang from their base line: four px put their middle where it is wanted.
+    const at = plus(from(middle, out, anchor === 'middle' ? FIGURE_OFF + 4 : FIGURE_OFF - 2), [0, 4]);
+    return [
+      { kind: 'path', key: `${key} witness`, look: 'scene-witness', d: witness(a) + witness(b) },
+      { kind: 'path', key: `${key} line`, look: 'scene-dimension', d: line(p, q) },
+      { kind: 'path', key: `${key} ticks`, look: 'scene-tick-mark', d: tick(p) + tick(q) },
+      { kind: 'words', key: `${key} figure`, look: 'scene-words quiet', at, anchor, text },
+    ];
+  });
+}
+
+function tick([x, y]: Vec2): string {
+  return line([x - TICK, y + TICK], [x + TICK, y - TICK]);
+}
