@@ -58,7 +58,7 @@ function numbersIn(text: string): readonly number[] | null {
     .replace(/\s*(?:EA|UA|L)$/, '')
     .trim();
   const sizes = body.split(/\s*X\s*/).map(sizeOf);
-  const numbers = sizes.filter((size) => size !== null && size > 0);
+  const numbers = sizes.filter((size): size is number => size !== null && size > 0);
   return numbers.length === sizes.length ? numbers : null;
 }
 
