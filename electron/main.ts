@@ -1,8 +1,7 @@
 /** The desktop's main process: one window, one project at a time. */
 import path from 'node:path';
-import { app, type BrowserWindow, ipcMain, Menu, protocol, session } from 'electron';
+import { app, type BrowserWindow, dialog, ipcMain, Menu, protocol, session } from 'electron';
 import example from '../assets/examples/marrow-lane.json' with { type: 'json' };
-import { CAUTIONS } from '../core/documents/cautions.ts';
 import type { HostCommand, OpenedFile } from '../renderer/host/host.ts';
 import { COMMAND_CHANNEL } from './channels.ts';
 import { claimAppScheme, serveApp, WINDOW_ADDRESS } from './desktop/appScheme.ts';
@@ -27,11 +26,10 @@ const EXAMPLE: OpenedFile = {
 };
 
 app.setName('Tautline');
-app.setAboutPanelOptions({ applicationName: 'Tautline', copyright: CAUTIONS.join('\n') });
 claimAppScheme(protocol);
 
 // A second start hands its file to the first one and ends.
-if (app.requestSingleInstanceLock()) void run(givenFile(process.argv, PROGRAM, process.cwd()));
+if (app.requestSingleInstanceLock()) run(givenFile(process.argv, PROGRAM, process.cwd())).catch(giveUp);
 else app.quit();
 
 async function run(named: string | null): Promise<void> {
@@ -62,7 +60,7 @@ async function run(named: string | null): Promise<void> {
     ask: () => send('close'),
     async putAway() {
       await keepWindowPlace(window, kept('window.json'));
-      await recovery.forget();
+      await recovery.forgetOwn();
     },
   });
   offerReloadAfterCrash(window);
@@ -111,6 +109,11 @@ async function run(named: string | null): Promise<void> {
     });
     Menu.setApplicationMenu(Menu.buildFromTemplate(template));
   }
+}
+
+function giveUp(reason: unknown): void {
+  dialog.showErrorBox('Tautline cannot start', reason instanceof Error ? reason.message : String(reason));
+  app.exit(1);
 }
 
 function showDocument(window: BrowserWindow, title: string, dirty: boolean): void {

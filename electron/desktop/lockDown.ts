@@ -15,10 +15,13 @@ export const SANDBOXED = {
 /** Schemes that Tautline's pages and the developer tools are made of; everything else would be the network. */
 const OWN_SCHEMES = new Set(['app:', 'data:', 'blob:', 'devtools:', 'chrome-extension:']);
 
-/** No permission is ever granted, no device shown, nothing fetched from the network. */
+/** The one thing a page may ask for: to put text on the clipboard, as when the schedule is copied. Reading it is not granted. */
+const GRANTED = 'clipboard-sanitized-write';
+
+/** Beyond `GRANTED` no permission is given, no device shown, nothing fetched from the network. */
 export function lockDownSession(session: Session): void {
-  session.setPermissionRequestHandler((_contents, _permission, decide) => decide(false));
-  session.setPermissionCheckHandler(() => false);
+  session.setPermissionRequestHandler((_contents, permission, decide) => decide(permission === GRANTED));
+  session.setPermissionCheckHandler((_contents, permission) => permission === GRANTED);
   session.setDevicePermissionHandler(() => false);
   session.webRequest.onBeforeRequest((request, decide) => {
     decide({ cancel: !(URL.canParse(request.url) && OWN_SCHEMES.has(new URL(request.url).protocol)) });

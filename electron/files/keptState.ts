@@ -1,4 +1,5 @@
-import { readFile } from 'node:fs/promises';
+import { mkdir, readFile } from 'node:fs/promises';
+import path from 'node:path';
 import type { z } from 'zod';
 import { replaceFile } from './replaceFile.ts';
 
@@ -13,5 +14,6 @@ export async function readKept<T>(file: string, shape: z.ZodType<T>): Promise<T 
 }
 
 export async function writeKept(file: string, state: unknown): Promise<void> {
+  await mkdir(path.dirname(file), { recursive: true });
   await replaceFile(file, `${JSON.stringify(state, null, 2)}\n`);
 }

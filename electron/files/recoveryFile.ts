@@ -27,13 +27,21 @@ export interface RecoveryFile {
   read(): Promise<RecoveryRecord | null>;
   keep(record: RecoveryRecord): Promise<void>;
   forget(): Promise<void>;
+  /** Forgets what this session kept. A copy left by an earlier one stays: the user may not have been asked about it yet. */
+  forgetOwn(): Promise<void>;
 }
 
 export function recoveryFile(file: string): RecoveryFile {
   const oneAtATime = inTurn();
+  let own = false;
+  const forget = () => oneAtATime(() => rm(file, { force: true }));
   return {
     read: () => oneAtATime(() => readKept(file, recordShape)),
-    keep: (record) => oneAtATime(() => writeKept(file, record)),
-    forget: () => oneAtATime(() => rm(file, { force: true })),
+    keep(record) {
+      own = true;
+      return oneAtATime(() => writeKept(file, record));
+    },
+    forget,
+    forgetOwn: async () => (own ? await forget() : undefined),
   };
 }
