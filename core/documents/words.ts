@@ -1,4 +1,5 @@
 /** The words that every document and screen uses for joins, statuses and reasons. Chosen here once. */
+import type { CatalogueId } from '../catalogue/model.ts';
 import type { Bar, Crossing, Layout } from '../layout/model.ts';
 import type { Join, JoinKind, UnitSystem } from '../project/model.ts';
 import type {
@@ -27,6 +28,12 @@ export const JOIN_NAMES: Readonly<Record<JoinKind, string>> = {
   hung: 'hung, sag only',
 };
 
+/** The same for what a claim stands on, which may also be an end of the bar or another bar that ends on it. */
+export function joinKindName(join: Claim['join']): string {
+  if (join === 'end') return 'end connection';
+  return join === 'bar end' ? 'end of another bar' : JOIN_NAMES[join];
+}
+
 export const UNMARKED = 'unmarked, taken as not joined';
 
 /** The name of a crossing's join; "unmarked…" where the user has marked nothing. */
@@ -54,6 +61,12 @@ export const DIRECTION_NAMES: Readonly<Record<HoldDirection, string>> = {
   'out of plane': 'out of the plane',
   'along holder': 'along the holder',
   twist: 'twist',
+};
+
+export const CATALOGUE_NAMES: Readonly<Record<CatalogueId, string>> = {
+  en: 'EN 10056-1',
+  us: 'ASTM A6 (US)',
+  au: 'AS/NZS 3679.1',
 };
 
 /** Why a hold counts or does not, as one sentence. Lengths do not occur in it. */
@@ -136,17 +149,30 @@ function overrideSentence(bar: Bar, restraint: Restraint, units: UnitSystem): st
 }
 
 function boundSentence(bar: Bar, restraint: Restraint, units: UnitSystem): string {
-  const { governing, bound } = restraint;
+  const { governing, bound, stations } = restraint;
   const working = slendernessWorking(governing.length, governing.radius, governing.slenderness, units);
   const length = showLength(governing.length, units, 'spoken');
+  const ways = heldWays(stations).map(([way, labels]) => `${way} only at ${listed(labels)}`);
   const how =
     bound?.route === 'b'
-      ? `each of two ways counted alone, the longest gap of ${length} over the least radius`
-      : `the holds of one way alone, so ${length} bows ${aboutAxis(governing)}`;
+      ? `the longest gap that either leaves, ${length}, over the least radius`
+      : `the holds of one way alone, so that ${length} bows ${aboutAxis(governing)}`;
   return (
-    `Some stations hold ${bar.mark} one way and some another, so it can bow both ways at once between them. ` +
+    `${bar.mark} is held ${ways.join(', ')}, so between them it can bow both ways at once. ` +
     `A bound on the safe side is taken, ${how}: ${working}.`
   );
+}
+
+/** The ways in which stations between the ends hold, each with the stations that do. */
+function heldWays(stations: readonly Station[]): readonly (readonly [string, readonly string[]])[] {
+  const byWay = new Map<string, string[]>();
+  for (const { claims, label } of stations.slice(1, -1))
+    for (const { counted, direction } of claims) {
+      if (!counted || direction === 'twist') continue;
+      const way = direction === 'out of plane' ? 'out of the plane' : 'in the plane';
+      byWay.set(way, [...(byWay.get(way) ?? []), label]);
+    }
+  return [...byWay];
 }
 
 function spanSentence(bar: Bar, restraint: Restraint, layout: Layout, units: UnitSystem): string {
@@ -157,7 +183,7 @@ function spanSentence(bar: Bar, restraint: Restraint, layout: Layout, units: Uni
   const claims = inside.flatMap((station) => station.claims).filter(({ direction }) => direction !== 'twist');
   const held = claims.filter(({ counted }) => counted);
   const free = claims.filter((claim) => !claim.counted && bearsOn(claim, governing));
-  const span = `${spanName(bar, governing, stations, units)} bows ${aboutAxis(governing)}`;
+  const span = `${spanName(governing, stations, units)} bows ${aboutAxis(governing)}`;
   const result = `so ${span}: ${slendernessWorking(governing.length, governing.radius, governing.slenderness, units)}.`;
 
   const nameOf = (holder: string): string => layout.bars.get(holder)?.mark ?? holder;
@@ -166,7 +192,9 @@ function spanSentence(bar: Bar, restraint: Restraint, layout: Layout, units: Uni
       `${push.pushed}, ${index === 0 ? bar.mark : 'it'} ${whyItStays(push.claims, nameOf)} and stays. `,
   );
   if (free.length === 0) {
-    const place = isWhole(bar, governing) ? '' : ` between ${endNames(governing, stations)}`;
+    const place = isWhole(governing, stations)
+      ? ' between its ends'
+      : ` between ${endNames(governing, stations)}`;
     const nothing =
       held.length === 0 ? `Nothing holds ${bar.mark}${place}` : 'Nothing holds it the other way';
     return `${stays.join('')}${nothing}, ${result}`;
@@ -196,8 +224,9 @@ function bearsOn(claim: Claim, { freeDirection }: Governing): boolean {
   return Math.abs(claim.vector[0] * freeDirection[0] + claim.vector[1] * freeDirection[1]) >= BEARS;
 }
 
-function isWhole(bar: Bar, { from, to }: Governing): boolean {
-  return from < SAME_PLACE && to > bar.length - SAME_PLACE;
+/** From the first station to the last: from end to end, wherever the ends of the length are taken. */
+function isWhole({ from, to }: Governing, stations: readonly Station[]): boolean {
+  return from < (stations[0]?.at ?? 0) + SAME_PLACE && to > (stations.at(-1)?.at ?? 0) - SAME_PLACE;
 }
 
 function endNames({ from, to }: Governing, stations: readonly Station[]): string {
@@ -208,9 +237,11 @@ function endNames({ from, to }: Governing, stations: readonly Station[]): string
   return `${nameAt(from)} and ${nameAt(to)}`;
 }
 
-function spanName(bar: Bar, governing: Governing, stations: readonly Station[], units: UnitSystem): string {
+function spanName(governing: Governing, stations: readonly Station[], units: UnitSystem): string {
   const length = showLength(governing.length, units, 'spoken');
-  return isWhole(bar, governing) ? `all ${length}` : `the ${length} between ${endNames(governing, stations)}`;
+  return isWhole(governing, stations)
+    ? `all ${length}`
+    : `the ${length} between ${endNames(governing, stations)}`;
 }
 
 function aboutAxis({ axis, angle, freeDirection }: Governing): string {

@@ -1,0 +1,95 @@
+/** What the figures of a report stand on, stated so that a checker can agree or not. */
+import type { Assessment, DiagonalAssessment } from '../../assessment.ts';
+import type { Bar } from '../../layout/model.ts';
+import type { LimitInForce, Practice } from '../../practice/model.ts';
+import type { UnitSystem } from '../../project/model.ts';
+import { showLength, showSlenderness } from '../../units/quantity.ts';
+import { numberedClaims } from '../claimNumbers.ts';
+import { overrideWords } from '../overrideWords.ts';
+import { CATALOGUE_NAMES, DIRECTION_NAMES, joinKindName, reasonText } from '../words.ts';
+
+/** Of the whole project: limits with their clauses, the rules that are taken everywhere, and every holder that the user vouches for. */
+export function projectAssumptions(assessment: Assessment): readonly string[] {
+  const { project, practice } = assessment;
+  const { settings } = project;
+  const limits = new Map([...assessment.diagonals.values()].map(({ limit }) => [limitKey(limit), limit]));
+  return [
+    ...[...limits.values()].map((limit) => limitWords(limit, practice)),
+    askedWords(practice),
+    settings.lengthBasis === 'set-out'
+      ? 'Unbraced lengths run between set-out points.'
+      : 'Unbraced lengths run between the centres of the end connections.',
+    'The end connections hold every way; no fixity of them is counted on.',
+    'No load but their own weight acts on the bars between their stations.',
+    'Every mark on the drawing is built as it stands there, bolts in place and tight, before the bar is relied on.',
+    `Sections are of ${CATALOGUE_NAMES[settings.catalogue]}${project.ownStock.length > 0 ? `, and of the project's own list (${project.ownStock.length} sizes)` : ''}.`,
+    ...vouchedLines(assessment),
+    ...vouchedPoints(assessment),
+  ];
+}
+
+/** Of one diagonal: every hold that was counted between its ends, and every length set by hand. */
+export function diagonalAssumptions(
+  bar: Bar,
+  diagonal: DiagonalAssessment,
+  units: UnitSystem,
+): readonly string[] {
+  const { restraint } = diagonal;
+  if (restraint === null) return [];
+  const claims = numberedClaims(restraint)
+    .filter(({ claim }) => claim.counted)
+    .map(({ number, station, claim }) => {
+      const at = restraint.stations[station]?.at ?? 0;
+      const where = `${showLength(at, units, 'spoken')} from i`;
+      return `Hold ${number}: ${joinKindName(claim.join)} at ${where} holds ${DIRECTION_NAMES[claim.direction]}. ${reasonText(claim.reason)}`;
+    });
+  const overrides = (bar.angle?.mark.overrides ?? []).map(
+    (override) => `Set by hand, about ${overrideWords(override, units)}.`,
+  );
+  return [...claims, ...overrides];
+}
+
+function limitKey({ limit, source, clause, className }: LimitInForce): string {
+  return [limit, source, clause, className].join('|');
+}
+
+export function limitWords(limit: LimitInForce, practice: Practice): string {
+  const figure = showSlenderness(limit.limit);
+  switch (limit.source) {
+    case 'practice': {
+      const standing = limit.standing === 'advice' ? 'advises' : 'asks';
+      return `${practice.name} ${practice.edition} ${standing} L/r ≤ ${figure} for ${limit.className}, ${limit.clause} (${limit.confidence}).`;
+    }
+    case 'own limit':
+      return `L/r ≤ ${figure}, a limit of the project's own in place of that of ${practice.name}.`;
+    case 'own limit, practice gives none':
+      return `L/r ≤ ${figure}, a limit of the project's own: ${practice.name} gives none (${limit.confidence}).`;
+    default:
+      return limit.source satisfies never;
+  }
+}
+
+function askedWords(practice: Practice): string {
+  return practice.asks === 'inService'
+    ? `${practice.name} is read as asking for the slenderness in service; that of handling is for note.`
+    : `${practice.name} is read as asking for the slenderness in handling, over the whole length and the least radius; that in service is for note.`;
+}
+
+function vouchedLines({ layout }: Assessment): readonly string[] {
+  return [...layout.bars.values()].flatMap((bar) =>
+    bar.line?.heldBy.kind === 'vouched'
+      ? [`${bar.bay}: ${bar.mark} is held along itself, as vouched for: “${bar.line.heldBy.reason}”.`]
+      : [],
+  );
+}
+
+/** One statement for each bay, with its vouched points by name. */
+function vouchedPoints({ layout }: Assessment): readonly string[] {
+  return layout.bays.flatMap((bay) => {
+    const labels = bay.nodes.flatMap((id) => {
+      const node = layout.nodes.get(id);
+      return node?.supports[bay.id]?.kind === 'vouched' ? [node.label] : [];
+    });
+    return labels.length > 0 ? [`${bay.id}: held in place by what is not drawn: ${labels.join('; ')}.`] : [];
+  });
+}
