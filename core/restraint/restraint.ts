@@ -5,7 +5,7 @@ import type { ClaimContext } from './claims.ts';
 import { governingOf } from './governing.ts';
 import { holdingsOf } from './heldNodes.ts';
 import { laneOf } from './lanes.ts';
-import type { Lane, Restraint } from './model.ts';
+import type { Lane, Restraint, Station } from './model.ts';
 import { freeDirectionRule } from './rule.ts';
 import { nodeLiesOn, stationsOf } from './stations.ts';
 
@@ -50,7 +50,7 @@ function endings(bay: BayLayout, layout: Layout): readonly (readonly [BarId, rea
   });
 }
 
-/** The bar with its own section, as it lies. Null while its section is not in stock. */
+/** The bar with its own section, as it lies. Null while its section is not in stock, or its ends leave no length. */
 export function restraintOf(
   context: RestraintContext,
   bar: Bar,
@@ -58,21 +58,30 @@ export function restraintOf(
 ): Restraint | null {
   const { angle } = bar;
   if (!angle?.stock) return null;
-  return restraintInPlace(context, bar, angle, angle.stock.properties, basis);
+  const stations = barStations(context, bar, angle, basis);
+  return stations ? restraintWith(bar, angle, stations, angle.stock.properties) : null;
 }
 
-/** The bar with any section in any placement: what the shortlist tries. */
-export function restraintInPlace(
+/** Stations depend on the bar's place and on how its section is turned, not on the section's size. Null when the ends leave no length. */
+export function barStations(
   context: RestraintContext,
   bar: Bar,
   angle: AngleBar,
-  section: SectionProperties,
   basis: Settings['lengthBasis'],
-): Restraint | null {
+): readonly Station[] | null {
   const crossings = context.crossingsOf.get(bar.id) ?? [];
   const stations = stationsOf(context, bar, angle, crossings, context.endingOn.get(bar.id) ?? [], basis);
   const [first, last] = [stations[0], stations.at(-1)];
-  if (!first || !last || last.at <= first.at) return null;
+  return first && last && last.at > first.at ? stations : null;
+}
+
+/** The bar with any section between given stations: what the shortlist tries. */
+export function restraintWith(
+  bar: Bar,
+  angle: AngleBar,
+  stations: readonly Station[],
+  section: SectionProperties,
+): Restraint {
   const overrides = angle.mark.overrides ?? [];
   const lane = (axis: Axis): Lane => laneOf(axis, section, stations, overrides);
   const lanes: Readonly<Record<Axis, Lane>> = { x: lane('x'), y: lane('y'), u: lane('u'), v: lane('v') };

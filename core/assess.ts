@@ -1,0 +1,200 @@
+import type { Assessment, BaySummary, DiagonalAssessment } from './assessment.ts';
+import type { Catalogues } from './catalogue/model.ts';
+import { stockOf } from './catalogue/stock.ts';
+import { scheduleRows } from './documents/schedule.ts';
+import { governingSentence } from './documents/words.ts';
+import { findingsOf } from './findings/findings.ts';
+import type { Finding, Severity } from './findings/model.ts';
+import type { Judged } from './findings/subject.ts';
+import { layOut } from './layout/layOut.ts';
+import type { Bar, BarId, BayLayout, Layout } from './layout/model.ts';
+import { limitInForce } from './practice/limit.ts';
+import type { Practice, Verdict } from './practice/model.ts';
+import { practiceFor } from './practice/practices.ts';
+import type { Pattern, Project } from './project/model.ts';
+import { type RestraintContext, restraintContext, restraintOf } from './restraint/restraint.ts';
+
+/** From this share of the limit on, a bar is near it. */
+const NEAR = 0.85;
+
+/**
+ * The one road from a project to everything that is derived from it: layout, what holds each bar, verdicts, findings, schedule.
+ * Pure and deterministic; the same project and catalogues give the same assessment.
+ */
+export function assess(project: Project, catalogues: Catalogues): Assessment {
+  const practice = practiceFor(project.settings.practice);
+  const stock = stockOf(project.settings.catalogue, project.ownStock, catalogues);
+  const layout = layOut(project, stock);
+  const context = restraintContext(layout);
+  const judged = judgedDiagonals(project, practice, layout, context);
+  const findings = findingsOf({ project, practice, layout, diagonals: judged });
+  const findingIds = idsByBar(findings);
+  const diagonals = new Map(
+    [...judged].map(([id, each]) => [id, assessed(each, layout, project, findingIds.get(id) ?? [])] as const),
+  );
+  return {
+    project,
+    practice,
+    layout,
+    diagonals,
+    findings,
+    schedule: scheduleRows({ project, layout, diagonals, findings }),
+    bays: new Map(
+      layout.bays.map((bay, index) => [bay.id, summaryOf(bay, layout, diagonals, project, index)]),
+    ),
+    counts: countsOf(findings),
+    breaksLimit: findings.some((finding) => finding.breaksLimit),
+  };
+}
+
+function judgedDiagonals(
+  project: Project,
+  practice: Practice,
+  layout: Layout,
+  context: RestraintContext,
+): ReadonlyMap<BarId, Judged> {
+  const judged = new Map<BarId, Judged>();
+  for (const bay of layout.bays)
+    for (const id of bay.diagonals) {
+      const bar = layout.bars.get(id);
+      if (bar) addJudged(judged, bar, project, practice, context);
+    }
+  return judged;
+}
+
+function addJudged(
+  judged: Map<BarId, Judged>,
+  bar: Bar,
+  project: Project,
+  practice: Practice,
+  context: RestraintContext,
+): void {
+  const { angle } = bar;
+  if (!angle) return;
+  const limit = limitInForce(practice, project.settings, angle.spec.countedOn);
+  const steel = angle.cut.total > 0;
+  const restraint = steel ? restraintOf(context, bar, project.settings.lengthBasis) : null;
+  const verdict = (
+    reading: Practice['asks'],
+    length: number,
+    radius: number,
+    slenderness: number,
+  ): Verdict => ({
+    slenderness,
+    length,
+    radius,
+    limit: limit.limit,
+    ok: slenderness <= limit.limit,
+    asked: practice.asks === reading,
+  });
+  const piece = angle.cut.pieces.reduce((most, each) => Math.max(most, each.to - each.from), 0);
+  const least = angle.stock?.properties.rv ?? null;
+  judged.set(bar.id, {
+    bar,
+    angle,
+    restraint,
+    limit,
+    handling: restraint && least ? verdict('handling', piece, least, piece / least) : null,
+    inService: restraint
+      ? verdict(
+          'inService',
+          restraint.governing.length,
+          restraint.governing.radius,
+          restraint.governing.slenderness,
+        )
+      : null,
+  });
+}
+
+function assessed(
+  judged: Judged,
+  layout: Layout,
+  project: Project,
+  findings: readonly string[],
+): DiagonalAssessment {
+  const { bar, restraint, limit, handling, inService } = judged;
+  const asked = [handling, inService].find((verdict) => verdict?.asked) ?? null;
+  const nearness = asked ? asked.slenderness / asked.limit : null;
+  return {
+    bar: bar.id,
+    restraint,
+    limit,
+    handling,
+    inService,
+    nearness,
+    status: nearness === null ? 'unknown' : nearness > 1 ? 'over' : nearness >= NEAR ? 'near' : 'within',
+    reason: restraint
+      ? governingSentence(bar, restraint, layout, project.settings.units)
+      : judged.angle.stock
+        ? `The ends of ${bar.mark} leave no steel between them.`
+        : `${judged.angle.spec.section} is in no stock list, so ${bar.mark} is not assessed.`,
+    findings,
+  };
+}
+
+function idsByBar(findings: readonly Finding[]): ReadonlyMap<BarId, readonly string[]> {
+  const ids = new Map<BarId, string[]>();
+  for (const finding of findings)
+    for (const bar of finding.bars) {
+      const list = ids.get(bar);
+      if (list) list.push(finding.id);
+      else ids.set(bar, [finding.id]);
+    }
+  return ids;
+}
+
+function countsOf(findings: readonly Finding[]): Readonly<Record<Severity, number>> {
+  const counts = { 'must fix': 0, 'look into': 0, note: 0 };
+  for (const finding of findings) counts[finding.severity] += 1;
+  return counts;
+}
+
+function summaryOf(
+  bay: BayLayout,
+  layout: Layout,
+  diagonals: ReadonlyMap<BarId, DiagonalAssessment>,
+  project: Project,
+  index: number,
+): BaySummary {
+  const all = bay.diagonals.flatMap((id) => diagonals.get(id) ?? []);
+  const worst = all.reduce<DiagonalAssessment | null>(
+    (most, each) => ((each.nearness ?? -1) > (most?.nearness ?? -1) ? each : most),
+    null,
+  );
+  const verdict = worst ? [worst.handling, worst.inService].find((each) => each?.asked) : null;
+  return {
+    bay: bay.id,
+    bars: bay.bars.length,
+    diagonals: all.length,
+    worst:
+      worst && verdict ? { bar: worst.bar, slenderness: verdict.slenderness, limit: verdict.limit } : null,
+    mass: bay.diagonals.reduce((sum, id) => sum + (layout.bars.get(id)?.angle?.mass ?? 0), 0) * bay.numberOff,
+    says: inWords(project, index, all.length),
+  };
+}
+
+function inWords(project: Project, index: number, diagonals: number): string {
+  const recipe = project.bays[index]?.recipe;
+  const count = (n: number, one: string) => `${n} ${one}${n === 1 ? '' : 's'}`;
+  const patterns = (all: readonly { readonly pattern: Pattern }[]) => {
+    const different = [...new Set(all.map(({ pattern }) => pattern))];
+    return different.length === 1 ? different[0] : 'mixed';
+  };
+  switch (recipe?.kind) {
+    case 'wall':
+      return `${count(recipe.tiers.length, 'tier')}, ${patterns(recipe.tiers)}`;
+    case 'roof': {
+      const panels = recipe.slopes.flatMap((slope) => slope.panels);
+      const lines = recipe.slopes.reduce((sum, slope) => sum + slope.lines.length, 0);
+      return `${count(panels.length, 'panel')}, ${lines > 0 ? count(lines, 'purlin') : patterns(panels)}`;
+    }
+    case 'knee':
+      return `${count(recipe.count, recipe.sides === 'both' ? 'pair' : 'knee')}, to purlins`;
+    case 'free':
+      return `${count(recipe.bars.length, 'bar')}, ${count(diagonals, 'diagonal')}`;
+    case undefined:
+      return '';
+    default:
+      return recipe satisfies never;
+  }
+}

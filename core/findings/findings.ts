@@ -1,0 +1,22 @@
+import { barFindings } from './bars.ts';
+import { crossingFindings } from './crossings.ts';
+import { holderFindings } from './holders.ts';
+import type { Finding, Severity } from './model.ts';
+import { patternFindings } from './patterns.ts';
+import { slendernessFindings } from './slenderness.ts';
+import type { FindingSubject } from './subject.ts';
+
+const RANK: Readonly<Record<Severity, number>> = { 'must fix': 0, 'look into': 1, note: 2 };
+
+/** All findings, must-fix first, then bay by bay in the order of the project. */
+export function findingsOf(subject: FindingSubject): readonly Finding[] {
+  const order = new Map(subject.layout.bays.map((bay, index) => [bay.id, index]));
+  const place = (finding: Finding) => order.get(finding.bay) ?? 0;
+  return [
+    ...barFindings(subject),
+    ...slendernessFindings(subject),
+    ...crossingFindings(subject),
+    ...holderFindings(subject),
+    ...patternFindings(subject),
+  ].sort((a, b) => RANK[a.severity] - RANK[b.severity] || place(a) - place(b));
+}

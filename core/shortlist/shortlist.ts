@@ -1,0 +1,174 @@
+import type { Catalogues, Stock, StockAngle } from '../catalogue/model.ts';
+import { stockOf } from '../catalogue/stock.ts';
+import type { AngleBar, Bar, BarId, Layout, Placement } from '../layout/model.ts';
+import type { LimitInForce, Practice } from '../practice/model.ts';
+import type { Project } from '../project/model.ts';
+import type { Restraint, Station } from '../restraint/model.ts';
+import { barStations, restraintContext, restraintWith } from '../restraint/restraint.ts';
+import { usualGauge } from '../section/gauge.ts';
+import { AXES, type Axis } from '../section/model.ts';
+import type { Candidate, Shortlist, ShortlistOptions } from './model.ts';
+
+/** What choosing an angle needs to know; an assessment has it and more. */
+export interface ShortlistSubject {
+  readonly project: Project;
+  readonly practice: Practice;
+  readonly layout: Layout;
+  readonly diagonals: ReadonlyMap<BarId, { readonly limit: LimitInForce }>;
+}
+
+type Leg = 'longer' | 'shorter';
+
+interface Seat {
+  readonly bar: Bar;
+  readonly angle: AngleBar;
+  readonly limit: number;
+  /** Longest piece as fabricated, mm. */
+  readonly piece: number;
+  readonly stations: Readonly<Record<Leg, readonly Station[] | null>>;
+}
+
+/**
+ * Every stock angle tried in place for bars that must share a size: ranked by mass, the first that passes, and why each lighter one does not.
+ * Bars that are not in the layout, or have no length, are left out; with none left the list is empty.
+ */
+export function shortlist(
+  subject: ShortlistSubject,
+  catalogues: Catalogues,
+  bars: readonly BarId[],
+  options: ShortlistOptions,
+): Shortlist {
+  const { project } = subject;
+  const stock = stockOf(project.settings.catalogue, project.ownStock, catalogues);
+  const seats = seatsOf(subject, bars);
+  const limit = seats.reduce((least, seat) => Math.min(least, seat.limit), Number.POSITIVE_INFINITY);
+  const candidates = seats.length > 0 ? tried(stock, subject.practice.asks, seats, options) : [];
+  const ranked = candidates.sort((p, q) => p.massPerMetre - q.massPerMetre || p.slenderness - q.slenderness);
+  return {
+    bars: seats.map((seat) => seat.bar.id),
+    limit: Number.isFinite(limit) ? limit : 0,
+    neededRadius: neededRadius(seats),
+    candidates: ranked,
+    first: ranked.find((candidate) => candidate.passes && candidate.fit === null) ?? null,
+    passing: ranked.filter((candidate) => candidate.passes).length,
+  };
+}
+
+function seatsOf(subject: ShortlistSubject, bars: readonly BarId[]): readonly Seat[] {
+  const context = restraintContext(subject.layout);
+  return bars.flatMap((id): Seat[] => {
+    const bar = subject.layout.bars.get(id);
+    const limit = subject.diagonals.get(id)?.limit;
+    if (!bar?.angle || !limit) return [];
+    const { angle } = bar;
+    const basis = subject.project.settings.lengthBasis;
+    const turned = (leg: Leg) => barStations(context, bar, withLeg(angle, leg), basis);
+    const stations = { longer: turned('longer'), shorter: turned('shorter') };
+    if (!stations.longer || !stations.shorter) return [];
+    const piece = angle.cut.pieces.reduce((most, each) => Math.max(most, each.to - each.from), 0);
+    return [{ bar, angle, limit: limit.limit, piece, stations }];
+  });
+}
+
+function withLeg(angle: AngleBar, leg: Leg): AngleBar {
+  if (angle.spec.legInPlane === leg) return angle;
+  const { placement } = angle;
+  const swapped: Placement = { ...placement, x: placement.y, y: placement.x };
+  return { ...angle, spec: { ...angle.spec, legInPlane: leg }, placement: swapped };
+}
+
+type Asks = Practice['asks'];
+
+function tried(stock: Stock, asks: Asks, seats: readonly Seat[], options: ShortlistOptions): Candidate[] {
+  return stock.choices.flatMap((angle) => {
+    const legs = legsToTry(angle, seats, options);
+    return legs.map((leg) => candidateOf(asks, seats, angle, leg));
+  });
+}
+
+/** An equal angle reads the same with either leg in the plane. */
+function legsToTry(angle: StockAngle, seats: readonly Seat[], options: ShortlistOptions): readonly Leg[] {
+  const present = seats[0]?.angle.spec.legInPlane ?? 'longer';
+  if (angle.kind === 'equal' || options.placements === 'as placed') return [present];
+  return ['longer', 'shorter'];
+}
+
+interface Reading {
+  readonly seat: Seat;
+  readonly restraint: Restraint;
+  readonly handling: number;
+  /** Asked slenderness over limit. */
+  readonly share: number;
+}
+
+function candidateOf(asks: Asks, seats: readonly Seat[], angle: StockAngle, leg: Leg): Candidate {
+  const readings = seats.map((seat): Reading => {
+    const restraint = restraintWith(seat.bar, seat.angle, seat.stations[leg] ?? [], angle.properties);
+    const handling = seat.piece / angle.properties.rv;
+    const asked = asks === 'handling' ? handling : restraint.governing.slenderness;
+    return { seat, restraint, handling, share: asked / seat.limit };
+  });
+  const worst = readings.reduce((most, each) => (each.share > most.share ? each : most));
+  const { governing, lanes } = worst.restraint;
+  const slenderness = asks === 'handling' ? worst.handling : governing.slenderness;
+  const passes = worst.share <= 1;
+  const fit = fitOf(angle, leg, worst.seat.angle);
+  return {
+    designation: angle.designation,
+    kind: angle.kind,
+    legInPlane: leg,
+    massPerMetre: angle.massPerMetre,
+    bar: worst.seat.bar.id,
+    slenderness,
+    axis: asks === 'handling' ? 'v' : governing.axis,
+    bySlenderness: {
+      x: lanes.x.slenderness,
+      y: lanes.y.slenderness,
+      u: lanes.u.slenderness,
+      v: lanes.v.slenderness,
+    },
+    handling: worst.handling,
+    limit: worst.seat.limit,
+    passes,
+    fit,
+    why: passes ? fit : whyNot(worst, slenderness, asks),
+    isPresent: seats.every(
+      ({ angle: now }) =>
+        now.stock?.designation === angle.designation &&
+        now.stock.catalogue === angle.catalogue &&
+        (angle.kind === 'equal' || now.spec.legInPlane === leg),
+    ),
+  };
+}
+
+function whyNot(worst: Reading, slenderness: number, asks: Asks): string {
+  const { seat, restraint } = worst;
+  const { axis, length, radius } = restraint.governing;
+  const [over, r] = asks === 'handling' ? [seat.piece, restraint.lanes.v.radius] : [length, radius];
+  const about =
+    asks === 'handling' ? 'as fabricated' : axis === 'free' ? 'in its free direction' : `about ${axis}`;
+  return `${seat.bar.mark} ${about}: ${over.toFixed(0)} / ${r.toFixed(1)} = ${slenderness.toFixed(slenderness < seat.limit + 0.5 ? 1 : 0)}, over ${seat.limit}`;
+}
+
+/** Whether the bolts fit the leg on its usual gauge line; null when they do. */
+function fitOf(angle: StockAngle, leg: Leg, seat: AngleBar): string | null {
+  const { outline } = angle;
+  const width = leg === 'longer' ? outline.longLeg : outline.shortLeg;
+  const usual = usualGauge(width, angle.catalogue === 'us' ? 'us' : 'metric');
+  const bolts = [seat.ends.i, seat.ends.j].filter((end) => end.kind === 'bolted');
+  const largest = bolts.reduce((most, end) => Math.max(most, end.boltDiameter), 0);
+  return largest > usual.maxBolt + 0.5
+    ? `bolts of ${largest} mm are too large for a leg of ${width} mm (common practice)`
+    : null;
+}
+
+function neededRadius(seats: readonly Seat[]): Readonly<Record<Axis, number>> {
+  const needed: Record<Axis, number> = { x: 0, y: 0, u: 0, v: 0 };
+  for (const { bar, angle, limit, stations } of seats) {
+    const placed = stations[angle.spec.legInPlane];
+    if (!angle.stock || !placed) continue;
+    const { lanes } = restraintWith(bar, angle, placed, angle.stock.properties);
+    for (const axis of AXES) needed[axis] = Math.max(needed[axis], lanes[axis].unbraced / limit);
+  }
+  return needed;
+}
