@@ -6,7 +6,7 @@ export type GaugeHabit = 'metric' | 'us';
 export interface UsualGauge {
   /** Heel to the line of bolts, mm. */
   readonly gauge: number;
-  /** Largest usual bolt on that line, diameter in mm. */
+  /** Largest usual bolt on that line, diameter in mm; 0 where none fits. */
   readonly maxBolt: number;
   /** Where the figure is from and how sure it is. */
   readonly source: string;
@@ -115,7 +115,7 @@ function finished(
   if (maxBolt !== null) return { gauge, maxBolt, source };
   const edge = leg - gauge;
   const sizes = BOLTS[habit];
-  const largest = sizes.findLast((d) => d * EDGE_PER_BOLT <= edge) ?? sizes[0] ?? 0;
+  const largest = sizes.findLast((d) => d * EDGE_PER_BOLT <= edge) ?? 0;
   return {
     gauge,
     maxBolt: largest,

@@ -22,7 +22,8 @@ const METRIC = new RegExp(`^(${NUMBER}) ?(mm|cm|m)$`);
 const FEET = new RegExp(`^(${NUMBER}) ?(?:'|ft|feet|foot)$`);
 const FEET_AND_INCHES = new RegExp(`^(\\d+) ?(?:'|ft|feet|foot) ?-? ?(?:${INCHES}) ?(?:"|in|inch|inches)?$`);
 const ONLY_INCHES = new RegExp(`^(?:${INCHES}) ?(?:"|in|inch|inches)$`);
-const BARE_FEET_INCHES = new RegExp(`^(\\d+) ?- ?(?:${INCHES})$`);
+// Without marks `24-6 1/8` is feet and inches, but `3-1/2` is how three and a half inches are written: feet need whole inches after them.
+const BARE_FEET_INCHES = /^(\d+) ?- ?(\d+)(?: (\d+)\/(\d+))?$/;
 const BARE_INCHES = new RegExp(`^(?:${INCHES})$`);
 const BARE = new RegExp(`^(${NUMBER})$`);
 
@@ -87,8 +88,13 @@ function positiveLength(text: string, units: UnitSystem): number | null {
   if (metric) return Number(metric[1]) * (PER_METRIC_UNIT[metric[2] ?? ''] ?? Number.NaN);
   const feet = FEET.exec(text);
   if (feet) return Number(feet[1]) * 12 * MM_PER_INCH;
-  const both = FEET_AND_INCHES.exec(text) ?? (units === 'us' ? BARE_FEET_INCHES.exec(text) : null);
+  const both = FEET_AND_INCHES.exec(text);
   if (both) return (Number(both[1]) * 12 + inchesOf(both.slice(2))) * MM_PER_INCH;
+  const bareBoth = units === 'us' ? BARE_FEET_INCHES.exec(text) : null;
+  if (bareBoth) {
+    const [, feetTyped, whole, top = '0', bottom = '1'] = bareBoth;
+    return (Number(feetTyped) * 12 + Number(whole) + Number(top) / Number(bottom)) * MM_PER_INCH;
+  }
   const inches = ONLY_INCHES.exec(text) ?? (units === 'us' ? BARE_INCHES.exec(text) : null);
   if (inches) return inchesOf(inches.slice(1)) * MM_PER_INCH;
   const bare = units === 'metric' ? BARE.exec(text) : null;
