@@ -1,8 +1,8 @@
 import type { Assessment, BaySummary, DiagonalAssessment } from './assessment.ts';
 import type { Catalogues } from './catalogue/model.ts';
 import { stockOf } from './catalogue/stock.ts';
+import { governingSentence } from './documents/governingSentence.ts';
 import { scheduleRows } from './documents/schedule.ts';
-import { governingSentence } from './documents/words.ts';
 import { findingsOf } from './findings/findings.ts';
 import type { Finding, Severity } from './findings/model.ts';
 import type { Judged } from './findings/subject.ts';

@@ -14,8 +14,8 @@ const HEAD = 34;
 const STEP = 28;
 const DEEP = 19;
 /** Pieces narrower than this show only their slenderness, or nothing at all, px. */
-const ROOM_FOR_BOTH = 84;
-const ROOM_FOR_ONE = 30;
+const ROOM_FOR_BOTH = 104;
+const ROOM_FOR_ONE = 44;
 
 /** One strip an axis, cut where a station stops that motion; the governing piece outlined; numbers point to the holds table. */
 export function laneStrips(
@@ -57,7 +57,8 @@ function strip(
   claims: readonly NumberedClaim[],
   units: UnitSystem,
 ): Markup {
-  const pieces = lane.pieces.map((piece) => pieceBox(piece, lane, top, along, limit, units));
+  const tags = lane.cuts.map(({ at }) => along(at));
+  const pieces = lane.pieces.map((piece) => pieceBox(piece, lane, top, along, tags, limit, units));
   const cuts = lane.cuts.map((cut) => cutMark(cut, top, along, claims));
   const override =
     lane.override === null
@@ -75,27 +76,39 @@ function pieceBox(
   lane: Lane,
   top: number,
   along: (at: number) => number,
+  tags: readonly number[],
   limit: number,
   units: UnitSystem,
 ): Markup {
   const [left, right] = [along(from), along(to)];
   const slenderness = (to - from) / lane.radius;
+  const clear = widestGap(left, right, tags);
+  return markup`<rect x="${left}" y="${top}" width="${right - left}" height="${DEEP}" fill="url(#${nearnessFill(slenderness / limit)})" stroke="#000" stroke-width=".8"/>${pieceFigures(clear, top, showLength(to - from, units, 'spoken'), showSlenderness(slenderness, limit))}`;
+}
+
+/** Length and slenderness, or the slenderness alone, or nothing, as there is room. */
+function pieceFigures([left, right]: Gap, top: number, length: string, slenderness: string): Markup | null {
   const wide = right - left;
-  const figure = showSlenderness(slenderness, limit);
-  const both = `${showLength(to - from, units, 'spoken')}`;
+  const half =
+    wide >= ROOM_FOR_BOTH ? Math.min(wide / 2 - 9, 12 + 3.2 * (length.length + slenderness.length)) : 15;
+  if (wide < ROOM_FOR_ONE) return null;
   const middle = (left + right) / 2;
-  const half = wide >= ROOM_FOR_BOTH ? 46 : 15;
   const text =
     wide >= ROOM_FOR_BOTH
-      ? markup`<text x="${middle}" y="${top + 14}" text-anchor="middle">${both}<tspan dx="8" class="strong">${figure}</tspan></text>`
-      : wide >= ROOM_FOR_ONE
-        ? markup`<text x="${middle}" y="${top + 14}" text-anchor="middle" class="strong">${figure}</text>`
-        : null;
-  const ground =
-    text === null
-      ? null
-      : markup`<rect x="${middle - half}" y="${top + 2}" width="${2 * half}" height="${DEEP - 4}" fill="#fff"/>`;
-  return markup`<rect x="${left}" y="${top}" width="${wide}" height="${DEEP}" fill="url(#${nearnessFill(slenderness / limit)})" stroke="#000" stroke-width=".8"/>${ground}${text}`;
+      ? markup`${length}<tspan dx="8" class="strong">${slenderness}</tspan>`
+      : markup`<tspan class="strong">${slenderness}</tspan>`;
+  return markup`<rect x="${middle - half}" y="${top + 2}" width="${2 * half}" height="${DEEP - 4}" fill="#fff"/><text x="${middle}" y="${top + 14}" text-anchor="middle">${text}</text>`;
+}
+
+type Gap = readonly [number, number];
+
+/** The widest part of a piece that no number of a hold stands in; the middle one of equals. */
+function widestGap(left: number, right: number, tags: readonly number[]): Gap {
+  const stops = [left, ...tags.filter((tag) => tag > left + 1 && tag < right - 1), right];
+  const gaps = stops.slice(1).map((stop, index): Gap => [stops[index] ?? left, stop]);
+  const widest = Math.max(...gaps.map(([from, to]) => to - from));
+  const equal = gaps.filter(([from, to]) => to - from > widest - 1);
+  return equal[Math.floor(equal.length / 2)] ?? [left, right];
 }
 
 function ends(top: number): Markup {
@@ -134,12 +147,13 @@ function governingStrip(
 ): Markup {
   const { from, to, slenderness, radius, angle, axis } = governing;
   const [left, right] = [along(from), along(to)];
+  const isBound = governing.basis === 'mixed bound';
   const name = axis === 'free' ? `${grouped(angle ?? 0, 0)}°` : axis;
-  const kind = governing.basis === 'mixed bound' ? 'safe bound for mixed holds' : 'free direction';
+  const kind = isBound ? `safe bound for mixed holds, about ${name}` : 'free direction';
   const words = `${kind}, ${showLength(governing.length, units, 'spoken')}`;
   const half = 30 + 3.1 * words.length;
   const middle = (left + right) / 2;
-  return markup`<text x="0" y="${top + 15}" class="axis">${name}</text><text x="${20 + 5 * (name.length - 1)}" y="${top + 14}">${showRadius(radius, units, 'bare')}</text><rect x="${left}" y="${top}" width="${right - left}" height="${DEEP}" fill="url(#${nearnessFill(slenderness / limit)})" stroke="#000" stroke-width="2.8"/><rect x="${middle - half}" y="${top + 2}" width="${2 * half}" height="${DEEP - 4}" fill="#fff"/><text x="${middle}" y="${top + 14}" text-anchor="middle">${words}<tspan dx="8" class="strong">${showSlenderness(slenderness, limit)}</tspan></text>`;
+  return markup`<text x="0" y="${top + 15}" class="axis">${isBound ? '' : name}</text><text x="${isBound ? 20 : 14 + 6 * name.length}" y="${top + 14}">${showRadius(radius, units, 'bare')}</text><rect x="${left}" y="${top}" width="${right - left}" height="${DEEP}" fill="url(#${nearnessFill(slenderness / limit)})" stroke="#000" stroke-width="2.8"/><rect x="${middle - half}" y="${top + 2}" width="${2 * half}" height="${DEEP - 4}" fill="#fff"/><text x="${middle}" y="${top + 14}" text-anchor="middle">${words}<tspan dx="8" class="strong">${showSlenderness(slenderness, limit)}</tspan></text>`;
 }
 
 function note(middle: number, top: number, words: string): Markup {

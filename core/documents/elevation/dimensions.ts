@@ -1,4 +1,4 @@
-import { dot } from '../../geometry/vector.ts';
+import { dot, subtract } from '../../geometry/vector.ts';
 import type { DimensionLine } from '../../layout/model.ts';
 import type { UnitSystem } from '../../project/model.ts';
 import { showLength } from '../../units/quantity.ts';
@@ -28,7 +28,7 @@ export function dimensionLines(
   return markup`${lines
     .filter((line) => liesInPlane(line, view))
     .map((line) => {
-      const [awayX, awayY] = [dot(line.away, view.plane.right), -dot(line.away, view.plane.up)];
+      const [awayX, awayY] = awayOnSheet(line, view);
       const upright = Math.abs(awayX) > Math.abs(awayY);
       const side = upright ? (awayX < 0 ? 'left' : 'right') : awayY < 0 ? 'top' : 'bottom';
       const [from, to] = [toSheet(view, line.from), toSheet(view, line.to)];
@@ -51,11 +51,17 @@ export function dimensionLines(
     })}`;
 }
 
-/** Some 50 mm from the plane and not standing out of it. */
-function liesInPlane({ from, to, away }: DimensionLine, { plane }: ElevationView): boolean {
-  const off = (at: DimensionLine['from']): number =>
-    dot([at[0] - plane.origin[0], at[1] - plane.origin[1], at[2] - plane.origin[2]], plane.normal);
-  return Math.abs(off(from)) < 50 && Math.abs(off(to)) < 50 && Math.abs(dot(away, plane.normal)) < 0.7;
+/** A line that stands off towards the viewer goes to the left of what is upright, and below what is level. */
+function awayOnSheet({ from, to, away }: DimensionLine, { plane }: ElevationView): Point {
+  if (Math.abs(dot(away, plane.normal)) < 0.7) return [dot(away, plane.right), -dot(away, plane.up)];
+  const along = subtract(to, from);
+  return Math.abs(dot(along, plane.up)) > Math.abs(dot(along, plane.right)) ? [-1, 0] : [0, 1];
+}
+
+/** Both ends some 50 mm from the plane. */
+function liesInPlane({ from, to }: DimensionLine, { plane }: ElevationView): boolean {
+  const off = (at: DimensionLine['from']): number => dot(subtract(at, plane.origin), plane.normal);
+  return Math.abs(off(from)) < 50 && Math.abs(off(to)) < 50;
 }
 
 function edgeOf(side: string, view: ElevationView, extent: Extent): number {

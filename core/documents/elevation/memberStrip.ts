@@ -28,13 +28,17 @@ export function memberStrip(bar: Bar, view: ElevationView): Markup {
     along(from, across, seen / 2),
   ].map((corner) => toSheet(view, corner));
 
+  // Two lines nearer than this would run into one on paper.
+  const flange = Math.max(FLANGE * member.depth, LINES_APART / view.scale);
   const sideOn = Math.abs(dot(depthWay, across)) > Math.SQRT1_2;
   const edges =
     member.shape !== 'tube' && sideOn
-      ? markup`<path class="edl" d="${line(seen / 2 - FLANGE * member.depth)}"/><path class="edl" d="${line(FLANGE * member.depth - seen / 2)}"/>`
+      ? markup`<path class="edl" d="${line(seen / 2 - flange)}"/><path class="edl" d="${line(flange - seen / 2)}"/>`
       : markup`<path class="centre" d="${line(0)}"/>`;
   return markup`<path class="st" d="${closedPath(corners)}"/>${edges}`;
 }
+
+const LINES_APART = 2;
 
 /** Flange thickness over depth: enough to tell a flange on a drawing, since members carry no thickness. */
 const FLANGE = 0.07;

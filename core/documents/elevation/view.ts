@@ -34,7 +34,7 @@ export interface Extent {
 }
 
 const PX_PER_MM_OF_PAPER = 96 / 25.4;
-const RATIOS = [10, 20, 25, 50, 75, 100, 125, 150, 175, 200, 250, 300, 400, 500, 750, 1000];
+const RATIOS = [10, 20, 25, 40, 50, 75, 100, 125, 150, 175, 200, 250, 300, 400, 500, 750, 1000];
 
 /** mm in the plane: to the right and up from its origin. */
 export function inPlane(plane: Plane, at: Vec3): Point {

@@ -9,6 +9,7 @@ import { scaleBar } from '../elevation/scaleBar.ts';
 import type { Room } from '../elevation/view.ts';
 import { type Markup, markup } from '../markup.ts';
 import type { ReportOptions } from '../reportOptions.ts';
+import { groupedAlike } from './alike.ts';
 import { diagonalSheet } from './diagonalSheet.ts';
 import { scheduleSheet } from './scheduleSheet.ts';
 
@@ -31,15 +32,24 @@ export function baySheet(
   const sections = unlikeSections(assessment, bay, options);
   const off = bay.numberOff === 1 ? '' : `, ${bay.numberOff} off`;
   const mass = summary ? ` · ${showMass(summary.mass, options.units)} of diagonals each` : '';
-  const diagonals = bay.diagonals.flatMap((id) => {
-    const bar = assessment.layout.bars.get(id);
-    const diagonal = assessment.diagonals.get(id);
-    return bar?.angle && diagonal ? [diagonalSheet(assessment, bar, bar.angle, diagonal, options)] : [];
-  });
+  const diagonals = groupedAlike(assessment, bay).flatMap(([first, ...others]) =>
+    first
+      ? [
+          diagonalSheet(
+            assessment,
+            first.bar,
+            first.angle,
+            first.diagonal,
+            others.map(({ bar }) => bar.mark),
+            options,
+          ),
+        ]
+      : [],
+  );
   return markup`<section class="bay ${page}"><h1>${bay.id}: ${bay.name}<small>${summary?.says ?? ''}${off}${mass}</small></h1>
 <h2>As it will be built<small>${seenFrom(bay)}${options.units === 'metric' ? ', mm unless marked' : ''}</small></h2>
 <div class="drawings"><div class="planes">${drawings.map(({ title, drawing }) => markup`<figure>${title === '' ? null : markup`<figcaption>${title}</figcaption>`}${drawing.svg}${scaleBar(drawing)}</figure>`)}</div><div class="side">${sections.map(({ svg, caption, title }) => markup`<h3>${title}</h3>${svg}<p>${caption}</p>`)}<h3>Legend</h3>${legend(drawings.map(({ drawing }) => drawing))}</div></div>
-${scheduleSheet(assessment, bay, options)}</section>${diagonals.length > 0 ? markup`<section class="bars ${page}">${diagonals}</section>` : null}`;
+${scheduleSheet(assessment, bay, options)}</section><div class="${page}">${diagonals}</div>`;
 }
 
 function seenFrom({ kind }: BayLayout): string {

@@ -12,10 +12,11 @@ import { sectionInPlace } from '../elevation/sectionInPlace.ts';
 import { inlineSign, statusSign } from '../elevation/signs.ts';
 import { NEARNESS_FILLS } from '../hatches.ts';
 import { laneStrips } from '../laneStrips.ts';
+import { listed } from '../listed.ts';
 import { type Markup, markup } from '../markup.ts';
 import { overrideWords } from '../overrideWords.ts';
 import type { ReportOptions } from '../reportOptions.ts';
-import { STATUS_NAMES } from '../words.ts';
+import { designationText, STATUS_NAMES } from '../words.ts';
 import { slendernessWorking } from '../working.ts';
 import { diagonalAssumptions } from './assumptions.ts';
 import { axisName } from './axisName.ts';
@@ -23,19 +24,20 @@ import { checkTable } from './checkTable.ts';
 import { findingLines } from './findingsList.ts';
 import { holdsTable } from './holdsTable.ts';
 
-/** One diagonal for the checker: section, lanes, holds, verdicts with their working, what was set by hand, findings, boxes. */
+/** One diagonal for the checker, and the marks of others that are the same in all but place: section, lanes, holds, verdicts with their working, what was set by hand, findings, boxes. */
 export function diagonalSheet(
   assessment: Assessment,
   bar: Bar,
   angle: AngleBar,
   diagonal: DiagonalAssessment,
+  alike: readonly string[],
   options: ReportOptions,
 ): Markup {
   const { units } = options;
   const { restraint } = diagonal;
   const findings = assessment.findings.filter(({ bars }) => bars.includes(bar.id));
-  const section = angle.stock?.designation ?? angle.spec.section;
-  const head = markup`<h2 class="bar">${bar.mark} · ${section} · ${showLength(bar.length, units, 'spoken')} set-out<small>${bar.bay}, ${STATUS_NAMES[diagonal.status]}</small></h2>`;
+  const section = designationText(angle.stock?.designation ?? angle.spec.section);
+  const head = markup`<h2 class="bar">${bar.mark} · ${section} · ${showLength(bar.length, units, 'spoken')} set-out<small>${alike.length > 0 ? `the same for ${listed(alike)}; ` : ''}${bar.bay}, ${STATUS_NAMES[diagonal.status]}</small></h2>`;
   const found = findings.length > 0 ? markup`<h3>Findings</h3>${findingLines(findings, options)}` : null;
   if (restraint === null)
     return markup`<section class="diagonal">${head}<p>${placedWords(bar, angle, assessment, units)}</p><p>${diagonal.reason}</p>${found}</section>`;
@@ -46,7 +48,7 @@ export function diagonalSheet(
   const overrides = angle.mark.overrides ?? [];
   return markup`<section class="diagonal"><div class="keep">${head}<div class="topline"><div>${plane ? sectionInPlace(bar, angle, plane, restraint) : null}</div><div>${axisTable(assessment, angle, restraint, diagonal.limit.limit, units)}<p>${placedWords(bar, angle, assessment, units)}</p><p class="key"><svg width="22" height="8"><path class="free" d="M0 4h22"/></svg> free over the governing length <svg width="22" height="10"><path class="held" d="M0 8h22"/><path class="edl" d="M2 7l2-4M7 7l2-4M12 7l2-4M17 7l2-4"/></svg> held; seen from i</p></div></div></div>
 <div class="keep"><h3>Lanes<small>one strip an axis, cut where a station stops that motion; numbers are those of the holds</small></h3>${laneStrips(restraint, diagonal.limit.limit, claims, units)}<p class="key fills">${NEARNESS_FILLS.map(({ fill, words }) => markup`<svg width="26" height="10"><rect x=".5" y=".5" width="25" height="9" fill="url(#${fill})" stroke="#000" stroke-width=".8"/></svg> ${words} `)}</p></div>
-<div class="keep"><div class="two"><div><h3>Why it bows there</h3><p>${diagonal.reason}</p>${overrides.map((override) => markup`<p class="byhand"><b>Set by hand</b> ${overrideWords(override, units)}</p>`)}</div><div><h3>Both verdicts</h3>${verdictBox('in service: governing free direction, restraints in place', diagonal.inService, diagonal, units)}${verdictBox('handling: as fabricated, over the least radius', diagonal.handling, diagonal, units)}</div></div></div>
+<div class="keep"><div class="two"><div><h3>Why it bows there</h3><p>${diagonal.reason}</p>${overrides.map((override) => markup`<p class="byhand"><b>Set by hand</b>, about ${overrideWords(override, units)}</p>`)}</div><div><h3>Both verdicts</h3>${verdictBox('in service: governing free direction, restraints in place', diagonal.inService, diagonal, units)}${verdictBox('handling: as fabricated, over the least radius', diagonal.handling, diagonal, units)}</div></div></div>
 <h3>Holds between the ends</h3>${holdsTable(restraint, claims, units)}${found}${statements.length > 0 ? markup`<h3>For the checker</h3>${checkTable(statements)}` : null}</section>`;
 }
 
@@ -110,7 +112,7 @@ function placedWords(bar: Bar, angle: AngleBar, { layout }: Assessment, units: U
   const area = stock
     ? ` ${stock.basis === 'published' ? 'Properties as published' : 'Properties from the outline'}, ${showMassPerMetre(stock.massPerMetre, units)}.`
     : ' Not in stock: no properties.';
-  return `From ${i} (i) to ${j} (j). ${side} side of the gusset, heel ${spec.heel}, ${leg} in the plane${roll}. ${counted}, ${spec.grade}. Ends: i ${endWords(angle.ends.i, units)}; j ${endWords(angle.ends.j, units)}. Cut ${showLength(cut.total, units, 'spoken')}${weight}.${area}`;
+  return `From ${i} (i) to ${j} (j). ${side === 'near' ? 'Near' : 'Far'} side of the gusset, heel ${spec.heel}, ${leg} in the plane${roll}. ${counted}, ${spec.grade}. Ends: i ${endWords(angle.ends.i, units)}; j ${endWords(angle.ends.j, units)}. Cut ${showLength(cut.total, units, 'spoken')}${weight}.${area}`;
 }
 
 function endWords(end: EndConnection, units: UnitSystem): string {

@@ -6,9 +6,11 @@ import type { ReportOptions } from '../reportOptions.ts';
 /** Findings with what they say and what would answer them. */
 export function findingsTable(findings: readonly Finding[], options: ReportOptions): Markup {
   if (findings.length === 0) return markup`<p>Nothing was found.</p>`;
-  return markup`<table class="t"><thead><tr><th class="l">Finding</th><th class="l">Bay</th><th class="l">What it is</th><th class="l">Would answer it</th></tr></thead><tbody>${findings.map(
+  const hasRemedies = options.remedies !== undefined;
+  const answers = hasRemedies ? markup`<th class="l answers">Would answer it</th>` : null;
+  return markup`<table class="t"><thead><tr><th class="l">Finding</th><th class="l">Bay</th><th class="l">What it is</th>${answers}</tr></thead><tbody>${findings.map(
     (finding) =>
-      markup`<tr><td class="l">${inlineSign(severitySign(finding.severity))} ${finding.severity}</td><td class="l">${finding.bay}</td><td class="l wrap"><b>${finding.title}</b> ${finding.detail}</td><td class="l wrap">${remedyWords(finding, options)}</td></tr>`,
+      markup`<tr><td class="l">${inlineSign(severitySign(finding.severity))} ${finding.severity}</td><td class="l">${finding.bay}</td><td class="l wrap"><b>${finding.title}.</b> ${finding.detail}</td>${hasRemedies ? markup`<td class="l wrap">${remedyWords(finding, options)}</td>` : null}</tr>`,
   )}</tbody></table>`;
 }
 
@@ -16,7 +18,7 @@ export function findingsTable(findings: readonly Finding[], options: ReportOptio
 export function findingLines(findings: readonly Finding[], options: ReportOptions): Markup {
   return markup`<ul class="found">${findings.map((finding) => {
     const remedies = remedyWords(finding, options);
-    return markup`<li>${inlineSign(severitySign(finding.severity))}<span><b>${finding.title}</b> ${finding.detail}${remedies === '' ? null : markup` <i>Would answer it:</i> ${remedies}.`}</span></li>`;
+    return markup`<li>${inlineSign(severitySign(finding.severity))}<span><b>${finding.title}.</b> ${finding.detail}${remedies === '' ? null : markup` <i>Would answer it:</i> ${remedies}.`}</span></li>`;
   })}</ul>`;
 }
 

@@ -66,6 +66,7 @@ td { font-size: 12px; line-height: 15px; text-align: right; vertical-align: top;
 .l { text-align: left; }
 .pad { padding-left: 14px; }
 .wrap { white-space: normal; }
+.answers { width: 210px; }
 td i { font-style: italic; }
 b { font-weight: 600; }
 .second { margin-top: 10px; }
@@ -78,8 +79,7 @@ b { font-weight: 600; }
 .no { display: inline-block; min-width: 15px; height: 15px; border: 1px solid #000; border-radius: 8px; font-weight: 600; font-size: 10.5px; line-height: 13px; text-align: center; padding: 0 3px; }
 .chip { display: inline-block; vertical-align: -1px; margin-right: 5px; }
 .bay { break-before: page; }
-.bars { break-before: page; }
-.diagonal { margin-bottom: 18px; }
+.diagonal { margin: 18px 0; }
 .keep { break-inside: avoid; }
 .topline { display: grid; grid-template-columns: 220px 1fr; gap: 18px; align-items: start; }
 .key { font-size: 11px; display: flex; flex-wrap: wrap; gap: 6px; align-items: center; margin-top: 5px; }
@@ -129,5 +129,5 @@ figcaption { font-weight: 600; }
 .free { stroke-width: 5; }
 .stop { stroke-width: 2.4; }
 .nostop { stroke-width: 1.2; stroke-dasharray: 2.5 2; }
-@media screen { body { padding: 32px 0; } .bay, .bars { margin-top: 40px; } }
+@media screen { body { padding: 32px 0; } .bay { margin-top: 40px; } }
 `;
