@@ -9,9 +9,12 @@ const CATALOGUE_ORDER: readonly CatalogueId[] = ['en', 'us', 'au'];
 const SAME_SIZE = { metric: 0.05, inches: 0.127 };
 
 /**
- * The angles a project may use. `find` looks for the very designation first (own list, then the chosen catalogue, then the others), so that
- * "90x90x8EA" is the Australian angle whatever catalogue is chosen; then by sizes in the same order. A nominal thickness finds the angle
- * that carries it in its name. Own rows whose dimensions make no angle are left out, and of two with one designation the first counts.
+ * The angles a project may use. `find` takes, in this order:
+ * 1. the very designation in the own list or the chosen catalogue;
+ * 2. the very designation in another catalogue, if it carries that catalogue's mark: "90x90x8EA" is the Australian angle whatever is chosen;
+ * 3. the sizes, own list first, then the chosen catalogue, then the others, so that a plain "90x90x8" is the chosen catalogue's. The
+ *    thickness in the name counts before the actual one, where the two differ.
+ * Own rows whose dimensions make no angle are left out, and of two with one designation the first counts.
  */
 export function stockOf(chosen: CatalogueId, own: readonly OwnAngle[], catalogues: Catalogues): Stock {
   const ownAngles = own.flatMap((row) => {
@@ -20,33 +23,39 @@ export function stockOf(chosen: CatalogueId, own: readonly OwnAngle[], catalogue
   });
   const choices = [...ownAngles, ...catalogues[chosen].angles];
   const others = CATALOGUE_ORDER.filter((id) => id !== chosen).flatMap((id) => catalogues[id].angles);
-  const all = [...choices, ...others];
-  const byKey = new Map<string, StockAngle>();
-  for (const angle of all) {
-    const key = designationKey(angle.designation);
-    if (!byKey.has(key)) byKey.set(key, angle);
-  }
+  const byKey = byDesignation([...choices, ...others.filter(({ designation }) => isMarked(designation))]);
   // Thousands of bars name the same few sections; only what is not a plain designation is searched for, and once.
   const searched = new Map<string, FoundAngle>();
   const find = (typed: string): FoundAngle => {
     const exact = byKey.get(designationKey(typed));
     if (exact) return { ok: true, angle: exact };
-    const known = searched.get(typed);
-    if (known) return known;
-    const found = search(typed, choices, all);
-    searched.set(typed, found);
-    return found;
+    const known = searched.get(typed) ?? search(typed, choices, [...choices, ...others]);
+    searched.set(typed, known);
+    return known;
   };
   return { find, choices };
 }
 
+function byDesignation(angles: readonly StockAngle[]): ReadonlyMap<string, StockAngle> {
+  const found = new Map<string, StockAngle>();
+  for (const angle of angles) {
+    const key = designationKey(angle.designation);
+    if (!found.has(key)) found.set(key, angle);
+  }
+  return found;
+}
+
+/** Whether a designation says more than sizes: "90x90x8EA", "L3X3X1/4", but not "90x90x8". */
+function isMarked(designation: string): boolean {
+  return /[A-WYZ]/.test(designationKey(designation));
+}
+
 function search(typed: string, choices: readonly StockAngle[], all: readonly StockAngle[]): FoundAngle {
   const sizes = designatedSizes(typed);
-  if (sizes) {
-    const angle = all.find((a) => isNamed(a, sizes)) ?? all.find((a) => measures(a, sizes));
-    if (angle) return { ok: true, angle };
-  }
-  return { ok: false, typed, nearest: nearestDesignations(typed, choices, all) };
+  const angle = sizes && (all.find((a) => isNamed(a, sizes)) ?? all.find((a) => measures(a, sizes)));
+  return angle
+    ? { ok: true, angle }
+    : { ok: false, typed, nearest: nearestDesignations(typed, choices, all) };
 }
 
 function isNamed(angle: StockAngle, sizes: DesignatedSizes): boolean {
