@@ -31,9 +31,9 @@ const METRIC: readonly GaugeRow[] = [
   { leg: 31.75, gauge: 19.05, maxBolt: null, source: WORKABLE },
   { leg: 38.1, gauge: 22.2, maxBolt: null, source: WORKABLE },
   { leg: 45, gauge: 25, maxBolt: 12, source: METRIC_HABIT },
-  // No largest bolt is given for 50 and 55 in metric practice; the size for 45 is kept, which is the careful side.
-  { leg: 50, gauge: 28, maxBolt: 12, source: METRIC_HABIT },
-  { leg: 55, gauge: 30, maxBolt: 12, source: METRIC_HABIT },
+  // Metric practice names no largest bolt for 50 and 55; the Canadian table has the same gauge for 50, with M16.
+  { leg: 50, gauge: 28, maxBolt: 16, source: `${METRIC_HABIT}; bolt: ${HANDBOOK}` },
+  { leg: 55, gauge: 30, maxBolt: 16, source: `${METRIC_HABIT}; bolt as for 50` },
   { leg: 60, gauge: 35, maxBolt: 16, source: METRIC_HABIT },
   { leg: 65, gauge: 35, maxBolt: 20, source: METRIC_HABIT },
   { leg: 70, gauge: 40, maxBolt: 20, source: METRIC_HABIT },

@@ -6,6 +6,8 @@ describe('the usual gauge of a leg', () => {
   it.each([
     [45, 25, 12],
     [60, 35, 16],
+    // The bolt from the Canadian handbook.
+    [50, 28, 16],
     [70, 40, 20],
     [100, 55, 24],
   ])('is the listed one of a %d mm leg', (leg, gauge, maxBolt) => {
