@@ -8,5 +8,11 @@ export interface ReportOptions {
   /** Style text with the @font-face rules of "IBM Plex Sans" and "IBM Plex Sans Condensed", the faces embedded. Without it the reader's own faces serve. */
   readonly fonts?: string;
   /** What would answer each finding, by the finding's id. */
-  readonly remedies?: ReadonlyMap<string, readonly { readonly label: string }[]>;
+  readonly remedies?: ReadonlyMap<string, readonly ReportedRemedy[]>;
+}
+
+/** What a report tells of a remedy: its label, and the figure of the finding before and after it. */
+export interface ReportedRemedy {
+  readonly label: string;
+  readonly effect: { readonly before: number | null; readonly after: number | null };
 }

@@ -3,6 +3,7 @@ import type { AngleBar, Bar, Crossing, Layout, Plane } from '../../layout/model.
 import type { UnitSystem } from '../../project/model.ts';
 import { outlinePolygon } from '../../section/outlinePath.ts';
 import { showLength } from '../../units/quantity.ts';
+import { listed } from '../listed.ts';
 import { type Markup, markup } from '../markup.ts';
 import { joinName } from '../words.ts';
 import { closedPath } from './path.ts';
@@ -14,7 +15,9 @@ export interface CrossingSection {
 }
 
 const WIDTH = 226;
-const HEIGHT = 150;
+const HEIGHT = 122;
+/** For the dimension of the gap, below. */
+const FOOT = 24;
 const ARC_STEPS = 6;
 
 /**
@@ -34,7 +37,7 @@ export function crossingSection(
   const all = cuts.flatMap(({ outline }) => outline);
   const [left, right] = [Math.min(...all.map(([x]) => x)), Math.max(...all.map(([x]) => x))];
   const [low, high] = [Math.min(...all.map(([, y]) => y)), Math.max(...all.map(([, y]) => y))];
-  const pxPerMm = Math.min((WIDTH - 40) / (right - left), (HEIGHT - 40) / (high - low));
+  const pxPerMm = Math.min((WIDTH - 40) / (right - left), (HEIGHT - FOOT - 10) / (high - low));
   const onSheet = ([x, y]: Point): Point => [
     20 + (x - left) * pxPerMm + (WIDTH - 40 - (right - left) * pxPerMm) / 2,
     10 + (high - y) * pxPerMm,
@@ -42,9 +45,12 @@ export function crossingSection(
   const middle = onSheet([0, 0])[0];
   const base = 10 + (high - low) * pxPerMm;
 
-  const drawn = cuts.map(({ outline, bar, angle }) => {
+  const drawn = cuts.map(({ outline, bar, angle }, index) => {
     const label = labelPlace(outline, onSheet);
-    return markup`<path class="${angle.side === 'far' ? 'cutfar' : 'cutnear'}" d="${closedPath(outline.map(onSheet))}"/><text class="strong halo" x="${label[0]}" y="${label[1]}" text-anchor="middle">${bar.mark}</text>`;
+    // Bars that run into each other lie on one another here, and share a label.
+    const hides = crossing.clash && index > 0;
+    const name = crossing.clash ? listed(cuts.map((cut) => cut.bar.mark)) : bar.mark;
+    return markup`<path class="${hides ? 'edh' : angle.side === 'far' ? 'cutfar' : 'cutnear'}" d="${closedPath(outline.map(onSheet))}"/><text class="strong halo" x="${label[0]}" y="${label[1]}" text-anchor="middle">${hides ? '' : name}</text>`;
   });
   const faces = facesOf(cuts, crossing);
   const gap =
@@ -52,7 +58,7 @@ export function crossingSection(
       ? null
       : markup`${packer(crossing, faces, onSheet, low, high)}<path class="dim" d="M${onSheet([faces[0], 0])[0]} ${base + 2}v18M${onSheet([faces[1], 0])[0]} ${base + 2}v18M${onSheet([faces[0], 0])[0] - 16} ${base + 16}H${onSheet([faces[1], 0])[0] + 16}"/><text x="${onSheet([faces[1], 0])[0] + 20}" y="${base + 20}">${showLength(crossing.gap, units, 'small')}</text>`;
   return {
-    svg: markup`<svg width="${WIDTH}" height="${HEIGHT}" viewBox="0 0 ${WIDTH} ${HEIGHT}" role="img" aria-label="Section at the crossing">${drawn}<path class="ax" d="M${middle} 2V${base + 12}"/>${gap}</svg>`,
+    svg: markup`<svg width="${WIDTH}" height="${base + FOOT}" viewBox="0 0 ${WIDTH} ${base + FOOT}" role="img" aria-label="Section at the crossing">${drawn}<path class="ax" d="M${middle} 2V${base + 12}"/>${gap}</svg>`,
     caption: captionOf(cuts, crossing),
   };
 }

@@ -60,7 +60,7 @@ export function elevation(subject: ElevationSubject, room: Room): Elevation {
     diagonals.map((bar) => (bar.angle?.side === side ? angleStrip(bar, bar.angle, view, widened) : null));
   const over = (bar: Bar): boolean => bar.role !== 'beam' && bar.role !== 'strut';
   const isLine = (bar: Bar): boolean => bar.line !== null;
-  const glyphs = crossings.map((crossing) => ({ crossing, at: toSheet(view, crossing.at) }));
+  const glyphs = placedGlyphs(crossings, view);
   const size = drawingSize(view, extent, room);
 
   const flags = diagonals.map((bar): Flag => {
@@ -68,7 +68,10 @@ export function elevation(subject: ElevationSubject, room: Room): Elevation {
     return { mark: bar.mark, status, figure, from: toSheet(view, bar.from), to: toSheet(view, bar.to) };
   });
   const clear = glyphs.map(({ at: [x, y] }): Box => ({ x: x - 10, y: y - 10, width: 20, height: 20 }));
-  const captions = glyphs.flatMap(({ crossing, at }) => crossingCaption(crossing, at, layout, units) ?? []);
+  const captions = glyphs.flatMap(({ crossing, at: [x, y] }) => {
+    const beside = glyphs.filter((other) => other.crossing.point === crossing.point).length - 1;
+    return crossingCaption(crossing, [x + GLYPH * beside, y], layout, units) ?? [];
+  });
 
   const svg = markup`<svg class="elevation" width="${size[0]}" height="${size[1]}" viewBox="0 0 ${size[0]} ${size[1]}" role="img" aria-label="Elevation of ${bay.id}">${strips('far')}${gussets(bay, plane, view)}${plates(crossings, layout, view, widened)}${members
     .filter((bar) => !over(bar))
@@ -76,7 +79,7 @@ export function elevation(subject: ElevationSubject, room: Room): Elevation {
     .filter((bar) => over(bar) && !isLine(bar))
     .map((bar) =>
       memberStrip(bar, view),
-    )}${members.filter(isLine).map((bar) => [memberStrip(bar, view), lineName(bar, view)])}${dimensionLines(bay.dimensions, view, extent, units)}${levelMarks(bay.dimensions, view, extent, units)}${nodeMarks(nodesOf(bars), bay.id, layout, view)}${diagonals.map((bar) => bar.angle && endTicks(bar, bar.angle, view))}${glyphs.map(({ crossing, at }) => joinGlyph(shapeOf(crossing), at))}${captions.map(({ text, box }) => markup`<text class="halo" x="${box.x}" y="${box.y + 12}">${text}</text>`)}${placedFlags(
+    )}${members.filter(isLine).map((bar) => [memberStrip(bar, view), lineName(bar, view)])}${dimensionLines(bay.dimensions, view, extent, units)}${levelMarks(bay.dimensions, view, extent, units)}${nodeMarks(nodesOf(bars), bay.id, layout, view)}${diagonals.map((bar) => bar.angle && endTicks(bar, bar.angle, view))}${glyphs.map(({ crossing, at }) => joinGlyph(shapeOf(crossing), at))}${captions.map(({ text, box }) => markup`<rect x="${box.x - 2}" y="${box.y}" width="${box.width}" height="${box.height}" fill="#fff"/><text x="${box.x}" y="${box.y + 12}">${text}</text>`)}${placedFlags(
     flags,
     [...clear, ...captions.map(({ box }) => box)],
   ).map(({ flag, box }) => drawnFlag(flag, box))}</svg>`;
@@ -165,6 +168,22 @@ function plates(
     return cut?.angle ? jointPlate(cut, cut.angle, view, widened) : null;
   });
 }
+
+/** Crossings at one point stand beside each other, the second to the right of the first. */
+function placedGlyphs(
+  crossings: readonly Crossing[],
+  view: ElevationView,
+): readonly { readonly crossing: Crossing; readonly at: Point }[] {
+  const atPoint = new Map<string, number>();
+  return crossings.map((crossing) => {
+    const before = atPoint.get(crossing.point) ?? 0;
+    atPoint.set(crossing.point, before + 1);
+    const [x, y] = toSheet(view, crossing.at);
+    return { crossing, at: [x + GLYPH * before, y] };
+  });
+}
+
+const GLYPH = 15;
 
 function shapeOf({ join }: Crossing): JoinShape {
   return join?.kind ?? 'unmarked';

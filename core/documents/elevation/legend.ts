@@ -20,7 +20,7 @@ export function legend(drawings: readonly Elevation[]): Markup {
     'edge of a leg that lies behind',
   )}</ul><p class="legend-line">${(['over', 'near', 'within'] as const).map(
     (status) => markup`<span>${inlineSign(statusSign(status))} ${STATUS_NAMES[status]}</span> `,
-  )}the figure is L/r</p>`;
+  )}<span>the figure is L/r</span></p>`;
 }
 
 function joinWords(join: JoinShape): string {

@@ -6,9 +6,9 @@ import { type Markup, markup } from '../markup.ts';
 import { closedPath } from './path.ts';
 import { acrossOf, type Point } from './view.ts';
 
-const SIZE = 214;
+const SIZE = 196;
 const MIDDLE = SIZE / 2;
-const RING = 88;
+const RING = 80;
 const ARC_STEPS = 6;
 /** Longer than any ring is wide, mm. */
 const LONG = 1000;

@@ -1,12 +1,8 @@
 /** What the figures of a report stand on, stated so that a checker can agree or not. */
-import type { Assessment, DiagonalAssessment } from '../../assessment.ts';
-import type { Bar } from '../../layout/model.ts';
+import type { Assessment } from '../../assessment.ts';
 import type { LimitInForce, Practice } from '../../practice/model.ts';
-import type { UnitSystem } from '../../project/model.ts';
-import { showLength, showSlenderness } from '../../units/quantity.ts';
-import { numberedClaims } from '../claimNumbers.ts';
-import { overrideWords } from '../overrideWords.ts';
-import { CATALOGUE_NAMES, DIRECTION_NAMES, joinKindName, reasonText } from '../words.ts';
+import { showSlenderness } from '../../units/quantity.ts';
+import { CATALOGUE_NAMES } from '../words.ts';
 
 /** Of the whole project: limits with their clauses, the rules that are taken everywhere, and every holder that the user vouches for. */
 export function projectAssumptions(assessment: Assessment): readonly string[] {
@@ -28,27 +24,6 @@ export function projectAssumptions(assessment: Assessment): readonly string[] {
   ];
 }
 
-/** Of one diagonal: every hold that was counted between its ends, and every length set by hand. */
-export function diagonalAssumptions(
-  bar: Bar,
-  diagonal: DiagonalAssessment,
-  units: UnitSystem,
-): readonly string[] {
-  const { restraint } = diagonal;
-  if (restraint === null) return [];
-  const claims = numberedClaims(restraint)
-    .filter(({ claim }) => claim.counted)
-    .map(({ number, station, claim }) => {
-      const at = restraint.stations[station]?.at ?? 0;
-      const where = `${showLength(at, units, 'spoken')} from i`;
-      return `Hold ${number}: ${joinKindName(claim.join)} at ${where} holds ${DIRECTION_NAMES[claim.direction]}. ${reasonText(claim.reason)}`;
-    });
-  const overrides = (bar.angle?.mark.overrides ?? []).map(
-    (override) => `Set by hand, about ${overrideWords(override, units)}.`,
-  );
-  return [...claims, ...overrides];
-}
-
 function limitKey({ limit, source, clause, className }: LimitInForce): string {
   return [limit, source, clause, className].join('|');
 }
@@ -58,7 +33,7 @@ export function limitWords(limit: LimitInForce, practice: Practice): string {
   switch (limit.source) {
     case 'practice': {
       const standing = limit.standing === 'advice' ? 'advises' : 'asks';
-      return `${practice.name} ${practice.edition} ${standing} L/r ≤ ${figure} for ${limit.className}, ${limit.clause} (${limit.confidence}).`;
+      return `${practice.name} ${practice.edition} ${standing} L/r ≤ ${figure} (${lowered(limit.className)}), ${limit.clause} (${limit.confidence}).`;
     }
     case 'own limit':
       return `L/r ≤ ${figure}, a limit of the project's own in place of that of ${practice.name}.`;
@@ -67,6 +42,10 @@ export function limitWords(limit: LimitInForce, practice: Practice): string {
     default:
       return limit.source satisfies never;
   }
+}
+
+function lowered(text: string): string {
+  return text.charAt(0).toLowerCase() + text.slice(1);
 }
 
 function askedWords(practice: Practice): string {

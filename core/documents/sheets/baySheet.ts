@@ -18,7 +18,12 @@ const BESIDE_LEGEND: Room = {
   height: 520,
   margins: { left: 104, right: 34, top: 16, bottom: 66 },
 };
-const SMALL: Room = { width: 340, height: 250, margins: { left: 84, right: 34, top: 16, bottom: 60 } };
+/** Two to a row, over the legend. */
+const HALF_WIDTH: Room = {
+  width: 342,
+  height: 420,
+  margins: { left: 84, right: 34, top: 16, bottom: 60 },
+};
 
 /** A bay: its planes drawn, its crossings in section, its schedule, and a sheet for each diagonal. */
 export function baySheet(
@@ -31,7 +36,7 @@ export function baySheet(
   const drawings = drawnPlanes(assessment, bay, options);
   const sections = unlikeSections(assessment, bay, options);
   const off = bay.numberOff === 1 ? '' : `, ${bay.numberOff} off`;
-  const mass = summary ? ` · ${showMass(summary.mass, options.units)} of diagonals each` : '';
+  const mass = summary ? ` · ${showMass(summary.mass, options.units)} of diagonals in all` : '';
   const diagonals = groupedAlike(assessment, bay).flatMap(([first, ...others]) =>
     first
       ? [
@@ -48,7 +53,7 @@ export function baySheet(
   );
   return markup`<section class="bay ${page}"><h1>${bay.id}: ${bay.name}<small>${summary?.says ?? ''}${off}${mass}</small></h1>
 <h2>As it will be built<small>${seenFrom(bay)}${options.units === 'metric' ? ', mm unless marked' : ''}</small></h2>
-<div class="drawings"><div class="planes">${drawings.map(({ title, drawing }) => markup`<figure>${title === '' ? null : markup`<figcaption>${title}</figcaption>`}${drawing.svg}${scaleBar(drawing)}</figure>`)}</div><div class="side">${sections.map(({ svg, caption, title }) => markup`<h3>${title}</h3>${svg}<p>${caption}</p>`)}<h3>Legend</h3>${legend(drawings.map(({ drawing }) => drawing))}</div></div>
+<div class="drawings ${drawings.length > 1 ? 'stacked' : ''}"><div class="planes">${drawings.map(({ title, drawing }) => markup`<figure>${title === '' ? null : markup`<figcaption>${title}</figcaption>`}${drawing.svg}${scaleBar(drawing)}</figure>`)}</div><div class="side">${sections.map(({ svg, caption, title }) => markup`<div class="keep"><h3>${title}</h3>${svg}<p>${caption}</p></div>`)}<div class="keep"><h3>Legend</h3>${legend(drawings.map(({ drawing }) => drawing))}</div></div></div>
 ${scheduleSheet(assessment, bay, options)}</section><div class="${page}">${diagonals}</div>`;
 }
 
@@ -91,7 +96,7 @@ function drawnPlanes(
     const look = lookOf(assessment, bay, plane);
     unlike.set(look, [...(unlike.get(look) ?? []), plane]);
   }
-  const room = unlike.size > 2 ? SMALL : { ...BESIDE_LEGEND, height: BESIDE_LEGEND.height / unlike.size };
+  const room = unlike.size > 1 ? HALF_WIDTH : BESIDE_LEGEND;
   return [...unlike.values()].flatMap(([plane, ...alike]) => {
     if (!plane) return [];
     const drawing = elevation(

@@ -1,7 +1,7 @@
 import type { Assessment, DiagonalAssessment } from '../../assessment.ts';
 import type { AngleBar, Bar, Plane } from '../../layout/model.ts';
 import type { Verdict } from '../../practice/model.ts';
-import type { EndConnection, UnitSystem } from '../../project/model.ts';
+import type { EndConnection, LengthOverride, UnitSystem } from '../../project/model.ts';
 import type { Restraint } from '../../restraint/model.ts';
 import { AXES, type Axis } from '../../section/model.ts';
 import { grouped } from '../../units/figures.ts';
@@ -18,7 +18,6 @@ import { overrideWords } from '../overrideWords.ts';
 import type { ReportOptions } from '../reportOptions.ts';
 import { designationText, STATUS_NAMES } from '../words.ts';
 import { slendernessWorking } from '../working.ts';
-import { diagonalAssumptions } from './assumptions.ts';
 import { axisName } from './axisName.ts';
 import { checkTable } from './checkTable.ts';
 import { findingLines } from './findingsList.ts';
@@ -44,12 +43,17 @@ export function diagonalSheet(
 
   const claims = numberedClaims(restraint);
   const plane = planeOf(assessment, bar);
-  const statements = diagonalAssumptions(bar, diagonal, units);
   const overrides = angle.mark.overrides ?? [];
   return markup`<section class="diagonal"><div class="keep">${head}<div class="topline"><div>${plane ? sectionInPlace(bar, angle, plane, restraint) : null}</div><div>${axisTable(assessment, angle, restraint, diagonal.limit.limit, units)}<p>${placedWords(bar, angle, assessment, units)}</p><p class="key"><svg width="22" height="8"><path class="free" d="M0 4h22"/></svg> free over the governing length <svg width="22" height="10"><path class="held" d="M0 8h22"/><path class="edl" d="M2 7l2-4M7 7l2-4M12 7l2-4M17 7l2-4"/></svg> held; seen from i</p></div></div></div>
 <div class="keep"><h3>Lanes<small>one strip an axis, cut where a station stops that motion; numbers are those of the holds</small></h3>${laneStrips(restraint, diagonal.limit.limit, claims, units)}<p class="key fills">${NEARNESS_FILLS.map(({ fill, words }) => markup`<svg width="26" height="10"><rect x=".5" y=".5" width="25" height="9" fill="url(#${fill})" stroke="#000" stroke-width=".8"/></svg> ${words} `)}</p></div>
-<div class="keep"><div class="two"><div><h3>Why it bows there</h3><p>${diagonal.reason}</p>${overrides.map((override) => markup`<p class="byhand"><b>Set by hand</b>, about ${overrideWords(override, units)}</p>`)}</div><div><h3>Both verdicts</h3>${verdictBox('in service: governing free direction, restraints in place', diagonal.inService, diagonal, units)}${verdictBox('handling: as fabricated, over the least radius', diagonal.handling, diagonal, units)}</div></div></div>
-<h3>Holds between the ends</h3>${holdsTable(restraint, claims, units)}${found}${statements.length > 0 ? markup`<h3>For the checker</h3>${checkTable(statements)}` : null}</section>`;
+<div class="keep"><h3>Why it bows there</h3><p>${diagonal.reason}</p>${overrides.length > 0 ? overridesTable(overrides, units) : null}<div class="two verdicts">${verdictBox('in service: governing free direction, restraints in place', diagonal.inService, diagonal, units)}${verdictBox('handling: as fabricated, over the least radius', diagonal.handling, diagonal, units)}</div></div>
+<h3>Holds between the ends</h3>${holdsTable(restraint, claims, units)}${found}</section>`;
+}
+
+function overridesTable(overrides: readonly LengthOverride[], units: UnitSystem): Markup {
+  return checkTable(
+    overrides.map((override) => markup`<b>Set by hand</b>, about ${overrideWords(override, units)}.`),
+  );
 }
 
 function planeOf({ layout }: Assessment, bar: Bar): Plane | undefined {

@@ -1,7 +1,8 @@
 import type { Finding } from '../../findings/model.ts';
+import { grouped } from '../../units/figures.ts';
 import { inlineSign, severitySign } from '../elevation/signs.ts';
 import { type Markup, markup } from '../markup.ts';
-import type { ReportOptions } from '../reportOptions.ts';
+import type { ReportedRemedy, ReportOptions } from '../reportOptions.ts';
 
 /** Findings with what they say and what would answer them. */
 export function findingsTable(findings: readonly Finding[], options: ReportOptions): Markup {
@@ -23,5 +24,12 @@ export function findingLines(findings: readonly Finding[], options: ReportOption
 }
 
 function remedyWords({ id }: Finding, { remedies }: ReportOptions): string {
-  return (remedies?.get(id) ?? []).map(({ label }) => label).join('; ');
+  return (remedies?.get(id) ?? []).map(withEffect).join('; ');
+}
+
+/** "Change to 90×90×7 (344 → 266)"; a figure that stays is not told. */
+function withEffect({ label, effect }: ReportedRemedy): string {
+  const { before, after } = effect;
+  if (before === null || after === null || Math.round(before) === Math.round(after)) return label;
+  return `${label} (${grouped(before, 0)} → ${grouped(after, 0)})`;
 }

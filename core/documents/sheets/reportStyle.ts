@@ -75,6 +75,8 @@ b { font-weight: 600; }
 .countsnot td:nth-child(5), .countsnot td:nth-child(4) { text-decoration: line-through; }
 .check td:nth-child(n+3), .check th:nth-child(n+3) { width: 62px; text-align: center; }
 .check td:first-child { width: 20px; }
+.tick { width: 36px; text-align: center; }
+.verdicts { margin-top: 6px; }
 .box { display: inline-block; width: 12px; height: 12px; border: 1.2px solid #000; vertical-align: -2px; }
 .no { display: inline-block; min-width: 15px; height: 15px; border: 1px solid #000; border-radius: 8px; font-weight: 600; font-size: 10.5px; line-height: 13px; text-align: center; padding: 0 3px; }
 .chip { display: inline-block; vertical-align: -1px; margin-right: 5px; }
@@ -85,6 +87,8 @@ b { font-weight: 600; }
 .key { font-size: 11px; display: flex; flex-wrap: wrap; gap: 6px; align-items: center; margin-top: 5px; }
 .key svg, .scale-line svg { display: inline-block; }
 .drawings { display: grid; grid-template-columns: 1fr 228px; gap: 18px; }
+.drawings.stacked { display: block; }
+.stacked .side { display: grid; grid-template-columns: 1fr 1fr 1fr; gap: 14px; }
 .planes { display: flex; flex-wrap: wrap; gap: 10px; align-content: flex-start; }
 figure { break-inside: avoid; }
 figcaption { font-weight: 600; }
@@ -99,7 +103,6 @@ figcaption { font-weight: 600; }
 .verdict em { display: block; font-style: normal; font-size: 11px; line-height: 14px; }
 .verdict > b { font-size: 20px; line-height: 24px; margin-right: 8px; }
 .verdict .said { float: right; margin-top: 4px; }
-.byhand { border: 1px dashed #000; padding: 3px 6px; }
 .st, .dg, .gu, .flag, .bar, .cutnear { fill: #fff; stroke: #000; }
 .st, .dg, .dgf, .bar { stroke-width: .9; }
 .dgf, .cutfar { fill: url(#far); stroke: #000; }

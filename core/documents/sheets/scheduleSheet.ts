@@ -22,7 +22,7 @@ export function scheduleSheet(assessment: Assessment, bay: BayLayout, { units }:
   const massUnit = units === 'us' ? 'lb' : 'kg';
   const made = rows.map(
     (row) =>
-      markup`<tr><td class="l"><b>${row.mark}</b></td><td>${String(row.numberOff)}</td><td class="l">${row.hand}</td><td class="l">${designationText(row.section)}<br>${row.grade}</td><td class="l">${placed(row, assessment)}</td><td>${length(row.setOutLength)}</td><td>${length(row.setBackI)}; ${length(row.setBackJ)}</td><td>${length(row.cutLength)}${row.pieces.length > 1 ? markup`<br>${row.pieces.map(length).join(' + ')}` : null}</td><td class="wrap">${row.crossingHoles.length > 0 ? row.crossingHoles.map(length).join('; ') : ABSENT}</td><td>${row.packer === null ? ABSENT : showLength(row.packer, units, 'small')}</td><td>${row.massEach === null ? ABSENT : showMass(row.massEach, units, 'bare')}</td><td>${row.massTotal === null ? ABSENT : showMass(row.massTotal, units, 'bare')}</td></tr>`,
+      markup`<tr><td class="l"><b>${row.mark}</b></td><td>${String(row.numberOff)}</td><td class="l">${row.hand}</td><td class="l">${designationText(row.section)}, ${row.grade}</td><td class="l">${placed(row, assessment)}</td><td>${length(row.setOutLength)}</td><td>${length(row.setBackI)}; ${length(row.setBackJ)}</td><td>${length(row.cutLength)}${row.pieces.length > 1 ? markup`<br>${row.pieces.map(length).join(' + ')}` : null}</td><td class="wrap">${row.crossingHoles.length > 0 ? row.crossingHoles.map(length).join('; ') : ABSENT}</td><td>${row.packer === null ? ABSENT : showLength(row.packer, units, 'small')}</td><td>${row.massEach === null ? ABSENT : showMass(row.massEach, units, 'bare')}</td><td>${row.massTotal === null ? ABSENT : showMass(row.massTotal, units, 'bare')}</td></tr>`,
   );
   const checked = rows.map(
     (row) =>
@@ -32,7 +32,7 @@ export function scheduleSheet(assessment: Assessment, bay: BayLayout, { units }:
     (axis) => markup`<th>L<sub>${axisName(axis, assessment.practice)}</sub><br>${lengthUnit}</th>`,
   );
   return markup`<h2>Schedule of diagonals</h2>
-<table class="t"><thead><tr><th class="l">Mark</th><th>Off</th><th class="l">Hand</th><th class="l">Section<br>and grade</th><th class="l">Placed</th><th>Set-out<br>${lengthUnit}</th><th>Set-backs i<br>and j, ${lengthUnit}</th><th>Cut<br>${lengthUnit}</th><th>Holes from<br>end A, ${lengthUnit}</th><th>Packer</th><th>Each<br>${massUnit}</th><th>Total<br>${massUnit}</th></tr></thead><tbody>${made}</tbody></table>
+<table class="t"><thead><tr><th class="l">Mark</th><th>Off</th><th class="l">Hand</th><th class="l">Section and grade</th><th class="l">Placed</th><th>Set-out<br>${lengthUnit}</th><th>Set-backs i<br>and j, ${lengthUnit}</th><th>Cut<br>${lengthUnit}</th><th>Holes from<br>end A, ${lengthUnit}</th><th>Packer</th><th>Each<br>${massUnit}</th><th>Total<br>${massUnit}</th></tr></thead><tbody>${made}</tbody></table>
 <table class="t second"><thead><tr><th class="l">Mark</th><th class="l">At its crossings</th>${letters}<th>Axis</th><th>In service<br>L/r</th><th>Limit</th><th>Handling<br>L/r</th><th class="l">Reading</th></tr></thead><tbody>${checked}</tbody></table>`;
 }
 

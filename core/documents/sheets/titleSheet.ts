@@ -19,7 +19,7 @@ export function titleSheet(assessment: Assessment, options: ReportOptions): Mark
 <div class="cells"><div><em>practice</em><b>${practice.name}</b> ${practice.edition}</div><div><em>units</em><b>${units === 'us' ? 'ft-in, lb' : 'mm, kg'}</b></div><div><em>stock list</em><b>${CATALOGUE_NAMES[settings.catalogue]}</b></div><div><em>state of file</em><b>${projectState(project)}</b></div><div><em>printed</em><b>${date ?? '–'}</b></div></div>
 ${SIGNATURES}
 <div class="two"><div><h2>Scope</h2><p>${scopeWords(assessment)}</p></div><div><h2>Cautions</h2><ul class="found">${cautions(assessment).map((words) => markup`<li>${inlineSign(severitySign('look into'))}<span>${words}</span></li>`)}</ul></div></div>
-<h2>Bays</h2><table class="t"><thead><tr><th class="l">Bay</th><th class="l">Name</th><th class="l">What it is</th><th>Off</th><th>Diagonals</th><th>Mass each</th><th>Worst L/r</th><th>Limit</th><th class="l">At</th></tr></thead><tbody>${layout.bays.map((bay) => bayRow(assessment, bay.id, bay.name, bay.numberOff, options))}</tbody></table>
+<h2>Bays</h2><table class="t"><thead><tr><th class="l">Bay</th><th class="l">Name</th><th class="l">What it is</th><th>Off</th><th>Diagonals</th><th>Mass in all</th><th>Worst L/r</th><th>Limit</th><th class="l">At</th></tr></thead><tbody>${layout.bays.map((bay) => bayRow(assessment, bay.id, bay.name, bay.numberOff, options))}</tbody></table>
 <h2>Findings<small>${countWords(assessment)}</small></h2>${findingsTable(assessment.findings, options)}
 <h2>What it stands on</h2>${checkTable(projectAssumptions(assessment))}<p class="small">Sources are marked “read in a source” or “from memory”. What is marked “from memory, verify” must be looked up in the printed standard before it is relied on.</p></section>`;
 }
