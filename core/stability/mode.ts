@@ -1,0 +1,133 @@
+import type { Vec2 } from '../geometry/vector.ts';
+import { LoadedBar } from './assembly.ts';
+import { type Mesh, meshOf, principalMotions } from './mesh.ts';
+import type { BarProblem, BucklingMode, ModePoint } from './model.ts';
+
+/** Parts of each piece between stations: enough to draw, and for shares of energy to four digits. */
+const PARTS = 16;
+
+/** The shape in which the bar bows at a critical load factor found by `criticalLoad`. */
+export function bucklingMode(problem: BarProblem, factor: number): BucklingMode {
+  const mesh = meshOf(problem, PARTS);
+  const bar = new LoadedBar(problem, mesh);
+  // A hair off the root keeps the factors finite; inverse iteration then picks the one shape that hardly resists.
+  bar.tried(factor * (1 - 1e-9));
+  const shape = nullShape(bar);
+  return modeOf(problem, mesh, fieldsAtNodes(mesh, bar, shape));
+}
+
+function nullShape(bar: LoadedBar): Float64Array {
+  const { size } = bar.unknowns;
+  // A start without symmetry, the same every time.
+  const x = Float64Array.from({ length: size }, (_, k) => Math.sin(1 + 2.3 * k));
+  for (let sweep = 0; sweep < 4; sweep++) {
+    bar.solve(x);
+    const most = x.reduce((largest, value) => Math.max(largest, Math.abs(value)), 0);
+    for (let k = 0; k < size; k++) x[k] = (x[k] ?? 0) / most;
+  }
+  return x;
+}
+
+interface NodeFields {
+  readonly at: number;
+  readonly w: readonly number[];
+  readonly slope: readonly number[];
+}
+
+function fieldsAtNodes(mesh: Mesh, bar: LoadedBar, x: Float64Array): readonly NodeFields[] {
+  return mesh.nodes.map((node, k) => {
+    const w = new Array<number>(mesh.fields).fill(0);
+    const slope = new Array<number>(mesh.fields).fill(0);
+    for (const unknown of bar.unknowns.ofNode[k] ?? []) {
+      const into = unknown.of === 'displacement' ? w : slope;
+      unknown.weights.forEach((weight, field) => {
+        into[field] = (into[field] ?? 0) + weight * (x[unknown.index] ?? 0);
+      });
+    }
+    return { at: node.at, w, slope };
+  });
+}
+
+function modeOf(problem: BarProblem, mesh: Mesh, nodes: readonly NodeFields[]): BucklingMode {
+  const { E, section, length } = problem;
+  const { weak, strong } = principalMotions(section.alpha);
+  const [sx, sy] = mesh.fields === 3 ? section.shearCentre : [0, 0];
+  const points = nodes.map(({ at, w }): ModePoint => {
+    const [a = 0, b = 0, twist = 0] = w;
+    // From the shear centre to the centroid: θ × (−s).
+    const x = a * weak[0] + b * strong[0] + twist * sy;
+    const y = a * weak[1] + b * strong[1] - twist * sx;
+    return { at, displacement: [x, y], twist };
+  });
+  const largest = points.reduce((most, point) => (sizeOf(point) > sizeOf(most) ? point : most));
+  const scale = 1 / sizeOf(largest);
+  // Of the two signs take the one that moves towards +x, or +y, where it moves most.
+  const sign = largest.displacement[0] + 1e-9 * largest.displacement[1] < 0 ? -1 : 1;
+  const shape = points.map(
+    ({ at, displacement: [x, y], twist }): ModePoint => ({
+      at,
+      displacement: [x * scale * sign, y * scale * sign],
+      twist: twist * scale * sign,
+    }),
+  );
+  const energies = [E * section.Iv * bendingOf(nodes, 0), E * section.Iu * bendingOf(nodes, 1)] as const;
+  const total = energies[0] + energies[1];
+  const leading = energies[0] >= energies[1] ? 0 : 1;
+  const direction: Vec2 = [largest.displacement[0] * scale * sign, largest.displacement[1] * scale * sign];
+  return {
+    shape,
+    energyAboutV: energies[0] / total,
+    energyAboutU: energies[1] / total,
+    halfWaves: halfWavesOf(nodes, leading),
+    symmetry: symmetryOf(shape, length),
+    largestAt: largest.at,
+    directionAtLargest: direction,
+  };
+}
+
+const sizeOf = ({ displacement: [x, y] }: ModePoint): number => Math.hypot(x, y);
+
+/** ∫ w″² dz of one field, from the cubic through displacement and slope at both ends of each part. */
+function bendingOf(nodes: readonly NodeFields[], field: number): number {
+  let sum = 0;
+  for (let k = 0; k + 1 < nodes.length; k++) {
+    const [p, q] = [nodes[k], nodes[k + 1]];
+    if (!p || !q) continue;
+    const h = q.at - p.at;
+    const rise = ((q.w[field] ?? 0) - (p.w[field] ?? 0)) / h;
+    const [s, t] = [p.slope[field] ?? 0, q.slope[field] ?? 0];
+    // Curvature at the ends of a cubic; the integral of its square over the part.
+    const first = (6 * rise - 4 * s - 2 * t) / h;
+    const last = (-6 * rise + 2 * s + 4 * t) / h;
+    sum += (h * (first * first + first * last + last * last)) / 3;
+  }
+  return sum;
+}
+
+function halfWavesOf(nodes: readonly NodeFields[], field: number): number {
+  const values = nodes.map(({ w }) => w[field] ?? 0);
+  const noise = 1e-4 * values.reduce((most, value) => Math.max(most, Math.abs(value)), 0);
+  const signs = values.filter((value) => Math.abs(value) > noise).map(Math.sign);
+  return 1 + signs.slice(1).filter((sign, k) => sign !== signs[k]).length;
+}
+
+function symmetryOf(shape: readonly ModePoint[], length: number): BucklingMode['symmetry'] {
+  const at = (z: number): Vec2 => {
+    const k = shape.findIndex((point) => point.at >= z - length * 1e-9);
+    const [p, q] = [shape[Math.max(0, k - 1)], shape[k]];
+    if (!p || !q) return [0, 0];
+    const s = q.at === p.at ? 1 : (z - p.at) / (q.at - p.at);
+    return [
+      p.displacement[0] + s * (q.displacement[0] - p.displacement[0]),
+      p.displacement[1] + s * (q.displacement[1] - p.displacement[1]),
+    ];
+  };
+  let even = 0;
+  let odd = 0;
+  for (const { at: z, displacement } of shape) {
+    const mirror = at(length - z);
+    even = Math.max(even, Math.hypot(displacement[0] - mirror[0], displacement[1] - mirror[1]));
+    odd = Math.max(odd, Math.hypot(displacement[0] + mirror[0], displacement[1] + mirror[1]));
+  }
+  return even < 0.01 ? 'symmetric' : odd < 0.01 ? 'antisymmetric' : 'unsymmetric';
+}
