@@ -169,21 +169,23 @@ function plates(
   });
 }
 
-/** Crossings at one point stand beside each other, the second to the right of the first. */
+/** At one point the unlike joins stand beside each other, the second to the right of the first. */
 function placedGlyphs(
   crossings: readonly Crossing[],
   view: ElevationView,
 ): readonly { readonly crossing: Crossing; readonly at: Point }[] {
-  const atPoint = new Map<string, number>();
-  return crossings.map((crossing) => {
-    const before = atPoint.get(crossing.point) ?? 0;
-    atPoint.set(crossing.point, before + 1);
+  const atPoint = new Map<string, JoinShape[]>();
+  return crossings.flatMap((crossing) => {
+    const before = atPoint.get(crossing.point) ?? [];
+    if (before.includes(shapeOf(crossing))) return [];
+    atPoint.set(crossing.point, [...before, shapeOf(crossing)]);
     const [x, y] = toSheet(view, crossing.at);
-    return { crossing, at: [x + GLYPH * before, y] };
+    return [{ crossing, at: [x + GLYPH * before.length, y] as const }];
   });
 }
 
-const GLYPH = 15;
+/** From the middle of one glyph to that of the next beside it, px. */
+const GLYPH = 17;
 
 function shapeOf({ join }: Crossing): JoinShape {
   return join?.kind ?? 'unmarked';

@@ -120,7 +120,7 @@ function placedWords(bar: Bar, angle: AngleBar, { layout }: Assessment, units: U
 }
 
 function endWords(end: EndConnection, units: UnitSystem): string {
-  const setBack = `set back ${showLength(end.setBack, units, 'small')}`;
+  const setBack = `set back ${showLength(end.setBack, units)}`;
   return end.kind === 'welded'
     ? `welded, ${setBack}`
     : `${end.bolts} × M${grouped(end.boltDiameter, 0)} in ${end.legs === 'both' ? 'both legs' : 'one leg'}, ${setBack}`;

@@ -89,6 +89,8 @@ b { font-weight: 600; }
 .drawings { display: grid; grid-template-columns: 1fr 228px; gap: 18px; }
 .drawings.stacked { display: block; }
 .stacked .side { display: grid; grid-template-columns: 1fr 1fr 1fr; gap: 14px; }
+.stacked figure { width: 346px; }
+.stacked .scale-line { margin-left: 40px; line-height: 13px; }
 .planes { display: flex; flex-wrap: wrap; gap: 10px; align-content: flex-start; }
 figure { break-inside: avoid; }
 figcaption { font-weight: 600; }
