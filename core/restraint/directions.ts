@@ -14,16 +14,23 @@ export const squareTo = (d: Vec2): Vec2 => [-d[1], d[0]];
 export function heldBy(vectors: readonly Vec2[]): Held {
   const [first] = vectors;
   if (!first) return { ways: 0 };
-  return vectors.every((vector) => sameDirection(first, vector))
-    ? { ways: 1, direction: first }
-    : { ways: 2 };
+  return areOneDirection(vectors) ? { ways: 1, direction: first } : { ways: 2 };
 }
 
-/** Different single directions among the stations, one for each group within 10°. */
-export function distinctDirections(held: readonly Held[]): readonly Vec2[] {
+/** Sine up to which two directions are the very same but for rounding. */
+const ROUNDING = 1e-12;
+
+const verySame = (a: Vec2, b: Vec2): boolean => Math.abs(a[0] * b[1] - a[1] * b[0]) <= ROUNDING;
+
+/** Every single direction among the stations, each once, however near some of them lie to each other. */
+export function singleDirections(held: readonly Held[]): readonly Vec2[] {
   const found: Vec2[] = [];
   for (const each of held)
-    if (each.ways === 1 && !found.some((known) => sameDirection(known, each.direction)))
+    if (each.ways === 1 && !found.some((known) => verySame(known, each.direction)))
       found.push(each.direction);
   return found;
 }
+
+/** Whether all lie within 10° of each other. To be near a common one is not enough: −8°, 0° and 8° hold two ways. */
+export const areOneDirection = (directions: readonly Vec2[]): boolean =>
+  directions.every((one, k) => directions.slice(k + 1).every((other) => sameDirection(one, other)));

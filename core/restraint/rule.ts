@@ -5,7 +5,7 @@
 import { dot2, type Vec2 } from '../geometry/vector.ts';
 import { radiusFor } from '../section/direction.ts';
 import type { SectionProperties } from '../section/model.ts';
-import { distinctDirections, sameDirection, squareTo } from './directions.ts';
+import { areOneDirection, sameDirection, singleDirections, squareTo } from './directions.ts';
 import type { Held, MixedBound, SpanCheck } from './model.ts';
 
 /** A station of the rule: `at` in mm from end i, in order; the first and last are the ends, which hold both ways. */
@@ -31,16 +31,23 @@ const NEARLY_SQUARE = Math.sin((10 * Math.PI) / 180);
  */
 export function freeDirectionRule(section: SectionProperties, stations: readonly RuleStation[]): RuleResult {
   const spans = spanChecks(section, stations);
-  const directions = distinctDirections(stations.slice(1, -1).map((station) => station.held));
-  const bound = directions.length > 1 ? mixedBound(section, stations, directions) : null;
+  const directions = singleDirections(stations.slice(1, -1).map((station) => station.held));
+  const bound = areOneDirection(directions) ? null : mixedBound(section, stations, directions);
   const worst = spans.reduce((most, span) => Math.max(most, span.slenderness), 0);
   return { spans, bound, slenderness: Math.max(worst, bound?.slenderness ?? 0) };
 }
 
 /** Between every two stations: free every way, in one direction, or not at all. */
-export function spanChecks(
+export const spanChecks = (
   section: SectionProperties,
   stations: readonly RuleStation[],
+): readonly SpanCheck[] => spansWhile(section, stations, areOneDirection);
+
+/** Spans from every station on, for as long as the holds between pass for one direction. */
+function spansWhile(
+  section: SectionProperties,
+  stations: readonly RuleStation[],
+  isOne: (between: readonly Vec2[]) => boolean,
 ): readonly SpanCheck[] {
   const checks: SpanCheck[] = [];
   stations.forEach((start, i) => {
@@ -52,7 +59,7 @@ export function spanChecks(
       const { held } = end;
       if (held.ways === 2) break;
       if (held.ways === 1) between = [...between, held.direction];
-      if (between.some((direction) => !between.every((other) => sameDirection(direction, other)))) break;
+      if (!isOne(between)) break;
     }
   });
   return checks;
@@ -98,7 +105,8 @@ function oneDirectionAlone(
   direction: Vec2,
 ): MixedBound {
   const kept = stations.filter(({ held }) => holds(held, direction));
-  const spans = spanChecks(section, kept);
+  // All that is kept lies within 10° of the one direction, and counts as one with it, even where two of them lie farther apart.
+  const spans = spansWhile(section, kept, () => true);
   const worst = spans.reduce((most, span) => (span.slenderness > most.slenderness ? span : most));
   return {
     slenderness: worst.slenderness,
