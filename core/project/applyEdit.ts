@@ -1,5 +1,5 @@
 import type { Edit } from './edit.ts';
-import type { BarMark, Bay, Join, LineHolder, Project, Recipe } from './model.ts';
+import type { BarMark, Bay, Join, Line, LineHolder, Project, Recipe } from './model.ts';
 import type { ProjectProblem } from './problem.ts';
 import { readProjectData } from './readProject.ts';
 
@@ -108,10 +108,10 @@ function withBay(project: Project, id: string, change: (bay: Bay) => Bay): Proje
   return { ...project, bays: project.bays.map((bay) => (bay.id === id ? change(bay) : bay)) };
 }
 
-/** "W1/t1.rise" as bay and key. */
+/** "W1/t1.rise" as bay and key; of an id without a slash the bay is "", which no bay is called. */
 export function placeOf(id: string): { readonly bay: string; readonly key: string } {
   const slash = id.indexOf('/');
-  return { bay: id.slice(0, slash), key: id.slice(slash + 1) };
+  return slash < 0 ? { bay: '', key: id } : { bay: id.slice(0, slash), key: id.slice(slash + 1) };
 }
 
 function withBarMark(
@@ -164,26 +164,31 @@ function withLineHolder(recipe: Recipe, line: string, heldBy: LineHolder): Recip
   }
 }
 
-/** Renames a bay and every mention of it. A name that is taken changes nothing. */
+/** Renames a bay and every mention of it. A name that is taken, or a bay that is not there, changes nothing. */
 function renamed(project: Project, from: string, to: string): Project {
-  if (project.bays.some((bay) => bay.id === to)) return project;
-  const follow = <L extends { readonly heldBy: LineHolder }>(line: L): L =>
-    line.heldBy.kind === 'bay' && line.heldBy.bay === from
-      ? { ...line, heldBy: { kind: 'bay', bay: to } }
-      : line;
-  const bays = project.bays.map((bay): Bay => {
-    const named = bay.id === from ? { ...bay, id: to } : bay;
-    const { recipe } = named;
-    if (recipe.kind === 'wall') return { ...named, recipe: { ...recipe, lines: recipe.lines.map(follow) } };
-    if (recipe.kind === 'roof')
-      return {
-        ...named,
-        recipe: {
-          ...recipe,
-          slopes: recipe.slopes.map((slope) => ({ ...slope, lines: slope.lines.map(follow) })),
-        },
-      };
-    return named;
-  });
-  return { ...project, bays };
+  const named = (id: string) => project.bays.some((bay) => bay.id === id);
+  if (!named(from) || named(to)) return project;
+  return {
+    ...project,
+    bays: project.bays.map((bay) => {
+      const following = withLinesFollowing(bay, from, to);
+      return bay.id === from ? { ...following, id: to } : following;
+    }),
+  };
+}
+
+/** The bay with its lines held by `to` where they were held by `from`; the very same bay where none was. */
+function withLinesFollowing(bay: Bay, from: string, to: string): Bay {
+  const { recipe } = bay;
+  const isHeldSo = ({ heldBy }: Line): boolean => heldBy.kind === 'bay' && heldBy.bay === from;
+  const follow = (lines: readonly Line[]): readonly Line[] =>
+    lines.map((line) => (isHeldSo(line) ? { ...line, heldBy: { kind: 'bay', bay: to } } : line));
+  if (recipe.kind === 'wall' && recipe.lines.some(isHeldSo))
+    return { ...bay, recipe: { ...recipe, lines: follow(recipe.lines) } };
+  if (recipe.kind === 'roof' && recipe.slopes.some((slope) => slope.lines.some(isHeldSo)))
+    return {
+      ...bay,
+      recipe: { ...recipe, slopes: recipe.slopes.map((slope) => ({ ...slope, lines: follow(slope.lines) })) },
+    };
+  return bay;
 }

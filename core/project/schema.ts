@@ -8,9 +8,22 @@ const span = millimetres(100, 200_000);
 const coordinate = millimetres(-1_000_000, 1_000_000);
 const point = z.tuple([coordinate, coordinate, coordinate]);
 const text = z.string().max(200);
-const reason = z.string().trim().min(1).max(400);
-const key = z.string().regex(/^[A-Za-z0-9][A-Za-z0-9_.+-]{0,119}$/);
-const shortId = z.string().regex(/^[A-Za-z0-9][A-Za-z0-9_-]{0,23}$/);
+/** Something said, kept as it was typed: reading a file changes nothing in it. */
+const said = (most: number) =>
+  z
+    .string()
+    .min(1)
+    .max(most)
+    .refine((typed) => typed.trim() !== '', { error: 'There is nothing here but spaces.' });
+const reason = said(400);
+/** Names are looked up in plain objects, where a few, such as "constructor", are always there. */
+const name = (pattern: RegExp) =>
+  z
+    .string()
+    .regex(pattern)
+    .refine((typed) => !(typed in {}), { error: 'This word has a meaning of its own and cannot be a name.' });
+const key = name(/^[A-Za-z0-9][A-Za-z0-9_.+-]{0,119}$/);
+const shortId = name(/^[A-Za-z0-9][A-Za-z0-9_-]{0,23}$/);
 
 const member = z.strictObject({
   name: text,
@@ -119,7 +132,7 @@ const override = z.strictObject({
 });
 
 const barMark = z.strictObject({
-  mark: z.string().trim().min(1).max(24).optional(),
+  mark: said(24).optional(),
   section: z.string().min(1).max(60).optional(),
   grade: z.string().max(60).optional(),
   countedOn: z.enum(['tension', 'both']).optional(),
@@ -154,7 +167,7 @@ const bay = z.strictObject({
 });
 
 const ownAngle = z.strictObject({
-  designation: z.string().trim().min(1).max(60),
+  designation: said(60),
   longLeg: millimetres(5, 1_000),
   shortLeg: millimetres(5, 1_000),
   thickness: millimetres(0.5, 200),

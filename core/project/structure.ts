@@ -114,9 +114,12 @@ function lineProblems(
   return [...sameIds(lines, `${path}.lines`), ...tooFar(lines, most, path)];
 }
 
+/** Sums of heights, and sizes that were typed in inches, come out a shade off, mm. */
+const ROUNDING = 0.1;
+
 function tooFar(lines: readonly (Named & { at: number })[], most: number, path: string): ProjectProblem[] {
   return lines.flatMap((line, index) =>
-    line.at > most
+    line.at > most + ROUNDING
       ? [
           {
             path: `${path}.lines[${index}].at`,
