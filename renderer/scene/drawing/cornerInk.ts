@@ -16,6 +16,7 @@ const ARM = 26;
 export function triadInk(view: SheetView): readonly Ink[] {
   const foot: Vec2 = [36, view.height - 34];
   const ink: Ink[] = [{ kind: 'ring', key: 'triad foot', look: 'scene-solid', at: foot, radius: 2.2 }];
+  const named: Vec2[] = [];
   for (const [name, axis] of AXES) {
     // Directions alone: the scale of the view has no say in the triad.
     const run: Vec2 = [
@@ -25,7 +26,11 @@ export function triadInk(view: SheetView): readonly Ink[] {
     const way = heading(run, 0.08);
     if (way === null) continue;
     const tip = from(foot, run, ARM);
-    const label = from(tip, way, 8);
+    const beyond = from(tip, way, 8);
+    // Two arms that nearly meet on the sheet would have their names on one another.
+    const crowded = named.some((other) => Math.hypot(other[0] - beyond[0], other[1] - beyond[1]) < 11);
+    const label: Vec2 = crowded ? [beyond[0], beyond[1] - 9] : beyond;
+    named.push(label);
     ink.push({ kind: 'path', key: `triad ${name}`, look: 'scene-triad', d: line(foot, tip) });
     ink.push({
       kind: 'words',

@@ -1,12 +1,14 @@
-import type { Vec2 } from '../../../core/geometry/vector.ts';
+import { dot, type Vec2 } from '../../../core/geometry/vector.ts';
 import type { BayLayout } from '../../../core/layout/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
 import { showLength } from '../../../core/units/quantity.ts';
+import type { PointToShow } from '../view/fit.ts';
+import type { ViewDirections } from '../view/namedView.ts';
 import { directionOnSheet, onSheet, type SheetView } from '../view/sheetView.ts';
 import { from, heading, type Ink, line, minus, plus, span, times } from './ink.ts';
 
 /** How far a dimension line stands off the steel, and how far its witness lines begin from the steel and run past it, px. */
-const STAND_OFF = 58;
+const STAND_OFF = 46;
 const GAP = 10;
 const PAST = 6;
 /** Half a tick, px. */
@@ -36,6 +38,24 @@ export function dimensionInk(view: SheetView, bay: BayLayout, units: UnitSystem)
       { kind: 'path', key: `${key} ticks`, look: 'scene-tick-mark', d: tick(p) + tick(q) },
       { kind: 'words', key: `${key} figure`, look: 'scene-words quiet', at, anchor, text },
     ];
+  });
+}
+
+/** Room that a figure takes beside its dimension line, px. */
+const FIGURE_WIDTH = 44;
+const FIGURE_HEIGHT = 18;
+
+/** The ends of a bay's dimensions with the room that their lines and figures take beside them, for fitting a view. */
+export function dimensionRoom(bay: BayLayout, view: ViewDirections): readonly PointToShow[] {
+  return bay.dimensions.flatMap(({ from: a, to: b, away }): readonly PointToShow[] => {
+    const out = heading([dot(away, view.right), -dot(away, view.up)], 0.25);
+    if (out === null) return [];
+    const reach = STAND_OFF + FIGURE_OFF;
+    const beside: Vec2 = [
+      out[0] * (reach + Math.abs(out[0]) * FIGURE_WIDTH),
+      out[1] * (reach + Math.abs(out[1]) * FIGURE_HEIGHT),
+    ];
+    return [a, b].map((at) => ({ at, beside }));
   });
 }
 

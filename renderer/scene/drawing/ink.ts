@@ -1,4 +1,5 @@
 import type { Vec2 } from '../../../core/geometry/vector.ts';
+import type { Box } from '../view/box.ts';
 
 /** One stroke, word or mark of the drawing laid over the steel, in px on the sheet. `look` is the class that the style sheet gives its ink. */
 export type Ink =
@@ -61,4 +62,13 @@ export function arrowHead(tip: Vec2, direction: Vec2): string {
   const back = from(tip, direction, -9);
   const side = across(direction);
   return polyline([tip, from(back, side, 4), from(back, side, -4)], true);
+}
+
+/** The room that words take, near enough: px for each letter of the condensed face at 12 px, and a line's height. */
+const LETTER = 6;
+
+export function wordsBox(words: Extract<Ink, { readonly kind: 'words' }>): Box {
+  const width = LETTER * words.text.length;
+  const start = words.anchor === 'start' ? 0 : words.anchor === 'end' ? -width : -width / 2;
+  return { left: words.at[0] + start, top: words.at[1] - 11, width, height: 14 };
 }

@@ -13,6 +13,8 @@ export interface SteelPart {
   readonly prism: Prism;
   readonly paint: Paint;
   readonly bay: string;
+  /** Plane of the bay that it lies in. */
+  readonly plane: string;
   /** The bar it is a piece of; null for gussets, packers, plates. */
   readonly bar: BarId | null;
 }

@@ -1,0 +1,175 @@
+import { type JSX, type KeyboardEvent, useCallback, useMemo, useRef, useState } from 'react';
+import type { BayLayout, Layout } from '../../core/layout/model.ts';
+import type { BayViewProps } from './bayViewProps.ts';
+import { FlatScene } from './flat/FlatScene.tsx';
+import { mergedSteel } from './geometry/mergedSteel.ts';
+import { targetsOf } from './geometry/pick.ts';
+import { bayParts, steelwork } from './geometry/steelwork.ts';
+import { NoWebgl } from './NoWebgl.tsx';
+import { Legend } from './overlay/Legend.tsx';
+import { Overlay, type OverlayHandle } from './overlay/Overlay.tsx';
+import { overlayContent } from './overlay/overlayContent.ts';
+import { reducedMotion } from './overlay/reducedMotion.ts';
+import { viewKey } from './pointer/keys.ts';
+import { usePointer } from './pointer/usePointer.ts';
+import './scene.css';
+import { useSize } from './useSize.ts';
+import type { SheetView } from './view/sheetView.ts';
+import { subjectOf } from './view/subject.ts';
+import { useNamedView } from './view/useNamedView.ts';
+import type { CameraHandle } from './webgl/CameraRig.tsx';
+import { webglThere } from './webgl/contextThere.ts';
+import { SceneCanvas } from './webgl/SceneCanvas.tsx';
+
+export type { BayViewProps } from './bayViewProps.ts';
+
+/**
+ * A bay in 3D as it will be built, with what can be marked on it. Shows an assessment and tells what the user points at; computes no
+ * engineering. Without WebGL the same bay is drawn flat, with the same buttons.
+ */
+export function BayView(props: BayViewProps): JSX.Element {
+  const {
+    assessment,
+    bay: bayId,
+    scale,
+    selectedBar,
+    hoveredBar,
+    onSelectBar,
+    onHoverBar,
+    onViewChange,
+  } = props;
+  const { layout } = assessment;
+  const bay = useMemo(() => bayOf(layout, bayId), [layout, bayId]);
+  const [drawnBy, setDrawnBy] = useState<'webgl' | 'flat, none' | 'flat, lost'>(() =>
+    webglThere() ? 'webgl' : 'flat, none',
+  );
+
+  const surface = useRef<HTMLDivElement>(null);
+  const camera = useRef<CameraHandle | null>(null);
+  const overlay = useRef<OverlayHandle | null>(null);
+  const view = useRef<SheetView | null>(null);
+  const size = useSize(surface);
+  const legendElement = useRef<HTMLDivElement>(null);
+  const legend = useSize(legendElement);
+
+  const parts = useMemo(() => steelwork(layout, scale), [layout, scale]);
+  const merged = useMemo(() => mergedSteel(parts), [parts]);
+  const inHand = useMemo(
+    () => (bay === null ? parts : bayParts(layout, bay, scale)),
+    [layout, bay, scale, parts],
+  );
+  const partsOf = useCallback(
+    (bar: string | null) => (bar === null ? [] : parts.filter((part) => part.bar === bar)),
+    [parts],
+  );
+  const selected = useMemo(() => partsOf(selectedBar), [partsOf, selectedBar]);
+  const hovered = useMemo(
+    () => partsOf(hoveredBar === selectedBar ? null : hoveredBar),
+    [partsOf, hoveredBar, selectedBar],
+  );
+  const targets = useMemo(
+    () => targetsOf(inHand, (id) => layout.bars.get(id)?.angle != null),
+    [inHand, layout],
+  );
+  const subject = useMemo(() => (bay === null ? null : subjectOf(layout, bay)), [layout, bay]);
+  const content = useMemo(
+    () => overlayContent({ assessment, bay: bayId, selectedBar, bow: props.bow }),
+    [assessment, bayId, selectedBar, props.bow],
+  );
+
+  const named = useNamedView({ ...props, layout, bay, camera, size, legend, drawnBy });
+  const shown = useCallback((moved: SheetView) => {
+    view.current = moved;
+    overlay.current?.show(moved);
+  }, []);
+  const turned = useCallback(() => onViewChange?.('free'), [onViewChange]);
+  const pointer = usePointer({ view, targets, hovered: hoveredBar, onHoverBar, onPick: onSelectBar });
+
+  const onKeyDown = (event: KeyboardEvent): void => {
+    if (event.ctrlKey || event.metaKey || event.altKey) return;
+    const wish = viewKey(event.key, event.shiftKey);
+    if (wish === null) return;
+    event.preventDefault();
+    const smooth = !reducedMotion();
+    switch (wish.kind) {
+      case 'turn':
+        camera.current?.turn(wish.about, wish.tip, smooth);
+        return;
+      case 'move':
+        camera.current?.move(wish.right, wish.down, smooth);
+        return;
+      case 'closer':
+        camera.current?.closer(wish.factor, smooth);
+        return;
+      case 'fit':
+        named.fitAgain(view.current);
+        return;
+      default:
+        wish satisfies never;
+    }
+  };
+
+  return (
+    <div className="scene" data-drawn-by={drawnBy}>
+      <div ref={surface} className="scene-sheet">
+        <div
+          className="scene-stage"
+          role="application"
+          // biome-ignore lint/a11y/noNoninteractiveTabindex: the stage takes the keys that turn the view
+          tabIndex={0}
+          aria-label={stageName(bay, drawnBy === 'webgl')}
+          onKeyDown={onKeyDown}
+          {...pointer}
+        >
+          {drawnBy === 'webgl' ? (
+            <SceneCanvas
+              merged={merged}
+              bay={bay?.id ?? null}
+              subject={subject}
+              theme={props.theme}
+              selected={selected}
+              hovered={hovered}
+              surface={surface}
+              camera={camera}
+              onView={shown}
+              onReady={named.begin}
+              onTurned={turned}
+              onMoved={named.leave}
+              onLost={() => setDrawnBy('flat, lost')}
+            />
+          ) : (
+            <FlatScene
+              parts={inHand}
+              bay={bay}
+              selectedBar={selectedBar}
+              hoveredBar={hoveredBar}
+              surface={surface}
+              camera={camera}
+              size={size}
+              onView={shown}
+              onMoved={named.leave}
+            />
+          )}
+        </div>
+        <Overlay {...props} content={content} handle={overlay} />
+        <Legend element={legendElement} crossings={content.crossings} scale={scale} />
+      </div>
+      {drawnBy !== 'webgl' && (
+        <NoWebgl
+          lost={drawnBy === 'flat, lost'}
+          onAgain={() => setDrawnBy(webglThere() ? 'webgl' : 'flat, none')}
+        />
+      )}
+    </div>
+  );
+}
+
+function bayOf(layout: Layout, id: string | null): BayLayout | null {
+  return layout.bays.find((one) => one.id === id) ?? null;
+}
+
+function stageName(bay: BayLayout | null, turns: boolean): string {
+  const of = bay === null ? 'the project' : `bay ${bay.id}`;
+  const keys = turns ? 'Arrows turn it, shift and arrows move it' : 'Shift and arrows move it';
+  return `Drawing of ${of}. ${keys}, plus and minus zoom, Home fits it.`;
+}

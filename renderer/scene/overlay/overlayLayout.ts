@@ -1,0 +1,144 @@
+import type { Assessment } from '../../../core/assessment.ts';
+import type { Vec2 } from '../../../core/geometry/vector.ts';
+import type { UnitSystem } from '../../../core/project/model.ts';
+import type { TrailStep } from '../../../core/restraint/model.ts';
+import { bowInk } from '../drawing/bowInk.ts';
+import { scaleInk, triadInk } from '../drawing/cornerInk.ts';
+import { dimensionInk } from '../drawing/dimensionInk.ts';
+import { endPlace } from '../drawing/endPlace.ts';
+import { groundInk } from '../drawing/groundInk.ts';
+import { holdInk } from '../drawing/holdInk.ts';
+import { type Ink, line, wordsBox } from '../drawing/ink.ts';
+import { lineNamesInk } from '../drawing/lineNamesInk.ts';
+import { setOutInk } from '../drawing/setOutInk.ts';
+import { trailInk } from '../drawing/trailInk.ts';
+import { type Box, boxAbout, clipped } from '../view/box.ts';
+import { onSheet, type SheetView } from '../view/sheetView.ts';
+import { crossingPlaces } from './crossingPlaces.ts';
+import { type LabelWish, labelPlaces } from './labelPlaces.ts';
+import type { OverlayContent } from './overlayContent.ts';
+
+export interface OverlayInput {
+  readonly view: SheetView;
+  readonly content: OverlayContent;
+  readonly assessment: Assessment;
+  readonly units: UnitSystem;
+  readonly trail: readonly TrailStep[] | null;
+  /** How far the bow has grown, 0 to about 1. */
+  readonly grown: number;
+  /** Of the labels as they stand on the page, px, by bar. */
+  readonly sizes: ReadonlyMap<string, { readonly width: number; readonly height: number }>;
+  /** Places that labels took last time. */
+  readonly previous: ReadonlyMap<string, number>;
+}
+
+/** Where a button stands, px from the upper left corner of the sheet; ends turn with their bar, degrees. */
+export interface Place {
+  readonly x: number;
+  readonly y: number;
+  readonly turn?: number;
+}
+
+export interface OverlayLayout {
+  readonly ink: readonly Ink[];
+  /** By "crossing …", "label …", "end …"; what is missing is not shown. */
+  readonly places: ReadonlyMap<string, Place>;
+  readonly candidates: ReadonlyMap<string, number>;
+}
+
+/** Half the room that a glyph takes, and the mark of an end, px. */
+const GLYPH_HALF = 11;
+const END_HALF = 6;
+/** Labels keep this clear of the edges, px. */
+const EDGE = 6;
+/** Where a bar is drawn shorter than this its ends cannot be told apart, px. */
+const SHORTEST_WITH_ENDS = 60;
+
+/** Lays everything over the steel out on the sheet, for one view of it. */
+export function layOutOverlay(input: OverlayInput): OverlayLayout {
+  const { view, content, units } = input;
+  const places = new Map<string, Place>();
+  const sheet: Box = { left: EDGE, top: EDGE, width: view.width - 2 * EDGE, height: view.height - 2 * EDGE };
+
+  const glyphs = crossingPlaces(view, input.assessment.layout, content.crossings);
+  for (const [id, [x, y]] of glyphs) if (within(sheet, x, y)) places.set(`crossing ${id}`, { x, y });
+  for (const [key, place] of ends(view, content)) if (within(sheet, place.x, place.y)) places.set(key, place);
+
+  const marks = [
+    ...[...glyphs.values()].map((at) => boxAbout(at, GLYPH_HALF)),
+    ...[...places]
+      .filter(([key]) => key.startsWith('end '))
+      .map(([, { x, y }]) => boxAbout([x, y], END_HALF)),
+  ];
+  const steelInk = inkOf(input, marks);
+  const inTheWay = [...marks, ...wordsIn(steelInk)];
+  const wishes = content.diagonals.flatMap(({ bar }): readonly LabelWish[] => {
+    const size = input.sizes.get(bar.id);
+    const seen = clipped([onSheet(view, bar.from), onSheet(view, bar.to)], sheet);
+    if (!size || seen === null) return [];
+    return [
+      {
+        key: bar.id,
+        ...size,
+        bar: seen,
+        must: bar.id === content.selected?.id,
+      },
+    ];
+  });
+  const labels = labelPlaces(wishes, inTheWay, sheet, input.previous);
+  const leaders = [...labels].map(
+    ([key, place]): Ink => ({
+      kind: 'path',
+      key: `leader ${key}`,
+      look: 'scene-leader',
+      d: line(place.onBar, place.onBox),
+    }),
+  );
+  for (const [key, { box }] of labels) places.set(`label ${key}`, { x: box.left, y: box.top });
+  return {
+    ink: [...steelInk, ...leaders, ...triadInk(view), ...scaleInk(view, units)],
+    places,
+    candidates: new Map([...labels].map(([key, place]) => [key, place.candidate])),
+  };
+}
+
+function inkOf(input: OverlayInput, marks: readonly Box[]): readonly Ink[] {
+  const { view, content, assessment, units, trail, grown } = input;
+  const { bay, selected, bow } = content;
+  const { layout } = assessment;
+  const dimensions = bay === null ? [] : dimensionInk(view, bay, units);
+  const restraint = selected === null ? null : (assessment.diagonals.get(selected.id)?.restraint ?? null);
+  return [
+    ...(bay === null ? [] : groundInk(view, layout, bay)),
+    ...(bay === null ? [] : setOutInk(view, layout, bay)),
+    ...dimensions,
+    ...(bay === null ? [] : lineNamesInk(view, layout, bay)),
+    ...(trail === null ? [] : trailInk(view, layout, trail, selected?.id ?? null)),
+    ...(selected === null || bow === null ? [] : bowInk(view, selected, bow, grown)),
+    ...(selected?.angle && bow !== null && restraint !== null
+      ? holdInk(view, selected, selected.angle, restraint, bow, [...marks, ...wordsIn(dimensions)])
+      : []),
+  ];
+}
+
+function ends(view: SheetView, content: OverlayContent): readonly (readonly [string, Place])[] {
+  return content.diagonals.flatMap(({ bar }) => {
+    const i = onSheet(view, endPlace(bar, 'i'));
+    const j = onSheet(view, endPlace(bar, 'j'));
+    const run: Vec2 = [j[0] - i[0], j[1] - i[1]];
+    if (Math.hypot(run[0], run[1]) < SHORTEST_WITH_ENDS) return [];
+    const turn = (Math.atan2(run[1], run[0]) * 180) / Math.PI;
+    return [
+      [`end ${bar.id}:i`, { x: i[0], y: i[1], turn }],
+      [`end ${bar.id}:j`, { x: j[0], y: j[1], turn }],
+    ] as const;
+  });
+}
+
+function within(sheet: Box, x: number, y: number): boolean {
+  return x >= sheet.left && x <= sheet.left + sheet.width && y >= sheet.top && y <= sheet.top + sheet.height;
+}
+
+function wordsIn(inks: readonly Ink[]): readonly Box[] {
+  return inks.flatMap((ink) => (ink.kind === 'words' ? [wordsBox(ink)] : []));
+}
