@@ -2,7 +2,7 @@ import { dot2, type Vec2 } from '../geometry/vector.ts';
 import { motionAbout } from '../section/direction.ts';
 import { AXES, type Axis, type SectionProperties } from '../section/model.ts';
 import { squareTo } from './directions.ts';
-import type { Governing, Lane } from './model.ts';
+import type { Governing, Lane, Piece } from './model.ts';
 import type { RuleResult } from './rule.ts';
 
 /** A direction this near to an axis's motion is called by the axis: half a degree. */
@@ -38,21 +38,29 @@ export function governingOf(
     });
   const overridden = AXES.map((axis) => lanes[axis]).filter((lane) => lane.override);
   const standing = candidates.filter((each) => !overridden.some((lane) => lane.axis === each.axis));
-  const own = overridden.map(
-    (lane): Governing => ({
-      axis: lane.axis,
-      angle: null,
-      length: lane.unbraced,
-      radius: lane.radius,
-      slenderness: lane.slenderness,
-      from: 0,
-      to: barLength,
-      basis: 'override',
-      freeDirection: lane.axis === 'v' ? null : lane.motion,
-    }),
+  // A span that is named by an overridden axis falls away, and the other axes it also stood for must not fall with it.
+  const others =
+    overridden.length === 0 ? [] : AXES.map((axis) => lanes[axis]).filter((lane) => !lane.override);
+  const alone = others.map(
+    (lane): Governing => ({ ...longestPiece(lane), ...laneBowing(lane), basis: 'span' }),
   );
-  return [...standing, ...own].reduce((worst, each) => (isWorse(each, worst) ? each : worst));
+  const own = overridden.map(
+    (lane): Governing => ({ from: 0, to: barLength, ...laneBowing(lane), basis: 'override' }),
+  );
+  return [...standing, ...alone, ...own].reduce((worst, each) => (isWorse(each, worst) ? each : worst));
 }
+
+const laneBowing = (lane: Lane) => ({
+  axis: lane.axis,
+  angle: null,
+  length: lane.unbraced,
+  radius: lane.radius,
+  slenderness: lane.slenderness,
+  freeDirection: lane.axis === 'v' ? null : lane.motion,
+});
+
+const longestPiece = (lane: Lane): Piece =>
+  lane.pieces.reduce((most, piece) => (piece.to - piece.from > most.to - most.from ? piece : most));
 
 /** Ties go to the bowing that names an axis parallel to a leg, which is the one a reader can see. */
 function isWorse(each: Governing, worst: Governing): boolean {
