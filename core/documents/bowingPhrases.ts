@@ -40,7 +40,7 @@ export function whyItSwings(claims: readonly Claim[], nameOf: NameOf): string {
       case 'hung':
         return `only hangs from ${names}`;
       case 'line free along itself':
-        return `only moves ${names} along`;
+        return `only moves ${names} along with it`;
       case 'bar ends here, itself free':
         return `meets ${names}, itself free`;
       case 'nearly along the bar':

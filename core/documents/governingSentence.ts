@@ -157,12 +157,12 @@ function pushes(
 
 function pushedWay(direction: HoldDirection): string {
   switch (direction) {
+    // What runs across a bay runs in its plane.
     case 'in plane':
+    case 'along holder':
       return 'Pushed in the plane';
     case 'out of plane':
       return 'Pushed out of the plane';
-    case 'along holder':
-      return 'Pushed along what holds it';
     case 'twist':
       return 'Twisted';
     default:

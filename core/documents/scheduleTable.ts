@@ -4,6 +4,7 @@ import { grouped } from '../units/figures.ts';
 import { showSlenderness } from '../units/quantity.ts';
 import { KG_PER_POUND } from '../units/unitSystem.ts';
 import type { RowVerdict, ScheduleRow } from './model.ts';
+import { oneLine } from './oneLine.ts';
 import { type TextColumn, textTable } from './textTable.ts';
 
 const ABSENT = '–';
@@ -81,7 +82,8 @@ function verdictCell(verdict: RowVerdict | null): string {
 function findingLines(rows: readonly ScheduleRow[]): readonly string[] {
   const lines = new Map<string, string>();
   for (const row of rows)
-    for (const { id, severity, title } of row.findings) lines.set(id, `${severity}: ${row.bay}: ${title}`);
+    for (const { id, severity, title } of row.findings)
+      lines.set(id, oneLine(`${severity}: ${row.bay}: ${title}`));
   return [...lines.values()];
 }
 

@@ -1,4 +1,5 @@
 /** A table in plain text, for a terminal or a letter in a fixed-width face. */
+import { oneLine } from './oneLine.ts';
 
 export interface TextColumn {
   readonly head: string;
@@ -19,7 +20,7 @@ export function textTable(columns: readonly TextColumn[], rows: readonly (readon
   return `${[line(columns.map(({ head }) => head)), rule, ...rows.map(line)].join('\n')}\n`;
 }
 
-/** Characters that a terminal shows, each taken as one wide; control characters of user text are left out beforehand. */
+/** Characters that a terminal shows, each taken as one wide. */
 function shownWidth(text: string): number {
   return [...oneLine(text)].length;
 }
@@ -28,9 +29,4 @@ function padded(text: string, width: number, align: 'left' | 'right'): string {
   const shown = oneLine(text);
   const space = ' '.repeat(Math.max(0, width - shownWidth(text)));
   return align === 'left' ? shown + space : space + shown;
-}
-
-/** Text of the user's own must not move the cursor or change the terminal. */
-function oneLine(text: string): string {
-  return text.replaceAll(/\p{Cc}+/gu, ' ');
 }

@@ -1,4 +1,5 @@
 import { Command, CommanderError } from 'commander';
+import { oneLine } from '../../core/documents/oneLine.ts';
 import { addAssessCommand } from './assessCommand.ts';
 import { endingOn } from './ending.ts';
 import { BAD_INPUT, type ExitCode, FINE } from './exitCode.ts';
@@ -29,7 +30,8 @@ Examples
  * @param words what was typed after the program's name
  * @returns how it ended; nothing is thrown for what the user typed
  */
-export async function runCommandLine(words: readonly string[], terminal: Terminal): Promise<ExitCode> {
+export async function runCommandLine(words: readonly string[], where: Terminal): Promise<ExitCode> {
+  const terminal = withPlainMessages(where);
   const ending = endingOn(terminal);
   const program = new Command('tautline')
     .description(
@@ -57,4 +59,9 @@ export async function runCommandLine(words: readonly string[], terminal: Termina
     if (error instanceof CommanderError) return error.exitCode === 0 ? FINE : BAD_INPUT;
     throw error;
   }
+}
+
+/** Names out of project files stand in messages, and must not move the cursor or change the terminal. */
+function withPlainMessages({ out, err }: Terminal): Terminal {
+  return { out, err: (text) => err(text.split('\n').map(oneLine).join('\n')) };
 }
