@@ -7,6 +7,7 @@ export const ROOMS: readonly (readonly string[])[] = [
   ['layout'],
   ['practice'],
   ['restraint'],
+  ['frame'],
   ['stability'],
   ['shortlist'],
   ['findings'],

@@ -40,10 +40,10 @@ export async function noteCommands(page: Page): Promise<() => Promise<readonly H
   return () => page.evaluate(() => Reflect.get(window, 'heardCommands'));
 }
 
-/** Waits until `look` gives what is wanted; the message names what was seen last. */
+/** Waits up to ten seconds until `look` gives what is wanted; the message names what was seen last. */
 export async function until<T>(look: () => Promise<T>, wanted: (seen: T) => boolean): Promise<T> {
   let seen = await look();
-  for (let tries = 0; tries < 100 && !wanted(seen); tries += 1) {
+  for (let tries = 0; tries < 330 && !wanted(seen); tries += 1) {
     await new Promise((resolve) => setTimeout(resolve, 30));
     seen = await look();
   }

@@ -41,6 +41,10 @@ export interface Desktop {
   lead(address: string): Promise<void>;
   /** An address of the program as this host's pages know it. */
   address(app: string): string;
+  /** The page stops answering, as far as main is told. */
+  hang(): Promise<void>;
+  /** The page's own process breaks down; main goes on. */
+  crashPage(): Promise<void>;
   /** Ends it at once, as a power cut would. */
   crash(): Promise<void>;
   end(): Promise<void>;

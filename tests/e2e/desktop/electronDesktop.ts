@@ -74,6 +74,12 @@ export async function electronDesktop(binary: string, setting: DesktopSetting): 
       }),
     lead: async (address) => void (await page.goto(address)),
     address: (app) => app,
+    hang: () =>
+      program.evaluate(({ BrowserWindow }) => void BrowserWindow.getAllWindows()[0]?.emit('unresponsive')),
+    crashPage: () =>
+      program.evaluate(({ BrowserWindow }) =>
+        BrowserWindow.getAllWindows()[0]?.webContents.forcefullyCrashRenderer(),
+      ),
     async crash() {
       program.process().kill('SIGKILL');
       await quit;

@@ -12,6 +12,7 @@ let chromium: Promise<Browser> | null = null;
 export async function standInDesktop(setting: DesktopSetting): Promise<Desktop> {
   chromium ??= launchChromium();
   const context = await (await chromium).newContext();
+  context.setDefaultTimeout(10_000);
   const home = path.join(setting.userData, 'home');
   const standIn = new StandIn({ ...setting, context, home });
   await standIn.start();
@@ -39,6 +40,8 @@ export async function standInDesktop(setting: DesktopSetting): Promise<Desktop> 
       await page.goto(plainAddress(address));
     },
     address: plainAddress,
+    hang: async () => void window.emit('unresponsive'),
+    crashPage: async () => void window.webContents.emit('render-process-gone', {}, { reason: 'crashed' }),
     crash: () => standIn.crash(),
     end: () => standIn.crash(),
   };

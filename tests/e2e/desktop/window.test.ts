@@ -40,6 +40,42 @@ describe('closing', () => {
   });
 });
 
+describe('a window that cannot ask', () => {
+  async function unsavedWork(): Promise<void> {
+    await ask(desktop.page, 'setDocumentState', { title: 'Shed', dirty: true });
+    await ask(desktop.page, 'autosave', {
+      name: 'Shed',
+      token: null,
+      text: 'work',
+      savedAt: '2026-02-03T04:05:06.000Z',
+    });
+  }
+  const recoveryText = async (): Promise<string> =>
+    JSON.parse(await readFile(path.join(desktop.userData, 'recovery.json'), 'utf8')).text;
+
+  it('because it hangs is waited for, or closed without losing what was kept', async () => {
+    await unsavedWork();
+    await desktop.hang();
+    await desktop.reply('message', { response: 0 });
+    await desktop.clickClose();
+    expect(await desktop.hasQuit(300)).toBe(false);
+    expect(await desktop.asked()).toEqual(['message']);
+
+    await desktop.reply('message', { response: 1 });
+    await desktop.clickClose();
+    expect(await desktop.hasQuit(3000)).toBe(true);
+    expect(await recoveryText()).toBe('work');
+  });
+
+  it('because it broke down can be left, and what was kept stays', async () => {
+    await unsavedWork();
+    await desktop.reply('message', { response: 1 });
+    await desktop.crashPage();
+    expect(await desktop.hasQuit(3000)).toBe(true);
+    expect(await recoveryText()).toBe('work');
+  });
+});
+
 describe('the window', () => {
   it('shows the project and whether it is saved in its title', async () => {
     await ask(desktop.page, 'setDocumentState', { title: 'Marrow Lane', dirty: false });
