@@ -3,7 +3,7 @@ import type { Mesh } from './mesh.ts';
 import type { BarProblem } from './model.ts';
 import { fieldsOf, type PieceFields } from './pieceFields.ts';
 import { clampedLoadsBelow, type MemberStiffness, memberStiffness } from './stabilityFunctions.ts';
-import { type Unknown, type Unknowns, unknownsOf } from './unknowns.ts';
+import type { Unknown, Unknowns } from './unknowns.ts';
 
 export interface Trial {
   /** Critical loads below the trial load. */
@@ -23,33 +23,68 @@ interface Scatter {
 const KINDS = ['force', 'cross', 'near', 'far'] as const;
 type Kind = (typeof KINDS)[number];
 
-/** A bar ready to be tried at one load factor after another. Not to be shared between two that try at once. */
-export class LoadedBar {
+/** One bar of a system: what it is, its mesh, and which unknowns it has. */
+export interface SystemPart {
+  readonly problem: BarProblem;
+  readonly mesh: Mesh;
   readonly unknowns: Unknowns;
-  readonly #mesh: Mesh;
-  readonly #fieldsAt: (N: number) => PieceFields;
-  readonly #scatters: readonly Scatter[];
+}
+
+/** Bars ready to be tried at one load factor after another: one alone, or several that share unknowns. Not to be used by two that try at once. */
+export class LoadedSystem {
+  readonly #parts: readonly LoadedPart[];
+  readonly #size: number;
+  readonly #width: number;
   /** Springs: the same at every load. */
   readonly #fixed: Float64Array;
   readonly #band: Float64Array;
-  readonly #numbers: Float64Array;
-  readonly #stiffness: MemberStiffness = { force: 0, cross: 0, near: 0, far: 0 };
 
-  constructor(problem: BarProblem, mesh: Mesh) {
-    this.#mesh = mesh;
-    this.#fieldsAt = fieldsOf(problem);
-    this.unknowns = unknownsOf(mesh);
-    const { size, width } = this.unknowns;
-    this.#band = new Float64Array(size * width);
-    this.#fixed = springBand(mesh, this.unknowns);
-    this.#numbers = new Float64Array(KINDS.length * mesh.fields * mesh.fields);
-    this.#scatters = mesh.pieces.map((_, k) => scatterOf(mesh, this.unknowns, k, problem.twist !== null));
+  constructor(parts: readonly SystemPart[]) {
+    this.#size = parts.reduce((most, { unknowns }) => Math.max(most, unknowns.size), 0);
+    this.#width = parts.reduce((most, { unknowns }) => Math.max(most, unknowns.width), 1);
+    this.#band = new Float64Array(this.#size * this.#width);
+    this.#fixed = new Float64Array(this.#size * this.#width);
+    for (const { mesh, unknowns } of parts) addSprings(this.#fixed, this.#width, mesh, unknowns);
+    this.#parts = parts.map((part) => new LoadedPart(part, this.#width));
+  }
+
+  get size(): number {
+    return this.#size;
   }
 
   /** Assembles, factors in place and counts. */
   tried(factor: number): Trial {
     this.#band.set(this.#fixed);
+    let clamped = 0;
+    for (const part of this.#parts) clamped += part.addTo(this.#band, factor);
+    const { negative, logDeterminant } = factorBand(this.#band, this.#size, this.#width);
+    return { below: clamped + negative, clamped, logDeterminant };
+  }
+
+  /** Solves with the factors of the last trial, in place. */
+  solve(rhs: Float64Array): void {
+    solveBand(this.#band, this.#size, this.#width, rhs);
+  }
+}
+
+class LoadedPart {
+  readonly #mesh: Mesh;
+  readonly #fieldsAt: (N: number) => PieceFields;
+  readonly #scatters: readonly Scatter[];
+  readonly #numbers: Float64Array;
+  readonly #stiffness: MemberStiffness = { force: 0, cross: 0, near: 0, far: 0 };
+
+  constructor({ problem, mesh, unknowns }: SystemPart, width: number) {
+    this.#mesh = mesh;
+    this.#fieldsAt = fieldsOf(problem);
+    this.#numbers = new Float64Array(KINDS.length * mesh.fields * mesh.fields);
+    this.#scatters = mesh.pieces.map((_, k) => scatterOf(mesh, unknowns, width, k, problem.twist !== null));
+  }
+
+  /** Adds the stiffness of all pieces at a load factor and returns the clamped count. */
+  addTo(band: Float64Array, factor: number): number {
     const { pieces } = this.#mesh;
+    const numbers = this.#numbers;
     let clamped = 0;
     for (let k = 0; k < pieces.length; k++) {
       const piece = pieces[k];
@@ -57,20 +92,12 @@ export class LoadedBar {
       if (!piece || !scatter) continue;
       clamped += this.#numbersOf(piece.length, piece.share * factor);
       const { place, source, weight } = scatter;
-      const band = this.#band;
-      const numbers = this.#numbers;
       for (let e = 0; e < place.length; e++) {
         const at = place[e] ?? 0;
         band[at] = (band[at] ?? 0) + (weight[e] ?? 0) * (numbers[source[e] ?? 0] ?? 0);
       }
     }
-    const { negative, logDeterminant } = factorBand(this.#band, this.unknowns.size, this.unknowns.width);
-    return { below: clamped + negative, clamped, logDeterminant };
-  }
-
-  /** Solves with the factors of the last trial, in place. */
-  solve(rhs: Float64Array): void {
-    solveBand(this.#band, this.unknowns.size, this.unknowns.width, rhs);
+    return clamped;
   }
 
   /** Fills the numbers of one piece and returns its clamped count. */
@@ -123,14 +150,18 @@ function couplingOf(
   return { kind: 'cross', sign: displacementAtStart ? 1 : -1 };
 }
 
-function scatterOf(mesh: Mesh, unknowns: Unknowns, k: number, mixed: boolean): Scatter {
+function scatterOf(mesh: Mesh, unknowns: Unknowns, width: number, k: number, mixed: boolean): Scatter {
   const m = mesh.fields;
   const place: number[] = [];
   const source: number[] = [];
   const weight: number[] = [];
   const ends = [
-    ...(unknowns.ofNode[k] ?? []).map((unknown) => ({ unknown, atStart: true })),
-    ...(unknowns.ofNode[k + 1] ?? []).map((unknown) => ({ unknown, atStart: false })),
+    ...(unknowns.ofNode[k] ?? [])
+      .filter(({ side }) => side !== 'before')
+      .map((unknown) => ({ unknown, atStart: true })),
+    ...(unknowns.ofNode[k + 1] ?? [])
+      .filter(({ side }) => side !== 'after')
+      .map((unknown) => ({ unknown, atStart: false })),
   ];
   for (const row of ends)
     for (const column of ends) {
@@ -141,7 +172,7 @@ function scatterOf(mesh: Mesh, unknowns: Unknowns, k: number, mixed: boolean): S
         for (let j = 0; j < m; j++) {
           const share = sign * (row.unknown.weights[i] ?? 0) * (column.unknown.weights[j] ?? 0);
           if (share === 0 || (!mixed && i !== j)) continue;
-          place.push(row.unknown.index * unknowns.width + (row.unknown.index - column.unknown.index));
+          place.push(row.unknown.index * width + (row.unknown.index - column.unknown.index));
           source.push(base + i * m + j);
           weight.push(share);
         }
@@ -153,9 +184,8 @@ function scatterOf(mesh: Mesh, unknowns: Unknowns, k: number, mixed: boolean): S
   };
 }
 
-function springBand(mesh: Mesh, unknowns: Unknowns): Float64Array {
+function addSprings(band: Float64Array, width: number, mesh: Mesh, unknowns: Unknowns): void {
   const m = mesh.fields;
-  const band = new Float64Array(unknowns.size * unknowns.width);
   mesh.nodes.forEach((node, k) => {
     const list = unknowns.ofNode[k] ?? [];
     for (const [of, springs] of [
@@ -170,12 +200,11 @@ function springBand(mesh: Mesh, unknowns: Unknowns): Float64Array {
           for (let i = 0; i < m; i++)
             for (let j = 0; j < m; j++)
               sum += (row.weights[i] ?? 0) * (springs[i * m + j] ?? 0) * (column.weights[j] ?? 0);
-          const at = row.index * unknowns.width + (row.index - column.index);
+          const at = row.index * width + (row.index - column.index);
           band[at] = (band[at] ?? 0) + sum;
         }
     }
   });
-  return band;
 }
 
 /** LDLᵀ within the band, in place: D on the diagonal, L below it. */

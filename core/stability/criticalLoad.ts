@@ -1,6 +1,7 @@
-import { LoadedBar, type Trial } from './assembly.ts';
+import { LoadedSystem, type Trial } from './assembly.ts';
 import { meshOf } from './mesh.ts';
 import type { BarProblem, CriticalLoad } from './model.ts';
+import { unknownsOf } from './unknowns.ts';
 
 /** Relative width at which a root counts as found. */
 const TOLERANCE = 1e-11;
@@ -16,7 +17,8 @@ export function criticalLoad(
 ): CriticalLoad {
   const most = problem.axial.reduce((largest, piece) => Math.max(largest, piece.share), 0);
   if (!(most > 0)) return { factor: null, N: null, second: null, trials: 0 };
-  const search = new RootSearch(new LoadedBar(problem, meshOf(problem)));
+  const mesh = meshOf(problem);
+  const search = new RootSearch(new LoadedSystem([{ problem, mesh, unknowns: unknownsOf(mesh) }]));
   const { E, length, section } = problem;
   const euler = (Math.PI * Math.PI * E * section.Iv) / (length * length * most);
   const factor = search.root(1, euler);
@@ -24,12 +26,17 @@ export function criticalLoad(
   return { factor, N: factor * most, second, trials: search.trials };
 }
 
-class RootSearch {
-  trials = 0;
-  readonly #bar: LoadedBar;
+export interface Triable {
+  tried(factor: number): Trial;
+}
 
-  constructor(bar: LoadedBar) {
-    this.#bar = bar;
+/** Finds critical factors of anything that can be tried at a factor. */
+export class RootSearch {
+  trials = 0;
+  readonly #system: Triable;
+
+  constructor(system: Triable) {
+    this.#system = system;
   }
 
   /** The factor below which fewer than `rank` critical loads lie, and above which at least that many do. */
@@ -87,6 +94,6 @@ class RootSearch {
 
   #tried(factor: number): Trial {
     this.trials += 1;
-    return this.#bar.tried(factor);
+    return this.#system.tried(factor);
   }
 }

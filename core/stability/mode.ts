@@ -1,23 +1,25 @@
 import type { Vec2 } from '../geometry/vector.ts';
-import { LoadedBar } from './assembly.ts';
+import { LoadedSystem } from './assembly.ts';
 import { type Mesh, meshOf, principalMotions } from './mesh.ts';
 import type { BarProblem, BucklingMode, ModePoint } from './model.ts';
+import { type Unknowns, unknownsOf } from './unknowns.ts';
 
 /** Parts of each piece between stations: enough to draw, and for shares of energy to four digits. */
-const PARTS = 16;
+export const PARTS = 16;
 
 /** The shape in which the bar bows at a critical load factor found by `criticalLoad`. */
 export function bucklingMode(problem: BarProblem, factor: number): BucklingMode {
   const mesh = meshOf(problem, PARTS);
-  const bar = new LoadedBar(problem, mesh);
+  const unknowns = unknownsOf(mesh);
+  const bar = new LoadedSystem([{ problem, mesh, unknowns }]);
   // A hair off the root keeps the factors finite; inverse iteration then picks the one shape that hardly resists.
   bar.tried(factor * (1 - 1e-9));
   const shape = nullShape(bar);
-  return modeOf(problem, mesh, fieldsAtNodes(mesh, bar, shape));
+  return modeOf(problem, mesh, unknowns, shape);
 }
 
-function nullShape(bar: LoadedBar): Float64Array {
-  const { size } = bar.unknowns;
+export function nullShape(bar: LoadedSystem): Float64Array {
+  const { size } = bar;
   // A start without symmetry, the same every time.
   const x = Float64Array.from({ length: size }, (_, k) => Math.sin(1 + 2.3 * k));
   for (let sweep = 0; sweep < 4; sweep++) {
@@ -34,11 +36,11 @@ interface NodeFields {
   readonly slope: readonly number[];
 }
 
-function fieldsAtNodes(mesh: Mesh, bar: LoadedBar, x: Float64Array): readonly NodeFields[] {
+function fieldsAtNodes(mesh: Mesh, unknowns: Unknowns, x: Float64Array): readonly NodeFields[] {
   return mesh.nodes.map((node, k) => {
     const w = new Array<number>(mesh.fields).fill(0);
     const slope = new Array<number>(mesh.fields).fill(0);
-    for (const unknown of bar.unknowns.ofNode[k] ?? []) {
+    for (const unknown of unknowns.ofNode[k] ?? []) {
       const into = unknown.of === 'displacement' ? w : slope;
       unknown.weights.forEach((weight, field) => {
         into[field] = (into[field] ?? 0) + weight * (x[unknown.index] ?? 0);
@@ -48,7 +50,14 @@ function fieldsAtNodes(mesh: Mesh, bar: LoadedBar, x: Float64Array): readonly No
   });
 }
 
-function modeOf(problem: BarProblem, mesh: Mesh, nodes: readonly NodeFields[]): BucklingMode {
+/** A solution read as the shape of one bar. */
+export function modeOf(
+  problem: BarProblem,
+  mesh: Mesh,
+  unknowns: Unknowns,
+  solution: Float64Array,
+): BucklingMode {
+  const nodes = fieldsAtNodes(mesh, unknowns, solution);
   const { E, section, length } = problem;
   const { weak, strong } = principalMotions(section.alpha);
   const [sx, sy] = mesh.fields === 3 ? section.shearCentre : [0, 0];

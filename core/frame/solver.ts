@@ -1,0 +1,199 @@
+import { dot, type Vec3 } from '../geometry/vector.ts';
+import type { BarId } from '../layout/model.ts';
+import { eliminationOrder } from '../sparse/eliminationOrder.ts';
+import { analysed, type Factored, factored, solved } from '../sparse/factor.ts';
+import { MatrixGatherer, type SymmetricMatrix } from '../sparse/symmetricMatrix.ts';
+import { ELEMENT_SIZE, elementStiffness } from './elementStiffness.ts';
+import type { Frame, Mechanism, NodeMotion } from './model.ts';
+
+/** A force on a node, N. */
+export interface NodeForce {
+  readonly node: number;
+  readonly force: Vec3;
+}
+
+/** A frame assembled and factored, ready to be pushed. */
+export class FrameSolver {
+  readonly frame: Frame;
+  readonly matrix: SymmetricMatrix;
+  /** First unknown of the displacements and of the rotations of each node; −1 where fixed. */
+  readonly displacementOf: Int32Array;
+  readonly rotationOf: Int32Array;
+  readonly #factors: Factored;
+
+  constructor(frame: Frame) {
+    this.frame = frame;
+    const { nodes } = frame;
+    this.displacementOf = new Int32Array(nodes.length).fill(-1);
+    this.rotationOf = new Int32Array(nodes.length).fill(-1);
+    let size = 0;
+    nodes.forEach((node, k) => {
+      if (leader(frame, k) === k && !isFixed(frame, k)) {
+        this.displacementOf[k] = size;
+        size += 3;
+      }
+      if (!node.fixed) {
+        this.rotationOf[k] = size;
+        size += 3;
+      }
+    });
+    nodes.forEach((_, k) => {
+      this.displacementOf[k] = this.displacementOf[leader(frame, k)] ?? -1;
+    });
+    const gatherer = new MatrixGatherer(size, frame.elements.length * 78);
+    this.#assemble(gatherer);
+    this.matrix = gatherer.matrix();
+    this.#factors = factored(this.matrix, analysed(this.matrix, this.#order(size)));
+  }
+
+  get size(): number {
+    return this.matrix.size;
+  }
+
+  get negativePivots(): number {
+    return this.#factors.negative;
+  }
+
+  /** Unknowns of an element or spring in its own order; −1 where held. */
+  unknownsOf(i: number, j: number): readonly number[] {
+    const three = (first: number): number[] => (first < 0 ? [-1, -1, -1] : [first, first + 1, first + 2]);
+    return [
+      ...three(this.displacementOf[i] ?? -1),
+      ...three(this.rotationOf[i] ?? -1),
+      ...three(this.displacementOf[j] ?? -1),
+      ...three(this.rotationOf[j] ?? -1),
+    ];
+  }
+
+  solve(load: Float64Array): Float64Array {
+    return solved(this.#factors, load);
+  }
+
+  loadOf(forces: readonly NodeForce[]): Float64Array {
+    const load = new Float64Array(this.size);
+    for (const { node, force } of forces) {
+      const first = this.displacementOf[node] ?? -1;
+      if (first < 0) continue;
+      for (let k = 0; k < 3; k++) load[first + k] = (load[first + k] ?? 0) + (force[k] ?? 0);
+    }
+    return load;
+  }
+
+  motionOf(x: Float64Array, node: number): NodeMotion {
+    const at = (first: number, k: number): number => (first < 0 ? 0 : (x[first + k] ?? 0));
+    const d = this.displacementOf[node] ?? -1;
+    const r = this.rotationOf[node] ?? -1;
+    return [at(d, 0), at(d, 1), at(d, 2), at(r, 0), at(r, 1), at(r, 2)];
+  }
+
+  /** Ways to move without resistance in which some node displaces. A rotation that nothing resists and that moves nothing is no mechanism. */
+  mechanisms(): readonly Mechanism[] {
+    return this.#factors.vanished.flatMap((unknown) => this.#mechanismOf(unknown) ?? []);
+  }
+
+  #mechanismOf(unknown: number): Mechanism | null {
+    const { symbolic, diagonal } = this.#factors;
+    const load = new Float64Array(this.size);
+    load[unknown] = diagonal[symbolic.place[unknown] ?? 0] ?? 0;
+    const x = this.solve(load);
+    const displacement = (k: number): Vec3 => {
+      const [a, b, c] = this.motionOf(x, k);
+      return [a, b, c];
+    };
+    const sizes = this.frame.nodes.map((_, k) => Math.hypot(...displacement(k)));
+    const most = Math.max(...sizes, 0);
+    let turning = 0;
+    for (let k = 0; k < this.size; k++) turning = Math.max(turning, Math.abs(x[k] ?? 0));
+    if (most <= 1e-6 * turning) return null;
+    const moving = sizes
+      .map((size, node) => ({ size, node }))
+      .filter(({ size }) => size > 1e-3 * most)
+      .sort((a, b) => b.size - a.size)
+      .map(({ node }) => {
+        const [a, b, c] = displacement(node);
+        return { node, displacement: [a / most, b / most, c / most] as const };
+      });
+    const moved = new Set(moving.map(({ node }) => node));
+    const bars = new Set<BarId>();
+    for (const { i, j, bar } of this.frame.elements) if (moved.has(i) || moved.has(j)) bars.add(bar);
+    return { moving, bars: [...bars] };
+  }
+
+  #assemble(gatherer: MatrixGatherer): void {
+    for (const element of this.frame.elements)
+      addBlock(gatherer, this.unknownsOf(element.i, element.j), elementStiffness(element), ELEMENT_SIZE);
+    for (const spring of this.frame.springs) {
+      const first = spring.kind === 'displacement' ? this.displacementOf : this.rotationOf;
+      const unknowns: number[] = [];
+      const weights: number[] = [];
+      const put = (node: number, sign: number): void => {
+        const at = first[node] ?? -1;
+        if (at < 0) return;
+        spring.direction.forEach((d, k) => {
+          unknowns.push(at + k);
+          weights.push(sign * d);
+        });
+      };
+      put(spring.node, 1);
+      if (spring.other !== null) put(spring.other, -1);
+      for (let a = 0; a < unknowns.length; a++)
+        for (let b = a; b < unknowns.length; b++) {
+          const value = spring.stiffness * (weights[a] ?? 0) * (weights[b] ?? 0);
+          const same = unknowns[a] === unknowns[b] && a !== b;
+          if (value !== 0) gatherer.add(unknowns[a] ?? 0, unknowns[b] ?? 0, same ? 2 * value : value);
+        }
+    }
+  }
+
+  /** Joints are ordered as wholes, three unknowns at a time. */
+  #order(size: number): Int32Array {
+    const groups = size / 3;
+    const neighbours = Array.from({ length: groups }, () => new Set<number>());
+    for (let c = 0; c < size; c++)
+      for (let k = this.matrix.start[c] ?? 0; k < (this.matrix.start[c + 1] ?? 0); k++) {
+        const a = Math.floor(c / 3);
+        const b = Math.floor((this.matrix.row[k] ?? 0) / 3);
+        if (a === b) continue;
+        neighbours[a]?.add(b);
+        neighbours[b]?.add(a);
+      }
+    const order = new Int32Array(size);
+    eliminationOrder(neighbours.map((set) => [...set])).forEach((group, k) => {
+      for (let c = 0; c < 3; c++) order[3 * k + c] = 3 * group + c;
+    });
+    return order;
+  }
+}
+
+function leader(frame: Frame, node: number): number {
+  let at = node;
+  for (let next = frame.nodes[at]?.movesWith ?? at; next !== at; next = frame.nodes[at]?.movesWith ?? at)
+    at = next;
+  return at;
+}
+
+function isFixed(frame: Frame, node: number): boolean {
+  return frame.nodes[node]?.fixed ?? false;
+}
+
+/** Adds an element's block; two of its unknowns may be one and the same. */
+function addBlock(
+  gatherer: MatrixGatherer,
+  unknowns: readonly number[],
+  K: Float64Array,
+  size: number,
+): void {
+  for (let a = 0; a < size; a++) {
+    const i = unknowns[a] ?? -1;
+    if (i < 0) continue;
+    for (let b = a; b < size; b++) {
+      const j = unknowns[b] ?? -1;
+      const value = K[a * size + b] ?? 0;
+      if (j < 0 || value === 0) continue;
+      gatherer.add(i, j, a !== b && i === j ? 2 * value : value);
+    }
+  }
+}
+
+export const component = (motion: NodeMotion, direction: Vec3): number =>
+  dot([motion[0], motion[1], motion[2]], direction);
