@@ -93,7 +93,10 @@ async function run(named: string | null): Promise<void> {
     if (file !== null) takeFile(file);
   });
   takeFile = (file) => send({ kind: 'open recent', token: files.tokenOf(file) });
-  await window.loadURL(WINDOW_ADDRESS);
+  await window.loadURL(WINDOW_ADDRESS).catch((reason: unknown) => {
+    // A window closed before it has loaded is no failure.
+    if (!window.isDestroyed()) throw reason;
+  });
 
   function send(command: HostCommand): void {
     if (!window.isDestroyed()) window.webContents.send(COMMAND_CHANNEL, command);
