@@ -27,7 +27,7 @@ export function structureProblems(project: Project): readonly ProjectProblem[] {
       });
   });
   project.bays.forEach((bay, index) => {
-    problems.push(...bayProblems(bay, `bays[${index}].recipe`));
+    problems.push(...bayProblems(bay, `bays[${index}].recipe`), ...markProblems(bay, `bays[${index}].bars`));
   });
   return problems;
 }
@@ -47,6 +47,17 @@ function bayProblems(bay: Bay, path: string): readonly ProjectProblem[] {
   }
 }
 
+/** Of two overrides of one axis only one could be in force. */
+function markProblems(bay: Bay, path: string): readonly ProjectProblem[] {
+  return Object.entries(bay.bars).flatMap(([key, mark]) =>
+    repeated((mark.overrides ?? []).map((override) => override.axis)).map(({ index, value }) => ({
+      path: `${path}.${key}.overrides[${index}].axis`,
+      what: `The length about ${value} is set twice for ${key}.`,
+      todo: 'Keep one of them.',
+    })),
+  );
+}
+
 function wallProblems(recipe: WallRecipe, path: string): ProjectProblem[] {
   const height = recipe.tiers.reduce((sum, tier) => sum + tier.height, 0);
   return [...sameIds(recipe.tiers, `${path}.tiers`), ...lineProblems(recipe.lines, height, path)];
@@ -55,9 +66,10 @@ function wallProblems(recipe: WallRecipe, path: string): ProjectProblem[] {
 function roofProblems(recipe: RoofRecipe, path: string): ProjectProblem[] {
   const slopes = sameIds(recipe.slopes, `${path}.slopes`);
   // Lines of both slopes share the bay's names.
-  const lines = sameIds(
-    recipe.slopes.flatMap((slope) => slope.lines),
-    `${path}.slopes`,
+  const lines = sameIdsAt(
+    recipe.slopes.flatMap((slope, s) =>
+      slope.lines.map((line, k) => ({ id: line.id, at: `${path}.slopes[${s}].lines[${k}].id` })),
+    ),
   );
   const each = recipe.slopes.flatMap((slope, index) => {
     const length = slope.panels.reduce((sum, panel) => sum + panel.height, 0);
@@ -98,9 +110,12 @@ function freeProblems(recipe: FreeRecipe, path: string): ProjectProblem[] {
 
 type Named = { readonly id: string };
 
-function sameIds(things: readonly Named[], path: string): ProjectProblem[] {
+const sameIds = (things: readonly Named[], path: string): ProjectProblem[] =>
+  sameIdsAt(things.map((thing, index) => ({ id: thing.id, at: `${path}[${index}].id` })));
+
+function sameIdsAt(things: readonly (Named & { readonly at: string })[]): ProjectProblem[] {
   return repeated(things.map((thing) => thing.id)).map(({ index, value }) => ({
-    path: `${path}[${index}].id`,
+    path: things[index]?.at ?? '',
     what: `"${value}" is used twice.`,
     todo: 'Give each its own name.',
   }));
