@@ -1,4 +1,4 @@
-import { add } from '../../geometry/vector.ts';
+import { add, along, type Vec3 } from '../../geometry/vector.ts';
 import type { Bar, BarId, BayLayout, Crossing, Layout, Plane } from '../../layout/model.ts';
 import type { UnitSystem } from '../../project/model.ts';
 import { showLength } from '../../units/quantity.ts';
@@ -9,9 +9,9 @@ import { dimensionLines } from './dimensions.ts';
 import { type Box, drawnFlag, type Flag, placedFlags } from './flags.ts';
 import { type JoinShape, joinGlyph } from './joinGlyph.ts';
 import { levelMarks } from './levelMarks.ts';
-import { memberStrip } from './memberStrip.ts';
+import { memberStrip, seenWidth } from './memberStrip.ts';
 import { closedPath } from './path.ts';
-import { nodeMarks } from './supports.ts';
+import { isHeldPoint, nodeMarks } from './supports.ts';
 import {
   acrossOf,
   type ElevationView,
@@ -44,6 +44,8 @@ export interface Elevation {
   /** What is on the drawing, for its legend. */
   readonly joins: readonly JoinShape[];
   readonly sides: readonly ('near' | 'far')[];
+  /** Whether points are marked as held, other than by foundations. */
+  readonly heldPoints: boolean;
 }
 
 /** The plane of a bay as it will be built, with joins, dimensions and flags. */
@@ -82,7 +84,8 @@ export function elevation(subject: ElevationSubject, room: Room): Elevation {
     )}${members.filter(isLine).map((bar) => [memberStrip(bar, view), lineName(bar, view)])}${dimensionLines(bay.dimensions, view, extent, units)}${levelMarks(bay.dimensions, view, extent, units)}${nodeMarks(nodesOf(bars), bay.id, layout, view)}${diagonals.map((bar) => bar.angle && endTicks(bar, bar.angle, view))}${glyphs.map(({ crossing, at }) => joinGlyph(shapeOf(crossing), at))}${captions.map(({ text, box }) => markup`<rect x="${box.x - 2}" y="${box.y}" width="${box.width}" height="${box.height}" fill="#fff"/><text x="${box.x}" y="${box.y + 12}">${text}</text>`)}${placedFlags(
     flags,
     [...clear, ...captions.map(({ box }) => box)],
-  ).map(({ flag, box }) => drawnFlag(flag, box))}</svg>`;
+    view.origin[0] + extent.right * view.scale + BESIDE,
+  ).map(drawnFlag)}</svg>`;
 
   return {
     svg,
@@ -91,6 +94,7 @@ export function elevation(subject: ElevationSubject, room: Room): Elevation {
     pxPerMetre: view.scale * 1000,
     joins: [...new Set(crossings.map(shapeOf))],
     sides: [...new Set(diagonals.flatMap((bar) => bar.angle?.side ?? []))],
+    heldPoints: nodesOf(bars).some((id) => isHeldPoint(layout.nodes.get(id)?.supports[bay.id]?.kind)),
   };
 }
 
@@ -128,8 +132,17 @@ function crossingsOn(layout: Layout, bay: BayLayout, bars: readonly Bar[]): read
 function steelExtent(plane: Plane, bars: readonly Bar[]): Extent {
   return extentOf(
     plane,
-    bars.flatMap((bar) => [bar.from, bar.to, add(bar.from, bar.offset), add(bar.to, bar.offset)]),
+    bars.flatMap((bar) => [bar.from, bar.to, ...edgesOf(bar, plane)]),
   );
+}
+
+/** The corners of a member as it shows; of an angle, nothing beyond its set-out line. */
+function edgesOf(bar: Bar, plane: Plane): readonly Vec3[] {
+  const across = acrossOf(plane, bar.direction);
+  const [from, to] = [add(bar.from, bar.offset), add(bar.to, bar.offset)];
+  if (bar.member === null || across === null) return [from, to];
+  const half = seenWidth(bar, bar.member, plane, across) / 2;
+  return [from, to].flatMap((end) => [along(end, across, half), along(end, across, -half)]);
 }
 
 /** Angles narrower than this on the sheet are drawn at twice their width, px: hatching and the edge of a leg need it. */
@@ -183,6 +196,9 @@ function placedGlyphs(
     return [{ crossing, at: [x + GLYPH * before.length, y] as const }];
   });
 }
+
+/** Between the steel and a column of flags, px. */
+const BESIDE = 34;
 
 /** From the middle of one glyph to that of the next beside it, px. */
 const GLYPH = 17;

@@ -15,7 +15,7 @@ export function legend(drawings: readonly Elevation[]): Markup {
   }${joins.map((join) => entry(joinGlyph(join, [19, 8], 1), joinWords(join)))}${entry(
     markup`<path class="dim" d="M1 8h36"/><path class="hld" d="M19 1v14"/>`,
     'end of the steel: held both ways',
-  )}${entry(markup`<path class="cross" d="M14 8h10M19 3v10"/>`, 'set-out point, where lengths are taken')}${entry(
+  )}${entry(markup`<path class="cross" d="M14 8h10M19 3v10"/>`, 'set-out point, where lengths are taken')}${drawings.some(({ heldPoints }) => heldPoints) ? entry(markup`<rect class="heldpoint" x="13" y="2" width="12" height="12"/>`, 'point taken as held') : null}${entry(
     markup`<path class="edh" d="M1 8h36"/>`,
     'edge of a leg that lies behind',
   )}</ul><p class="legend-line">${(['over', 'near', 'within'] as const).map(

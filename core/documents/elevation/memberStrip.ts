@@ -15,10 +15,7 @@ export function memberStrip(bar: Bar, view: ElevationView): Markup {
   if (member === null)
     return markup`<path class="edl" d="${openPath([toSheet(view, from), toSheet(view, to)])}"/>`;
 
-  const depthWay = depthDirection(bar, plane);
-  const widthWay = cross(bar.direction, depthWay);
-  const seen =
-    member.depth * Math.abs(dot(depthWay, across)) + member.width * Math.abs(dot(widthWay, across));
+  const seen = seenWidth(bar, member, plane, across);
   const line = (away: number): string =>
     openPath([toSheet(view, along(from, across, away)), toSheet(view, along(to, across, away))]);
   const corners = [
@@ -30,7 +27,7 @@ export function memberStrip(bar: Bar, view: ElevationView): Markup {
 
   // Two lines nearer than this would run into one on paper.
   const flange = Math.max(FLANGE * member.depth, LINES_APART / view.scale);
-  const sideOn = Math.abs(dot(depthWay, across)) > Math.SQRT1_2;
+  const sideOn = Math.abs(dot(depthDirection(bar, plane), across)) > Math.SQRT1_2;
   const edges =
     member.shape !== 'tube' && sideOn
       ? markup`<path class="edl" d="${line(seen / 2 - flange)}"/><path class="edl" d="${line(flange - seen / 2)}"/>`
@@ -39,6 +36,13 @@ export function memberStrip(bar: Bar, view: ElevationView): Markup {
 }
 
 const LINES_APART = 2;
+
+/** How wide a member shows in the plane, mm. */
+export function seenWidth(bar: Bar, member: Member, plane: Plane, across: Vec3): number {
+  const depthWay = depthDirection(bar, plane);
+  const widthWay = cross(bar.direction, depthWay);
+  return member.depth * Math.abs(dot(depthWay, across)) + member.width * Math.abs(dot(widthWay, across));
+}
 
 /** Flange thickness over depth: enough to tell a flange on a drawing, since members carry no thickness. */
 const FLANGE = 0.07;

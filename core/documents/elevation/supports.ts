@@ -1,4 +1,4 @@
-import type { Layout, Plane } from '../../layout/model.ts';
+import type { Layout, NodeSupport, Plane } from '../../layout/model.ts';
 import { type Markup, markup } from '../markup.ts';
 import { type ElevationView, toSheet } from './view.ts';
 
@@ -18,9 +18,14 @@ export function nodeMarks(
   })}`;
 }
 
-function supportMark(kind: string, x: number, y: number, plane: Plane): Markup {
+/** Whether a point is held by something else than a foundation, which has a sign of its own. */
+export function isHeldPoint(kind: NodeSupport['kind'] | undefined): boolean {
+  return kind === 'eaves' || kind === 'vouched';
+}
+
+function supportMark(kind: NodeSupport['kind'], x: number, y: number, plane: Plane): Markup {
   const isUpright = plane.up[2] > Math.SQRT1_2;
-  if (kind !== 'foundation' || !isUpright)
+  if (isHeldPoint(kind) || !isUpright)
     return markup`<rect class="heldpoint" x="${x - 7}" y="${y - 7}" width="14" height="14"/>`;
   const strokes = Array.from({ length: 9 }, (_, index) => markup`M${x - 22 + index * 5.5} ${y}l-5 7`);
   return markup`<path class="earth" d="M${x - 26} ${y}h52${strokes}"/>`;

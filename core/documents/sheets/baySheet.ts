@@ -15,7 +15,7 @@ import { scheduleSheet } from './scheduleSheet.ts';
 
 const BESIDE_LEGEND: Room = {
   width: 456,
-  height: 520,
+  height: 590,
   margins: { left: 104, right: 34, top: 16, bottom: 66 },
 };
 /** Two to a row, over the legend. */

@@ -84,6 +84,7 @@ b { font-weight: 600; }
 .diagonal { margin: 18px 0; }
 .keep { break-inside: avoid; }
 .topline { display: grid; grid-template-columns: 220px 1fr; gap: 18px; align-items: start; }
+.topline p { margin-top: 7px; }
 .key { font-size: 11px; display: flex; flex-wrap: wrap; gap: 6px; align-items: center; margin-top: 5px; }
 .key svg, .scale-line svg { display: inline-block; }
 .drawings { display: grid; grid-template-columns: 1fr 228px; gap: 18px; }
