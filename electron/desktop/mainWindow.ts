@@ -15,6 +15,8 @@ export async function createMainWindow(preload: string, placeFile: string): Prom
     minWidth: SMALLEST_WINDOW.width,
     minHeight: SMALLEST_WINDOW.height,
     show: false,
+    // The window draws its commands itself; the menu bar is there for its keys, and for Alt.
+    autoHideMenuBar: true,
     title: 'Tautline',
     webPreferences: { ...SANDBOXED, preload },
   });
