@@ -75,6 +75,7 @@ class BayFrameBuilder {
       ]);
     }
     this.#seatLines(bars);
+    if (this.#bay.kind === 'free') this.#seatEnds(bars);
     for (const crossing of crossings) this.#join(crossing);
     for (const bar of bars) this.#lay(bar);
     return { nodes: this.#nodes, elements: this.#elements, springs: this.#springs, along: this.#along };
@@ -135,8 +136,7 @@ class BayFrameBuilder {
           this.#places
             .get(seat.id)
             ?.push({ at: dot(subtract(at, seat.from), seat.direction), node, cut: false });
-        else if (!bars.some((bar) => !bar.line && (bar.i === end || bar.j === end)))
-          this.#nodes[node] = { ...(this.#nodes[node] as FrameNode), fixed: true };
+        else if (!bars.some((bar) => !bar.line && (bar.i === end || bar.j === end))) this.#fix(node);
       }
       const { heldBy, ownPanelPoint } = line.line;
       const elsewhere = heldBy.kind !== 'nothing' && lineHolding(this.#layout, this.#holdings, line).held;
@@ -149,6 +149,24 @@ class BayFrameBuilder {
           direction: line.direction,
           stiffness: UNYIELDING,
         });
+    }
+  }
+
+  #fix(node: number): void {
+    const known = this.#nodes[node];
+    if (known) this.#nodes[node] = { ...known, fixed: true };
+  }
+
+  /** In a bay drawn freely a bar may end on another between its ends. */
+  #seatEnds(bars: readonly Bar[]): void {
+    for (const [id, node] of this.#layoutNode) {
+      const at = this.#layout.nodes.get(id)?.at;
+      if (!at) continue;
+      for (const bar of bars)
+        if (passes(bar, at))
+          this.#places
+            .get(bar.id)
+            ?.push({ at: dot(subtract(at, bar.from), bar.direction), node, cut: false });
     }
   }
 

@@ -28,6 +28,8 @@ export interface Practice {
   /** The standard's own letters for our axes. */
   readonly axisLetters: Readonly<Record<Axis, string>>;
   readonly note: string;
+  /** Moduli of steel that the standard uses, N/mm². Practice-facts, from memory, sure. */
+  readonly steel: { readonly E: number; readonly G: number };
 }
 
 export interface LimitInForce {

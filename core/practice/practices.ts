@@ -16,6 +16,7 @@ const WAIVER =
 
 const sans10162: Practice = {
   id: 'sans10162',
+  steel: { E: 200_000, G: 77_000 },
   name: 'SANS 10162-1',
   edition: '2011 (2005 the same)',
   standing: 'shall',
@@ -28,6 +29,7 @@ const sans10162: Practice = {
 
 const csaS16: Practice = {
   id: 'csaS16',
+  steel: { E: 200_000, G: 77_000 },
   name: 'CSA S16',
   edition: '2019 (2001 to 2014 the same)',
   standing: 'shall',
@@ -40,6 +42,7 @@ const csaS16: Practice = {
 
 const aisc360: Practice = {
   id: 'aisc360',
+  steel: { E: 200_000, G: 77_200 },
   name: 'AISC 360',
   edition: '2022 (2005 to 2016 the same)',
   standing: 'advice',
@@ -52,6 +55,7 @@ const aisc360: Practice = {
 
 const en1993: Practice = {
   id: 'en1993',
+  steel: { E: 210_000, G: 81_000 },
   name: 'EN 1993-1-1',
   edition: '2005 and 2022',
   standing: 'none',
@@ -64,6 +68,7 @@ const en1993: Practice = {
 
 const as4100: Practice = {
   id: 'as4100',
+  steel: { E: 200_000, G: 80_000 },
   name: 'AS 4100',
   edition: '2020 (1998 the same)',
   standing: 'none',
@@ -78,6 +83,7 @@ const IS_TABLE = 'Table 3, 3.8';
 
 const is800: Practice = {
   id: 'is800',
+  steel: { E: 200_000, G: 76_900 },
   name: 'IS 800',
   edition: '2007',
   standing: 'shall',

@@ -57,6 +57,8 @@ export interface Bay {
   readonly bars: Readonly<Record<string, BarMark>>;
   /** By the crossing's key inside the bay ("t1.fall+t1.rise"). A crossing without an entry is unmarked. */
   readonly joins: Readonly<Record<string, Join>>;
+  /** Tension in one diagonal of a crossing over compression in the other, by the crossing's key; 0 where nothing is said, below 0 when both are compressed. */
+  readonly tensionShares?: Readonly<Record<string, number>>;
 }
 
 export type Recipe = WallRecipe | RoofRecipe | KneeRecipe | FreeRecipe;

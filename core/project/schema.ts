@@ -164,6 +164,7 @@ const bay = z.strictObject({
   diagonals,
   bars: z.record(key, barMark),
   joins: z.record(key, join),
+  tensionShares: z.record(key, z.number().min(-1).max(10)).optional(),
 });
 
 const ownAngle = z.strictObject({

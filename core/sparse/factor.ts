@@ -59,7 +59,7 @@ function reordered(matrix: SymmetricMatrix, place: Int32Array) {
       for (let e = matrix.start[c] ?? 0; e < (matrix.start[c + 1] ?? 0); e++) {
         const a = place[c] ?? 0;
         const b = place[matrix.row[e] ?? 0] ?? 0;
-        visit(a > b ? a : b, a > b ? b : a, e);
+        visit(Math.max(a, b), Math.min(a, b), e);
       }
   };
   each((column) => {

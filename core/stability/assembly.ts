@@ -217,11 +217,11 @@ function factorBand(
   let mantissa = 1;
   let logDeterminant = 0;
   for (let i = 0; i < size; i++) {
-    const start = i - width + 1 > 0 ? i - width + 1 : 0;
+    const start = Math.max(0, i - width + 1);
     const row = i * width + i;
     for (let j = start; j < i; j++) {
       const other = j * width + j;
-      const from = j - width + 1 > start ? j - width + 1 : start;
+      const from = Math.max(start, j - width + 1);
       let sum = band[row - j] ?? 0;
       for (let k = from; k < j; k++) sum -= (band[row - k] ?? 0) * (band[other - k] ?? 0);
       // Holds L·D until the row is done.

@@ -1,0 +1,157 @@
+import type { StationStiffness } from '../frame/push.ts';
+import { dot, unit2, type Vec2 } from '../geometry/vector.ts';
+import type { AngleBar, Bar, Crossing } from '../layout/model.ts';
+import { inSection } from '../restraint/claims.ts';
+import { squareTo } from '../restraint/directions.ts';
+import type { Restraint, Station } from '../restraint/model.ts';
+import type { SectionProperties } from '../section/model.ts';
+import { type BarProblem, type Hold, PINNED } from '../stability/model.ts';
+import type { PairBar } from '../stability/pair.ts';
+
+export interface Steel {
+  readonly E: number;
+  readonly G: number;
+}
+
+/** A diagonal with all that its critical load needs. */
+export interface BowingBar {
+  readonly bar: Bar;
+  readonly angle: AngleBar;
+  readonly section: SectionProperties;
+  readonly restraint: Restraint;
+  /** Offered at its places in the frame; empty when nothing is joined. */
+  readonly offered: readonly StationStiffness[];
+}
+
+/** The bar between its end stations, without holds. */
+export function bareBar({ section, restraint }: BowingBar, steel: Steel): BarProblem {
+  const length = lengthOf(restraint);
+  return {
+    E: steel.E,
+    length,
+    section,
+    holds: [],
+    axial: [{ from: 0, to: length, share: 1 }],
+    endI: PINNED,
+    endJ: PINNED,
+    twist: null,
+  };
+}
+
+const startOf = ({ stations }: Restraint): number => stations[0]?.at ?? 0;
+export const lengthOf = (restraint: Restraint): number =>
+  (restraint.stations.at(-1)?.at ?? 0) - startOf(restraint);
+
+/** Interior stations with their index and their place from the first station. */
+export function innerStations(
+  restraint: Restraint,
+): readonly { readonly station: Station; readonly index: number; readonly at: number }[] {
+  return restraint.stations
+    .map((station, index) => ({ station, index, at: station.at - startOf(restraint) }))
+    .slice(1, -1);
+}
+
+/** Counted holds as rigid. */
+export function rigidHolds({ restraint }: BowingBar): readonly Hold[] {
+  return innerStations(restraint).flatMap(({ station, at }): Hold[] => {
+    switch (station.held.ways) {
+      case 0:
+        return [];
+      case 1:
+        return [{ at, direction: station.held.direction, stiffness: 'rigid' }];
+      case 2:
+        return [
+          { at, direction: [1, 0], stiffness: 'rigid' },
+          { at, direction: [0, 1], stiffness: 'rigid' },
+        ];
+      default:
+        return station.held satisfies never;
+    }
+  });
+}
+
+/** What the frame offers, as two springs square to each other. */
+export function realHolds(bar: BowingBar): readonly Hold[] {
+  return bar.offered.flatMap(({ at, ellipse }): Hold[] => {
+    const place = at - startOf(bar.restraint);
+    return [
+      { at: place, direction: ellipse.stiffWay, stiffness: ellipse.stiff },
+      { at: place, direction: squareTo(ellipse.stiffWay), stiffness: ellipse.soft },
+    ];
+  });
+}
+
+/** "In plane, across" and "out of plane" as unit vectors of the section plane. */
+export function planeWays({ angle }: Pick<BowingBar, 'angle'>): {
+  readonly inPlane: Vec2;
+  readonly outOfPlane: Vec2;
+} {
+  return {
+    inPlane: unit2(inSection(angle, angle.placement.inPlane)) ?? [1, 0],
+    outOfPlane: unit2(inSection(angle, angle.placement.outOfPlane)) ?? [0, 1],
+  };
+}
+
+/** Stiffness against being pushed one way, the other way free to follow. */
+export function stiffnessAlong({ ellipse }: StationStiffness, way: Vec2): number {
+  const [xx, xy, yy] = ellipse.matrix;
+  const determinant = xx * yy - xy * xy;
+  const flexibility = (way[0] * way[0] * yy - 2 * way[0] * way[1] * xy + way[1] * way[1] * xx) / determinant;
+  return 1 / flexibility;
+}
+
+/** Where a bolt of the leg in the plane grips the section, from the centroid, mm: on the gauge line, at the face of the leg. */
+export function gripOf({ angle, section }: Pick<BowingBar, 'angle' | 'section'>): Vec2 {
+  const { gauge } = angle.placement;
+  const [x, y] = angle.spec.legInPlane === 'longer' ? [0, gauge] : [gauge, 0];
+  return [x - section.centroidX, y - section.centroidY];
+}
+
+/** With twist: holds grip at the bolts, twist is held where two bolts across hold it. */
+export function withTwist(problem: BarProblem, bar: BowingBar, steel: Steel): BarProblem {
+  const grip = gripOf(bar);
+  return {
+    ...problem,
+    holds: problem.holds.map((hold) => ({ ...hold, grip })),
+    twist: {
+      G: steel.G,
+      heldAt: innerStations(bar.restraint)
+        .filter(({ station }) => station.twistHeld)
+        .map(({ at }) => at),
+    },
+  };
+}
+
+/**
+ * One bar of a crossed pair: real springs everywhere but at the crossing, where only its partner's end-on hold is a spring and the way out of the plane is shared.
+ * @param share its axial force per unit of the load factor, compression positive
+ * @param normal out of the plane of the bay, the same vector for both bars
+ */
+export function pairBar(
+  bar: BowingBar,
+  crossing: Crossing,
+  share: number,
+  steel: Steel,
+  normal: readonly [number, number, number],
+): PairBar {
+  const at = crossing.a === bar.bar.id ? crossing.onA : crossing.onB;
+  const ways = planeWays(bar);
+  const place = at - startOf(bar.restraint);
+  const here = bar.offered.find((station) => Math.abs(station.at - at) < 1);
+  const elsewhere = realHolds({ ...bar, offered: bar.offered.filter((station) => station !== here) });
+  const endOn: Hold[] = here
+    ? [{ at: place, direction: ways.inPlane, stiffness: stiffnessAlong(here, ways.inPlane) }]
+    : [];
+  const problem = bareBar(bar, steel);
+  const sign = dot(bar.angle.placement.outOfPlane, normal) < 0 ? -1 : 1;
+  return {
+    problem: {
+      ...problem,
+      holds: [...elsewhere, ...endOn],
+      axial: [{ from: 0, to: problem.length, share }],
+    },
+    crossingAt: place,
+    outOfPlane: [ways.outOfPlane[0] * sign, ways.outOfPlane[1] * sign],
+    cut: crossing.join?.kind === 'cut' && crossing.join.cutBar === bar.bar.key,
+  };
+}

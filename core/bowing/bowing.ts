@@ -1,0 +1,87 @@
+import type { BarId, Crossing } from '../layout/model.ts';
+import { criticalLoad } from '../stability/criticalLoad.ts';
+import { type PairProblem, pairCriticalLoad } from '../stability/pair.ts';
+import {
+  type BowingBar,
+  bareBar,
+  pairBar,
+  realHolds,
+  rigidHolds,
+  type Steel,
+  withTwist,
+} from './barProblems.ts';
+import { criticalOf, loadOf } from './critical.ts';
+import { offeredStations } from './grips.ts';
+import type { Bowing, PartnerState, TwistEffect } from './model.ts';
+
+/** The crossing at which a bar's partner is taken with its own bowing and force. */
+export interface Partner {
+  readonly bar: BowingBar;
+  readonly crossing: Crossing;
+  /** Tension in the partner over compression in the bar. */
+  readonly tensionShare: number;
+}
+
+/** Twist counts where it lowers the critical load by more than this. */
+const TWIST_COUNTS = 0.01;
+
+/** Levels 2 and 3 for one diagonal. */
+export function bowingOf(bar: BowingBar, partner: Partner | null, steel: Steel): Bowing {
+  const bare = bareBar(bar, steel);
+  const rigidProblem = { ...bare, holds: rigidHolds(bar) };
+  const rigidLoad = loadOf(rigidProblem);
+  const springProblem = { ...bare, holds: realHolds(bar) };
+  const springLoad = loadOf(springProblem);
+  const twist = twistEffect(bar, steel, springProblem, springLoad);
+  const pair = partner ? pairProblem(bar, partner, steel) : null;
+  const bowing = pair ? (pairCriticalLoad(pair).N ?? springLoad) : springLoad;
+  const { slenderness } = bar.restraint.governing;
+  const byRule = (Math.PI ** 2 * steel.E * bar.section.area) / ruleSlenderness(bar) ** 2;
+  return {
+    bar: bar.bar.id,
+    stations: offeredStations(bar, steel, rigidLoad),
+    rigid: criticalOf(rigidLoad, bar.section, steel.E),
+    real: criticalOf(bowing * (twist.governs ? twist.ratio : 1), bar.section, steel.E),
+    ruleError: slenderness > 0 ? (byRule / rigidLoad - 1) * 100 : 0,
+    twist,
+    partner: partner ? stateOf(bar.bar.id, partner) : null,
+    unsupported: null,
+  };
+}
+
+/** The rule itself, whatever the user sets by hand. */
+function ruleSlenderness({ restraint }: BowingBar): number {
+  const spans = restraint.spans.reduce((most, span) => Math.max(most, span.slenderness), 0);
+  return Math.max(spans, restraint.bound?.slenderness ?? 0);
+}
+
+function twistEffect(
+  bar: BowingBar,
+  steel: Steel,
+  problem: ReturnType<typeof bareBar>,
+  without: number,
+): TwistEffect {
+  const { N } = criticalLoad(withTwist(problem, bar, steel), { second: false });
+  const ratio = (N ?? without) / without;
+  return { ratio, governs: ratio < 1 - TWIST_COUNTS };
+}
+
+/** The pair as the bar in question sees it. */
+export function pairProblem(bar: BowingBar, partner: Partner, steel: Steel): PairProblem {
+  const normal = bar.angle.placement.outOfPlane;
+  return {
+    bar: pairBar(bar, partner.crossing, 1, steel, normal),
+    partner: pairBar(partner.bar, partner.crossing, -partner.tensionShare, steel, normal),
+  };
+}
+
+function stateOf(bar: BarId, { bar: other, crossing, tensionShare }: Partner): PartnerState {
+  const cutBar = crossing.join?.kind === 'cut' ? crossing.join.cutBar : null;
+  const own = bar.slice(bar.indexOf('/') + 1);
+  return {
+    bar: other.bar.id,
+    crossing: crossing.id,
+    tensionShare,
+    cut: cutBar === null ? 'neither' : cutBar === own ? 'this bar' : 'partner',
+  };
+}

@@ -1,0 +1,93 @@
+import { bayFrame, GUSSETED } from '../frame/bayFrame.ts';
+import type { Mechanism } from '../frame/model.ts';
+import { offeredTo } from '../frame/push.ts';
+import { FrameSolver } from '../frame/solver.ts';
+import type { BarId, BayLayout, Crossing, Layout } from '../layout/model.ts';
+import type { Bay } from '../project/model.ts';
+import type { Restraint } from '../restraint/model.ts';
+import type { RestraintContext } from '../restraint/restraint.ts';
+import type { BowingBar, Steel } from './barProblems.ts';
+import { bowingOf, type Partner } from './bowing.ts';
+import type { Bowing } from './model.ts';
+
+export interface BowingInput {
+  readonly layout: Layout;
+  readonly context: RestraintContext;
+  readonly restraints: ReadonlyMap<BarId, Restraint>;
+  readonly steel: Steel;
+}
+
+/** One bay's frame with the bars that bow in it. */
+export interface BayBowing {
+  readonly solver: FrameSolver;
+  readonly mechanisms: readonly Mechanism[];
+  readonly bars: ReadonlyMap<BarId, BowingBar>;
+  readonly partners: ReadonlyMap<BarId, Partner>;
+}
+
+/** Levels 2 and 3 for every diagonal of a bay. Where the frame is a mechanism, what it offers is left out and the bars say why. */
+export function bayBowings(input: BowingInput, layout: BayLayout, bay: Bay): ReadonlyMap<BarId, Bowing> {
+  const prepared = bayBowing(input, layout, bay);
+  return new Map(
+    [...prepared.bars.values()].map((bar) => {
+      const bowing = bowingOf(bar, prepared.partners.get(bar.bar.id) ?? null, input.steel);
+      const moving = prepared.mechanisms.some(({ bars }) => bars.includes(bar.bar.id));
+      const unsupported = moving
+        ? 'The bay can move without resistance, so the framing holds nothing.'
+        : null;
+      return [bar.bar.id, { ...bowing, unsupported }] as const;
+    }),
+  );
+}
+
+export function bayBowing(input: BowingInput, layout: BayLayout, bay: Bay): BayBowing {
+  const { context, steel } = input;
+  const frame = bayFrame(input.layout, context.holdings, layout, {
+    ...steel,
+    ends: GUSSETED,
+    tension: new Map(),
+  });
+  const solver = new FrameSolver(frame);
+  const bars = new Map<BarId, BowingBar>();
+  for (const id of layout.diagonals) {
+    const bar = input.layout.bars.get(id);
+    const restraint = input.restraints.get(id);
+    const angle = bar?.angle;
+    if (!bar || !angle?.stock || !restraint) continue;
+    const offered = offeredTo(solver, id, angle.placement) ?? [];
+    bars.set(id, { bar, angle, section: angle.stock.properties, restraint, offered });
+  }
+  return { solver, mechanisms: solver.mechanisms(), bars, partners: partnersOf(input, bay, bars) };
+}
+
+/** Of each bar the one partner whose own bowing is followed: at the joined crossing nearest its middle where nothing else is joined. */
+function partnersOf(
+  input: BowingInput,
+  bay: Bay,
+  bars: ReadonlyMap<BarId, BowingBar>,
+): ReadonlyMap<BarId, Partner> {
+  const partners = new Map<BarId, Partner>();
+  for (const [id, { bar }] of bars) {
+    const joined = (input.context.crossingsOf.get(id) ?? []).filter(isJoined);
+    const place = (crossing: Crossing): number => (crossing.a === id ? crossing.onA : crossing.onB);
+    const alone = joined.filter(
+      (crossing) =>
+        crossing.kind === 'diagonals' &&
+        joined.every((other) => other === crossing || Math.abs(place(other) - place(crossing)) > 1.5),
+    );
+    const nearest = alone.sort(
+      (a, b) => Math.abs(place(a) - bar.length / 2) - Math.abs(place(b) - bar.length / 2),
+    )[0];
+    const other = nearest && bars.get(nearest.a === id ? nearest.b : nearest.a);
+    if (nearest && other)
+      partners.set(id, {
+        bar: other,
+        crossing: nearest,
+        tensionShare: bay.tensionShares?.[nearest.key] ?? 0,
+      });
+  }
+  return partners;
+}
+
+const isJoined = ({ join }: Crossing): boolean =>
+  join !== null && join.kind !== 'none' && join.kind !== 'hung';
