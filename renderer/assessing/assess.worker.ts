@@ -1,0 +1,58 @@
+/** Assesses projects away from the window's own thread. All engineering is core's; this file only passes it plain data. */
+import { expose } from 'comlink';
+import au from '../../assets/catalogues/au.json';
+import en from '../../assets/catalogues/en.json';
+import us from '../../assets/catalogues/us.json';
+import { assess } from '../../core/assess.ts';
+import type { Catalogues } from '../../core/catalogue/model.ts';
+import { readCatalogue } from '../../core/catalogue/readCatalogue.ts';
+import { stockOf } from '../../core/catalogue/stock.ts';
+import { reportHtml } from '../../core/documents/report.ts';
+import { scheduleCsv } from '../../core/documents/scheduleCsv.ts';
+import type { Project } from '../../core/project/model.ts';
+import { remediesFor } from '../../core/remedies/remedies.ts';
+import { shortlist } from '../../core/shortlist/shortlist.ts';
+import type { AssessApi } from './assessApi.ts';
+import { rememberedAssess } from './memory.ts';
+import { joinReadings } from './readings.ts';
+
+const catalogues: Catalogues = { en: readCatalogue(en), us: readCatalogue(us), au: readCatalogue(au) };
+const assessFresh = (project: Project) => assess(project, catalogues);
+const assessed = rememberedAssess(assessFresh);
+
+const api: AssessApi = {
+  assess: (snapshot) => {
+    const began = performance.now();
+    const assessment = assessed(snapshot);
+    return { assessment, took: performance.now() - began };
+  },
+  remedies: (snapshot, id) => {
+    const assessment = assessed(snapshot);
+    const finding = assessment.findings.find((each) => each.id === id);
+    return finding === undefined ? [] : remediesFor(assessment, finding, catalogues);
+  },
+  readings: (snapshot, crossing) => joinReadings(assessed(snapshot), crossing, assessFresh),
+  shortlist: (snapshot, bars, options) => shortlist(assessed(snapshot), catalogues, bars, options),
+  stock: (catalogue, own) => ({
+    name: catalogues[catalogue].standard,
+    source: catalogues[catalogue].source,
+    choices: stockOf(catalogue, own, catalogues).choices.map((angle) => ({
+      designation: angle.designation,
+      kind: angle.kind,
+      own: angle.catalogue === 'own',
+      massPerMetre: angle.massPerMetre,
+    })),
+  }),
+  report: (snapshot, { date, fonts }) => {
+    const assessment = assessed(snapshot);
+    const remedies = new Map(
+      assessment.findings.map((finding) => [finding.id, remediesFor(assessment, finding, catalogues)]),
+    );
+    return reportHtml(assessment, { units: snapshot.project.settings.units, date, fonts, remedies });
+  },
+  scheduleCsv: (snapshot) => scheduleCsv(assessed(snapshot).schedule, snapshot.project.settings.units),
+  // As the command line writes it: two spaces of indent, a line feed at the end.
+  scheduleJson: (snapshot) => `${JSON.stringify(assessed(snapshot).schedule, null, 2)}\n`,
+};
+
+expose(api);

@@ -1,0 +1,67 @@
+/** What the workers do for the window. Everything that crosses is plain data. */
+import type { Assessment } from '../../core/assessment.ts';
+import type { CatalogueId, OwnAngle } from '../../core/catalogue/model.ts';
+import type { BarId, CrossingId } from '../../core/layout/model.ts';
+import type { Join, Project } from '../../core/project/model.ts';
+import type { Remedy } from '../../core/remedies/model.ts';
+import type { Shortlist, ShortlistOptions } from '../../core/shortlist/model.ts';
+
+/** A project with a number of its own, by which a worker knows whether it has assessed it already. */
+export interface Snapshot {
+  readonly serial: number;
+  readonly project: Project;
+}
+
+export interface AssessAnswer {
+  readonly assessment: Assessment;
+  /** ms. */
+  readonly took: number;
+}
+
+/** What one join would do at a crossing, found by marking it so and assessing again. */
+export interface JoinReading {
+  readonly join: Join;
+  readonly bars: readonly BarReading[];
+}
+
+export interface BarReading {
+  readonly bar: BarId;
+  readonly inPlane: HoldReading;
+  readonly outOfPlane: HoldReading;
+  readonly twist: HoldReading;
+  /** Null when the bar cannot be assessed. */
+  readonly slenderness: number | null;
+  readonly limit: number;
+  readonly status: 'over' | 'near' | 'within' | 'unknown';
+}
+
+/** held: counted. claimed: the mark claims it, but it does not count. */
+export type HoldReading = 'held' | 'claimed' | 'nothing';
+
+/** One stock angle as a field offers it. */
+export interface SectionChoice {
+  readonly designation: string;
+  readonly kind: 'equal' | 'unequal';
+  readonly own: boolean;
+  /** kg/m. */
+  readonly massPerMetre: number;
+}
+
+export interface StockChoices {
+  /** "EN 10056-1". */
+  readonly name: string;
+  readonly source: string;
+  readonly choices: readonly SectionChoice[];
+}
+
+export interface AssessApi {
+  assess(snapshot: Snapshot): AssessAnswer;
+  remedies(snapshot: Snapshot, finding: string): readonly Remedy[];
+  readings(snapshot: Snapshot, crossing: CrossingId): readonly JoinReading[];
+  shortlist(snapshot: Snapshot, bars: readonly BarId[], options: ShortlistOptions): Shortlist;
+  stock(catalogue: CatalogueId, own: readonly OwnAngle[]): StockChoices;
+  /** One HTML document that stands alone. */
+  report(snapshot: Snapshot, print: { readonly date: string; readonly fonts: string }): string;
+  scheduleCsv(snapshot: Snapshot): string;
+  scheduleJson(snapshot: Snapshot): string;
+}

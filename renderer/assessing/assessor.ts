@@ -1,0 +1,197 @@
+/**
+ * Keeps the figures in step with the project. One worker assesses, newest project first: while it works, only the latest
+ * request waits, and a result for a project that is no longer wanted is dropped. A second worker tries things out
+ * (remedies, joins, shortlists, documents), so that a long trial never keeps the figures waiting.
+ */
+import { type Remote, wrap } from 'comlink';
+import type { StoreApi } from 'zustand/vanilla';
+import type { Project } from '../../core/project/model.ts';
+import type { Remedy } from '../../core/remedies/model.ts';
+import { settled } from '../store/selection.ts';
+import { presentProject, shownAssessment } from '../store/shown.ts';
+import type { Assessed, WindowState } from '../store/windowState.ts';
+import type { AssessApi, Snapshot } from './assessApi.ts';
+
+export interface Assessor {
+  /** Begins to follow the store; returns how to stop. */
+  start(): () => void;
+  /** Begins afresh after a failure. */
+  retry(): void;
+  /** Asks the second worker. Rejects when the worker fails. */
+  ask<T>(
+    question: (api: Remote<AssessApi>, snapshotOf: (project: Project) => Snapshot) => Promise<T>,
+  ): Promise<T>;
+  /** The remedies of a finding of that project, worked out once. */
+  remedies(project: Project, finding: string): Promise<readonly Remedy[]>;
+}
+
+export interface AssessWorker {
+  readonly api: Remote<AssessApi>;
+  /** Called when the worker cannot run at all. */
+  onBroken(listener: (what: string) => void): void;
+  end(): void;
+}
+
+export function createAssessor(
+  store: StoreApi<WindowState>,
+  makeWorker: () => AssessWorker,
+  now: () => number,
+): Assessor {
+  const snapshotOf = numberedSnapshots();
+  let figures: AssessWorker | null = null;
+  let trials: AssessWorker | null = null;
+  let running = false;
+  /** A project that could not be assessed is not tried again by itself; another one is. */
+  let failedOn: Project | null = null;
+
+  const figuresWorker = (): AssessWorker => {
+    if (figures === null) {
+      figures = makeWorker();
+      figures.onBroken(fail);
+    }
+    return figures;
+  };
+
+  const fail = (what: string): void => {
+    failedOn = wanted(store.getState());
+    running = false;
+    figures?.end();
+    figures = null;
+    setAssessing(store, { workingSince: null, failure: what });
+  };
+
+  const follow = (): void => {
+    const state = store.getState();
+    const project = wanted(state);
+    if (running || (project !== null && project === failedOn)) return;
+    if (project === null) {
+      if (state.assessing.workingSince !== null) setAssessing(store, { workingSince: null });
+      return;
+    }
+    running = true;
+    if (state.assessing.workingSince === null) setAssessing(store, { workingSince: now() });
+    const worker = figuresWorker();
+    worker.api.assess(snapshotOf(project)).then(
+      (answer) => {
+        if (worker !== figures) return;
+        running = false;
+        accept(store, { project, ...answer });
+        follow();
+      },
+      (error: unknown) => {
+        if (worker === figures) fail(wordsOf(error));
+      },
+    );
+  };
+
+  const ask: Assessor['ask'] = (question) => {
+    if (trials === null) {
+      const fresh = makeWorker();
+      trials = fresh;
+      fresh.onBroken(() => {
+        fresh.end();
+        if (trials === fresh) trials = null;
+      });
+    }
+    return question(trials.api, snapshotOf);
+  };
+
+  const known = new WeakMap<Project, Map<string, Promise<readonly Remedy[]>>>();
+
+  return {
+    start: () => {
+      const stop = store.subscribe(follow);
+      follow();
+      return () => {
+        stop();
+        figures?.end();
+        trials?.end();
+        figures = null;
+        trials = null;
+        running = false;
+      };
+    },
+    retry: () => {
+      failedOn = null;
+      setAssessing(store, { failure: null });
+      follow();
+    },
+    ask,
+    remedies: (project, finding) => {
+      const ofProject = known.get(project) ?? new Map<string, Promise<readonly Remedy[]>>();
+      known.set(project, ofProject);
+      const asked =
+        ofProject.get(finding) ?? ask((api, snapshot) => api.remedies(snapshot(project), finding));
+      ofProject.set(finding, asked);
+      return asked;
+    },
+  };
+}
+
+/** A worker of this window's own script, reached over comlink. */
+export function assessWorker(): AssessWorker {
+  const worker = new Worker(new URL('./assess.worker.ts', import.meta.url), { type: 'module' });
+  return {
+    api: wrap<AssessApi>(worker),
+    onBroken: (listener) => {
+      worker.addEventListener('error', (event) =>
+        listener(event.message || 'The assessing part could not be loaded.'),
+      );
+      worker.addEventListener('messageerror', () => listener('A result could not be read.'));
+    },
+    end: () => worker.terminate(),
+  };
+}
+
+/** The project whose figures are missing: the one as it stands before the one on trial. */
+function wanted(state: WindowState): Project | null {
+  const { assessing, trying, started } = state;
+  if (!started) return null;
+  const present = presentProject(state);
+  if (assessing.base?.project !== present) return present;
+  if (trying !== null && assessing.tried?.project !== trying.project) return trying.project;
+  return null;
+}
+
+function accept(store: StoreApi<WindowState>, assessed: Assessed): void {
+  store.setState((state) => {
+    const { assessing } = state;
+    const isBase = assessed.project === presentProject(state);
+    const isTried = assessed.project === state.trying?.project;
+    if (!isBase && !isTried) return {}; // Overtaken by a later edit.
+    const next = {
+      ...assessing,
+      ...(isBase ? { base: assessed } : { tried: assessed }),
+      workingSince: null,
+      failure: null,
+    };
+    const shown = shownAssessment({ ...state, assessing: next });
+    return {
+      assessing: next,
+      selection: shown === null ? state.selection : settled(state.selection, shown),
+    };
+  });
+}
+
+function setAssessing(store: StoreApi<WindowState>, change: Partial<WindowState['assessing']>): void {
+  store.setState(({ assessing }) => ({ assessing: { ...assessing, ...change } }));
+}
+
+/** Gives each project, told by identity, a number that stays. */
+function numberedSnapshots(): (project: Project) => Snapshot {
+  const serials = new WeakMap<Project, number>();
+  let last = 0;
+  return (project) => {
+    let serial = serials.get(project);
+    if (serial === undefined) {
+      last += 1;
+      serial = last;
+      serials.set(project, serial);
+    }
+    return { serial, project };
+  };
+}
+
+function wordsOf(error: unknown): string {
+  return error instanceof Error ? error.message : String(error);
+}

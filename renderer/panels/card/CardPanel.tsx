@@ -1,0 +1,53 @@
+import type { JSX } from 'react';
+import type { Bar } from '../../../core/layout/model.ts';
+import { showLength } from '../../../core/units/quantity.ts';
+import { useWindow } from '../../shell/services.tsx';
+import { shownAssessment, shownProject } from '../../store/shown.ts';
+import { DiagonalCard } from './DiagonalCard.tsx';
+import './card.css';
+
+/** The card of the chosen bar, at full height: section, lanes, verdicts, reason, remedies. */
+export function CardPanel(): JSX.Element {
+  const assessment = useWindow(shownAssessment);
+  const bar = useWindow((state) => state.selection.bar);
+  const found = bar === null ? undefined : assessment?.layout.bars.get(bar);
+  return (
+    <aside className="card" data-region tabIndex={-1} aria-label="Card of the chosen bar">
+      {assessment === null || found === undefined ? (
+        <NothingChosen />
+      ) : found.angle === null ? (
+        <MemberCard bar={found} />
+      ) : (
+        <DiagonalCard bar={found} angle={found.angle} assessment={assessment} />
+      )}
+    </aside>
+  );
+}
+
+function NothingChosen(): JSX.Element {
+  const empty = useWindow((state) => shownProject(state).bays.length === 0);
+  return (
+    <p className="card-nothing">
+      {empty
+        ? 'The card of a diagonal stands here: its section, its four lanes, the verdicts and the reason.'
+        : 'Choose a diagonal in the view or in the schedule.'}
+    </p>
+  );
+}
+
+/** A bar that is drawn to size and not checked. */
+function MemberCard({ bar }: { readonly bar: Bar }): JSX.Element {
+  const units = useWindow((state) => shownProject(state).settings.units);
+  return (
+    <div className="card-member">
+      <h2 className="card-title">
+        {bar.mark} · {bar.role === 'rail' ? 'side rail' : bar.role}
+      </h2>
+      <p className="second">
+        {bar.bay}. {bar.member?.name ?? 'No size given'}, {showLength(bar.length, units, 'spoken')} between
+        set-out points.
+      </p>
+      <p className="second">Drawn to size and not checked: only diagonals, knees and ties are.</p>
+    </div>
+  );
+}

@@ -1,0 +1,67 @@
+import type { JSX } from 'react';
+import { MENUS, shortcutText } from '../../shell/commands/command.ts';
+import { COMMANDS } from '../../shell/commands/commands.ts';
+import { useServices } from '../../shell/services.tsx';
+import { DialogFrame } from './DialogFrame.tsx';
+
+interface KeyRow {
+  readonly keys: string;
+  readonly does: string;
+}
+
+const MOVING: readonly KeyRow[] = [
+  { keys: 'F6', does: 'Next part of the window' },
+  { keys: 'Shift F6', does: 'Part before' },
+  { keys: 'Esc', does: 'Put back what is on trial, close what is docked' },
+  { keys: 'Enter', does: 'Keep what is on trial' },
+  { keys: '↑ ↓', does: 'Rows of the schedule and of lists; a step of a number' },
+  { keys: 'Page ↑ ↓', does: 'Ten steps of a number, a page of the schedule' },
+  { keys: '← →', does: 'Tabs, choices, stock angles of the shortlist' },
+];
+
+/** Every key of the window. */
+export function KeyboardDialog(): JSX.Element {
+  const { actions, store } = useServices();
+  const state = store.getState();
+  return (
+    <DialogFrame title="Keyboard" wide onClose={actions.closeDialog}>
+      <div className="keyboard-columns">
+        <KeyTable title="Moving about" rows={MOVING} />
+        {MENUS.map((menu) => {
+          const rows = COMMANDS.flatMap((command): KeyRow[] =>
+            command.menu === menu && command.shortcut !== undefined
+              ? [{ keys: shortcutText(command.shortcut), does: command.label(state).replace('…', '') }]
+              : [],
+          );
+          return rows.length === 0 ? null : <KeyTable key={menu} title={menu} rows={rows} />;
+        })}
+      </div>
+    </DialogFrame>
+  );
+}
+
+function KeyTable({
+  title,
+  rows,
+}: {
+  readonly title: string;
+  readonly rows: readonly KeyRow[];
+}): JSX.Element {
+  return (
+    <section>
+      <h3>{title}</h3>
+      <table className="shortcuts" aria-label={title}>
+        <tbody>
+          {rows.map(({ keys, does }) => (
+            <tr key={keys}>
+              <th scope="row">{does}</th>
+              <td>
+                <kbd>{keys}</kbd>
+              </td>
+            </tr>
+          ))}
+        </tbody>
+      </table>
+    </section>
+  );
+}

@@ -1,0 +1,34 @@
+import type { Assessment } from '../../../core/assessment.ts';
+import type { Finding } from '../../../core/findings/model.ts';
+import type { UnitSystem } from '../../../core/project/model.ts';
+import { grouped } from '../../../core/units/figures.ts';
+import { showLength, showSlenderness } from '../../../core/units/quantity.ts';
+
+/** The bars that a finding names, in short: "D1, D2", "D9 to D16", "D1 × D2" at a crossing. */
+export function findingPlace(finding: Finding, assessment: Assessment): string {
+  const crossing = finding.crossing === null ? undefined : assessment.layout.crossings.get(finding.crossing);
+  const markOf = (bar: string): string => assessment.layout.bars.get(bar)?.mark ?? bar;
+  if (crossing !== undefined) return `${markOf(crossing.a)} × ${markOf(crossing.b)}`;
+  const marks = finding.bars.map(markOf);
+  if (marks.length === 0) return finding.bay;
+  return marks.length > 3 ? `${marks[0]} to ${marks.at(-1)}` : marks.join(', ');
+}
+
+/** A finding's figure with its unit; empty where it has none. */
+export function findingFigure(value: number | null, finding: Finding, units: UnitSystem): string {
+  if (value === null) return '';
+  switch (finding.quantity) {
+    case 'slenderness':
+      return showSlenderness(value, finding.limit);
+    case 'length':
+      return showLength(value, units, 'small');
+    case 'angle':
+      return `${grouped(value, 0)}°`;
+    case 'ratio':
+      return `L/${grouped(value, 0)}`;
+    case 'none':
+      return '';
+    default:
+      return finding.quantity satisfies never;
+  }
+}

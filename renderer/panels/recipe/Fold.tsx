@@ -1,0 +1,22 @@
+import type { JSX, ReactNode } from 'react';
+
+interface FoldProps {
+  readonly title: string;
+  /** What the folded part says in short. */
+  readonly aside: string;
+  readonly open?: boolean;
+  readonly children: ReactNode;
+}
+
+/** A part of the recipe that is folded away until wanted. */
+export function Fold({ title, aside, open = false, children }: FoldProps): JSX.Element {
+  return (
+    <details className="fold" open={open}>
+      <summary>
+        <span>{title}</span>
+        <span className="fold-aside">{aside}</span>
+      </summary>
+      {children}
+    </details>
+  );
+}

@@ -1,0 +1,100 @@
+import { useVirtualizer } from '@tanstack/react-virtual';
+import { type JSX, type KeyboardEvent, useEffect, useMemo, useRef } from 'react';
+import { useActions, useWindow } from '../../shell/services.tsx';
+import { shownAssessment, shownProject } from '../../store/shown.ts';
+import { ROW_DEEP } from './rowDeep.ts';
+import { ScheduleHead } from './ScheduleHead.tsx';
+import { ScheduleRowView } from './ScheduleRowView.tsx';
+import { BRACING_COLUMNS, MAKING_COLUMNS } from './scheduleColumns.ts';
+import { type ScheduleView, seenRows } from './scheduleView.ts';
+import './schedule.css';
+
+interface SchedulePanelProps {
+  readonly view: ScheduleView;
+  onChange(view: ScheduleView): void;
+}
+
+/** Every diagonal, knee and tie in one table; the chosen row and the chosen bar in the view are one. */
+export function SchedulePanel({ view, onChange }: SchedulePanelProps): JSX.Element {
+  const actions = useActions();
+  const assessment = useWindow(shownAssessment);
+  const chosen = useWindow((state) => state.selection.bar);
+  const units = useWindow((state) => shownProject(state).settings.units);
+  const scroller = useRef<HTMLDivElement>(null);
+  const rows = useMemo(() => (assessment === null ? [] : seenRows(assessment, view)), [assessment, view]);
+  const columns = view.columns === 'bracing' ? BRACING_COLUMNS : MAKING_COLUMNS;
+  const at = rows.findIndex(({ row }) => row.bar === chosen);
+  const virtual = useVirtualizer({
+    count: rows.length,
+    getScrollElement: () => scroller.current,
+    estimateSize: () => ROW_DEEP,
+    overscan: 8,
+    scrollPaddingStart: 34,
+  });
+  useEffect(() => {
+    if (at >= 0) virtual.scrollToIndex(at, { align: 'auto' });
+  }, [at, virtual]);
+
+  const choose = (index: number): void => {
+    const row = rows[Math.min(rows.length - 1, Math.max(0, index))];
+    if (row !== undefined) actions.selectBar(row.row.bar);
+  };
+  const page = Math.max(1, Math.floor((scroller.current?.clientHeight ?? 0) / ROW_DEEP) - 2);
+  const steps: Readonly<Record<string, () => void>> = {
+    ArrowDown: () => choose(at + 1),
+    ArrowUp: () => choose(at < 0 ? rows.length - 1 : at - 1),
+    PageDown: () => choose(at + page),
+    PageUp: () => choose(at - page),
+    Home: () => choose(0),
+    End: () => choose(rows.length - 1),
+  };
+  const onKeyDown = (event: KeyboardEvent<HTMLDivElement>): void => {
+    const step = steps[event.key];
+    if (step === undefined || event.target !== event.currentTarget) return;
+    event.preventDefault();
+    step();
+  };
+
+  const template = columns.map(({ width }) => width).join(' ');
+  return (
+    <div
+      ref={scroller}
+      className="schedule"
+      // biome-ignore lint/a11y/useSemanticElements: rows that come and go as one scrolls cannot be a table element.
+      role="grid"
+      aria-label="Schedule"
+      aria-rowcount={rows.length + 1}
+      aria-activedescendant={at >= 0 ? `schedule-${at}` : undefined}
+      tabIndex={0}
+      onKeyDown={onKeyDown}
+      style={{ ['--columns' as string]: template }}
+    >
+      <ScheduleHead columns={columns} view={view} units={units} onChange={onChange} />
+      {/* biome-ignore lint/a11y/useSemanticElements: as above. */}
+      <div role="rowgroup" style={{ height: virtual.getTotalSize(), position: 'relative' }}>
+        {virtual.getVirtualItems().map((item) => {
+          const row = rows[item.index];
+          return row === undefined ? null : (
+            <ScheduleRowView
+              key={row.row.bar}
+              id={`schedule-${item.index}`}
+              index={item.index}
+              top={item.start}
+              seen={row}
+              columns={columns}
+              units={units}
+              chosen={row.row.bar === chosen}
+            />
+          );
+        })}
+      </div>
+      {assessment !== null && rows.length === 0 && (
+        <p className="schedule-none">
+          {assessment.schedule.length === 0
+            ? 'No diagonals are set out yet.'
+            : 'No diagonal fits the filter.'}
+        </p>
+      )}
+    </div>
+  );
+}

@@ -1,0 +1,76 @@
+/** What each cell of the schedule says, on screen and when the table is copied. */
+import type { ScheduleRow } from '../../../core/documents/model.ts';
+import type { UnitSystem } from '../../../core/project/model.ts';
+import { showLength, showMass, showSlenderness } from '../../../core/units/quantity.ts';
+import { columnLength, shownSection } from '../../controls/figures.ts';
+import { STATUS_WORDS } from '../../glyphs/StatusGlyph.tsx';
+import { type Column, type ColumnId, numberOf } from './scheduleColumns.ts';
+import type { SeenRow } from './seenRow.ts';
+
+export function cellText(column: ColumnId, { row, status }: SeenRow, units: UnitSystem): string {
+  switch (column) {
+    case 'mark':
+      return row.mark;
+    case 'bay':
+      return row.bay;
+    case 'section':
+      return shownSection(row.section);
+    case 'grade':
+      return row.grade;
+    case 'hand':
+      return row.hand;
+    case 'leg':
+      return row.legInPlane;
+    case 'placed':
+      return `${row.side}, heel ${row.heel}`;
+    case 'governing':
+      return governingText(row);
+    case 'limit':
+      return String(row.limit);
+    case 'slenderness':
+      return slendernessText(row.inService, row.handling);
+    case 'status':
+      return STATUS_WORDS[status];
+    case 'off':
+      return String(row.numberOff);
+    case 'holes':
+      return row.crossingHoles.map((mm) => columnLength(mm, units)).join(', ') || '–';
+    default: {
+      const value = numberOf(column, row);
+      return value === null ? '–' : figure(column, value, units);
+    }
+  }
+}
+
+interface Judged {
+  readonly slenderness: number;
+  readonly limit: number;
+  readonly asked: boolean;
+}
+
+/** Of the verdict that the practice asks for. */
+export function slendernessText(inService: Judged | null, handling: Judged | null): string {
+  const verdict = inService?.asked === false && handling?.asked === true ? handling : inService;
+  return verdict === null ? '–' : showSlenderness(verdict.slenderness, verdict.limit);
+}
+
+/** The table as it is seen, for a spreadsheet: tabs between cells, a line each row. */
+export function tableText(rows: readonly SeenRow[], columns: readonly Column[], units: UnitSystem): string {
+  const head = columns.map((column) => `${column.head}${column.sub ?? ''}`);
+  const lines = rows.map((row) => columns.map(({ id }) => cellText(id, row, units)));
+  return [head, ...lines].map((cells) => cells.join('\t')).join('\n');
+}
+
+function figure(column: ColumnId, value: number, units: UnitSystem): string {
+  if (column === 'mass' || column === 'massTotal') return showMass(value, units, 'bare');
+  if (column === 'packer' || column === 'setBackI' || column === 'setBackJ')
+    return showLength(value, units, 'small').replace(/ ?mm$/, '');
+  return columnLength(value, units);
+}
+
+function governingText({ governing }: ScheduleRow): string {
+  if (governing === null) return '–';
+  if (governing.axis === 'free')
+    return governing.angle === null ? 'askew' : `${Math.round(governing.angle)}°`;
+  return governing.basis === 'mixed bound' ? `${governing.axis}, bound` : governing.axis;
+}

@@ -1,0 +1,156 @@
+/** The columns of the schedule, with how wide each is and what it is sorted by. */
+import type { ScheduleRow } from '../../../core/documents/model.ts';
+import type { SeenRow } from './seenRow.ts';
+
+export type ColumnId =
+  | 'mark'
+  | 'bay'
+  | 'section'
+  | 'setOut'
+  | 'cut'
+  | 'mass'
+  | 'Lx'
+  | 'Ly'
+  | 'Lu'
+  | 'Lv'
+  | 'governing'
+  | 'slenderness'
+  | 'limit'
+  | 'status'
+  | 'off'
+  | 'hand'
+  | 'grade'
+  | 'setBackI'
+  | 'setBackJ'
+  | 'holes'
+  | 'leg'
+  | 'placed'
+  | 'packer'
+  | 'massTotal';
+
+export interface Column {
+  readonly id: ColumnId;
+  readonly head: string;
+  /** A letter set low beside the head: the x of L_x. */
+  readonly sub?: string;
+  readonly unit?: 'length' | 'mass' | 'small' | 'axis';
+  readonly left?: boolean;
+  /** CSS grid width. */
+  readonly width: string;
+}
+
+export const BRACING_COLUMNS: readonly Column[] = [
+  { id: 'mark', head: 'Mark', left: true, width: '54px' },
+  { id: 'bay', head: 'Bay', left: true, width: '44px' },
+  { id: 'section', head: 'Section', left: true, width: 'minmax(74px, 1.2fr)' },
+  { id: 'setOut', head: 'Set-out', unit: 'length', width: 'minmax(56px, 1fr)' },
+  { id: 'cut', head: 'Cut', unit: 'length', width: 'minmax(56px, 1fr)' },
+  { id: 'mass', head: 'Mass', unit: 'mass', width: 'minmax(50px, 0.9fr)' },
+  { id: 'Lx', head: 'L', sub: 'x', unit: 'length', width: 'minmax(52px, 0.9fr)' },
+  { id: 'Ly', head: 'L', sub: 'y', unit: 'length', width: 'minmax(52px, 0.9fr)' },
+  { id: 'Lu', head: 'L', sub: 'u', unit: 'length', width: 'minmax(52px, 0.9fr)' },
+  { id: 'Lv', head: 'L', sub: 'v', unit: 'length', width: 'minmax(52px, 0.9fr)' },
+  { id: 'governing', head: 'Governing', unit: 'axis', width: 'minmax(64px, 1fr)' },
+  { id: 'slenderness', head: 'Slenderness', width: '118px' },
+  { id: 'limit', head: 'Limit', width: '46px' },
+  { id: 'status', head: 'Status', left: true, width: 'minmax(86px, 1.2fr)' },
+];
+
+export const MAKING_COLUMNS: readonly Column[] = [
+  { id: 'mark', head: 'Mark', left: true, width: '54px' },
+  { id: 'bay', head: 'Bay', left: true, width: '44px' },
+  { id: 'off', head: 'Off', width: '34px' },
+  { id: 'hand', head: 'Hand', left: true, width: '54px' },
+  { id: 'section', head: 'Section', left: true, width: 'minmax(74px, 1.1fr)' },
+  { id: 'grade', head: 'Grade', left: true, width: 'minmax(58px, 0.8fr)' },
+  { id: 'setOut', head: 'Set-out', unit: 'length', width: 'minmax(56px, 0.9fr)' },
+  { id: 'setBackI', head: 'Set-back i', unit: 'small', width: 'minmax(52px, 0.8fr)' },
+  { id: 'setBackJ', head: 'Set-back j', unit: 'small', width: 'minmax(52px, 0.8fr)' },
+  { id: 'cut', head: 'Cut', unit: 'length', width: 'minmax(56px, 0.9fr)' },
+  { id: 'holes', head: 'Holes from end i', unit: 'length', width: 'minmax(64px, 1.1fr)' },
+  { id: 'leg', head: 'Leg in plane', left: true, width: 'minmax(54px, 0.8fr)' },
+  { id: 'placed', head: 'Placed', left: true, width: 'minmax(84px, 1fr)' },
+  { id: 'packer', head: 'Packer', unit: 'small', width: '48px' },
+  { id: 'mass', head: 'Mass', unit: 'mass', width: 'minmax(50px, 0.8fr)' },
+  { id: 'massTotal', head: 'All', unit: 'mass', width: 'minmax(50px, 0.8fr)' },
+];
+
+const STATUS_ORDER = { within: 0, near: 1, over: 2, unknown: 3 } as const;
+
+export function sortValue(column: ColumnId, { row, status, ratio }: SeenRow): number | string {
+  switch (column) {
+    case 'mark':
+      return row.mark;
+    case 'bay':
+      return row.bay;
+    case 'section':
+      return row.section;
+    case 'hand':
+      return row.hand;
+    case 'grade':
+      return row.grade;
+    case 'leg':
+      return row.legInPlane;
+    case 'placed':
+      return `${row.side} ${row.heel}`;
+    case 'governing':
+      return row.governing?.axis ?? '';
+    case 'slenderness':
+      return ratio ?? -1;
+    case 'limit':
+      return row.limit;
+    case 'status':
+      return STATUS_ORDER[status];
+    default:
+      return numberOf(column, row) ?? -1;
+  }
+}
+
+type NumberColumn = Exclude<
+  ColumnId,
+  | 'mark'
+  | 'bay'
+  | 'section'
+  | 'hand'
+  | 'grade'
+  | 'leg'
+  | 'placed'
+  | 'governing'
+  | 'slenderness'
+  | 'limit'
+  | 'status'
+>;
+
+/** mm, kg or a count; null where the row has none. */
+export function numberOf(column: NumberColumn, row: ScheduleRow): number | null {
+  switch (column) {
+    case 'setOut':
+      return row.setOutLength;
+    case 'cut':
+      return row.cutLength;
+    case 'mass':
+      return row.massEach;
+    case 'massTotal':
+      return row.massTotal;
+    case 'Lx':
+      return row.unbraced?.x ?? null;
+    case 'Ly':
+      return row.unbraced?.y ?? null;
+    case 'Lu':
+      return row.unbraced?.u ?? null;
+    case 'Lv':
+      return row.unbraced?.v ?? null;
+    case 'off':
+      return row.numberOff;
+    case 'setBackI':
+      return row.setBackI;
+    case 'setBackJ':
+      return row.setBackJ;
+    case 'holes':
+      return row.crossingHoles[0] ?? null;
+    case 'packer':
+      return row.packer;
+    default:
+      return column satisfies never;
+  }
+}

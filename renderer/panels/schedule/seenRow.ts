@@ -1,0 +1,10 @@
+import type { ScheduleRow } from '../../../core/documents/model.ts';
+import type { Status } from '../../glyphs/StatusGlyph.tsx';
+
+/** A row of the schedule with how it stands. */
+export interface SeenRow {
+  readonly row: ScheduleRow;
+  readonly status: Status;
+  /** Slenderness over limit of the verdict that the practice asks for. */
+  readonly ratio: number | null;
+}

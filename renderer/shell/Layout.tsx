@@ -1,0 +1,66 @@
+import { type JSX, useState } from 'react';
+import { Group, Panel, Separator } from 'react-resizable-panels';
+import { BaysPanel } from '../panels/bays/BaysPanel.tsx';
+import { CardPanel } from '../panels/card/CardPanel.tsx';
+import { Dock } from '../panels/dock/Dock.tsx';
+import { RecipePanel } from '../panels/recipe/RecipePanel.tsx';
+import type { Theme } from '../theme/themeSetting.ts';
+import { firstSizes } from './firstSizes.ts';
+import { ViewPanel } from './view/ViewPanel.tsx';
+import './layout.css';
+
+/** Bays and recipe to the left, the bay in 3D in the middle, the card at full height to the right, the tables below. */
+export function Layout({ theme }: { readonly theme: Theme }): JSX.Element {
+  const [sizes] = useState(() => firstSizes(window.innerWidth, window.innerHeight));
+  return (
+    <Group orientation="horizontal" className="docks">
+      <Panel id="workspace" minSize={560} className="dock-panel">
+        <Group orientation="vertical" className="docks">
+          <Panel id="upper" minSize={240} className="dock-panel">
+            <Group orientation="horizontal" className="docks">
+              <Panel
+                id="bays"
+                defaultSize={sizes.left}
+                minSize={200}
+                maxSize={400}
+                groupResizeBehavior="preserve-pixel-size"
+                className="dock-panel"
+              >
+                <aside className="left" data-region tabIndex={-1} aria-label="Bays and recipe">
+                  <BaysPanel />
+                  <RecipePanel />
+                </aside>
+              </Panel>
+              <Separator className="gutter upright" aria-label="Width of the bays" />
+              <Panel id="view" minSize={320} className="dock-panel">
+                <ViewPanel theme={theme} />
+              </Panel>
+            </Group>
+          </Panel>
+          <Separator className="gutter level" aria-label="Height of the tables" />
+          <Panel
+            id="tables"
+            defaultSize={sizes.dock}
+            minSize={104}
+            maxSize="70%"
+            groupResizeBehavior="preserve-pixel-size"
+            className="dock-panel"
+          >
+            <Dock />
+          </Panel>
+        </Group>
+      </Panel>
+      <Separator className="gutter upright" aria-label="Width of the card" />
+      <Panel
+        id="card"
+        defaultSize={sizes.card}
+        minSize={356}
+        maxSize={560}
+        groupResizeBehavior="preserve-pixel-size"
+        className="dock-panel"
+      >
+        <CardPanel />
+      </Panel>
+    </Group>
+  );
+}

@@ -1,0 +1,79 @@
+import { type JSX, useEffect, useState } from 'react';
+import { useStockChoices } from '../assessing/useStockChoices.ts';
+import { shownAssessed, shownAssessment, shownProject } from '../store/shown.ts';
+import { useActions, useWindow } from './services.tsx';
+
+/** What is chosen, how long the figures took, which stock list, what has just happened. */
+export function StatusBar(): JSX.Element {
+  const stock = useStockChoices();
+  return (
+    <footer className="status" data-region tabIndex={-1} aria-label="Status">
+      <ChosenText />
+      <TrialText />
+      <AssessingText />
+      {stock !== null && <span>Stock list: {stock.name}</span>}
+      <NoticeText />
+      <span className="status-caution">An aid for competent people: check figures before use.</span>
+    </footer>
+  );
+}
+
+function ChosenText(): JSX.Element | null {
+  const text = useWindow((state) => {
+    const assessment = shownAssessment(state);
+    if (assessment === null) return null;
+    const count = assessment.schedule.length;
+    const diagonals = `${count} ${count === 1 ? 'diagonal' : 'diagonals'}`;
+    const mark = state.selection.bar === null ? null : assessment.layout.bars.get(state.selection.bar)?.mark;
+    return mark == null ? diagonals : `${mark} selected, 1 of ${diagonals}`;
+  });
+  return text === null ? null : <span>{text}</span>;
+}
+
+function TrialText(): JSX.Element | null {
+  const trying = useWindow((state) => state.trying !== null);
+  return trying ? <span className="status-trial">On trial: nothing is changed until you keep it</span> : null;
+}
+
+/** ms after which waiting is worth a word. */
+const SLOW = 250;
+
+function AssessingText(): JSX.Element | null {
+  const since = useWindow((state) => state.assessing.workingSince);
+  const failed = useWindow((state) => state.assessing.failure !== null);
+  const took = useWindow((state) => shownAssessed(state)?.took ?? null);
+  const bays = useWindow((state) => shownProject(state).bays.length);
+  const [slow, setSlow] = useState(false);
+  useEffect(() => {
+    setSlow(false);
+    if (since === null) return;
+    const timer = setTimeout(() => setSlow(true), SLOW);
+    return () => clearTimeout(timer);
+  }, [since]);
+  if (failed) return <span className="status-failure">Not assessed: the figures are missing or old</span>;
+  if (slow)
+    return (
+      <span role="status">
+        Assessing {bays} {bays === 1 ? 'bay' : 'bays'}…
+      </span>
+    );
+  return took === null ? null : <span>Assessed in {Math.max(1, Math.round(took))} ms</span>;
+}
+
+/** ms that a notice stays. */
+const STAYS = 6000;
+
+function NoticeText(): JSX.Element {
+  const actions = useActions();
+  const notice = useWindow((state) => state.notice);
+  useEffect(() => {
+    if (notice === null) return;
+    const timer = setTimeout(() => actions.say(null), STAYS);
+    return () => clearTimeout(timer);
+  }, [notice, actions]);
+  return (
+    <span className="status-notice" role="status" aria-label="What has just happened">
+      {notice}
+    </span>
+  );
+}

@@ -1,0 +1,8 @@
+/** The parts of the window that F6 goes round; each carries `data-region` and can take the focus. */
+
+export function toNextRegion(step: 1 | -1): void {
+  const regions = [...document.querySelectorAll<HTMLElement>('[data-region]')];
+  const at = regions.findIndex((region) => region.contains(document.activeElement));
+  const next = regions[(at + step + regions.length) % regions.length];
+  next?.focus();
+}

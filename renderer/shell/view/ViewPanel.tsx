@@ -1,0 +1,87 @@
+import { type JSX, lazy, Suspense, useMemo } from 'react';
+import { useStore } from 'zustand';
+import { CrossingPanel } from '../../panels/crossing/CrossingPanel.tsx';
+import { EndPanel } from '../../panels/end/EndPanel.tsx';
+import { TryBanner } from '../../panels/findings/TryBanner.tsx';
+import { presentProject, shownAssessment, shownProject } from '../../store/shown.ts';
+import type { Theme } from '../../theme/themeSetting.ts';
+import { useServices, useWindow } from '../services.tsx';
+import { EmptyProject } from './EmptyProject.tsx';
+import { FailedFigures } from './FailedFigures.tsx';
+import { trailToShow } from './trail.ts';
+import { ViewBar } from './ViewBar.tsx';
+import './view.css';
+
+const BayView = lazy(async () => ({ default: (await import('../../scene/BayView.tsx')).BayView }));
+
+/** The bay in 3D with its bar of views, and what is docked beside it. */
+export function ViewPanel({ theme }: { readonly theme: Theme }): JSX.Element {
+  const crossing = useWindow((state) => state.selection.crossing);
+  const end = useWindow((state) => state.selection.end);
+  return (
+    <section className="view-panel" data-region tabIndex={-1} aria-label="View">
+      <ViewBar />
+      <div className="view-body">
+        <div className="view-drawing">
+          <Drawing theme={theme} />
+          <TryBanner />
+        </div>
+        {crossing !== null && <CrossingPanel crossingId={crossing} />}
+        {crossing === null && end !== null && <EndPanel end={end} />}
+      </div>
+    </section>
+  );
+}
+
+function Drawing({ theme }: { readonly theme: Theme }): JSX.Element {
+  const { store, actions } = useServices();
+  const started = useWindow((state) => state.started);
+  const empty = useWindow((state) => presentProject(state).bays.length === 0);
+  const assessment = useWindow(shownAssessment);
+  const units = useWindow((state) => shownProject(state).settings.units);
+  const failure = useWindow((state) => state.assessing.failure);
+  const { selection, hovered, view } = useStore(store);
+  const trail = useMemo(
+    () => (assessment === null || !view.trail ? null : trailToShow(assessment, selection)),
+    [assessment, view.trail, selection],
+  );
+  if (started && empty) return <EmptyProject />;
+  if (failure !== null && assessment === null) return <FailedFigures failure={failure} />;
+  if (assessment === null) return <Waiting />;
+  return (
+    <>
+      <Suspense fallback={<Waiting />}>
+        <BayView
+          assessment={assessment}
+          units={units}
+          theme={theme}
+          bay={selection.bay}
+          selectedBar={selection.bar}
+          selectedCrossing={selection.crossing}
+          hoveredBar={hovered}
+          view={view.name}
+          viewNonce={view.nonce}
+          scale={view.scale}
+          bow={view.bow}
+          trail={trail}
+          onSelectBar={(bar) => (bar === null ? actions.stepBack() : actions.selectBar(bar))}
+          onSelectCrossing={(crossing) =>
+            crossing === null ? actions.stepBack() : actions.selectCrossing(crossing)
+          }
+          onSelectEnd={(bar, end) => actions.selectEnd({ bar, end })}
+          onHoverBar={actions.hover}
+          onViewChange={actions.turnView}
+        />
+      </Suspense>
+      {failure !== null && <FailedFigures failure={failure} />}
+    </>
+  );
+}
+
+function Waiting(): JSX.Element {
+  return (
+    <div className="view-waiting" role="status">
+      Setting out…
+    </div>
+  );
+}

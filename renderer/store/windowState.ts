@@ -1,0 +1,85 @@
+/** Everything the window remembers. Results are derived from the project by the assessing worker and only kept here. */
+import type { Assessment } from '../../core/assessment.ts';
+import type { Project } from '../../core/project/model.ts';
+import { newProject } from '../../core/project/newProject.ts';
+import type { ThemeSetting } from '../theme/themeSetting.ts';
+import type { Dialog } from './dialog.ts';
+import { type History, startedHistory } from './history.ts';
+import { NOTHING_SELECTED, type Selection } from './selection.ts';
+import type { Trying } from './trying.ts';
+
+export interface Assessed {
+  readonly project: Project;
+  readonly assessment: Assessment;
+  /** ms that the assessment took. */
+  readonly took: number;
+}
+
+export interface AssessingState {
+  /** Of the project as it stands. */
+  readonly base: Assessed | null;
+  /** Of the change on trial. */
+  readonly tried: Assessed | null;
+  /** Since when a result is awaited, ms; null when nothing is. */
+  readonly workingSince: number | null;
+  /** Why no result came; the project is untouched by it. */
+  readonly failure: string | null;
+}
+
+export interface FileState {
+  readonly name: string;
+  /** Opaque; null until the project has a file. */
+  readonly token: string | null;
+  /** The project as last saved or opened; null when it never was. */
+  readonly saved: Project | null;
+}
+
+export type ViewName = 'elevation' | 'plan' | 'side' | 'axonometric';
+
+export interface ViewState {
+  readonly name: ViewName;
+  /** Turned by hand away from the named view. */
+  readonly turned: boolean;
+  /** Goes up whenever the view is asked for, so that asking again turns the camera back. */
+  readonly nonce: number;
+  readonly scale: 'true' | 'doubled';
+  readonly bow: boolean;
+  readonly trail: boolean;
+}
+
+export type DockTab = 'schedule' | 'shortlist' | 'findings';
+
+export interface WindowState {
+  readonly started: boolean;
+  readonly history: History;
+  readonly file: FileState;
+  readonly assessing: AssessingState;
+  readonly trying: Trying | null;
+  readonly selection: Selection;
+  readonly hovered: string | null;
+  readonly view: ViewState;
+  readonly tab: DockTab;
+  readonly theme: ThemeSetting;
+  readonly dialog: Dialog | null;
+  readonly notice: string | null;
+}
+
+export const NO_RESULTS: AssessingState = { base: null, tried: null, workingSince: null, failure: null };
+
+export function firstState(theme: ThemeSetting): WindowState {
+  const project = newProject('New project');
+  return {
+    started: false,
+    history: startedHistory(project),
+    file: { name: project.name, token: null, saved: project },
+    assessing: NO_RESULTS,
+    trying: null,
+    selection: NOTHING_SELECTED,
+    hovered: null,
+    view: { name: 'axonometric', turned: false, nonce: 0, scale: 'doubled', bow: true, trail: true },
+    tab: 'schedule',
+    theme,
+    dialog: null,
+    notice: null,
+  };
+}
