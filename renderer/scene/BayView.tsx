@@ -38,6 +38,7 @@ export function BayView(props: BayViewProps): JSX.Element {
     onHoverBar,
     onViewChange,
   } = props;
+  const { selectedCrossing, units, bow } = props;
   const { layout } = assessment;
   const bay = useMemo(() => bayOf(layout, bayId), [layout, bayId]);
   const [drawnBy, setDrawnBy] = useState<'webgl' | 'flat, none' | 'flat, lost'>(() =>
@@ -71,10 +72,11 @@ export function BayView(props: BayViewProps): JSX.Element {
     () => targetsOf(inHand, (id) => layout.bars.get(id)?.angle != null),
     [inHand, layout],
   );
+  const whole = useMemo(() => subjectOf(layout, null), [layout]);
   const subject = useMemo(() => (bay === null ? null : subjectOf(layout, bay)), [layout, bay]);
   const content = useMemo(
-    () => overlayContent({ assessment, bay: bayId, selectedBar, bow: props.bow }),
-    [assessment, bayId, selectedBar, props.bow],
+    () => overlayContent({ assessment, bay: bayId, selectedBar, selectedCrossing, units, bow }),
+    [assessment, bayId, selectedBar, selectedCrossing, units, bow],
   );
 
   const named = useNamedView({ ...props, layout, bay, camera, size, legend, drawnBy });
@@ -117,6 +119,7 @@ export function BayView(props: BayViewProps): JSX.Element {
           role="application"
           // biome-ignore lint/a11y/noNoninteractiveTabindex: the stage takes the keys that turn the view
           tabIndex={0}
+          data-over-bar={hoveredBar === null ? undefined : ''}
           aria-label={stageName(bay, drawnBy === 'webgl')}
           onKeyDown={onKeyDown}
           {...pointer}
@@ -126,6 +129,7 @@ export function BayView(props: BayViewProps): JSX.Element {
               merged={merged}
               bay={bay?.id ?? null}
               subject={subject}
+              whole={whole}
               theme={props.theme}
               selected={selected}
               hovered={hovered}
@@ -151,7 +155,7 @@ export function BayView(props: BayViewProps): JSX.Element {
             />
           )}
         </div>
-        <Overlay {...props} content={content} handle={overlay} />
+        <Overlay {...props} content={content} handle={overlay} legend={legend} />
         <Legend element={legendElement} crossings={content.crossings} scale={scale} />
       </div>
       {drawnBy !== 'webgl' && (

@@ -1,5 +1,5 @@
 import { dot, type Vec2 } from '../../../core/geometry/vector.ts';
-import type { BayLayout } from '../../../core/layout/model.ts';
+import type { BayLayout, DimensionLine } from '../../../core/layout/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
 import { showLength } from '../../../core/units/quantity.ts';
 import type { PointToShow } from '../view/fit.ts';
@@ -19,13 +19,13 @@ const FIGURE_OFF = 11;
 /** Set-out dimensions beside the bay. A dimension seen nearly end on, or whose stand-off is, is left out. */
 export function dimensionInk(view: SheetView, bay: BayLayout, units: UnitSystem): readonly Ink[] {
   return bay.dimensions.flatMap((dimension, index): readonly Ink[] => {
-    const out = heading(directionOnSheet(view, dimension.away), 0.25 * view.pxPerMm);
+    const placed = dimensionLine(view, dimension);
+    const text = showLength(dimension.value, units, 'bare');
+    if (placed === null || span(minus(placed[1], placed[0])) < 6 * text.length + 8) return [];
+    const [p, q] = placed;
+    const out = outwards(view, dimension) ?? [0, 0];
     const a = onSheet(view, dimension.from);
     const b = onSheet(view, dimension.to);
-    const text = showLength(dimension.value, units, 'bare');
-    if (out === null || span(minus(b, a)) < 6 * text.length + 8) return [];
-    const p = from(a, out, STAND_OFF);
-    const q = from(b, out, STAND_OFF);
     const key = `dimension ${index}`;
     const witness = (end: Vec2): string => line(from(end, out, GAP), from(end, out, STAND_OFF + PAST));
     const middle = times(plus(p, q), 0.5);
@@ -39,6 +39,20 @@ export function dimensionInk(view: SheetView, bay: BayLayout, units: UnitSystem)
       { kind: 'words', key: `${key} figure`, look: 'scene-words quiet', at, anchor, text },
     ];
   });
+}
+
+/** Where a dimension line runs on the sheet; null when its stand-off is seen end on. */
+export function dimensionLine(view: SheetView, dimension: DimensionLine): readonly [Vec2, Vec2] | null {
+  const out = outwards(view, dimension);
+  if (out === null) return null;
+  return [
+    from(onSheet(view, dimension.from), out, STAND_OFF),
+    from(onSheet(view, dimension.to), out, STAND_OFF),
+  ];
+}
+
+function outwards(view: SheetView, dimension: DimensionLine): Vec2 | null {
+  return heading(directionOnSheet(view, dimension.away), 0.25 * view.pxPerMm);
 }
 
 /** Room that a figure takes beside its dimension line, px. */

@@ -1,6 +1,6 @@
 import type { Vec2, Vec3 } from '../../../core/geometry/vector.ts';
 import { add, distance } from '../../../core/geometry/vector.ts';
-import type { BarId, Layout } from '../../../core/layout/model.ts';
+import type { Bar, BarId, Layout } from '../../../core/layout/model.ts';
 import type { TrailStep } from '../../../core/restraint/model.ts';
 import { onSheet, type SheetView } from '../view/sheetView.ts';
 import {
@@ -23,14 +23,28 @@ const HEAD_EVERY = 90;
 const STOP = 12;
 /** A longer text than this stays in the panel, unless it is where the trail ends. */
 const SHORT = 30;
+/** A stretch shorter than this on the sheet carries no number, px. */
+const SHORTEST_NUMBERED = 60;
 
-/** One step along a bar, or at a node, with where it is in space. */
-type Leg =
-  | { readonly kind: 'along'; readonly step: number; readonly a: Vec3; readonly b: Vec3 }
-  | { readonly kind: 'at'; readonly step: number; readonly at: Vec3 };
+/** A stretch along a bar. `step` null: the other half of a bar that an earlier step has named. */
+interface Leg {
+  readonly step: number | null;
+  readonly a: Vec3;
+  readonly b: Vec3;
+  /** Ends where it is held: a stop bar is drawn. */
+  readonly held: boolean;
+  /** Leads nowhere: the bar slides along itself. */
+  readonly free: boolean;
+}
+
+/** A trail in space: its stretches, and the places that carry a number. */
+interface TrailPlan {
+  readonly legs: readonly Leg[];
+  readonly marks: readonly { readonly step: number; readonly at: Vec3 }[];
+}
 
 /**
- * The way from a hold to its support: a heavy line with arrows along the bars, numbered steps, a stop bar where it ends held; a dashed
+ * The way from a hold to its supports: a heavy line with arrows along the bars, numbered steps, a stop bar where it ends held; a dashed
  * double arrow where the holder is itself free to slide.
  */
 export function trailInk(
@@ -39,49 +53,65 @@ export function trailInk(
   trail: readonly TrailStep[],
   heldBar: BarId | null,
 ): readonly Ink[] {
-  const legs = legsOf(layout, trail, heldBar);
-  const held = trail.at(-1)?.state === 'held';
-  const lines = legs
-    .filter((leg) => leg.kind === 'along')
-    .map((leg) => ({
-      step: leg.step,
-      a: onSheet(view, leg.a),
-      b: onSheet(view, leg.b),
-      free: trail[leg.step + 1]?.state === 'free' || trail[leg.step]?.state === 'free',
-    }));
-  const bands: Ink[] = lines.map(({ step, a, b }) => ({
-    kind: 'path',
-    key: `trail band ${step}`,
-    look: 'scene-trail-band',
-    d: line(a, b),
-  }));
-  const runs = lines.flatMap(({ step, a, b, free }) => (free ? slide(step, a, b) : run(step, a, b)));
-  const lastLine = lines.at(-1);
-  const stop = held && lastLine ? stopBar(lastLine.a, lastLine.b) : [];
-  return [...bands, ...runs, ...stop, ...plaques(view, trail, legs)];
+  const plan = trailPlan(layout, trail, heldBar);
+  const lines = plan.legs.map((leg) => ({ ...leg, p: onSheet(view, leg.a), q: onSheet(view, leg.b) }));
+  return [
+    ...lines.map(
+      ({ p, q }, index): Ink => ({
+        kind: 'path',
+        key: `trail band ${index}`,
+        look: 'scene-trail-band',
+        d: line(p, q),
+      }),
+    ),
+    ...lines.flatMap(({ p, q, free }, index) => (free ? slide(index, p, q) : run(index, p, q))),
+    ...lines.flatMap(({ p, q, held }, index) => (held ? stopBar(index, p, q) : [])),
+    ...plaques(view, trail, plan),
+  ];
 }
 
-function legsOf(layout: Layout, trail: readonly TrailStep[], heldBar: BarId | null): readonly Leg[] {
+/** Steps come as bar, node, bar, node…; after a node that is held a second branch may begin at the other end of the first bar. */
+function trailPlan(layout: Layout, trail: readonly TrailStep[], heldBar: BarId | null): TrailPlan {
   const legs: Leg[] = [];
-  let here = startOf(layout, trail, heldBar);
-  for (const [step, { bar: id, node: nodeId }] of trail.entries()) {
-    const node = nodeId === null ? undefined : layout.nodes.get(nodeId);
+  const marks: { readonly step: number; readonly at: Vec3 }[] = [];
+  const start = startOf(layout, trail, heldBar);
+  const firstBar = trail.map((step) => layout.bars.get(step.bar ?? '')).find((bar) => bar !== undefined);
+  let here = start;
+  for (const [index, step] of trail.entries()) {
+    const node = layout.nodes.get(step.node ?? '');
     if (node) {
+      const branches = trail[index - 1]?.state === 'held' && start !== null && firstBar !== undefined;
+      if (branches) legs.push(legAlong(firstBar, null, start, node.at, step.state));
       here = node.at;
-      legs.push({ kind: 'at', step, at: node.at });
+      marks.push({ step: index, at: node.at });
       continue;
     }
-    const bar = id === null ? undefined : layout.bars.get(id);
+    const bar = layout.bars.get(step.bar ?? '');
     if (!bar) continue;
-    const nextNode = trail.slice(step + 1).find((one) => one.node !== null)?.node ?? null;
-    const next = nextNode === null ? undefined : layout.nodes.get(nextNode)?.at;
-    const start = here ?? bar.from;
+    const origin = here ?? bar.from;
+    const next = trail.slice(index + 1).find((one) => one.node !== null);
+    const onwards = layout.nodes.get(next?.node ?? '')?.at;
     // With no node to go to, the bar leads to its own end that is farther off.
-    const end = next ?? (distance(start, bar.from) > distance(start, bar.to) ? bar.from : bar.to);
-    if (legs.some((leg) => leg.kind === 'along' && leg.b === end && leg.a === start)) continue;
-    legs.push({ kind: 'along', step, a: add(start, bar.offset), b: add(end, bar.offset) });
+    const end = onwards ?? (distance(origin, bar.from) > distance(origin, bar.to) ? bar.from : bar.to);
+    if (trail[index - 1]?.bar === step.bar) {
+      // A second word on the same bar: what becomes of it at its end.
+      marks.push({ step: index, at: add(end, bar.offset) });
+      continue;
+    }
+    const state = next?.state ?? trail[index + 1]?.state ?? step.state;
+    legs.push(legAlong(bar, index, origin, end, onwards ? state : state === 'free' ? 'free' : 'on the way'));
   }
-  return legs;
+  return { legs, marks };
+}
+
+function legAlong(bar: Bar, step: number | null, a: Vec3, b: Vec3, state: TrailStep['state']): Leg {
+  return {
+    step,
+    a: add(a, bar.offset),
+    b: add(b, bar.offset),
+    held: state === 'held',
+    free: state === 'free',
+  };
 }
 
 /** Where the held bar meets the first bar of its trail; null when they do not meet at a crossing. */
@@ -95,22 +125,22 @@ function startOf(layout: Layout, trail: readonly TrailStep[], heldBar: BarId | n
   return null;
 }
 
-function run(step: number, a: Vec2, b: Vec2): readonly Ink[] {
+function run(index: number, a: Vec2, b: Vec2): readonly Ink[] {
   const way = heading(minus(b, a), 1);
   if (way === null) return [];
   const length = span(minus(b, a));
   const heads = Math.max(1, Math.floor(length / HEAD_EVERY));
-  const d = Array.from({ length: heads }, (_, index) =>
-    arrowHead(from(a, way, (length * (index + 1)) / (heads + 0.5)), way),
+  const d = Array.from({ length: heads }, (_, head) =>
+    arrowHead(from(a, way, (length * (head + 1)) / (heads + 0.5)), way),
   ).join('');
   return [
-    { kind: 'path', key: `trail line ${step}`, look: 'scene-trail', d: line(a, b) },
-    { kind: 'path', key: `trail heads ${step}`, look: 'scene-solid', d },
+    { kind: 'path', key: `trail line ${index}`, look: 'scene-trail', d: line(a, b) },
+    { kind: 'path', key: `trail heads ${index}`, look: 'scene-solid', d },
   ];
 }
 
 /** A holder that slides: dashed, with a head at both ends. */
-function slide(step: number, a: Vec2, b: Vec2): readonly Ink[] {
+function slide(index: number, a: Vec2, b: Vec2): readonly Ink[] {
   const way = heading(minus(b, a), 1);
   if (way === null) return [];
   const reach = Math.min(110, span(minus(b, a)));
@@ -118,17 +148,17 @@ function slide(step: number, a: Vec2, b: Vec2): readonly Ink[] {
   const q = from(a, way, reach);
   const back: Vec2 = [-way[0], -way[1]];
   return [
-    { kind: 'path', key: `trail slide ${step}`, look: 'scene-slide', d: line(p, q) },
+    { kind: 'path', key: `trail slide ${index}`, look: 'scene-slide', d: line(p, q) },
     {
       kind: 'path',
-      key: `trail slide heads ${step}`,
+      key: `trail slide heads ${index}`,
       look: 'scene-free-head',
       d: arrowHead(q, way) + arrowHead(p, back),
     },
   ];
 }
 
-function stopBar(a: Vec2, b: Vec2): readonly Ink[] {
+function stopBar(index: number, a: Vec2, b: Vec2): readonly Ink[] {
   const way = heading(minus(b, a), 1);
   if (way === null) return [];
   const side = across(way);
@@ -139,31 +169,35 @@ function stopBar(a: Vec2, b: Vec2): readonly Ink[] {
   return [
     {
       kind: 'path',
-      key: 'trail stop',
+      key: `trail stop ${index}`,
       look: 'scene-hold',
       d: line(from(b, side, STOP), from(b, side, -STOP)),
     },
-    { kind: 'path', key: 'trail stop earth', look: 'scene-earth strong', d: hatch.join('') },
+    { kind: 'path', key: `trail stop earth ${index}`, look: 'scene-earth strong', d: hatch.join('') },
   ];
 }
 
-function plaques(view: SheetView, trail: readonly TrailStep[], legs: readonly Leg[]): readonly Ink[] {
-  return legs.flatMap((leg): readonly Ink[] => {
-    const text = trail[leg.step]?.text ?? '';
-    const on =
-      leg.kind === 'at'
-        ? onSheet(view, leg.at)
-        : times(plus(onSheet(view, leg.a), onSheet(view, leg.b)), 0.5);
+function plaques(view: SheetView, trail: readonly TrailStep[], plan: TrailPlan): readonly Ink[] {
+  const alongBars = plan.legs.flatMap(({ step, a, b }): readonly { step: number; on: Vec2 }[] => {
+    const [p, q] = [onSheet(view, a), onSheet(view, b)];
+    // A short stretch has no room for a number of its own beside that of its end.
+    return step === null || span(minus(q, p)) < SHORTEST_NUMBERED
+      ? []
+      : [{ step, on: times(plus(p, q), 0.5) }];
+  });
+  const atPlaces = plan.marks.map(({ step, at }) => ({ step, on: onSheet(view, at) }));
+  return [...alongBars, ...atPlaces].flatMap(({ step, on }): readonly Ink[] => {
+    const text = trail[step]?.text ?? '';
     const at = plus(on, [0, -18]);
-    const number: Ink = { kind: 'plaque', key: `trail step ${leg.step}`, at, text: String(leg.step + 1) };
-    if (text.length > SHORT && leg.step !== trail.length - 1) return [number];
+    const number: Ink = { kind: 'plaque', key: `trail step ${step}`, at, text: String(step + 1) };
+    if (text.length > SHORT && step !== trail.length - 1) return [number];
     // Near the right edge the words stand before the number.
     const before = at[0] + PLAQUE_HALF + 7 * text.length > view.width - 8;
     return [
       number,
       {
         kind: 'words',
-        key: `trail words ${leg.step}`,
+        key: `trail words ${step}`,
         look: 'scene-words',
         at: plus(at, [before ? -PLAQUE_HALF - 5 : PLAQUE_HALF + 5, 4]),
         anchor: before ? 'end' : 'start',

@@ -1,6 +1,7 @@
 import type { Vec2, Vec3 } from '../../../core/geometry/vector.ts';
 import { add, along } from '../../../core/geometry/vector.ts';
 import type { AngleBar, Bar } from '../../../core/layout/model.ts';
+import type { AngleOutline } from '../../../core/section/model.ts';
 import { outlinePolygon } from '../../../core/section/outlinePath.ts';
 import type { Prism } from './prism.ts';
 import type { AngleScale } from './steelPart.ts';
@@ -14,10 +15,7 @@ const STEPS_PER_ARC = 2;
  */
 export function anglePrisms(bar: Bar, angle: AngleBar, scale: AngleScale): readonly Prism[] {
   if (angle.stock === null) return [];
-  const times = scale === 'doubled' ? 2 : 1;
-  const outline = outlinePolygon(angle.stock.outline, STEPS_PER_ARC).map(
-    ([x, y]): Vec2 => [x * times, y * times],
-  );
+  const outline = drawnOutline(angle.stock.outline, scale);
   const { x, y } = angle.placement;
   const origin = add(bar.from, drawnHeel(angle, scale));
   return angle.cut.pieces
@@ -33,6 +31,21 @@ export function anglePrisms(bar: Bar, angle: AngleBar, scale: AngleScale): reado
       endAtFrom: true,
       endAtTo: true,
     }));
+}
+
+/** Outlines made so far. Bars of one stock angle share theirs, and with it what is worked out from it. */
+const drawn: Readonly<Record<AngleScale, WeakMap<AngleOutline, readonly Vec2[]>>> = {
+  true: new WeakMap(),
+  doubled: new WeakMap(),
+};
+
+function drawnOutline(outline: AngleOutline, scale: AngleScale): readonly Vec2[] {
+  const made = drawn[scale].get(outline);
+  if (made) return made;
+  const times = scale === 'doubled' ? 2 : 1;
+  const fresh = outlinePolygon(outline, STEPS_PER_ARC).map(([x, y]): Vec2 => [x * times, y * times]);
+  drawn[scale].set(outline, fresh);
+  return fresh;
 }
 
 /**

@@ -9,15 +9,29 @@ import type { Vec2 } from '../../../core/geometry/vector.ts';
  * @returns indices into the end's corners, three for each triangle, anticlockwise as the corners are seen
  */
 export function capTriangles(outline: readonly Vec2[], reversed: boolean): readonly number[] {
+  const cut = triangulated.get(outline) ?? triangulate(outline);
+  triangulated.set(outline, cut);
+  return reversed ? cut.behind : cut.front;
+}
+
+interface Cut {
+  readonly front: readonly number[];
+  readonly behind: readonly number[];
+}
+
+/** Outlines cut so far; bars of one section share theirs. */
+const triangulated = new WeakMap<readonly Vec2[], Cut>();
+
+function triangulate(outline: readonly Vec2[]): Cut {
   const triangles = ShapeUtils.triangulateShape(
     outline.map(([x, y]) => new Vector2(x, y)),
     [],
-  );
+  ).map((triangle) => anticlockwise(outline, triangle));
   const last = outline.length - 1;
-  return triangles.flatMap((triangle) => {
-    const [a, b, c] = anticlockwise(outline, triangle);
-    return reversed ? [last - a, last - c, last - b] : [a, b, c];
-  });
+  return {
+    front: triangles.flat(),
+    behind: triangles.flatMap(([a, b, c]) => [last - a, last - c, last - b]),
+  };
 }
 
 function anticlockwise(

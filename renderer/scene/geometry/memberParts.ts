@@ -1,4 +1,4 @@
-import type { Vec3 } from '../../../core/geometry/vector.ts';
+import type { Vec2, Vec3 } from '../../../core/geometry/vector.ts';
 import { add, cross, distance, dot, length, scale, unit } from '../../../core/geometry/vector.ts';
 import type { Bar, BayLayout, Layout, Plane } from '../../../core/layout/model.ts';
 import type { Member } from '../../../core/project/model.ts';
@@ -25,7 +25,7 @@ export function memberPrism(layout: Layout, bay: BayLayout, bar: Bar): Prism {
   const runsOnAtTo = runsOn(layout, bay, bar, bar.j);
   const head = bar.role === 'column' && !runsOnAtTo && bar.direction[2] > 0 ? COLUMN_HEAD : 0;
   return {
-    outline: memberOutline(member),
+    outline: sharedOutline(member),
     origin: add(bar.from, bar.offset),
     x: cross(bar.direction, depthways),
     y: depthways,
@@ -35,6 +35,15 @@ export function memberPrism(layout: Layout, bay: BayLayout, bar: Bar): Prism {
     endAtFrom: !runsOnAtFrom,
     endAtTo: !runsOnAtTo,
   };
+}
+
+/** Outlines made so far: members of one kind share theirs, and with it what is worked out from it. */
+const made = new WeakMap<Member, readonly Vec2[]>();
+
+function sharedOutline(member: Member): readonly Vec2[] {
+  const outline = made.get(member) ?? memberOutline(member);
+  made.set(member, outline);
+  return outline;
 }
 
 /**

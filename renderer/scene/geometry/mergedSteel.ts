@@ -1,4 +1,5 @@
 import { capTriangles } from './capTriangles.ts';
+import { type Growing, growingFloats, growingIndices } from './growing.ts';
 import { type Edge, edgesOf, endFaces, type Face, sideFaces } from './prism.ts';
 import { PAINTS, type SteelPart } from './steelPart.ts';
 
@@ -33,19 +34,19 @@ export interface MergedSteel {
 
 /** @param parts bay by bay: parts of one bay must stand together */
 export function mergedSteel(parts: readonly SteelPart[]): MergedSteel {
-  const positions: number[] = [];
-  const normals: number[] = [];
-  const paints: number[] = [];
-  const triangles: number[] = [];
-  const edges: number[] = [];
-  const fineEdges: number[] = [];
+  const positions = growingFloats();
+  const normals = growingFloats();
+  const paints = growingFloats();
+  const triangles = growingIndices();
+  const edges = growingFloats();
+  const fineEdges = growingFloats();
   const bays = new Map<string, BayRanges>();
 
   const putFace = (face: Face, paint: number, indices: readonly number[]): void => {
     const base = positions.length / 3;
     for (const corner of face.corners) {
-      positions.push(corner[0], corner[1], corner[2]);
-      normals.push(face.normal[0], face.normal[1], face.normal[2]);
+      positions.push3(corner[0], corner[1], corner[2]);
+      normals.push3(face.normal[0], face.normal[1], face.normal[2]);
       paints.push(paint);
     }
     for (const index of indices) triangles.push(base + index);
@@ -66,12 +67,12 @@ export function mergedSteel(parts: readonly SteelPart[]): MergedSteel {
     });
   }
   return {
-    positions: new Float32Array(positions),
-    normals: new Float32Array(normals),
-    paints: new Float32Array(paints),
-    triangles: new Uint32Array(triangles),
-    edges: new Float32Array(edges),
-    fineEdges: new Float32Array(fineEdges),
+    positions: positions.taken(),
+    normals: normals.taken(),
+    paints: paints.taken(),
+    triangles: triangles.taken(),
+    edges: edges.taken(),
+    fineEdges: fineEdges.taken(),
     bays,
   };
 }
@@ -79,8 +80,9 @@ export function mergedSteel(parts: readonly SteelPart[]): MergedSteel {
 /** A side is two triangles. */
 const QUAD = [0, 1, 2, 0, 2, 3] as const;
 
-function putEdge(into: number[], edge: Edge): void {
-  into.push(edge.from[0], edge.from[1], edge.from[2], edge.to[0], edge.to[1], edge.to[2]);
+function putEdge(into: Growing<Float32Array>, edge: Edge): void {
+  into.push3(edge.from[0], edge.from[1], edge.from[2]);
+  into.push3(edge.to[0], edge.to[1], edge.to[2]);
 }
 
 function byBay(

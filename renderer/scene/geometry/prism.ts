@@ -35,11 +35,13 @@ export interface Edge {
 const LINED_CORNER = 30;
 
 /** A point of the section at a distance along the axis, in space. */
-export function pointOf(prism: Prism, section: Vec2, along: number): Vec3 {
-  return add(
-    add(prism.origin, scale(prism.axis, along)),
-    add(scale(prism.x, section[0]), scale(prism.y, section[1])),
-  );
+export function pointOf({ origin, x, y, axis }: Prism, [u, v]: Vec2, along: number): Vec3 {
+  // Written out: this runs for every corner of every bar, and vectors made on the way would cost more than the sums.
+  return [
+    origin[0] + x[0] * u + y[0] * v + axis[0] * along,
+    origin[1] + x[1] * u + y[1] * v + axis[1] * along,
+    origin[2] + x[2] * u + y[2] * v + axis[2] * along,
+  ];
 }
 
 /** Whether x × y runs along the axis; if not, the outline is clockwise seen from the end `to`. */
@@ -50,11 +52,11 @@ function rightHanded(prism: Prism): boolean {
 /** The long faces of a prism, one for each side of the outline. */
 export function sideFaces(prism: Prism): readonly Face[] {
   const facing = rightHanded(prism);
-  return sides(prism.outline).map(([p, q]) => {
-    const a = pointOf(prism, p, prism.from);
-    const b = pointOf(prism, q, prism.from);
-    const c = pointOf(prism, q, prism.to);
-    const d = pointOf(prism, p, prism.to);
+  const near = prism.outline.map((p) => pointOf(prism, p, prism.from));
+  const far = prism.outline.map((p) => pointOf(prism, p, prism.to));
+  return sides(prism.outline).map(([p, q, at, next]) => {
+    const [a, b, c, d] = [near[at], near[next], far[next], far[at]];
+    if (!a || !b || !c || !d) throw new Error('a side beyond the outline');
     const l = Math.hypot(q[0] - p[0], q[1] - p[1]);
     // Outward is to the right of an anticlockwise side, whichever way x × y runs in space.
     const normal = add(scale(prism.x, (q[1] - p[1]) / l), scale(prism.y, (p[0] - q[0]) / l));
@@ -82,13 +84,9 @@ export function endFaces(prism: Prism): readonly EndFace[] {
 
 /** The lines that outline a prism: along its sharp corners and round its closed ends. */
 export function edgesOf(prism: Prism): readonly Edge[] {
-  const box = boxOf(prism.outline);
   const edges: Edge[] = [];
-  for (const [index, corner] of prism.outline.entries()) {
-    if (turnAt(prism.outline, index) < LINED_CORNER) continue;
-    const fine = !(isAt(corner[0], box.minX, box.maxX) && isAt(corner[1], box.minY, box.maxY));
+  for (const { corner, fine } of linedCorners(prism.outline))
     edges.push({ from: pointOf(prism, corner, prism.from), to: pointOf(prism, corner, prism.to), fine });
-  }
   const round = (along: number): void => {
     for (const [p, q] of sides(prism.outline))
       edges.push({ from: pointOf(prism, p, along), to: pointOf(prism, q, along), fine: false });
@@ -98,8 +96,35 @@ export function edgesOf(prism: Prism): readonly Edge[] {
   return edges;
 }
 
-function sides(outline: readonly Vec2[]): readonly (readonly [Vec2, Vec2])[] {
-  return outline.map((p, index): readonly [Vec2, Vec2] => [p, outline[(index + 1) % outline.length] ?? p]);
+interface LinedCorner {
+  readonly corner: Vec2;
+  readonly fine: boolean;
+}
+
+/** Corners found so far; bars of one section share an outline. */
+const lined = new WeakMap<readonly Vec2[], readonly LinedCorner[]>();
+
+/** The corners of an outline that get a line along the solid: full ones at the corners of its box, fine ones elsewhere. */
+function linedCorners(outline: readonly Vec2[]): readonly LinedCorner[] {
+  const known = lined.get(outline);
+  if (known) return known;
+  const box = boxOf(outline);
+  const found = outline.flatMap((corner, index): readonly LinedCorner[] => {
+    if (turnAt(outline, index) < LINED_CORNER) return [];
+    return [{ corner, fine: !(isAt(corner[0], box.minX, box.maxX) && isAt(corner[1], box.minY, box.maxY)) }];
+  });
+  lined.set(outline, found);
+  return found;
+}
+
+/** From corner, to corner, and their places in the outline. */
+type Side = readonly [Vec2, Vec2, number, number];
+
+function sides(outline: readonly Vec2[]): readonly Side[] {
+  return outline.map((p, at): Side => {
+    const next = (at + 1) % outline.length;
+    return [p, outline[next] ?? p, at, next];
+  });
 }
 
 /** How much the outline turns at a corner, degrees, whichever way. */

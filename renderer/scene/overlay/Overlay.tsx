@@ -4,6 +4,8 @@ import type { Bar, Crossing, Layout } from '../../../core/layout/model.ts';
 import { JoinGlyph } from '../../glyphs/JoinGlyph.tsx';
 import { StatusGlyph } from '../../glyphs/StatusGlyph.tsx';
 import type { BayViewProps } from '../bayViewProps.ts';
+import { Detail } from '../detail/Detail.tsx';
+import type { Size } from '../useSize.ts';
 import type { SheetView } from '../view/sheetView.ts';
 import { InkPainter } from './inkPainter.ts';
 import type { OverlayContent } from './overlayContent.ts';
@@ -18,6 +20,7 @@ export interface OverlayHandle {
 export type OverlayProps = BayViewProps & {
   readonly content: OverlayContent;
   readonly handle: RefObject<OverlayHandle | null>;
+  readonly legend: Size;
 };
 
 /**
@@ -25,14 +28,18 @@ export type OverlayProps = BayViewProps & {
  * are written straight to the page whenever the view moves.
  */
 export function Overlay(props: OverlayProps) {
-  const { content, handle, assessment, units, trail } = props;
+  const { content, handle, assessment, units, trail, legend } = props;
   const root = useRef<HTMLDivElement>(null);
   const ink = useRef<SVGGElement>(null);
+  const frame = useRef<SVGGElement>(null);
+  const faces = useRef<SVGGElement>(null);
   const painter = useRef<InkPainter | null>(null);
+  const facePainter = useRef<InkPainter | null>(null);
+  const detailAt = useRef<number | null>(null);
   const view = useRef<SheetView | null>(null);
   const candidates = useRef<ReadonlyMap<string, number>>(new Map());
-  const latest = useRef({ content, assessment, units, trail });
-  latest.current = { content, assessment, units, trail };
+  const latest = useRef({ content, assessment, units, trail, legend });
+  latest.current = { content, assessment, units, trail, legend };
   const bowed =
     content.bow === null || content.selected === null
       ? null
@@ -50,10 +57,17 @@ export function Overlay(props: OverlayProps) {
       grown: grown.current,
       sizes: labelSizes(root.current),
       previous: candidates.current,
+      previousDetail: detailAt.current,
     });
     candidates.current = laid.candidates;
     painter.current.paint(laid.ink);
     putInPlace(root.current, laid);
+    if (frame.current === null || faces.current === null) return;
+    facePainter.current ??= new InkPainter(faces.current);
+    facePainter.current.paint(laid.detail?.faces ?? []);
+    detailAt.current = laid.detail?.place ?? null;
+    frame.current.setAttribute('visibility', laid.detail ? 'visible' : 'hidden');
+    if (laid.detail) frame.current.setAttribute('transform', `translate(${laid.detail.at.join(' ')})`);
   }, [grown]);
   step.current = repaint;
 
@@ -69,12 +83,13 @@ export function Overlay(props: OverlayProps) {
   );
   // What is shown has changed under a view that stands still.
   // biome-ignore lint/correctness/useExhaustiveDependencies: the values are read from `latest` at the time of painting
-  useLayoutEffect(repaint, [content, assessment, units, trail, repaint]);
+  useLayoutEffect(repaint, [content, assessment, units, trail, legend, repaint]);
 
   return (
     <div ref={root} className="scene-overlay">
       <svg className="scene-ink" aria-hidden="true" focusable="false">
         <g ref={ink} />
+        <Detail frame={frame} faces={faces} />
       </svg>
       <Crossings {...props} />
       <Labels {...props} />

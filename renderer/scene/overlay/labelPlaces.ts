@@ -34,7 +34,7 @@ const COST = {
   preference: 0.35,
   coveredPx: 0.02,
   outside: 500,
-  onABar: 2.5,
+  onALine: 2.5,
   keepingPlace: -4,
 } as const;
 
@@ -46,18 +46,20 @@ const TOO_DEAR = 14;
  * those that must be shown first; good, not optimal.
  *
  * @param inTheWay boxes that labels should not cover
+ * @param lines that labels had better not cover, besides the bars
  * @param previous candidates taken last time, by key
  * @returns places by key; a label without a fair place is missing
  */
 export function labelPlaces(
   wishes: readonly LabelWish[],
   inTheWay: readonly Box[],
+  lines: readonly (readonly [Vec2, Vec2])[],
   sheet: Box,
   previous: ReadonlyMap<string, number>,
 ): ReadonlyMap<string, LabelPlace> {
   const taken: Box[] = [...inTheWay];
   const places = new Map<string, LabelPlace>();
-  const bars = wishes.map((wish) => wish.bar);
+  const inks = [...wishes.map((wish) => wish.bar), ...lines];
   const inOrder = [...wishes.filter((wish) => wish.must), ...wishes.filter((wish) => !wish.must)];
   for (const wish of inOrder) {
     let best: LabelPlace | null = null;
@@ -67,7 +69,7 @@ export function labelPlaces(
         place.candidate * COST.preference +
         taken.reduce((sum, box) => sum + overlap(place.box, box) * COST.coveredPx, 0) +
         (inside(place.box, sheet) ? 0 : COST.outside) +
-        bars.filter((bar) => crosses(bar, place.box)).length * COST.onABar +
+        inks.filter((ink) => crosses(ink, place.box)).length * COST.onALine +
         (previous.get(wish.key) === place.candidate ? COST.keepingPlace : 0);
       if (cost < least) {
         least = cost;

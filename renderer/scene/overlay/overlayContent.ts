@@ -1,5 +1,7 @@
+import { add, type Vec3 } from '../../../core/geometry/vector.ts';
 import type { Bar, BayLayout, Crossing } from '../../../core/layout/model.ts';
 import type { BayViewProps } from '../bayViewProps.ts';
+import { type CrossingDetail, crossingDetail, crossingToShow } from '../detail/crossingDetail.ts';
 import { type BowShape, bowShape } from '../drawing/bowShape.ts';
 import { type BarLabel, barLabel } from './barLabel.ts';
 
@@ -10,6 +12,9 @@ export interface OverlayContent {
   readonly crossings: readonly Crossing[];
   readonly selected: Bar | null;
   readonly bow: BowShape | null;
+  readonly detail: CrossingDetail | null;
+  /** Every bar of the bay as a line in space, mm. */
+  readonly steelLines: readonly (readonly [Vec3, Vec3])[];
 }
 
 /** Glyphs and labels of the bay in hand, and the bow of the selected bar where it is wanted and known. */
@@ -17,8 +22,13 @@ export function overlayContent({
   assessment,
   bay: bayId,
   selectedBar,
+  selectedCrossing,
+  units,
   bow: bowWanted,
-}: Pick<BayViewProps, 'assessment' | 'bay' | 'selectedBar' | 'bow'>): OverlayContent {
+}: Pick<
+  BayViewProps,
+  'assessment' | 'bay' | 'selectedBar' | 'selectedCrossing' | 'units' | 'bow'
+>): OverlayContent {
   const { layout } = assessment;
   const bay = layout.bays.find((one) => one.id === bayId) ?? null;
   const bars = (bay?.diagonals ?? []).flatMap((id) => layout.bars.get(id) ?? []);
@@ -28,6 +38,7 @@ export function overlayContent({
   const plane = layout.bays
     .find((one) => one.id === selected?.bay)
     ?.planes.find((one) => one.id === selected?.plane);
+  const shownLarge = crossingToShow(layout, bay, selectedCrossing, selectedBar);
   return {
     bay,
     diagonals: bars.map((bar) => ({ bar, label: barLabel(assessment, bar) })),
@@ -35,5 +46,10 @@ export function overlayContent({
     selected,
     bow:
       bowWanted && selected?.angle && restraint ? bowShape(selected, selected.angle, restraint, plane) : null,
+    steelLines: (bay?.bars ?? []).flatMap((id) => {
+      const bar = layout.bars.get(id);
+      return bar ? [[add(bar.from, bar.offset), add(bar.to, bar.offset)] as const] : [];
+    }),
+    detail: shownLarge === null ? null : crossingDetail(layout, shownLarge, selectedBar, units),
   };
 }

@@ -2,13 +2,15 @@ import type { Assessment } from '../../../core/assessment.ts';
 import type { Vec2 } from '../../../core/geometry/vector.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
 import type { TrailStep } from '../../../core/restraint/model.ts';
+import { detailInk } from '../detail/detailInk.ts';
+import { DETAIL_RADIUS, type DetailPlace, detailPlace } from '../detail/detailPlace.ts';
 import { bowInk } from '../drawing/bowInk.ts';
 import { scaleInk, triadInk } from '../drawing/cornerInk.ts';
-import { dimensionInk } from '../drawing/dimensionInk.ts';
+import { dimensionInk, dimensionLine } from '../drawing/dimensionInk.ts';
 import { endPlace } from '../drawing/endPlace.ts';
 import { groundInk } from '../drawing/groundInk.ts';
 import { holdInk } from '../drawing/holdInk.ts';
-import { type Ink, line, wordsBox } from '../drawing/ink.ts';
+import { from, heading, type Ink, line, wordsBox } from '../drawing/ink.ts';
 import { lineNamesInk } from '../drawing/lineNamesInk.ts';
 import { setOutInk } from '../drawing/setOutInk.ts';
 import { trailInk } from '../drawing/trailInk.ts';
@@ -28,8 +30,10 @@ export interface OverlayInput {
   readonly grown: number;
   /** Of the labels as they stand on the page, px, by bar. */
   readonly sizes: ReadonlyMap<string, { readonly width: number; readonly height: number }>;
-  /** Places that labels took last time. */
+  /** Places that labels took last time, and the detail. */
   readonly previous: ReadonlyMap<string, number>;
+  readonly previousDetail: number | null;
+  readonly legend: { readonly width: number; readonly height: number };
 }
 
 /** Where a button stands, px from the upper left corner of the sheet; ends turn with their bar, degrees. */
@@ -44,6 +48,8 @@ export interface OverlayLayout {
   /** By "crossing …", "label …", "end …"; what is missing is not shown. */
   readonly places: ReadonlyMap<string, Place>;
   readonly candidates: ReadonlyMap<string, number>;
+  /** Where the detail stands and what is in it; null: it is not wanted, or there is no room. */
+  readonly detail: (DetailPlace & { readonly faces: readonly Ink[] }) | null;
 }
 
 /** Half the room that a glyph takes, and the mark of an end, px. */
@@ -85,7 +91,7 @@ export function layOutOverlay(input: OverlayInput): OverlayLayout {
       },
     ];
   });
-  const labels = labelPlaces(wishes, inTheWay, sheet, input.previous);
+  const labels = labelPlaces(wishes, inTheWay, dimensionLines(view, content), sheet, input.previous);
   const leaders = [...labels].map(
     ([key, place]): Ink => ({
       kind: 'path',
@@ -95,11 +101,63 @@ export function layOutOverlay(input: OverlayInput): OverlayLayout {
     }),
   );
   for (const [key, { box }] of labels) places.set(`label ${key}`, { x: box.left, y: box.top });
+  const detail = detailOf(input, [...inTheWay, ...[...labels.values()].map((place) => place.box)], glyphs);
   return {
-    ink: [...steelInk, ...leaders, ...triadInk(view), ...scaleInk(view, units)],
+    ink: [...steelInk, ...leaders, ...(detail?.around ?? []), ...triadInk(view), ...scaleInk(view, units)],
     places,
+    detail,
     candidates: new Map([...labels].map(([key, place]) => [key, place.candidate])),
   };
+}
+
+function detailOf(
+  { view, content, previousDetail, legend }: OverlayInput,
+  inTheWay: readonly Box[],
+  glyphs: ReadonlyMap<string, Vec2>,
+): (DetailPlace & { readonly faces: readonly Ink[]; readonly around: readonly Ink[] }) | null {
+  const { detail } = content;
+  const glyph = detail === null ? undefined : glyphs.get(detail.crossing.id);
+  if (detail === null || glyph === undefined) return null;
+  const bars = content.steelLines.map(([a, b]) => [onSheet(view, a), onSheet(view, b)] as const);
+  const place = detailPlace(view, glyph, bars, [...inTheWay, ...corners(view, legend)], previousDetail);
+  if (place === null) return null;
+  const [x, y] = place.at;
+  const way = heading([x - glyph[0], y - glyph[1]]) ?? [1, 0];
+  const words = (row: number, look: string, text: string): Ink => ({
+    kind: 'words',
+    key: `detail words ${row}`,
+    look: `scene-words ${look}`,
+    at: [x, y + DETAIL_RADIUS + 17 + 15 * row],
+    anchor: 'middle',
+    text,
+  });
+  return {
+    ...place,
+    faces: detailInk(detail, view, DETAIL_RADIUS),
+    around: [
+      {
+        kind: 'path',
+        key: 'detail leader',
+        look: 'scene-leader',
+        d: line(from(glyph, way, GLYPH_HALF + 4), from(place.at, way, -DETAIL_RADIUS)),
+      },
+      words(0, 'strong', detail.title),
+      words(1, 'quiet', detail.note),
+    ],
+  };
+}
+
+/** The lower corners, where triad, scale and legend stand. */
+function corners(view: SheetView, legend: OverlayInput['legend']): readonly Box[] {
+  return [
+    { left: 0, top: view.height - 70, width: 210, height: 70 },
+    {
+      left: view.width - legend.width - 14,
+      top: view.height - legend.height - 14,
+      width: legend.width + 14,
+      height: legend.height + 14,
+    },
+  ];
 }
 
 function inkOf(input: OverlayInput, marks: readonly Box[]): readonly Ink[] {
@@ -137,6 +195,11 @@ function ends(view: SheetView, content: OverlayContent): readonly (readonly [str
 
 function within(sheet: Box, x: number, y: number): boolean {
   return x >= sheet.left && x <= sheet.left + sheet.width && y >= sheet.top && y <= sheet.top + sheet.height;
+}
+
+function dimensionLines(view: SheetView, { bay }: OverlayContent): readonly (readonly [Vec2, Vec2])[] {
+  const lines = (bay?.dimensions ?? []).map((one) => dimensionLine(view, one));
+  return lines.filter((one) => one !== null);
 }
 
 function wordsIn(inks: readonly Ink[]): readonly Box[] {

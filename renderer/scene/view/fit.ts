@@ -90,7 +90,7 @@ function fitWithin(
   if (points.length === 0) return null;
   const onRight = points.map(({ at, beside }) => ({ mm: dot(at, view.right), px: beside[0] }));
   const onUp = points.map(({ at, beside }) => ({ mm: dot(at, view.up), px: -beside[1] }));
-  const depths = points.map(({ at }) => dot(at, view.towards));
+  const onDepth = points.map(({ at }) => ({ mm: dot(at, view.towards), px: 0 }));
   const roomX = Math.max(80, width - margins.left - margins.right);
   const roomY = Math.max(80, height - margins.top - margins.bottom);
   const pxPerMm = largestScale(
@@ -100,7 +100,7 @@ function fitWithin(
   // The middle of the free room is not the middle of the sheet: shift by half the difference of the margins.
   const x = reach(onRight, pxPerMm).middle + (margins.right - margins.left) / 2;
   const y = reach(onUp, pxPerMm).middle + (margins.top - margins.bottom) / 2;
-  const z = (Math.min(...depths) + Math.max(...depths)) / 2;
+  const z = reach(onDepth, 1).middle;
   return {
     centre: add(add(scale(view.right, x / pxPerMm), scale(view.up, y / pxPerMm)), scale(view.towards, z)),
     pxPerMm,

@@ -26,9 +26,6 @@ CameraControls.install({
 /** The world of the scene is in metres; the project is in mm. */
 export const M_PER_MM = 0.001;
 
-/** Half the depth of what the camera sees, m: its distance from the middle of what it looks at. */
-const REACH = 200;
-
 /** Longest time that one frame may count for, s: after a pause the clock has run on, and the view would jump. */
 const LONGEST_FRAME = 1 / 20;
 
@@ -55,6 +52,8 @@ export interface CameraRigProps {
   /** Takes the drags, wheels and pinches. */
   readonly surface: RefObject<HTMLElement | null>;
   readonly handle: RefObject<CameraHandle | null>;
+  /** How far the steel reaches from anything that is looked at, m. The camera stands so far off, and sees as far again. */
+  readonly depth: number;
   /** Called in every frame in which the view has moved. */
   readonly onView: (view: SheetView) => void;
   /** The camera is there and can be told where to look. */
@@ -66,7 +65,15 @@ export interface CameraRigProps {
 }
 
 /** A parallel camera that turns about the upright Z, moved by hand, by keys, or to a named view. */
-export function CameraRig({ surface, handle, onView, onReady, onTurned, onMoved }: CameraRigProps): null {
+export function CameraRig({
+  surface,
+  handle,
+  depth,
+  onView,
+  onReady,
+  onTurned,
+  onMoved,
+}: CameraRigProps): null {
   const camera = useThree((state) => state.camera);
   const invalidate = useThree((state) => state.invalidate);
   const size = useThree((state) => state.size);
@@ -79,9 +86,7 @@ export function CameraRig({ surface, handle, onView, onReady, onTurned, onMoved 
     const element = surface.current;
     if (!(camera instanceof OrthographicCamera) || element === null) return;
     camera.up.set(0, 0, 1);
-    camera.near = 0;
-    camera.far = 2 * REACH;
-    camera.position.set(0, -REACH, 0);
+    camera.position.set(0, -1, 0);
     const made = new CameraControls(camera, element);
     made.updateCameraUp();
     made.dollyToCursor = true;
@@ -120,6 +125,15 @@ export function CameraRig({ surface, handle, onView, onReady, onTurned, onMoved 
     };
   }, [camera, surface, invalidate]);
 
+  useEffect(() => {
+    if (!(camera instanceof OrthographicCamera)) return;
+    camera.near = 0;
+    camera.far = 2 * depth;
+    camera.updateProjectionMatrix();
+    void controls.current?.dollyTo(depth, false);
+    invalidate();
+  }, [camera, depth, invalidate]);
+
   const look = useCallback(
     (view: ViewDirections, fit: Fit, smooth: boolean): void => {
       const made = controls.current;
@@ -132,7 +146,6 @@ export function CameraRig({ surface, handle, onView, onReady, onTurned, onMoved 
       turnedFrom.current = { azimuth: turn, polar };
       void made.rotateTo(turn, polar, smooth);
       void made.moveTo(centre[0], centre[1], centre[2], smooth);
-      void made.dollyTo(REACH, false);
       void made.zoomTo(fit.pxPerMm / M_PER_MM, smooth);
       void made.setFocalOffset(0, 0, 0, smooth);
       invalidate();

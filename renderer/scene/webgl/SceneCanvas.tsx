@@ -1,11 +1,11 @@
 import { Canvas, useThree } from '@react-three/fiber';
 import { type RefObject, useCallback, useEffect, useState } from 'react';
 import { Vector3 } from 'three';
-import type { Vec3 } from '../../../core/geometry/vector.ts';
 import { sceneColours } from '../colours.ts';
 import type { MergedSteel } from '../geometry/mergedSteel.ts';
 import type { SteelPart } from '../geometry/steelPart.ts';
 import type { SheetView } from '../view/sheetView.ts';
+import type { Subject } from '../view/subject.ts';
 import { BarOverlay } from './BarOverlay.tsx';
 import { type CameraHandle, CameraRig, type CameraRigProps, M_PER_MM } from './CameraRig.tsx';
 import {
@@ -18,16 +18,12 @@ import {
 } from './materials.ts';
 import { Steel } from './Steel.tsx';
 
-/** What the camera looks at: the middle of the bay in hand and how far it reaches from there, mm. */
-export interface Subject {
-  readonly middle: Vec3;
-  readonly reach: number;
-}
-
 export interface SceneCanvasProps {
   readonly merged: MergedSteel;
   readonly bay: string | null;
   readonly subject: Subject | null;
+  /** The whole project. */
+  readonly whole: Subject | null;
   readonly theme: 'light' | 'dark';
   readonly selected: readonly SteelPart[];
   readonly hovered: readonly SteelPart[];
@@ -40,6 +36,10 @@ export interface SceneCanvasProps {
   /** The graphics card has dropped the drawing. */
   readonly onLost: () => void;
 }
+
+/** From one end of a project to the other is twice its reach; the user may look a little beside it. m. */
+const DEPTHS = 2.2;
+const BESIDES = 20;
 
 /** Thickness of ordinary angle, mm, and the px it must take up for the inner lines of a profile to be drawn in full. */
 const THICKNESS = 9;
@@ -112,7 +112,7 @@ function Colouring({
 }
 
 function Rig(props: SceneCanvasProps & { readonly materials: SceneMaterials }) {
-  const { materials, onView, surface, camera, onReady, onTurned, onMoved } = props;
+  const { materials, onView, surface, camera, whole, onReady, onTurned, onMoved } = props;
   const told = useCallback<CameraRigProps['onView']>(
     (view) => {
       const fine = Math.min(1, Math.max(FINE_LEAST, (view.pxPerMm * THICKNESS) / FINE_IN_FULL));
@@ -125,6 +125,7 @@ function Rig(props: SceneCanvasProps & { readonly materials: SceneMaterials }) {
     <CameraRig
       surface={surface}
       handle={camera}
+      depth={DEPTHS * (whole?.reach ?? 0) * M_PER_MM + BESIDES}
       onView={told}
       onReady={onReady}
       onTurned={onTurned}

@@ -25,7 +25,7 @@ const fall = wish('fall', [
 
 describe('the labels of diagonals', () => {
   it('stand beside their bars with a short leader', () => {
-    const place = labelPlaces([rise], [], SHEET, NONE).get('rise');
+    const place = labelPlaces([rise], [], [], SHEET, NONE).get('rise');
     if (!place) throw new Error('no place');
     // The bar runs along x + y = 700.
     expect(place.onBar[0] + place.onBar[1]).toBeCloseTo(700, 9);
@@ -34,7 +34,7 @@ describe('the labels of diagonals', () => {
 
   it('do not lie on one another, on glyphs, or over the edge', () => {
     const glyph = boxAbout([400, 300], 11);
-    const places = [...labelPlaces([rise, fall], [glyph], SHEET, NONE).values()];
+    const places = [...labelPlaces([rise, fall], [glyph], [], SHEET, NONE).values()];
     expect(places).toHaveLength(2);
     for (const { box } of places) {
       expect(overlap(box, glyph)).toBe(0);
@@ -46,7 +46,7 @@ describe('the labels of diagonals', () => {
   });
 
   it('keep their place while the view turns a little', () => {
-    const before = labelPlaces([rise, fall], [], SHEET, NONE);
+    const before = labelPlaces([rise, fall], [], [], SHEET, NONE);
     const candidates = new Map([...before].map(([key, place]) => [key, place.candidate]));
     const turned = [rise, fall].map((one) => ({
       ...one,
@@ -55,7 +55,7 @@ describe('the labels of diagonals', () => {
         [one.bar[1][0] - 3, one.bar[1][1] + 2],
       ] as LabelWish['bar'],
     }));
-    const after = labelPlaces(turned, [], SHEET, candidates);
+    const after = labelPlaces(turned, [], [], SHEET, candidates);
     for (const [key, place] of after) expect(place.candidate).toBe(candidates.get(key));
   });
 
@@ -70,7 +70,7 @@ describe('the labels of diagonals', () => {
         index === 30,
       ),
     );
-    const places = labelPlaces(crowd, [], SHEET, NONE);
+    const places = labelPlaces(crowd, [], [], SHEET, NONE);
     expect(places.has('bar 30')).toBe(true);
     expect(places.size).toBeLessThan(40);
   });
@@ -81,7 +81,7 @@ describe('the labels of diagonals', () => {
     fc.assert(
       fc.property(fc.array(fc.tuple(point, point), { minLength: 1, maxLength: 12 }), (bars) => {
         const wishes = bars.map((bar, index) => wish(`bar ${index}`, bar, index === 0));
-        for (const { box } of labelPlaces(wishes, [], SHEET, NONE).values())
+        for (const { box } of labelPlaces(wishes, [], [], SHEET, NONE).values())
           if (!inside(box, SHEET)) return false;
         return true;
       }),

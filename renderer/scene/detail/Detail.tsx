@@ -1,0 +1,25 @@
+import { type RefObject, useId } from 'react';
+import { DETAIL_RADIUS } from './detailPlace.ts';
+
+/** The round frame of a detail. It is moved into place, and its faces painted, together with the ink of the view. */
+export function Detail({
+  frame,
+  faces,
+}: {
+  readonly frame: RefObject<SVGGElement | null>;
+  readonly faces: RefObject<SVGGElement | null>;
+}) {
+  const clip = useId();
+  return (
+    <g ref={frame} className="scene-detail" visibility="hidden">
+      <clipPath id={clip}>
+        <circle r={DETAIL_RADIUS} />
+      </clipPath>
+      <circle className="scene-detail-paper" r={DETAIL_RADIUS} />
+      <g clipPath={`url(#${clip})`}>
+        <g ref={faces} />
+      </g>
+      <circle className="scene-detail-frame" r={DETAIL_RADIUS} />
+    </g>
+  );
+}
