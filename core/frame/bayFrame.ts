@@ -13,6 +13,8 @@ export interface FrameOptions {
   readonly ends: { readonly inPlane: 'stiff' | 'hinged'; readonly outOfPlane: 'stiff' | 'hinged' };
   /** Axial forces already in the bars, tension positive, N. */
   readonly tension: ReadonlyMap<BarId, number>;
+  /** Places on bars that get a node although nothing is joined there, mm from end i. */
+  readonly extraPlaces?: ReadonlyMap<BarId, readonly number[]>;
 }
 
 /** Gusset stiff in its plane, a hinge out of it. */
@@ -77,7 +79,12 @@ class BayFrameBuilder {
     this.#seatLines(bars);
     if (this.#bay.kind === 'free') this.#seatEnds(bars);
     for (const crossing of crossings) this.#join(crossing);
-    for (const bar of bars) this.#lay(bar);
+    for (const bar of bars) {
+      for (const at of this.#options.extraPlaces?.get(bar.id) ?? [])
+        if (at > ONE_PLACE && at < bar.length - ONE_PLACE)
+          this.#placeAt(bar, at, false, along(bar.from, bar.direction, at));
+      this.#lay(bar);
+    }
     return { nodes: this.#nodes, elements: this.#elements, springs: this.#springs, along: this.#along };
   }
 
@@ -216,7 +223,7 @@ class BayFrameBuilder {
       if (cut && !known.cut) places[places.indexOf(known)] = { ...known, cut };
       return known.node;
     }
-    const node = this.#add(`${bar.mark} at its crossing`, where, false);
+    const node = this.#add(`${bar.mark} between its ends`, where, false);
     places.push({ at, node, cut });
     return node;
   }

@@ -1,5 +1,5 @@
 import { dot, type Vec3 } from '../geometry/vector.ts';
-import { type MemberStiffness, memberStiffness } from '../stability/stabilityFunctions.ts';
+import { clampedLoadsBelow, type MemberStiffness, memberStiffness } from '../stability/stabilityFunctions.ts';
 import type { FrameElement } from './model.ts';
 
 /** Unknowns of one element: displacement and rotation at i, then at j, in global axes. */
@@ -10,6 +10,14 @@ export const ELEMENT_SIZE = 12;
  * released rotations condensed out. Rotations are vectors, so the slope of the motion along p is θ·q, and along q it is −θ·p.
  */
 export function elementStiffness(element: FrameElement): Float64Array {
+  return elementWithCount(element).K;
+}
+
+/** The same with the part of a count of critical loads that the ends do not see: clamped pieces, and released rotations that have lost their stiffness. */
+export function elementWithCount(element: FrameElement): {
+  readonly K: Float64Array;
+  readonly hidden: number;
+} {
   const K = new Float64Array(ELEMENT_SIZE * ELEMENT_SIZE);
   const { direction, p, q, length } = element;
   const none: Vec3 = [0, 0, 0];
@@ -17,8 +25,11 @@ export function elementStiffness(element: FrameElement): Float64Array {
   addLine(K, element.GJ / length, row(none, direction, -1), 1);
   addBending(K, element, p, q, element.EIp);
   addBending(K, element, q, [-p[0], -p[1], -p[2]], element.EIq);
-  for (const { end, about } of element.releases) release(K, end === 'i' ? 3 : 9, about);
-  return K;
+  let hidden =
+    clampedLoadsBelow(element.EIp, -element.tension, length) +
+    clampedLoadsBelow(element.EIq, -element.tension, length);
+  for (const { end, about } of element.releases) if (release(K, end === 'i' ? 3 : 9, about) < 0) hidden += 1;
+  return { K, hidden };
 }
 
 /** Displacement and rotation at i, and `other` times the same at j. */
@@ -75,8 +86,8 @@ function addBending(K: Float64Array, element: FrameElement, way: Vec3, turn: Vec
   });
 }
 
-/** The rotation about an axis at one end follows by itself, so that it takes no moment. */
-function release(K: Float64Array, first: number, about: Vec3): void {
+/** The rotation about an axis at one end follows by itself, so that it takes no moment. Returns the stiffness it had. */
+function release(K: Float64Array, first: number, about: Vec3): number {
   const Ka = new Float64Array(ELEMENT_SIZE);
   for (let i = 0; i < ELEMENT_SIZE; i++)
     Ka[i] =
@@ -87,6 +98,7 @@ function release(K: Float64Array, first: number, about: Vec3): void {
   let scale = 0;
   for (let i = 3; i < 6; i++) scale = Math.max(scale, K[i * ELEMENT_SIZE + i] ?? 0);
   // A rotation that nothing resists is free already.
-  if (own <= 1e-12 * scale) return;
+  if (Math.abs(own) <= 1e-12 * scale) return 0;
   addLine(K, 1 / own, Array.from(Ka), -1);
+  return own;
 }

@@ -1,9 +1,9 @@
 import { dot, type Vec3 } from '../geometry/vector.ts';
 import type { BarId } from '../layout/model.ts';
 import { eliminationOrder } from '../sparse/eliminationOrder.ts';
-import { analysed, type Factored, factored, solved } from '../sparse/factor.ts';
+import { analysed, type Factored, factored, type Symbolic, solved } from '../sparse/factor.ts';
 import { MatrixGatherer, type SymmetricMatrix } from '../sparse/symmetricMatrix.ts';
-import { ELEMENT_SIZE, elementStiffness } from './elementStiffness.ts';
+import { ELEMENT_SIZE, elementWithCount } from './elementStiffness.ts';
 import type { Frame, Mechanism, NodeMotion } from './model.ts';
 
 /** A force on a node, N. */
@@ -20,8 +20,10 @@ export class FrameSolver {
   readonly displacementOf: Int32Array;
   readonly rotationOf: Int32Array;
   readonly #factors: Factored;
+  #hidden = 0;
 
-  constructor(frame: Frame) {
+  /** @param symbolic of a frame of the same build with other forces in its bars */
+  constructor(frame: Frame, symbolic: Symbolic | null = null) {
     this.frame = frame;
     const { nodes } = frame;
     this.displacementOf = new Int32Array(nodes.length).fill(-1);
@@ -43,15 +45,29 @@ export class FrameSolver {
     const gatherer = new MatrixGatherer(size, frame.elements.length * 78);
     this.#assemble(gatherer);
     this.matrix = gatherer.matrix();
-    this.#factors = factored(this.matrix, analysed(this.matrix, this.#order(size)));
+    this.#factors = factored(this.matrix, symbolic ?? analysed(this.matrix, this.#order(size)));
   }
 
   get size(): number {
     return this.matrix.size;
   }
 
-  get negativePivots(): number {
-    return this.#factors.negative;
+  get symbolic(): Symbolic {
+    return this.#factors.symbolic;
+  }
+
+  /** Critical load factors below the forces now in the bars (Wittrick and Williams, 1971). */
+  get criticalLoadsBelow(): number {
+    return this.#factors.negative + this.#hidden;
+  }
+
+  /** The part of that count that has poles in the determinant. */
+  get hiddenCount(): number {
+    return this.#hidden;
+  }
+
+  get logDeterminant(): number {
+    return this.#factors.diagonal.reduce((sum, pivot) => sum + Math.log(Math.abs(pivot)), 0);
   }
 
   /** Unknowns of an element or spring in its own order; −1 where held. */
@@ -120,8 +136,11 @@ export class FrameSolver {
   }
 
   #assemble(gatherer: MatrixGatherer): void {
-    for (const element of this.frame.elements)
-      addBlock(gatherer, this.unknownsOf(element.i, element.j), elementStiffness(element), ELEMENT_SIZE);
+    for (const element of this.frame.elements) {
+      const { K, hidden } = elementWithCount(element);
+      this.#hidden += hidden;
+      addBlock(gatherer, this.unknownsOf(element.i, element.j), K, ELEMENT_SIZE);
+    }
     for (const spring of this.frame.springs) {
       const first = spring.kind === 'displacement' ? this.displacementOf : this.rotationOf;
       const unknowns: number[] = [];
@@ -189,7 +208,8 @@ function addBlock(
     for (let b = a; b < size; b++) {
       const j = unknowns[b] ?? -1;
       const value = K[a * size + b] ?? 0;
-      if (j < 0 || value === 0) continue;
+      // Zeros too: the pattern must be the same whatever the forces in the bars.
+      if (j < 0) continue;
       gatherer.add(i, j, a !== b && i === j ? 2 * value : value);
     }
   }

@@ -40,7 +40,7 @@ export class RootSearch {
   }
 
   /** The factor below which fewer than `rank` critical loads lie, and above which at least that many do. */
-  root(rank: number, guess: number): number {
+  root(rank: number, guess: number, tolerance = TOLERANCE): number {
     let low = guess * (1 - 1e-9);
     let atLow = this.#tried(low);
     while (atLow.below >= rank) {
@@ -55,23 +55,23 @@ export class RootSearch {
       high *= step;
       atHigh = this.#tried(high);
     }
-    return this.#closedIn(rank, low, atLow, high, atHigh);
+    return this.#closedIn(rank, tolerance, low, atLow, high, atHigh);
   }
 
-  #closedIn(rank: number, from: number, atFrom: Trial, to: number, atTo: Trial): number {
+  #closedIn(rank: number, tolerance: number, from: number, atFrom: Trial, to: number, atTo: Trial): number {
     let [low, atLow, high, atHigh] = [from, atFrom, to, atTo];
     // Weight of the stale end, as in the Illinois method.
     let lowWeight = 1;
     let highWeight = 1;
     let narrow = 0;
-    while (high - low > TOLERANCE * high && this.trials < MOST_TRIALS) {
+    while (high - low > tolerance * high && this.trials < MOST_TRIALS) {
       const smooth = atLow.clamped === atHigh.clamped && atLow.below === rank - 1 && atHigh.below === rank;
       let next = (low + high) / 2;
       if (smooth && narrow < 3) {
         const ratio =
           (highWeight / lowWeight) * Math.exp(Math.min(500, atHigh.logDeterminant - atLow.logDeterminant));
         next = low + (high - low) / (1 + ratio);
-        const least = TOLERANCE * high * 0.4;
+        const least = tolerance * high * 0.4;
         next = Math.min(high - least, Math.max(low + least, next));
       }
       const width = high - low;
