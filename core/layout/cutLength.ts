@@ -7,8 +7,10 @@ const CLEAR_OF_THROUGH_BAR = 10;
 export interface CutInput {
   readonly length: number;
   readonly ends: { readonly i: EndConnection; readonly j: EndConnection };
-  /** Where this bar is cut for another, and how wide that one lies across it, mm. */
-  readonly cuts: readonly { readonly at: number; readonly throughWidth: number; readonly angle: number }[];
+  /** Where this bar is cut for another, and the acute angle between them, degrees. */
+  readonly cuts: readonly { readonly at: number; readonly throughReach: number; readonly angle: number }[];
+  /** Farthest that this bar's leg lies to one side of its set-out line, mm; `throughReach` is that of the other. */
+  readonly reach: number;
   readonly holes: readonly { readonly crossing: CrossingId; readonly at: number }[];
 }
 
@@ -20,7 +22,7 @@ export function cutLengthOf(input: CutInput): CutLength {
   const pieces: { from: number; to: number }[] = [];
   let from = startsAt;
   for (const cut of [...input.cuts].sort((a, b) => a.at - b.at)) {
-    const half = cut.throughWidth / (2 * Math.sin((cut.angle * Math.PI) / 180)) + CLEAR_OF_THROUGH_BAR;
+    const half = halfOfTheGap(cut.throughReach, input.reach, cut.angle);
     pieces.push({ from, to: cut.at - half });
     from = cut.at + half;
   }
@@ -35,6 +37,15 @@ export function cutLengthOf(input: CutInput): CutLength {
       : pieces.reduce((sum, p) => sum + p.to - p.from, 0),
     holes: input.holes.map((hole) => ({ crossing: hole.crossing, fromEndA: hole.at - startsAt })),
   };
+}
+
+/**
+ * From the crossing to the square-cut end of either half, along the cut bar: its corner, `reach` off the line, still clears the bar that
+ * runs through. The same both ways, so that the plate lies in the middle.
+ */
+function halfOfTheGap(throughReach: number, reach: number, degrees: number): number {
+  const angle = (degrees * Math.PI) / 180;
+  return (throughReach + CLEAR_OF_THROUGH_BAR + reach * Math.cos(angle)) / Math.sin(angle);
 }
 
 /** From the set-out point to where the steel begins, mm: below 0 when the end distance passes the point. */

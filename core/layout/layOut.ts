@@ -26,14 +26,27 @@ export function layOut(project: Project, stock: Stock): Layout {
   const register = new NodeRegister();
   const bars = new Map<BarId, Bar>();
   const crossings = new Map<CrossingId, Crossing>();
-  let marks = 0;
+  const nextMark = numbering(project);
   const bays = project.bays.map((bay): BayLayout => {
-    const set = setOut(bay, stock, register, () => `D${++marks}`);
+    const set = setOut(bay, stock, register, nextMark);
     for (const bar of set.bars) bars.set(bar.id, bar);
     for (const crossing of set.crossings) crossings.set(crossing.id, crossing);
     return set.layout;
   });
   return { bays, nodes: register.all(), bars, crossings };
+}
+
+/** D1, D2, … without those that the user has given out: on site a mark must find one kind of bar. */
+function numbering(project: Project): () => string {
+  const taken = new Set(
+    project.bays.flatMap((bay) => Object.values(bay.bars).flatMap(({ mark }) => mark ?? [])),
+  );
+  let number = 0;
+  return () => {
+    do number += 1;
+    while (taken.has(`D${number}`));
+    return `D${number}`;
+  };
 }
 
 interface Drafted {
@@ -198,11 +211,12 @@ function angleBarOf(
   const cut = cutLengthOf({
     length: draft.length,
     ends: angle.ends,
+    reach: reachOf(angle),
     cuts: crossings.filter(isCut).map((crossing) => {
       const other = drafts.get((crossing.a === id ? crossing.b : crossing.a).slice(bay.length + 1))?.angle;
       return {
         at: onThis(crossing),
-        throughWidth: other?.stock ? legInPlaneOf(other.stock, other.spec.legInPlane) : 0,
+        throughReach: other ? reachOf(other) : 0,
         angle: crossing.angle,
       };
     }),
@@ -220,6 +234,12 @@ function angleBarOf(
     mass: angle.stock ? (angle.stock.massPerMetre * cut.total) / 1000 : null,
     hand: handOf(cut, angle.ends, dot(cross(draft.direction, leg), standing)),
   };
+}
+
+/** Farthest that the leg in the plane lies to one side of the line of bolts: to the heel, or to the toe. */
+function reachOf({ stock, spec, placement }: AngleDraft): number {
+  if (!stock) return 0;
+  return Math.max(placement.gauge, legInPlaneOf(stock, spec.legInPlane) - placement.gauge);
 }
 
 function takesAHole(crossing: Crossing): boolean {
