@@ -23,6 +23,15 @@ const TOO_SOON = 5000;
 const say = (line: string): void => void process.stdout.write(`${line}\n`);
 const complain = (line: string): void => void process.stderr.write(`${line}\n`);
 
+/** Set off by Ctrl-C: whatever is running then ends, and nothing more is begun. */
+const interruption = new AbortController();
+for (const signal of ['SIGINT', 'SIGTERM'] as const)
+  process.on(signal, () => {
+    // Asked for a second time, when something does not want to end.
+    if (interruption.signal.aborted) process.exit(130);
+    interruption.abort();
+  });
+
 process.exitCode = await launch(process.argv.slice(2));
 
 /** Returns the exit code: 0, 1 when building failed, 2 for a file that is not there. */
@@ -37,7 +46,8 @@ async function launch(args: readonly string[]): Promise<number> {
 
   if (isStale(ROOT)) {
     say('Building the window…');
-    const failure = await build(ROOT);
+    const failure = await build(ROOT, interruption.signal);
+    if (interruption.signal.aborted) return 0;
     if (failure !== null) {
       complain(`The window could not be built:\n${failure}`);
       return 1;
@@ -57,6 +67,7 @@ async function openInElectron(file: string | null): Promise<boolean> {
     say('Fetching Electron for the first time…');
     binary = fetchElectronBinary();
   }
+  if (interruption.signal.aborted) return true;
   if (binary === null) {
     say('Electron could not be fetched: taking a browser window instead.');
     return false;
@@ -122,27 +133,18 @@ function hasNoDisplay(): boolean {
   return process.platform === 'linux' && !DISPLAY && !WAYLAND_DISPLAY;
 }
 
-/** Waits for a program to end by itself; Ctrl-C ends it and whatever it started. */
+/** Waits for a program to end by itself; Ctrl-C ends it and whatever it started, and counts as a good end. */
 async function untilEnded(program: StartedProgram): StartedProgram['ended'] {
-  let interrupted = false;
-  const stop = () => {
-    interrupted = true;
-    program.end();
-  };
-  process.on('SIGINT', stop);
-  process.on('SIGTERM', stop);
-  try {
-    const end = await program.ended;
-    return interrupted ? { ...end, code: 0 } : end;
-  } finally {
-    process.off('SIGINT', stop);
-    process.off('SIGTERM', stop);
-  }
+  const { signal } = interruption;
+  if (signal.aborted) program.end();
+  signal.addEventListener('abort', program.end, { once: true });
+  const end = await program.ended;
+  return signal.aborted ? { ...end, code: 0 } : end;
 }
 
 function untilInterrupted(): Promise<void> {
   return new Promise((resolve) => {
-    process.once('SIGINT', () => resolve());
-    process.once('SIGTERM', () => resolve());
+    if (interruption.signal.aborted) resolve();
+    else interruption.signal.addEventListener('abort', () => resolve(), { once: true });
   });
 }

@@ -25,7 +25,7 @@ export function isStale(root: string): boolean {
 }
 
 /** Builds the window and the desktop. Returns what the builder said when it failed, or null. */
-export function build(root: string): Promise<string | null> {
+export function build(root: string, interrupted: AbortSignal): Promise<string | null> {
   const vite = path.join(
     path.dirname(createRequire(import.meta.url).resolve('vite/package.json')),
     'bin/vite.js',
@@ -33,6 +33,7 @@ export function build(root: string): Promise<string | null> {
   const child = spawn(process.execPath, [vite, 'build', '--app'], {
     cwd: root,
     stdio: ['ignore', 'pipe', 'pipe'],
+    signal: interrupted,
   });
   let said = '';
   child.stdout.on('data', (part: Buffer) => {

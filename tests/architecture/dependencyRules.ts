@@ -104,9 +104,9 @@ export const RULES: readonly IRegularForbiddenRuleType[] = [
   rule('no-circles', 'no module imports itself, by whatever way round', {}, { circular: true }),
   rule(
     'everything-resolves',
-    'an import names a module that is there',
+    'an import of the project names a module that is there',
     { path: '^(core|renderer|electron|assets|tests)/' },
-    { couldNotResolve: true, pathNot: ['\\?(raw|url|worker)$', '^dependency-cruiser/'] },
+    { couldNotResolve: true, path: '^\\.\\.?/', pathNot: '\\?(raw|url|worker)$' },
   ),
   rule(
     'no-orphans',
