@@ -110,11 +110,7 @@ function freeNotes(
   restraint: Restraint,
   bow: BowShape,
 ): readonly Note[] {
-  const words = [
-    'free to bow',
-    seenEndOn(view, bow) ? 'towards you and away' : named(angle, bow.direction),
-    ...(restraint.governing.basis === 'mixed bound' ? ['(a safe bound)'] : []),
-  ];
+  const words = freeWords(view, angle, restraint, bow);
   return FREE_AT.flatMap((part): readonly Note[] => {
     const at = onSheet(view, along(bar.from, bar.direction, bow.from + part * (bow.to - bow.from)));
     if (seenEndOn(view, bow)) return [[-1, 0] as const, [1, 0] as const].map((out) => endOn(at, out, words));
@@ -137,6 +133,19 @@ function freeNotes(
       },
     ];
   });
+}
+
+function freeWords(
+  view: SheetView,
+  angle: AngleBar,
+  { governing }: Restraint,
+  bow: BowShape,
+): readonly string[] {
+  // Nothing holds it on the way: it goes over its least radius, but could go any way.
+  if (governing.freeDirection === null && governing.basis === 'span')
+    return ['free every way', 'weakest shown'];
+  const way = seenEndOn(view, bow) ? 'towards you and away' : named(angle, bow.direction);
+  return ['free to bow', way, ...(governing.basis === 'mixed bound' ? ['(a safe bound)'] : [])];
 }
 
 function endOn(at: Vec2, out: Vec2, words: readonly string[]): Note {
@@ -191,5 +200,5 @@ function upFirst(way: Vec2): readonly [Vec2, Vec2] {
 function named(angle: AngleBar, direction: Vec3): string {
   if (Math.abs(dot(direction, angle.placement.inPlane)) > ALIKE) return 'in plane';
   if (Math.abs(dot(direction, angle.placement.outOfPlane)) > ALIKE) return 'out of plane';
-  return 'one way';
+  return 'askew to the plane';
 }

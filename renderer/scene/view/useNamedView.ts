@@ -10,7 +10,7 @@ import { namedView, type ViewDirections } from './namedView.ts';
 import type { SheetView } from './sheetView.ts';
 
 /** Room round the bay and its dimensions, px. */
-const MARGINS: Margins = { left: 18, right: 18, top: 20, bottom: 16 };
+const MARGINS: Margins = { left: 30, right: 30, top: 28, bottom: 18 };
 /** The lower left corner, where the triad and the scale stand, px. */
 const CORNER: Size = { width: 210, height: 70 };
 /** The legend's distance from the edges, px. */
