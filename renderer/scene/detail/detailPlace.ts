@@ -8,6 +8,9 @@ export const DETAIL_CAPTION = 38;
 /** From the edges of the sheet, px. */
 const EDGE = 16;
 
+/** A leader that runs across a label or words is as bad as one longer by this, px. */
+const CROSSED = 90;
+
 /** The places tried, by part of the free width and height. */
 const PLACES: readonly Vec2[] = [
   [1, 0.72],
@@ -46,8 +49,10 @@ export function detailPlace(
     };
     if (bars.some((bar) => crosses(bar, box)) || taken.some((one) => overlap(one, box) > 0)) return [];
     const at: Vec2 = [box.left + DETAIL_RADIUS, box.top + DETAIL_RADIUS];
-    return [{ at, place, away: Math.hypot(at[0] - glyph[0], at[1] - glyph[1]) }];
+    const away = Math.hypot(at[0] - glyph[0], at[1] - glyph[1]);
+    const crossed = taken.filter((one) => crosses([glyph, at], one)).length;
+    return [{ at, place, cost: away + CROSSED * crossed }];
   });
   const kept = free.find(({ place }) => place === previous);
-  return kept ?? free.toSorted((a, b) => a.away - b.away)[0] ?? null;
+  return kept ?? free.toSorted((a, b) => a.cost - b.cost)[0] ?? null;
 }

@@ -1,4 +1,4 @@
-import { dot, type Vec2 } from '../../../core/geometry/vector.ts';
+import { dot, type Vec2, type Vec3 } from '../../../core/geometry/vector.ts';
 import type { BayLayout, DimensionLine } from '../../../core/layout/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
 import { showLength } from '../../../core/units/quantity.ts';
@@ -59,17 +59,22 @@ function outwards(view: SheetView, dimension: DimensionLine): Vec2 | null {
 const FIGURE_WIDTH = 44;
 const FIGURE_HEIGHT = 18;
 
-/** The ends of a bay's dimensions with the room that their lines and figures take beside them, for fitting a view. */
+/** The room that a bay's dimensions take beside it, for fitting a view: at their ends for the lines, at their middles for the figures. */
 export function dimensionRoom(bay: BayLayout, view: ViewDirections): readonly PointToShow[] {
   return bay.dimensions.flatMap(({ from: a, to: b, away }): readonly PointToShow[] => {
     const out = heading([dot(away, view.right), -dot(away, view.up)], 0.25);
     if (out === null) return [];
-    const reach = STAND_OFF + FIGURE_OFF;
-    const beside: Vec2 = [
-      out[0] * (reach + Math.abs(out[0]) * FIGURE_WIDTH),
-      out[1] * (reach + Math.abs(out[1]) * FIGURE_HEIGHT),
+    const line = times(out, STAND_OFF + PAST);
+    const figure: Vec2 = [
+      out[0] * (STAND_OFF + FIGURE_OFF + Math.abs(out[0]) * FIGURE_WIDTH),
+      out[1] * (STAND_OFF + FIGURE_OFF + Math.abs(out[1]) * FIGURE_HEIGHT),
     ];
-    return [a, b].map((at) => ({ at, beside }));
+    const middle: Vec3 = [(a[0] + b[0]) / 2, (a[1] + b[1]) / 2, (a[2] + b[2]) / 2];
+    return [
+      { at: a, beside: line },
+      { at: b, beside: line },
+      { at: middle, beside: figure },
+    ];
   });
 }
 

@@ -2,6 +2,7 @@ import type { Vec2, Vec3 } from '../../../core/geometry/vector.ts';
 import { add, distance } from '../../../core/geometry/vector.ts';
 import type { Bar, BarId, Layout } from '../../../core/layout/model.ts';
 import type { TrailStep } from '../../../core/restraint/model.ts';
+import { type Box, boxAbout, inside, overlap } from '../view/box.ts';
 import { onSheet, type SheetView } from '../view/sheetView.ts';
 import {
   across,
@@ -15,6 +16,7 @@ import {
   plus,
   span,
   times,
+  wordsBox,
 } from './ink.ts';
 
 /** An arrow head about every so many px of a leg. */
@@ -46,12 +48,15 @@ interface TrailPlan {
 /**
  * The way from a hold to its supports: a heavy line with arrows along the bars, numbered steps, a stop bar where it ends held; a dashed
  * double arrow where the holder is itself free to slide.
+ *
+ * @param inTheWay what the words of the steps should not cover; those without room are left to the panel
  */
 export function trailInk(
   view: SheetView,
   layout: Layout,
   trail: readonly TrailStep[],
   heldBar: BarId | null,
+  inTheWay: readonly Box[],
 ): readonly Ink[] {
   const plan = trailPlan(layout, trail, heldBar);
   const lines = plan.legs.map((leg) => ({ ...leg, p: onSheet(view, leg.a), q: onSheet(view, leg.b) }));
@@ -66,7 +71,7 @@ export function trailInk(
     ),
     ...lines.flatMap(({ p, q, free }, index) => (free ? slide(index, p, q) : run(index, p, q))),
     ...lines.flatMap(({ p, q, held }, index) => (held ? stopBar(index, p, q) : [])),
-    ...plaques(view, trail, plan),
+    ...plaques(view, trail, plan, inTheWay),
   ];
 }
 
@@ -177,7 +182,12 @@ function stopBar(index: number, a: Vec2, b: Vec2): readonly Ink[] {
   ];
 }
 
-function plaques(view: SheetView, trail: readonly TrailStep[], plan: TrailPlan): readonly Ink[] {
+function plaques(
+  view: SheetView,
+  trail: readonly TrailStep[],
+  plan: TrailPlan,
+  inTheWay: readonly Box[],
+): readonly Ink[] {
   const alongBars = plan.legs.flatMap(({ step, a, b }): readonly { step: number; on: Vec2 }[] => {
     const [p, q] = [onSheet(view, a), onSheet(view, b)];
     // A short stretch has no room for a number of its own beside that of its end.
@@ -186,23 +196,36 @@ function plaques(view: SheetView, trail: readonly TrailStep[], plan: TrailPlan):
       : [{ step, on: times(plus(p, q), 0.5) }];
   });
   const atPlaces = plan.marks.map(({ step, at }) => ({ step, on: onSheet(view, at) }));
-  return [...alongBars, ...atPlaces].flatMap(({ step, on }): readonly Ink[] => {
+  const numbers = [...alongBars, ...atPlaces].map(({ step, on }) => ({ step, at: plus(on, [0, -18]) }));
+  const taken: Box[] = [...inTheWay, ...numbers.map(({ at }) => boxAbout(at, PLAQUE_HALF))];
+  const ink: Ink[] = numbers.map(({ step, at }) => ({
+    kind: 'plaque',
+    key: `trail step ${step}`,
+    at,
+    text: String(step + 1),
+  }));
+  const sheet: Box = { left: 4, top: 4, width: view.width - 8, height: view.height - 8 };
+  // Where the trail ends matters most, and is placed first.
+  for (const { step, at } of numbers.toSorted(
+    (a, b) => Number(b.step === trail.length - 1) - Number(a.step === trail.length - 1),
+  )) {
     const text = trail[step]?.text ?? '';
-    const at = plus(on, [0, -18]);
-    const number: Ink = { kind: 'plaque', key: `trail step ${step}`, at, text: String(step + 1) };
-    if (text.length > SHORT && step !== trail.length - 1) return [number];
-    // Near the right edge the words stand before the number.
-    const before = at[0] + PLAQUE_HALF + 7 * text.length > view.width - 8;
-    return [
-      number,
-      {
-        kind: 'words',
-        key: `trail words ${step}`,
-        look: 'scene-words',
-        at: plus(at, [before ? -PLAQUE_HALF - 5 : PLAQUE_HALF + 5, 4]),
-        anchor: before ? 'end' : 'start',
-        text,
-      },
-    ];
-  });
+    if (text.length > SHORT && step !== trail.length - 1) continue;
+    const words = (['start', 'end'] as const)
+      .map(
+        (anchor): Extract<Ink, { kind: 'words' }> => ({
+          kind: 'words',
+          key: `trail words ${step}`,
+          look: 'scene-words',
+          at: plus(at, [anchor === 'start' ? PLAQUE_HALF + 5 : -PLAQUE_HALF - 5, 4]),
+          anchor,
+          text,
+        }),
+      )
+      .find((one) => inside(wordsBox(one), sheet) && taken.every((box) => overlap(box, wordsBox(one)) === 0));
+    if (!words) continue;
+    taken.push(wordsBox(words));
+    ink.push(words);
+  }
+  return ink;
 }

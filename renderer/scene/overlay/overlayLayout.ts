@@ -10,7 +10,7 @@ import { dimensionInk, dimensionLine } from '../drawing/dimensionInk.ts';
 import { endPlace } from '../drawing/endPlace.ts';
 import { groundInk } from '../drawing/groundInk.ts';
 import { holdInk } from '../drawing/holdInk.ts';
-import { from, heading, type Ink, line, wordsBox } from '../drawing/ink.ts';
+import { from, heading, type Ink, line, PLAQUE_HALF, wordsBox } from '../drawing/ink.ts';
 import { lineNamesInk } from '../drawing/lineNamesInk.ts';
 import { setOutInk } from '../drawing/setOutInk.ts';
 import { trailInk } from '../drawing/trailInk.ts';
@@ -171,9 +171,12 @@ function inkOf(input: OverlayInput, marks: readonly Box[]): readonly Ink[] {
     ...(bay === null ? [] : setOutInk(view, layout, bay)),
     ...dimensions,
     ...(bay === null ? [] : lineNamesInk(view, layout, bay)),
-    ...(trail === null ? [] : trailInk(view, layout, trail, selected?.id ?? null)),
+    ...(trail === null
+      ? []
+      : trailInk(view, layout, trail, selected?.id ?? null, [...marks, ...wordsIn(dimensions)])),
     ...(selected === null || bow === null ? [] : bowInk(view, selected, bow, grown)),
-    ...(selected?.angle && bow !== null && restraint !== null
+    // A lit trail says what holds the bar, and where; the notes of the bow would lie on it.
+    ...(selected?.angle && bow !== null && restraint !== null && trail === null
       ? holdInk(view, selected, selected.angle, restraint, bow, [...marks, ...wordsIn(dimensions)])
       : []),
   ];
@@ -202,6 +205,10 @@ function dimensionLines(view: SheetView, { bay }: OverlayContent): readonly (rea
   return lines.filter((one) => one !== null);
 }
 
+/** The room that words and numbers take. */
 function wordsIn(inks: readonly Ink[]): readonly Box[] {
-  return inks.flatMap((ink) => (ink.kind === 'words' ? [wordsBox(ink)] : []));
+  return inks.flatMap((ink) => {
+    if (ink.kind === 'words') return [wordsBox(ink)];
+    return ink.kind === 'plaque' ? [boxAbout(ink.at, PLAQUE_HALF)] : [];
+  });
 }
