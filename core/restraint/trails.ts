@@ -1,16 +1,14 @@
 /** The way from a hold to a support, step by step, for the screen and the checker. */
-import { cross, distance, length, subtract } from '../geometry/vector.ts';
+import { cross, length, subtract } from '../geometry/vector.ts';
 import type { Bar, BarId, Layout } from '../layout/model.ts';
 import type { Arm, BayHolding, Holdings } from './heldNodes.ts';
 import type { TrailStep } from './model.ts';
 
-const LONGEST = 12;
-
-/** From a node down to a support. Ends in a step that is held, or free. */
+/** From a node down to a support. Ends in a step that is held, or free: every node on the way stands on nodes held before it. */
 export function trailFromNode(layout: Layout, holding: BayHolding, node: string): readonly TrailStep[] {
   const steps: TrailStep[] = [];
   let at = node;
-  for (let step = 0; step < LONGEST; step++) {
+  for (;;) {
     const label = labelOf(layout, at);
     const how = holding.held.get(at);
     if (!how) {
@@ -38,7 +36,6 @@ export function trailFromNode(layout: Layout, holding: BayHolding, node: string)
     });
     at = down.node;
   }
-  return steps;
 }
 
 function shorterArm(holding: BayHolding, by: readonly [Arm, Arm]): Arm {
@@ -133,6 +130,5 @@ export function lineHolding(layout: Layout, holdings: Holdings, bar: Bar): LineH
 function isOnLine(layout: Layout, bar: Bar, node: string): boolean {
   const at = layout.nodes.get(node)?.at;
   if (!at) return false;
-  const off = length(cross(subtract(at, bar.from), bar.direction));
-  return off <= ON_THE_LINE && distance(at, bar.from) > ON_THE_LINE / 2;
+  return length(cross(subtract(at, bar.from), bar.direction)) <= ON_THE_LINE;
 }
