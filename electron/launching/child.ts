@@ -9,7 +9,7 @@ export interface StartedProgram {
 
 export function startProgram(file: string, args: readonly string[], quiet: boolean): StartedProgram {
   const began = performance.now();
-  // A process group of its own, so that its helpers end with it.
+  // A process group of its own, so that what it starts in turn ends with it.
   const child = spawn(file, args, {
     stdio: quiet ? 'ignore' : 'inherit',
     detached: process.platform !== 'win32',

@@ -8,6 +8,7 @@ const text = [
   'npm run --silent tautline -- schedule a.json   # exit code 1: something is over',
   '$ npm run --silent tautline -- section 70x70x6 \\',
   '    --format json',
+  'npm run --silent tautline -- schedule b.json # ends with 2',
   '```',
   'npm run --silent tautline -- outside any block',
 ].join('\n');
@@ -17,6 +18,7 @@ describe('what a document says', () => {
     expect(documentedCommands('A.md', text)).toEqual([
       { line: 'npm run --silent tautline -- schedule a.json', where: 'A.md:4', exitCode: 1 },
       { line: 'npm run --silent tautline -- section 70x70x6 --format json', where: 'A.md:5', exitCode: 0 },
+      { line: 'npm run --silent tautline -- schedule b.json', where: 'A.md:7', exitCode: 2 },
     ]);
   });
 

@@ -5,7 +5,7 @@ export interface DocumentedCommand {
   readonly line: string;
   /** "README.md:41" */
   readonly where: string;
-  /** From a remark behind it that says "exit code 1" or "exits with 1"; 0 without one. */
+  /** From a remark behind it that says "exit code 1" or "ends with 1"; 0 without one. */
   readonly exitCode: number;
 }
 
@@ -33,7 +33,7 @@ function commandOf(text: string, where: string): DocumentedCommand {
   const at = text.search(/\s#(\s|$)/);
   const line = at < 0 ? text : text.slice(0, at).trim();
   const remark = at < 0 ? '' : text.slice(at);
-  const code = /\bexit(?:s(?: with)?)?(?: code)?:? (\d)\b/.exec(remark)?.[1];
+  const code = /\b(?:exits?|ends)(?: with)?(?: code)?:? (\d)\b/.exec(remark)?.[1];
   return { line, where, exitCode: Number(code ?? 0) };
 }
 
