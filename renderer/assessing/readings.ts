@@ -5,6 +5,7 @@ import { applyEdit } from '../../core/project/applyEdit.ts';
 import type { Join, JoinKind, Project } from '../../core/project/model.ts';
 import type { Claim } from '../../core/restraint/model.ts';
 import type { BarReading, HoldReading, JoinReading } from './assessApi.ts';
+import { isRefusedHold } from './refusedHold.ts';
 
 export function joinReadings(
   assessment: Assessment,
@@ -68,7 +69,11 @@ function barRead(assessment: Assessment, crossingId: CrossingId, bar: BarId): Ba
 }
 
 function holdRead(claims: readonly Claim[], direction: 'in plane' | 'out of plane' | 'twist'): HoldReading {
-  const made = claims.filter((claim) => claim.direction === direction);
+  // What a purlin holds along itself it holds in the plane.
+  const made = claims.filter(
+    (claim) =>
+      claim.direction === direction || (direction === 'in plane' && claim.direction === 'along holder'),
+  );
   if (made.some(({ counted }) => counted)) return 'held';
-  return made.length > 0 ? 'claimed' : 'nothing';
+  return made.some(isRefusedHold) ? 'claimed' : 'nothing';
 }

@@ -1,5 +1,6 @@
 import { Tooltip } from 'radix-ui';
 import type { JSX, ReactNode, Ref } from 'react';
+import { useOverlays } from './useOverlays.ts';
 
 interface IconButtonProps {
   readonly label: string;
@@ -22,6 +23,7 @@ export function IconButton({
   ref,
   onClick,
 }: IconButtonProps): JSX.Element {
+  const overlays = useOverlays();
   return (
     <Tooltip.Root>
       <Tooltip.Trigger asChild>
@@ -39,7 +41,7 @@ export function IconButton({
           {children}
         </button>
       </Tooltip.Trigger>
-      <Tooltip.Portal>
+      <Tooltip.Portal container={overlays}>
         <Tooltip.Content className="tip" sideOffset={4} collisionPadding={6}>
           {tip ?? label}
         </Tooltip.Content>

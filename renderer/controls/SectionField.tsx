@@ -7,6 +7,7 @@ import { StepSign } from '../glyphs/signs.tsx';
 import { shownSection } from './figures.ts';
 import { Row } from './Row.tsx';
 import { matchingSections } from './sectionMatch.ts';
+import { useOverlays } from './useOverlays.ts';
 
 interface SectionFieldProps {
   readonly label: string;
@@ -19,6 +20,7 @@ interface SectionFieldProps {
 
 /** An angle by its designation, with the stock list narrowing as one types. */
 export function SectionField(props: SectionFieldProps): JSX.Element {
+  const overlays = useOverlays();
   const { label, designation, choices, units, bare = false, onChange } = props;
   const id = useId();
   const listId = `${id}-list`;
@@ -33,7 +35,9 @@ export function SectionField(props: SectionFieldProps): JSX.Element {
   const present = choices.findIndex((choice) => choice.designation === designation);
 
   // biome-ignore lint/correctness/useExhaustiveDependencies: follows the active option as it moves.
-  useEffect(() => activeOption.current?.scrollIntoView({ block: 'nearest' }), [active, open]);
+  useEffect(() => {
+    activeOption.current?.scrollIntoView({ block: 'nearest' });
+  }, [active, open]);
 
   const unfold = (): void => {
     setOpen(true);
@@ -65,7 +69,10 @@ export function SectionField(props: SectionFieldProps): JSX.Element {
       case 'ArrowDown':
       case 'ArrowUp': {
         event.preventDefault();
-        if (!open) return unfold();
+        if (!open) {
+          unfold();
+          return;
+        }
         const step = event.key === 'ArrowDown' ? 1 : -1;
         setActive((now) => Math.min(offered.length - 1, Math.max(0, now + step)));
         return;
@@ -120,7 +127,7 @@ export function SectionField(props: SectionFieldProps): JSX.Element {
           </span>
         </div>
       </Popover.Anchor>
-      <Popover.Portal>
+      <Popover.Portal container={overlays}>
         <Popover.Content
           className="section-list"
           align="start"

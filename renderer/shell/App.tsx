@@ -7,6 +7,7 @@ import { useTheme } from '../theme/useTheme.ts';
 import { runHostCommand } from './commands/commands.ts';
 import { useShortcuts } from './keys/useShortcuts.ts';
 import { Layout } from './Layout.tsx';
+import { PartBoundary } from './PartBoundary.tsx';
 import { StatusBar } from './StatusBar.tsx';
 import { useServices, useWindow } from './services.tsx';
 import { TopBar } from './top/TopBar.tsx';
@@ -28,9 +29,12 @@ export function App(): JSX.Element {
         <TopBar />
         <main className="window-main">
           <Layout theme={theme} />
+          <div id="overlays" />
         </main>
         <StatusBar />
-        <DialogOutlet />
+        <PartBoundary part="the dialog">
+          <DialogOutlet />
+        </PartBoundary>
       </div>
     </Tooltip.Provider>
   );

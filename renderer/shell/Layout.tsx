@@ -6,12 +6,15 @@ import { Dock } from '../panels/dock/Dock.tsx';
 import { RecipePanel } from '../panels/recipe/RecipePanel.tsx';
 import type { Theme } from '../theme/themeSetting.ts';
 import { firstSizes } from './firstSizes.ts';
+import { PartBoundary } from './PartBoundary.tsx';
+import { useTablesHeight } from './useTablesHeight.ts';
 import { ViewPanel } from './view/ViewPanel.tsx';
 import './layout.css';
 
 /** Bays and recipe to the left, the bay in 3D in the middle, the card at full height to the right, the tables below. */
 export function Layout({ theme }: { readonly theme: Theme }): JSX.Element {
   const [sizes] = useState(() => firstSizes(window.innerWidth, window.innerHeight));
+  const tables = useTablesHeight(sizes.tables);
   return (
     <Group orientation="horizontal" className="docks">
       <Panel id="workspace" minSize={560} className="dock-panel">
@@ -27,26 +30,34 @@ export function Layout({ theme }: { readonly theme: Theme }): JSX.Element {
                 className="dock-panel"
               >
                 <aside className="left" data-region tabIndex={-1} aria-label="Bays and recipe">
-                  <BaysPanel />
-                  <RecipePanel />
+                  <PartBoundary part="the bays and the recipe">
+                    <BaysPanel />
+                    <RecipePanel />
+                  </PartBoundary>
                 </aside>
               </Panel>
               <Separator className="gutter upright" aria-label="Width of the bays" />
               <Panel id="view" minSize={320} className="dock-panel">
-                <ViewPanel theme={theme} />
+                <PartBoundary part="the view">
+                  <ViewPanel theme={theme} />
+                </PartBoundary>
               </Panel>
             </Group>
           </Panel>
           <Separator className="gutter level" aria-label="Height of the tables" />
           <Panel
             id="tables"
-            defaultSize={sizes.dock}
+            panelRef={tables.panel}
+            onResize={tables.onResize}
+            defaultSize={sizes.tables.schedule}
             minSize={104}
             maxSize="70%"
             groupResizeBehavior="preserve-pixel-size"
             className="dock-panel"
           >
-            <Dock />
+            <PartBoundary part="the tables">
+              <Dock />
+            </PartBoundary>
           </Panel>
         </Group>
       </Panel>
@@ -59,7 +70,9 @@ export function Layout({ theme }: { readonly theme: Theme }): JSX.Element {
         groupResizeBehavior="preserve-pixel-size"
         className="dock-panel"
       >
-        <CardPanel />
+        <PartBoundary part="the card">
+          <CardPanel />
+        </PartBoundary>
       </Panel>
     </Group>
   );

@@ -7,7 +7,7 @@ import { useActions, useWindow } from './services.tsx';
 export function StatusBar(): JSX.Element {
   const stock = useStockChoices();
   return (
-    <footer className="status" data-region tabIndex={-1} aria-label="Status">
+    <footer className="status" data-region tabIndex={-1}>
       <ChosenText />
       <TrialText />
       <AssessingText />

@@ -1,12 +1,19 @@
+import type { DockTab } from '../store/windowState.ts';
+
+export interface FirstSizes {
+  readonly left: number;
+  readonly card: number;
+  /** Height of the tables by what they show: the picture of the shortlist wants more than the schedule. */
+  readonly tables: Readonly<Record<DockTab, number>>;
+}
+
 /** The docks' sizes to begin with, px, by the window's. */
-export function firstSizes(
-  width: number,
-  height: number,
-): { readonly left: number; readonly card: number; readonly dock: number } {
+export function firstSizes(width: number, height: number): FirstSizes {
   const narrow = width < 1400;
+  const share = (part: number, most: number): number => Math.round(Math.min(most, height * part));
   return {
-    left: narrow ? 226 : 252,
+    left: narrow ? 240 : 252,
     card: narrow ? 380 : 424,
-    dock: Math.round(Math.min(300, Math.max(176, height * 0.255))),
+    tables: { schedule: share(0.255, 300), shortlist: share(0.36, 380), findings: share(0.34, 380) },
   };
 }

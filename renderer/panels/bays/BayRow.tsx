@@ -3,6 +3,7 @@ import type { JSX } from 'react';
 import type { BaySummary } from '../../../core/assessment.ts';
 import type { Bay } from '../../../core/project/model.ts';
 import { showSlenderness } from '../../../core/units/quantity.ts';
+import { useOverlays } from '../../controls/useOverlays.ts';
 import { NearnessChip } from '../../glyphs/NearnessChip.tsx';
 import { MoreSign } from '../../glyphs/signs.tsx';
 import { duplicateBay } from '../../shell/commands/bayCommands.ts';
@@ -70,6 +71,7 @@ function Worst({
 }
 
 function BayMenu({ bay }: { readonly bay: Bay }): JSX.Element {
+  const overlays = useOverlays();
   const services = useServices();
   const trying = useWindow((state) => state.trying !== null);
   return (
@@ -81,7 +83,7 @@ function BayMenu({ bay }: { readonly bay: Bay }): JSX.Element {
       >
         <MoreSign />
       </DropdownMenu.Trigger>
-      <DropdownMenu.Portal>
+      <DropdownMenu.Portal container={overlays}>
         <DropdownMenu.Content className="menu" align="start" sideOffset={3} collisionPadding={6}>
           <DropdownMenu.Item
             className="menu-item"

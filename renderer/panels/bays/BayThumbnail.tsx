@@ -145,6 +145,8 @@ function FreeStrokes(): JSX.Element {
   );
 }
 
+const MOST_LINES = 5;
+
 /** Where the purlins lie, as parts of the slopes laid end to end. */
 function linesOf(recipe: RoofRecipe): readonly number[] {
   const lengths = recipe.slopes.map(({ panels }) => panels.reduce((sum, { height }) => sum + height, 0));
@@ -155,7 +157,8 @@ function linesOf(recipe: RoofRecipe): readonly number[] {
     for (const { at } of slope.lines) found.push((before + at) / total);
     before += lengths[index] ?? 0;
   });
-  return [...new Set(found)];
+  // A small picture with many lines says less than one with none.
+  return found.length > MOST_LINES ? [] : [...new Set(found)];
 }
 
 function line([x1, y1]: Corner, [x2, y2]: Corner): string {

@@ -1,6 +1,7 @@
 import { DropdownMenu } from 'radix-ui';
 import type { JSX, KeyboardEvent } from 'react';
 import type { RecipeKind } from '../../../core/project/model.ts';
+import { useOverlays } from '../../controls/useOverlays.ts';
 import { PlusSign } from '../../glyphs/signs.tsx';
 import { addBay } from '../../shell/commands/bayCommands.ts';
 import { useServices, useWindow } from '../../shell/services.tsx';
@@ -35,6 +36,7 @@ export function BaysPanel(): JSX.Element {
 }
 
 function AddBay(): JSX.Element {
+  const overlays = useOverlays();
   const services = useServices();
   const trying = useWindow((state) => state.trying !== null);
   return (
@@ -47,7 +49,7 @@ function AddBay(): JSX.Element {
       >
         <PlusSign />
       </DropdownMenu.Trigger>
-      <DropdownMenu.Portal>
+      <DropdownMenu.Portal container={overlays}>
         <DropdownMenu.Content className="menu" align="end" sideOffset={3} collisionPadding={6}>
           {KINDS.map(({ kind, label }) => (
             <DropdownMenu.Item key={kind} className="menu-item" onSelect={() => addBay(services, kind)}>
@@ -66,7 +68,7 @@ function moveFocus(event: KeyboardEvent<HTMLUListElement>): void {
   const step = event.key === 'ArrowDown' ? 1 : event.key === 'ArrowUp' ? -1 : 0;
   if (step === 0) return;
   const rows = [...event.currentTarget.querySelectorAll<HTMLElement>('.bay-choose')];
-  const at = rows.findIndex((row) => row === document.activeElement);
+  const at = rows.indexOf(document.activeElement as HTMLElement);
   if (at < 0) return;
   event.preventDefault();
   const next = rows[Math.min(rows.length - 1, Math.max(0, at + step))];

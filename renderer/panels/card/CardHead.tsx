@@ -36,19 +36,29 @@ export function CardHead({ bar, angle, assessment, units }: CardHeadProps): JSX.
       <p className="second">
         {bay === undefined ? bar.bay : `${bay.id} ${bay.name}`}.{' '}
         {phrases.map((phrase, index) => (
-          <span key={phrase}>
-            {index > 0 && ', '}
-            {phrasesWas[index] !== phrase && (
-              <>
-                <s className="was">{phrasesWas[index]}</s>{' '}
-              </>
-            )}
-            {phrasesWas[index] === phrase ? phrase : <b className="now">{phrase}</b>}
-          </span>
+          <Phrase key={phrase} phrase={phrase} was={phrasesWas[index] ?? phrase} first={index === 0} />
         ))}
         .
       </p>
     </header>
+  );
+}
+
+interface PhraseProps {
+  readonly phrase: string;
+  readonly was: string;
+  readonly first: boolean;
+}
+
+/** One phrase of the placement; struck and in heavy type where the change on trial alters it. */
+function Phrase({ phrase, was, first }: PhraseProps): JSX.Element | null {
+  if (phrase === '' && was === '') return null;
+  return (
+    <>
+      {!first && ', '}
+      {was !== phrase && was !== '' && <s className="was">{was}</s>}{' '}
+      {was === phrase ? phrase : <b className="now">{phrase}</b>}
+    </>
   );
 }
 

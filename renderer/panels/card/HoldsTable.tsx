@@ -2,6 +2,7 @@ import type { JSX } from 'react';
 import type { Assessment } from '../../../core/assessment.ts';
 import { reasonText } from '../../../core/documents/words.ts';
 import type { Claim, Restraint, Station } from '../../../core/restraint/model.ts';
+import { isRefusedHold } from '../../assessing/refusedHold.ts';
 import { JoinGlyph } from '../../glyphs/JoinGlyph.tsx';
 import { LookSign, TickSign } from '../../glyphs/signs.tsx';
 import { useActions, useWindow } from '../../shell/services.tsx';
@@ -79,7 +80,7 @@ function HoldSign({ claims }: { readonly claims: readonly Claim[] }): JSX.Elemen
         <span className="unseen">held</span>
       </>
     );
-  if (claims.some(isClaimed))
+  if (claims.some(isRefusedHold))
     return (
       <span className="holds-claimed">
         <LookSign /> <s>claimed</s>
@@ -93,21 +94,9 @@ function HoldSign({ claims }: { readonly claims: readonly Claim[] }): JSX.Elemen
   );
 }
 
-/** A mark that means to hold here; one that never does (not joined, hung, a partner's bending) claims nothing. */
-function isClaimed({ reason }: Claim): boolean {
-  return (
-    reason.kind === 'line free along itself' ||
-    reason.kind === 'partner half free' ||
-    reason.kind === 'bar ends here, itself free'
-  );
-}
-
 /** The reason that decides: why something claimed does not count, else why it holds. */
 function whyText(station: Station): string {
   const claims = station.claims.filter(({ direction }) => direction !== 'twist');
-  const told =
-    claims.find((claim) => !claim.counted && isClaimed(claim)) ??
-    claims.find(({ counted }) => counted) ??
-    claims[0];
+  const told = claims.find(isRefusedHold) ?? claims.find(({ counted }) => counted) ?? claims[0];
   return told === undefined ? '' : reasonText(told.reason);
 }

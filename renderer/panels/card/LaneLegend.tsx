@@ -17,20 +17,20 @@ export function LaneLegend({
           <svg width="22" height="6" aria-hidden="true">
             <rect width="22" height="6" fill="var(--n5)" />
           </svg>
-          before
+          <span>before</span>
         </>
       )}
-      0
+      <span>0</span>
       <svg width="81" height="10" aria-hidden="true">
         {STEPS.map((step) => (
           <rect key={step} x={(step - 1) * 9} width="9" height="10" fill={nearnessFill(step)} />
         ))}
       </svg>
-      {limit}
+      <span>{limit}</span>
       <svg width="22" height="10" aria-hidden="true">
         <rect x=".5" y=".5" width="21" height="9" fill="url(#hatch-fine)" stroke="var(--over)" />
       </svg>
-      over
+      <span>over</span>
     </span>
   );
 }

@@ -4,6 +4,7 @@ import type { AngleBar, Bar } from '../../../core/layout/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
 import type { Restraint } from '../../../core/restraint/model.ts';
 import { showSlenderness } from '../../../core/units/quantity.ts';
+import { useFontsLoaded } from '../../controls/useFontsLoaded.ts';
 import { useSize } from '../../controls/useSize.ts';
 import { useWindow } from '../../shell/services.tsx';
 import { LaneHead } from './LaneHead.tsx';
@@ -34,6 +35,7 @@ export function Lanes({
   units,
 }: LanesProps): JSX.Element {
   const [ref, size] = useSize<HTMLDivElement>();
+  useFontsLoaded(); // Chips are as wide as their words, which are measured again once the typeface is there.
   const trying = useWindow((state) => state.trying !== null);
   const { limit } = diagonal.limit;
   const { governing } = restraint;

@@ -105,7 +105,7 @@ function FreeLegend({
             <path d="M0 5h18" stroke="var(--ink)" strokeWidth="2" />
             <path d="M2 4l2-4M6 4l2-4M10 4l2-4M14 4l2-4" stroke="var(--ink2)" strokeWidth=".8" />
           </svg>
-          held{where}
+          held{compass.heldBy === '' ? where : ` at ${compass.heldBy}`}
         </li>
       )}
     </>

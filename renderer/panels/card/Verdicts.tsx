@@ -20,7 +20,7 @@ export function Verdicts({ diagonal, before, practice }: VerdictsProps): JSX.Ele
         name="handling"
         verdict={handling}
         was={before?.handling ?? null}
-        says="as fabricated, over least r"
+        says="whole, over least r"
         diagonal={diagonal}
       />
       <VerdictBox
@@ -66,7 +66,9 @@ function VerdictBox({ name, verdict, was, says, diagonal }: VerdictBoxProps): JS
       <span className="verdict-line">
         {figureWas !== figure && <s className="was">{figureWas}</s>}
         <b>{figure}</b>
-        <span className="verdict-says">{says === '' ? `limit ${verdict.limit}` : says}</span>
+        {figureWas === figure && (
+          <span className="verdict-says">{says === '' ? `limit ${verdict.limit}` : says}</span>
+        )}
         {(verdict.asked || !verdict.ok) && (
           <span className="verdict-status">
             {verdict.asked ? <StatusGlyph status={status} /> : null}

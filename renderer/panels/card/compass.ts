@@ -8,6 +8,8 @@ export interface Compass {
   readonly free: 'every way' | Vec2 | 'no way';
   /** "at D1", "between i and D1", "over the whole bar". */
   readonly where: string;
+  /** The stations that hold there: "D1, P2". Empty where none does. */
+  readonly heldBy: string;
 }
 
 /** Of the chosen crossing's station, else of the length that governs. */
@@ -16,11 +18,16 @@ export function compassOf(restraint: Restraint, crossing: Crossing | null): Comp
     crossing === null
       ? undefined
       : restraint.stations.find(({ crossings }) => crossings.includes(crossing.id));
-  if (station !== undefined) return { free: freeAt(station), where: `at ${station.label}` };
+  if (station !== undefined)
+    return { free: freeAt(station), where: `at ${station.label}`, heldBy: station.label };
   const { governing, stations } = restraint;
   return {
     free: governing.freeDirection ?? 'every way',
     where: placeOf(governing.from, governing.to, stations),
+    heldBy: stations
+      .filter(({ at, held }) => held.ways > 0 && at > governing.from + SAME && at < governing.to - SAME)
+      .map(({ label }) => label)
+      .join(', '),
   };
 }
 

@@ -104,7 +104,10 @@ export function laneDrawing({ restraint, before, limit, width, flagText }: LaneI
       axis,
       radius: lane === null ? governing.radius : lane.radius,
       top,
-      pieces: lane === null ? [governingPiece(governing, along, limit)] : piecesOf(lane, along, limit),
+      pieces:
+        lane === null
+          ? [governingPiece(governing, along, limit)]
+          : piecesOf(lane, along, limit, claimedAt(lane, restraint, along)),
       cuts: lane === null ? [] : cutsOf(lane, restraint, along),
       chips: chips.map((chip) => ({ ...chip, y: many ? top - CHIP_DEEP - 1 : top + LANE_DEEP + below + 3 })),
       governs: governs(axis),
@@ -112,7 +115,7 @@ export function laneDrawing({ restraint, before, limit, width, flagText }: LaneI
       before:
         changed && wasLane !== null
           ? {
-              pieces: piecesOf(wasLane, along, limit),
+              pieces: piecesOf(wasLane, along, limit, []),
               slenderness: wasLane.slenderness,
               top: top + LANE_DEEP + 2,
             }
@@ -126,7 +129,19 @@ export function laneDrawing({ restraint, before, limit, width, flagText }: LaneI
     along,
     lanes,
     flag:
-      governingLane === null ? null : flagOf(governingLane, lanes, governing, along, right, many, flagText),
+      governingLane === null
+        ? null
+        : flagOf(
+            {
+              lane: governingLane,
+              lanes,
+              start: along(governing.from),
+              end: along(governing.to),
+              right,
+              many,
+            },
+            flagText,
+          ),
     outline:
       governingLane === null
         ? null
@@ -138,8 +153,12 @@ function differs(a: Lane, b: Lane): boolean {
   return Math.abs(a.slenderness - b.slenderness) > 0.5 || a.pieces.length !== b.pieces.length;
 }
 
-function piecesOf(lane: Lane, along: (at: number) => number, limit: number): readonly LanePiece[] {
-  const marks = lane.cuts.map(({ at }) => along(at));
+function piecesOf(
+  lane: Lane,
+  along: (at: number) => number,
+  limit: number,
+  marks: readonly number[],
+): readonly LanePiece[] {
   return lane.pieces.map(({ from, to }) => {
     // A length set by hand stands for the whole lane.
     const slenderness = lane.override === null ? (to - from) / lane.radius : lane.slenderness;
@@ -156,13 +175,17 @@ function piecesOf(lane: Lane, along: (at: number) => number, limit: number): rea
       right,
       slenderness,
       step: nearnessStep(slenderness / limit),
-      textAt:
-        gaps.length > 1 && gaps.length % 2 === 0 && widest * 2 > right - left - 2
-          ? (left + right) / 2
-          : (a + b) / 2,
+      textAt: (a + b) / 2,
       textRoom: b - a,
     };
   });
+}
+
+/** Where dashed ticks stand in a lane: holds that were claimed and do not count. */
+function claimedAt(lane: Lane, restraint: Restraint, along: (at: number) => number): readonly number[] {
+  return cutsOf(lane, restraint, along)
+    .filter(({ claimed }) => claimed)
+    .map(({ x }) => x);
 }
 
 function governingPiece(governing: Governing, along: (at: number) => number, limit: number): LanePiece {
@@ -225,27 +248,33 @@ function chipWidth(text: string, claimed: boolean): number {
   return condensedWidth(text, 11) + 12 + (claimed ? 14 : 0);
 }
 
-function flagOf(
-  lane: DrawnLane,
-  lanes: readonly DrawnLane[],
-  governing: Governing,
-  along: (at: number) => number,
-  right: number,
-  many: boolean,
-  text: string,
-): Flag {
-  const wide = condensedWidth(text, 12, 600) + 30;
+interface FlagPlace {
+  readonly lane: DrawnLane;
+  readonly lanes: readonly DrawnLane[];
+  readonly start: number;
+  readonly end: number;
+  readonly right: number;
+  readonly many: boolean;
+}
+
+/** Above the governing piece, at its right end unless a chip stands there; shortened where the whole does not fit. */
+function flagOf({ lane, lanes, start, end, right, many }: FlagPlace, text: string): Flag {
   const y = lane.top - FLAG_DEEP;
-  const start = Math.max(LANE_LEFT, along(governing.from));
-  const end = Math.min(right + 1, along(governing.to) + 1);
-  // At the right end of the governing piece unless a chip stands there.
   const near = lanes
     .flatMap((each) => each.chips)
     .filter((chip) => chip.y + CHIP_DEEP > y && chip.y < y + FLAG_DEEP);
-  const atRight = Math.max(LANE_LEFT, end - wide);
-  const clear = (x: number): boolean =>
+  const clear = (x: number, wide: number): boolean =>
     near.every((chip) => chip.x > x + wide + 2 || chip.x + chip.wide < x - 2);
-  if (!many && clear(atRight)) return { x: atRight, y, wide, text };
-  const atLeft = Math.min(start - 1, right - wide);
-  return { x: clear(atLeft) || many ? atLeft : atRight, y, wide, text };
+  for (const said of [text, SHORT_FLAG]) {
+    const wide = condensedWidth(said, 12, 600) + 28;
+    const atRight = Math.max(LANE_LEFT, Math.min(right + 1, end + 1) - wide);
+    const atLeft = Math.min(Math.max(LANE_LEFT, start) - 1, right - wide);
+    const places = many ? [atLeft, atRight] : [atRight, atLeft];
+    const x = places.find((place) => clear(place, wide));
+    if (x !== undefined) return { x, y, wide, text: said };
+  }
+  const wide = condensedWidth(SHORT_FLAG, 12, 600) + 28;
+  return { x: right + 1 - wide, y, wide, text: SHORT_FLAG };
 }
+
+const SHORT_FLAG = 'governs';

@@ -1,6 +1,7 @@
 /** What the chips on the lanes say: why a station cuts a lane, or why it does not. */
 import type { JoinKind } from '../../../core/project/model.ts';
 import type { Claim, LaneCut, Station } from '../../../core/restraint/model.ts';
+import { isRefusedHold } from '../../assessing/refusedHold.ts';
 
 const CUT_BY: Readonly<Record<JoinKind | 'end' | 'bar end', string>> = {
   none: 'not joined',
@@ -46,14 +47,6 @@ function refusedClaim({ claims }: Station): Claim | null {
 /** Reasons that belong to the whole join, whatever the direction. */
 function isWholeJoin({ reason }: Claim): boolean {
   return reason.kind === 'not joined' || reason.kind === 'hung';
-}
-
-function isRefusedHold({ reason }: Claim): boolean {
-  return (
-    reason.kind === 'line free along itself' ||
-    reason.kind === 'partner half free' ||
-    reason.kind === 'bar ends here, itself free'
-  );
 }
 
 function whyNot({ reason }: Claim): string | null {

@@ -63,7 +63,7 @@ export function CrossingPicture({
         <circle cx={MIDDLE} cy={MIDDLE} r={RADIUS} fill="none" stroke="var(--ink)" strokeWidth="1.3" />
       </svg>
       <div>
-        <b>Cut through the crossing</b>
+        <b>Cut through</b>
         <p className="second">true to scale, {bar.mark} in yellow, seen from its end i</p>
         <p className="second">{gapText(crossing, units)}</p>
         {crossing.clash && <p className="crossing-clash">They run into each other.</p>}

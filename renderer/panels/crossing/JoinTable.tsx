@@ -24,35 +24,29 @@ export function JoinTable(props: JoinTableProps): JSX.Element {
   const name = useId();
   const twist = (readings ?? []).some(({ bars }) => bars.some((bar) => bar.twist === 'held'));
   return (
-    <table className="joins" role="radiogroup" aria-label="Join">
-      <thead>
-        <tr role="presentation">
-          <th className="joins-name" role="presentation">
-            {crossing.join === null ? 'unmarked, taken as not joined' : 'join'}
-          </th>
-          <th role="presentation">in plane</th>
-          <th role="presentation">out of plane</th>
-          {twist && <th role="presentation">twist</th>}
-          <th role="presentation">{readMark} reads</th>
-        </tr>
-      </thead>
-      <tbody role="presentation">
-        {crossing.choices.map((kind) => {
-          const reading = readings?.find(({ join }) => join.kind === kind) ?? null;
-          return (
-            <JoinRow
-              key={kind}
-              {...props}
-              kind={kind}
-              group={name}
-              reading={reading}
-              bar={reading?.bars.find(({ bar }) => bar === readBar) ?? null}
-              twist={twist}
-            />
-          );
-        })}
-      </tbody>
-    </table>
+    <div className="joins" role="radiogroup" aria-label="Join" data-twist={twist || undefined}>
+      <div className="joins-head" aria-hidden="true">
+        <span>{crossing.join === null ? 'unmarked, taken as not joined' : 'join'}</span>
+        <span>in plane</span>
+        <span>out of plane</span>
+        {twist && <span>twist</span>}
+        <span>{readMark} reads</span>
+      </div>
+      {crossing.choices.map((kind) => {
+        const reading = readings?.find(({ join }) => join.kind === kind) ?? null;
+        return (
+          <JoinRow
+            key={kind}
+            {...props}
+            kind={kind}
+            group={name}
+            reading={reading}
+            bar={reading?.bars.find(({ bar }) => bar === readBar) ?? null}
+            twist={twist}
+          />
+        );
+      })}
+    </div>
   );
 }
 
@@ -64,56 +58,42 @@ interface JoinRowProps extends JoinTableProps {
   readonly twist: boolean;
 }
 
-function JoinRow({
-  kind,
-  group,
-  crossing,
-  reading,
-  bar,
-  readMark,
-  twist,
-  units,
-  onJoin,
-}: JoinRowProps): JSX.Element {
+function JoinRow(props: JoinRowProps): JSX.Element {
+  const { kind, group, crossing, reading, bar, readMark, twist, units, onJoin } = props;
   const id = useId();
-  const chosen = crossing.join?.kind === kind;
   const reads = bar?.slenderness == null ? null : showSlenderness(bar.slenderness, bar.limit);
+  const built = howBuilt(kind, crossing, units);
   return (
-    <tr data-chosen={chosen || undefined} role="presentation">
-      <td className="joins-name" role="presentation">
-        <input
-          id={id}
-          className="unseen"
-          type="radio"
-          name={group}
-          checked={chosen}
-          disabled={reading === null}
-          aria-label={JOIN_NAMES[kind]}
-          aria-describedby={`${id}-says`}
-          onChange={() => {
-            if (reading !== null) onJoin(reading.join);
-          }}
-        />
-        <label htmlFor={id}>
-          <JoinGlyph join={kind} />
-          <span>
-            {JOIN_NAMES[kind]}
-            <em>{howBuilt(kind, crossing, units)}</em>
-          </span>
-        </label>
-        <span id={`${id}-says`} className="unseen">
-          {bar === null
-            ? ''
-            : `${howBuilt(kind, crossing, units)}; in plane ${spoken(bar.inPlane)}, out of plane ${spoken(bar.outOfPlane)}; ${readMark} would read ${reads ?? 'nothing'}`}
-        </span>
-      </td>
-      <td role="presentation">{bar !== null && <HoldMark hold={bar.inPlane} />}</td>
-      <td role="presentation">{bar !== null && <HoldMark hold={bar.outOfPlane} />}</td>
-      {twist && <td role="presentation">{bar !== null && <HoldMark hold={bar.twist} />}</td>}
-      <td role="presentation" className="joins-reads" data-over={bar?.status === 'over' || undefined}>
+    <label className="join-row">
+      <input
+        className="unseen"
+        type="radio"
+        name={group}
+        checked={crossing.join?.kind === kind}
+        disabled={reading === null}
+        aria-label={JOIN_NAMES[kind]}
+        aria-describedby={id}
+        onChange={() => {
+          if (reading !== null) onJoin(reading.join);
+        }}
+      />
+      <JoinGlyph join={kind} />
+      <span className="join-name">
+        {JOIN_NAMES[kind]}
+        <em>{built}</em>
+      </span>
+      {bar === null ? <span /> : <HoldMark hold={bar.inPlane} />}
+      {bar === null ? <span /> : <HoldMark hold={bar.outOfPlane} />}
+      {twist && (bar === null ? <span /> : <HoldMark hold={bar.twist} />)}
+      <span className="joins-reads" data-over={bar?.status === 'over' || undefined}>
         {reads ?? '…'}
-      </td>
-    </tr>
+      </span>
+      <span id={id} className="unseen">
+        {bar === null
+          ? built
+          : `${built}; in plane ${spoken(bar.inPlane)}, out of plane ${spoken(bar.outOfPlane)}; ${readMark} would read ${reads ?? 'nothing'}`}
+      </span>
+    </label>
   );
 }
 

@@ -85,9 +85,7 @@ function Remedies({ finding }: { readonly finding: Finding }): JSX.Element {
     <div>
       {shown.map((remedy) => (
         <div key={remedy.id} className="finding-remedy">
-          <span title={remedy.detail}>
-            {remedy.label} <span className="second">{remedy.detail}</span>
-          </span>
+          <span title={`${remedy.label}: ${remedy.detail}`}>{remedy.label}</span>
           <EffectFigures effect={remedy.effect} finding={finding} />
           <TryButton
             name={remedy.label}

@@ -13,7 +13,7 @@ const ROW = 64;
 export function FindingsPanel({ bay }: { readonly bay: string | null }): JSX.Element {
   const assessment = useWindow(shownAssessment);
   const before = useWindow(beforeAssessment);
-  const scroller = useRef<HTMLDivElement>(null);
+  const scroller = useRef<HTMLElement>(null);
   const items = assessment === null ? [] : findingItems(assessment, before, bay);
   const virtual = useVirtualizer({
     count: items.length,
@@ -37,7 +37,7 @@ export function FindingsPanel({ bay }: { readonly bay: string | null }): JSX.Ele
       </p>
     );
   return (
-    <div ref={scroller} className="findings" role="group" aria-label="Findings" onKeyDown={moveAlong}>
+    <section ref={scroller} className="findings" aria-label="Findings" onKeyDown={moveAlong}>
       <div style={{ height: virtual.getTotalSize(), position: 'relative' }}>
         {virtual.getVirtualItems().map((row) => {
           const item = items[row.index];
@@ -71,12 +71,12 @@ export function FindingsPanel({ bay }: { readonly bay: string | null }): JSX.Ele
           );
         })}
       </div>
-    </div>
+    </section>
   );
 }
 
 /** Up and down go from finding to finding. */
-function moveAlong(event: KeyboardEvent<HTMLDivElement>): void {
+function moveAlong(event: KeyboardEvent<HTMLElement>): void {
   const step = event.key === 'ArrowDown' ? 1 : event.key === 'ArrowUp' ? -1 : 0;
   if (step === 0) return;
   const rows = [...event.currentTarget.querySelectorAll<HTMLElement>('.finding-words')];

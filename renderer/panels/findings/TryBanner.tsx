@@ -1,6 +1,7 @@
 import { type JSX, useEffect, useRef } from 'react';
 import type { Assessment, DiagonalAssessment } from '../../../core/assessment.ts';
 import { showSlenderness } from '../../../core/units/quantity.ts';
+import { Key } from '../../controls/Key.tsx';
 import { STATUS_WORDS, StatusGlyph } from '../../glyphs/StatusGlyph.tsx';
 import { ArrowSign } from '../../glyphs/signs.tsx';
 import { useActions, useWindow } from '../../shell/services.tsx';
@@ -33,17 +34,19 @@ function Banner({ trying }: { readonly trying: Trying }): JSX.Element {
         <span className="try-dot" aria-hidden="true" />
         Trying
       </span>
-      <b className="try-label">{trying.label}</b>
+      <b className="try-label" title={trying.label}>
+        {trying.label}
+      </b>
       {trying.where !== '' && <span className="second">{trying.where}</span>}
       <span className="try-figures" role="status">
         {before !== null && after !== null && <Figures trying={trying} before={before} after={after} />}
       </span>
       <span className="try-buttons">
         <button ref={keep} type="button" className="button main" onClick={actions.keepTrial}>
-          Keep <kbd aria-hidden="true">Enter</kbd>
+          Keep <Key>Enter</Key>
         </button>
         <button type="button" className="button" onClick={actions.putBackTrial}>
-          Put back <kbd aria-hidden="true">Esc</kbd>
+          Put back <Key>Esc</Key>
         </button>
       </span>
     </section>
@@ -70,7 +73,7 @@ function Figures({ trying, before, after }: FiguresProps): JSX.Element {
           <ArrowSign />
           <b>{figureOf(now)}</b>
           <StatusGlyph status={now.status} />
-          {STATUS_WORDS[now.status]}
+          <span className="try-status">{STATUS_WORDS[now.status]}</span>
         </span>
       )}
       <span>

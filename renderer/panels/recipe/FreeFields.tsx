@@ -47,7 +47,7 @@ function NodeTable({ bay, recipe, units }: FieldsProps): JSX.Element {
         <span />
       </div>
       {recipe.nodes.map((node) => (
-        <div key={node.id} className="free-node" role="group" aria-label={`Node ${node.id}`}>
+        <div key={node.id} className="free-node">
           <b>{node.id}</b>
           {COORDINATES.map((name, index) => (
             <LengthField
@@ -108,7 +108,7 @@ function BarTable({ bay, recipe }: FieldsProps): JSX.Element {
         <span />
       </div>
       {recipe.bars.map((bar) => (
-        <div key={bar.id} className="free-bar" role="group" aria-label={`Bar ${bar.id}`}>
+        <div key={bar.id} className="free-bar">
           <b>{bar.id}</b>
           <SelectField
             bare

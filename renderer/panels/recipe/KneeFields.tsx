@@ -66,7 +66,7 @@ export function KneeFields({ bay, recipe, units }: FieldsProps): JSX.Element {
 export function KneeMore({ bay, recipe, units }: FieldsProps): JSX.Element {
   const edit = useRecipeEdit<KneeRecipe>(bay);
   return (
-    <Fold title="Chord, purlins" aside="drawn, not checked">
+    <Fold title="Members" aside="drawn, not checked">
       <MemberFields
         word="Chord"
         member={recipe.chord}

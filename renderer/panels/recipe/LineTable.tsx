@@ -34,7 +34,7 @@ export function LineTable({ word, letter, lines, units, total, bay, onChange }: 
         </div>
       )}
       {lines.map((line) => (
-        <div key={line.id} className="line" role="group" aria-label={`${word} ${line.id}`}>
+        <div key={line.id} className="line">
           <b>{line.id}</b>
           <LengthField
             bare

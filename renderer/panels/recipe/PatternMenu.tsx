@@ -1,6 +1,7 @@
 import { DropdownMenu } from 'radix-ui';
 import type { JSX } from 'react';
 import { PATTERNS, type Pattern } from '../../../core/project/model.ts';
+import { useOverlays } from '../../controls/useOverlays.ts';
 import { PATTERN_WORDS, PatternGlyph } from '../../glyphs/PatternGlyph.tsx';
 
 interface PatternMenuProps {
@@ -14,6 +15,7 @@ interface PatternMenuProps {
 
 /** The pattern of one tier or panel behind a small button, beside its height. */
 export function PatternMenu({ of, pattern, onRemove, onChange }: PatternMenuProps): JSX.Element {
+  const overlays = useOverlays();
   return (
     <DropdownMenu.Root modal={false}>
       <DropdownMenu.Trigger
@@ -23,7 +25,7 @@ export function PatternMenu({ of, pattern, onRemove, onChange }: PatternMenuProp
       >
         <PatternGlyph pattern={pattern} />
       </DropdownMenu.Trigger>
-      <DropdownMenu.Portal>
+      <DropdownMenu.Portal container={overlays}>
         <DropdownMenu.Content className="menu" align="end" sideOffset={3} collisionPadding={6}>
           <DropdownMenu.RadioGroup
             value={pattern}

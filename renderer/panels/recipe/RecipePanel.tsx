@@ -26,13 +26,15 @@ export function RecipePanel(): JSX.Element | null {
         <h2>Recipe of {bay.id}</h2>
         <small>{counts}</small>
       </div>
-      {/* A new key for each bay, so that no field keeps what was typed for another. */}
-      <fieldset key={bay.id} className="recipe-fields" disabled={trying}>
-        <legend className="unseen">Recipe of {bay.id}</legend>
-        <KindFields bay={bay} units={units} />
-        <DiagonalFields bay={bay} units={units} />
-        <KindMore bay={bay} units={units} />
-      </fieldset>
+      {/* Still fields take no focus, so the part that scrolls takes it. A new key for each bay, so that no field keeps what was typed for another. */}
+      <div className="recipe-scroll" tabIndex={trying ? 0 : undefined}>
+        <fieldset key={bay.id} disabled={trying}>
+          <legend className="unseen">Recipe of {bay.id}</legend>
+          <KindFields bay={bay} units={units} />
+          <DiagonalFields bay={bay} units={units} />
+          <KindMore bay={bay} units={units} />
+        </fieldset>
+      </div>
     </section>
   );
 }

@@ -93,7 +93,7 @@ export function RoofFields({ bay, recipe, units }: FieldsProps): JSX.Element {
 export function RoofMore({ bay, recipe, units }: FieldsProps): JSX.Element {
   const edit = useRecipeEdit<RoofRecipe>(bay);
   return (
-    <Fold title="Rafters, struts, purlins" aside="drawn, not checked">
+    <Fold title="Members" aside="drawn, not checked">
       <div className="recipe-checks">
         <CheckField
           label="Strut along the eaves"

@@ -52,7 +52,7 @@ export function WallMore({ bay, recipe, units }: FieldsProps<WallRecipe>): JSX.E
           onChange={(lines, what) => edit({ ...recipe, lines }, what)}
         />
       </Fold>
-      <Fold title="Columns, beams, rails" aside="drawn, not checked">
+      <Fold title="Members" aside="drawn, not checked">
         <MemberFields
           word="Columns"
           member={recipe.columns}

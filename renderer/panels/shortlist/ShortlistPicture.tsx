@@ -6,6 +6,7 @@ import { unitNames } from '../../../core/units/unitSystem.ts';
 import { shownSection } from '../../controls/figures.ts';
 import { useSize } from '../../controls/useSize.ts';
 import { CandidateDot } from './CandidateDot.tsx';
+import { CandidateLabels } from './CandidateLabels.tsx';
 import { candidateKey, placementText } from './candidateKey.ts';
 import { type Chart, chartOf, isOnChart } from './chart.ts';
 
@@ -52,8 +53,6 @@ export function ShortlistPicture({ list, chosen, units, onChoose }: ShortlistPic
             const key = candidateKey(candidate);
             const [x, y] = chart.at(candidate);
             return (
-              // biome-ignore lint/a11y/useFocusableInteractive: the picture keeps the focus and tells the option by aria-activedescendant.
-              // biome-ignore lint/a11y/useKeyWithClickEvents: the picture takes the keys.
               <g
                 key={key}
                 id={`${listId}-${index}`}
@@ -74,9 +73,10 @@ export function ShortlistPicture({ list, chosen, units, onChoose }: ShortlistPic
               </g>
             );
           })}
-          <Labels
+          <CandidateLabels
             chart={chart}
             list={list}
+            dots={dots}
             chosen={chosen}
             hovered={dots.find((each) => candidateKey(each) === hovered) ?? null}
           />
@@ -143,69 +143,6 @@ function Sheet({ chart, list, units }: SheetProps): JSX.Element {
       <text className="chart-tick" transform={`translate(11 ${bottom}) rotate(-90)`}>
         governing slenderness
       </text>
-    </>
-  );
-}
-
-interface LabelsProps {
-  readonly chart: Chart;
-  readonly list: Shortlist;
-  readonly chosen: Candidate | null;
-  readonly hovered: Candidate | null;
-}
-
-/** Names beside the angle in place, the lightest that passes, the chosen one and the one pointed at; the last of these wins a place. */
-function Labels({ chart, list, chosen, hovered }: LabelsProps): JSX.Element {
-  const present = list.candidates.find(({ isPresent }) => isPresent) ?? null;
-  const wanted = [
-    { candidate: hovered, says: '' },
-    { candidate: chosen, says: '' },
-    { candidate: present, says: ' now' },
-    { candidate: list.first, says: ', lightest that passes' },
-  ];
-  const placed: {
-    readonly x: number;
-    readonly y: number;
-    readonly key: string;
-    readonly text: string;
-    readonly left: boolean;
-  }[] = [];
-  for (const { candidate, says } of wanted) {
-    if (candidate === null || !isOnChart(chart, candidate)) continue;
-    const key = candidateKey(candidate);
-    const [x, y] = chart.at(candidate);
-    const said =
-      key === (present === null ? '' : candidateKey(present))
-        ? ' now'
-        : key === (list.first === null ? '' : candidateKey(list.first))
-          ? ', lightest that passes'
-          : says;
-    if (
-      placed.some((other) => other.key === key || (Math.abs(other.y - y) < 14 && Math.abs(other.x - x) < 150))
-    )
-      continue;
-    const left = x > chart.right - 190;
-    placed.push({
-      key,
-      x: x + (left ? -11 : 11),
-      y: y < chart.top + 14 ? y + 14 : y - 8,
-      left,
-      text: `${shownSection(candidate.designation)}${said}: ${showSlenderness(candidate.slenderness, candidate.limit)}`,
-    });
-  }
-  return (
-    <>
-      {placed.map((label) => (
-        <text
-          key={label.key}
-          className="chart-strong halo"
-          x={label.x}
-          y={label.y}
-          textAnchor={label.left ? 'end' : 'start'}
-        >
-          {label.text}
-        </text>
-      ))}
     </>
   );
 }

@@ -51,6 +51,15 @@ export function ShortlistSide({
           ]}
           onChange={(placements) => onChange({ ...view, placements })}
         />
+        <Segmented
+          label="Bolts"
+          value={view.mustFit ? 'fit' : 'any'}
+          options={[
+            { value: 'fit', label: 'Must fit the leg' },
+            { value: 'any', label: 'Whatever' },
+          ]}
+          onChange={(bolts) => onChange({ ...view, mustFit: bolts === 'fit' })}
+        />
       </div>
       <table className="lightest" aria-label="Lightest five that pass">
         <thead>

@@ -20,7 +20,9 @@ export function ShortlistTable({ list, chosen, units, onChoose }: ShortlistTable
   const chosenRow = useRef<HTMLTableRowElement>(null);
   const key = chosen === null ? null : candidateKey(chosen);
   // biome-ignore lint/correctness/useExhaustiveDependencies: follows the chosen row as it moves.
-  useEffect(() => chosenRow.current?.scrollIntoView({ block: 'nearest' }), [key]);
+  useEffect(() => {
+    chosenRow.current?.scrollIntoView({ block: 'nearest' });
+  }, [key]);
   const move = (event: KeyboardEvent): void => {
     const step = event.key === 'ArrowDown' ? 1 : event.key === 'ArrowUp' ? -1 : 0;
     const next = list.candidates[list.candidates.findIndex((each) => candidateKey(each) === key) + step];
@@ -30,7 +32,7 @@ export function ShortlistTable({ list, chosen, units, onChoose }: ShortlistTable
   };
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: a part that scrolls must be reachable by keys, and the arrows choose in it.
-    <div className="shortlist-table" tabIndex={0} role="group" aria-label="Stock angles" onKeyDown={move}>
+    <section className="shortlist-table" tabIndex={0} aria-label="Stock angles" onKeyDown={move}>
       <table aria-label="Stock angles by mass">
         <thead>
           <tr>
@@ -50,7 +52,6 @@ export function ShortlistTable({ list, chosen, units, onChoose }: ShortlistTable
           {list.candidates.map((candidate) => {
             const each = candidateKey(candidate);
             return (
-              // biome-ignore lint/a11y/useKeyWithClickEvents: the table takes the keys.
               <tr
                 key={each}
                 ref={each === key ? chosenRow : undefined}
@@ -80,6 +81,6 @@ export function ShortlistTable({ list, chosen, units, onChoose }: ShortlistTable
           })}
         </tbody>
       </table>
-    </div>
+    </section>
   );
 }

@@ -30,7 +30,7 @@ export function chartOf(list: Shortlist, width: number, height: number, units: U
   const heaviest = Math.max(...list.candidates.map(massOf), 1);
   const massTop = Math.min(heaviest, anchor * 2.5);
   const massLow = Math.min(...list.candidates.map(massOf), anchor * 0.6) * 0.95;
-  const massStep = niceStep((massTop - massLow) / 6);
+  const massStep = niceStep((massTop - massLow) / 9);
   const x0 = Math.floor(massLow / massStep) * massStep;
   const x1 = Math.ceil(massTop / massStep) * massStep;
 
@@ -38,8 +38,8 @@ export function chartOf(list: Shortlist, width: number, height: number, units: U
     .filter((candidate) => massOf(candidate) <= x1)
     .map(({ slenderness }) => slenderness);
   const low = Math.min(...shown, list.limit * 0.8);
-  const high = Math.min(Math.max(...shown, list.limit * 1.3), list.limit * 2.2);
-  const slendernessStep = niceStep((high - low) / 4);
+  const high = Math.min(Math.max(...shown, list.limit * 1.2), list.limit * 1.75);
+  const slendernessStep = niceStep((high - low) / 5);
   const y0 = Math.max(0, Math.floor(low / slendernessStep) * slendernessStep);
   const y1 = Math.ceil(high / slendernessStep) * slendernessStep;
 
@@ -48,8 +48,7 @@ export function chartOf(list: Shortlist, width: number, height: number, units: U
   const top = MARGIN.top;
   const bottom = height - MARGIN.bottom;
   const x = (mass: number): number => left + ((mass - x0) / (x1 - x0)) * (right - left);
-  const y = (slenderness: number): number =>
-    Math.max(top, bottom - ((slenderness - y0) / (y1 - y0)) * (bottom - top));
+  const y = (slenderness: number): number => bottom - ((slenderness - y0) / (y1 - y0)) * (bottom - top);
   return {
     left,
     right,
@@ -65,8 +64,8 @@ export function chartOf(list: Shortlist, width: number, height: number, units: U
 
 /** Whether the candidate falls on the sheet. */
 export function isOnChart(chart: Chart, candidate: Candidate): boolean {
-  const [x] = chart.at(candidate);
-  return x >= chart.left - 1 && x <= chart.right + 1;
+  const [x, y] = chart.at(candidate);
+  return x >= chart.left - 1 && x <= chart.right + 1 && y >= chart.top - 1;
 }
 
 function niceStep(rough: number): number {

@@ -2,17 +2,29 @@
 import type { Assessment } from '../../../core/assessment.ts';
 import type { BarId } from '../../../core/layout/model.ts';
 import type { Edit } from '../../../core/project/edit.ts';
-import type { Candidate } from '../../../core/shortlist/model.ts';
+import type { Candidate, Shortlist } from '../../../core/shortlist/model.ts';
 
 export type Scope = 'bar' | 'pair' | 'bay' | 'all';
 
 export interface ShortlistView {
   readonly scope: Scope;
   readonly placements: 'as placed' | 'both';
+  /** Leave out angles whose leg does not take the bolts. */
+  readonly mustFit: boolean;
   readonly asTable: boolean;
 }
 
-export const FIRST_SHORTLIST_VIEW: ShortlistView = { scope: 'pair', placements: 'both', asTable: false };
+export const FIRST_SHORTLIST_VIEW: ShortlistView = {
+  scope: 'pair',
+  placements: 'both',
+  mustFit: true,
+  asTable: false,
+};
+
+/** The candidates that are looked at; the one in place stays whatever it is. */
+export function seenCandidates({ candidates }: Shortlist, { mustFit }: ShortlistView): readonly Candidate[] {
+  return mustFit ? candidates.filter(({ fit, isPresent }) => fit === null || isPresent) : candidates;
+}
 
 /** The bars that must share a size. */
 export function barsInScope(scope: Scope, bar: BarId, assessment: Assessment): readonly BarId[] {

@@ -1,5 +1,7 @@
 import { Popover } from 'radix-ui';
 import { type JSX, type KeyboardEvent, useEffect, useId, useRef, useState } from 'react';
+import { Key } from '../../controls/Key.tsx';
+import { useOverlays } from '../../controls/useOverlays.ts';
 import { FindSign } from '../../glyphs/signs.tsx';
 import { useServices } from '../services.tsx';
 import { type Findable, found } from './findables.ts';
@@ -7,6 +9,7 @@ import './find.css';
 
 /** Finds a bar, bay, crossing, finding or command by a few letters of its name. */
 export function FindBox(): JSX.Element {
+  const overlays = useOverlays();
   const services = useServices();
   const listId = useId();
   const input = useRef<HTMLInputElement>(null);
@@ -17,7 +20,9 @@ export function FindBox(): JSX.Element {
   const offered = open ? found(typed, services.store.getState()) : [];
 
   // biome-ignore lint/correctness/useExhaustiveDependencies: follows the active option as it moves.
-  useEffect(() => activeOption.current?.scrollIntoView({ block: 'nearest' }), [active]);
+  useEffect(() => {
+    activeOption.current?.scrollIntoView({ block: 'nearest' });
+  }, [active]);
 
   const finish = (): void => {
     setOpen(false);
@@ -80,10 +85,10 @@ export function FindBox(): JSX.Element {
             onBlur={finish}
             onKeyDown={onKeyDown}
           />
-          <kbd aria-hidden="true">Ctrl K</kbd>
+          <Key>Ctrl K</Key>
         </div>
       </Popover.Anchor>
-      <Popover.Portal>
+      <Popover.Portal container={overlays}>
         <Popover.Content
           className="find-list"
           align="start"

@@ -7,7 +7,7 @@ import type { WindowState } from '../../store/windowState.ts';
 import { shortcutText } from '../commands/command.ts';
 import { COMMANDS, runCommand } from '../commands/commands.ts';
 import type { Services } from '../services.tsx';
-import { fit } from './fuzzy.ts';
+import { scoreOf } from './fuzzy.ts';
 
 export type FindableKind = 'Diagonals' | 'Bays' | 'Crossings' | 'Findings' | 'Commands';
 
@@ -28,7 +28,7 @@ export function found(typed: string, state: WindowState): readonly Findable[] {
   const all = [...inProject(shownAssessment(state)), ...commands(state)];
   if (typed.trim() === '') return all.filter(({ kind }) => kind === 'Commands').slice(0, 12);
   const fitting = all.flatMap((findable) => {
-    const score = fit(typed, `${findable.label} ${findable.aside}`);
+    const score = scoreOf(typed, `${findable.label} ${findable.aside}`);
     return score === null ? [] : [{ findable, score }];
   });
   const byKind = KINDS.map((kind) =>

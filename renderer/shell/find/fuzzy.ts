@@ -2,7 +2,7 @@
  * How well what was typed fits a text: every word of it must occur, as a beginning, inside, or letter by letter in order.
  * Higher is better; null when it does not fit. Made for short names, not for prose.
  */
-export function fit(typed: string, text: string): number | null {
+export function scoreOf(typed: string, text: string): number | null {
   const words = plain(typed)
     .split(' ')
     .filter((word) => word !== '');

@@ -15,7 +15,10 @@ export function useShortcuts(): void {
         toNextRegion(event.shiftKey ? -1 : 1);
         return;
       }
-      if (event.key === 'Escape') return goBack(event);
+      if (event.key === 'Escape') {
+        goBack(event);
+        return;
+      }
       if (event.key === 'Enter' && services.store.getState().trying !== null && isIdle(event.target)) {
         event.preventDefault();
         services.actions.keepTrial();

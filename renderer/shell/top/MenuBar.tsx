@@ -1,5 +1,6 @@
 import { Menubar } from 'radix-ui';
 import { type JSX, useState } from 'react';
+import { useOverlays } from '../../controls/useOverlays.ts';
 import { TickSign } from '../../glyphs/signs.tsx';
 import type { RecentFile } from '../../host/host.ts';
 import { type Command, MENUS, type MenuName, shortcutText } from '../commands/command.ts';
@@ -8,12 +9,13 @@ import { useServices, useWindow } from '../services.tsx';
 import './menus.css';
 
 export function MenuBar(): JSX.Element {
+  const overlays = useOverlays();
   return (
     <Menubar.Root className="menu-bar" aria-label="Menus">
       {MENUS.map((menu) => (
         <Menubar.Menu key={menu}>
           <Menubar.Trigger className="menu-trigger">{menu}</Menubar.Trigger>
-          <Menubar.Portal>
+          <Menubar.Portal container={overlays}>
             <Menubar.Content className="menu" align="start" sideOffset={3} collisionPadding={6}>
               <MenuItems menu={menu} />
             </Menubar.Content>
@@ -70,6 +72,7 @@ function MenuEntry({ command, ruled }: { readonly command: Command; readonly rul
 }
 
 function RecentFiles(): JSX.Element {
+  const overlays = useOverlays();
   const { host, documents } = useServices();
   const [files, setFiles] = useState<readonly RecentFile[] | null>(null);
   const onOpenChange = (open: boolean): void => {
@@ -84,7 +87,7 @@ function RecentFiles(): JSX.Element {
           ›
         </span>
       </Menubar.SubTrigger>
-      <Menubar.Portal>
+      <Menubar.Portal container={overlays}>
         <Menubar.SubContent className="menu" sideOffset={2} collisionPadding={6}>
           {(files ?? []).map((file) => (
             <Menubar.Item

@@ -13,7 +13,7 @@ import './top.css';
 
 export function TopBar(): JSX.Element {
   return (
-    <header className="top" data-region tabIndex={-1} aria-label="Top bar">
+    <header className="top" data-region tabIndex={-1}>
       <h1 className="brand">
         <TautlineMark />
         Tautline

@@ -1,4 +1,5 @@
 import type { JSX } from 'react';
+import { Key } from '../../controls/Key.tsx';
 import { Segmented } from '../../controls/Segmented.tsx';
 import { shownAssessment } from '../../store/shown.ts';
 import type { ViewName } from '../../store/windowState.ts';
@@ -57,7 +58,7 @@ export function ViewBar(): JSX.Element {
           onClick={() => actions.setView({ bow: !view.bow })}
         >
           <span className="toggle-box" aria-hidden="true" />
-          Bow{mark === null ? '' : ` ${mark}`} <kbd aria-hidden="true">B</kbd>
+          Bow{mark === null ? '' : ` ${mark}`} <Key>B</Key>
         </button>
         <button
           type="button"
@@ -67,7 +68,7 @@ export function ViewBar(): JSX.Element {
           onClick={() => actions.setView({ trail: !view.trail })}
         >
           <span className="toggle-box" aria-hidden="true" />
-          Trail <kbd aria-hidden="true">T</kbd>
+          Trail <Key>T</Key>
         </button>
       </div>
     </div>
