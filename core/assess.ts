@@ -1,4 +1,7 @@
 import type { Assessment, BaySummary, DiagonalAssessment } from './assessment.ts';
+import { bayBowings } from './bowing/bowings.ts';
+import { type InServiceReading, inServiceSlenderness } from './bowing/exactSlenderness.ts';
+import type { NamedMechanism } from './bowing/model.ts';
 import type { Catalogues } from './catalogue/model.ts';
 import { stockOf } from './catalogue/stock.ts';
 import { governingSentence } from './documents/governingSentence.ts';
@@ -14,6 +17,9 @@ import { practiceFor } from './practice/practices.ts';
 import type { Pattern, Project } from './project/model.ts';
 import { type RestraintContext, restraintContext, restraintOf } from './restraint/restraint.ts';
 
+/** By the marks alone, or with stiffness and critical loads beside them. */
+export type AssessmentDepth = 'by the marks' | 'all levels';
+
 /** From this share of the limit on, a bar is near it. */
 const NEAR = 0.85;
 
@@ -21,13 +27,21 @@ const NEAR = 0.85;
  * The one road from a project to everything that is derived from it: layout, what holds each bar, verdicts, findings, schedule.
  * Pure and deterministic; the same project and catalogues give the same assessment.
  */
-export function assess(project: Project, catalogues: Catalogues): Assessment {
+export function assess(
+  project: Project,
+  catalogues: Catalogues,
+  depth: AssessmentDepth = 'all levels',
+): Assessment {
   const practice = practiceFor(project.settings.practice);
   const stock = stockOf(project.settings.catalogue, project.ownStock, catalogues);
   const layout = layOut(project, stock);
   const context = restraintContext(layout);
-  const judged = judgedDiagonals(project, practice, layout, context);
-  const findings = findingsOf({ project, practice, layout, diagonals: judged });
+  const byMarks = judgedDiagonals(project, practice, layout, context);
+  const { judged, movable } =
+    depth === 'all levels'
+      ? withBowing(project, practice, layout, context, byMarks)
+      : { judged: byMarks, movable: new Map<string, readonly NamedMechanism[]>() };
+  const findings = findingsOf({ project, practice, layout, diagonals: judged, movable });
   const findingIds = idsByBar(findings);
   const diagonals = new Map(
     [...judged].map(([id, each]) => [id, assessed(each, layout, project, findingIds.get(id) ?? [])] as const),
@@ -62,6 +76,36 @@ function judgedDiagonals(
   return judged;
 }
 
+/** Levels 2 and 3, bay by bay. */
+function withBowing(
+  project: Project,
+  practice: Practice,
+  layout: Layout,
+  context: RestraintContext,
+  byMarks: ReadonlyMap<BarId, Judged>,
+): {
+  readonly judged: ReadonlyMap<BarId, Judged>;
+  readonly movable: ReadonlyMap<string, readonly NamedMechanism[]>;
+} {
+  const restraints = new Map(
+    [...byMarks].flatMap(([id, { restraint }]) => (restraint ? [[id, restraint] as const] : [])),
+  );
+  const input = { layout, context, restraints, steel: practice.steel };
+  const judged = new Map(byMarks);
+  const movable = new Map<string, readonly NamedMechanism[]>();
+  layout.bays.forEach((bay, index) => {
+    const source = project.bays[index];
+    if (!source) return;
+    const found = bayBowings(input, bay, source);
+    if (found.movable.length > 0) movable.set(bay.id, found.movable);
+    for (const [id, bowing] of found.bowings) {
+      const known = judged.get(id);
+      if (known) judged.set(id, { ...known, bowing });
+    }
+  });
+  return { judged, movable };
+}
+
 function addJudged(
   judged: Map<BarId, Judged>,
   bar: Bar,
@@ -74,18 +118,11 @@ function addJudged(
   const limit = limitInForce(practice, project.settings, angle.spec.countedOn);
   const steel = angle.cut.total > 0;
   const restraint = steel ? restraintOf(context, bar, project.settings.lengthBasis) : null;
-  const verdict = (
-    reading: Practice['asks'],
-    length: number,
-    radius: number,
-    slenderness: number,
-  ): Verdict => ({
-    slenderness,
-    length,
-    radius,
+  const verdict = (asks: Practice['asks'], reading: InServiceReading): Verdict => ({
+    ...reading,
     limit: limit.limit,
-    ok: slenderness <= limit.limit,
-    asked: practice.asks === reading,
+    ok: reading.slenderness <= limit.limit,
+    asked: practice.asks === asks,
   });
   const piece = angle.cut.pieces.reduce((most, each) => Math.max(most, each.to - each.from), 0);
   const least = angle.stock?.properties.rv ?? null;
@@ -94,15 +131,15 @@ function addJudged(
     angle,
     restraint,
     limit,
-    handling: restraint && least ? verdict('handling', piece, least, piece / least) : null,
-    inService: restraint
-      ? verdict(
-          'inService',
-          restraint.governing.length,
-          restraint.governing.radius,
-          restraint.governing.slenderness,
-        )
-      : null,
+    handling:
+      restraint && least
+        ? verdict('handling', { slenderness: piece / least, length: piece, radius: least, bound: null })
+        : null,
+    inService:
+      restraint && angle.stock
+        ? verdict('inService', inServiceSlenderness(angle.stock.properties, restraint))
+        : null,
+    bowing: null,
   });
 }
 
@@ -121,6 +158,7 @@ function assessed(
     limit,
     handling,
     inService,
+    bowing: judged.bowing,
     nearness,
     status: nearness === null ? 'unknown' : nearness > 1 ? 'over' : nearness >= NEAR ? 'near' : 'within',
     reason: restraint

@@ -1,3 +1,4 @@
+import type { Bowing } from './bowing/model.ts';
 import type { ScheduleRow } from './documents/model.ts';
 import type { Finding, Severity } from './findings/model.ts';
 import type { BarId, Layout } from './layout/model.ts';
@@ -27,6 +28,8 @@ export interface DiagonalAssessment {
   readonly limit: LimitInForce;
   readonly handling: Verdict | null;
   readonly inService: Verdict | null;
+  /** By stiffness and by critical load; null where not asked for or not assessed. */
+  readonly bowing: Bowing | null;
   /** 0…: worst asked slenderness over limit. */
   readonly nearness: number | null;
   readonly status: 'over' | 'near' | 'within' | 'unknown';

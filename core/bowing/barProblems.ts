@@ -24,7 +24,10 @@ export interface BowingBar {
 }
 
 /** The bar between its end stations, without holds. */
-export function bareBar({ section, restraint }: BowingBar, steel: Steel): BarProblem {
+export function bareBar(
+  { section, restraint }: Pick<BowingBar, 'section' | 'restraint'>,
+  steel: Pick<Steel, 'E'>,
+): BarProblem {
   const length = lengthOf(restraint);
   return {
     E: steel.E,
@@ -52,7 +55,7 @@ export function innerStations(
 }
 
 /** Counted holds as rigid. */
-export function rigidHolds({ restraint }: BowingBar): readonly Hold[] {
+export function rigidHolds({ restraint }: Pick<BowingBar, 'restraint'>): readonly Hold[] {
   return innerStations(restraint).flatMap(({ station, at }): Hold[] => {
     switch (station.held.ways) {
       case 0:

@@ -1,4 +1,4 @@
-import type { BarId, Crossing } from '../layout/model.ts';
+import type { Crossing } from '../layout/model.ts';
 import { criticalLoad } from '../stability/criticalLoad.ts';
 import { type PairProblem, pairCriticalLoad } from '../stability/pair.ts';
 import {
@@ -44,7 +44,7 @@ export function bowingOf(bar: BowingBar, partner: Partner | null, steel: Steel):
     real: criticalOf(bowing * (twist.governs ? twist.ratio : 1), bar.section, steel.E),
     ruleError: slenderness > 0 ? (byRule / rigidLoad - 1) * 100 : 0,
     twist,
-    partner: partner ? stateOf(bar.bar.id, partner) : null,
+    partner: partner ? stateOf(bar, partner, steel) : null,
     unsupported: null,
   };
 }
@@ -75,13 +75,16 @@ export function pairProblem(bar: BowingBar, partner: Partner, steel: Steel): Pai
   };
 }
 
-function stateOf(bar: BarId, { bar: other, crossing, tensionShare }: Partner): PartnerState {
+function stateOf(bar: BowingBar, partner: Partner, steel: Steel): PartnerState {
+  const { bar: other, crossing, tensionShare } = partner;
   const cutBar = crossing.join?.kind === 'cut' ? crossing.join.cutBar : null;
-  const own = bar.slice(bar.indexOf('/') + 1);
+  const slack =
+    tensionShare > 0 ? pairCriticalLoad(pairProblem(bar, { ...partner, tensionShare: 0 }, steel)).N : null;
   return {
     bar: other.bar.id,
     crossing: crossing.id,
     tensionShare,
-    cut: cutBar === null ? 'neither' : cutBar === own ? 'this bar' : 'partner',
+    cut: cutBar === null ? 'neither' : cutBar === bar.bar.key ? 'this bar' : 'partner',
+    slackLoad: slack,
   };
 }

@@ -8,13 +8,19 @@ import type { Restraint } from '../restraint/model.ts';
 import type { RestraintContext } from '../restraint/restraint.ts';
 import type { BowingBar, Steel } from './barProblems.ts';
 import { bowingOf, type Partner } from './bowing.ts';
-import type { Bowing } from './model.ts';
+import { namedMechanism } from './mechanismNames.ts';
+import type { Bowing, NamedMechanism } from './model.ts';
 
 export interface BowingInput {
   readonly layout: Layout;
   readonly context: RestraintContext;
   readonly restraints: ReadonlyMap<BarId, Restraint>;
   readonly steel: Steel;
+}
+
+export interface BayBowings {
+  readonly bowings: ReadonlyMap<BarId, Bowing>;
+  readonly movable: readonly NamedMechanism[];
 }
 
 /** One bay's frame with the bars that bow in it. */
@@ -26,9 +32,9 @@ export interface BayBowing {
 }
 
 /** Levels 2 and 3 for every diagonal of a bay. Where the frame is a mechanism, what it offers is left out and the bars say why. */
-export function bayBowings(input: BowingInput, layout: BayLayout, bay: Bay): ReadonlyMap<BarId, Bowing> {
+export function bayBowings(input: BowingInput, layout: BayLayout, bay: Bay): BayBowings {
   const prepared = bayBowing(input, layout, bay);
-  return new Map(
+  const bowings = new Map(
     [...prepared.bars.values()].map((bar) => {
       const bowing = bowingOf(bar, prepared.partners.get(bar.bar.id) ?? null, input.steel);
       const moving = prepared.mechanisms.some(({ bars }) => bars.includes(bar.bar.id));
@@ -38,6 +44,10 @@ export function bayBowings(input: BowingInput, layout: BayLayout, bay: Bay): Rea
       return [bar.bar.id, { ...bowing, unsupported }] as const;
     }),
   );
+  return {
+    bowings,
+    movable: prepared.mechanisms.map((mechanism) => namedMechanism(prepared.solver.frame, layout, mechanism)),
+  };
 }
 
 export function bayBowing(input: BowingInput, layout: BayLayout, bay: Bay): BayBowing {

@@ -59,4 +59,13 @@ export interface PartnerState {
   /** Tension in the partner over compression in the bar. */
   readonly tensionShare: number;
   readonly cut: 'neither' | 'this bar' | 'partner';
+  /** Critical load with the partner slack, N; null where the partner is not counted on as taut. */
+  readonly slackLoad: number | null;
+}
+
+/** A way in which a bay can move without resistance, by name. */
+export interface NamedMechanism {
+  /** "left head of tier 1 to the right": the places that move most, and which way. */
+  readonly says: string;
+  readonly bars: readonly BarId[];
 }

@@ -1,4 +1,5 @@
 import { barFindings } from './bars.ts';
+import { bowingFindings } from './bowing.ts';
 import { crossingFindings } from './crossings.ts';
 import { holderFindings } from './holders.ts';
 import type { Finding, Severity } from './model.ts';
@@ -18,5 +19,6 @@ export function findingsOf(subject: FindingSubject): readonly Finding[] {
     ...crossingFindings(subject),
     ...holderFindings(subject),
     ...patternFindings(subject),
+    ...bowingFindings(subject),
   ].sort((a, b) => RANK[a.severity] - RANK[b.severity] || place(a) - place(b));
 }

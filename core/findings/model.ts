@@ -13,7 +13,13 @@ export type FindingKind =
   | 'override in force'
   | 'section unknown'
   | 'no length left'
-  | 'packer differs';
+  | 'packer differs'
+  | 'bay can move'
+  | 'hold weaker than claimed'
+  | 'rule unsafe here'
+  | 'twist governs'
+  | 'both diagonals squeezed'
+  | 'loses support when the partner goes slack';
 
 export type Severity = 'must fix' | 'look into' | 'note';
 

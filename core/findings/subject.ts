@@ -1,3 +1,4 @@
+import type { Bowing, NamedMechanism } from '../bowing/model.ts';
 import type { AngleBar, Bar, BarId, BayLayout, Layout } from '../layout/model.ts';
 import type { LimitInForce, Practice, Verdict } from '../practice/model.ts';
 import type { Project } from '../project/model.ts';
@@ -11,6 +12,8 @@ export interface Judged {
   readonly limit: LimitInForce;
   readonly handling: Verdict | null;
   readonly inService: Verdict | null;
+  /** Levels 2 and 3; null where they were not asked for or the bar is not assessed. */
+  readonly bowing: Bowing | null;
 }
 
 /** What findings are made from. */
@@ -19,6 +22,8 @@ export interface FindingSubject {
   readonly practice: Practice;
   readonly layout: Layout;
   readonly diagonals: ReadonlyMap<BarId, Judged>;
+  /** Ways in which a bay can move without resistance, by bay. */
+  readonly movable: ReadonlyMap<string, readonly NamedMechanism[]>;
 }
 
 export function judgedIn(subject: FindingSubject, bay: BayLayout): readonly Judged[] {

@@ -63,9 +63,11 @@ class BayFrameBuilder {
   }
 
   frame(): Frame {
+    // A bar of an unknown section is not there to be joined.
+    const there = (id: BarId): boolean => isBuilt(this.#layout.bars.get(id));
     const crossings = this.#bay.crossings
       .flatMap((id) => this.#layout.crossings.get(id) ?? [])
-      .filter(isJoined);
+      .filter((crossing) => isJoined(crossing) && there(crossing.a) && there(crossing.b));
     const joined = new Set(crossings.flatMap(({ a, b }) => [a, b]));
     const bars = this.#bay.bars
       .flatMap((id) => this.#layout.bars.get(id) ?? [])
@@ -349,7 +351,8 @@ function squared(direction: Vec3, bar: Vec3): Vec3 | null {
   return Math.hypot(...rest) > 1e-6 ? unit(rest) : null;
 }
 
-const isBuilt = (bar: Bar): boolean => (bar.angle ? bar.angle.stock !== null : bar.member !== null);
+const isBuilt = (bar: Bar | undefined): boolean =>
+  bar?.angle ? bar.angle.stock !== null : (bar?.member ?? null) !== null;
 
 function isJoined({ join }: Crossing): boolean {
   return join !== null && join.kind !== 'none' && join.kind !== 'hung';

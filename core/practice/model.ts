@@ -47,6 +47,8 @@ export interface Verdict {
   readonly radius: number;
   readonly limit: number;
   readonly ok: boolean;
+  /** In service, for a bar with mixed holds: the rule's bound, while `slenderness` is the exact one. Null otherwise. */
+  readonly bound: number | null;
   /** Whether the practice asks for this one. */
   readonly asked: boolean;
 }

@@ -63,6 +63,15 @@ export function proposalsFor(
       return nearestSections(assessment, finding);
     case 'packer differs':
       return packTheGap(finding);
+    case 'bay can move':
+      return crossOpenPanels(assessment, finding);
+    case 'hold weaker than claimed':
+      return weldTheCrossing(finding);
+    case 'rule unsafe here':
+    case 'twist governs':
+      return [...turnTheLeg(assessment, finding.bars), ...otherSections(assessment, finding, catalogues)];
+    case 'both diagonals squeezed':
+    case 'loses support when the partner goes slack':
     case 'steep or flat':
     case 'no length left':
       return [];
@@ -427,6 +436,18 @@ function crossOpenPanels(assessment: Assessment, finding: Finding): readonly Pro
       'crossed, so that what stands on it is held',
     ),
   ];
+}
+
+function weldTheCrossing(finding: Finding): readonly Proposal[] {
+  return finding.crossing
+    ? [
+        {
+          label: 'Weld the crossing',
+          detail: 'ties the turns of both bars too',
+          edits: [{ kind: 'join', crossings: [finding.crossing], join: { kind: 'welded' } }],
+        },
+      ]
+    : [];
 }
 
 function packTheGap(finding: Finding): readonly Proposal[] {

@@ -1,3 +1,4 @@
+import { type InServiceReading, inServiceSlenderness } from '../bowing/exactSlenderness.ts';
 import type { Catalogues, Stock, StockAngle } from '../catalogue/model.ts';
 import { stockOf } from '../catalogue/stock.ts';
 import type { AngleBar, Bar, BarId, Layout, Placement } from '../layout/model.ts';
@@ -96,6 +97,7 @@ function legsToTry(angle: StockAngle, seats: readonly Seat[], options: Shortlist
 interface Reading {
   readonly seat: Seat;
   readonly restraint: Restraint;
+  readonly inService: InServiceReading;
   readonly handling: number;
   /** Asked slenderness over limit. */
   readonly share: number;
@@ -105,12 +107,13 @@ function candidateOf(asks: Asks, seats: readonly Seat[], angle: StockAngle, leg:
   const readings = seats.map((seat): Reading => {
     const restraint = restraintWith(seat.bar, seat.angle, seat.stations[leg] ?? [], angle.properties);
     const handling = seat.piece / angle.properties.rv;
-    const asked = asks === 'handling' ? handling : restraint.governing.slenderness;
-    return { seat, restraint, handling, share: asked / seat.limit };
+    const inService = inServiceSlenderness(angle.properties, restraint);
+    const asked = asks === 'handling' ? handling : inService.slenderness;
+    return { seat, restraint, inService, handling, share: asked / seat.limit };
   });
   const worst = readings.reduce((most, each) => (each.share > most.share ? each : most));
   const { governing, lanes } = worst.restraint;
-  const slenderness = asks === 'handling' ? worst.handling : governing.slenderness;
+  const slenderness = asks === 'handling' ? worst.handling : worst.inService.slenderness;
   const passes = worst.share <= 1;
   const fit = fitOf(angle, leg, worst.seat.angle);
   return {
@@ -143,7 +146,8 @@ function candidateOf(asks: Asks, seats: readonly Seat[], angle: StockAngle, leg:
 
 function whyNot(worst: Reading, slenderness: number, asks: Asks): string {
   const { seat, restraint } = worst;
-  const { axis, length, radius } = restraint.governing;
+  const { axis } = restraint.governing;
+  const { length, radius } = worst.inService;
   const [over, r] = asks === 'handling' ? [seat.piece, restraint.lanes.v.radius] : [length, radius];
   const about =
     asks === 'handling' ? 'as fabricated' : axis === 'free' ? 'in its free direction' : `about ${axis}`;
