@@ -7,7 +7,7 @@ import { chipText } from './laneWords.ts';
 import { interiorOf } from './stations.ts';
 
 export const LANE_DEEP = 22;
-export const LANE_LEFT = 42;
+export const LANE_LEFT = 46;
 const RIGHT_MARGIN = 4;
 const CHIP_DEEP = 15;
 const FLAG_DEEP = 18;

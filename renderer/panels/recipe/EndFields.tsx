@@ -133,7 +133,10 @@ function boltSizes(present: number, units: UnitSystem): readonly number[] {
 
 /** "M16", or 5/8". */
 export function boltName(mm: number, units: UnitSystem): string {
-  return units === 'us' ? showLength(mm, units, 'small') : `M${Number(mm.toFixed(1))}`;
+  // A metric bolt keeps its name in either system.
+  return units === 'us' && !METRIC_BOLTS.includes(mm)
+    ? showLength(mm, units, 'small')
+    : `M${Number(mm.toFixed(1))}`;
 }
 
 /** "2 × M16, one leg", "welded 120 mm". */

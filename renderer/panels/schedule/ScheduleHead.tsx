@@ -63,6 +63,8 @@ function unitText({ unit }: Column, units: UnitSystem): string {
   switch (unit) {
     case 'length':
       return columnLengthUnit(units);
+    case 'exact':
+      return units === 'us' ? 'ft-in' : 'mm';
     case 'small':
       return units === 'us' ? 'in' : 'mm';
     case 'mass':

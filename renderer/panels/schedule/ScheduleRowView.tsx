@@ -59,7 +59,7 @@ export function ScheduleRowView({
           data-quiet={isLane(column.id) || column.id === 'limit' || undefined}
           className={column.id === 'mark' ? 'schedule-mark' : undefined}
         >
-          <Cell column={column.id} seen={seen} units={units} />
+          <Cell column={column} seen={seen} units={units} />
         </div>
       ))}
     </div>
@@ -67,14 +67,14 @@ export function ScheduleRowView({
 }
 
 interface CellProps {
-  readonly column: ColumnId;
+  readonly column: Column;
   readonly seen: SeenRow;
   readonly units: UnitSystem;
 }
 
 function Cell({ column, seen, units }: CellProps): JSX.Element {
-  if (column === 'slenderness') return <SlendernessCell seen={seen} />;
-  if (column === 'status') return <StatusCell seen={seen} />;
+  if (column.id === 'slenderness') return <SlendernessCell seen={seen} />;
+  if (column.id === 'status') return <StatusCell seen={seen} />;
   return <>{cellText(column, seen, units)}</>;
 }
 

@@ -2,13 +2,13 @@
 import type { ScheduleRow } from '../../../core/documents/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
 import { showLength, showMass, showSlenderness } from '../../../core/units/quantity.ts';
-import { columnLength, shownSection } from '../../controls/figures.ts';
+import { columnLength, makingLength, shownSection } from '../../controls/figures.ts';
 import { STATUS_WORDS } from '../../glyphs/StatusGlyph.tsx';
-import { type Column, type ColumnId, numberOf } from './scheduleColumns.ts';
+import { type Column, numberOf } from './scheduleColumns.ts';
 import type { SeenRow } from './seenRow.ts';
 
-export function cellText(column: ColumnId, { row, status }: SeenRow, units: UnitSystem): string {
-  switch (column) {
+export function cellText({ id, unit }: Column, { row, status }: SeenRow, units: UnitSystem): string {
+  switch (id) {
     case 'mark':
       return row.mark;
     case 'bay':
@@ -34,10 +34,10 @@ export function cellText(column: ColumnId, { row, status }: SeenRow, units: Unit
     case 'off':
       return String(row.numberOff);
     case 'holes':
-      return row.crossingHoles.map((mm) => columnLength(mm, units)).join(', ') || '–';
+      return row.crossingHoles.map((mm) => makingLength(mm, units)).join(', ') || '–';
     default: {
-      const value = numberOf(column, row);
-      return value === null ? '–' : figure(column, value, units);
+      const value = numberOf(id, row);
+      return value === null ? '–' : figure(unit, value, units);
     }
   }
 }
@@ -57,15 +57,26 @@ export function slendernessText(inService: Judged | null, handling: Judged | nul
 /** The table as it is seen, for a spreadsheet: tabs between cells, a line each row. */
 export function tableText(rows: readonly SeenRow[], columns: readonly Column[], units: UnitSystem): string {
   const head = columns.map((column) => `${column.head}${column.sub ?? ''}`);
-  const lines = rows.map((row) => columns.map(({ id }) => cellText(id, row, units)));
+  const lines = rows.map((row) => columns.map((column) => cellText(column, row, units)));
   return [head, ...lines].map((cells) => cells.join('\t')).join('\n');
 }
 
-function figure(column: ColumnId, value: number, units: UnitSystem): string {
-  if (column === 'mass' || column === 'massTotal') return showMass(value, units, 'bare');
-  if (column === 'packer' || column === 'setBackI' || column === 'setBackJ')
-    return showLength(value, units, 'small').replace(/ ?mm$/, '');
-  return columnLength(value, units);
+function figure(unit: Column['unit'], value: number, units: UnitSystem): string {
+  switch (unit) {
+    case 'mass':
+      return showMass(value, units, 'bare');
+    case 'small':
+      return showLength(value, units, 'small').replace(/ ?mm$/, '');
+    case 'exact':
+      return makingLength(value, units);
+    case 'length':
+      return columnLength(value, units);
+    case 'axis':
+    case undefined:
+      return String(value);
+    default:
+      return unit satisfies never;
+  }
 }
 
 function governingText({ governing }: ScheduleRow): string {

@@ -33,7 +33,7 @@ export interface Column {
   readonly head: string;
   /** A letter set low beside the head: the x of L_x. */
   readonly sub?: string;
-  readonly unit?: 'length' | 'mass' | 'small' | 'axis';
+  readonly unit?: 'length' | 'exact' | 'mass' | 'small' | 'axis';
   readonly left?: boolean;
   /** CSS grid width. */
   readonly width: string;
@@ -63,11 +63,11 @@ export const MAKING_COLUMNS: readonly Column[] = [
   { id: 'hand', head: 'Hand', left: true, width: '54px' },
   { id: 'section', head: 'Section', left: true, width: 'minmax(74px, 1.1fr)' },
   { id: 'grade', head: 'Grade', left: true, width: 'minmax(58px, 0.8fr)' },
-  { id: 'setOut', head: 'Set-out', unit: 'length', width: 'minmax(56px, 0.9fr)' },
+  { id: 'setOut', head: 'Set-out', unit: 'exact', width: 'minmax(74px, 1fr)' },
   { id: 'setBackI', head: 'Set-back i', unit: 'small', width: 'minmax(52px, 0.8fr)' },
   { id: 'setBackJ', head: 'Set-back j', unit: 'small', width: 'minmax(52px, 0.8fr)' },
-  { id: 'cut', head: 'Cut', unit: 'length', width: 'minmax(56px, 0.9fr)' },
-  { id: 'holes', head: 'Holes from end i', unit: 'length', width: 'minmax(64px, 1.1fr)' },
+  { id: 'cut', head: 'Cut', unit: 'exact', width: 'minmax(74px, 1fr)' },
+  { id: 'holes', head: 'Holes from end i', unit: 'exact', width: 'minmax(84px, 1.2fr)' },
   { id: 'leg', head: 'Leg in plane', left: true, width: 'minmax(54px, 0.8fr)' },
   { id: 'placed', head: 'Placed', left: true, width: 'minmax(84px, 1fr)' },
   { id: 'packer', head: 'Packer', unit: 'small', width: '48px' },

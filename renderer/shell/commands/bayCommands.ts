@@ -12,16 +12,17 @@ const ADDED: readonly { readonly kind: RecipeKind; readonly label: string }[] = 
   { kind: 'free', label: 'Add a free bay' },
 ];
 
+// New bays come last, so that the marks of those that are there stay as they are.
 export function addBay({ store, actions }: Services, kind: RecipeKind): void {
   const state = store.getState();
   const bay = freshBay(presentProject(state), kind);
-  if (actions.edit({ kind: 'add bay', bay, after: state.selection.bay }) === null) actions.selectBay(bay.id);
+  if (actions.edit({ kind: 'add bay', bay, after: null }) === null) actions.selectBay(bay.id);
 }
 
 export function duplicateBay({ store, actions }: Services, id: string): void {
   const copy = duplicatedBay(presentProject(store.getState()), id);
   if (copy === null) return;
-  if (actions.edit({ kind: 'add bay', bay: copy, after: id }, `Duplicate ${id}`) === null)
+  if (actions.edit({ kind: 'add bay', bay: copy, after: null }, `Duplicate ${id}`) === null)
     actions.selectBay(copy.id);
 }
 
