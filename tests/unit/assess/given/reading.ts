@@ -6,8 +6,9 @@ import type { Claim, Restraint, Station } from '../../../../core/restraint/model
 import { project } from './bays.ts';
 import { CATALOGUES } from './catalogues.ts';
 
+/** By the marks alone: what stiffness and critical loads add has tests of its own. */
 export const assessed = (bays: readonly Bay[] | Bay, settings: Partial<Settings> = {}): Assessment =>
-  assess(project(Array.isArray(bays) ? bays : [bays as Bay], settings), CATALOGUES);
+  assess(project(Array.isArray(bays) ? bays : [bays as Bay], settings), CATALOGUES, 'by the marks');
 
 export function restraintIn(assessment: Assessment, id: string): Restraint {
   const restraint = assessment.diagonals.get(id)?.restraint;
