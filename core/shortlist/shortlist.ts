@@ -48,7 +48,7 @@ export function shortlist(
   return {
     bars: seats.map((seat) => seat.bar.id),
     limit: Number.isFinite(limit) ? limit : 0,
-    neededRadius: neededRadius(seats),
+    neededRadius: neededRadius(seats, stock),
     candidates: ranked,
     first: ranked.find((candidate) => candidate.passes && candidate.fit === null) ?? null,
     passing: ranked.filter((candidate) => candidate.passes).length,
@@ -81,10 +81,18 @@ function withLeg(angle: AngleBar, leg: Leg): AngleBar {
 type Asks = Practice['asks'];
 
 function tried(stock: Stock, asks: Asks, seats: readonly Seat[], options: ShortlistOptions): Candidate[] {
-  return stock.choices.flatMap((angle) => {
-    const legs = legsToTry(angle, seats, options);
-    return legs.map((leg) => candidateOf(asks, seats, angle, leg));
-  });
+  return stock.choices
+    .filter((angle) => isReached(stock, angle))
+    .flatMap((angle) => {
+      const legs = legsToTry(angle, seats, options);
+      return legs.map((leg) => candidateOf(asks, seats, angle, leg));
+    });
+}
+
+/** Whether its designation leads to this very angle: a namesake on the project's own list stands before one in a catalogue. */
+function isReached(stock: Stock, angle: StockAngle): boolean {
+  const found = stock.find(angle.designation);
+  return found.ok && found.angle === angle;
 }
 
 /** An equal angle reads the same with either leg in the plane. */
@@ -115,7 +123,8 @@ function candidateOf(asks: Asks, seats: readonly Seat[], angle: StockAngle, leg:
   const { governing, lanes } = worst.restraint;
   const slenderness = asks === 'handling' ? worst.handling : worst.inService.slenderness;
   const passes = worst.share <= 1;
-  const fit = fitOf(angle, leg, worst.seat.angle);
+  const fits = seats.map((seat) => fitOf(angle, leg, seat.angle));
+  const fit = fits.find((reason) => reason !== null) ?? null;
   return {
     designation: angle.designation,
     kind: angle.kind,
@@ -166,12 +175,14 @@ function fitOf(angle: StockAngle, leg: Leg, seat: AngleBar): string | null {
     : null;
 }
 
-function neededRadius(seats: readonly Seat[]): Readonly<Record<Axis, number>> {
+/** About u and v it depends on how those axes lie in the present section; while that is unknown, on how they lie in an equal angle. */
+function neededRadius(seats: readonly Seat[], stock: Stock): Readonly<Record<Axis, number>> {
   const needed: Record<Axis, number> = { x: 0, y: 0, u: 0, v: 0 };
   for (const { bar, angle, limit, stations } of seats) {
     const placed = stations[angle.spec.legInPlane];
-    if (!angle.stock || !placed) continue;
-    const { lanes } = restraintWith(bar, angle, placed, angle.stock.properties);
+    const section = angle.stock ?? stock.choices.find(({ kind }) => kind === 'equal');
+    if (!section || !placed) continue;
+    const { lanes } = restraintWith(bar, angle, placed, section.properties);
     for (const axis of AXES) needed[axis] = Math.max(needed[axis], lanes[axis].unbraced / limit);
   }
   return needed;
