@@ -60,11 +60,11 @@ describe('a hold added', () => {
   it('at a crossing lengthens no lane and raises no slenderness, in bays from recipes', () => {
     fc.assert(
       fc.property(anyProject.map(withoutOverrides), fc.nat(), (made, pick) => {
-        const before = assess(made, CATALOGUES);
+        const before = assess(made, CATALOGUES, 'by the marks');
         const edits = holdsToAdd(before);
         const edit = edits[pick % Math.max(1, edits.length)];
         if (!edit) return;
-        expectNoneLonger(before, assess(applyEdit(made, edit), CATALOGUES));
+        expectNoneLonger(before, assess(applyEdit(made, edit), CATALOGUES, 'by the marks'));
       }),
       runs(250),
     );
@@ -74,8 +74,8 @@ describe('a hold added', () => {
     fc.assert(
       fc.property(planarBay, (planar) => {
         const made = project([inSpace(planar, UPRIGHT)]);
-        const before = assess(made, CATALOGUES);
-        const after = assess(holdsToAdd(before).reduce(applyEdit, made), CATALOGUES);
+        const before = assess(made, CATALOGUES, 'by the marks');
+        const after = assess(holdsToAdd(before).reduce(applyEdit, made), CATALOGUES, 'by the marks');
         expectNoneLonger(before, after);
       }),
       runs(250),
@@ -85,7 +85,7 @@ describe('a hold added', () => {
   it('by vouching for a purlin or rail lengthens no lane', () => {
     fc.assert(
       fc.property(anyProject.map(withoutOverrides), (made) => {
-        const before = assess(made, CATALOGUES);
+        const before = assess(made, CATALOGUES, 'by the marks');
         const edits = [...before.layout.bars.values()]
           .filter(({ line }) => line !== null)
           .map(
@@ -96,7 +96,7 @@ describe('a hold added', () => {
               heldBy: { kind: 'vouched', reason: 'tied' },
             }),
           );
-        expectNoneLonger(before, assess(edits.reduce(applyEdit, made), CATALOGUES));
+        expectNoneLonger(before, assess(edits.reduce(applyEdit, made), CATALOGUES, 'by the marks'));
       }),
       runs(150),
     );
@@ -105,9 +105,12 @@ describe('a hold added', () => {
   it('by a support under a node lengthens no lane', () => {
     fc.assert(
       fc.property(planarBay, fc.nat({ max: 7 }), (planar, node) => {
-        const before = assess(project([inSpace(planar, UPRIGHT)]), CATALOGUES);
+        const before = assess(project([inSpace(planar, UPRIGHT)]), CATALOGUES, 'by the marks');
         const supports = planar.supports.map((held, k) => held || k === node);
-        expectNoneLonger(before, assess(project([inSpace({ ...planar, supports }, UPRIGHT)]), CATALOGUES));
+        expectNoneLonger(
+          before,
+          assess(project([inSpace({ ...planar, supports }, UPRIGHT)]), CATALOGUES, 'by the marks'),
+        );
       }),
       runs(200),
     );
@@ -119,7 +122,7 @@ describe('the rule and the lanes', () => {
     // METHODS.md §3: "With legs aligned to the plane it equals the largest of the four lanes"; with mixed holds the bound may be above.
     fc.assert(
       fc.property(planarBay, (planar) => {
-        const { diagonals } = assess(project([inSpace(planar, UPRIGHT)]), CATALOGUES);
+        const { diagonals } = assess(project([inSpace(planar, UPRIGHT)]), CATALOGUES, 'by the marks');
         for (const [id, { restraint }] of diagonals) {
           if (!restraint) continue;
           const largest = Math.max(...AXES.map((axis) => restraint.lanes[axis].slenderness));
@@ -141,7 +144,11 @@ describe('the rule and the lanes', () => {
         (planar, axis, length) => {
           const overrides = [{ axis, length, factor: 1, reason: 'a test' }] as const;
           const marks = Object.fromEntries(planar.bars.map(({ id }) => [id, { overrides }]));
-          const { diagonals } = assess(project([inSpace({ ...planar, marks }, UPRIGHT)]), CATALOGUES);
+          const { diagonals } = assess(
+            project([inSpace({ ...planar, marks }, UPRIGHT)]),
+            CATALOGUES,
+            'by the marks',
+          );
           for (const [id, { restraint }] of diagonals) {
             if (!restraint) continue;
             const largest = Math.max(...AXES.map((each) => restraint.lanes[each].slenderness));

@@ -11,7 +11,7 @@ import { anyProject } from './given/projects.ts';
 import { runs } from './given/runs.ts';
 import { expectSame } from './given/slendernesses.ts';
 
-const of = (bay: Bay) => assess(project([bay]), CATALOGUES);
+const of = (bay: Bay) => assess(project([bay]), CATALOGUES, 'by the marks');
 
 /** A frame turned every way: two steps of Gram and Schmidt on three numbers each. */
 const frame: fc.Arbitrary<Frame> = fc
@@ -128,7 +128,10 @@ describe('bays made from a recipe', () => {
                 turn: Math.max(-360, Math.min(360, turn)),
               },
             };
-            expectSame(assess(alone, CATALOGUES), assess({ ...made, bays: [moved] }, CATALOGUES));
+            expectSame(
+              assess(alone, CATALOGUES, 'by the marks'),
+              assess({ ...made, bays: [moved] }, CATALOGUES, 'by the marks'),
+            );
           }
         },
       ),
@@ -155,8 +158,8 @@ describe('bays made from a recipe', () => {
             ),
           };
           expectSame(
-            assess({ ...made, bays: [bay] }, CATALOGUES),
-            assess({ ...made, bays: [mirrored] }, CATALOGUES),
+            assess({ ...made, bays: [bay] }, CATALOGUES, 'by the marks'),
+            assess({ ...made, bays: [mirrored] }, CATALOGUES, 'by the marks'),
             otherHand,
           );
         }
