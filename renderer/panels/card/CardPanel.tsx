@@ -1,4 +1,4 @@
-import type { JSX } from 'react';
+import { type JSX, useEffect, useRef } from 'react';
 import type { Bar } from '../../../core/layout/model.ts';
 import { showLength } from '../../../core/units/quantity.ts';
 import { useWindow } from '../../shell/services.tsx';
@@ -11,8 +11,13 @@ export function CardPanel(): JSX.Element {
   const assessment = useWindow(shownAssessment);
   const bar = useWindow((state) => state.selection.bar);
   const found = bar === null ? undefined : assessment?.layout.bars.get(bar);
+  const card = useRef<HTMLElement>(null);
+  // biome-ignore lint/correctness/useExhaustiveDependencies: another bar is read from the top.
+  useEffect(() => {
+    card.current?.scrollTo({ top: 0 });
+  }, [bar]);
   return (
-    <aside className="card" data-region tabIndex={-1} aria-label="Card of the chosen bar">
+    <aside ref={card} className="card" data-region tabIndex={-1} aria-label="Card of the chosen bar">
       {assessment === null || found === undefined ? (
         <NothingChosen />
       ) : found.angle === null ? (

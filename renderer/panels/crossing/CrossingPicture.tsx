@@ -15,6 +15,8 @@ interface CrossingPictureProps {
 const SIZE = 124;
 const MIDDLE = SIZE / 2;
 const RADIUS = 60;
+/** mm between the faces beyond which a picture of both shows neither. */
+const FAR = 60;
 
 /** The crossing cut through: both legs at their true distance, the packer and the bolt if there are any. */
 export function CrossingPicture({
@@ -27,6 +29,13 @@ export function CrossingPicture({
   const bar = layout.bars.get(readBar);
   const other = layout.bars.get(crossing.a === readBar ? crossing.b : crossing.a);
   if (bar?.angle?.stock == null || other === undefined) return null;
+  if (crossing.gap > FAR)
+    return (
+      <p className="crossing-far">
+        {showLength(crossing.gap, units, 'small')} lie between {bar.mark} and {other.mark}: a cleat or hanger
+        bridges them.
+      </p>
+    );
   const seen = seenSection(bar, bar.angle, bar.angle.stock);
   const facing = faceTowards(seen, crossing, other, bar);
   const scale = pictureScale(seen, crossing);

@@ -17,8 +17,7 @@ export function BrokenFileDialog({ name, problems }: BrokenFileDialogProps): JSX
       question
       onClose={actions.closeDialog}
       buttons={
-        // biome-ignore lint/a11y/noAutofocus: the only answer.
-        <button type="button" className="button main" autoFocus onClick={actions.closeDialog}>
+        <button type="button" className="button main" data-first onClick={actions.closeDialog}>
           Close
         </button>
       }

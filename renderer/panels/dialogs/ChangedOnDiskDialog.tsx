@@ -22,8 +22,7 @@ export function ChangedOnDiskDialog({ name }: { readonly name: string }): JSX.El
           <button type="button" className="button" onClick={actions.closeDialog}>
             Turn back
           </button>
-          {/* biome-ignore lint/a11y/noAutofocus: the safe answer stands ready. */}
-          <button type="button" className="button main" autoFocus onClick={then(documents.saveAs)}>
+          <button type="button" className="button main" data-first onClick={then(documents.saveAs)}>
             Save as…
           </button>
         </>

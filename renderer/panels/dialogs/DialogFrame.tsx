@@ -29,6 +29,8 @@ export function DialogFrame({
     const element = dialog.current;
     if (element === null) return;
     element.showModal();
+    // The answer that stands ready, where a dialog names one.
+    element.querySelector<HTMLElement>('[data-first]')?.focus();
     return () => element.close();
   }, []);
   return (

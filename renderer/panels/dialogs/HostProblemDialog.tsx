@@ -32,8 +32,7 @@ export function HostProblemDialog({ doing, problem }: HostProblemDialogProps): J
               Save as…
             </button>
           )}
-          {/* biome-ignore lint/a11y/noAutofocus: the answer that changes nothing. */}
-          <button type="button" className="button main" autoFocus onClick={actions.closeDialog}>
+          <button type="button" className="button main" data-first onClick={actions.closeDialog}>
             Close
           </button>
         </>

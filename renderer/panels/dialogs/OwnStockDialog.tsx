@@ -47,8 +47,13 @@ export function OwnStockDialog(): JSX.Element {
         designation, root radius and toe radius may be there too. Lengths in mm.
       </p>
       <div className="stock-buttons">
-        {/* biome-ignore lint/a11y/noAutofocus: the first thing to do here. */}
-        <button type="button" className="button main" autoFocus disabled={trying} onClick={() => void read()}>
+        <button
+          type="button"
+          className="button main"
+          data-first
+          disabled={trying}
+          onClick={() => void read()}
+        >
           Read a file…
         </button>
         {own.length > 0 && (

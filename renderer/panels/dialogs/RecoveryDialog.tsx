@@ -16,8 +16,7 @@ export function RecoveryDialog({ copy }: { readonly copy: RecoveryCopy }): JSX.E
           <button type="button" className="button apart" onClick={() => void documents.discardRecovery()}>
             Throw it away
           </button>
-          {/* biome-ignore lint/a11y/noAutofocus: the safe answer stands ready. */}
-          <button type="button" className="button main" autoFocus onClick={() => documents.takeUp(copy)}>
+          <button type="button" className="button main" data-first onClick={() => documents.takeUp(copy)}>
             Take it up
           </button>
         </>

@@ -29,8 +29,7 @@ export function UnsavedDialog({ next }: { readonly next: NextStep }): JSX.Elemen
           <button type="button" className="button" onClick={actions.closeDialog}>
             Cancel
           </button>
-          {/* biome-ignore lint/a11y/noAutofocus: the safe answer stands ready. */}
-          <button type="button" className="button main" autoFocus onClick={() => void save()}>
+          <button type="button" className="button main" data-first onClick={() => void save()}>
             Save
           </button>
         </>

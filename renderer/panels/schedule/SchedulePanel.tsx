@@ -53,6 +53,7 @@ export function SchedulePanel({ view, onChange }: SchedulePanelProps): JSX.Eleme
     <div
       ref={scroller}
       className="schedule"
+      data-columns={view.columns}
       role="grid"
       aria-label="Schedule"
       aria-rowcount={rows.length + 1}

@@ -21,10 +21,10 @@ export function ViewPanel({ theme }: { readonly theme: Theme }): JSX.Element {
   return (
     <section className="view-panel" data-region tabIndex={-1} aria-label="View">
       <ViewBar />
+      <TryBanner />
       <div className="view-body">
         <div className="view-drawing">
           <Drawing theme={theme} />
-          <TryBanner />
         </div>
         {crossing !== null && <CrossingPanel crossingId={crossing} />}
         {crossing === null && end !== null && <EndPanel end={end} />}
