@@ -1,11 +1,13 @@
 import { LoadedSystem, type Trial } from './assembly.ts';
-import { meshOf } from './mesh.ts';
+import { type Mesh, meshOf } from './mesh.ts';
 import type { BarProblem, CriticalLoad } from './model.ts';
 import { unknownsOf } from './unknowns.ts';
 
 /** Relative width at which a root counts as found. */
 const TOLERANCE = 1e-11;
 const MOST_TRIALS = 400;
+/** Beside the guess, a load that is none. */
+const NO_LOAD = 1e-12;
 
 /**
  * The lowest load factor at which the bar buckles, and the next one: exact for the bar as modelled, no root missed.
@@ -15,9 +17,9 @@ export function criticalLoad(
   problem: BarProblem,
   wanted: { readonly second: boolean } = { second: true },
 ): CriticalLoad {
-  const most = problem.axial.reduce((largest, piece) => Math.max(largest, piece.share), 0);
-  if (!(most > 0)) return { factor: null, N: null, second: null, trials: 0 };
   const mesh = meshOf(problem);
+  const most = largestShare(mesh);
+  if (!(most > 0)) return { factor: null, N: null, second: null, trials: 0 };
   const search = new RootSearch(new LoadedSystem([{ problem, mesh, unknowns: unknownsOf(mesh) }]));
   const { E, length, section } = problem;
   const euler = (Math.PI * Math.PI * E * section.Iv) / (length * length * most);
@@ -25,6 +27,10 @@ export function criticalLoad(
   const second = wanted.second ? search.root(2, factor) : null;
   return { factor, N: factor * most, second, trials: search.trials };
 }
+
+/** Largest compression in any piece per unit of the load factor; 0 when nothing is pressed. */
+export const largestShare = ({ pieces }: Mesh): number =>
+  pieces.reduce((most, { share }) => Math.max(most, share), 0);
 
 export interface Triable {
   tried(factor: number): Trial;
@@ -39,12 +45,13 @@ export class RootSearch {
     this.#system = system;
   }
 
-  /** The factor below which fewer than `rank` critical loads lie, and above which at least that many do. */
+  /** The factor below which fewer than `rank` critical loads lie, and above which at least that many do; 0 for what moves without load. */
   root(rank: number, guess: number, tolerance = TOLERANCE): number {
     let low = guess * (1 - 1e-9);
     let atLow = this.#tried(low);
     while (atLow.below >= rank) {
       low /= 2;
+      if (low < guess * NO_LOAD) return 0;
       atLow = this.#tried(low);
     }
     let high = low;

@@ -1,18 +1,15 @@
 /** A bar as nodes with what is free at each, and pieces between them. Built once for a problem; loads come later. */
 import type { Vec2 } from '../geometry/vector.ts';
 import type { BarProblem, EndRotation, Hold } from './model.ts';
+import { freeWays, type Spring, type Way } from './ways.ts';
 
 export interface MeshNode {
   readonly at: number;
-  /** Free directions of the displacements: `fields` numbers for each, one after the other. */
-  readonly basis: Float64Array;
-  readonly free: number;
-  /** Spring stiffness on the displacements, fields × fields, row by row; null when there is none. */
-  readonly springs: Float64Array | null;
-  /** Same for slopes, only at ends. */
-  readonly slopeSprings: Float64Array | null;
-  /** Fields whose slope is held; one bit each. */
-  readonly slopesHeld: number;
+  /** Ways in which displacements, and slopes, are free: orthonormal weights on the fields. Springs lie along the first of them. */
+  readonly displacements: readonly Way[];
+  readonly slopes: readonly Way[];
+  readonly springs: readonly Spring[];
+  readonly slopeSprings: readonly Spring[];
 }
 
 export interface MeshPiece {
@@ -35,154 +32,128 @@ export function principalMotions(alpha: number): { readonly weak: Vec2; readonly
   return { weak: [Math.cos(alpha), Math.sin(alpha)], strong: [-Math.sin(alpha), Math.cos(alpha)] };
 }
 
-/** Holds whose directions are this nearly dependent count as one: cosine of the part left over. */
-const DEPENDENT = 1e-9;
+/**
+ * Places nearer than this share of the length are one: less than a bolt has play in its hole, and a piece as short would be so much stiffer
+ * than the bar that the bar is lost beside it in double precision.
+ */
+const ONE_PLACE = 1e-4;
 
 /** @param split how many parts each piece between stations is cut into: 1 for the load, more for a shape to draw */
 export function meshOf(problem: BarProblem, split = 1): Mesh {
   const fields = problem.twist ? 3 : 2;
-  const places = placesOf(problem, split);
-  const nodes = places.map((at, index): MeshNode => {
-    if (index === 0) return endNode(at, fields, problem.endI, problem.section.alpha);
-    if (index === places.length - 1) return endNode(at, fields, problem.endJ, problem.section.alpha);
-    return innerNode(problem, fields, at);
-  });
-  const pieces = places.slice(1).map((to, k): MeshPiece => {
-    const from = places[k] ?? 0;
-    const middle = (from + to) / 2;
-    const piece = problem.axial.find((each) => middle >= each.from && middle <= each.to);
-    return { length: to - from, share: piece?.share ?? 0 };
+  const stops = stopsOf(problem);
+  const last = stops.length - 1;
+  const nodes: MeshNode[] = [];
+  const pieces: MeshPiece[] = [];
+  stops.forEach((at, k) => {
+    const end = k === 0 ? problem.endI : k === last ? problem.endJ : null;
+    nodes.push(end ? endNode(problem, fields, at, end) : innerNode(problem, fields, at, stops));
+    const to = stops[k + 1];
+    if (to === undefined) return;
+    const share = shareAt(problem, (at + to) / 2);
+    const parts = split === 1 ? 1 : partsOf((to - at) / problem.length, split);
+    for (let part = 1; part < parts; part++) nodes.push(freeNode(fields, at + ((to - at) * part) / parts));
+    for (let part = 0; part < parts; part++) pieces.push({ length: (to - at) / parts, share });
   });
   return { fields, nodes, pieces };
 }
 
-function placesOf(problem: BarProblem, split: number): readonly number[] {
-  const { length } = problem;
-  const near = length * 1e-9;
-  const all = [
-    0,
-    length,
-    ...problem.holds.map(({ at }) => at),
-    ...problem.axial.flatMap(({ from, to }) => [from, to]),
-    ...(problem.twist?.heldAt ?? []),
-  ]
-    .filter((at) => at >= 0 && at <= length)
-    .sort((a, b) => a - b);
-  const distinct = all.filter((at, k) => k === 0 || at - (all[k - 1] ?? 0) > near);
-  if (length - (distinct.at(-1) ?? 0) < near) distinct[distinct.length - 1] = length;
-  if (split === 1) return distinct;
-  return distinct.flatMap((at, k) => {
-    const next = distinct[k + 1];
-    if (next === undefined) return [at];
-    return Array.from({ length: split }, (_, part) => at + ((next - at) * part) / split);
-  });
+/** No part shorter than twenty places that count as one. */
+const partsOf = (share: number, split: number): number =>
+  Math.max(1, Math.min(split, Math.floor(share / (20 * ONE_PLACE))));
+
+/** Where something stands or changes, ends included; rising. */
+function stopsOf({ length, holds, axial, twist }: BarProblem): readonly number[] {
+  const all = [0];
+  for (const { at } of holds) all.push(at);
+  for (const { from, to } of axial) all.push(from, to);
+  if (twist) all.push(...twist.heldAt);
+  all.sort((a, b) => a - b);
+  const near = length * ONE_PLACE;
+  const stops = [0];
+  let before = 0;
+  for (const at of all)
+    if (at - before > near && at < length - near) {
+      stops.push(at);
+      before = at;
+    }
+  stops.push(length);
+  return stops;
 }
 
-function endNode(at: number, fields: 2 | 3, end: EndRotation, alpha: number): MeshNode {
-  const { weak, strong } = principalMotions(alpha);
-  const rigidX = end.alongX === 'rigid';
-  const rigidY = end.alongY === 'rigid';
-  const kx = end.alongX === 'rigid' ? 0 : end.alongX;
-  const ky = end.alongY === 'rigid' ? 0 : end.alongY;
-  // One slope held and the other free only makes sense along the axes of the section; a very stiff spring stands in for it.
-  const stiff = rigidX !== rigidY;
-  const springX = stiff && rigidX ? VERY_STIFF : kx;
-  const springY = stiff && rigidY ? VERY_STIFF : ky;
-  const any = springX > 0 || springY > 0;
-  const slopeSprings = any ? new Float64Array(fields * fields) : null;
-  if (slopeSprings) {
-    const motions = [weak, strong];
-    motions.forEach((p, i) => {
-      motions.forEach((q, j) => {
-        slopeSprings[i * fields + j] = p[0] * q[0] * springX + p[1] * q[1] * springY;
-      });
-    });
-  }
+function shareAt({ axial }: BarProblem, at: number): number {
+  for (const { from, to, share } of axial) if (at >= from && at <= to) return share;
+  return 0;
+}
+
+const WAYS: Readonly<Record<2 | 3, readonly Way[]>> = { 2: freeWays([], [], 2), 3: freeWays([], [], 3) };
+const NONE: readonly never[] = [];
+
+const freeNode = (fields: 2 | 3, at: number): MeshNode => ({
+  at,
+  displacements: WAYS[fields],
+  slopes: WAYS[fields],
+  springs: NONE,
+  slopeSprings: NONE,
+});
+
+/** Ends stay in place and against twist; their slopes are free, sprung or held along x and along y. */
+function endNode({ section }: BarProblem, fields: 2 | 3, at: number, end: EndRotation): MeshNode {
+  const { alongX, alongY } = end;
+  if (alongX === 0 && alongY === 0)
+    return { at, displacements: NONE, slopes: WAYS[fields], springs: NONE, slopeSprings: NONE };
+  const { weak, strong } = principalMotions(section.alpha);
+  const held: Way[] = [];
+  const slopeSprings: Spring[] = [];
+  ([alongX, alongY] as const).forEach((stiffness, k) => {
+    const row = fields === 3 ? [weak[k] ?? 0, strong[k] ?? 0, 0] : [weak[k] ?? 0, strong[k] ?? 0];
+    if (stiffness === 'rigid') held.push(row);
+    else if (stiffness > 0) slopeSprings.push({ row, stiffness });
+  });
   return {
     at,
-    basis: new Float64Array(0),
-    free: 0,
-    springs: null,
+    displacements: NONE,
+    slopes: freeWays(held, slopeSprings, fields),
+    springs: NONE,
     slopeSprings,
-    slopesHeld: rigidX && rigidY ? 0b11 : 0,
   };
 }
 
-/** N·mm/rad: a thousand times stiffer than any bar of steel turns. */
-const VERY_STIFF = 1e16;
+function innerNode(problem: BarProblem, fields: 2 | 3, at: number, stops: readonly number[]): MeshNode {
+  const held: Way[] = [];
+  const springs: Spring[] = [];
+  for (const hold of problem.holds) {
+    if (nearestOf(stops, hold.at) !== at) continue;
+    if (hold.stiffness === 'rigid') held.push(rowOf(problem, fields, hold));
+    else if (hold.stiffness > 0)
+      springs.push({ row: rowOf(problem, fields, hold), stiffness: hold.stiffness });
+  }
+  if (problem.twist?.heldAt.some((place) => nearestOf(stops, place) === at)) held.push([0, 0, 1]);
+  if (held.length === 0 && springs.length === 0) return freeNode(fields, at);
+  return {
+    at,
+    displacements: freeWays(held, springs, fields),
+    slopes: WAYS[fields],
+    springs,
+    slopeSprings: NONE,
+  };
+}
 
-function innerNode(problem: BarProblem, fields: 2 | 3, at: number): MeshNode {
-  const near = problem.length * 1e-9;
-  const here = problem.holds.filter((hold) => Math.abs(hold.at - at) <= near);
-  const rows = here
-    .filter(({ stiffness }) => stiffness === 'rigid')
-    .map((hold) => rowOf(problem, fields, hold));
-  if (problem.twist?.heldAt.some((held) => Math.abs(held - at) <= near)) rows.push([0, 0, 1]);
-  const basis = freeBasis(rows, fields);
-  const elastic = here.filter((hold) => typeof hold.stiffness === 'number' && hold.stiffness > 0);
-  const springs = elastic.length > 0 ? new Float64Array(fields * fields) : null;
-  if (springs)
-    for (const hold of elastic) {
-      const row = rowOf(problem, fields, hold);
-      const k = typeof hold.stiffness === 'number' ? hold.stiffness : 0;
-      for (let i = 0; i < fields; i++)
-        for (let j = 0; j < fields; j++)
-          springs[i * fields + j] = (springs[i * fields + j] ?? 0) + k * (row[i] ?? 0) * (row[j] ?? 0);
-    }
-  return { at, basis: basis.vectors, free: basis.count, springs, slopeSprings: null, slopesHeld: 0 };
+function nearestOf(stops: readonly number[], at: number): number {
+  let best = 0;
+  for (const stop of stops) if (Math.abs(stop - at) < Math.abs(best - at)) best = stop;
+  return best;
 }
 
 /** What the movement in the hold's direction, at the point where it grips, is in terms of the fields. */
-function rowOf(problem: BarProblem, fields: 2 | 3, hold: Hold): number[] {
-  const { weak, strong } = principalMotions(problem.section.alpha);
-  const [dx, dy] = hold.direction;
-  const row = [dx * weak[0] + dy * weak[1], dx * strong[0] + dy * strong[1]];
-  if (fields === 3) {
-    const [px, py] = hold.grip ?? [0, 0];
-    const [sx, sy] = problem.section.shearCentre;
-    // Turning by θ about the shear centre moves the point by θ·(−(py − sy), px − sx).
-    row.push(-dx * (py - sy) + dy * (px - sx));
-  }
-  return row;
-}
-
-/** Orthonormal vectors square to all rows, with rows that say nothing new left out. */
-function freeBasis(
-  rows: readonly (readonly number[])[],
-  fields: number,
-): { vectors: Float64Array; count: number } {
-  const held: number[][] = [];
-  for (const row of rows) {
-    const left = lessAlong(row, held);
-    const size = Math.hypot(...left);
-    if (size > DEPENDENT * Math.hypot(...row)) held.push(left.map((value) => value / size));
-  }
-  const free: number[][] = [];
-  for (let k = 0; k < fields && held.length + free.length < fields; k++) {
-    // Begin with the unit vector that is least held; a second sweep makes it square to working accuracy.
-    const best = bestUnit(fields, [...held, ...free]);
-    const once = lessAlong(best, [...held, ...free]);
-    const twice = lessAlong(once, [...held, ...free]);
-    const size = Math.hypot(...twice);
-    free.push(twice.map((value) => value / size));
-  }
-  return { vectors: Float64Array.from(free.flat()), count: free.length };
-}
-
-function bestUnit(fields: number, known: readonly (readonly number[])[]): number[] {
-  const left = Array.from({ length: fields }, (_, axis) =>
-    known.reduce((rest, vector) => rest - (vector[axis] ?? 0) ** 2, 1),
-  );
-  const axis = left.indexOf(Math.max(...left));
-  return Array.from({ length: fields }, (_, k) => (k === axis ? 1 : 0));
-}
-
-function lessAlong(vector: readonly number[], known: readonly (readonly number[])[]): number[] {
-  return known.reduce<number[]>(
-    (rest, unit) => {
-      const share = rest.reduce((sum, value, k) => sum + value * (unit[k] ?? 0), 0);
-      return rest.map((value, k) => value - share * (unit[k] ?? 0));
-    },
-    [...vector],
-  );
+function rowOf({ section }: BarProblem, fields: 2 | 3, { direction, grip }: Hold): Way {
+  const { weak, strong } = principalMotions(section.alpha);
+  const [dx, dy] = direction;
+  const a = dx * weak[0] + dy * weak[1];
+  const b = dx * strong[0] + dy * strong[1];
+  if (fields === 2) return [a, b];
+  const [px, py] = grip ?? [0, 0];
+  const [sx, sy] = section.shearCentre;
+  // Turning by θ about the shear centre moves the point by θ·(−(py − sy), px − sx).
+  return [a, b, -dx * (py - sy) + dy * (px - sx)];
 }

@@ -59,30 +59,22 @@ export function modeOf(
 ): BucklingMode {
   const nodes = fieldsAtNodes(mesh, unknowns, solution);
   const { E, section, length } = problem;
-  const { weak, strong } = principalMotions(section.alpha);
-  const [sx, sy] = mesh.fields === 3 ? section.shearCentre : [0, 0];
-  const points = nodes.map(({ at, w }): ModePoint => {
-    const [a = 0, b = 0, twist = 0] = w;
-    // From the shear centre to the centroid: θ × (−s).
-    const x = a * weak[0] + b * strong[0] + twist * sy;
-    const y = a * weak[1] + b * strong[1] - twist * sx;
-    return { at, displacement: [x, y], twist };
-  });
-  const largest = points.reduce((most, point) => (sizeOf(point) > sizeOf(most) ? point : most));
-  const scale = 1 / sizeOf(largest);
+  const points = nodes.map((node) => pointOf(problem, node));
+  const largest = largestPoint(problem, nodes, points);
+  const size = sizeOf(largest);
   // Of the two signs take the one that moves towards +x, or +y, where it moves most.
-  const sign = largest.displacement[0] + 1e-9 * largest.displacement[1] < 0 ? -1 : 1;
+  const [x, y] = largest.displacement;
+  const scale = x + 1e-9 * y < 0 ? -1 / size : 1 / size;
   const shape = points.map(
-    ({ at, displacement: [x, y], twist }): ModePoint => ({
+    ({ at, displacement, twist }): ModePoint => ({
       at,
-      displacement: [x * scale * sign, y * scale * sign],
-      twist: twist * scale * sign,
+      displacement: [displacement[0] * scale, displacement[1] * scale],
+      twist: twist * scale,
     }),
   );
   const energies = [E * section.Iv * bendingOf(nodes, 0), E * section.Iu * bendingOf(nodes, 1)] as const;
   const total = energies[0] + energies[1];
   const leading = energies[0] >= energies[1] ? 0 : 1;
-  const direction: Vec2 = [largest.displacement[0] * scale * sign, largest.displacement[1] * scale * sign];
   return {
     shape,
     energyAboutV: energies[0] / total,
@@ -90,11 +82,67 @@ export function modeOf(
     halfWaves: halfWavesOf(nodes, leading),
     symmetry: symmetryOf(shape, length),
     largestAt: largest.at,
-    directionAtLargest: direction,
+    directionAtLargest: [x * scale, y * scale],
+  };
+}
+
+/** The centroid's displacement; from the shear centre to the centroid it is θ × (−s). */
+function pointOf(
+  { section, twist: twisting }: BarProblem,
+  { at, w }: Pick<NodeFields, 'at' | 'w'>,
+): ModePoint {
+  const { weak, strong } = principalMotions(section.alpha);
+  const [sx, sy] = twisting ? section.shearCentre : [0, 0];
+  const [a = 0, b = 0, twist = 0] = w;
+  return {
+    at,
+    displacement: [a * weak[0] + b * strong[0] + twist * sy, a * weak[1] + b * strong[1] - twist * sx],
+    twist,
   };
 }
 
 const sizeOf = ({ displacement: [x, y] }: ModePoint): number => Math.hypot(x, y);
+
+/** A later point must beat an earlier one by this share: of two crests that are alike the first is named. */
+const CLEARLY = 1 + 1e-6;
+/** Steps in the parts beside the largest node. */
+const STEPS = 40;
+
+/** Where the bar moves most: the largest node, then the cubics beside it. */
+function largestPoint(
+  problem: BarProblem,
+  nodes: readonly NodeFields[],
+  points: readonly ModePoint[],
+): ModePoint {
+  const crest = points.reduce((best, point, k) => {
+    const known = points[best];
+    return known && sizeOf(point) > sizeOf(known) * CLEARLY ? k : best;
+  }, 0);
+  let largest = points[crest];
+  if (!largest) throw new Error('a shape without points');
+  for (const k of [crest - 1, crest]) {
+    const [p, q] = [nodes[k], nodes[k + 1]];
+    if (!p || !q) continue;
+    for (let step = 1; step < STEPS; step++) {
+      const point = pointOf(problem, between(p, q, step / STEPS));
+      if (sizeOf(point) > sizeOf(largest) * (1 + 1e-12)) largest = point;
+    }
+  }
+  return largest;
+}
+
+/** On the cubic through displacement and slope at both ends, `s` of the way. */
+function between(p: NodeFields, q: NodeFields, s: number): Pick<NodeFields, 'at' | 'w'> {
+  const h = q.at - p.at;
+  const rest = 1 - s;
+  const w = p.w.map(
+    (first, field) =>
+      first * rest * rest * (1 + 2 * s) +
+      (q.w[field] ?? 0) * s * s * (1 + 2 * rest) +
+      h * s * rest * ((p.slope[field] ?? 0) * rest - (q.slope[field] ?? 0) * s),
+  );
+  return { at: p.at + h * s, w };
+}
 
 /** ∫ w″² dz of one field, from the cubic through displacement and slope at both ends of each part. */
 function bendingOf(nodes: readonly NodeFields[], field: number): number {

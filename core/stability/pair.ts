@@ -4,11 +4,11 @@
  */
 import type { Vec2 } from '../geometry/vector.ts';
 import { LoadedSystem } from './assembly.ts';
-import { RootSearch } from './criticalLoad.ts';
-import { meshOf, principalMotions } from './mesh.ts';
+import { largestShare, RootSearch } from './criticalLoad.ts';
+import { type Mesh, type MeshNode, meshOf, principalMotions } from './mesh.ts';
 import { modeOf, nullShape, PARTS } from './mode.ts';
 import { type BarProblem, type BucklingMode, type CriticalLoad, PINNED } from './model.ts';
-import { type SpecialNode, type Unknowns, unknownsOf } from './unknowns.ts';
+import { type SpecialNode, unknownsOf } from './unknowns.ts';
 
 /** One of the two bars as the crossing sees it. */
 export interface PairBar {
@@ -36,19 +36,14 @@ export function pairCriticalLoad(
   pair: PairProblem,
   wanted: { readonly second: boolean } = { second: false },
 ): CriticalLoad {
-  const most = largestShare(pair.bar);
-  if (!(Math.max(most, largestShare(pair.partner)) > 0))
-    return { factor: null, N: null, second: null, trials: 0 };
-  const { system } = systemOf(pair, 1);
+  const { system, mesh, partnerMesh } = systemOf(pair, 1);
+  const [own, others] = [largestShare(mesh), largestShare(partnerMesh)];
+  if (!(Math.max(own, others) > 0)) return { factor: null, N: null, second: null, trials: 0 };
   const search = new RootSearch(system);
-  const factor = search.root(1, eulerGuess(pair));
-  const second = wanted.second ? search.root(2, factor) : null;
-  return {
-    factor,
-    N: factor * (most > 0 ? most : largestShare(pair.partner)),
-    second,
-    trials: search.trials,
-  };
+  const guess = Math.min(eulerFactor(pair.bar.problem, own), eulerFactor(pair.partner.problem, others));
+  const factor = search.root(1, guess);
+  const second = wanted.second ? search.root(2, factor > 0 ? factor : guess) : null;
+  return { factor, N: factor * (own > 0 ? own : others), second, trials: search.trials };
 }
 
 /** The shape of the bar in question when the pair buckles. */
@@ -58,50 +53,29 @@ export function pairMode(pair: PairProblem, factor: number): BucklingMode {
   return modeOf(pair.bar.problem, mesh, unknowns, nullShape(system));
 }
 
-const largestShare = ({ problem }: PairBar): number =>
-  problem.axial.reduce((largest, piece) => Math.max(largest, piece.share), 0);
-
-function eulerGuess({ bar, partner }: PairProblem): number {
-  const guesses = [bar, partner].flatMap((each) => {
-    const share = largestShare(each);
-    const { E, length, section } = each.problem;
-    return share > 0 ? [(Math.PI * Math.PI * E * section.Iv) / (length * length * share)] : [];
-  });
-  return Math.min(...guesses);
-}
+/** Infinite for a bar that nothing presses. */
+const eulerFactor = ({ E, length, section }: BarProblem, share: number): number =>
+  (Math.PI * Math.PI * E * section.Iv) / (length * length * share);
 
 function systemOf({ bar, partner }: PairProblem, split: number) {
   const mesh = meshOf(withPlace(bar), split);
-  const unknowns = unknownsOf(
-    mesh,
-    0,
-    specialOf(
-      bar,
-      mesh.nodes.map(({ at }) => at),
-      null,
-    ),
-  );
-  const other = meshOf(withPlace(partner), 1);
-  const shared = sharedIndex(
-    bar,
-    mesh.nodes.map(({ at }) => at),
-    unknowns,
-  );
-  const others = unknownsOf(
-    other,
-    unknowns.size,
-    specialOf(
-      partner,
-      other.nodes.map(({ at }) => at),
-      shared,
-    ),
-  );
+  const partnerMesh = meshOf(withPlace(partner));
+  // The shared displacement comes last, so that it lengthens one row alone.
+  const shared = freeOf(mesh) - 1 + hinges(bar) + freeOf(partnerMesh) - 1 + hinges(partner);
+  const unknowns = unknownsOf(mesh, 0, specialNode(bar, mesh, shared));
+  const partnerUnknowns = unknownsOf(partnerMesh, unknowns.end, specialNode(partner, partnerMesh, shared));
   const system = new LoadedSystem([
-    { problem: bar.problem, mesh, unknowns: { ...unknowns, width: others.size } },
-    { problem: partner.problem, mesh: other, unknowns: { ...others, width: others.size } },
+    { problem: bar.problem, mesh, unknowns },
+    { problem: partner.problem, mesh: partnerMesh, unknowns: partnerUnknowns },
   ]);
-  return { system, mesh, unknowns };
+  return { system, mesh, partnerMesh, unknowns };
 }
+
+const freeOf = ({ nodes }: Mesh): number =>
+  nodes.reduce((sum, { displacements, slopes }) => sum + displacements.length + slopes.length, 0);
+
+/** A hinge has a slope on either side of it. */
+const hinges = ({ cut }: PairBar): number => (cut ? 1 : 0);
 
 /** A hold of no stiffness puts a node at the crossing. */
 function withPlace(bar: PairBar): BarProblem {
@@ -114,22 +88,11 @@ function fieldsDirection({ problem, outOfPlane: [x, y] }: PairBar): readonly num
   return [x * weak[0] + y * weak[1], x * strong[0] + y * strong[1]];
 }
 
-function specialOf(bar: PairBar, places: readonly number[], index: number | null): SpecialNode {
+function specialNode(bar: PairBar, { nodes }: Mesh, index: number): SpecialNode {
   const direction = fieldsDirection(bar);
-  return { node: crossingNode(bar, places), shared: { direction, index }, hinge: bar.cut ? direction : null };
-}
-
-function crossingNode({ crossingAt }: PairBar, places: readonly number[]): number {
-  return places.reduce(
-    (best, at, k) => (Math.abs(at - crossingAt) < Math.abs((places[best] ?? 0) - crossingAt) ? k : best),
-    0,
-  );
-}
-
-function sharedIndex(bar: PairBar, places: readonly number[], unknowns: Unknowns): number {
-  const first = unknowns.ofNode[crossingNode(bar, places)]?.[0];
-  if (!first) throw new Error('a crossing without a displacement of its own');
-  return first.index;
+  const away = ({ at }: MeshNode): number => Math.abs(at - bar.crossingAt);
+  const node = nodes.reduce((best, each, k) => (away(each) < away(nodes[best] ?? each) ? k : best), 0);
+  return { node, shared: { direction, index }, hinge: bar.cut ? direction : null };
 }
 
 /** Two bars in one plane of bending, as in the published theory of crossed pairs: N, mm. */
