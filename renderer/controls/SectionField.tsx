@@ -6,7 +6,7 @@ import type { SectionChoice } from '../assessing/assessApi.ts';
 import { StepSign } from '../glyphs/signs.tsx';
 import { shownSection } from './figures.ts';
 import { Row } from './Row.tsx';
-import { matchingSections } from './sectionMatch.ts';
+import { matchingSections, onlySection } from './sectionMatch.ts';
 import { useOverlays } from './useOverlays.ts';
 
 interface SectionFieldProps {
@@ -54,11 +54,13 @@ export function SectionField(props: SectionFieldProps): JSX.Element {
       setTyped(null);
       return;
     }
-    const [best] = offered;
-    if (best !== undefined) take((leaving ? offered[0] : offered[active])?.designation ?? best.designation);
+    const chosen = leaving ? onlySection(offered, typed) : offered[active];
+    if (chosen !== undefined) take(chosen.designation);
     else {
       setMessage(
-        `No angle of the stock list is called “${typed.trim()}”. Pick one from the list, or add it to the own stock list.`,
+        offered.length === 0
+          ? `No angle of the stock list is called “${typed.trim()}”. Pick one from the list, or add it to the own stock list.`
+          : `“${typed.trim()}” could be several angles: pick one from the list. The old one stays.`,
       );
       if (leaving) setTyped(null);
     }

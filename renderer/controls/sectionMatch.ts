@@ -15,6 +15,13 @@ export function matchingSections(choices: readonly SectionChoice[], typed: strin
   return [...begin, ...hold].slice(0, MOST);
 }
 
+/** The one angle that was meant: the one whose name was typed in full, or the only one that fits. */
+export function onlySection(fitting: readonly SectionChoice[], typed: string): SectionChoice | undefined {
+  const wanted = plain(typed);
+  const whole = fitting.find(({ designation }) => plain(designation) === wanted);
+  return whole ?? (fitting.length === 1 ? fitting[0] : undefined);
+}
+
 /** "L 70 × 70 × 6" → "70x70x6": as people type, without what does not tell angles apart. */
 function plain(text: string): string {
   return text.toLowerCase().replace(/[×*]/g, 'x').replace(/\s+/g, '').replace(/^l/, '');

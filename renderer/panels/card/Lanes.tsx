@@ -1,8 +1,9 @@
 import type { JSX } from 'react';
 import type { Assessment, DiagonalAssessment } from '../../../core/assessment.ts';
 import type { AngleBar, Bar } from '../../../core/layout/model.ts';
+import type { Verdict } from '../../../core/practice/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
-import type { Restraint } from '../../../core/restraint/model.ts';
+import type { Governing, Restraint } from '../../../core/restraint/model.ts';
 import { showSlenderness } from '../../../core/units/quantity.ts';
 import { useFontsLoaded } from '../../controls/useFontsLoaded.ts';
 import { useSize } from '../../controls/useSize.ts';
@@ -39,8 +40,9 @@ export function Lanes({
   const trying = useWindow((state) => state.trying !== null);
   const { limit } = diagonal.limit;
   const { governing } = restraint;
-  const over = governing.slenderness > limit;
-  const figure = showSlenderness(governing.slenderness, limit);
+  const read = readSlenderness(governing, diagonal.inService);
+  const over = read > limit;
+  const figure = showSlenderness(read, limit);
   const drawing =
     size === null || size.width < 100
       ? null
@@ -49,6 +51,7 @@ export function Lanes({
           before,
           limit,
           width: size.width,
+          governs: read,
           flagText: `governs ${figure} ${over ? '>' : '≤'} ${limit}`,
         });
   return (
@@ -125,7 +128,14 @@ export function Lanes({
           </svg>
         )}
       </div>
-      <LanesInWords bar={bar} restraint={restraint} limit={limit} units={units} />
+      <LanesInWords bar={bar} restraint={restraint} read={read} limit={limit} units={units} />
     </section>
   );
+}
+
+/** Of a bar with mixed holds the verdict is the exact one, while the rule gives only a bound. */
+function readSlenderness({ basis, slenderness }: Governing, inService: Verdict | null): number {
+  return basis === 'mixed bound' && inService !== null && inService.bound !== null
+    ? inService.slenderness
+    : slenderness;
 }

@@ -9,12 +9,16 @@ import { chipText } from './laneWords.ts';
 interface LanesInWordsProps {
   readonly bar: Bar;
   readonly restraint: Restraint;
+  /** The slenderness held against the limit. */
+  readonly read: number;
   readonly limit: number;
   readonly units: UnitSystem;
 }
 
 /** The lanes as a table for those who do not see the drawing: the same lengths, radii, slendernesses and reasons. */
-export function LanesInWords({ bar, restraint, limit, units }: LanesInWordsProps): JSX.Element {
+export function LanesInWords({ bar, restraint, read, limit, units }: LanesInWordsProps): JSX.Element {
+  const { governing } = restraint;
+  const ownLane = governing.axis === 'free' || governing.basis === 'mixed bound';
   return (
     <table className="unseen" aria-label={`Lanes of ${bar.mark} as a table`}>
       <thead>
@@ -36,7 +40,7 @@ export function LanesInWords({ bar, restraint, limit, units }: LanesInWordsProps
               <td>{showRadius(lane.radius, units)}</td>
               <td>
                 {showSlenderness(lane.slenderness, limit)}
-                {restraint.governing.axis === axis && ', governs'}
+                {restraint.governing.axis === axis && !ownLane && ', governs'}
               </td>
               <td>
                 {lane.cuts
@@ -49,6 +53,15 @@ export function LanesInWords({ bar, restraint, limit, units }: LanesInWordsProps
             </tr>
           );
         })}
+        {ownLane && (
+          <tr>
+            <th scope="row">any way</th>
+            <td>{showLength(governing.to - governing.from, units, 'spoken')}</td>
+            <td>{showRadius(governing.radius, units)}</td>
+            <td>{showSlenderness(read, limit)}, governs</td>
+            <td>bows in a direction that is none of the four</td>
+          </tr>
+        )}
       </tbody>
     </table>
   );

@@ -67,7 +67,7 @@ function VerdictBox({ name, verdict, was, says, diagonal }: VerdictBoxProps): JS
         {figureWas !== figure && <s className="was">{figureWas}</s>}
         <b>{figure}</b>
         {figureWas === figure && (
-          <span className="verdict-says">{says === '' ? `limit ${verdict.limit}` : says}</span>
+          <span className="verdict-says">{says === '' ? inServiceSays(verdict) : says}</span>
         )}
         {(verdict.asked || !verdict.ok) && (
           <span className="verdict-status">
@@ -83,4 +83,8 @@ function VerdictBox({ name, verdict, was, says, diagonal }: VerdictBoxProps): JS
 function statusOf(verdict: Verdict, diagonal: DiagonalAssessment): DiagonalAssessment['status'] {
   if (!verdict.ok) return 'over';
   return diagonal.status === 'near' ? 'near' : 'within';
+}
+
+function inServiceSays({ bound, limit }: Verdict): string {
+  return bound === null ? `limit ${limit}` : `exact; bound ${showSlenderness(bound)}`;
 }

@@ -72,10 +72,19 @@ export interface LaneInput {
   readonly before: Restraint | null;
   readonly limit: number;
   readonly width: number;
+  /** The slenderness that is held against the limit: of mixed holds the exact one, where the rule only gives a bound. */
+  readonly governs: number;
   readonly flagText: string;
 }
 
-export function laneDrawing({ restraint, before, limit, width, flagText }: LaneInput): LaneDrawing {
+export function laneDrawing({
+  restraint,
+  before,
+  limit,
+  width,
+  governs: read,
+  flagText,
+}: LaneInput): LaneDrawing {
   const { stations, governing } = restraint;
   const first = stations[0]?.at ?? 0;
   const last = stations.at(-1)?.at ?? 1;
@@ -106,7 +115,7 @@ export function laneDrawing({ restraint, before, limit, width, flagText }: LaneI
       top,
       pieces:
         lane === null
-          ? [governingPiece(governing, along, limit)]
+          ? [governingPiece(governing, read, along, limit)]
           : piecesOf(lane, along, limit, claimedAt(lane, restraint, along)),
       cuts: lane === null ? [] : cutsOf(lane, restraint, along),
       chips: chips.map((chip) => ({ ...chip, y: many ? top - CHIP_DEEP - 1 : top + LANE_DEEP + below + 3 })),
@@ -188,7 +197,12 @@ function claimedAt(lane: Lane, restraint: Restraint, along: (at: number) => numb
     .map(({ x }) => x);
 }
 
-function governingPiece(governing: Governing, along: (at: number) => number, limit: number): LanePiece {
+function governingPiece(
+  governing: Governing,
+  slenderness: number,
+  along: (at: number) => number,
+  limit: number,
+): LanePiece {
   const left = along(governing.from);
   const right = along(governing.to);
   return {
@@ -196,8 +210,8 @@ function governingPiece(governing: Governing, along: (at: number) => number, lim
     to: governing.to,
     left,
     right,
-    slenderness: governing.slenderness,
-    step: nearnessStep(governing.slenderness / limit),
+    slenderness,
+    step: nearnessStep(slenderness / limit),
     textAt: (left + right) / 2,
     textRoom: right - left,
   };

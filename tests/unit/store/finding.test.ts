@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import type { SectionChoice } from '../../../renderer/assessing/assessApi.ts';
-import { matchingSections } from '../../../renderer/controls/sectionMatch.ts';
+import { matchingSections, onlySection } from '../../../renderer/controls/sectionMatch.ts';
 import { scoreOf } from '../../../renderer/shell/find/fuzzy.ts';
 
 describe('finding by a few letters', () => {
@@ -43,5 +43,11 @@ describe('narrowing the stock list', () => {
   it('gives all for nothing and nothing for nonsense', () => {
     expect(names('  ')).toHaveLength(3);
     expect(names('zzz')).toEqual([]);
+  });
+
+  it('takes a name typed in full, or the only one that fits, and nothing in doubt', () => {
+    expect(onlySection(choices, '70x70x6')?.designation).toBe('70x70x6');
+    expect(onlySection(matchingSections(choices, '100'), '100')?.designation).toBe('100x70x8');
+    expect(onlySection(matchingSections(choices, '70'), '70')).toBe(undefined);
   });
 });
