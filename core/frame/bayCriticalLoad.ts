@@ -27,7 +27,8 @@ export function bayCriticalLoad(
   const plain = new FrameSolver(frame);
   const mechanisms = plain.mechanisms();
   const compressed = [...shares.values()].some((share) => share < 0);
-  if (!compressed || mechanisms.length > 0) return { factor: null, mode: [], mechanisms, trials: 0 };
+  if (!compressed || mechanisms.length > 0 || plain.criticalLoadsBelow > 0)
+    return { factor: null, mode: [], mechanisms, trials: 0 };
   const solverAt = (factor: number): FrameSolver =>
     new FrameSolver(
       {

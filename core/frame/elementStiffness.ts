@@ -13,11 +13,15 @@ export function elementStiffness(element: FrameElement): Float64Array {
   return elementWithCount(element).K;
 }
 
-/** The same with the part of a count of critical loads that the ends do not see: clamped pieces, and released rotations that have lost their stiffness. */
-export function elementWithCount(element: FrameElement): {
+export interface CountedStiffness {
   readonly K: Float64Array;
   readonly hidden: number;
-} {
+  /** Diagonal before releases. */
+  readonly gross: Float64Array;
+}
+
+/** The same with the part of a count of critical loads that the ends do not see: clamped pieces, and released rotations that have lost their stiffness. */
+export function elementWithCount(element: FrameElement): CountedStiffness {
   const K = new Float64Array(ELEMENT_SIZE * ELEMENT_SIZE);
   const { direction, p, q, length } = element;
   const none: Vec3 = [0, 0, 0];
@@ -28,8 +32,10 @@ export function elementWithCount(element: FrameElement): {
   let hidden =
     clampedLoadsBelow(element.EIp, -element.tension, length) +
     clampedLoadsBelow(element.EIq, -element.tension, length);
+  // What is left on the diagonal after letting turns free is noise below a share of what stood there before.
+  const gross = Float64Array.from({ length: ELEMENT_SIZE }, (_, k) => Math.abs(K[k * ELEMENT_SIZE + k] ?? 0));
   for (const { end, about } of element.releases) if (release(K, end === 'i' ? 3 : 9, about) < 0) hidden += 1;
-  return { K, hidden };
+  return { K, hidden, gross };
 }
 
 /** Displacement and rotation at i, and `other` times the same at j. */

@@ -34,7 +34,9 @@ export function pushTest(
   options: FrameOptions,
   target: { readonly bar: BarId; readonly at: number; readonly axes: SectionAxes },
 ): PushTest | null {
-  const places = new Map(bay.diagonals.map((id) => [id, evenly(layout.bars.get(id)?.length ?? 0)] as const));
+  const places = new Map(
+    bay.diagonals.map((id) => [id, evenPlaces(layout.bars.get(id)?.length ?? 0)] as const),
+  );
   places.set(target.bar, [...(places.get(target.bar) ?? []), target.at]);
   const frame = bayFrame(layout, holdings, bay, { ...options, extraPlaces: places });
   const solver = new FrameSolver(frame);
@@ -66,5 +68,6 @@ export function pushTest(
   };
 }
 
-const evenly = (length: number): readonly number[] =>
+/** Places that part a length evenly, its ends left out. */
+export const evenPlaces = (length: number): readonly number[] =>
   Array.from({ length: PARTS - 1 }, (_, k) => (length * (k + 1)) / PARTS);

@@ -43,9 +43,9 @@ export class FrameSolver {
       this.displacementOf[k] = this.displacementOf[leader(frame, k)] ?? -1;
     });
     const gatherer = new MatrixGatherer(size, frame.elements.length * 78);
-    this.#assemble(gatherer);
+    const gross = this.#assemble(gatherer, size);
     this.matrix = gatherer.matrix();
-    this.#factors = factored(this.matrix, symbolic ?? analysed(this.matrix, this.#order(size)));
+    this.#factors = factored(this.matrix, symbolic ?? analysed(this.matrix, this.#order(size)), gross);
   }
 
   get size(): number {
@@ -135,11 +135,17 @@ export class FrameSolver {
     return { moving, bars: [...bars] };
   }
 
-  #assemble(gatherer: MatrixGatherer): void {
+  /** Returns what each diagonal entry is put together from. */
+  #assemble(gatherer: MatrixGatherer, size: number): Float64Array {
+    const gross = new Float64Array(size);
     for (const element of this.frame.elements) {
-      const { K, hidden } = elementWithCount(element);
+      const { K, hidden, gross: own } = elementWithCount(element);
       this.#hidden += hidden;
-      addBlock(gatherer, this.unknownsOf(element.i, element.j), K, ELEMENT_SIZE);
+      const unknowns = this.unknownsOf(element.i, element.j);
+      addBlock(gatherer, unknowns, K, ELEMENT_SIZE);
+      unknowns.forEach((unknown, k) => {
+        if (unknown >= 0) gross[unknown] = (gross[unknown] ?? 0) + (own[k] ?? 0);
+      });
     }
     for (const spring of this.frame.springs) {
       const first = spring.kind === 'displacement' ? this.displacementOf : this.rotationOf;
@@ -162,6 +168,7 @@ export class FrameSolver {
           if (value !== 0) gatherer.add(unknowns[a] ?? 0, unknowns[b] ?? 0, same ? 2 * value : value);
         }
     }
+    return gross;
   }
 
   /** Joints are ordered as wholes, three unknowns at a time. */

@@ -78,10 +78,15 @@ function reordered(matrix: SymmetricMatrix, place: Int32Array) {
   return { start, row, from };
 }
 
-/** A pivot this small beside what it began as has vanished. */
+/** A pivot this small beside what it was put together from has vanished. */
 const VANISHED = 1e-11;
 
-export function factored(matrix: SymmetricMatrix, symbolic: Symbolic): Factored {
+/** @param gross what each diagonal entry was put together from, before anything cancelled; the entry itself where not given */
+export function factored(
+  matrix: SymmetricMatrix,
+  symbolic: Symbolic,
+  gross: Float64Array | null = null,
+): Factored {
   const { size: n, parent, columnStart, start, row, from, order } = symbolic;
   const lRow = new Int32Array(columnStart[n] ?? 0);
   const lValue = new Float64Array(columnStart[n] ?? 0);
@@ -113,7 +118,7 @@ export function factored(matrix: SymmetricMatrix, symbolic: Symbolic): Factored 
       }
       while (length > 0) pattern[--top] = path[--length] ?? 0;
     }
-    const began = Math.abs(pivot);
+    const began = Math.max(Math.abs(pivot), gross?.[order[k] ?? 0] ?? 0);
     for (; top < n; top++) {
       const i = pattern[top] ?? 0;
       const yi = y[i] ?? 0;

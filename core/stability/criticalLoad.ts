@@ -6,6 +6,8 @@ import { unknownsOf } from './unknowns.ts';
 /** Relative width at which a root counts as found. */
 const TOLERANCE = 1e-11;
 const MOST_TRIALS = 400;
+/** Critical factors are sought no farther below the guess than this. */
+const LEAST = 1e-12;
 /** Beside the guess, a load that is none. */
 const NO_LOAD = 1e-12;
 
@@ -50,6 +52,7 @@ export class RootSearch {
     let low = guess * (1 - 1e-9);
     let atLow = this.#tried(low);
     while (atLow.below >= rank) {
+      if (low < guess * LEAST) throw new Error('the unloaded system is already unstable');
       low /= 2;
       if (low < guess * NO_LOAD) return 0;
       atLow = this.#tried(low);

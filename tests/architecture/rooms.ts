@@ -14,7 +14,7 @@ export const ROOMS: readonly (readonly string[])[] = [
   ['findings'],
   ['documents'],
   ['assess'],
-  ['remedies'],
+  ['remedies', 'study'],
 ];
 
 /** `core/assessment.ts`: the type of everything derived, which those that work on the whole of it may name. */
@@ -24,4 +24,5 @@ export const READS_THE_ASSESSMENT: readonly string[] = [
   'documents',
   'assess',
   'remedies',
+  'study',
 ];
