@@ -34,6 +34,7 @@ export function Verdicts({ diagonal, before, practice }: VerdictsProps): JSX.Ele
         Limit {limit.limit}:{' '}
         {limit.source === 'practice' ? `${practice.name}, ${limit.clause}` : limit.source}
         {limit.standing === 'advice' && ', advice'}
+        {inService.bound !== null && ` · exact; the rule’s safe bound is ${showSlenderness(inService.bound)}`}
         {limit.source === 'practice' && limit.confidence === 'from memory, verify' && (
           <span className="verify"> · from memory, verify</span>
         )}
@@ -67,7 +68,7 @@ function VerdictBox({ name, verdict, was, says, diagonal }: VerdictBoxProps): JS
         {figureWas !== figure && <s className="was">{figureWas}</s>}
         <b>{figure}</b>
         {figureWas === figure && (
-          <span className="verdict-says">{says === '' ? inServiceSays(verdict) : says}</span>
+          <span className="verdict-says">{says === '' ? `limit ${verdict.limit}` : says}</span>
         )}
         {(verdict.asked || !verdict.ok) && (
           <span className="verdict-status">
@@ -83,8 +84,4 @@ function VerdictBox({ name, verdict, was, says, diagonal }: VerdictBoxProps): JS
 function statusOf(verdict: Verdict, diagonal: DiagonalAssessment): DiagonalAssessment['status'] {
   if (!verdict.ok) return 'over';
   return diagonal.status === 'near' ? 'near' : 'within';
-}
-
-function inServiceSays({ bound, limit }: Verdict): string {
-  return bound === null ? `limit ${limit}` : `exact; bound ${showSlenderness(bound)}`;
 }

@@ -32,8 +32,8 @@ export function CrossingPicture({
   if (crossing.gap > FAR)
     return (
       <p className="crossing-far">
-        {showLength(crossing.gap, units, 'small')} lie between {bar.mark} and {other.mark}: a cleat or hanger
-        bridges them.
+        {showLength(crossing.gap, units, 'small')} between {bar.mark} and {other.mark}, for a cleat or hanger
+        to bridge.
       </p>
     );
   const seen = seenSection(bar, bar.angle, bar.angle.stock);

@@ -9,25 +9,20 @@ interface TryButtonProps {
   readonly id: string;
 }
 
-/** Starts a trial; says so while it lasts. */
+/** Starts a trial, says so while it lasts, and puts it back when pressed again. One button throughout, so that it keeps the focus. */
 export function TryButton({ name, id, trial }: TryButtonProps): JSX.Element {
   const actions = useActions();
   const on = useWindow((state) => state.trying?.id === id);
-  if (on)
-    return (
-      <span className="trying">
-        <span className="try-dot" aria-hidden="true" />
-        Trying
-      </span>
-    );
   return (
     <button
       type="button"
-      className="button try"
-      aria-label={`Try: ${name}`}
-      onClick={() => actions.startTrial(trial())}
+      className={on ? 'trying' : 'button try'}
+      aria-label={`${on ? 'Trying' : 'Try'}: ${name}`}
+      title={on ? 'Put it back' : undefined}
+      onClick={() => (on ? actions.putBackTrial() : actions.startTrial(trial()))}
     >
-      Try
+      {on && <span className="try-dot" aria-hidden="true" />}
+      {on ? 'Trying' : 'Try'}
     </button>
   );
 }
