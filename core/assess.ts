@@ -1,6 +1,7 @@
 import type { Assessment, BaySummary, DiagonalAssessment } from './assessment.ts';
 import { bayBowings } from './bowing/bowings.ts';
 import { type InServiceReading, inServiceSlenderness } from './bowing/exactSlenderness.ts';
+import { type BowingMemory, circumstances } from './bowing/memory.ts';
 import type { NamedMechanism } from './bowing/model.ts';
 import type { Catalogues } from './catalogue/model.ts';
 import { stockOf } from './catalogue/stock.ts';
@@ -31,6 +32,7 @@ export function assess(
   project: Project,
   catalogues: Catalogues,
   depth: AssessmentDepth = 'all levels',
+  memory: BowingMemory | null = null,
 ): Assessment {
   const practice = practiceFor(project.settings.practice);
   const stock = stockOf(project.settings.catalogue, project.ownStock, catalogues);
@@ -39,7 +41,7 @@ export function assess(
   const byMarks = judgedDiagonals(project, practice, layout, context);
   const { judged, movable } =
     depth === 'all levels'
-      ? withBowing(project, practice, layout, context, byMarks)
+      ? withBowing(project, practice, layout, context, byMarks, memory)
       : { judged: byMarks, movable: new Map<string, readonly NamedMechanism[]>() };
   const findings = findingsOf({ project, practice, layout, diagonals: judged, movable });
   const findingIds = idsByBar(findings);
@@ -83,6 +85,7 @@ function withBowing(
   layout: Layout,
   context: RestraintContext,
   byMarks: ReadonlyMap<BarId, Judged>,
+  memory: BowingMemory | null,
 ): {
   readonly judged: ReadonlyMap<BarId, Judged>;
   readonly movable: ReadonlyMap<string, readonly NamedMechanism[]>;
@@ -96,13 +99,15 @@ function withBowing(
   layout.bays.forEach((bay, index) => {
     const source = project.bays[index];
     if (!source) return;
-    const found = bayBowings(input, bay, source);
+    const find = () => bayBowings(input, bay, source);
+    const found = memory ? memory.recall(circumstances(input, bay, source, project), find) : find();
     if (found.movable.length > 0) movable.set(bay.id, found.movable);
     for (const [id, bowing] of found.bowings) {
       const known = judged.get(id);
       if (known) judged.set(id, { ...known, bowing });
     }
   });
+  memory?.turn();
   return { judged, movable };
 }
 
@@ -162,7 +167,13 @@ function assessed(
     nearness,
     status: nearness === null ? 'unknown' : nearness > 1 ? 'over' : nearness >= NEAR ? 'near' : 'within',
     reason: restraint
-      ? governingSentence(bar, restraint, layout, project.settings.units)
+      ? governingSentence(
+          bar,
+          restraint,
+          layout,
+          project.settings.units,
+          inService && inService.bound !== null ? inService.slenderness : null,
+        )
       : judged.angle.stock
         ? `The ends of ${bar.mark} leave no steel between them.`
         : `${judged.angle.spec.section} is in no stock list, so ${bar.mark} is not assessed.`,

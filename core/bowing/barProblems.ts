@@ -96,7 +96,7 @@ export function planeWays({ angle }: Pick<BowingBar, 'angle'>): {
 }
 
 /** Stiffness against being pushed one way, the other way free to follow. */
-export function stiffnessAlong({ ellipse }: StationStiffness, way: Vec2): number {
+export function stiffnessAlong({ ellipse }: Pick<StationStiffness, 'ellipse'>, way: Vec2): number {
   const [xx, xy, yy] = ellipse.matrix;
   const determinant = xx * yy - xy * xy;
   const flexibility = (way[0] * way[0] * yy - 2 * way[0] * way[1] * xy + way[1] * way[1] * xx) / determinant;

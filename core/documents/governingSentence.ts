@@ -2,7 +2,7 @@ import type { Bar, Layout } from '../layout/model.ts';
 import type { UnitSystem } from '../project/model.ts';
 import type { Claim, Governing, HoldDirection, Restraint, Station } from '../restraint/model.ts';
 import { grouped } from '../units/figures.ts';
-import { showLength } from '../units/quantity.ts';
+import { showLength, showSlenderness } from '../units/quantity.ts';
 import { whyItStays, whyItSwings } from './bowingPhrases.ts';
 import { listed } from './listed.ts';
 import { factorText } from './overrideWords.ts';
@@ -12,16 +12,28 @@ import { slendernessWorking } from './working.ts';
  * Why the bar bows where it does, in a sentence or two with the division that gives its slenderness, in the project's units:
  * "Pushed in the plane, D2 meets D1 end-on and stays. Pushed out of the plane, it meets only D1's bending and swings,
  * so all 7.32 m bows about y: 7 324 / 21.3 = 344."
+ *
+ * @param exact slenderness by the exact critical load, where that is taken in place of the rule's
  */
-export function governingSentence(bar: Bar, restraint: Restraint, layout: Layout, units: UnitSystem): string {
+export function governingSentence(
+  bar: Bar,
+  restraint: Restraint,
+  layout: Layout,
+  units: UnitSystem,
+  exact: number | null = null,
+): string {
   const { governing } = restraint;
   switch (governing.basis) {
     case 'override':
       return overrideSentence(bar, restraint, units);
     case 'mixed bound':
-      return boundSentence(bar, restraint, units);
-    case 'span':
-      return spanSentence(bar, restraint, layout, units);
+      return boundSentence(bar, restraint, units, exact);
+    case 'span': {
+      const said = spanSentence(bar, restraint, layout, units);
+      return exact === null
+        ? said
+        : `${said} Bowing both ways at once, worked out exactly, reads ${showSlenderness(exact)}, which is taken.`;
+    }
     default:
       return governing.basis satisfies never;
   }
@@ -42,7 +54,7 @@ function overrideSentence(bar: Bar, restraint: Restraint, units: UnitSystem): st
   return `About ${lane.axis}, ${bar.mark} takes ${taken}; reason given: “${override.reason}”. ${working}.`;
 }
 
-function boundSentence(bar: Bar, restraint: Restraint, units: UnitSystem): string {
+function boundSentence(bar: Bar, restraint: Restraint, units: UnitSystem, exact: number | null): string {
   const { governing, bound, stations } = restraint;
   const working = slendernessWorking(governing.length, governing.radius, governing.slenderness, units);
   const length = showLength(governing.length, units, 'spoken');
@@ -53,7 +65,9 @@ function boundSentence(bar: Bar, restraint: Restraint, units: UnitSystem): strin
       : `the holds of one way alone, so that ${length} bows ${aboutAxis(governing)}`;
   return (
     `${bar.mark} is held ${ways.join(', ')}, so between them it can bow both ways at once. ` +
-    `A bound on the safe side is taken, ${how}: ${working}.`
+    (exact === null
+      ? `A bound on the safe side is taken, ${how}: ${working}.`
+      : `Worked out exactly, with these holds rigid, that reads ${showSlenderness(exact)}, which is taken; the rule's bound, on the safe side, is ${how}: ${working}.`)
   );
 }
 

@@ -4,6 +4,7 @@ import au from '../../assets/catalogues/au.json';
 import en from '../../assets/catalogues/en.json';
 import us from '../../assets/catalogues/us.json';
 import { assess } from '../../core/assess.ts';
+import { BowingMemory } from '../../core/bowing/memory.ts';
 import type { Catalogues } from '../../core/catalogue/model.ts';
 import { readCatalogue } from '../../core/catalogue/readCatalogue.ts';
 import { stockOf } from '../../core/catalogue/stock.ts';
@@ -17,7 +18,9 @@ import { rememberedAssess } from './memory.ts';
 import { joinReadings } from './readings.ts';
 
 const catalogues: Catalogues = { en: readCatalogue(en), us: readCatalogue(us), au: readCatalogue(au) };
-const assessFresh = (project: Project) => assess(project, catalogues);
+/** Bays that an edit does not touch keep their critical loads. */
+const bowingMemory = new BowingMemory();
+const assessFresh = (project: Project) => assess(project, catalogues, 'all levels', bowingMemory);
 const assessed = rememberedAssess(assessFresh);
 
 const api: AssessApi = {

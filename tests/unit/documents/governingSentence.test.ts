@@ -82,9 +82,9 @@ describe('why a bar under purlins bows where it does', () => {
   };
   const bolted: Join = { kind: 'purlin', boltsAcross: 1 };
 
-  it('says that the bound for mixed holds lies on the safe side, and what holds which way', () => {
+  it('takes the exact reading for mixed holds, with the bound beside it on the safe side, and says what holds which way', () => {
     expect(under([1000, 3000], bolted)).toMatch(
-      /^D1 is held out of the plane only at P1 and P2, in the plane only at D2, so between them it can bow both ways at once\. A bound on the safe side is taken, .* = \d+\.$/,
+      /^D1 is held out of the plane only at P1 and P2, in the plane only at D2, so between them it can bow both ways at once\. Worked out exactly, with these holds rigid, that reads \d+, which is taken; the rule's bound, on the safe side, is .* = \d+\.$/,
     );
   });
 
