@@ -1,4 +1,5 @@
 import { barName } from '../restraint/trails.ts';
+import { showForce, showStiffness } from '../units/loads.ts';
 import { showLength } from '../units/quantity.ts';
 import type { Finding } from './model.ts';
 import { type FindingSubject, grouped, isAre, type Judged, judgedIn, marksInWords } from './subject.ts';
@@ -86,7 +87,7 @@ function weakHolds(subject: FindingSubject, { bar, restraint, bowing }: Judged):
           bars: [bar.id],
           crossing: station.crossings[0] ?? null,
           title: `${station.label} holds ${bar.mark} ${hold.direction} less than its mark claims`,
-          detail: `At ${showLength(offered.at, units, 'spoken')} the framing offers ${hold.offered.toPrecision(3)} N/mm ${hold.direction}; with it the bar keeps ${(hold.grip * 100).toFixed(0)} % of the critical load that a rigid hold gives.`,
+          detail: `At ${showLength(offered.at, units, 'spoken')} the framing offers ${showStiffness(hold.offered, units)} ${hold.direction}; with it the bar keeps ${(hold.grip * 100).toFixed(0)} % of the critical load that a rigid hold gives.`,
           value: hold.grip,
           limit: WEAK,
           quantity: 'ratio',
@@ -151,7 +152,7 @@ function squeezedPairs(subject: FindingSubject, all: readonly Judged[]): readonl
       bars: group.map((each) => each.bar.id),
       crossing: bowing?.partner?.crossing ?? null,
       title: `${bar.mark} and ${other} are both squeezed`,
-      detail: `With ${Math.abs(bowing?.partner?.tensionShare ?? 0)} of the compression in the partner, the crossing swings out of the plane: the critical load of ${bar.mark} is ${((bowing?.real.N ?? 0) / 1000).toFixed(1)} kN.`,
+      detail: `With ${Math.abs(bowing?.partner?.tensionShare ?? 0)} of the compression in the partner, the crossing swings out of the plane: the critical load of ${bar.mark} is ${showForce(bowing?.real.N ?? 0, subject.project.settings.units)}.`,
       value: bowing?.partner?.tensionShare ?? null,
       limit: 0,
       quantity: 'ratio',

@@ -40,6 +40,8 @@ export function applyEdit(project: Project, edit: Edit): Project {
       );
     case 'join':
       return edit.crossings.reduce((changed, id) => withJoin(changed, id, edit.join), project);
+    case 'tension share':
+      return withBay(project, edit.bay, (bay) => withTensionShare(bay, edit.crossing, edit.share));
     case 'line holder':
       return withBay(project, edit.bay, (bay) => ({
         ...bay,
@@ -85,6 +87,8 @@ export function editLabel(edit: Edit): string {
       return edit.bars.length === 1 ? `Change ${edit.bars[0]}` : `Change ${edit.bars.length} bars`;
     case 'join':
       return edit.join === null ? 'Take the mark away' : `Mark the crossing: ${JOIN_WORDS[edit.join.kind]}`;
+    case 'tension share':
+      return `Set the forces at a crossing of ${edit.bay}`;
     case 'line holder':
       return `Change what holds ${edit.line}`;
     default:
@@ -136,6 +140,13 @@ function withBarMark(
 function withJoin(project: Project, id: string, join: Join | null): Project {
   const { bay: bayId, key } = placeOf(id);
   return withBay(project, bayId, (bay) => ({ ...bay, joins: withEntry(bay.joins, key, join) }));
+}
+
+/** A bay in which nothing is said of any crossing's forces has no entry for them at all, as one that never had. */
+function withTensionShare(bay: Bay, crossing: string, share: number | null): Bay {
+  const { tensionShares = {}, ...rest } = bay;
+  const shares = withEntry(tensionShares, crossing, share);
+  return Object.keys(shares).length === 0 ? rest : { ...rest, tensionShares: shares };
 }
 
 function withEntry<T>(

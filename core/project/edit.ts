@@ -26,6 +26,13 @@ export type Edit =
     }
   /** `join` null takes the mark away. Crossing ids as in the layout. */
   | { readonly kind: 'join'; readonly crossings: readonly string[]; readonly join: Join | null }
+  /** Tension in one diagonal of a crossing over compression in the other; `crossing` is its key inside the bay, `share` null says nothing of it. */
+  | {
+      readonly kind: 'tension share';
+      readonly bay: string;
+      readonly crossing: string;
+      readonly share: number | null;
+    }
   | {
       readonly kind: 'line holder';
       readonly bay: string;

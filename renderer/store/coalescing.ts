@@ -20,6 +20,8 @@ export function coalescingKey(edits: readonly Edit[]): string | null {
       return `diagonals ${edit.bay} ${fields(edit.change)}`;
     case 'bars':
       return `bars ${edit.bars.join(' ')} ${fields(edit.change)} ${(edit.clear ?? []).join(' ')}`;
+    case 'tension share':
+      return `tension share ${edit.bay} ${edit.crossing}`;
     case 'own stock':
     case 'add bay':
     case 'remove bay':

@@ -103,6 +103,12 @@ export const anyEdit: fc.Arbitrary<Edit> = fc.oneof(
   }),
   fc.record({ kind: fc.constant('join'), crossings: crossingIds, join: fc.option(join) }),
   fc.record({
+    kind: fc.constant('tension share'),
+    bay: bayId,
+    crossing: fc.constantFrom(...CROSSING_KEYS, 'no such crossing', 'constructor', ''),
+    share: fc.option(fc.oneof(fc.constantFrom(-1, 0, 0.5, 1), absurd)),
+  }),
+  fc.record({
     kind: fc.constant('line holder'),
     bay: bayId,
     line: fc.constantFrom('P1', 'P2', 'nothing', 'constructor'),

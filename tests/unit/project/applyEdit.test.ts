@@ -100,6 +100,16 @@ describe('an edit', () => {
     expect(bayOf(applyEdit(welded, { kind: 'join', crossings, join: null }), 'W1')?.joins).toEqual({});
   });
 
+  it('says how taut the partner is at a crossing, and forgets the last of such words without a trace', () => {
+    const at = { kind: 'tension share', bay: 'W1', crossing: 't1.fall+t1.rise' } as const;
+    const taut = applyEdit(made, { ...at, share: 0.6 });
+    expect(bayOf(taut, 'W1')?.tensionShares).toEqual({ 't1.fall+t1.rise': 0.6 });
+    const squeezed = applyEdit(taut, { ...at, crossing: 't2.fall+t2.rise', share: -1 });
+    expect(bayOf(squeezed, 'W1')?.tensionShares).toEqual({ 't1.fall+t1.rise': 0.6, 't2.fall+t2.rise': -1 });
+    expect(applyEdit(taut, { ...at, share: null })).toEqual(made);
+    expect(applyEdit(made, { ...at, bay: 'nowhere', share: 1 })).toBe(made);
+  });
+
   it('says what holds a rail or a purlin', () => {
     const heldBy = { kind: 'vouched', reason: 'sheeting' } as const;
     const rail = applyEdit(made, { kind: 'line holder', bay: 'W1', line: 'G1', heldBy });
@@ -127,6 +137,7 @@ describe('an edit', () => {
       { kind: 'rename bay', bay: 'W1', to: 'W2' },
       { kind: 'join', crossings: [], join: null },
       { kind: 'bars', bars: ['W1/t1.rise', 'W1/t1.fall'], change: {} },
+      { kind: 'tension share', bay: 'W1', crossing: 't1.fall+t1.rise', share: 0.5 },
     ];
     for (const edit of edits) expect(editLabel(edit)).toMatch(/^[A-Z]/);
     expect(editLabel(edits[1] as Edit)).toContain('W2');
@@ -155,6 +166,12 @@ describe('an edit on trial', () => {
   it('is refused for a rail that a lower bay leaves in the air', () => {
     const recipe = { ...wall(6000, [[1000, 'crossed']]), lines: [line('G1', 1500)] };
     expect(tryEdit(made, { kind: 'recipe', bay: 'W1', recipe, what: 'the height' }).ok).toBe(false);
+  });
+
+  it('is refused for a partner squeezed harder than the bar itself', () => {
+    const squeezed = { kind: 'tension share', bay: 'W1', crossing: 't1.fall+t1.rise', share: -1.2 } as const;
+    const outcome = tryEdit(made, squeezed);
+    expect(outcome.ok || outcome.problems[0]?.path).toBe('bays[0].tensionShares.t1.fall+t1.rise');
   });
 
   it('keeps what was typed, spaces and all', () => {

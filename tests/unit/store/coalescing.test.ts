@@ -18,6 +18,8 @@ describe('which edits are one step of undo', () => {
       coalescingKey([{ kind: 'recipe', bay: 'W2', recipe: bay.recipe, what: 'width' }]),
       coalescingKey([{ kind: 'diagonals', bay: 'W1', change: { gusset: 8 } }]),
       coalescingKey([{ kind: 'diagonals', bay: 'W1', change: { grade: 'S275JR' } }]),
+      coalescingKey([{ kind: 'tension share', bay: 'W1', crossing: 't1.fall+t1.rise', share: 1 }]),
+      coalescingKey([{ kind: 'tension share', bay: 'W1', crossing: 't2.fall+t2.rise', share: 1 }]),
       coalescingKey([{ kind: 'bars', bars: ['W1/t1.rise'], change: { roll: 5 } }]),
     ];
     expect(new Set(keys).size).toBe(keys.length);

@@ -1,0 +1,51 @@
+/** Forces, stiffnesses and movements as they are shown. They run over many tens, so three figures count, not decimals. */
+import { grouped } from './figures.ts';
+import type { QuantityStyle } from './quantity.ts';
+import { MM_PER_INCH, N_PER_KIP, type UnitSystem, unitNames } from './unitSystem.ts';
+
+/** N as `22.5 kN` or `5.05 kip`. */
+export function showForce(newtons: number, units: UnitSystem, style: QuantityStyle = 'full'): string {
+  return shown(forceIn(newtons, units), unitNames(units).force, style);
+}
+
+/** N as a number in kN or kip, for charts and fields. */
+export function forceIn(newtons: number, units: UnitSystem): number {
+  return newtons / newtonsPerForceUnit(units);
+}
+
+/** N in one kN or kip. */
+export function newtonsPerForceUnit(units: UnitSystem): number {
+  return units === 'us' ? N_PER_KIP : 1000;
+}
+
+/** N/mm as `62 200 N/mm` or `355 kip/in`. */
+export function showStiffness(
+  newtonsPerMm: number,
+  units: UnitSystem,
+  style: QuantityStyle = 'full',
+): string {
+  const value = units === 'us' ? (newtonsPerMm * MM_PER_INCH) / N_PER_KIP : newtonsPerMm;
+  return shown(value, unitNames(units).stiffness, style);
+}
+
+/** How far something moves under a load, mm as `5.55 mm` or `0.219 in`. */
+export function showMovement(mm: number, units: UnitSystem, style: QuantityStyle = 'full'): string {
+  return units === 'us' ? shown(mm / MM_PER_INCH, 'in', style) : shown(mm, 'mm', style);
+}
+
+/** Below this share of a unit there is nothing to tell: it is a trace of arithmetic. */
+const NOTHING = 5e-6;
+
+/** To three figures, in groups of three digits, never in powers of ten. */
+export function threeFigures(value: number): string {
+  const size = Math.abs(value);
+  if (size < NOTHING) return '0';
+  const rounded = Number(value.toPrecision(3));
+  const decimals = Math.max(0, 2 - Math.floor(Math.log10(Math.abs(rounded))));
+  return grouped(rounded, decimals);
+}
+
+function shown(value: number, unit: string, style: QuantityStyle): string {
+  const figure = threeFigures(value);
+  return style === 'bare' ? figure : `${figure} ${unit}`;
+}
