@@ -41,3 +41,11 @@ export function unit2(a: Vec2): Vec2 | null {
   const l = Math.hypot(a[0], a[1]);
   return l > 0 ? [a[0] / l, a[1] / l] : null;
 }
+
+/** Angle of an undirected line in the plane from the first axis towards the second, degrees, in [0, 180). */
+export function degreesOf(a: Vec2): number {
+  const degrees = (Math.atan2(a[1], a[0]) * 180) / Math.PI;
+  const positive = degrees < 0 ? degrees + 180 : degrees;
+  // A hair below 180 is 0 with rounding.
+  return positive > 180 - 1e-9 ? 0 : positive;
+}

@@ -1,6 +1,6 @@
 import { dot2, type Vec2 } from '../geometry/vector.ts';
 import { motionAbout } from '../section/direction.ts';
-import { AXES, type Axis, type SectionProperties } from '../section/model.ts';
+import { AXES, type Axis, type Radii } from '../section/model.ts';
 import { squareTo } from './directions.ts';
 import type { Governing, Lane, Piece } from './model.ts';
 import type { RuleResult } from './rule.ts';
@@ -10,7 +10,7 @@ const NAMED = Math.cos((0.5 * Math.PI) / 180);
 
 /** The largest slenderness of the spans, the bound for mixed holds, and the user's own lengths where they stand in for these. */
 export function governingOf(
-  section: SectionProperties,
+  section: Radii,
   rule: RuleResult,
   lanes: Readonly<Record<Axis, Lane>>,
   barLength: number,
@@ -71,7 +71,7 @@ function isWorse(each: Governing, worst: Governing): boolean {
   );
 }
 
-function named(section: SectionProperties, free: Vec2 | null): Pick<Governing, 'axis' | 'angle'> {
+function named(section: Radii, free: Vec2 | null): Pick<Governing, 'axis' | 'angle'> {
   if (free === null) return { axis: 'v', angle: null };
   for (const axis of AXES)
     if (Math.abs(dot2(free, motionAbout(section, axis))) >= NAMED) return { axis, angle: null };

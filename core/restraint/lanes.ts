@@ -1,14 +1,14 @@
 import { dot2, type Vec2 } from '../geometry/vector.ts';
 import type { LengthOverride } from '../project/model.ts';
 import { motionAbout } from '../section/direction.ts';
-import type { Axis, SectionProperties } from '../section/model.ts';
+import type { Axis, Radii } from '../section/model.ts';
 import { HOLDS_FROM } from './claims.ts';
 import type { Claim, Held, Lane, LaneCut, Piece, Station } from './model.ts';
 
 /** One section axis as a strip along the bar, cut where a station stops its motion. */
 export function laneOf(
   axis: Axis,
-  section: SectionProperties,
+  section: Radii,
   stations: readonly Station[],
   overrides: readonly LengthOverride[],
 ): Lane {
@@ -39,7 +39,7 @@ export function stopsMotion(held: Held, motion: Vec2): boolean {
   return held.ways === 2 || (held.ways === 1 && Math.abs(dot2(held.direction, motion)) >= HOLDS_FROM);
 }
 
-function radiusOf(section: SectionProperties, axis: Axis): number {
+function radiusOf(section: Radii, axis: Axis): number {
   switch (axis) {
     case 'x':
       return section.rx;

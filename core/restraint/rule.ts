@@ -4,7 +4,7 @@
  */
 import { dot2, type Vec2 } from '../geometry/vector.ts';
 import { radiusFor } from '../section/direction.ts';
-import type { SectionProperties } from '../section/model.ts';
+import type { Radii } from '../section/model.ts';
 import { areOneDirection, sameDirection, singleDirections, squareTo } from './directions.ts';
 import type { Held, MixedBound, SpanCheck } from './model.ts';
 
@@ -29,7 +29,7 @@ const NEARLY_SQUARE = Math.sin((10 * Math.PI) / 180);
  * @param stations in order along the bar, both ends included
  * @returns every span check between two stations, the bound for mixed holds if there is one, and the largest slenderness
  */
-export function freeDirectionRule(section: SectionProperties, stations: readonly RuleStation[]): RuleResult {
+export function freeDirectionRule(section: Radii, stations: readonly RuleStation[]): RuleResult {
   const spans = spanChecks(section, stations);
   const directions = singleDirections(stations.slice(1, -1).map((station) => station.held));
   const bound = areOneDirection(directions) ? null : mixedBound(section, stations, directions);
@@ -38,14 +38,12 @@ export function freeDirectionRule(section: SectionProperties, stations: readonly
 }
 
 /** Between every two stations: free every way, in one direction, or not at all. */
-export const spanChecks = (
-  section: SectionProperties,
-  stations: readonly RuleStation[],
-): readonly SpanCheck[] => spansWhile(section, stations, areOneDirection);
+export const spanChecks = (section: Radii, stations: readonly RuleStation[]): readonly SpanCheck[] =>
+  spansWhile(section, stations, areOneDirection);
 
 /** Spans from every station on, for as long as the holds between pass for one direction. */
 function spansWhile(
-  section: SectionProperties,
+  section: Radii,
   stations: readonly RuleStation[],
   isOne: (between: readonly Vec2[]) => boolean,
 ): readonly SpanCheck[] {
@@ -65,7 +63,7 @@ function spansWhile(
   return checks;
 }
 
-function spanCheck(section: SectionProperties, from: number, to: number, held: readonly Vec2[]): SpanCheck {
+function spanCheck(section: Radii, from: number, to: number, held: readonly Vec2[]): SpanCheck {
   const length = to - from;
   if (held.length === 0)
     return { from, to, freeDirection: null, radius: section.rv, slenderness: length / section.rv };
@@ -80,7 +78,7 @@ function spanCheck(section: SectionProperties, from: number, to: number, held: r
 }
 
 function mixedBound(
-  section: SectionProperties,
+  section: Radii,
   stations: readonly RuleStation[],
   directions: readonly Vec2[],
 ): MixedBound {
@@ -99,11 +97,7 @@ function mixedBound(
 }
 
 /** (a) The holds of one direction, and the stations that hold both ways: leaving the others out is safe. */
-function oneDirectionAlone(
-  section: SectionProperties,
-  stations: readonly RuleStation[],
-  direction: Vec2,
-): MixedBound {
+function oneDirectionAlone(section: Radii, stations: readonly RuleStation[], direction: Vec2): MixedBound {
   const kept = stations.filter(({ held }) => holds(held, direction));
   // All that is kept lies within 10° of the one direction, and counts as one with it, even where two of them lie farther apart.
   const spans = spansWhile(section, kept, () => true);
@@ -119,7 +113,7 @@ function oneDirectionAlone(
 
 /** (b) Bending energy is at least E Iv ∫|w″|², and each of two perpendicular parts of w is a bar over pins at most g apart. */
 function twoSquareDirections(
-  section: SectionProperties,
+  section: Radii,
   stations: readonly RuleStation[],
   first: Vec2,
   second: Vec2,

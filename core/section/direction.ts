@@ -1,5 +1,5 @@
 import type { Vec2 } from '../geometry/vector.ts';
-import type { Axis, SectionProperties } from './model.ts';
+import type { Axis, Radii, SectionProperties } from './model.ts';
 
 /**
  * Second moment that resists bowing along a direction, ∫(p·n)² dA about the centroid, mm⁴.
@@ -19,13 +19,13 @@ export function inertiaFor(p: SectionProperties, n: Vec2): number {
  *
  * @param n unit direction of motion, [along the shorter leg, along the longer leg]
  */
-export function radiusFor(p: SectionProperties, n: Vec2): number {
+export function radiusFor(p: Radii, n: Vec2): number {
   const product = -(p.ru * p.ru - p.rv * p.rv) * Math.sin(p.alpha) * Math.cos(p.alpha);
   return Math.sqrt(n[0] * n[0] * p.ry * p.ry + n[1] * n[1] * p.rx * p.rx + 2 * n[0] * n[1] * product);
 }
 
 /** Unit vector in which the bar moves when it bends about an axis: at right angles to it. */
-export function motionAbout(p: SectionProperties, axis: Axis): Vec2 {
+export function motionAbout(p: Pick<Radii, 'alpha'>, axis: Axis): Vec2 {
   switch (axis) {
     case 'x':
       return [0, 1];

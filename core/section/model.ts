@@ -46,3 +46,6 @@ export interface SectionProperties {
   /** Warping constant about the shear centre Σb³t³/36, mm⁶. */
   readonly Iw: number;
 }
+
+/** What slenderness asks of a section. */
+export type Radii = Pick<SectionProperties, 'alpha' | 'rx' | 'ry' | 'ru' | 'rv'>;

@@ -50,18 +50,32 @@ function fieldsAtNodes(mesh: Mesh, unknowns: Unknowns, x: Float64Array): readonl
   });
 }
 
-/** A solution read as the shape of one bar. */
+/** Largest displacement among the nodes, before anything is scaled. */
+export function largestMovement(mesh: Mesh, unknowns: Unknowns, solution: Float64Array): number {
+  return fieldsAtNodes(mesh, unknowns, solution).reduce(
+    (most, { w: [a = 0, b = 0] }) => Math.max(most, Math.hypot(a, b)),
+    0,
+  );
+}
+
+/**
+ * A solution read as the shape of one bar.
+ *
+ * @param rest a movement that is none, in the solution's own measure
+ */
 export function modeOf(
   problem: BarProblem,
   mesh: Mesh,
   unknowns: Unknowns,
   solution: Float64Array,
+  rest = 0,
 ): BucklingMode {
   const nodes = fieldsAtNodes(mesh, unknowns, solution);
   const { E, section, length } = problem;
   const points = nodes.map((node) => pointOf(problem, node));
   const largest = largestPoint(problem, nodes, points);
   const size = sizeOf(largest);
+  if (!(size > rest)) return atRest(points);
   // Of the two signs take the one that moves towards +x, or +y, where it moves most.
   const [x, y] = largest.displacement;
   const scale = x + 1e-9 * y < 0 ? -1 / size : 1 / size;
@@ -85,6 +99,16 @@ export function modeOf(
     directionAtLargest: [x * scale, y * scale],
   };
 }
+
+const atRest = (points: readonly ModePoint[]): BucklingMode => ({
+  shape: points.map(({ at }) => ({ at, displacement: [0, 0], twist: 0 })),
+  energyAboutV: 0,
+  energyAboutU: 0,
+  halfWaves: 0,
+  symmetry: 'symmetric',
+  largestAt: 0,
+  directionAtLargest: [0, 0],
+});
 
 /** The centroid's displacement; from the shear centre to the centroid it is θ × (−s). */
 function pointOf(

@@ -74,10 +74,10 @@ export interface CriticalLoad {
 export interface BucklingMode {
   /** Evenly spaced places along the bar, mm, with the displacement of the centroid [along x, along y], largest 1, and the twist, rad per mm of that. */
   readonly shape: readonly ModePoint[];
-  /** Share of the bending energy about v and about u; they add up to 1. */
+  /** Share of the bending energy about v and about u; they add up to 1, or to 0 for a bar that stays at rest. */
   readonly energyAboutV: number;
   readonly energyAboutU: number;
-  /** Half-waves in the part with most bending energy. */
+  /** Half-waves in the part with most bending energy; 0 at rest. */
   readonly halfWaves: number;
   readonly symmetry: 'symmetric' | 'antisymmetric' | 'unsymmetric';
   /** Where it moves most, mm from end i, and which way there. */

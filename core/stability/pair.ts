@@ -6,7 +6,7 @@ import type { Vec2 } from '../geometry/vector.ts';
 import { LoadedSystem } from './assembly.ts';
 import { largestShare, RootSearch } from './criticalLoad.ts';
 import { type Mesh, type MeshNode, meshOf, principalMotions } from './mesh.ts';
-import { modeOf, nullShape, PARTS } from './mode.ts';
+import { largestMovement, modeOf, nullShape, PARTS } from './mode.ts';
 import { type BarProblem, type BucklingMode, type CriticalLoad, PINNED } from './model.ts';
 import { type SpecialNode, unknownsOf } from './unknowns.ts';
 
@@ -46,12 +46,20 @@ export function pairCriticalLoad(
   return { factor, N: factor * (own > 0 ? own : others), second, trials: search.trials };
 }
 
-/** The shape of the bar in question when the pair buckles. */
+/** The shape of the bar in question when the pair buckles: at rest, all zeros, when its partner buckles by itself. */
 export function pairMode(pair: PairProblem, factor: number): BucklingMode {
-  const { system, mesh, unknowns } = systemOf(pair, PARTS);
+  const { system, mesh, unknowns, partnerMesh, partnerUnknowns } = systemOf(pair, PARTS);
   system.tried(factor * (1 - 1e-9));
-  return modeOf(pair.bar.problem, mesh, unknowns, nullShape(system));
+  const shape = nullShape(system);
+  const whole = Math.max(
+    largestMovement(mesh, unknowns, shape),
+    largestMovement(partnerMesh, partnerUnknowns, shape),
+  );
+  return modeOf(pair.bar.problem, mesh, unknowns, shape, whole * AT_REST);
 }
+
+/** A bar that moves by less than this share of its partner's movement is at rest. */
+const AT_REST = 1e-5;
 
 /** Infinite for a bar that nothing presses. */
 const eulerFactor = ({ E, length, section }: BarProblem, share: number): number =>
@@ -59,7 +67,7 @@ const eulerFactor = ({ E, length, section }: BarProblem, share: number): number 
 
 function systemOf({ bar, partner }: PairProblem, split: number) {
   const mesh = meshOf(withPlace(bar), split);
-  const partnerMesh = meshOf(withPlace(partner));
+  const partnerMesh = meshOf(withPlace(partner), split);
   // The shared displacement comes last, so that it lengthens one row alone.
   const shared = freeOf(mesh) - 1 + hinges(bar) + freeOf(partnerMesh) - 1 + hinges(partner);
   const unknowns = unknownsOf(mesh, 0, specialNode(bar, mesh, shared));
@@ -68,7 +76,7 @@ function systemOf({ bar, partner }: PairProblem, split: number) {
     { problem: bar.problem, mesh, unknowns },
     { problem: partner.problem, mesh: partnerMesh, unknowns: partnerUnknowns },
   ]);
-  return { system, mesh, partnerMesh, unknowns };
+  return { system, mesh, unknowns, partnerMesh, partnerUnknowns };
 }
 
 const freeOf = ({ nodes }: Mesh): number =>

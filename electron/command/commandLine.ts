@@ -1,9 +1,11 @@
 import { Command, CommanderError } from 'commander';
 import { oneLine } from '../../core/documents/oneLine.ts';
 import { addAssessCommand } from './assessCommand.ts';
+import { addBowCommand } from './bowCommand.ts';
 import { endingOn } from './ending.ts';
 import { BAD_INPUT, type ExitCode, FINE } from './exitCode.ts';
 import { addNewCommand } from './newCommand.ts';
+import { addPushCommand } from './pushCommand.ts';
 import { addReportCommand } from './reportCommand.ts';
 import { addScheduleCommand } from './scheduleCommand.ts';
 import { addSectionCommand } from './sectionCommand.ts';
@@ -14,7 +16,8 @@ const AFTER_HELP = `
 Exit codes
   0  fine
   1  a finding breaks a limit; of shortlist: nothing in the list passes
-  2  bad input: a file that cannot be read or written, a section in no stock list, an option that makes no sense
+  2  bad input: a file that cannot be read or written, a section in no stock list, an option that makes no sense;
+     of bow: a case that cannot be understood (the others are solved)
 
 Results go to the standard output, everything else to the error stream. Bare lengths are mm.
 
@@ -22,7 +25,9 @@ Examples
   tautline new wall-bay --width 6000 --tier 4200:crossed --tier 3600:crossed --crossings bolted -o shed.json
   tautline schedule shed.json
   tautline shortlist --length 4000 --crossing joined
-  tautline report shed.json -o shed.html`;
+  tautline report shed.json -o shed.html
+  tautline push shed.json --bar D1 --at 2500
+  tautline bow cases.json`;
 
 /**
  * Runs one command.
@@ -52,6 +57,8 @@ export async function runCommandLine(words: readonly string[], where: Terminal):
   addShortlistCommand(program, ending);
   addNewCommand(program, ending);
   addReportCommand(program, ending);
+  addBowCommand(program, ending);
+  addPushCommand(program, ending);
   try {
     await program.parseAsync(words, { from: 'user' });
     return ending.code();

@@ -1,9 +1,18 @@
+import type { CaseProblem } from '../../core/cases/model.ts';
 import type { ProjectProblem } from '../../core/project/problem.ts';
 
 /** What a command could not do, as plain data. */
 export type Trouble =
   | { readonly kind: 'unreadable'; readonly file: string; readonly why: string }
   | { readonly kind: 'no project'; readonly file: string; readonly problems: readonly ProjectProblem[] }
+  | { readonly kind: 'no JSON'; readonly file: string; readonly why: string }
+  | { readonly kind: 'no cases'; readonly file: string; readonly problem: CaseProblem }
+  | {
+      readonly kind: 'bad case';
+      readonly file: string;
+      readonly id: string;
+      readonly problems: readonly CaseProblem[];
+    }
   | { readonly kind: 'unwritable'; readonly file: string; readonly why: string }
   | { readonly kind: 'would overwrite'; readonly file: string }
   | { readonly kind: 'no such section'; readonly typed: string; readonly nearest: readonly string[] }
@@ -27,6 +36,17 @@ export function troubleText(trouble: Trouble): string {
     case 'no project':
       return trouble.problems
         .map(({ path, what, todo }) => `${trouble.file}${path === '' ? '' : `: ${path}`}: ${what} ${todo}`)
+        .join('\n');
+    case 'no JSON':
+      return `${trouble.file}: is no JSON (${trouble.why}). Check that it is the file meant, and whole.`;
+    case 'no cases':
+      return `${trouble.file}: ${trouble.problem.what} ${trouble.problem.todo}`;
+    case 'bad case':
+      return trouble.problems
+        .map(
+          ({ path, what, todo }) =>
+            `${trouble.file}: ${trouble.id}${path === '' ? '' : `: ${path}`}: ${what} ${todo}`,
+        )
         .join('\n');
     case 'unwritable':
       return `${trouble.file}: cannot be written (${trouble.why}). Check the folder and your rights to it; nothing was changed.`;

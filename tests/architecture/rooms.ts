@@ -10,7 +10,7 @@ export const ROOMS: readonly (readonly string[])[] = [
   ['stability'],
   ['frame'],
   ['bowing'],
-  ['shortlist'],
+  ['cases', 'shortlist'],
   ['findings'],
   ['documents'],
   ['assess'],
