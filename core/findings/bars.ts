@@ -33,7 +33,7 @@ function unknownSection(subject: FindingSubject, group: readonly Judged[]): Find
   if (!first) throw new Error('a group of none');
   const { section } = first.angle.spec;
   const near = first.angle.nearest;
-  const path = bayPath(subject.project, first.bar.bay);
+  const path = bayPath(subject, first.bar.bay);
   return {
     ...blank,
     id: `section:${first.bar.bay}:${section}`,
@@ -64,7 +64,7 @@ function noLength(subject: FindingSubject, { bar, angle }: Judged): Finding {
     value: angle.cut.total,
     limit: 0,
     quantity: 'length',
-    path: `${bayPath(subject.project, bar.bay)}.diagonals.ends.setBack`,
+    path: `${bayPath(subject, bar.bay)}.diagonals.ends.setBack`,
   };
 }
 
@@ -117,6 +117,6 @@ function overrideFinding(subject: FindingSubject, { bar, angle, restraint }: Jud
     bars: [bar.id],
     title: `${bar.mark} takes a length set by hand`,
     detail: `${said.join('; ')}.`,
-    path: `${bayPath(subject.project, bar.bay)}.bars.${bar.key}.overrides`,
+    path: `${bayPath(subject, bar.bay)}.bars.${bar.key}.overrides`,
   };
 }

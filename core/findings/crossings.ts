@@ -28,7 +28,7 @@ function findingsAt(subject: FindingSubject, crossing: Crossing): readonly Findi
     bars: [crossing.a, crossing.b],
     crossing: crossing.id,
     breaksLimit: false,
-    path: `${bayPath(subject.project, crossing.bay)}.joins.${crossing.key}`,
+    path: `${bayPath(subject, crossing.bay)}.joins.${crossing.key}`,
   } as const;
   if (crossing.join === null)
     found.push({
@@ -103,7 +103,7 @@ function unmarkedLinesFinding(subject: FindingSubject, bay: string, crossings: r
     value: crossings.length,
     limit: null,
     quantity: 'none',
-    path: `${bayPath(subject.project, bay)}.joins`,
+    path: `${bayPath(subject, bay)}.joins`,
   };
 }
 

@@ -5,14 +5,15 @@ import { holderFindings } from './holders.ts';
 import type { Finding, Severity } from './model.ts';
 import { patternFindings } from './patterns.ts';
 import { slendernessFindings } from './slenderness.ts';
-import type { FindingSubject } from './subject.ts';
+import type { FindingInput, FindingSubject } from './subject.ts';
 
 const RANK: Readonly<Record<Severity, number>> = { 'must fix': 0, 'look into': 1, note: 2 };
 
 /** All findings, must-fix first, then bay by bay in the order of the project. */
-export function findingsOf(subject: FindingSubject): readonly Finding[] {
-  const order = new Map(subject.layout.bays.map((bay, index) => [bay.id, index]));
-  const place = (finding: Finding) => order.get(finding.bay) ?? 0;
+export function findingsOf(input: FindingInput): readonly Finding[] {
+  const places = new Map(input.project.bays.map((bay, index) => [bay.id, index]));
+  const subject: FindingSubject = { ...input, places };
+  const place = (finding: Finding) => places.get(finding.bay) ?? 0;
   return [
     ...barFindings(subject),
     ...slendernessFindings(subject),

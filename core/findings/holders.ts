@@ -46,7 +46,7 @@ function holderFinding(subject: FindingSubject, bay: string, group: readonly Idl
     value: null,
     limit: null,
     quantity: 'none',
-    path: holder?.line ? `${bayPath(subject.project, bay)}.recipe` : null,
+    path: holder?.line ? `${bayPath(subject, bay)}.recipe` : null,
   } as const;
   const { reason } = claim;
   switch (reason.kind) {

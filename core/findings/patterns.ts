@@ -19,7 +19,7 @@ const STEEPEST = 60;
 /** Whether the pattern of a bay lets "tension only" be true, and whether the slopes are usual. */
 export function patternFindings(subject: FindingSubject): readonly Finding[] {
   return subject.layout.bays.flatMap((layout) => {
-    const bay = subject.project.bays.find((each) => each.id === layout.id);
+    const bay = subject.project.bays[subject.places.get(layout.id) ?? -1];
     if (!bay) return [];
     const all = judgedIn(subject, layout);
     return [...tensionFindings(subject, bay, layout, all), ...slopeFindings(layout, all)];
@@ -51,7 +51,7 @@ function tensionFindings(
       value: null,
       limit: null,
       quantity: 'none',
-      path: `${bayPath(subject.project, bay.id)}.recipe`,
+      path: `${bayPath(subject, bay.id)}.recipe`,
     } as const;
     if (peaked.has(panel))
       return [

@@ -17,7 +17,12 @@ export interface Judged {
 }
 
 /** What findings are made from. */
-export interface FindingSubject {
+export interface FindingSubject extends FindingInput {
+  /** Place of each bay in the project. */
+  readonly places: ReadonlyMap<string, number>;
+}
+
+export interface FindingInput {
   readonly project: Project;
   readonly practice: Practice;
   readonly layout: Layout;
@@ -58,6 +63,6 @@ export function grouped<T>(items: readonly T[], keyOf: (item: T) => string): rea
 }
 
 /** "bays[2]" for paths into the project file. */
-export function bayPath(project: Project, bay: string): string {
-  return `bays[${project.bays.findIndex((each) => each.id === bay)}]`;
+export function bayPath(subject: FindingSubject, bay: string): string {
+  return `bays[${subject.places.get(bay) ?? -1}]`;
 }

@@ -44,6 +44,7 @@ export function meetingsIn(plane: Plane, segments: readonly Segment[]): readonly
     for (let k = position + 1; k < sorted.length; k++) {
       const second = sorted[k];
       if (!second || second.least > first.most) break;
+      if (!first.segment.isDiagonal && !second.segment.isDiagonal) continue;
       const [p, q] = first.order < second.order ? [first, second] : [second, first];
       const meeting = meetingOf(p, q);
       if (meeting) found.push({ meeting, order: p.order * segments.length + q.order });
@@ -80,9 +81,9 @@ function flattened(plane: Plane, segment: Segment, order: number): Flat {
   };
 }
 
+/** Of two bars of which one at least is a diagonal. */
 function meetingOf(p: Flat, q: Flat): Meeting | null {
   const [a, b] = p.segment.isDiagonal ? [p, q] : [q, p];
-  if (!a.segment.isDiagonal) return null;
   const { i, j } = a.segment;
   if (i === b.segment.i || i === b.segment.j || j === b.segment.i || j === b.segment.j) return null;
   const d: readonly [number, number] = [a.to[0] - a.from[0], a.to[1] - a.from[1]];

@@ -39,19 +39,17 @@ export class NodeRegister {
     return made;
   }
 
+  /** Looks in the cells within reach of a point: one as a rule, eight at a corner. */
   #near(at: Vec3): Merging | null {
-    for (const cell of cellsAround(at))
-      for (const node of this.#cells.get(cell) ?? []) if (distance(node.at, at) <= SAME_PLACE) return node;
+    const [x, y, z] = at;
+    for (let i = index(x - SAME_PLACE); i <= index(x + SAME_PLACE); i++)
+      for (let j = index(y - SAME_PLACE); j <= index(y + SAME_PLACE); j++)
+        for (let k = index(z - SAME_PLACE); k <= index(z + SAME_PLACE); k++)
+          for (const node of this.#cells.get(`${i},${j},${k}`) ?? [])
+            if (distance(node.at, at) <= SAME_PLACE) return node;
     return null;
   }
 }
 
 const index = (value: number): number => Math.floor(value / CELL);
 const cellOf = (at: Vec3): string => `${index(at[0])},${index(at[1])},${index(at[2])}`;
-
-/** The cells within reach of a point: one as a rule, eight at a corner. */
-function cellsAround(at: Vec3): readonly string[] {
-  const spread = at.map((value) => [...new Set([index(value - SAME_PLACE), index(value + SAME_PLACE)])]);
-  const [xs = [], ys = [], zs = []] = spread;
-  return xs.flatMap((x) => ys.flatMap((y) => zs.map((z) => `${x},${y},${z}`)));
-}

@@ -4,6 +4,7 @@
  */
 import { cross, dot, length } from '../geometry/vector.ts';
 import type { Bar, BarId, BayLayout, Layout, NodeSupport } from '../layout/model.ts';
+import type { TrailStep } from './model.ts';
 
 export type NodeHolding =
   | { readonly kind: 'support'; readonly support: NodeSupport; readonly below: string | null }
@@ -16,9 +17,12 @@ export interface Arm {
 }
 
 export interface BayHolding {
+  readonly bay: BayLayout;
   readonly held: ReadonlyMap<string, NodeHolding>;
   /** Eaves whose bay below does not hold them: node to that bay. */
   readonly freeBelow: ReadonlyMap<string, string>;
+  /** Trails from nodes, kept as they are followed: hundreds of holds lead down the same few. */
+  readonly trails: Map<string, readonly TrailStep[]>;
 }
 
 export type Holdings = ReadonlyMap<string, BayHolding>;
@@ -77,7 +81,7 @@ function grown(
       if (by)
         hold(node, { kind: 'bars', by, depth: 1 + Math.max(depthOf(held, by[0]), depthOf(held, by[1])) });
     }
-  return { held, freeBelow };
+  return { bay, held, freeBelow, trails: new Map() };
 }
 
 function depthOf(held: ReadonlyMap<string, NodeHolding>, arm: Arm): number {

@@ -6,36 +6,36 @@ import type { TrailStep } from './model.ts';
 
 /** From a node down to a support. Ends in a step that is held, or free: every node on the way stands on nodes held before it. */
 export function trailFromNode(layout: Layout, holding: BayHolding, node: string): readonly TrailStep[] {
-  const steps: TrailStep[] = [];
-  let at = node;
-  for (;;) {
-    const label = labelOf(layout, at);
-    const how = holding.held.get(at);
-    if (!how) {
-      const below = holding.freeBelow.get(at);
-      const text = below ? `${label}: ${below} below does not hold it` : `${label}: nothing holds it`;
-      return [...steps, { text, bar: null, node: at, state: 'free' }];
-    }
-    if (how.kind === 'support')
-      return [
-        ...steps,
-        { text: `${label}: ${supportText(how.support.kind, how.below)}`, bar: null, node: at, state: 'held' },
-      ];
-    steps.push({
+  const known = holding.trails.get(node);
+  if (known) return known;
+  const trail = followed(layout, holding, node);
+  holding.trails.set(node, trail);
+  return trail;
+}
+
+function followed(layout: Layout, holding: BayHolding, node: string): readonly TrailStep[] {
+  const label = labelOf(layout, node);
+  const how = holding.held.get(node);
+  if (!how) {
+    const below = holding.freeBelow.get(node);
+    const text = below ? `${label}: ${below} below does not hold it` : `${label}: nothing holds it`;
+    return [{ text, bar: null, node, state: 'free' }];
+  }
+  if (how.kind === 'support')
+    return [
+      { text: `${label}: ${supportText(how.support.kind, how.below)}`, bar: null, node, state: 'held' },
+    ];
+  const down = shorterArm(holding, how.by);
+  return [
+    {
       text: `${label}, held by ${barName(layout, how.by[0].bar)} and ${barName(layout, how.by[1].bar)}`,
       bar: null,
-      node: at,
+      node,
       state: 'on the way',
-    });
-    const down = shorterArm(holding, how.by);
-    steps.push({
-      text: `along ${barName(layout, down.bar)}`,
-      bar: down.bar,
-      node: null,
-      state: 'on the way',
-    });
-    at = down.node;
-  }
+    },
+    { text: `along ${barName(layout, down.bar)}`, bar: down.bar, node: null, state: 'on the way' },
+    ...trailFromNode(layout, holding, down.node),
+  ];
 }
 
 function shorterArm(holding: BayHolding, by: readonly [Arm, Arm]): Arm {
@@ -109,11 +109,10 @@ export function lineHolding(layout: Layout, holdings: Holdings, bar: Bar): LineH
       };
     case 'bay': {
       const other = info.heldBy.bay;
-      const bay = layout.bays.find((each) => each.id === other);
       const holding = holdings.get(other);
-      if (!bay || !holding) return fail(`${other} is not in this project`, null);
+      if (!holding) return fail(`${other} is not in this project`, null);
       if (other === bar.bay) return fail(`${other} is its own bay and has no panel point on this line`, null);
-      const points = bay.diagonals.flatMap((id) => {
+      const points = holding.bay.diagonals.flatMap((id) => {
         const diagonal = layout.bars.get(id);
         return diagonal ? [diagonal.i, diagonal.j] : [];
       });
