@@ -13,6 +13,8 @@ import { scheduleCsv } from '../../core/documents/scheduleCsv.ts';
 import type { Project } from '../../core/project/model.ts';
 import { remediesFor } from '../../core/remedies/remedies.ts';
 import { shortlist } from '../../core/shortlist/shortlist.ts';
+import { relianceOf } from '../../core/study/reliance.ts';
+import { pushOf, studyOf } from '../../core/study/study.ts';
 import type { AssessApi } from './assessApi.ts';
 import { rememberedAssess } from './memory.ts';
 import { joinReadings } from './readings.ts';
@@ -36,6 +38,9 @@ const api: AssessApi = {
   },
   readings: (snapshot, crossing) => joinReadings(assessed(snapshot), crossing, assessFresh),
   shortlist: (snapshot, bars, options) => shortlist(assessed(snapshot), catalogues, bars, options),
+  study: (snapshot, bar) => studyOf(assessed(snapshot), bar),
+  push: (snapshot, bar, at) => pushOf(assessed(snapshot), bar, at),
+  reliance: (snapshot, bay) => relianceOf(assessed(snapshot), bay, catalogues),
   stock: (catalogue, own) => ({
     name: catalogues[catalogue].standard,
     source: catalogues[catalogue].source,

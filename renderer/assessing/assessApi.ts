@@ -1,10 +1,12 @@
 /** What the workers do for the window. Everything that crosses is plain data. */
 import type { Assessment } from '../../core/assessment.ts';
 import type { CatalogueId, OwnAngle } from '../../core/catalogue/model.ts';
+import type { PushTest } from '../../core/frame/pushTest.ts';
 import type { BarId, CrossingId } from '../../core/layout/model.ts';
 import type { Join, Project } from '../../core/project/model.ts';
 import type { Remedy } from '../../core/remedies/model.ts';
 import type { Shortlist, ShortlistOptions } from '../../core/shortlist/model.ts';
+import type { BarStudy, Reliance } from '../../core/study/model.ts';
 
 /** A project with a number of its own, by which a worker knows whether it has assessed it already. */
 export interface Snapshot {
@@ -59,6 +61,10 @@ export interface AssessApi {
   remedies(snapshot: Snapshot, finding: string): readonly Remedy[];
   readings(snapshot: Snapshot, crossing: CrossingId): readonly JoinReading[];
   shortlist(snapshot: Snapshot, bars: readonly BarId[], options: ShortlistOptions): Shortlist;
+  study(snapshot: Snapshot, bar: BarId): BarStudy | null;
+  /** The bar pushed at a place, mm from its end i. */
+  push(snapshot: Snapshot, bar: BarId, at: number): PushTest | null;
+  reliance(snapshot: Snapshot, bay: string): readonly Reliance[];
   stock(catalogue: CatalogueId, own: readonly OwnAngle[]): StockChoices;
   /** One HTML document that stands alone. */
   report(snapshot: Snapshot, print: { readonly date: string; readonly fonts: string }): string;

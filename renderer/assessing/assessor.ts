@@ -1,7 +1,8 @@
 /**
  * Keeps the figures in step with the project. One worker assesses, newest project first: while it works, only the latest
  * request waits, and a result for a project that is no longer wanted is dropped. A second worker tries things out
- * (remedies, joins, shortlists, documents), so that a long trial never keeps the figures waiting.
+ * (remedies, joins, shortlists, documents), so that a long trial never keeps the figures waiting. A third looks closer at what is
+ * chosen (its mode, a push), since a hand that pushes cannot wait for trials.
  */
 import { type Remote, wrap } from 'comlink';
 import type { StoreApi } from 'zustand/vanilla';
@@ -11,6 +12,7 @@ import { settled } from '../store/selection.ts';
 import { presentProject, shownAssessment } from '../store/shown.ts';
 import type { Assessed, WindowState } from '../store/windowState.ts';
 import type { AssessApi, Snapshot } from './assessApi.ts';
+import { newestFirst } from './newestFirst.ts';
 
 export interface Assessor {
   /** Begins to follow the store; returns how to stop. */
@@ -21,8 +23,23 @@ export interface Assessor {
   ask<T>(
     question: (api: Remote<AssessApi>, snapshotOf: (project: Project) => Snapshot) => Promise<T>,
   ): Promise<T>;
+  /** Asks the third worker. Of each kind only the newest question waits; one that was overtaken is answered with 'overtaken'. */
+  look<T>(
+    kind: LookKind,
+    question: (api: Remote<AssessApi>, snapshotOf: (project: Project) => Snapshot) => Promise<T>,
+  ): Promise<T | 'overtaken'>;
   /** The remedies of a finding of that project, worked out once. */
   remedies(project: Project, finding: string): Promise<readonly Remedy[]>;
+}
+
+/** Closer looks, the most pressing first. */
+const LOOK_KINDS = ['push', 'study', 'reliance'] as const;
+export type LookKind = (typeof LOOK_KINDS)[number];
+
+interface LookWorker {
+  readonly worker: AssessWorker;
+  /** Never kept; broken when the worker is, so that no question waits for good. */
+  readonly broken: Promise<never>;
 }
 
 export interface AssessWorker {
@@ -40,6 +57,7 @@ export function createAssessor(
   const snapshotOf = numberedSnapshots();
   let figures: AssessWorker | null = null;
   let trials: AssessWorker | null = null;
+  let looks: LookWorker | null = null;
   let running = false;
   /** A project that could not be assessed is not tried again by itself; another one is. */
   let failedOn: Project | null = null;
@@ -96,6 +114,26 @@ export function createAssessor(
     return question(trials.api, snapshotOf);
   };
 
+  const inTurn = newestFirst(LOOK_KINDS);
+  const look: Assessor['look'] = (kind, question) =>
+    inTurn(kind, () => {
+      looks ??= lookWorker();
+      return Promise.race([question(looks.worker.api, snapshotOf), looks.broken]);
+    });
+  const lookWorker = (): LookWorker => {
+    const worker = makeWorker();
+    const broken = new Promise<never>((_, reject) => {
+      worker.onBroken((what) => {
+        worker.end();
+        if (looks?.worker === worker) looks = null;
+        reject(new Error(what));
+      });
+    });
+    // Nothing may be asked of it when it breaks.
+    broken.catch(() => undefined);
+    return { worker, broken };
+  };
+
   const known = new WeakMap<Project, Map<string, Promise<readonly Remedy[]>>>();
 
   return {
@@ -106,8 +144,10 @@ export function createAssessor(
         stop();
         figures?.end();
         trials?.end();
+        looks?.worker.end();
         figures = null;
         trials = null;
+        looks = null;
         running = false;
       };
     },
@@ -117,6 +157,7 @@ export function createAssessor(
       follow();
     },
     ask,
+    look,
     remedies: (project, finding) => {
       const ofProject = known.get(project) ?? new Map<string, Promise<readonly Remedy[]>>();
       known.set(project, ofProject);
