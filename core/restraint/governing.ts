@@ -2,7 +2,7 @@ import { dot2, type Vec2 } from '../geometry/vector.ts';
 import { motionAbout } from '../section/direction.ts';
 import { AXES, type Axis, type Radii } from '../section/model.ts';
 import { squareTo } from './directions.ts';
-import type { Governing, Lane, Piece } from './model.ts';
+import type { Governing, Lane, MixedBound, Piece, SpanCheck } from './model.ts';
 import type { RuleResult } from './rule.ts';
 
 /** A direction this near to an axis's motion is called by the axis: half a degree. */
@@ -15,56 +15,54 @@ export function governingOf(
   lanes: Readonly<Record<Axis, Lane>>,
   barLength: number,
 ): Governing {
-  const candidates: Governing[] = rule.spans.map((span) => ({
-    ...named(section, span.freeDirection),
-    length: span.to - span.from,
-    radius: span.radius,
-    slenderness: span.slenderness,
-    from: span.from,
-    to: span.to,
-    basis: 'span',
-    freeDirection: span.freeDirection,
-  }));
-  if (rule.bound)
-    candidates.push({
-      ...named(section, rule.bound.freeDirection),
-      length: rule.bound.length,
-      radius: rule.bound.radius,
-      slenderness: rule.bound.slenderness,
-      from: 0,
-      to: barLength,
-      basis: 'mixed bound',
-      freeDirection: rule.bound.freeDirection,
-    });
   const overridden = AXES.map((axis) => lanes[axis]).filter((lane) => lane.override);
+  if (overridden.length === 0) return byTheRule(section, rule, barLength);
+  const candidates = rule.spans.map((span) => ofSpan(section, span));
+  if (rule.bound) candidates.push(ofBound(section, rule.bound, barLength));
   const standing = candidates.filter((each) => !overridden.some((lane) => lane.axis === each.axis));
   // A span that is named by an overridden axis falls away, and the other axes it also stood for must not fall with it.
-  const others =
-    overridden.length === 0 ? [] : AXES.map((axis) => lanes[axis]).filter((lane) => !lane.override);
-  const alone = others.map(
-    (lane): Governing => ({ ...longestPiece(lane), ...laneBowing(lane), basis: 'span' }),
-  );
-  const own = overridden.map(
-    (lane): Governing => ({ from: 0, to: barLength, ...laneBowing(lane), basis: 'override' }),
-  );
+  const alone = AXES.map((axis) => lanes[axis])
+    .filter((lane) => !lane.override)
+    .map((lane) => ofLane(lane, longestPiece(lane), 'span'));
+  const own = overridden.map((lane) => ofLane(lane, { from: 0, to: barLength }, 'override'));
   return [...standing, ...alone, ...own].reduce((worst, each) => (isWorse(each, worst) ? each : worst));
 }
 
-const laneBowing = (lane: Lane) => ({
-  axis: lane.axis,
-  angle: null,
-  length: lane.unbraced,
-  radius: lane.radius,
-  slenderness: lane.slenderness,
-  freeDirection: lane.axis === 'v' ? null : lane.motion,
-});
+/** Two figures nearer than this are one: which of them governs must not be left to rounding. */
+const TIE = 1e-9;
+
+/** Without lengths of the user's own, the worst span or the bound is found before it is put into words. */
+function byTheRule(section: Radii, { spans, bound }: RuleResult, barLength: number): Governing {
+  const worst = spans.reduce((most, span) => (span.slenderness > most.slenderness * (1 + TIE) ? span : most));
+  return bound && bound.slenderness > worst.slenderness * (1 + TIE)
+    ? ofBound(section, bound, barLength)
+    : ofSpan(section, worst);
+}
+
+function ofSpan(section: Radii, { from, to, freeDirection, radius, slenderness }: SpanCheck): Governing {
+  const { axis, angle } = named(section, freeDirection);
+  return { axis, angle, length: to - from, radius, slenderness, from, to, basis: 'span', freeDirection };
+}
+
+function ofBound(section: Radii, bound: MixedBound, barLength: number): Governing {
+  const { length, radius, slenderness, freeDirection } = bound;
+  const { axis, angle } = named(section, freeDirection);
+  const basis = 'mixed bound';
+  return { axis, angle, length, radius, slenderness, from: 0, to: barLength, basis, freeDirection };
+}
+
+function ofLane(lane: Lane, { from, to }: Piece, basis: Governing['basis']): Governing {
+  const { axis, unbraced: length, radius, slenderness } = lane;
+  const freeDirection = axis === 'v' ? null : lane.motion;
+  return { axis, angle: null, length, radius, slenderness, from, to, basis, freeDirection };
+}
 
 const longestPiece = (lane: Lane): Piece =>
   lane.pieces.reduce((most, piece) => (piece.to - piece.from > most.to - most.from ? piece : most));
 
 /** Ties go to the bowing that names an axis parallel to a leg, which is the one a reader can see. */
 function isWorse(each: Governing, worst: Governing): boolean {
-  const least = worst.slenderness * 1e-9;
+  const least = worst.slenderness * TIE;
   if (each.slenderness > worst.slenderness + least) return true;
   return (
     each.slenderness > worst.slenderness - least && worst.basis === 'mixed bound' && each.basis === 'span'

@@ -14,23 +14,14 @@ export function laneOf(
 ): Lane {
   const motion = motionAbout(section, axis);
   const radius = radiusOf(section, axis);
-  const stops = stations.map((station, index) => isEnd(index, stations) || stopsMotion(station.held, motion));
-  const pieces = piecesBetween(stations, stops);
+  const cuts = stations.slice(1, -1).map((station, k): LaneCut => {
+    const stops = stopsMotion(station.held, motion);
+    return { at: station.at, station: k + 1, stops, claim: tellingClaim(station, motion, stops) };
+  });
+  const pieces = piecesBetween(stations[0]?.at ?? 0, cuts, stations.at(-1)?.at ?? 0);
   const found = pieces.reduce((most, piece) => Math.max(most, piece.to - piece.from), 0);
   const override = overrides.find((each) => each.axis === axis) ?? null;
   const unbraced = override ? (override.length ?? found) * override.factor : found;
-  const cuts = stations.flatMap((station, index): LaneCut[] =>
-    isEnd(index, stations)
-      ? []
-      : [
-          {
-            at: station.at,
-            station: index,
-            stops: stops[index] ?? false,
-            claim: tellingClaim(station, motion, stops[index] ?? false),
-          },
-        ],
-  );
   return { axis, motion, pieces, cuts, unbraced, found, radius, slenderness: unbraced / radius, override };
 }
 
@@ -54,20 +45,28 @@ function radiusOf(section: Radii, axis: Axis): number {
   }
 }
 
-const isEnd = (index: number, stations: readonly Station[]): boolean =>
-  index === 0 || index === stations.length - 1;
-
-function piecesBetween(stations: readonly Station[], stops: readonly boolean[]): readonly Piece[] {
-  const cutAt = stations.filter((_, index) => stops[index]).map((station) => station.at);
-  return cutAt.slice(1).map((to, k) => ({ from: cutAt[k] ?? 0, to }));
+function piecesBetween(first: number, cuts: readonly LaneCut[], last: number): readonly Piece[] {
+  const pieces: Piece[] = [];
+  let from = first;
+  for (const { at, stops } of cuts) {
+    if (!stops) continue;
+    pieces.push({ from, to: at });
+    from = at;
+  }
+  pieces.push({ from, to: last });
+  return pieces;
 }
 
 /** The claim that says most about why a motion is stopped, or why it is not: the one most nearly along it. */
 function tellingClaim(station: Station, motion: Vec2, stopped: boolean): Claim | null {
-  const along = (claim: Claim): number => (claim.vector ? Math.abs(dot2(claim.vector, motion)) : 0);
-  const candidates = station.claims.filter((claim) => claim.vector && claim.counted === stopped);
-  return candidates.reduce<Claim | null>(
-    (best, claim) => (best === null || along(claim) > along(best) + 1e-9 ? claim : best),
-    null,
-  );
+  let telling: Claim | null = null;
+  let most = Number.NEGATIVE_INFINITY;
+  for (const claim of station.claims) {
+    if (!claim.vector || claim.counted !== stopped) continue;
+    const along = Math.abs(dot2(claim.vector, motion));
+    if (along <= most + 1e-9) continue;
+    telling = claim;
+    most = along;
+  }
+  return telling;
 }
