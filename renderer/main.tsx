@@ -2,6 +2,7 @@ import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
 import { createStore } from 'zustand/vanilla';
 import { assessWorker, createAssessor } from './assessing/assessor.ts';
+import { followCloser } from './assessing/closerLook.ts';
 import { chooseHost } from './host/chooseHost.ts';
 import { App } from './shell/App.tsx';
 import { type Services, ServicesProvider } from './shell/services.tsx';
@@ -33,6 +34,7 @@ const services: Services = {
 };
 
 assessor.start();
+followCloser(store, assessor);
 startAutosaving(store, host);
 void services.documents.begin();
 

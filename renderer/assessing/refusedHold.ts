@@ -5,6 +5,7 @@ export function isRefusedHold({ counted, reason }: Claim): boolean {
   return (
     !counted &&
     (reason.kind === 'line free along itself' ||
+      reason.kind === 'line end free' ||
       reason.kind === 'partner half free' ||
       reason.kind === 'bar ends here, itself free')
   );

@@ -14,6 +14,11 @@ export function firstSizes(width: number, height: number): FirstSizes {
   return {
     left: narrow ? 240 : 252,
     card: narrow ? 380 : 424,
-    tables: { schedule: share(0.255, 300), shortlist: share(0.36, 380), findings: share(0.34, 380) },
+    tables: {
+      schedule: share(0.255, 300),
+      shortlist: share(0.36, 380),
+      findings: share(0.34, 380),
+      bowing: share(0.36, 380),
+    },
   };
 }

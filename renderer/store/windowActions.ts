@@ -6,9 +6,11 @@ import type { Edit } from '../../core/project/edit.ts';
 import type { Project } from '../../core/project/model.ts';
 import type { ProjectProblem } from '../../core/project/problem.ts';
 import type { ThemeSetting } from '../theme/themeSetting.ts';
+import { NOTHING_CLOSER } from './closer.ts';
 import { coalescingKey } from './coalescing.ts';
 import type { Dialog } from './dialog.ts';
 import { recorded, redone, startedHistory, undone } from './history.ts';
+import { NO_PUSH, type Pushing } from './pushing.ts';
 import { sameProject } from './sameProject.ts';
 import {
   type BarEnd,
@@ -45,7 +47,11 @@ export interface WindowActions {
   look(view: ViewName): void;
   /** The user has turned the drawing away from the named view. */
   turnView(): void;
-  setView(change: Partial<Pick<ViewState, 'scale' | 'bow' | 'trail'>>): void;
+  setView(change: Partial<Pick<ViewState, 'scale' | 'bow' | 'shape' | 'playing' | 'trail'>>): void;
+  /** Turns pushing on or off; either way nothing pushes any more. */
+  setPushMode(push: boolean): void;
+  /** Pushes the chosen bar otherwise. */
+  push(change: Partial<Omit<Pushing, 'bar'>>): void;
   showTab(tab: DockTab): void;
   setTheme(theme: ThemeSetting): void;
   openDialog(dialog: Dialog): void;
@@ -125,6 +131,12 @@ export function windowActions(
       setState(({ view }) => ({ view: { ...view, name, turned: false, nonce: view.nonce + 1 } })),
     turnView: () => setState(({ view }) => (view.turned ? {} : { view: { ...view, turned: true } })),
     setView: (change) => setState(({ view }) => ({ view: { ...view, ...change } })),
+    setPushMode: (push) => setState(({ view }) => ({ view: { ...view, push }, pushing: NO_PUSH })),
+    push: (change) =>
+      setState(({ pushing, selection }) => {
+        const before = pushing.bar === selection.bar ? pushing : NO_PUSH;
+        return { pushing: { ...before, ...change, bar: selection.bar } };
+      }),
     showTab: (tab) => setState({ tab }),
     setTheme: (theme) => setState({ theme }),
     openDialog: (dialog) => setState({ dialog }),
@@ -139,6 +151,8 @@ export function windowActions(
         trying: null,
         selection: NOTHING_SELECTED,
         hovered: null,
+        pushing: NO_PUSH,
+        closer: NOTHING_CLOSER,
         view: { ...view, name: 'axonometric', turned: false, nonce: view.nonce + 1 },
       })),
     markSaved: (project, name, token) => setState({ file: { name, token, saved: project } }),

@@ -3,8 +3,10 @@ import type { Assessment } from '../../core/assessment.ts';
 import type { Project } from '../../core/project/model.ts';
 import { newProject } from '../../core/project/newProject.ts';
 import type { ThemeSetting } from '../theme/themeSetting.ts';
+import { type Closer, NOTHING_CLOSER } from './closer.ts';
 import type { Dialog } from './dialog.ts';
 import { type History, startedHistory } from './history.ts';
+import { NO_PUSH, type Pushing } from './pushing.ts';
 import { NOTHING_SELECTED, type Selection } from './selection.ts';
 import type { Trying } from './trying.ts';
 
@@ -44,10 +46,18 @@ export interface ViewState {
   readonly nonce: number;
   readonly scale: 'true' | 'doubled';
   readonly bow: boolean;
+  /** What is drawn bowed: the marks' picture, the computed shape of the chosen bar, or that of its whole bay. */
+  readonly shape: BowedShape;
+  /** Whether the computed shape swings to and fro. */
+  readonly playing: boolean;
+  /** Whether the pointer and the arrow keys push the chosen bar. */
+  readonly push: boolean;
   readonly trail: boolean;
 }
 
-export type DockTab = 'schedule' | 'shortlist' | 'findings';
+export type BowedShape = 'marks' | 'bar' | 'bay';
+
+export type DockTab = 'schedule' | 'shortlist' | 'findings' | 'bowing';
 
 export interface WindowState {
   readonly started: boolean;
@@ -58,6 +68,8 @@ export interface WindowState {
   readonly selection: Selection;
   readonly hovered: string | null;
   readonly view: ViewState;
+  readonly pushing: Pushing;
+  readonly closer: Closer;
   readonly tab: DockTab;
   readonly theme: ThemeSetting;
   readonly dialog: Dialog | null;
@@ -76,7 +88,19 @@ export function firstState(theme: ThemeSetting): WindowState {
     trying: null,
     selection: NOTHING_SELECTED,
     hovered: null,
-    view: { name: 'axonometric', turned: false, nonce: 0, scale: 'doubled', bow: true, trail: true },
+    view: {
+      name: 'axonometric',
+      turned: false,
+      nonce: 0,
+      scale: 'doubled',
+      bow: true,
+      shape: 'bar',
+      playing: false,
+      push: false,
+      trail: true,
+    },
+    pushing: NO_PUSH,
+    closer: NOTHING_CLOSER,
     tab: 'schedule',
     theme,
     dialog: null,
