@@ -41,6 +41,8 @@ export function whyItSwings(claims: readonly Claim[], nameOf: NameOf): string {
         return `only hangs from ${names}`;
       case 'line free along itself':
         return `only moves ${names} along with it`;
+      case 'line end free':
+        return `meets ${names}, an end of which is free`;
       case 'bar ends here, itself free':
         return `meets ${names}, itself free`;
       case 'nearly along the bar':
@@ -94,6 +96,7 @@ function holderNamed(reason: HoldReason): string {
     case 'line held along itself':
     case 'line free along itself':
     case 'line stiff across':
+    case 'line end free':
     case 'twist held':
       return reason.line;
     case 'bar ends here':

@@ -86,6 +86,8 @@ export function reasonText(reason: HoldReason): string {
       return `${reason.line} is free to move along itself: ${reason.why}.`;
     case 'line stiff across':
       return `${reason.line} is stiff across itself, out of the plane of the bay.`;
+    case 'line end free':
+      return `${reason.line} is stiff across itself, but its end at ${reason.node} is held by nothing.`;
     case 'bar ends here':
       return `${reason.bar} ends here and holds along itself.`;
     case 'bar ends here, itself free':

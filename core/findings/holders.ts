@@ -27,7 +27,10 @@ function isIdle(claim: Claim): boolean {
   if (claim.counted) return false;
   const { kind } = claim.reason;
   return (
-    kind === 'line free along itself' || kind === 'partner half free' || kind === 'bar ends here, itself free'
+    kind === 'line free along itself' ||
+    kind === 'line end free' ||
+    kind === 'partner half free' ||
+    kind === 'bar ends here, itself free'
   );
 }
 
@@ -69,6 +72,14 @@ function holderFinding(subject: FindingSubject, bay: string, group: readonly Idl
         title: `${reason.partner} holds ${marksInWords(bars)} nowhere: its end at ${reason.node} is free`,
         detail: `The hold at the crossing is claimed, but ${reason.partner} reaches no held point at ${reason.node}, so nothing is taken from it.`,
       };
+    case 'line end free':
+      return {
+        ...base,
+        id: `free-ends:${claim.holder}`,
+        severity: 'look into',
+        title: `${sentence(reason.line)} holds ${marksInWords(bars)} nowhere: its end at ${reason.node} is free`,
+        detail: `${sentence(reason.line)} is claimed to hold across itself, but nothing holds it at ${reason.node}.`,
+      };
     case 'bar ends here, itself free':
       return {
         ...base,
@@ -81,3 +92,5 @@ function holderFinding(subject: FindingSubject, bay: string, group: readonly Idl
       return null;
   }
 }
+
+const sentence = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

@@ -140,23 +140,13 @@ function lineClaims(
         reason: { kind: 'nearly along the bar', holder: name },
         trail: [],
       };
-  const stiffAcross: Claim = {
+  const stiffAcross = {
     ...base,
     direction: 'out of plane',
     vector: outwards,
-    counted: true,
-    reason: { kind: 'line stiff across', line: name },
-    trail: [
-      { text: `${name}, bending between its supports`, bar: holder.id, node: null, state: 'on the way' },
-      {
-        text: `${labelOf(layout, holder.i)}; ${labelOf(layout, holder.j)}`,
-        bar: null,
-        node: holder.i,
-        state: 'held',
-      },
-    ],
-  };
-  const claims = [alongItself, stiffAcross];
+    ...heldAcross(context, holder, name),
+  } as const;
+  const claims: Claim[] = [alongItself, stiffAcross];
   if (crossing.join?.kind === 'purlin' && crossing.join.boltsAcross === 2)
     claims.push({
       ...base,
@@ -169,12 +159,33 @@ function lineClaims(
   return claims;
 }
 
-function heldAlong(
-  layout: Layout,
-  holdings: Holdings,
-  holder: Bar,
-  name: string,
-): Pick<Claim, 'counted' | 'reason' | 'trail'> {
+/** Purlins and rails lie on rafters and columns, which carry them; a member of the framing holds across itself if both its ends are held. */
+function heldAcross({ layout, holdings }: ClaimContext, holder: Bar, name: string): HeldSo {
+  const bending: TrailStep = {
+    text: `${name}, bending between its supports`,
+    bar: holder.id,
+    node: null,
+    state: 'on the way',
+  };
+  const holding = holdings.get(holder.bay);
+  const free = holder.line ? undefined : [holder.i, holder.j].find((node) => !holding?.held.has(node));
+  if (free !== undefined)
+    return {
+      counted: false,
+      reason: { kind: 'line end free', line: name, node: labelOf(layout, free) },
+      trail: holding ? [bending, ...trailFromNode(layout, holding, free)] : [],
+    };
+  const ends = `${labelOf(layout, holder.i)}; ${labelOf(layout, holder.j)}`;
+  return {
+    counted: true,
+    reason: { kind: 'line stiff across', line: name },
+    trail: [bending, { text: ends, bar: null, node: holder.i, state: 'held' }],
+  };
+}
+
+type HeldSo = Pick<Claim, 'counted' | 'reason' | 'trail'>;
+
+function heldAlong(layout: Layout, holdings: Holdings, holder: Bar, name: string): HeldSo {
   if (holder.line) {
     const line = lineHolding(layout, holdings, holder);
     return {

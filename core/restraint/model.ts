@@ -33,6 +33,8 @@ export type HoldReason =
   | { readonly kind: 'line held along itself'; readonly line: string; readonly by: string }
   | { readonly kind: 'line free along itself'; readonly line: string; readonly why: string }
   | { readonly kind: 'line stiff across'; readonly line: string }
+  /** A member of the framing that could hold across itself, had its own ends a hold. */
+  | { readonly kind: 'line end free'; readonly line: string; readonly node: string }
   | { readonly kind: 'bar ends here'; readonly bar: string }
   | { readonly kind: 'bar ends here, itself free'; readonly bar: string; readonly node: string }
   | { readonly kind: 'twist held'; readonly line: string }

@@ -59,6 +59,8 @@ function whyNot({ reason }: Claim): string | null {
       return 'claimed, is itself free';
     case 'partner half free':
       return 'claimed, half of it is free';
+    case 'line end free':
+      return 'claimed, an end of it is free';
     case 'bar ends here, itself free':
       return 'ends here, is itself free';
     case 'nearly along the bar':

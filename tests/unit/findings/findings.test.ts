@@ -230,6 +230,26 @@ describe('a hold without a holder', () => {
     expect(one(made(['n4']), 'hold without a holder').bars).toEqual(['B/b1']);
     expect(found(made([]), 'hold without a holder')).toEqual([]);
   });
+
+  it('is found for a member of the framing with an end in the air', () => {
+    const made = (loose: readonly string[]) =>
+      bay(
+        free(
+          { n1: [0, 0, 0], n2: [3000, 0, 0], n3: [1500, 0, -1000], n4: [1500, 0, 1000] },
+          [
+            ['b1', 'n1', 'n2'],
+            ['m1', 'n3', 'n4', 'beam'],
+          ],
+          { free: loose },
+        ),
+        { joins: { 'b1+m1': { kind: 'purlin', boltsAcross: 1 } } },
+      );
+    expect(one(made(['n4']), 'hold without a holder')).toMatchObject({
+      severity: 'look into',
+      bars: ['B/b1'],
+    });
+    expect(found(made([]), 'hold without a holder')).toEqual([]);
+  });
 });
 
 describe('tension only', () => {

@@ -226,6 +226,46 @@ describe('a purlin', () => {
   });
 });
 
+describe('a member of the framing that a diagonal is bolted to', () => {
+  const on = (loose: readonly string[]) =>
+    middleOf(
+      restraintIn(
+        assessed(
+          bay(
+            free(
+              { n1: [0, 0, 0], n2: [8000, 0, 0], n3: [4000, 0, -2000], n4: [4000, 0, 2000] },
+              [
+                ['b1', 'n1', 'n2'],
+                ['m1', 'n3', 'n4', 'beam'],
+              ],
+              { free: loose },
+            ),
+            { joins: { 'b1+m1': { kind: 'purlin', boltsAcross: 1 } } },
+          ),
+        ),
+        'B/b1',
+      ),
+    );
+
+  it('holds both ways when its ends are held', () => {
+    expect(on([]).held).toEqual({ ways: 2 });
+  });
+
+  it('holds along itself by one end, but not across itself with the other in the air', () => {
+    const station = on(['n4']);
+    expect(claimOf(station, 'along holder').counted).toBe(true);
+    expect(claimOf(station, 'out of plane')).toMatchObject({
+      counted: false,
+      reason: { kind: 'line end free' },
+    });
+    expect(ENDS_HELD(claimOf(station, 'out of plane'))).toBe('free');
+  });
+
+  it('holds nothing with both ends in the air', () => {
+    expect(on(['n3', 'n4']).held).toEqual({ ways: 0 });
+  });
+});
+
 describe('a roof on walls', () => {
   const joins = { 'a.p1.fall+a.p1.rise': bolted };
   const above = (pattern: Pattern | null) => {
@@ -287,6 +327,7 @@ describe('every trail', () => {
               } else if (
                 kind === 'partner half free' ||
                 kind === 'line free along itself' ||
+                kind === 'line end free' ||
                 kind === 'bar ends here, itself free'
               )
                 expect(claim.trail.at(-1)?.state).toBe('free');
