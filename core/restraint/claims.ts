@@ -3,7 +3,7 @@ import { dot, scale, subtract, unit2, type Vec2, type Vec3 } from '../geometry/v
 import type { AngleBar, Bar, Crossing, Layout } from '../layout/model.ts';
 import type { JoinKind } from '../project/model.ts';
 import type { BayHolding, Holdings } from './heldNodes.ts';
-import type { Claim, HoldReason, TrailStep } from './model.ts';
+import type { Claim, HoldDirection, HoldReason, TrailStep } from './model.ts';
 import { labelOf, lineHolding, trailFromNode } from './trails.ts';
 
 /** Holds weaker than this share of a direction are none: sin 10°. */
@@ -39,8 +39,8 @@ export function claimsAt(
         ? { kind: 'hung', line: partner.mark }
         : { kind: 'not joined', partner: partner.mark, marked: crossing.join !== null };
     return [
-      { ...base, direction: along, vector: across, counted: false, reason, trail: [] },
-      { ...base, direction: 'out of plane', vector: outwards, counted: false, reason, trail: [] },
+      claim(base, along, across, notHeld(reason)),
+      claim(base, 'out of plane', outwards, notHeld(reason)),
     ];
   }
   return crossing.kind === 'diagonals'
@@ -49,6 +49,16 @@ export function claimsAt(
 }
 
 type Base = Pick<Claim, 'source' | 'join' | 'holder'>;
+type HeldSo = Pick<Claim, 'counted' | 'reason' | 'trail'>;
+
+/** Written out: there are thousands, and an object spread into another takes several times its room. */
+function claim(base: Base, direction: HoldDirection, vector: Vec2 | null, held: HeldSo): Claim {
+  const { source, join, holder } = base;
+  const { counted, reason, trail } = held;
+  return { source, join, holder, direction, vector, counted, reason, trail };
+}
+
+const notHeld = (reason: HoldReason): HeldSo => ({ counted: false, reason, trail: [] });
 
 /** Across the bar, in the way that the holder runs: what is left of its direction square to the bar. Null when it runs along the bar. */
 function acrossOf(bar: Bar, angle: AngleBar, holder: Bar): Vec2 | null {
@@ -66,41 +76,26 @@ function partnerClaims(
   outwards: Vec2 | null,
 ): readonly Claim[] {
   const holding = context.holdings.get(partner.bay);
-  const outOfPlane: Claim = {
-    ...base,
-    direction: 'out of plane',
-    vector: outwards,
-    counted: false,
-    reason:
-      join === 'cut'
-        ? { kind: 'single plate hinges', partner: partner.mark }
-        : { kind: 'partner only bends', partner: partner.mark },
-    trail: [],
-  };
+  const outOfPlane = claim(
+    base,
+    'out of plane',
+    outwards,
+    notHeld({ kind: join === 'cut' ? 'single plate hinges' : 'partner only bends', partner: partner.mark }),
+  );
   if (!across || !holding)
     return [
-      {
-        ...base,
-        direction: 'in plane',
-        vector: across,
-        counted: false,
-        reason: { kind: 'nearly along the bar', holder: partner.mark },
-        trail: [],
-      },
+      claim(base, 'in plane', across, notHeld({ kind: 'nearly along the bar', holder: partner.mark })),
       outOfPlane,
     ];
   const free = [partner.i, partner.j].find((node) => !holding.held.has(node));
-  const inPlane: Claim = {
-    ...base,
-    direction: 'in plane',
-    vector: across,
+  const inPlane = claim(base, 'in plane', across, {
     counted: free === undefined,
     reason:
       free === undefined
         ? { kind: 'partner end-on', partner: partner.mark, join }
         : { kind: 'partner half free', partner: partner.mark, node: labelOf(context.layout, free) },
     trail: partnerTrail(context.layout, holding, partner, free ?? null),
-  };
+  });
   return [inPlane, outOfPlane];
 }
 
@@ -130,32 +125,21 @@ function lineClaims(
 ): readonly Claim[] {
   const { layout, holdings } = context;
   const name = holder.line ? holder.mark : `the ${holder.role}`;
-  const alongItself: Claim = across
-    ? { ...base, direction: 'along holder', vector: across, ...heldAlong(layout, holdings, holder, name) }
-    : {
-        ...base,
-        direction: 'along holder',
-        vector: null,
-        counted: false,
-        reason: { kind: 'nearly along the bar', holder: name },
-        trail: [],
-      };
-  const stiffAcross = {
-    ...base,
-    direction: 'out of plane',
-    vector: outwards,
-    ...heldAcross(context, holder, name),
-  } as const;
-  const claims: Claim[] = [alongItself, stiffAcross];
+  const claims = [
+    claim(
+      base,
+      'along holder',
+      across,
+      across
+        ? heldAlong(layout, holdings, holder, name)
+        : notHeld({ kind: 'nearly along the bar', holder: name }),
+    ),
+    claim(base, 'out of plane', outwards, heldAcross(context, holder, name)),
+  ];
   if (crossing.join?.kind === 'purlin' && crossing.join.boltsAcross === 2)
-    claims.push({
-      ...base,
-      direction: 'twist',
-      vector: null,
-      counted: true,
-      reason: { kind: 'twist held', line: name },
-      trail: [],
-    });
+    claims.push(
+      claim(base, 'twist', null, { counted: true, reason: { kind: 'twist held', line: name }, trail: [] }),
+    );
   return claims;
 }
 
@@ -182,8 +166,6 @@ function heldAcross({ layout, holdings }: ClaimContext, holder: Bar, name: strin
     trail: [bending, { text: ends, bar: null, node: holder.i, state: 'held' }],
   };
 }
-
-type HeldSo = Pick<Claim, 'counted' | 'reason' | 'trail'>;
 
 function heldAlong(layout: Layout, holdings: Holdings, holder: Bar, name: string): HeldSo {
   if (holder.line) {
