@@ -14,7 +14,7 @@ export function criticalOf(N: number, section: SectionProperties, E: number): Cr
   const effective = (I: number): number => Math.PI * Math.sqrt((E * I) / N);
   return {
     N,
-    slenderness: Math.PI * Math.sqrt((E * section.area) / N),
+    slenderness: slendernessAtLoad(N, section.area, E),
     effectiveLength: {
       x: effective(section.Ixx),
       y: effective(section.Iyy),
@@ -22,4 +22,14 @@ export function criticalOf(N: number, section: SectionProperties, E: number): Cr
       v: effective(section.Iv),
     },
   };
+}
+
+/** The load at which a bar of a slenderness buckles, N: π²EA/λ². */
+export function loadAtSlenderness(slenderness: number, area: number, E: number): number {
+  return (Math.PI ** 2 * E * area) / slenderness ** 2;
+}
+
+/** π√(EA/N). */
+export function slendernessAtLoad(N: number, area: number, E: number): number {
+  return Math.PI * Math.sqrt((E * area) / N);
 }
