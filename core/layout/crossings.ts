@@ -3,6 +3,7 @@ import type { Bay, Join, JoinKind } from '../project/model.ts';
 import { type AngleDraft, standingLegOf } from './angleBar.ts';
 import type { Meeting } from './meetings.ts';
 import type { Crossing, Plane } from './model.ts';
+import { PlaceGrid } from './placeGrid.ts';
 import type { SketchBar } from './sketch.ts';
 
 /** A bar as a crossing needs to know it. */
@@ -10,9 +11,6 @@ export interface CrossingBar {
   readonly sketch: SketchBar;
   readonly angle: AngleDraft | null;
 }
-
-/** Crossings nearer than this are one point, mm. */
-const SAME_POINT = 1;
 
 const BETWEEN_DIAGONALS: readonly JoinKind[] = ['none', 'bolted', 'packed', 'cut', 'welded'];
 const TO_A_LINE: readonly JoinKind[] = ['none', 'purlin', 'hung'];
@@ -53,13 +51,11 @@ export function crossingOf(
 
 /** Crossings at one place share the name of the first. */
 export function withSharedPoints(crossings: readonly Crossing[]): readonly Crossing[] {
-  const points: Crossing[] = [];
+  const points = new PlaceGrid<Crossing>();
   return crossings.map((crossing) => {
-    const known = points.find((other) =>
-      other.at.every((value, k) => Math.abs(value - (crossing.at[k] ?? 0)) <= SAME_POINT),
-    );
+    const known = points.near(crossing.at);
     if (known) return { ...crossing, point: known.id };
-    points.push(crossing);
+    points.put(crossing);
     return crossing;
   });
 }

@@ -1,13 +1,14 @@
-import type { AngleBar, Bar, BarId, BayLayout, Crossing, Layout } from '../layout/model.ts';
+import type { AngleBar, Bar, BarId, Crossing, Layout } from '../layout/model.ts';
 import type { Settings } from '../project/model.ts';
 import type { Axis, SectionProperties } from '../section/model.ts';
 import type { ClaimContext } from './claims.ts';
+import { endings } from './endings.ts';
 import { governingOf } from './governing.ts';
 import { holdingsOf } from './heldNodes.ts';
 import { laneOf } from './lanes.ts';
 import type { Lane, Restraint, Station } from './model.ts';
 import { freeDirectionRule } from './rule.ts';
-import { nodeLiesOn, stationsOf } from './stations.ts';
+import { stationsOf } from './stations.ts';
 
 /** Everything about holds that is the same for all bars of a layout: worked out once. */
 export interface RestraintContext extends ClaimContext {
@@ -28,26 +29,6 @@ export function restraintContext(layout: Layout): RestraintContext {
     layout.bays.filter((bay) => bay.kind === 'free').flatMap((bay) => endings(bay, layout)),
   );
   return { layout, holdings: holdingsOf(layout), crossingsOf, endingOn };
-}
-
-/** Only a bay drawn freely can have a bar that ends in the middle of a diagonal. */
-function endings(bay: BayLayout, layout: Layout): readonly (readonly [BarId, readonly Bar[]])[] {
-  const bars = bay.bars.flatMap((id) => layout.bars.get(id) ?? []);
-  const byNode = new Map<string, Bar[]>();
-  for (const bar of bars)
-    for (const node of [bar.i, bar.j]) {
-      const list = byNode.get(node);
-      if (list) list.push(bar);
-      else byNode.set(node, [bar]);
-    }
-  return bay.diagonals.flatMap((id) => {
-    const bar = layout.bars.get(id);
-    if (!bar) return [];
-    const touching = bay.nodes
-      .filter((node) => nodeLiesOn(layout, node, bar))
-      .flatMap((node) => byNode.get(node) ?? []);
-    return touching.length > 0 ? [[id, touching] as const] : [];
-  });
 }
 
 /** The bar with its own section, as it lies. Null while its section is not in stock, or its ends leave no length. */

@@ -124,7 +124,7 @@ function endMark(context: ClaimContext, bar: Bar, angle: AngleBar, other: Bar) {
 }
 
 /** A node is on a bar when it is within this of its line, mm. */
-const ON_THE_BAR = 5;
+export const ON_THE_BAR = 5;
 
 export function nodeLiesOn(layout: Layout, node: string, bar: Bar): boolean {
   const at = layout.nodes.get(node)?.at;
