@@ -105,21 +105,30 @@ const GROWTH = 1.6;
 
 /** Fine at both ends, where a pulled bar and a twisted one have layers as short as 1/κ; no element longer than a wave allows. */
 function graded(problem: BarProblem, load: number, from: number, to: number): readonly number[] {
-  const { E, section, twist } = problem;
   const middle = (from + to) / 2;
   const share = shareAt(problem, middle);
-  // Twist shortens waves.
-  const part = twist ? PART_OF_WAVE / 1.5 : PART_OF_WAVE;
-  const wave = part / Math.sqrt((Math.abs(share) * load) / (E * section.Iv) + 1e-12);
-  const warping = twist ? PART_OF_WAVE / Math.sqrt((twist.G * section.J) / (E * section.Iw)) : wave;
+  const { wave, layer } = lengthsOf(problem, share * load);
   const longest = share > 0 ? Math.min(wave, (to - from) / 4) : (to - from) / 4;
   const half: number[] = [];
-  let step = Math.min(wave, warping, longest);
+  let step = Math.min(wave, layer, longest);
   for (let at = step; at < middle - from - step / 2; at += step) {
     half.push(at);
-    step = Math.min(step * (twist ? GROWTH ** 2 : GROWTH), longest);
+    step = Math.min(step * GROWTH, longest);
   }
   return [...half.map((d) => from + d), middle, ...half.reverse().map((d) => to - d)];
+}
+
+/** Elements that follow a wave, and a layer at an end, under a force: of bowing about v, and of twist by itself. */
+function lengthsOf({ E, section, twist }: BarProblem, N: number): { wave: number; layer: number } {
+  const part = (stiffness: number, force: number): number =>
+    PART_OF_WAVE / Math.sqrt(Math.abs(force) / stiffness + 1e-12);
+  const bowing = part(E * section.Iv, N);
+  if (!twist) return { wave: bowing, layer: bowing };
+  const [sx, sy] = section.shearCentre;
+  const turning = N * ((section.Iu + section.Iv) / section.area + sx * sx + sy * sy) - twist.G * section.J;
+  const twisting = part(E * section.Iw, turning);
+  // Where torsion resists there is no wave of twist, only a layer. Bowing and twist together make somewhat shorter waves than either.
+  return { wave: Math.min(bowing, turning > 0 ? twisting : bowing) / 1.5, layer: twisting };
 }
 
 const shareAt = ({ axial }: BarProblem, at: number): number =>
