@@ -9,7 +9,7 @@ export const ROOMS: readonly (readonly string[])[] = [
   ['restraint'],
   ['stability'],
   ['frame'],
-  ['bowing'],
+  ['bowing', 'forces'],
   ['cases', 'shortlist'],
   ['findings'],
   ['documents'],
