@@ -55,12 +55,14 @@ export function shownPush(state: WindowState): PushTest | null {
     : null;
 }
 
-/** What the joins of the chosen bay are worth, in the project as it stands; null while it is worked out. */
-export function bayReliance(state: WindowState): readonly Reliance[] | null {
-  const { reliance } = state.closer;
-  return reliance !== null &&
-    reliance.question.bay === state.selection.bay &&
-    reliance.question.project === state.assessing.base?.project
-    ? reliance.answer
-    : null;
+/** As `shownStudy`, but while figures are worked out anew the last ones of the same bar, so that pictures do not flicker. */
+export function latestStudy({ closer, selection }: WindowState): BarStudy | null {
+  const { study } = closer;
+  return study !== null && study.question.bar === selection.bar ? study.answer : null;
+}
+
+/** What the joins of the chosen bay are worth, in the project as it stands; while it is worked out anew, as it was. */
+export function latestReliance({ closer, selection }: WindowState): readonly Reliance[] | null {
+  const { reliance } = closer;
+  return reliance !== null && reliance.question.bay === selection.bay ? reliance.answer : null;
 }

@@ -3,6 +3,7 @@ import type { Assessment } from '../../../core/assessment.ts';
 import type { AngleBar, Bar } from '../../../core/layout/model.ts';
 import { useWindow } from '../../shell/services.tsx';
 import { beforeAssessment, shownProject } from '../../store/shown.ts';
+import { CardReadings } from '../bowing/CardReadings.tsx';
 import { BarMarks } from './BarMarks.tsx';
 import { CardHead } from './CardHead.tsx';
 import { HoldsTable } from './HoldsTable.tsx';
@@ -62,6 +63,9 @@ export function DiagonalCard({ bar, angle, assessment }: DiagonalCardProps): JSX
         </div>
       )}
       <div className="card-after">
+        {diagonal !== undefined && (
+          <CardReadings bar={bar} diagonal={diagonal} assessment={assessment} units={units} />
+        )}
         <RemedyList bar={bar} assessment={assessment} />
         {/* New keys for each bar, so that no field keeps what was typed for another. */}
         <BarMarks key={`marks ${bar.id}`} bar={bar} angle={angle} units={units} />

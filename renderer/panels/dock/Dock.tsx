@@ -3,6 +3,8 @@ import { type JSX, useState } from 'react';
 import { useActions, useWindow } from '../../shell/services.tsx';
 import { shownAssessment } from '../../store/shown.ts';
 import type { DockTab } from '../../store/windowState.ts';
+import { BowingBar } from '../bowing/BowingBar.tsx';
+import { BowingPanel } from '../bowing/BowingPanel.tsx';
 import { FindingsBar } from '../findings/FindingsBar.tsx';
 import { FindingsPanel } from '../findings/FindingsPanel.tsx';
 import { ScheduleBar } from '../schedule/ScheduleBar.tsx';
@@ -14,7 +16,7 @@ import { FIRST_SHORTLIST_VIEW } from '../shortlist/shortlistView.ts';
 import { useShortlist } from '../shortlist/useShortlist.ts';
 import './dock.css';
 
-/** The tables below: schedule, shortlist, findings. */
+/** The tables below: schedule, shortlist, findings, and how the chosen bar bows. */
 export function Dock(): JSX.Element {
   const actions = useActions();
   const tab = useWindow((state) => state.tab);
@@ -52,10 +54,14 @@ export function Dock(): JSX.Element {
           <Tabs.Trigger value="findings" className="dock-tab">
             Findings <small>{findings}</small>
           </Tabs.Trigger>
+          <Tabs.Trigger value="bowing" className="dock-tab">
+            Bowing <small>{mark}</small>
+          </Tabs.Trigger>
         </Tabs.List>
         <div className="dock-tools">
           {tab === 'schedule' && <ScheduleBar view={schedule} onChange={setSchedule} />}
           {tab === 'findings' && <FindingsBar onlyBay={onlyBay} onOnlyBay={setOnlyBay} />}
+          {tab === 'bowing' && <BowingBar />}
           {tab === 'shortlist' && <ShortlistBar view={shortlist} answer={answer} onChange={setShortlist} />}
         </div>
       </div>
@@ -68,10 +74,13 @@ export function Dock(): JSX.Element {
       <Tabs.Content value="findings" className="dock-content" tabIndex={-1}>
         <FindingsPanel bay={onlyBay ? bay : null} />
       </Tabs.Content>
+      <Tabs.Content value="bowing" className="dock-content" tabIndex={-1}>
+        <BowingPanel />
+      </Tabs.Content>
     </Tabs.Root>
   );
 }
 
 function isTab(value: string): value is DockTab {
-  return value === 'schedule' || value === 'shortlist' || value === 'findings';
+  return value === 'schedule' || value === 'shortlist' || value === 'findings' || value === 'bowing';
 }

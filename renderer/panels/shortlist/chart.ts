@@ -68,7 +68,7 @@ export function isOnChart(chart: Chart, candidate: Candidate): boolean {
   return x >= chart.left - 1 && x <= chart.right + 1 && y >= chart.top - 1;
 }
 
-function niceStep(rough: number): number {
+export function niceStep(rough: number): number {
   const power = 10 ** Math.floor(Math.log10(Math.max(rough, 1e-9)));
   const ratio = rough / power;
   return power * (ratio <= 1 ? 1 : ratio <= 2 ? 2 : ratio <= 5 ? 5 : 10);

@@ -13,6 +13,7 @@ const TABS: readonly { readonly tab: DockTab; readonly label: string }[] = [
   { tab: 'schedule', label: 'Schedule' },
   { tab: 'shortlist', label: 'Shortlist' },
   { tab: 'findings', label: 'Findings' },
+  { tab: 'bowing', label: 'Bowing' },
 ];
 
 const THEMES: readonly { readonly theme: ThemeSetting; readonly label: string }[] = [
