@@ -22,7 +22,7 @@ export const GUSSETED: FrameOptions['ends'] = { inPlane: 'stiff', outOfPlane: 'h
 
 /** Stiffness that stands in for "does not give", N/mm and N·mm/rad: a thousand times a short stocky bar's, well inside working accuracy. */
 const UNYIELDING = 1e9;
-const UNYIELDING_TURN = 1e13;
+const UNYIELDING_TURN = 1e12;
 
 /** Places nearer than this along a bar are one, mm. */
 const ONE_PLACE = 1;
