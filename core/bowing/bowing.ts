@@ -35,16 +35,17 @@ export function bowingOf(bar: BowingBar, partner: Partner | null, steel: Steel):
   const twist = twistEffect(bar, steel, springProblem, springLoad);
   const pair = partner ? pairProblem(bar, partner, steel) : null;
   const bowing = pair ? (pairCriticalLoad(pair).N ?? springLoad) : springLoad;
+  const twisting = twist.governs ? twist.ratio : 1;
   const { slenderness } = bar.restraint.governing;
   const byRule = (Math.PI ** 2 * steel.E * bar.section.area) / ruleSlenderness(bar) ** 2;
   return {
     bar: bar.bar.id,
     stations: offeredStations(bar, steel, rigidLoad),
     rigid: criticalOf(rigidLoad, bar.section, steel.E),
-    real: criticalOf(bowing * (twist.governs ? twist.ratio : 1), bar.section, steel.E),
+    real: criticalOf(bowing * twisting, bar.section, steel.E),
     ruleError: slenderness > 0 ? (byRule / rigidLoad - 1) * 100 : 0,
     twist,
-    partner: partner ? stateOf(bar, partner, steel) : null,
+    partner: partner ? stateOf(bar, partner, steel, twisting) : null,
     unsupported: null,
   };
 }
@@ -75,7 +76,8 @@ export function pairProblem(bar: BowingBar, partner: Partner, steel: Steel): Pai
   };
 }
 
-function stateOf(bar: BowingBar, partner: Partner, steel: Steel): PartnerState {
+/** @param twisting what twist leaves of a load, as in the real figure */
+function stateOf(bar: BowingBar, partner: Partner, steel: Steel, twisting: number): PartnerState {
   const { bar: other, crossing, tensionShare } = partner;
   const cutBar = crossing.join?.kind === 'cut' ? crossing.join.cutBar : null;
   const slack =
@@ -85,6 +87,6 @@ function stateOf(bar: BowingBar, partner: Partner, steel: Steel): PartnerState {
     crossing: crossing.id,
     tensionShare,
     cut: cutBar === null ? 'neither' : cutBar === bar.bar.key ? 'this bar' : 'partner',
-    slackLoad: slack,
+    slackLoad: slack === null ? null : slack * twisting,
   };
 }
