@@ -1,5 +1,6 @@
 import { assess } from '../assess.ts';
 import type { Assessment } from '../assessment.ts';
+import { BowingMemory } from '../bowing/memory.ts';
 import type { Catalogues } from '../catalogue/model.ts';
 import type { Finding, Severity } from '../findings/model.ts';
 import { sagOf } from '../findings/sag.ts';
@@ -17,15 +18,18 @@ const MOST = 4;
 /**
  * What answers a finding, each remedy with its effect found by assessing the changed project. Remedies that make
  * nothing better are left out.
+ *
+ * @param memory of the bays that no remedy touches; given by whoever asks often
  */
 export function remediesFor(
   assessment: Assessment,
   finding: Finding,
   catalogues: Catalogues,
+  memory: BowingMemory = new BowingMemory(),
 ): readonly Remedy[] {
   const proposals = proposalsFor(assessment, finding, catalogues);
   const useful = proposals.flatMap((proposal, index): readonly Remedy[] => {
-    const after = assess(withRemedy(assessment.project, proposal), catalogues);
+    const after = assess(withRemedy(assessment.project, proposal), catalogues, 'all levels', memory);
     const effect = effectOf(assessment, after, finding);
     const helps = effect.answers || improves(finding, effect) || weighsLess(finding, after);
     return helps ? [{ id: `${finding.id}#${index}`, ...proposal, effect }] : [];

@@ -1,5 +1,6 @@
 import { type Command, Option } from 'commander';
 import { assess } from '../../core/assess.ts';
+import { BowingMemory } from '../../core/bowing/memory.ts';
 import { remediesFor } from '../../core/remedies/remedies.ts';
 import { builtInCatalogues } from './catalogues.ts';
 import type { Ending } from './ending.ts';
@@ -22,10 +23,11 @@ export function addAssessCommand(program: Command, ending: Ending): void {
       const project = await readProjectFile(file);
       if (!project.ok) return ending.trouble(project.trouble);
       const catalogues = builtInCatalogues();
-      const assessment = assess(project.value, catalogues);
+      const memory = new BowingMemory();
+      const assessment = assess(project.value, catalogues, 'all levels', memory);
       const findings = assessment.findings.map((finding) => ({
         ...finding,
-        remedies: remediesFor(assessment, finding, catalogues),
+        remedies: remediesFor(assessment, finding, catalogues, memory),
       }));
       const text = jsonText({ format: 'tautline-assessment', version: 1, ...assessment, findings });
       const delivered = await deliver(text, options.out, terminal, 'replace');

@@ -1,5 +1,6 @@
 import { type Command, Option } from 'commander';
 import { assess } from '../../core/assess.ts';
+import { BowingMemory } from '../../core/bowing/memory.ts';
 import { reportHtml } from '../../core/documents/report.ts';
 import type { UnitSystem } from '../../core/project/model.ts';
 import { remediesFor } from '../../core/remedies/remedies.ts';
@@ -36,9 +37,13 @@ export function addReportCommand(program: Command, ending: Ending): void {
       const units = options.units ?? project.value.settings.units;
       // The reasons are worded by the assessment, in the units of the project.
       const shown = { ...project.value, settings: { ...project.value.settings, units } };
-      const assessment = assess(shown, catalogues);
+      const memory = new BowingMemory();
+      const assessment = assess(shown, catalogues, 'all levels', memory);
       const remedies = new Map(
-        assessment.findings.map((finding) => [finding.id, remediesFor(assessment, finding, catalogues)]),
+        assessment.findings.map((finding) => [
+          finding.id,
+          remediesFor(assessment, finding, catalogues, memory),
+        ]),
       );
       const html = reportHtml(assessment, {
         units,

@@ -34,7 +34,7 @@ const api: AssessApi = {
   remedies: (snapshot, id) => {
     const assessment = assessed(snapshot);
     const finding = assessment.findings.find((each) => each.id === id);
-    return finding === undefined ? [] : remediesFor(assessment, finding, catalogues);
+    return finding === undefined ? [] : remediesFor(assessment, finding, catalogues, bowingMemory);
   },
   readings: (snapshot, crossing) => joinReadings(assessed(snapshot), crossing, assessFresh),
   shortlist: (snapshot, bars, options) => shortlist(assessed(snapshot), catalogues, bars, options),
@@ -54,7 +54,10 @@ const api: AssessApi = {
   report: (snapshot, { date, fonts }) => {
     const assessment = assessed(snapshot);
     const remedies = new Map(
-      assessment.findings.map((finding) => [finding.id, remediesFor(assessment, finding, catalogues)]),
+      assessment.findings.map((finding) => [
+        finding.id,
+        remediesFor(assessment, finding, catalogues, bowingMemory),
+      ]),
     );
     return reportHtml(assessment, { units: snapshot.project.settings.units, date, fonts, remedies });
   },
