@@ -1,5 +1,5 @@
 /** The stiffness of loaded bars at their nodes, with the count of critical loads below a trial load (Wittrick and Williams, 1971). */
-import type { Mesh } from './mesh.ts';
+import type { Mesh, MeshPiece } from './mesh.ts';
 import type { BarProblem } from './model.ts';
 import { fieldsOf, type PieceFields } from './pieceFields.ts';
 import { Skyline } from './skyline.ts';
@@ -17,9 +17,9 @@ export interface Trial {
 
 /** Where the numbers of a piece's stiffness go: values[place] += weight · number[source]. Worked out once, so that a trial is a short loop. */
 interface Scatter {
-  readonly place: Int32Array;
-  readonly source: Int32Array;
-  readonly weight: Float64Array;
+  readonly place: readonly number[];
+  readonly source: readonly number[];
+  readonly weight: readonly number[];
 }
 
 /** One bar of a system: what it is, its mesh, and which unknowns it has. */
@@ -107,11 +107,17 @@ class LoadedPart {
     const { pieces } = this.#mesh;
     const numbers = this.#numbers;
     let clamped = 0;
+    let own = 0;
+    let before: MeshPiece | null = null;
     for (let k = 0; k < pieces.length; k++) {
       const piece = pieces[k];
       const scatter = this.#scatters[k];
       if (!piece || !scatter) continue;
-      clamped += this.#numbersOf(piece.length, piece.share * factor);
+      // Pieces that are alike have the same numbers.
+      if (piece.length !== before?.length || piece.share !== before.share)
+        own = this.#numbersOf(piece.length, piece.share * factor);
+      before = piece;
+      clamped += own;
       const { place, source, weight } = scatter;
       for (let e = 0; e < place.length; e++) {
         const at = place[e] ?? 0;
@@ -196,11 +202,7 @@ function scatterOf(mesh: Mesh, unknowns: Unknowns, matrix: Skyline, k: number, m
           weight.push(share);
         }
     }
-  return {
-    place: Int32Array.from(place),
-    source: Int32Array.from(source),
-    weight: Float64Array.from(weight),
-  };
+  return { place, source, weight };
 }
 
 function addSprings(matrix: Skyline, mesh: Mesh, unknowns: Unknowns): void {
