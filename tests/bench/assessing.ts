@@ -1,6 +1,6 @@
 /** Time and memory of `assess`: by the marks, and with stiffness and critical loads beside them. */
 import { assess } from '../../core/assess.ts';
-import { CATALOGUES, DIAGONALS_EACH, fourPanelBays } from './given.ts';
+import { CATALOGUES, DIAGONALS_EACH, fourPanelBays, freeRow } from './given.ts';
 import { heapKept, timed } from './measured.ts';
 import { ms, type Row, row } from './row.ts';
 
@@ -19,6 +19,12 @@ export function assessing(): readonly Row[] {
   const tenThousand = fourPanelBays(MANY);
   const many = timed(() => assess(tenThousand, CATALOGUES, 'by the marks'), 3, 0);
   const growth = many.least / marks.least;
+
+  const drawn = [500, 5000].map((pairs) => {
+    const project = freeRow(pairs);
+    return timed(() => assess(project, CATALOGUES, 'by the marks'), 3, 1).least;
+  });
+  const freeGrowth = (drawn[1] ?? 0) / (drawn[0] ?? 1);
 
   return [
     row(
@@ -39,6 +45,13 @@ export function assessing(): readonly Row[] {
       `× ${growth.toFixed(1)}`,
       `about × 10, at most × ${LINEAR}`,
       growth <= LINEAR,
+    ),
+    row('one bay drawn freely, 10 000 crossed bars, least of 3', ms(drawn[1] ?? 0)),
+    row(
+      '  growth from 1 000 such bars',
+      `× ${freeGrowth.toFixed(1)}`,
+      `about × 10, at most × ${LINEAR}`,
+      freeGrowth <= LINEAR,
     ),
     row(
       `assess with all levels, 1 000 four-panel bays, median of ${all.runs}`,

@@ -4,11 +4,11 @@ import path from 'node:path';
 import { gzipSync } from 'node:zlib';
 import { type Row, row } from './row.ts';
 
-const OUT = path.resolve(import.meta.dirname, '../../out/renderer');
 const GOAL = 600_000;
 
-export function bundle(): readonly Row[] {
-  const page = path.join(OUT, 'index.html');
+/** @param root folder of the project, with what was built under `out` */
+export function bundle(root: string): readonly Row[] {
+  const page = path.join(root, 'out/renderer/index.html');
   if (!existsSync(page))
     return [row('renderer bundle', 'not built: run npm run build', 'under 600 kB gzipped')];
   const files = initialFiles(page);
@@ -29,7 +29,7 @@ function initialFiles(page: string): readonly string[] {
     .map(([tag]) => tag)
     .filter((tag) => /<script\b/.test(tag) || /rel="(?:stylesheet|modulepreload)"/.test(tag))
     .flatMap((tag) => /(?:src|href)="([^"]+)"/.exec(tag)?.[1] ?? [])
-    .map((name) => path.resolve(OUT, name));
+    .map((name) => path.resolve(path.dirname(page), name));
   const found = new Set<string>([page]);
   const waiting = [...named];
   for (let next = waiting.pop(); next !== undefined; next = waiting.pop()) {

@@ -1,9 +1,11 @@
 /** The project that is measured: rows of wall bays of four crossed tiers, every crossing joined. */
-import { readFileSync } from 'node:fs';
-import type { Catalogue, CatalogueId, Catalogues } from '../../core/catalogue/model.ts';
+import au from '../../assets/catalogues/au.json' with { type: 'json' };
+import en from '../../assets/catalogues/en.json' with { type: 'json' };
+import us from '../../assets/catalogues/us.json' with { type: 'json' };
+import type { Catalogues } from '../../core/catalogue/model.ts';
 import { readCatalogue } from '../../core/catalogue/readCatalogue.ts';
 import type { Bay, Join, Project } from '../../core/project/model.ts';
-import { newWallBay } from '../../core/project/newBay.ts';
+import { newFreeBay, newWallBay } from '../../core/project/newBay.ts';
 import { newProject } from '../../core/project/newProject.ts';
 
 const TIERS = ['t1', 't2', 't3', 't4'] as const;
@@ -27,10 +29,29 @@ function fourPanelBay(k: number): Bay {
   };
 }
 
-export const CATALOGUES: Catalogues = { en: catalogue('en'), us: catalogue('us'), au: catalogue('au') };
-
-function catalogue(id: CatalogueId): Catalogue {
-  return readCatalogue(
-    JSON.parse(readFileSync(new URL(`../../assets/catalogues/${id}.json`, import.meta.url), 'utf8')),
-  );
+/** One bay drawn freely: pairs of crossed diagonals in a row, as a drawing brought in from elsewhere would give. */
+export function freeRow(pairs: number): Project {
+  const made = newFreeBay('F1', 'a long row');
+  if (made.recipe.kind !== 'free') throw new Error('a free bay is not free');
+  const each = Array.from({ length: pairs }, (_, k) => k);
+  const node = (id: string, x: number, z: number) => ({ id, at: [x, 0, z] as const, support: true });
+  const bar = (id: string, from: string, to: string) =>
+    ({ id, from, to, role: 'diagonal', member: null }) as const;
+  const recipe = {
+    ...made.recipe,
+    nodes: each.flatMap((k) => [
+      node(`a${k}`, k * 5000, 0),
+      node(`b${k}`, k * 5000 + 4000, 0),
+      node(`c${k}`, k * 5000 + 4000, 4000),
+      node(`d${k}`, k * 5000, 4000),
+    ]),
+    bars: each.flatMap((k) => [bar(`p${k}`, `a${k}`, `c${k}`), bar(`q${k}`, `b${k}`, `d${k}`)]),
+  };
+  return { ...newProject('measured'), bays: [{ ...made, recipe }] };
 }
+
+export const CATALOGUES: Catalogues = {
+  en: readCatalogue(en),
+  us: readCatalogue(us),
+  au: readCatalogue(au),
+};
