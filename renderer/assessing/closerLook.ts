@@ -1,6 +1,6 @@
 /** Follows what is chosen, and asks for what is worth a closer look: the study of the bar always, the push and the bay's joins where they are shown. */
 import type { StoreApi } from 'zustand/vanilla';
-import type { Closer, PushQuestion, RelianceQuestion, StudyQuestion } from '../store/closer.ts';
+import type { Closer, PushQuestion, RelianceQuestion, StudyQuestion } from '../store/closerAnswers.ts';
 import { pushedAt } from '../store/pushing.ts';
 import { shownAssessed } from '../store/shown.ts';
 import type { WindowState } from '../store/windowState.ts';

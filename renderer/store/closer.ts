@@ -1,39 +1,8 @@
-/** What is worked out of the chosen bar and its bay when someone looks closer; each answer says of what it is. */
+/** The answers about the chosen bar, as they are shown. */
 import type { PushTest } from '../../core/frame/pushTest.ts';
-import type { BarId } from '../../core/layout/model.ts';
-import type { Project } from '../../core/project/model.ts';
 import type { BarStudy, Reliance } from '../../core/study/model.ts';
 import { shownAssessed } from './shown.ts';
 import type { WindowState } from './windowState.ts';
-
-export interface StudyQuestion {
-  readonly project: Project;
-  readonly bar: BarId;
-}
-
-export interface PushQuestion extends StudyQuestion {
-  /** mm from end i. */
-  readonly at: number;
-}
-
-export interface RelianceQuestion {
-  readonly project: Project;
-  readonly bay: string;
-}
-
-export interface Answered<Question, Answer> {
-  readonly question: Question;
-  /** Null: there is nothing to say of it, or the worker failed. */
-  readonly answer: Answer | null;
-}
-
-export interface Closer {
-  readonly study: Answered<StudyQuestion, BarStudy> | null;
-  readonly push: Answered<PushQuestion, PushTest> | null;
-  readonly reliance: Answered<RelianceQuestion, readonly Reliance[]> | null;
-}
-
-export const NOTHING_CLOSER: Closer = { study: null, push: null, reliance: null };
 
 /** The study of the chosen bar as it is shown; null while it is worked out. */
 export function shownStudy(state: WindowState): BarStudy | null {

@@ -6,11 +6,11 @@ import type { Edit } from '../../core/project/edit.ts';
 import type { Project } from '../../core/project/model.ts';
 import type { ProjectProblem } from '../../core/project/problem.ts';
 import type { ThemeSetting } from '../theme/themeSetting.ts';
-import { NOTHING_CLOSER } from './closer.ts';
+import { NOTHING_CLOSER } from './closerAnswers.ts';
 import { coalescingKey } from './coalescing.ts';
 import type { Dialog } from './dialog.ts';
 import { recorded, redone, startedHistory, undone } from './history.ts';
-import { NO_PUSH, type Pushing } from './pushing.ts';
+import { NO_PUSH, type Pushing } from './push.ts';
 import { sameProject } from './sameProject.ts';
 import {
   type BarEnd,

@@ -3,10 +3,10 @@ import type { Assessment } from '../../core/assessment.ts';
 import type { Project } from '../../core/project/model.ts';
 import { newProject } from '../../core/project/newProject.ts';
 import type { ThemeSetting } from '../theme/themeSetting.ts';
-import { type Closer, NOTHING_CLOSER } from './closer.ts';
+import { type Closer, NOTHING_CLOSER } from './closerAnswers.ts';
 import type { Dialog } from './dialog.ts';
 import { type History, startedHistory } from './history.ts';
-import { NO_PUSH, type Pushing } from './pushing.ts';
+import { NO_PUSH, type Pushing } from './push.ts';
 import { NOTHING_SELECTED, type Selection } from './selection.ts';
 import type { Trying } from './trying.ts';
 
