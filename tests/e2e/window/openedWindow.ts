@@ -48,6 +48,8 @@ export class WindowStand {
     if (wish.before !== undefined) await context.addInitScript({ content: wish.before });
     const page = await context.newPage();
     const complaints: string[] = [];
+    // Chromium hands choosers over only while somebody listens, and takes a moment to begin: listen from the start.
+    page.on('filechooser', () => {});
     page.on('console', (message) => {
       if (message.type() === 'error') complaints.push(message.text());
     });

@@ -42,18 +42,18 @@ describe('a wall bay from nothing', () => {
     await newWall();
     // Nothing joined: all lanes run through 6.000 m.
     const free = await lanes(page, 'D1');
-    expect(free['v']).toBeGreaterThan((6000 / RV) * 0.995);
-    expect(free['v']).toBeLessThan((6000 / RV) * 1.005);
+    expect(free.v).toBeGreaterThan((6000 / RV) * 0.995);
+    expect(free.v).toBeLessThan((6000 / RV) * 1.005);
 
     await page.locator('[data-crossing]').first().click();
     const panel = page.getByRole('region', { name: /^Crossing D1/ });
     await panel.getByRole('radio', { name: 'bolted through' }).locator('xpath=ancestor::label').click();
     // Held in the plane at the middle: x, u and v are cut, y runs through.
-    await expect.poll(async () => (await lanes(page, 'D1'))['v']).toBeLessThan((3000 / RV) * 1.005);
+    await expect.poll(async () => (await lanes(page, 'D1')).v).toBeLessThan((3000 / RV) * 1.005);
     const held = await lanes(page, 'D1');
-    expect(held['y']).toBeGreaterThan((6000 / RY) * 0.995);
-    expect(held['y']).toBeLessThan((6000 / RY) * 1.005);
-    expect(held['x']).toBeLessThan((3000 / RY) * 1.005);
+    expect(held.y).toBeGreaterThan((6000 / RY) * 0.995);
+    expect(held.y).toBeLessThan((6000 / RY) * 1.005);
+    expect(held.x).toBeLessThan((3000 / RY) * 1.005);
     await page.keyboard.press('Escape');
 
     const undo = page.getByRole('button', { name: /^Undo/ });
@@ -62,7 +62,7 @@ describe('a wall bay from nothing', () => {
     const redo = page.getByRole('button', { name: /^Redo/ });
     while (await redo.isEnabled()) await redo.click();
     await choose(page, 'D1');
-    expect((await lanes(page, 'D1'))['y']).toBe(held['y']);
+    expect((await lanes(page, 'D1')).y).toBe(held.y);
   });
 
   it('is saved, opened again as it was, and its schedule exported', async () => {
@@ -116,9 +116,9 @@ describe('the example', () => {
     await trial.getByRole('button', { name: /^Keep/ }).click();
     await expect.poll(() => trial.count()).toBe(0);
     // 90×90×7 out of the plane over 7.324 m: 266, below the limit.
-    await expect.poll(async () => (await lanes(page, 'D2'))['y']).toBe(266);
+    await expect.poll(async () => (await lanes(page, 'D2')).y).toBe(266);
     await page.keyboard.press('Control+z');
-    await expect.poll(async () => (await lanes(page, 'D2'))['y']).toBe(before['y']);
+    await expect.poll(async () => (await lanes(page, 'D2')).y).toBe(before.y);
   });
 
   it('lets an angle be picked from the shortlist by keys', async () => {
