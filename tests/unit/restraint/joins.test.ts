@@ -240,6 +240,45 @@ describe('a bar that ends on another', () => {
   });
 });
 
+describe('a point in the middle of a straight run of bars', () => {
+  /** A knee from the studied bar up to the middle of two bars in line, whose far ends are held. */
+  const under = (role: 'beam' | 'tie') =>
+    middleOf(
+      restraintIn(
+        assessed(
+          bay(
+            free(
+              {
+                n1: [0, 0, 0],
+                n2: [8000, 0, 0],
+                n3: [4000, 0, 0],
+                n4: [4000, 0, 3000],
+                n5: [0, 0, 3000],
+                n6: [8000, 0, 3000],
+              },
+              [
+                ['b1', 'n1', 'n2'],
+                ['k1', 'n3', 'n4', 'knee'],
+                ['m1', 'n5', 'n4', role],
+                ['m2', 'n4', 'n6', role],
+              ],
+              { free: ['n3', 'n4'] },
+            ),
+          ),
+        ),
+        'B/b1',
+      ),
+    );
+
+  it('is held by a beam that runs straight through, by its bending', () => {
+    expectHeldInPlane(under('beam'));
+  });
+
+  it('is not held by two ties in line, which hold nothing across themselves', () => {
+    expect(under('tie').held).toEqual({ ways: 0 });
+  });
+});
+
 describe('the ends of a bar', () => {
   it('hold every way, twist included', () => {
     const { stations } = restraintIn(assessed(crossed(null)), 'B/t1.rise');

@@ -42,7 +42,7 @@ describe('the lanes of an equal angle', () => {
   });
 
   it('may then reach 300 r_y instead of 300 r_v', () => {
-    // Issue of the trade: the limit of 300 is met up to 300 × 21.30 = 6391 mm; without the join up to 300 × 13.71 = 4112 mm.
+    // The limit of 300 is met up to 300 × 21.30 = 6391 mm; without the join up to 300 × 13.71 = 4112 mm.
     const at = (length: number, joins: Bay['joins']) =>
       restraintIn(
         assessed(

@@ -208,6 +208,8 @@ describe('a group that shares a size', () => {
     // 7211 over 300 is 24.04; 6500 over 200, for compression, is 32.5: the shorter bar asks for more.
     expect(list.bars).toEqual(group);
     expect(list.neededRadius.v).toBeCloseTo(32.5, 9);
+    // In whatever order they are named.
+    expect(listFor(made, [...group].reverse()).neededRadius.v).toBeCloseTo(32.5, 9);
     for (const candidate of list.candidates) expect(candidate.bar).toBe('B/t2.rise');
     expect(named(list, '150x150x15').limit).toBe(200);
   });
