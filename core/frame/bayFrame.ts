@@ -96,9 +96,11 @@ class BayFrameBuilder {
     return plane;
   }
 
-  #add(name: string, at: Vec3, fixed: boolean): number {
+  /** Solved for in the axes of the plane of the first bar that comes there. */
+  #add(name: string, at: Vec3, fixed: boolean, bar: Bar): number {
     const index = this.#nodes.length;
-    this.#nodes.push({ name, at, movesWith: index, fixed });
+    const { right, up, normal } = this.#planeOf(bar);
+    this.#nodes.push({ name, at, movesWith: index, fixed, axes: [right, up, normal] });
     return index;
   }
 
@@ -111,7 +113,7 @@ class BayFrameBuilder {
     }
     const node = this.#layout.nodes.get(id);
     const holding = this.#holdings.get(this.#bay.id)?.held.get(id);
-    const index = this.#add(node?.label ?? id, node?.at ?? bar.from, holding?.kind === 'support');
+    const index = this.#add(node?.label ?? id, node?.at ?? bar.from, holding?.kind === 'support', bar);
     this.#layoutNode.set(id, index);
     if (!bar.line) this.#holdOutOfPlane(index, this.#planeOf(bar).normal);
     return index;
@@ -225,7 +227,7 @@ class BayFrameBuilder {
       if (cut && !known.cut) places[places.indexOf(known)] = { ...known, cut };
       return known.node;
     }
-    const node = this.#add(`${bar.mark} between its ends`, where, false);
+    const node = this.#add(`${bar.mark} between its ends`, where, false, bar);
     places.push({ at, node, cut });
     return node;
   }

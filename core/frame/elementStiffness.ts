@@ -16,7 +16,7 @@ export function elementStiffness(element: FrameElement): Float64Array {
 export interface CountedStiffness {
   readonly K: Float64Array;
   readonly hidden: number;
-  /** Diagonal before releases. */
+  /** The four 3 × 3 blocks on the diagonal before releases: displacement and rotation at i, then at j. */
   readonly gross: Float64Array;
 }
 
@@ -33,7 +33,10 @@ export function elementWithCount(element: FrameElement): CountedStiffness {
     clampedLoadsBelow(element.EIp, -element.tension, length) +
     clampedLoadsBelow(element.EIq, -element.tension, length);
   // What is left on the diagonal after letting turns free is noise below a share of what stood there before.
-  const gross = Float64Array.from({ length: ELEMENT_SIZE }, (_, k) => Math.abs(K[k * ELEMENT_SIZE + k] ?? 0));
+  const gross = Float64Array.from({ length: 4 * 9 }, (_, at) => {
+    const first = 3 * Math.floor(at / 9);
+    return K[(first + Math.floor((at % 9) / 3)) * ELEMENT_SIZE + first + (at % 3)] ?? 0;
+  });
   for (const { end, about } of element.releases) if (release(K, end === 'i' ? 3 : 9, about) < 0) hidden += 1;
   return { K, hidden, gross };
 }

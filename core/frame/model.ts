@@ -10,7 +10,15 @@ export interface FrameNode {
   readonly movesWith: number;
   /** Fixed in place and against turning. */
   readonly fixed: boolean;
+  /**
+   * In which it is solved for; global when left out. Those of the plane that holds it keep what does not give apart from what does, so that
+   * a plane that lies askew in space costs no digits.
+   */
+  readonly axes?: NodeAxes;
 }
+
+/** Three unit vectors square to each other. */
+export type NodeAxes = readonly [Vec3, Vec3, Vec3];
 
 /** A straight prismatic piece of a bar between two nodes. */
 export interface FrameElement {

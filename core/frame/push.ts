@@ -2,8 +2,9 @@
 import { dot, type Vec2, type Vec3 } from '../geometry/vector.ts';
 import type { BarId } from '../layout/model.ts';
 import { inverse, principalOf2 } from '../sparse/dense.ts';
-import { ELEMENT_SIZE, elementStiffness } from './elementStiffness.ts';
+import { ELEMENT_SIZE } from './elementStiffness.ts';
 import type { FrameElement } from './model.ts';
+import { intoAxes } from './nodeAxes.ts';
 import type { FrameSolver } from './solver.ts';
 
 /** What the section plane sees of a stiffness: two principal values, N/mm, and the direction of the stiffer. */
@@ -80,13 +81,21 @@ export function offeredTo(
   );
   if (stations.some((three) => three.some((k) => k < 0))) return null;
   const K = picked(rest, unknowns.length, stations.flat());
-  addAxial(K, along, elements[0]?.EA ?? 0, elements[0]?.direction ?? [0, 0, 0]);
+  const into = (node: number, v: Vec3): Vec3 => intoAxes(solver.displacementAxes(node), v);
+  const [first] = elements;
+  if (first)
+    addAxial(
+      K,
+      along.map(({ at, node }) => ({ at, e: into(node, first.direction) })),
+      first.EA,
+    );
   const size = stations.length * 3;
   // A cut partner offers nothing out of the plane: a trace of stiffness lets that be said as a number near zero.
   for (let k = 0; k < size; k++) K[k * size + k] = (K[k * size + k] ?? 0) + TRACE;
   const F = inverse(K, size);
   if (!F) return null;
   const offered = inner.map(({ at, node }, s): StationStiffness | null => {
+    const [x, y] = [into(node, axes.x), into(node, axes.y)];
     const along2 = (p: Vec3, q: Vec3): number => {
       let sum = 0;
       for (let i = 0; i < 3; i++)
@@ -94,11 +103,13 @@ export function offeredTo(
           sum += (p[i] ?? 0) * (F[(3 * s + i) * size + 3 * s + j] ?? 0) * (q[j] ?? 0);
       return sum;
     };
-    const ellipse = ellipseOf([along2(axes.x, axes.x), along2(axes.x, axes.y), along2(axes.y, axes.y)]);
+    const ellipse = ellipseOf([along2(x, x), along2(x, y), along2(y, y)]);
     return ellipse && { at, node, ellipse };
   });
   return offered.every((each) => each !== null) ? offered : null;
 }
+
+const NO_WAY: Vec3 = [0, 0, 0];
 
 /** N/mm: nothing in steelwork is this soft. */
 const TRACE = 1e-6;
@@ -152,7 +163,7 @@ function ownStiffness(
   };
   const blocks = elements.map((element) => ({
     at: solver.unknownsOf(element.i, element.j).map(indexOf),
-    K: elementStiffness(element),
+    K: solver.stiffnessOf(element).K,
   }));
   const n = size + extra.size;
   const K = new Float64Array(n * n);
@@ -200,8 +211,12 @@ function picked(K: Float64Array, size: number, wanted: readonly number[]): Float
   return result;
 }
 
-/** The bar's axial stiffness between its places, ends held. */
-function addAxial(K: Float64Array, along: readonly { readonly at: number }[], EA: number, e: Vec3): void {
+/** The bar's axial stiffness between its places, ends held; `e` is its direction in the axes of each. */
+function addAxial(
+  K: Float64Array,
+  along: readonly { readonly at: number; readonly e: Vec3 }[],
+  EA: number,
+): void {
   const inner = along.length - 2;
   const n = inner * 3;
   along.slice(1).forEach((to, k) => {
@@ -216,10 +231,11 @@ function addAxial(K: Float64Array, along: readonly { readonly at: number }[], EA
     ];
     for (const [p, q, sign] of pairs) {
       if (p < 0 || q < 0 || p >= inner || q >= inner) continue;
+      const [ep, eq] = [along[p + 1]?.e ?? NO_WAY, along[q + 1]?.e ?? NO_WAY];
       for (let i = 0; i < 3; i++)
         for (let j = 0; j < 3; j++) {
           const at = (3 * p + i) * n + 3 * q + j;
-          K[at] = (K[at] ?? 0) + sign * stiffness * (e[i] ?? 0) * (e[j] ?? 0);
+          K[at] = (K[at] ?? 0) + sign * stiffness * (ep[i] ?? 0) * (eq[j] ?? 0);
         }
     }
   });

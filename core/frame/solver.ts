@@ -3,8 +3,9 @@ import type { BarId } from '../layout/model.ts';
 import { eliminationOrder } from '../sparse/eliminationOrder.ts';
 import { analysed, type Factored, factored, type Symbolic, solved } from '../sparse/factor.ts';
 import { MatrixGatherer, type SymmetricMatrix } from '../sparse/symmetricMatrix.ts';
-import { ELEMENT_SIZE, elementWithCount } from './elementStiffness.ts';
-import type { Frame, Mechanism, NodeMotion } from './model.ts';
+import { type CountedStiffness, ELEMENT_SIZE, elementWithCount } from './elementStiffness.ts';
+import type { Frame, FrameElement, Mechanism, NodeAxes, NodeMotion } from './model.ts';
+import { diagonalIn, intoAxes, outOfAxes, turnElement } from './nodeAxes.ts';
 
 /** A force on a node, N. */
 export interface NodeForce {
@@ -12,11 +13,14 @@ export interface NodeForce {
   readonly force: Vec3;
 }
 
+/** Share of a bar's bending stiffness that stands for none: some hundred times rounding, and far below what anything real has. */
+const TRACE = 1e-13;
+
 /** A frame assembled and factored, ready to be pushed. */
 export class FrameSolver {
   readonly frame: Frame;
   readonly matrix: SymmetricMatrix;
-  /** First unknown of the displacements and of the rotations of each node; −1 where fixed. */
+  /** First unknown of the displacements and of the rotations of each node, in its axes; −1 where fixed. */
   readonly displacementOf: Int32Array;
   readonly rotationOf: Int32Array;
   readonly #factors: Factored;
@@ -90,7 +94,8 @@ export class FrameSolver {
     for (const { node, force } of forces) {
       const first = this.displacementOf[node] ?? -1;
       if (first < 0) continue;
-      for (let k = 0; k < 3; k++) load[first + k] = (load[first + k] ?? 0) + (force[k] ?? 0);
+      const own = intoAxes(this.displacementAxes(node), force);
+      for (let k = 0; k < 3; k++) load[first + k] = (load[first + k] ?? 0) + (own[k] ?? 0);
     }
     return load;
   }
@@ -99,12 +104,41 @@ export class FrameSolver {
     const at = (first: number, k: number): number => (first < 0 ? 0 : (x[first + k] ?? 0));
     const d = this.displacementOf[node] ?? -1;
     const r = this.rotationOf[node] ?? -1;
-    return [at(d, 0), at(d, 1), at(d, 2), at(r, 0), at(r, 1), at(r, 2)];
+    return [
+      ...outOfAxes(this.displacementAxes(node), [at(d, 0), at(d, 1), at(d, 2)]),
+      ...outOfAxes(this.#rotationAxes(node), [at(r, 0), at(r, 1), at(r, 2)]),
+    ];
+  }
+
+  /** Axes in which a node's displacement is counted: those of the node that it displaces with. */
+  displacementAxes(node: number): NodeAxes | undefined {
+    return this.frame.nodes[leader(this.frame, node)]?.axes;
+  }
+
+  #rotationAxes(node: number): NodeAxes | undefined {
+    return this.frame.nodes[node]?.axes;
+  }
+
+  /** Stiffness of an element in the order of `unknownsOf`, in the axes of its nodes. */
+  stiffnessOf(element: FrameElement): CountedStiffness {
+    const stiffness = elementWithCount(element);
+    turnElement(stiffness.K, this.#axesOf(element));
+    return stiffness;
+  }
+
+  #axesOf({ i, j }: FrameElement): readonly (NodeAxes | undefined)[] {
+    return [i, j].flatMap((node) => [this.displacementAxes(node), this.#rotationAxes(node)]);
   }
 
   /** Ways to move without resistance in which some node displaces. A rotation that nothing resists and that moves nothing is no mechanism. */
   mechanisms(): readonly Mechanism[] {
-    return this.#factors.vanished.flatMap((unknown) => this.#mechanismOf(unknown) ?? []);
+    const found: Mechanism[] = [];
+    for (const unknown of this.#factors.vanished) {
+      const mechanism = this.#mechanismOf(unknown);
+      // The loose rotations of a node that moves take its motion with them.
+      if (mechanism && !found.some((known) => isSameMotion(known, mechanism))) found.push(mechanism);
+    }
+    return found;
   }
 
   #mechanismOf(unknown: number): Mechanism | null {
@@ -139,13 +173,15 @@ export class FrameSolver {
   #assemble(gatherer: MatrixGatherer, size: number): Float64Array {
     const gross = new Float64Array(size);
     for (const element of this.frame.elements) {
-      const { K, hidden, gross: own } = elementWithCount(element);
+      const { K, hidden, gross: own } = this.stiffnessOf(element);
       this.#hidden += hidden;
       const unknowns = this.unknownsOf(element.i, element.j);
       addBlock(gatherer, unknowns, K, ELEMENT_SIZE);
+      const diagonal = diagonalIn(this.#axesOf(element), own);
       unknowns.forEach((unknown, k) => {
-        if (unknown >= 0) gross[unknown] = (gross[unknown] ?? 0) + (own[k] ?? 0);
+        if (unknown >= 0) gross[unknown] = (gross[unknown] ?? 0) + (diagonal[k] ?? 0);
       });
+      this.#addTrace(gatherer, element);
     }
     for (const spring of this.frame.springs) {
       const first = spring.kind === 'displacement' ? this.displacementOf : this.rotationOf;
@@ -154,7 +190,8 @@ export class FrameSolver {
       const put = (node: number, sign: number): void => {
         const at = first[node] ?? -1;
         if (at < 0) return;
-        spring.direction.forEach((d, k) => {
+        const axes = spring.kind === 'displacement' ? this.displacementAxes(node) : this.#rotationAxes(node);
+        intoAxes(axes, spring.direction).forEach((d, k) => {
           unknowns.push(at + k);
           weights.push(sign * d);
         });
@@ -169,6 +206,13 @@ export class FrameSolver {
         }
     }
     return gross;
+  }
+
+  /** Where all bars of a node are hinged, what is left of its rotation is rounding, of either sign. This makes it positive, whichever way it lies in space. */
+  #addTrace(gatherer: MatrixGatherer, { i, j, EIp, EIq, length }: FrameElement): void {
+    const trace = (TRACE * 4 * (EIp + EIq)) / length;
+    for (const first of [this.rotationOf[i] ?? -1, this.rotationOf[j] ?? -1])
+      if (first >= 0) for (let k = 0; k < 3; k++) gatherer.add(first + k, first + k, trace);
   }
 
   /** Joints are ordered as wholes, three unknowns at a time. */
@@ -189,6 +233,18 @@ export class FrameSolver {
     });
     return order;
   }
+}
+
+/** To and fro is one motion. */
+function isSameMotion(a: Mechanism, b: Mechanism): boolean {
+  const other = new Map(b.moving.map(({ node, displacement }) => [node, displacement]));
+  const square = ({ moving }: Mechanism): number =>
+    moving.reduce((sum, { displacement: d }) => sum + dot(d, d), 0);
+  const both = a.moving.reduce((sum, { node, displacement }) => {
+    const d = other.get(node);
+    return d ? sum + dot(displacement, d) : sum;
+  }, 0);
+  return both * both > 0.999 * square(a) * square(b);
 }
 
 function leader(frame: Frame, node: number): number {

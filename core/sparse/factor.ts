@@ -80,6 +80,10 @@ function reordered(matrix: SymmetricMatrix, place: Int32Array) {
 
 /** A pivot this small beside what it was put together from has vanished. */
 const VANISHED = 1e-11;
+/** One smaller than this may have vanished but for the rounding of those before it: the motion that it stands for is looked at. */
+const SUSPECT = 1e-7;
+/** What a motion resists beside what its parts would, when it resists nothing. */
+const NO_RESISTANCE = 1e-13;
 
 /** @param gross what each diagonal entry was put together from, before anything cancelled; the entry itself where not given */
 export function factored(
@@ -135,7 +139,11 @@ export function factored(
       lValue[end] = l;
       filled[i] = (filled[i] ?? 0) + 1;
     }
-    if (Math.abs(pivot) <= VANISHED * began || began === 0) {
+    const lost = Math.abs(pivot) / (began || 1);
+    if (
+      lost <= VANISHED ||
+      (lost < SUSPECT && motionResists(matrix, symbolic, gross, { lRow, lValue, filled }, k) < NO_RESISTANCE)
+    ) {
       vanished.push(order[k] ?? 0);
       // Held from here on, so that the rest can be judged.
       pivot = began > 0 ? began : 1;
@@ -146,6 +154,46 @@ export function factored(
     if (pivot < 0) negative += 1;
   }
   return { symbolic, row: lRow, value: lValue, diagonal, negative, vanished };
+}
+
+interface Columns {
+  readonly lRow: Int32Array;
+  readonly lValue: Float64Array;
+  readonly filled: Int32Array;
+}
+
+/**
+ * The motion of one unknown, those before it following and those after it held: what it resists, by the matrix itself, over what its
+ * parts would resist one by one. A small pivot carries the rounding of all before it; this does not.
+ */
+function motionResists(
+  matrix: SymmetricMatrix,
+  { columnStart, start, row, from, order }: Symbolic,
+  gross: Float64Array | null,
+  { lRow, lValue, filled }: Columns,
+  k: number,
+): number {
+  const x = new Float64Array(k + 1);
+  x[k] = 1;
+  for (let i = k - 1; i >= 0; i--) {
+    const first = columnStart[i] ?? 0;
+    let sum = 0;
+    for (let p = first; p < first + (filled[i] ?? 0); p++) sum -= (lValue[p] ?? 0) * (x[lRow[p] ?? 0] ?? 0);
+    x[i] = sum;
+  }
+  let resisted = 0;
+  let parts = 0;
+  for (let c = 0; c <= k; c++) {
+    const xc = x[c] ?? 0;
+    if (xc === 0) continue;
+    for (let p = start[c] ?? 0; p < (start[c + 1] ?? 0); p++) {
+      const r = row[p] ?? 0;
+      const a = matrix.value[from[p] ?? 0] ?? 0;
+      resisted += (r === c ? 1 : 2) * a * xc * (x[r] ?? 0);
+      if (r === c) parts += Math.max(Math.abs(a), gross?.[order[c] ?? 0] ?? 0) * xc * xc;
+    }
+  }
+  return parts > 0 ? Math.abs(resisted) / parts : 0;
 }
 
 /** Solves A x = b; b stays as it is. */
