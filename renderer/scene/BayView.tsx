@@ -1,6 +1,9 @@
 import { type JSX, type KeyboardEvent, useCallback, useMemo, useRef, useState } from 'react';
 import type { BayLayout, Layout } from '../../core/layout/model.ts';
 import type { BayViewProps } from './bayViewProps.ts';
+import { overlayMotion } from './bowing/overlayMotion.ts';
+import { forceAfterKey, placeAfterKey, pushKey } from './bowing/pushKeys.ts';
+import { usePushPointer } from './bowing/usePushPointer.ts';
 import { FlatScene } from './flat/FlatScene.tsx';
 import { mergedSteel } from './geometry/mergedSteel.ts';
 import { targetsOf } from './geometry/pick.ts';
@@ -13,6 +16,7 @@ import { reducedMotion } from './overlay/reducedMotion.ts';
 import { viewKey } from './pointer/keys.ts';
 import { usePointer } from './pointer/usePointer.ts';
 import './scene.css';
+import './bowing/motion.css';
 import { useSize } from './useSize.ts';
 import type { SheetView } from './view/sheetView.ts';
 import { subjectOf } from './view/subject.ts';
@@ -38,7 +42,7 @@ export function BayView(props: BayViewProps): JSX.Element {
     onHoverBar,
     onViewChange,
   } = props;
-  const { selectedCrossing, units, bow } = props;
+  const { selectedCrossing, units, bow, shape, push, onPush } = props;
   const { layout } = assessment;
   const bay = useMemo(() => bayOf(layout, bayId), [layout, bayId]);
   const [drawnBy, setDrawnBy] = useState<'webgl' | 'flat, none' | 'flat, lost'>(() =>
@@ -79,6 +83,12 @@ export function BayView(props: BayViewProps): JSX.Element {
     [assessment, bayId, selectedBar, selectedCrossing, units, bow],
   );
 
+  const chosen = content.selected;
+  const moves = useMemo(
+    () => overlayMotion(layout, chosen, { shape, push, units, bow }),
+    [layout, chosen, shape, push, units, bow],
+  );
+
   const named = useNamedView({ ...props, layout, bay, camera, size, legend, drawnBy });
   const shown = useCallback((moved: SheetView) => {
     view.current = moved;
@@ -87,8 +97,19 @@ export function BayView(props: BayViewProps): JSX.Element {
   const turned = useCallback(() => onViewChange?.('free'), [onViewChange]);
   const pointer = usePointer({ view, targets, hovered: hoveredBar, onHoverBar, onPick: onSelectBar });
 
+  usePushPointer({ surface, view, bar: chosen, push, onPush });
+  const pushByKey = (event: KeyboardEvent): boolean => {
+    const wish = push === null ? null : pushKey(event.key, event.shiftKey);
+    if (wish === null || push === null || chosen?.angle == null) return false;
+    if (wish.kind === 'place') onPush({ at: placeAfterKey(push.places, push.at, wish.step), force: [0, 0] });
+    else onPush({ force: forceAfterKey(push.byHand ? push.force : [0, 0], wish, push.most, chosen.angle) });
+    event.preventDefault();
+    return true;
+  };
+
   const onKeyDown = (event: KeyboardEvent): void => {
     if (event.ctrlKey || event.metaKey || event.altKey) return;
+    if (pushByKey(event)) return;
     const wish = viewKey(event.key, event.shiftKey);
     if (wish === null) return;
     event.preventDefault();
@@ -119,8 +140,9 @@ export function BayView(props: BayViewProps): JSX.Element {
           role="application"
           // biome-ignore lint/a11y/noNoninteractiveTabindex: the stage takes the keys that turn the view
           tabIndex={0}
+          data-pushes={push === null ? undefined : ''}
           data-over-bar={hoveredBar === null ? undefined : ''}
-          aria-label={stageName(bay, drawnBy === 'webgl')}
+          aria-label={stageName(bay, drawnBy === 'webgl', push === null ? null : (chosen?.mark ?? null))}
           onKeyDown={onKeyDown}
           {...pointer}
         >
@@ -155,8 +177,13 @@ export function BayView(props: BayViewProps): JSX.Element {
             />
           )}
         </div>
-        <Overlay {...props} content={content} handle={overlay} legend={legend} />
-        <Legend element={legendElement} crossings={content.crossings} scale={scale} />
+        <Overlay {...props} content={content} moves={moves} handle={overlay} legend={legend} />
+        <Legend
+          element={legendElement}
+          crossings={content.crossings}
+          scale={scale}
+          motion={moves.motion === null ? null : { kind: moves.motion.kind, times: push?.times ?? 1 }}
+        />
       </div>
       {drawnBy !== 'webgl' && (
         <NoWebgl
@@ -172,8 +199,10 @@ function bayOf(layout: Layout, id: string | null): BayLayout | null {
   return layout.bays.find((one) => one.id === id) ?? null;
 }
 
-function stageName(bay: BayLayout | null, turns: boolean): string {
+function stageName(bay: BayLayout | null, turns: boolean, pushed: string | null): string {
   const of = bay === null ? 'the project' : `bay ${bay.id}`;
+  if (pushed !== null)
+    return `Drawing of ${of}, pushing ${pushed}. Left and right go along it; with shift, up and down push it out of the plane, left and right in it.`;
   const keys = turns ? 'Arrows turn it, shift and arrows move it' : 'Shift and arrows move it';
   return `Drawing of ${of}. ${keys}, plus and minus zoom, Home fits it.`;
 }

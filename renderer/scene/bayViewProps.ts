@@ -1,7 +1,10 @@
 import type { Assessment } from '../../core/assessment.ts';
+import type { BarMovement } from '../../core/frame/pushTest.ts';
 import type { BarId, CrossingId } from '../../core/layout/model.ts';
 import type { UnitSystem } from '../../core/project/model.ts';
 import type { TrailStep } from '../../core/restraint/model.ts';
+import type { ModeInSpace } from '../../core/study/model.ts';
+import type { PushChange, PushShown } from './bowing/pushShown.ts';
 import type { AngleScale } from './geometry/steelPart.ts';
 import type { ViewName } from './view/namedView.ts';
 
@@ -21,12 +24,28 @@ export interface BayViewProps {
   readonly scale: AngleScale;
   /** Whether the selected bar is shown bowed in its free direction. */
   readonly bow: boolean;
+  /** The computed shape that takes the place of the marks' picture; null: there is none, or it is not wanted. */
+  readonly shape: ComputedShape | null;
+  /** Whether a computed shape swings to and fro. */
+  readonly playing: boolean;
+  /** While the chosen bar is pushed; null otherwise. */
+  readonly push: PushShown | null;
+  /** Whether what is offered at the stations of the chosen bar is drawn there. */
+  readonly stiffness: boolean;
+  /** Joins that a change on trial takes away. */
+  readonly removed: readonly CrossingId[];
   /** A hold's way to its support, to light up. */
   readonly trail: readonly TrailStep[] | null;
   readonly onSelectBar: (bar: BarId | null) => void;
   readonly onSelectCrossing: (crossing: CrossingId | null) => void;
   readonly onSelectEnd: (bar: BarId, end: 'i' | 'j') => void;
+  readonly onPush: (change: PushChange) => void;
   readonly onHoverBar: (bar: BarId | null) => void;
   /** The user has turned the view away from the named one. */
   readonly onViewChange?: (view: 'free') => void;
 }
+
+/** The shape in which the chosen bar, or its whole bay, gives way. */
+export type ComputedShape =
+  | { readonly kind: 'bar'; readonly mode: ModeInSpace }
+  | { readonly kind: 'bay'; readonly movement: readonly BarMovement[] };

@@ -4,7 +4,7 @@ import type { UnitSystem } from '../../../core/project/model.ts';
 import type { StationNeed } from '../../../core/study/model.ts';
 import { showStiffness } from '../../../core/units/loads.ts';
 import { useSize } from '../../controls/useSize.ts';
-import { stiffnessPart, TENS } from './stiffnessScale.ts';
+import { stiffnessPart, TENS } from '../../glyphs/stiffnessScale.ts';
 
 interface NeedsScaleProps {
   readonly hold: HoldGrip;

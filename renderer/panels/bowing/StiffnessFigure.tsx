@@ -1,8 +1,8 @@
 import { type JSX, useId } from 'react';
 import type { OfferedStation } from '../../../core/bowing/model.ts';
 import type { Vec2 } from '../../../core/geometry/vector.ts';
+import { halfAxis } from '../../glyphs/stiffnessScale.ts';
 import type { SeenSection } from '../card/sectionGeometry.ts';
-import { halfAxis } from './stiffnessScale.ts';
 
 /** tens: half-axes by the tens of the stiffness. true: half-axes by the movement under one and the same push. */
 export type FigureScale = 'tens' | 'true';

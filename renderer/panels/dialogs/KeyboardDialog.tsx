@@ -12,10 +12,12 @@ interface KeyRow {
 const MOVING: readonly KeyRow[] = [
   { keys: 'F6', does: 'Next part of the window' },
   { keys: 'Shift F6', does: 'Part before' },
-  { keys: 'Esc', does: 'Put back what is on trial, close what is docked' },
+  { keys: 'Esc', does: 'Put back what is on trial or pushed, close what is docked' },
   { keys: 'Enter', does: 'Keep what is on trial' },
   { keys: '↑ ↓', does: 'Rows of the schedule and of lists; a step of a number' },
   { keys: 'Page ↑ ↓', does: 'Ten steps of a number, a page of the schedule' },
+  { keys: '← →', does: 'While pushing: the place on the bar' },
+  { keys: 'Shift ↑ ↓ ← →', does: 'While pushing: out of the plane, in the plane' },
   { keys: '← →', does: 'Tabs, choices, stock angles of the shortlist' },
 ];
 
@@ -53,7 +55,7 @@ function KeyTable({
       <table className="shortcuts" aria-label={title}>
         <tbody>
           {rows.map(({ keys, does }) => (
-            <tr key={keys}>
+            <tr key={does}>
               <th scope="row">{does}</th>
               <td>
                 <kbd>{keys}</kbd>

@@ -30,11 +30,16 @@ interface Note {
   readonly boxes: readonly Box[];
 }
 
+export interface HoldNotes {
+  /** What the words should not cover. */
+  readonly inTheWay: readonly Box[];
+  /** Whether the way that is free is noted too. */
+  readonly free: boolean;
+}
+
 /**
  * What holds the bowed bar between the ends of its bow, and which way it is free: arrows and a few words. Of a bound for mixed holds, the
  * holds that it leaves out are not drawn.
- *
- * @param inTheWay what the words should not cover
  */
 export function holdInk(
   view: SheetView,
@@ -42,7 +47,7 @@ export function holdInk(
   angle: AngleBar,
   restraint: Restraint,
   bow: BowShape,
-  inTheWay: readonly Box[],
+  { inTheWay, free }: HoldNotes,
 ): readonly Ink[] {
   const stopping = restraint.stations.filter((station) => {
     if (station.held.ways !== 1 || station.at <= bow.from + 1 || station.at >= bow.to - 1) return false;
@@ -57,7 +62,7 @@ export function holdInk(
     ink.push(...best.ink);
   };
   for (const station of stopping.slice(0, MOST_HOLDS)) put(heldNotes(view, bar, angle, station));
-  put(freeNotes(view, bar, angle, restraint, bow));
+  if (free) put(freeNotes(view, bar, angle, restraint, bow));
   return ink;
 }
 

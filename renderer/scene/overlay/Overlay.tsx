@@ -4,6 +4,8 @@ import type { Bar, Crossing, Layout } from '../../../core/layout/model.ts';
 import { JoinGlyph } from '../../glyphs/JoinGlyph.tsx';
 import { StatusGlyph } from '../../glyphs/StatusGlyph.tsx';
 import type { BayViewProps } from '../bayViewProps.ts';
+import type { OverlayMotion } from '../bowing/overlayMotion.ts';
+import { useSwing } from '../bowing/useSwing.ts';
 import { Detail } from '../detail/Detail.tsx';
 import type { Size } from '../useSize.ts';
 import type { SheetView } from '../view/sheetView.ts';
@@ -19,6 +21,7 @@ export interface OverlayHandle {
 
 export type OverlayProps = BayViewProps & {
   readonly content: OverlayContent;
+  readonly moves: OverlayMotion;
   readonly handle: RefObject<OverlayHandle | null>;
   readonly legend: Size;
 };
@@ -28,7 +31,7 @@ export type OverlayProps = BayViewProps & {
  * are written straight to the page whenever the view moves.
  */
 export function Overlay(props: OverlayProps) {
-  const { content, handle, assessment, units, trail, legend } = props;
+  const { content, moves, handle, assessment, units, trail, legend, stiffness, removed, playing } = props;
   const root = useRef<HTMLDivElement>(null);
   const ink = useRef<SVGGElement>(null);
   const frame = useRef<SVGGElement>(null);
@@ -38,15 +41,17 @@ export function Overlay(props: OverlayProps) {
   const detailAt = useRef<number | null>(null);
   const view = useRef<SheetView | null>(null);
   const candidates = useRef<ReadonlyMap<string, number>>(new Map());
-  const latest = useRef({ content, assessment, units, trail, legend });
-  latest.current = { content, assessment, units, trail, legend };
+  const latest = useRef({ content, moves, assessment, units, trail, legend, stiffness, removed });
+  latest.current = { content, moves, assessment, units, trail, legend, stiffness, removed };
   const bowed =
-    content.bow === null || content.selected === null
-      ? null
+    moves.key !== null || content.bow === null || content.selected === null
+      ? moves.key
       : `${content.selected.id} ${content.bow.from} ${content.bow.to} ${content.bow.direction.join(' ')}`;
 
   const step = useRef<() => void>(() => {});
   const grown = useBowGrowth(bowed, step);
+  const swings = playing && moves.motion?.kind === 'shape';
+  const swing = useSwing(swings, step);
 
   const repaint = useCallback(() => {
     if (view.current === null || root.current === null || ink.current === null) return;
@@ -54,7 +59,7 @@ export function Overlay(props: OverlayProps) {
     const laid = layOutOverlay({
       view: view.current,
       ...latest.current,
-      grown: grown.current,
+      grown: swings ? swing.current : grown.current,
       sizes: labelSizes(root.current),
       previous: candidates.current,
       previousDetail: detailAt.current,
@@ -68,7 +73,7 @@ export function Overlay(props: OverlayProps) {
     detailAt.current = laid.detail?.place ?? null;
     frame.current.setAttribute('visibility', laid.detail ? 'visible' : 'hidden');
     if (laid.detail) frame.current.setAttribute('transform', `translate(${laid.detail.at.join(' ')})`);
-  }, [grown]);
+  }, [grown, swing, swings]);
   step.current = repaint;
 
   useImperativeHandle(
@@ -83,7 +88,7 @@ export function Overlay(props: OverlayProps) {
   );
   // What is shown has changed under a view that stands still.
   // biome-ignore lint/correctness/useExhaustiveDependencies: the values are read from `latest` at the time of painting
-  useLayoutEffect(repaint, [content, assessment, units, trail, legend, repaint]);
+  useLayoutEffect(repaint, [content, moves, assessment, units, trail, legend, stiffness, removed, repaint]);
 
   return (
     <div ref={root} className="scene-overlay">

@@ -1,7 +1,12 @@
 import type { Assessment } from '../../../core/assessment.ts';
 import type { Vec2 } from '../../../core/geometry/vector.ts';
+import type { CrossingId } from '../../../core/layout/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
 import type { TrailStep } from '../../../core/restraint/model.ts';
+import { motionInk } from '../bowing/motionInk.ts';
+import type { OverlayMotion } from '../bowing/overlayMotion.ts';
+import { pushInk } from '../bowing/pushInk.ts';
+import { stiffnessInk } from '../bowing/stiffnessInk.ts';
 import { detailInk } from '../detail/detailInk.ts';
 import { DETAIL_RADIUS, type DetailPlace, detailPlace } from '../detail/detailPlace.ts';
 import { bowInk } from '../drawing/bowInk.ts';
@@ -26,7 +31,12 @@ export interface OverlayInput {
   readonly assessment: Assessment;
   readonly units: UnitSystem;
   readonly trail: readonly TrailStep[] | null;
-  /** How far the bow has grown, 0 to about 1. */
+  /** What is computed to move, in place of the marks' bow; nothing where neither is wanted. */
+  readonly moves: OverlayMotion;
+  /** Whether what is offered at the stations is drawn there. */
+  readonly stiffness: boolean;
+  readonly removed: readonly CrossingId[];
+  /** How far the bow has grown, 0 to about 1; of a shape that swings, −1 to 1. */
   readonly grown: number;
   /** Of the labels as they stand on the page, px, by bar. */
   readonly sizes: ReadonlyMap<string, { readonly width: number; readonly height: number }>;
@@ -92,6 +102,10 @@ export function layOutOverlay(input: OverlayInput): OverlayLayout {
     ];
   });
   const labels = labelPlaces(wishes, inTheWay, dimensionLines(view, content), sheet, input.previous);
+  const gone = input.removed.flatMap((id): Ink[] => {
+    const at = glyphs.get(id);
+    return at ? [{ kind: 'ring', key: `gone ${id}`, look: 'scene-gone', at, radius: 17 }] : [];
+  });
   const leaders = [...labels].map(
     ([key, place]): Ink => ({
       kind: 'path',
@@ -103,7 +117,14 @@ export function layOutOverlay(input: OverlayInput): OverlayLayout {
   for (const [key, { box }] of labels) places.set(`label ${key}`, { x: box.left, y: box.top });
   const detail = detailOf(input, [...inTheWay, ...[...labels.values()].map((place) => place.box)], glyphs);
   return {
-    ink: [...steelInk, ...leaders, ...(detail?.around ?? []), ...triadInk(view), ...scaleInk(view, units)],
+    ink: [
+      ...steelInk,
+      ...gone,
+      ...leaders,
+      ...(detail?.around ?? []),
+      ...triadInk(view),
+      ...scaleInk(view, units),
+    ],
     places,
     detail,
     candidates: new Map([...labels].map(([key, place]) => [key, place.candidate])),
@@ -161,8 +182,9 @@ function corners(view: SheetView, legend: OverlayInput['legend']): readonly Box[
 }
 
 function inkOf(input: OverlayInput, marks: readonly Box[]): readonly Ink[] {
-  const { view, content, assessment, units, trail, grown } = input;
+  const { view, content, assessment, units, trail, grown, moves } = input;
   const { bay, selected, bow } = content;
+  const isPushed = moves.push !== null;
   const { layout } = assessment;
   const dimensions = bay === null ? [] : dimensionInk(view, bay, units);
   const restraint = selected === null ? null : (assessment.diagonals.get(selected.id)?.restraint ?? null);
@@ -174,10 +196,25 @@ function inkOf(input: OverlayInput, marks: readonly Box[]): readonly Ink[] {
     ...(trail === null
       ? []
       : trailInk(view, layout, trail, selected?.id ?? null, [...marks, ...wordsIn(dimensions)])),
-    ...(selected === null || bow === null ? [] : bowInk(view, selected, bow, grown)),
+    ...(selected === null || bow === null || isPushed || moves.motion !== null
+      ? []
+      : bowInk(view, selected, bow, grown)),
+    ...(moves.motion === null ? [] : motionInk(view, layout, moves.motion, isPushed ? 1 : grown)),
+    ...(selected?.angle && input.stiffness
+      ? stiffnessInk(
+          view,
+          selected,
+          selected.angle,
+          assessment.diagonals.get(selected.id)?.bowing?.stations ?? [],
+        )
+      : []),
+    ...(moves.push === null ? [] : pushInk(view, moves.push)),
     // A lit trail says what holds the bar, and where; the notes of the bow would lie on it.
-    ...(selected?.angle && bow !== null && restraint !== null && trail === null
-      ? holdInk(view, selected, selected.angle, restraint, bow, [...marks, ...wordsIn(dimensions)])
+    ...(selected?.angle && bow !== null && restraint !== null && trail === null && !isPushed
+      ? holdInk(view, selected, selected.angle, restraint, bow, {
+          inTheWay: [...marks, ...wordsIn(dimensions)],
+          free: moves.motion === null,
+        })
       : []),
   ];
 }

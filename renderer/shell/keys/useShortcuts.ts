@@ -1,4 +1,5 @@
 import { useEffect } from 'react';
+import type { Pushing } from '../../store/push.ts';
 import { isPressed } from '../commands/command.ts';
 import { COMMANDS, runCommand } from '../commands/commands.ts';
 import { useServices } from '../services.tsx';
@@ -31,8 +32,10 @@ export function useShortcuts(): void {
       runCommand(command, services);
     };
     const goBack = (event: KeyboardEvent): void => {
-      const { trying, selection } = services.store.getState();
+      const { trying, selection, view, pushing } = services.store.getState();
       if (trying !== null) services.actions.putBackTrial();
+      else if (view.push && isPushedByHand(pushing)) services.actions.push({ force: [0, 0] });
+      else if (view.push) services.actions.setPushMode(false);
       else if (selection.crossing !== null || selection.end !== null) services.actions.stepBack();
       else return;
       event.preventDefault();
@@ -40,6 +43,11 @@ export function useShortcuts(): void {
     window.addEventListener('keydown', onKeyDown);
     return () => window.removeEventListener('keydown', onKeyDown);
   }, [services]);
+}
+
+/** A push that a hand has made is put back first; only then does Escape leave pushing. */
+function isPushedByHand({ force }: Pushing): boolean {
+  return force !== null && Math.hypot(...force) > 0;
 }
 
 /** Where single letters are text and not commands. */

@@ -60,6 +60,18 @@ export function ViewBar(): JSX.Element {
           <span className="toggle-box" aria-hidden="true" />
           Bow{mark === null ? '' : ` ${mark}`} <Key>B</Key>
         </button>
+        {mark !== null && (
+          <button
+            type="button"
+            className="toggle"
+            aria-pressed={view.push}
+            aria-keyshortcuts="P"
+            onClick={() => actions.setPushMode(!view.push)}
+          >
+            <span className="toggle-box" aria-hidden="true" />
+            Push <Key>P</Key>
+          </button>
+        )}
         <button
           type="button"
           className="toggle view-trail"

@@ -1,13 +1,19 @@
 import { type JSX, lazy, Suspense, useMemo } from 'react';
 import { useStore } from 'zustand';
+import type { CrossingId } from '../../../core/layout/model.ts';
+import { PushStrip } from '../../panels/bowing/PushStrip.tsx';
+import { ShapeStrip } from '../../panels/bowing/ShapeStrip.tsx';
 import { CrossingPanel } from '../../panels/crossing/CrossingPanel.tsx';
 import { EndPanel } from '../../panels/end/EndPanel.tsx';
 import { TryBanner } from '../../panels/findings/TryBanner.tsx';
 import { presentProject, shownAssessment, shownProject } from '../../store/shown.ts';
+import type { Trying } from '../../store/trying.ts';
 import type { Theme } from '../../theme/themeSetting.ts';
 import { useServices, useWindow } from '../services.tsx';
 import { EmptyProject } from './EmptyProject.tsx';
 import { FailedFigures } from './FailedFigures.tsx';
+import { pushToShow } from './pushToShow.ts';
+import { shapeToShow } from './shapeToShow.ts';
 import { trailToShow } from './trail.ts';
 import { ViewBar } from './ViewBar.tsx';
 import './view.css';
@@ -22,6 +28,7 @@ export function ViewPanel({ theme }: { readonly theme: Theme }): JSX.Element {
     <section className="view-panel" data-region tabIndex={-1} aria-label="View">
       <ViewBar />
       <TryBanner />
+      <ViewStrip />
       <div className="view-body">
         <div className="view-drawing">
           <Drawing theme={theme} />
@@ -33,6 +40,14 @@ export function ViewPanel({ theme }: { readonly theme: Theme }): JSX.Element {
   );
 }
 
+/** What is said and set of what moves in the drawing. */
+function ViewStrip(): JSX.Element | null {
+  const push = useWindow((state) => state.view.push);
+  const bow = useWindow((state) => state.view.bow);
+  if (push) return <PushStrip />;
+  return bow ? <ShapeStrip /> : null;
+}
+
 function Drawing({ theme }: { readonly theme: Theme }): JSX.Element {
   const { store, actions } = useServices();
   const started = useWindow((state) => state.started);
@@ -40,7 +55,11 @@ function Drawing({ theme }: { readonly theme: Theme }): JSX.Element {
   const assessment = useWindow(shownAssessment);
   const units = useWindow((state) => shownProject(state).settings.units);
   const failure = useWindow((state) => state.assessing.failure);
-  const { selection, hovered, view } = useStore(store);
+  const state = useStore(store);
+  const { selection, hovered, view, trying } = state;
+  const shape = shapeToShow(state);
+  const push = pushToShow(state);
+  const removed = useMemo(() => joinsRemoved(trying), [trying]);
   const trail = useMemo(
     () => (assessment === null || !view.trail ? null : trailToShow(assessment, selection)),
     [assessment, view.trail, selection],
@@ -63,18 +82,31 @@ function Drawing({ theme }: { readonly theme: Theme }): JSX.Element {
           viewNonce={view.nonce}
           scale={view.scale}
           bow={view.bow}
+          shape={shape}
+          playing={view.playing}
+          push={push}
+          stiffness={view.push || state.tab === 'bowing'}
+          removed={removed}
           trail={trail}
           onSelectBar={(bar) => (bar === null ? actions.stepBack() : actions.selectBar(bar))}
           onSelectCrossing={(crossing) =>
             crossing === null ? actions.stepBack() : actions.selectCrossing(crossing)
           }
           onSelectEnd={(bar, end) => actions.selectEnd({ bar, end })}
+          onPush={actions.push}
           onHoverBar={actions.hover}
           onViewChange={actions.turnView}
         />
       </Suspense>
       {failure !== null && <FailedFigures failure={failure} />}
     </>
+  );
+}
+
+/** Crossings whose join a change on trial takes away. */
+function joinsRemoved(trying: Trying | null): readonly CrossingId[] {
+  return (trying?.edits ?? []).flatMap((edit) =>
+    edit.kind === 'join' && (edit.join === null || edit.join.kind === 'none') ? edit.crossings : [],
   );
 }
 
