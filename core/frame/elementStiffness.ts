@@ -33,12 +33,17 @@ export function elementWithCount(element: FrameElement): CountedStiffness {
     clampedLoadsBelow(element.EIp, -element.tension, length) +
     clampedLoadsBelow(element.EIq, -element.tension, length);
   // What is left on the diagonal after letting turns free is noise below a share of what stood there before.
-  const gross = Float64Array.from({ length: 4 * 9 }, (_, at) => {
-    const first = 3 * Math.floor(at / 9);
-    return K[(first + Math.floor((at % 9) / 3)) * ELEMENT_SIZE + first + (at % 3)] ?? 0;
-  });
+  const gross = diagonalBlocks(K);
   for (const { end, about } of element.releases) if (release(K, end === 'i' ? 3 : 9, about) < 0) hidden += 1;
   return { K, hidden, gross };
+}
+
+function diagonalBlocks(K: Float64Array): Float64Array {
+  const blocks = new Float64Array(4 * 9);
+  for (let first = 0, at = 0; first < ELEMENT_SIZE; first += 3)
+    for (let r = first; r < first + 3; r++)
+      for (let c = first; c < first + 3; c++) blocks[at++] = K[r * ELEMENT_SIZE + c] ?? 0;
+  return blocks;
 }
 
 /** Displacement and rotation at i, and `other` times the same at j. */
