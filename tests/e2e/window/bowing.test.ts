@@ -27,7 +27,8 @@ describe('a closer look at D2 of the example', () => {
     const stations = page.getByRole('region', { name: 'Stiffness at the stations' });
     await stations.getByText('out of plane').first().waitFor();
     const text = (await stations.innerText()).replace(/\s+/g, ' ');
-    const following = (words: string): number => figure(text.slice(text.lastIndexOf(`${words} `) + words.length));
+    const following = (words: string): number =>
+      figure(text.slice(text.lastIndexOf(`${words} `) + words.length));
     // METHODS.md §8: k_⊥ = k_p k_c sin²θ/(k_p cos²θ + k_c) with k = 2EA/(L/2), E = 200 000, A = 812.7 mm², L = 7 324 mm, tan(θ/2) = 4.2/6:
     // k = 88.8 kN/mm, θ = 70.0°, so k_⊥ = 70.2 kN/mm between rigid ends; the frame's own give takes up to a fifth of it.
     const inPlane = figure(text.slice(text.indexOf('in plane') + 8));
