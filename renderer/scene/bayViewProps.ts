@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import type { Assessment } from '../../core/assessment.ts';
 import type { BarMovement } from '../../core/frame/pushTest.ts';
 import type { BarId, CrossingId } from '../../core/layout/model.ts';
@@ -32,6 +33,8 @@ export interface BayViewProps {
   readonly push: PushShown | null;
   /** Whether what is offered at the stations of the chosen bar is drawn there. */
   readonly stiffness: boolean;
+  /** Drawn at a clear place of the sheet in the stead of a crossing's detail, 148 by 186 px; null: nothing. */
+  readonly figure: ReactNode;
   /** Joins that a change on trial takes away. */
   readonly removed: readonly CrossingId[];
   /** A hold's way to its support, to light up. */

@@ -89,7 +89,7 @@ export function PushStrip(): JSX.Element | null {
           />
         </span>
       )}
-      <span className="strip-says" role="status">
+      <span className="strip-says strip-outcome" role="status">
         <Outcome push={push} angle={bar.angle} bar={bar} units={units} />
       </span>
     </div>
@@ -103,7 +103,7 @@ interface OutcomeProps {
   readonly units: 'metric' | 'us';
 }
 
-/** "0.100 kN out of plane moves it 5.55 mm: 18.0 N/mm". */
+/** "0.100 kN out of plane: 5.55 mm, 18.0 N/mm". */
 function Outcome({ push, bar, angle, units }: OutcomeProps): JSX.Element {
   const { test, force } = push;
   if (test === null) return <>Working out…</>;
@@ -112,10 +112,15 @@ function Outcome({ push, bar, angle, units }: OutcomeProps): JSX.Element {
   if (size === 0) return <>Drag {bar.mark}, or Shift and arrows</>;
   const direction = [force[0] / size, force[1] / size] as const;
   const movement = Math.hypot(...placeMovement(test, force));
+  const stiffness = stiffnessOf(test, direction);
+  const thatWay = size / stiffness;
+  // Pushed askew it gives mostly the soft way; stiffness speaks of the way that is pushed.
+  const sideways = movement > 1.01 * thatWay;
   return (
     <>
-      {showForce(size, units)} {wayInWords(direction, angle)} moves it <b>{showMovement(movement, units)}</b>:{' '}
-      <b>{showStiffness(stiffnessOf(test, direction), units)}</b>
+      {showForce(size, units)} {wayInWords(direction, angle)}: <b>{showMovement(movement, units)}</b>
+      {sideways && `, ${showMovement(thatWay, units, 'bare')} that way`},{' '}
+      <b>{showStiffness(stiffness, units)}</b>
     </>
   );
 }

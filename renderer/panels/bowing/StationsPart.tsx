@@ -97,6 +97,7 @@ function Station({
           seen={seenSection(bar, angle, stock)}
           scale={shownScale}
           axis={axis ?? 'soft'}
+          size={158}
           wanted={[
             ...(soft === undefined ? [] : [{ stiffness: soft.ideal, kind: 'ideal' as const }]),
             ...(softNeed?.needed.forAll == null

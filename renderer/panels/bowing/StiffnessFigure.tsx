@@ -14,15 +14,14 @@ interface StiffnessFigureProps {
   readonly scale: FigureScale;
   /** Of the two axes the one that the true scale is chosen for. */
   readonly axis: 'soft' | 'stiff';
+  /** Width and height, px. */
+  readonly size: number;
   /** Rings for what is wanted of a hold, N/mm. */
   readonly wanted: readonly { readonly stiffness: number; readonly kind: 'ideal' | 'needed' }[];
 }
 
-const SIZE = 158;
-const MIDDLE = SIZE / 2;
-const RING = 77;
-/** Room for the profile inside the ring, px from its middle. */
-const REACH = 40;
+/** Room for the profile inside the ring, as a share of its radius. */
+const REACH = 0.52;
 
 /** What the framing offers at a station, looking along the bar: far out is soft, close in is stiff. */
 export function StiffnessFigure({
@@ -31,51 +30,54 @@ export function StiffnessFigure({
   seen,
   scale,
   axis,
+  size,
   wanted,
 }: StiffnessFigureProps): JSX.Element {
   const clip = useId();
+  const middle = size / 2;
+  const ring = middle - 2;
   const { stiff, soft, stiffWay } = offered.ellipse;
   const way = seen.inPicture(stiffWay);
   const [a, b] = halfAxes(stiff, soft, scale, axis);
   const turn = (Math.atan2(-way[1], way[0]) * 180) / Math.PI;
   const reach = Math.max(...seen.outline.map(([x, y]) => Math.hypot(x, y)));
-  const perMm = REACH / reach;
+  const perMm = (REACH * ring) / reach;
   const end = ([x, y]: Vec2, half: number): readonly [Vec2, Vec2] => [
-    [MIDDLE + x * half, MIDDLE - y * half],
-    [MIDDLE - x * half, MIDDLE + y * half],
+    [middle + x * half, middle - y * half],
+    [middle - x * half, middle + y * half],
   ];
   return (
-    <svg className="stiffness-figure" width={SIZE} height={SIZE} role="img" aria-label={name}>
+    <svg className="stiffness-figure" width={size} height={size} role="img" aria-label={name}>
       <clipPath id={clip}>
-        <circle cx={MIDDLE} cy={MIDDLE} r={RING} />
+        <circle cx={middle} cy={middle} r={ring} />
       </clipPath>
-      <circle className="figure-ring" cx={MIDDLE} cy={MIDDLE} r={RING} />
+      <circle className="figure-ring" cx={middle} cy={middle} r={ring} />
       <path
         className="figure-angle"
-        d={closed(seen.outline.map(([x, y]): Vec2 => [MIDDLE + x * perMm, MIDDLE - y * perMm]))}
+        d={closed(seen.outline.map(([x, y]): Vec2 => [middle + x * perMm, middle - y * perMm]))}
       />
       {[seen.inPlane, seen.outOfPlane].map((direction) => (
-        <path key={String(direction)} className="section-axis" d={lineOf(end(direction, RING - 3))} />
+        <path key={String(direction)} className="section-axis" d={lineOf(end(direction, ring - 3))} />
       ))}
       {scale === 'tens' &&
         wanted.map(({ stiffness, kind }) => (
           <circle
             key={`${kind} ${stiffness}`}
             className={`figure-wanted ${kind}`}
-            cx={MIDDLE}
-            cy={MIDDLE}
-            r={RING * halfAxis(stiffness)}
+            cx={middle}
+            cy={middle}
+            r={ring * halfAxis(stiffness)}
           />
         ))}
       <g clipPath={`url(#${clip})`}>
         <ellipse
           className="figure-ellipse"
-          rx={a * RING}
-          ry={b * RING}
-          transform={`translate(${MIDDLE} ${MIDDLE}) rotate(${turn.toFixed(2)})`}
+          rx={a * ring}
+          ry={b * ring}
+          transform={`translate(${middle} ${middle}) rotate(${turn.toFixed(2)})`}
         />
       </g>
-      <circle cx={MIDDLE} cy={MIDDLE} r="2" fill="var(--ink)" />
+      <circle cx={middle} cy={middle} r="2" fill="var(--ink)" />
     </svg>
   );
 }

@@ -36,8 +36,8 @@ export function pushInk(view: SheetView, push: ShownPush): readonly Ink[] {
             kind: 'words',
             key: 'push movement',
             look: 'scene-words motion',
-            at: [(on[0] + to[0]) / 2, (on[1] + to[1]) / 2 - 7],
-            anchor: 'middle',
+            at: [to[0] + (to[0] < on[0] ? 4 : -4), to[1] - 11],
+            anchor: to[0] < on[0] ? 'end' : 'start',
             text: push.movementSays,
           } satisfies Ink,
         ]

@@ -6,7 +6,7 @@ import { type Ink, polyline } from '../drawing/ink.ts';
 import { directionOnSheet, onSheet, type SheetView } from '../view/sheetView.ts';
 
 /** Half the length of the softest axis, px, however near the view comes. */
-const REACH = 34;
+const REACH = 46;
 const CHORDS = 40;
 
 /** What is offered at the stations of a bar, as small ellipses in the plane of its section: long is soft, short is stiff. */

@@ -32,6 +32,7 @@ export type OverlayProps = BayViewProps & {
  */
 export function Overlay(props: OverlayProps) {
   const { content, moves, handle, assessment, units, trail, legend, stiffness, removed, playing } = props;
+  const figure = props.figure !== null;
   const root = useRef<HTMLDivElement>(null);
   const ink = useRef<SVGGElement>(null);
   const frame = useRef<SVGGElement>(null);
@@ -41,8 +42,8 @@ export function Overlay(props: OverlayProps) {
   const detailAt = useRef<number | null>(null);
   const view = useRef<SheetView | null>(null);
   const candidates = useRef<ReadonlyMap<string, number>>(new Map());
-  const latest = useRef({ content, moves, assessment, units, trail, legend, stiffness, removed });
-  latest.current = { content, moves, assessment, units, trail, legend, stiffness, removed };
+  const latest = useRef({ content, moves, assessment, units, trail, legend, stiffness, removed, figure });
+  latest.current = { content, moves, assessment, units, trail, legend, stiffness, removed, figure };
   const bowed =
     moves.key !== null || content.bow === null || content.selected === null
       ? moves.key
@@ -70,7 +71,7 @@ export function Overlay(props: OverlayProps) {
     if (frame.current === null || faces.current === null) return;
     facePainter.current ??= new InkPainter(faces.current);
     facePainter.current.paint(laid.detail?.faces ?? []);
-    detailAt.current = laid.detail?.place ?? null;
+    if (!latest.current.figure) detailAt.current = laid.detail?.place ?? null;
     frame.current.setAttribute('visibility', laid.detail ? 'visible' : 'hidden');
     if (laid.detail) frame.current.setAttribute('transform', `translate(${laid.detail.at.join(' ')})`);
   }, [grown, swing, swings]);
@@ -88,7 +89,18 @@ export function Overlay(props: OverlayProps) {
   );
   // What is shown has changed under a view that stands still.
   // biome-ignore lint/correctness/useExhaustiveDependencies: the values are read from `latest` at the time of painting
-  useLayoutEffect(repaint, [content, moves, assessment, units, trail, legend, stiffness, removed, repaint]);
+  useLayoutEffect(repaint, [
+    content,
+    moves,
+    assessment,
+    units,
+    trail,
+    legend,
+    stiffness,
+    removed,
+    figure,
+    repaint,
+  ]);
 
   return (
     <div ref={root} className="scene-overlay">
@@ -96,6 +108,11 @@ export function Overlay(props: OverlayProps) {
         <g ref={ink} />
         <Detail frame={frame} faces={faces} />
       </svg>
+      {props.figure !== null && (
+        <div className="scene-figure" data-place="figure">
+          {props.figure}
+        </div>
+      )}
       <Crossings {...props} />
       <Labels {...props} />
       <Ends {...props} />

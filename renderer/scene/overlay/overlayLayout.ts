@@ -1,5 +1,5 @@
 import type { Assessment } from '../../../core/assessment.ts';
-import type { Vec2 } from '../../../core/geometry/vector.ts';
+import { along, type Vec2 } from '../../../core/geometry/vector.ts';
 import type { CrossingId } from '../../../core/layout/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
 import type { TrailStep } from '../../../core/restraint/model.ts';
@@ -36,6 +36,8 @@ export interface OverlayInput {
   /** Whether what is offered at the stations is drawn there. */
   readonly stiffness: boolean;
   readonly removed: readonly CrossingId[];
+  /** Whether a figure is wanted in the stead of a crossing's detail. */
+  readonly figure: boolean;
   /** How far the bow has grown, 0 to about 1; of a shape that swings, −1 to 1. */
   readonly grown: number;
   /** Of the labels as they stand on the page, px, by bar. */
@@ -115,7 +117,10 @@ export function layOutOverlay(input: OverlayInput): OverlayLayout {
     }),
   );
   for (const [key, { box }] of labels) places.set(`label ${key}`, { x: box.left, y: box.top });
-  const detail = detailOf(input, [...inTheWay, ...[...labels.values()].map((place) => place.box)], glyphs);
+  const taken = [...inTheWay, ...[...labels.values()].map((place) => place.box)];
+  const figure = figureOf(input, taken);
+  if (figure !== null) places.set('figure', { x: figure.at[0], y: figure.at[1] });
+  const detail = input.figure ? null : detailOf(input, taken, glyphs);
   return {
     ink: [
       ...steelInk,
@@ -129,6 +134,22 @@ export function layOutOverlay(input: OverlayInput): OverlayLayout {
     detail,
     candidates: new Map([...labels].map(([key, place]) => [key, place.candidate])),
   };
+}
+
+/** A clear place for the figure of the pushed place, with a line to it. */
+function figureOf(
+  { view, content, moves, figure, previousDetail, legend }: OverlayInput,
+  inTheWay: readonly Box[],
+): (DetailPlace & { readonly around: readonly Ink[] }) | null {
+  if (!figure || moves.push === null) return null;
+  const { bar, at } = moves.push;
+  const of = onSheet(view, along(bar.from, bar.direction, at));
+  const bars = content.steelLines.map(([a, b]) => [onSheet(view, a), onSheet(view, b)] as const);
+  const place = detailPlace(view, of, bars, [...inTheWay, ...corners(view, legend)], previousDetail);
+  if (place === null) return null;
+  const way = heading([place.at[0] - of[0], place.at[1] - of[1]]) ?? [1, 0];
+  const d = line(from(of, way, GLYPH_HALF + 4), from(place.at, way, -DETAIL_RADIUS));
+  return { ...place, around: [{ kind: 'path', key: 'figure leader', look: 'scene-leader', d }] };
 }
 
 function detailOf(

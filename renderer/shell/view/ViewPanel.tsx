@@ -1,6 +1,9 @@
 import { type JSX, lazy, Suspense, useMemo } from 'react';
 import { useStore } from 'zustand';
-import type { CrossingId } from '../../../core/layout/model.ts';
+import type { Assessment } from '../../../core/assessment.ts';
+import type { BarId, CrossingId } from '../../../core/layout/model.ts';
+import type { UnitSystem } from '../../../core/project/model.ts';
+import { PushFigure } from '../../panels/bowing/PushFigure.tsx';
 import { PushStrip } from '../../panels/bowing/PushStrip.tsx';
 import { ShapeStrip } from '../../panels/bowing/ShapeStrip.tsx';
 import { CrossingPanel } from '../../panels/crossing/CrossingPanel.tsx';
@@ -59,6 +62,10 @@ function Drawing({ theme }: { readonly theme: Theme }): JSX.Element {
   const { selection, hovered, view, trying } = state;
   const shape = shapeToShow(state);
   const push = pushToShow(state);
+  const figure = useMemo(
+    () => pushFigure(assessment, selection.bar, push?.at ?? null, units),
+    [assessment, selection.bar, push?.at, units],
+  );
   const removed = useMemo(() => joinsRemoved(trying), [trying]);
   const trail = useMemo(
     () => (assessment === null || !view.trail ? null : trailToShow(assessment, selection)),
@@ -86,6 +93,7 @@ function Drawing({ theme }: { readonly theme: Theme }): JSX.Element {
           playing={view.playing}
           push={push}
           stiffness={view.push || state.tab === 'bowing'}
+          figure={figure}
           removed={removed}
           trail={trail}
           onSelectBar={(bar) => (bar === null ? actions.stepBack() : actions.selectBar(bar))}
@@ -101,6 +109,21 @@ function Drawing({ theme }: { readonly theme: Theme }): JSX.Element {
       {failure !== null && <FailedFigures failure={failure} />}
     </>
   );
+}
+
+/** What the framing offers at the pushed place; null where nothing is joined. */
+function pushFigure(
+  assessment: Assessment | null,
+  id: BarId | null,
+  at: number | null,
+  units: UnitSystem,
+): JSX.Element | null {
+  const bar = id === null ? undefined : assessment?.layout.bars.get(id);
+  const diagonal = id === null ? undefined : assessment?.diagonals.get(id);
+  const offered = diagonal?.bowing?.stations.find((each) => at !== null && Math.abs(each.at - at) < 1);
+  if (bar?.angle == null || offered === undefined || diagonal?.bowing?.unsupported != null) return null;
+  const label = diagonal?.restraint?.stations[offered.station]?.label ?? '';
+  return <PushFigure bar={bar} angle={bar.angle} offered={offered} label={label} units={units} />;
 }
 
 /** Crossings whose join a change on trial takes away. */
