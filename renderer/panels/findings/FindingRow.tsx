@@ -8,7 +8,7 @@ import { useActions, useWindow } from '../../shell/services.tsx';
 import { shownProject } from '../../store/shown.ts';
 import { EffectFigures } from './EffectFigures.tsx';
 import type { FindingState } from './findingGroups.ts';
-import { findingFigure, findingPlace } from './findingWords.ts';
+import { findingFigure, findingPlace, tellsLimit } from './findingWords.ts';
 import { remedyTrial } from './remedyTrial.ts';
 import { TryButton } from './TryButton.tsx';
 
@@ -63,7 +63,7 @@ export function FindingRow({ finding, state, assessment, before }: FindingRowPro
       </span>
       <span className="finding-value">
         {state === 'closes' ? <s className="was">{value}</s> : <b>{value}</b>}
-        {limit !== '' && finding.limit !== 0 && <em>limit {limit}</em>}
+        {limit !== '' && tellsLimit(finding) && <em>limit {limit}</em>}
       </span>
       {state === 'opens' ? <span /> : <Remedies finding={finding} />}
     </article>

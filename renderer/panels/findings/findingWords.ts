@@ -25,10 +25,27 @@ export function findingFigure(value: number | null, finding: Finding, units: Uni
     case 'angle':
       return `${grouped(value, 0)}°`;
     case 'ratio':
-      return `L/${grouped(value, 0)}`;
+      return ratioText(value, finding.kind);
     case 'none':
-      return '';
+      return finding.kind === 'rule unsafe here' ? `${grouped(value, 1)} %` : '';
     default:
       return finding.quantity satisfies never;
+  }
+}
+
+/** Whether what a finding is held against is a limit worth telling: not where it is nought, or all of a load. */
+export function tellsLimit({ kind, limit }: Finding): boolean {
+  return limit !== 0 && kind !== 'twist governs';
+}
+
+/** Sag is a share of the length as builders say it; the others are shares of a load. */
+function ratioText(value: number, kind: Finding['kind']): string {
+  switch (kind) {
+    case 'sag':
+      return `L/${grouped(value, 0)}`;
+    case 'both diagonals squeezed':
+      return `T/C ${grouped(value, 2)}`;
+    default:
+      return `${grouped(value * 100, value > 0.9 && value < 1 ? 1 : 0)} %`;
   }
 }

@@ -3,7 +3,7 @@ import { Segmented } from '../../controls/Segmented.tsx';
 import { useServices } from '../../shell/services.tsx';
 import { shownAssessment, shownProject } from '../../store/shown.ts';
 import { tableText } from './cellText.ts';
-import { BRACING_COLUMNS, MAKING_COLUMNS } from './scheduleColumns.ts';
+import { COLUMN_SETS } from './scheduleColumns.ts';
 import { type ScheduleView, seenRows, sortText } from './scheduleView.ts';
 
 interface ScheduleBarProps {
@@ -25,7 +25,7 @@ export function ScheduleBar({ view, onChange }: ScheduleBarProps): JSX.Element {
     const state = store.getState();
     const assessment = shownAssessment(state);
     if (assessment === null) return;
-    const columns = view.columns === 'bracing' ? BRACING_COLUMNS : MAKING_COLUMNS;
+    const columns = COLUMN_SETS[view.columns];
     await navigator.clipboard.writeText(
       tableText(seenRows(assessment, view), columns, shownProject(state).settings.units),
     );
@@ -77,6 +77,7 @@ export function ScheduleBar({ view, onChange }: ScheduleBarProps): JSX.Element {
         options={[
           { value: 'bracing', label: 'Bracing' },
           { value: 'making', label: 'Making' },
+          { value: 'bowing', label: 'Bowing' },
         ]}
         onChange={(columns) => onChange({ ...view, columns })}
       />

@@ -24,6 +24,8 @@ const DOWN_FIRST = new Set([
   'Ly',
   'Lu',
   'Lv',
+  'critical',
+  'ruleError',
 ]);
 
 export function ScheduleHead({ columns, view, units, onChange }: ScheduleHeadProps): JSX.Element {
@@ -71,6 +73,10 @@ function unitText({ unit }: Column, units: UnitSystem): string {
       return unitNames(units).mass;
     case 'axis':
       return 'axis';
+    case 'force':
+      return unitNames(units).force;
+    case 'percent':
+      return '%';
     case undefined:
       return '';
     default:

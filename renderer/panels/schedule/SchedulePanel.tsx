@@ -5,7 +5,7 @@ import { shownAssessment, shownProject } from '../../store/shown.ts';
 import { ROW_DEEP } from './rowDeep.ts';
 import { ScheduleHead } from './ScheduleHead.tsx';
 import { ScheduleRowView } from './ScheduleRowView.tsx';
-import { BRACING_COLUMNS, MAKING_COLUMNS } from './scheduleColumns.ts';
+import { COLUMN_SETS } from './scheduleColumns.ts';
 import { type ScheduleView, seenRows } from './scheduleView.ts';
 import './schedule.css';
 
@@ -22,7 +22,7 @@ export function SchedulePanel({ view, onChange }: SchedulePanelProps): JSX.Eleme
   const units = useWindow((state) => shownProject(state).settings.units);
   const scroller = useRef<HTMLDivElement>(null);
   const rows = useMemo(() => (assessment === null ? [] : seenRows(assessment, view)), [assessment, view]);
-  const columns = view.columns === 'bracing' ? BRACING_COLUMNS : MAKING_COLUMNS;
+  const columns = COLUMN_SETS[view.columns];
   const at = rows.findIndex(({ row }) => row.bar === chosen);
   const virtual = useVirtualizer({
     count: rows.length,

@@ -1,14 +1,24 @@
 /** What each cell of the schedule says, on screen and when the table is copied. */
 import type { ScheduleRow } from '../../../core/documents/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
+import { grouped } from '../../../core/units/figures.ts';
+import { showForce } from '../../../core/units/loads.ts';
 import { showLength, showMass, showSlenderness } from '../../../core/units/quantity.ts';
 import { columnLength, makingLength, shownSection } from '../../controls/figures.ts';
 import { STATUS_WORDS } from '../../glyphs/StatusGlyph.tsx';
-import { type Column, numberOf } from './scheduleColumns.ts';
+import { type BowingColumn, bowingNumber, type Column, numberOf } from './scheduleColumns.ts';
 import type { SeenRow } from './seenRow.ts';
 
-export function cellText({ id, unit }: Column, { row, status }: SeenRow, units: UnitSystem): string {
+export function cellText({ id, unit }: Column, seen: SeenRow, units: UnitSystem): string {
+  const { row, status } = seen;
   switch (id) {
+    case 'critical':
+    case 'criticalLoad':
+    case 'ruleError':
+    case 'grip':
+    case 'twist':
+    case 'tensionShare':
+      return bowingText(id, seen, units);
     case 'mark':
       return row.mark;
     case 'bay':
@@ -42,6 +52,26 @@ export function cellText({ id, unit }: Column, { row, status }: SeenRow, units: 
   }
 }
 
+function bowingText(id: BowingColumn, seen: SeenRow, units: UnitSystem): string {
+  const value = bowingNumber(id, seen);
+  if (value === null) return '–';
+  switch (id) {
+    case 'critical':
+      return showSlenderness(value, seen.row.limit);
+    case 'criticalLoad':
+      return showForce(value, units, 'bare');
+    case 'ruleError':
+      return `${value > 0.05 ? '+' : ''}${grouped(value, 1)}`;
+    case 'grip':
+    case 'twist':
+      return grouped(value, 1);
+    case 'tensionShare':
+      return grouped(value, 2);
+    default:
+      return id satisfies never;
+  }
+}
+
 interface Judged {
   readonly slenderness: number;
   readonly limit: number;
@@ -72,6 +102,8 @@ function figure(unit: Column['unit'], value: number, units: UnitSystem): string 
     case 'length':
       return columnLength(value, units);
     case 'axis':
+    case 'force':
+    case 'percent':
     case undefined:
       return String(value);
     default:

@@ -26,14 +26,17 @@ export type ColumnId =
   | 'leg'
   | 'placed'
   | 'packer'
-  | 'massTotal';
+  | 'massTotal'
+  | BowingColumn;
+
+export type BowingColumn = 'critical' | 'criticalLoad' | 'ruleError' | 'grip' | 'twist' | 'tensionShare';
 
 export interface Column {
   readonly id: ColumnId;
   readonly head: string;
   /** A letter set low beside the head: the x of L_x. */
   readonly sub?: string;
-  readonly unit?: 'length' | 'exact' | 'mass' | 'small' | 'axis';
+  readonly unit?: 'length' | 'exact' | 'mass' | 'small' | 'axis' | 'force' | 'percent';
   readonly left?: boolean;
   /** CSS grid width. */
   readonly width: string;
@@ -75,10 +78,43 @@ export const MAKING_COLUMNS: readonly Column[] = [
   { id: 'massTotal', head: 'All', unit: 'mass', width: 'minmax(50px, 0.8fr)' },
 ];
 
+/** By the marks, by critical load, and what lies between. */
+export const BOWING_COLUMNS: readonly Column[] = [
+  { id: 'mark', head: 'Mark', left: true, width: '54px' },
+  { id: 'bay', head: 'Bay', left: true, width: '44px' },
+  { id: 'section', head: 'Section', left: true, width: 'minmax(74px, 1.2fr)' },
+  { id: 'setOut', head: 'Set-out', unit: 'length', width: 'minmax(56px, 1fr)' },
+  { id: 'slenderness', head: 'Slenderness', width: '118px' },
+  { id: 'critical', head: 'By critical load', width: 'minmax(92px, 1.1fr)' },
+  { id: 'criticalLoad', head: 'N', sub: 'cr', unit: 'force', width: 'minmax(56px, 0.9fr)' },
+  { id: 'ruleError', head: 'Rule off by', unit: 'percent', width: 'minmax(66px, 0.9fr)' },
+  { id: 'grip', head: 'Least grip', unit: 'percent', width: 'minmax(62px, 0.9fr)' },
+  { id: 'twist', head: 'With twist', unit: 'percent', width: 'minmax(64px, 0.9fr)' },
+  { id: 'tensionShare', head: 'T/C', width: '46px' },
+  { id: 'limit', head: 'Limit', width: '46px' },
+  { id: 'status', head: 'Status', left: true, width: 'minmax(86px, 1.2fr)' },
+];
+
+/** The sets of columns that the schedule can show. */
+export const COLUMN_SETS = {
+  bracing: BRACING_COLUMNS,
+  making: MAKING_COLUMNS,
+  bowing: BOWING_COLUMNS,
+} as const;
+export type ColumnSet = keyof typeof COLUMN_SETS;
+
 const STATUS_ORDER = { within: 0, near: 1, over: 2, unknown: 3 } as const;
 
-export function sortValue(column: ColumnId, { row, status, ratio }: SeenRow): number | string {
+export function sortValue(column: ColumnId, seen: SeenRow): number | string {
+  const { row, status, ratio } = seen;
   switch (column) {
+    case 'critical':
+    case 'criticalLoad':
+    case 'ruleError':
+    case 'grip':
+    case 'twist':
+    case 'tensionShare':
+      return bowingNumber(column, seen) ?? -1000;
     case 'mark':
       return row.mark;
     case 'bay':
@@ -119,7 +155,31 @@ type NumberColumn = Exclude<
   | 'slenderness'
   | 'limit'
   | 'status'
+  | BowingColumn
 >;
+
+/** A slenderness, N, per cent or a ratio; null where there is none to tell. */
+export function bowingNumber(column: BowingColumn, { bowing }: SeenRow): number | null {
+  if (bowing === null) return null;
+  switch (column) {
+    case 'critical':
+      return bowing.real.slenderness;
+    case 'criticalLoad':
+      return bowing.real.N;
+    case 'ruleError':
+      return bowing.ruleError;
+    case 'grip': {
+      const grips = bowing.stations.flatMap(({ holds }) => holds.flatMap(({ grip }) => grip ?? []));
+      return grips.length === 0 ? null : Math.min(...grips) * 100;
+    }
+    case 'twist':
+      return bowing.twist.governs ? bowing.twist.ratio * 100 : null;
+    case 'tensionShare':
+      return bowing.partner?.tensionShare ?? null;
+    default:
+      return column satisfies never;
+  }
+}
 
 /** mm, kg or a count; null where the row has none. */
 export function numberOf(column: NumberColumn, row: ScheduleRow): number | null {

@@ -1,11 +1,11 @@
 /** How the schedule is looked at: which columns, in what order, which rows. Not part of the project. */
 import type { Assessment } from '../../../core/assessment.ts';
-import { type ColumnId, sortValue } from './scheduleColumns.ts';
+import { type ColumnId, type ColumnSet, sortValue } from './scheduleColumns.ts';
 import type { SeenRow } from './seenRow.ts';
 
 export interface ScheduleView {
-  /** What is read to judge, or what is read to make. */
-  readonly columns: 'bracing' | 'making';
+  /** What is read to judge, to make, or to see how the bars really bow. */
+  readonly columns: ColumnSet;
   readonly sort: { readonly column: ColumnId; readonly down: boolean };
   readonly filtering: boolean;
   readonly text: string;
@@ -24,7 +24,12 @@ export function seenRows(assessment: Assessment, view: ScheduleView): readonly S
   const wanted = view.text.trim().toLowerCase();
   const rows = assessment.schedule.flatMap((row): SeenRow[] => {
     const diagonal = assessment.diagonals.get(row.bar);
-    const seen = { row, status: diagonal?.status ?? 'unknown', ratio: diagonal?.nearness ?? null } as const;
+    const seen: SeenRow = {
+      row,
+      status: diagonal?.status ?? 'unknown',
+      ratio: diagonal?.nearness ?? null,
+      bowing: diagonal?.bowing ?? null,
+    };
     return fits(seen, wanted, view.only) ? [seen] : [];
   });
   const { column, down } = view.sort;

@@ -1,3 +1,4 @@
+import type { Bowing } from '../../../core/bowing/model.ts';
 import type { ScheduleRow } from '../../../core/documents/model.ts';
 import type { Status } from '../../glyphs/StatusGlyph.tsx';
 
@@ -7,4 +8,6 @@ export interface SeenRow {
   readonly status: Status;
   /** Slenderness over limit of the verdict that the practice asks for. */
   readonly ratio: number | null;
+  /** Null where it is not assessed. */
+  readonly bowing: Bowing | null;
 }
