@@ -85,7 +85,10 @@ function ReadingBox({ reading, was, worst }: ReadingBoxProps): JSX.Element {
   const { name, figure, says, state, stateSays } = reading;
   const isWorst = worst === name;
   return (
-    <li className="reading" data-worst={isWorst || undefined}>
+    <li
+      className="reading"
+      data-worst={isWorst ? (state === 'over' || state === 'weak' ? 'breaks' : '') : undefined}
+    >
       <em>
         {name}
         {isWorst && <span className="reading-worst"> worst</span>}

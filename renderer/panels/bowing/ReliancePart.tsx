@@ -75,8 +75,12 @@ function RelianceRow({ reliance, chosen, base }: RelianceRowProps): JSX.Element 
           <NearnessChip ratio={after / limit} />
           <b>{showSlenderness(after, limit)}</b>
           {opens.length > 0 && (
-            <span className="reliance-opens">
-              opens {opens.length} {opens.length === 1 ? 'finding' : 'findings'}
+            <span
+              className="effect-opens"
+              title={`Opens ${opens.length} ${opens.length === 1 ? 'finding' : 'findings'}`}
+            >
+              +{opens.length}
+              <span className="unseen"> findings opened</span>
             </span>
           )}
         </span>

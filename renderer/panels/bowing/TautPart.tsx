@@ -82,24 +82,31 @@ export function TautPart({
           Working out the curve…
         </p>
       ) : (
-        <LoadPlot
-          name={`Critical load of ${bar.mark} against the force in ${other.mark}`}
-          from={-1}
-          to={1}
-          ticks={[-1, -0.5, 0, 0.5, 1].map((share) => ({
-            at: share,
-            label: grouped(share, share % 1 ? 1 : 0),
-          }))}
-          words={[`${other.mark} squeezed`, 'T/C', 'pulled as hard']}
-          lines={[{ look: 'main', label: '', points: curve.points }]}
-          levels={plotLevels(bar, diagonal, assessment.practice)}
-          present={{
-            at: curve.present,
-            N: present,
-            says: `Now T/C is ${grouped(curve.present, 2)} and the critical load ${showForce(present, units)}`,
-          }}
-          units={units}
-        />
+        <>
+          <LoadPlot
+            name={`Critical load of ${bar.mark} against the force in ${other.mark}`}
+            from={-1}
+            to={1}
+            ticks={[-1, -0.5, 0, 0.5, 1].map((share) => ({
+              at: share,
+              label: grouped(share, share % 1 ? 1 : 0),
+            }))}
+            words={[`${other.mark} squeezed`, 'T/C', 'pulled as hard']}
+            lines={[{ look: 'main', label: '', points: curve.points }]}
+            levels={plotLevels(bar, diagonal, assessment.practice)}
+            present={{
+              at: curve.present,
+              N: present,
+              says: `Now T/C is ${grouped(curve.present, 2)} and the critical load ${showForce(present, units)}`,
+            }}
+            units={units}
+          />
+          {diagonal.bowing?.twist.governs === true && (
+            <p className="bowing-note">
+              By bowing alone; twist takes {grouped((1 - diagonal.bowing.twist.ratio) * 100, 1)} % more.
+            </p>
+          )}
+        </>
       )}
     </section>
   );

@@ -47,8 +47,10 @@ export function ViewPanel({ theme }: { readonly theme: Theme }): JSX.Element {
 function ViewStrip(): JSX.Element | null {
   const push = useWindow((state) => state.view.push);
   const bow = useWindow((state) => state.view.bow);
+  // What is on trial has a bar of its own, and the drawing needs its room.
+  const trying = useWindow((state) => state.trying !== null);
   if (push) return <PushStrip />;
-  return bow ? <ShapeStrip /> : null;
+  return bow && !trying ? <ShapeStrip /> : null;
 }
 
 function Drawing({ theme }: { readonly theme: Theme }): JSX.Element {

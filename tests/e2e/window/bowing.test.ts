@@ -42,9 +42,9 @@ describe('a closer look at D2 of the example', () => {
   it('follows a push, and lets go by Escape', async () => {
     await page.getByRole('button', { name: /^Push/ }).click();
     const strip = page.getByRole('toolbar', { name: 'Push' });
-    await strip.getByText(/moves it/).waitFor();
+    await strip.getByText(/N\/mm/).waitFor();
     await strip.getByText('in plane', { exact: true }).click();
-    await expect.poll(() => strip.innerText()).toMatch(/in plane moves it/);
+    await expect.poll(() => strip.innerText()).toMatch(/in plane: .*N\/mm/);
     await page.keyboard.press('Escape');
   });
 
