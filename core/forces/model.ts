@@ -19,6 +19,8 @@ export interface AxialBar {
 export interface EquilibriumProblem {
   /** Number of nodes; unknown 3k + c is displacement c of node k. */
   readonly nodes: number;
+  /** Further unknowns after those, such as turns of joints; each with the node that it belongs to. Left out where there are none. */
+  readonly turns?: readonly number[];
   /** Held displacements, by unknown. */
   readonly held: ReadonlySet<number>;
   readonly bars: readonly AxialBar[];

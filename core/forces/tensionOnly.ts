@@ -21,12 +21,12 @@ export function tensionOnlyEquilibrium(
   start: Float64Array | null = null,
 ): Equilibrium {
   const state = new Search(problem);
-  return state.run(start ?? new Float64Array(problem.nodes * 3));
+  return state.run(start ?? new Float64Array(state.size));
 }
 
 class Search {
   readonly #problem: EquilibriumProblem;
-  readonly #size: number;
+  readonly size: number;
   readonly #load: Float64Array;
   readonly #scale: number;
   readonly #stiffest: number;
@@ -34,7 +34,7 @@ class Search {
 
   constructor(problem: EquilibriumProblem) {
     this.#problem = problem;
-    this.#size = problem.nodes * 3;
+    this.size = problem.nodes * 3 + (problem.turns?.length ?? 0);
     this.#load = problem.load.slice();
     for (const unknown of problem.held) this.#load[unknown] = 0;
     const presets = problem.bars.reduce(
@@ -98,7 +98,7 @@ class Search {
 
   /** Out-of-balance forces: what resists less what loads. */
   #gradient(q: Float64Array): Float64Array {
-    const g = new Float64Array(this.#size);
+    const g = new Float64Array(this.size);
     for (const [i, j, value] of this.#problem.rest) {
       g[i] = (g[i] ?? 0) + value * (q[j] ?? 0);
       if (i !== j) g[j] = (g[j] ?? 0) + value * (q[i] ?? 0);
@@ -112,7 +112,7 @@ class Search {
         g[3 * bar.i + c] = (g[3 * bar.i + c] ?? 0) - d;
       }
     }
-    for (let k = 0; k < this.#size; k++) g[k] = (g[k] ?? 0) - (this.#load[k] ?? 0);
+    for (let k = 0; k < this.size; k++) g[k] = (g[k] ?? 0) - (this.#load[k] ?? 0);
     for (const unknown of this.#problem.held) g[unknown] = 0;
     return g;
   }
@@ -125,27 +125,27 @@ class Search {
       const e = this.#stretch(bar, q);
       if (!bar.tensionOnly || e > 0) sum += (0.5 * bar.EA * e * e) / bar.length;
     }
-    for (let k = 0; k < this.#size; k++) sum -= (this.#load[k] ?? 0) * (q[k] ?? 0);
+    for (let k = 0; k < this.size; k++) sum -= (this.#load[k] ?? 0) * (q[k] ?? 0);
     return sum;
   }
 
   #step(gradient: Float64Array, taut: readonly boolean[]): Float64Array {
     const matrix = this.#tangent(taut);
-    this.#symbolic ??= analysed(matrix, ordered(matrix));
+    this.#symbolic ??= analysed(matrix, ordered(matrix, this.#problem));
     const step = solved(factored(matrix, this.#symbolic), gradient);
-    for (let k = 0; k < this.#size; k++) step[k] = -(step[k] ?? 0);
+    for (let k = 0; k < this.size; k++) step[k] = -(step[k] ?? 0);
     return step;
   }
 
   /** Bars that are slack leave zeros, so that the pattern stays the same. */
   #tangent(taut: readonly boolean[]): SymmetricMatrix {
     const { bars, rest, held } = this.#problem;
-    const gatherer = new MatrixGatherer(this.#size, bars.length * 21 + rest.length + this.#size);
+    const gatherer = new MatrixGatherer(this.size, bars.length * 21 + rest.length + this.size);
     const put = (i: number, j: number, value: number): void => {
       if (held.has(i) || held.has(j)) return;
       gatherer.add(i, j, value);
     };
-    for (let k = 0; k < this.#size; k++)
+    for (let k = 0; k < this.size; k++)
       gatherer.add(k, k, held.has(k) ? this.#stiffest : LENT * this.#stiffest);
     for (const [i, j, value] of rest) put(i, j, value);
     bars.forEach((bar, index) => {
@@ -191,20 +191,26 @@ function unit(values: Float64Array): Float64Array {
   return most > 0 ? values.map((value) => value / most) : values;
 }
 
-/** Nodes are ordered as wholes. */
-function ordered(matrix: SymmetricMatrix): Int32Array {
-  const neighbours = Array.from({ length: matrix.size / 3 }, () => new Set<number>());
+/** Nodes are ordered as wholes, each with its turns. */
+function ordered(matrix: SymmetricMatrix, { nodes, turns = [] }: EquilibriumProblem): Int32Array {
+  const nodeOf = (unknown: number): number =>
+    unknown < 3 * nodes ? Math.floor(unknown / 3) : (turns[unknown - 3 * nodes] ?? 0);
+  const neighbours = Array.from({ length: nodes }, () => new Set<number>());
   for (let c = 0; c < matrix.size; c++)
     for (let k = matrix.start[c] ?? 0; k < (matrix.start[c + 1] ?? 0); k++) {
-      const a = Math.floor(c / 3);
-      const b = Math.floor((matrix.row[k] ?? 0) / 3);
+      const a = nodeOf(c);
+      const b = nodeOf(matrix.row[k] ?? 0);
       if (a === b) continue;
       neighbours[a]?.add(b);
       neighbours[b]?.add(a);
     }
+  const turnsOf = Array.from({ length: nodes }, (): number[] => []);
+  turns.forEach((node, k) => turnsOf[node]?.push(3 * nodes + k));
   const order = new Int32Array(matrix.size);
-  eliminationOrder(neighbours.map((set) => [...set])).forEach((node, k) => {
-    for (let c = 0; c < 3; c++) order[3 * k + c] = 3 * node + c;
-  });
+  let place = 0;
+  for (const node of eliminationOrder(neighbours.map((set) => [...set]))) {
+    for (let c = 0; c < 3; c++) order[place++] = 3 * node + c;
+    for (const turn of turnsOf[node] ?? []) order[place++] = turn;
+  }
   return order;
 }

@@ -1,3 +1,11 @@
+import {
+  placed,
+  withActions,
+  withActionsFollowing,
+  withCarry,
+  withLoad,
+  withLoadCase,
+} from './actionEdits.ts';
 import type { Edit } from './edit.ts';
 import type { BarMark, Bay, Join, Line, LineHolder, Project, Recipe } from './model.ts';
 import type { ProjectProblem } from './problem.ts';
@@ -47,6 +55,19 @@ export function applyEdit(project: Project, edit: Edit): Project {
         ...bay,
         recipe: withLineHolder(bay.recipe, edit.line, edit.heldBy),
       }));
+    case 'load case':
+      return withActions(project, (actions) => withLoadCase(actions, edit.id, edit.loadCase));
+    case 'combination':
+      return withActions(project, (actions) => ({
+        ...actions,
+        combinations: placed(actions.combinations, edit.id, edit.combination),
+      }));
+    case 'combinations':
+      return withActions(project, (actions) => ({ ...actions, combinations: edit.combinations }));
+    case 'load':
+      return withActions(project, (actions) => withLoad(actions, edit.loadCase, edit.id, edit.load));
+    case 'carry':
+      return withActions(project, (actions) => withCarry(actions, edit.from, edit.eaves, edit.to));
     default:
       return edit satisfies never;
   }
@@ -91,6 +112,16 @@ export function editLabel(edit: Edit): string {
       return `Set the forces at a crossing of ${edit.bay}`;
     case 'line holder':
       return `Change what holds ${edit.line}`;
+    case 'load case':
+      return edit.loadCase === null ? `Remove case ${edit.id}` : `Change case ${edit.id}`;
+    case 'combination':
+      return edit.combination === null ? `Remove combination ${edit.id}` : `Change combination ${edit.id}`;
+    case 'combinations':
+      return 'Change the combinations';
+    case 'load':
+      return edit.load === null ? `Take a load off ${edit.loadCase}` : `Place a load in ${edit.loadCase}`;
+    case 'carry':
+      return `Change what carries the eaves of ${edit.from}`;
     default:
       return edit satisfies never;
   }
@@ -180,7 +211,7 @@ function renamed(project: Project, from: string, to: string): Project {
   const named = (id: string) => project.bays.some((bay) => bay.id === id);
   if (!named(from) || named(to)) return project;
   return {
-    ...project,
+    ...withActionsFollowing(project, from, to),
     bays: project.bays.map((bay) => {
       const following = withLinesFollowing(bay, from, to);
       return bay.id === from ? { ...following, id: to } : following;

@@ -1,6 +1,7 @@
 /** Changes to a project as plain data: the store, the remedies and undo all speak this one language. */
 
 import type { OwnAngle } from '../catalogue/model.ts';
+import type { Carry, Combination, Load, LoadCase } from './actions.ts';
 import type { BarMark, Bay, DiagonalSpec, Join, LineHolder, Place, Recipe, Settings } from './model.ts';
 
 export type Edit =
@@ -38,4 +39,17 @@ export type Edit =
       readonly bay: string;
       readonly line: string;
       readonly heldBy: LineHolder;
+    }
+  /** Puts a case in the place of the one with its id, or at the end; null takes it away, and its factors with it. */
+  | { readonly kind: 'load case'; readonly id: string; readonly loadCase: LoadCase | null }
+  | { readonly kind: 'combination'; readonly id: string; readonly combination: Combination | null }
+  /** All combinations at once, as a starting set gives them. */
+  | { readonly kind: 'combinations'; readonly combinations: readonly Combination[] }
+  | { readonly kind: 'load'; readonly loadCase: string; readonly id: string; readonly load: Load | null }
+  /** Of one eaves of a roof bay; `to` null hands its forces to the ground. */
+  | {
+      readonly kind: 'carry';
+      readonly from: string;
+      readonly eaves: Carry['eaves'];
+      readonly to: string | null;
     };

@@ -5,6 +5,7 @@
 import type { CatalogueId, OwnAngle } from '../catalogue/model.ts';
 import type { Vec3 } from '../geometry/vector.ts';
 import type { Axis } from '../section/model.ts';
+import type { Actions } from './actions.ts';
 
 export const PROJECT_FORMAT = 'tautline-project';
 export const PROJECT_VERSION = 1;
@@ -17,6 +18,8 @@ export interface Project {
   /** The user's own stock list. */
   readonly ownStock: readonly OwnAngle[];
   readonly bays: readonly Bay[];
+  /** What acts on it; left out while nothing does. */
+  readonly actions?: Actions;
 }
 
 export type UnitSystem = 'metric' | 'us';

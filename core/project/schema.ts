@@ -186,6 +186,68 @@ const settings = z.strictObject({
   lengthBasis: z.enum(['set-out', 'connections']),
 });
 
+/** "W1/t1.rise", "R1/a.L2". */
+const place = z.string().regex(/^[A-Za-z0-9][A-Za-z0-9_-]{0,23}\/[A-Za-z0-9][A-Za-z0-9_.+-]{0,119}$/);
+/** kN or kN/m: nothing that is braced with angles carries a hundred meganewtons. */
+const strength = z.number().min(-100_000).max(100_000);
+const forces = z.tuple([strength, strength, strength]);
+const pressure = z.number().min(-50).max(50);
+
+const load = z.discriminatedUnion('kind', [
+  z.strictObject({ kind: z.literal('node'), id: shortId, node: place, force: forces }),
+  z.strictObject({ kind: z.literal('line'), id: shortId, bar: place, perMetre: forces }),
+  z.strictObject({
+    kind: z.literal('shortened'),
+    id: shortId,
+    bar: place,
+    by: z.number().min(-200).max(200),
+  }),
+  z.strictObject({
+    kind: z.literal('gable'),
+    id: shortId,
+    bay: shortId,
+    pressure,
+    rafter: z.union([z.literal(1), z.literal(2)]),
+    ground: coordinate,
+  }),
+  z.strictObject({
+    kind: z.literal('side'),
+    id: shortId,
+    bay: shortId,
+    pressure,
+    width: millimetres(0, 1_000_000),
+  }),
+]);
+
+const actions = z.strictObject({
+  cases: z
+    .array(
+      z.strictObject({
+        id: shortId,
+        name: text,
+        kind: z.enum(['permanent', 'imposed', 'wind', 'other']),
+        selfWeight: z.boolean(),
+        reverses: z.boolean(),
+        loads: z.array(load).max(20_000),
+      }),
+    )
+    .max(50),
+  combinations: z
+    .array(
+      z.strictObject({
+        id: shortId,
+        name: text,
+        use: z.enum(['strength', 'service']),
+        factors: z.record(shortId, z.number().min(-20).max(20)),
+        leaning: z.boolean(),
+      }),
+    )
+    .max(200),
+  carries: z
+    .array(z.strictObject({ from: shortId, to: shortId, eaves: z.union([z.literal(1), z.literal(2)]) }))
+    .max(20_000),
+});
+
 export const projectSchema = z.strictObject({
   format: z.literal(PROJECT_FORMAT),
   version: z.literal(PROJECT_VERSION),
@@ -193,6 +255,7 @@ export const projectSchema = z.strictObject({
   settings,
   ownStock: z.array(ownAngle).max(2_000),
   bays: z.array(bay).max(20_000),
+  actions: actions.optional(),
 });
 
 type Parsed = z.infer<typeof projectSchema>;

@@ -29,6 +29,13 @@ export function coalescingKey(edits: readonly Edit[]): string | null {
     case 'join':
     case 'line holder':
       return null;
+    case 'load':
+      return `load ${edit.loadCase} ${edit.id}`;
+    case 'load case':
+    case 'combination':
+    case 'combinations':
+    case 'carry':
+      return null;
     default:
       return edit satisfies never;
   }
