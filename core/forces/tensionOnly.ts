@@ -205,7 +205,9 @@ function ordered(matrix: SymmetricMatrix, { nodes, turns = [] }: EquilibriumProb
       neighbours[b]?.add(a);
     }
   const turnsOf = Array.from({ length: nodes }, (): number[] => []);
-  turns.forEach((node, k) => turnsOf[node]?.push(3 * nodes + k));
+  turns.forEach((node, k) => {
+    turnsOf[node]?.push(3 * nodes + k);
+  });
   const order = new Int32Array(matrix.size);
   let place = 0;
   for (const node of eliminationOrder(neighbours.map((set) => [...set]))) {

@@ -70,7 +70,8 @@ interface BaySet {
 function setOut(bay: Bay, stock: Stock, register: NodeRegister, nextMark: () => string): BaySet {
   const sketch = placedSketch(bay);
   const planes = new Map(sketch.planes.map((plane) => [plane.id, plane]));
-  const drafts = draftsOf(bay, sketch, planes, stock, register);
+  const nodes = placedNodes(bay, sketch, register);
+  const drafts = draftsOf(bay, sketch, planes, stock, nodes);
   const crossings = crossingsOf(bay, sketch.planes, drafts);
   const touching = crossingsByKey(crossings);
 
@@ -109,6 +110,7 @@ function setOut(bay: Bay, stock: Stock, register: NodeRegister, nextMark: () => 
       diagonals: bars.filter((bar) => bar.angle).map((bar) => bar.id),
       crossings: crossings.map((crossing) => crossing.id),
       nodes: [...new Set([...drafts.values()].flatMap((draft) => [draft.i, draft.j]))],
+      nodeOf: new Map([...nodes].map(([key, { id }]) => [key, id])),
       gussets: bars.flatMap((bar) => gussetsOf(bar, planeOf(planes, bar.plane))),
       dimensions: sketch.dimensions,
     },
@@ -123,16 +125,22 @@ function planeOf(planes: ReadonlyMap<string, Plane>, id: string): Plane {
   return plane;
 }
 
+interface PlacedNode {
+  readonly at: Vec3;
+  readonly id: string;
+}
+
+function placedNodes(bay: Bay, sketch: BaySketch, register: NodeRegister): ReadonlyMap<string, PlacedNode> {
+  return new Map(sketch.nodes.map((node) => [node.key, { at: node.at, id: register.add(bay.id, node) }]));
+}
+
 function draftsOf(
   bay: Bay,
   sketch: BaySketch,
   planes: ReadonlyMap<string, Plane>,
   stock: Stock,
-  register: NodeRegister,
+  nodes: ReadonlyMap<string, PlacedNode>,
 ): ReadonlyMap<string, Drafted> {
-  const nodes = new Map(
-    sketch.nodes.map((node) => [node.key, { at: node.at, id: register.add(bay.id, node) }]),
-  );
   const node = (key: string) => {
     const found = nodes.get(key);
     if (!found) throw new Error(`no node ${key} in ${bay.id}`);

@@ -36,6 +36,8 @@ export interface BayLayout {
   readonly diagonals: readonly BarId[];
   readonly crossings: readonly CrossingId[];
   readonly nodes: readonly string[];
+  /** By the node's key inside the bay, the node that it goes by: another bay's where they have merged. */
+  readonly nodeOf: ReadonlyMap<string, string>;
   readonly gussets: readonly Gusset[];
   readonly dimensions: readonly DimensionLine[];
 }

@@ -1,0 +1,304 @@
+/**
+ * Bays that share nodes, as one framework: bars pull and push along themselves; members that run through bend in the plane of their bay; supports are fixed; and
+ * whatever no bay at a node resists, square to its plane as a rule, the rest of the building holds.
+ */
+
+import { memberSection } from '../frame/memberSection.ts';
+import { cross, dot, length, scale, subtract, unit, type Vec3 } from '../geometry/vector.ts';
+import type { Bar, BarId, BayLayout, Layout, Plane } from '../layout/model.ts';
+import type { AxialBar } from './model.ts';
+import { structuralMember } from './structuralMember.ts';
+
+export interface FramingPart {
+  readonly bays: readonly BayLayout[];
+  /** Node ids; unknown 3k + c is displacement c of node k. */
+  readonly nodes: readonly string[];
+  readonly indexOf: ReadonlyMap<string, number>;
+  /** Node of each turning unknown. Turns are counted in mm at `TURN_ARM`. */
+  readonly turns: readonly number[];
+  readonly fixed: ReadonlySet<number>;
+  /** Diagonals, and members between the nodes on them. */
+  readonly pieces: readonly Piece[];
+  readonly holds: readonly Hold[];
+}
+
+/** A straight run of a bar between two nodes. */
+export interface Piece {
+  readonly bar: BarId;
+  readonly axial: AxialBar;
+  /** Bending in the plane of the bay; null for bars that only pull and push. */
+  readonly bending: Bending | null;
+}
+
+export interface Bending {
+  /** N·mm². */
+  readonly EI: number;
+  /** Unit vector in the plane, square to the piece. */
+  readonly across: Vec3;
+  /** Turning unknowns at the ends, counted from 0; null where it is hinged. */
+  readonly turnI: number | null;
+  readonly turnJ: number | null;
+}
+
+export interface Hold {
+  readonly node: number;
+  readonly direction: Vec3;
+}
+
+/** A turn of 1 in these units moves a point this far away, mm, by 1 mm: keeps turns and displacements alike in size. */
+export const TURN_ARM = 1000;
+/** Stiffness with which the rest of the building holds a node, N/mm: gives a thousandth of a millimetre under 10 kN. */
+export const HELD_BY_THE_BUILDING = 1e7;
+
+/** Within this angle two members run through, rad. */
+const IN_LINE = Math.sin(Math.PI / 180);
+
+/** Groups of bays that share a node of the framing. */
+export function framingParts(layout: Layout, E: number): readonly FramingPart[] {
+  const groups = connected(layout);
+  return groups.map((bays) => new PartBuilder(layout, bays, E).part());
+}
+
+function connected(layout: Layout): readonly (readonly BayLayout[])[] {
+  const leader = new Map<string, string>();
+  const root = (id: string): string => {
+    let at = id;
+    for (let next = leader.get(at); next !== undefined && next !== at; next = leader.get(at)) at = next;
+    return at;
+  };
+  const firstAt = new Map<string, string>();
+  for (const bay of layout.bays) {
+    leader.set(bay.id, bay.id);
+    for (const id of bay.bars) {
+      const bar = layout.bars.get(id);
+      if (!bar || bar.line) continue;
+      for (const node of [bar.i, bar.j]) {
+        const first = firstAt.get(node);
+        if (first === undefined) firstAt.set(node, bay.id);
+        else if (first !== bay.id) {
+          const [a, b] = [root(first), root(bay.id)];
+          if (a !== b) leader.set(b, a);
+        }
+      }
+    }
+  }
+  const groups = new Map<string, BayLayout[]>();
+  for (const bay of layout.bays) {
+    const group = groups.get(root(bay.id));
+    if (group) group.push(bay);
+    else groups.set(root(bay.id), [bay]);
+  }
+  return [...groups.values()];
+}
+
+interface Draft {
+  readonly bar: Bar;
+  readonly plane: Plane;
+  readonly from: number;
+  readonly to: number;
+}
+
+/** Members that meet in line at a node and turn together there. */
+interface Joint {
+  readonly plane: string;
+  readonly direction: Vec3;
+  ends: number;
+  turn: number | null;
+}
+
+class PartBuilder {
+  readonly #layout: Layout;
+  readonly #bays: readonly BayLayout[];
+  readonly #E: number;
+  readonly #nodes: string[] = [];
+  readonly #indexOf = new Map<string, number>();
+  readonly #turns: number[] = [];
+
+  constructor(layout: Layout, bays: readonly BayLayout[], E: number) {
+    this.#layout = layout;
+    this.#bays = bays;
+    this.#E = E;
+  }
+
+  part(): FramingPart {
+    const drafts = this.#bays.flatMap((bay) => this.#draftsOf(bay));
+    const joints = this.#jointsOf(drafts);
+    const pieces = drafts.map((draft) => this.#pieceOf(draft, joints));
+    return {
+      bays: this.#bays,
+      nodes: this.#nodes,
+      indexOf: this.#indexOf,
+      turns: this.#turns,
+      fixed: this.#fixed(),
+      pieces,
+      holds: this.#holds(drafts),
+    };
+  }
+
+  #node(id: string): number {
+    const known = this.#indexOf.get(id);
+    if (known !== undefined) return known;
+    this.#nodes.push(id);
+    this.#indexOf.set(id, this.#nodes.length - 1);
+    return this.#nodes.length - 1;
+  }
+
+  #at(node: number): Vec3 {
+    return this.#layout.nodes.get(this.#nodes[node] ?? '')?.at ?? [0, 0, 0];
+  }
+
+  #draftsOf(bay: BayLayout): readonly Draft[] {
+    const planes = new Map(bay.planes.map((plane) => [plane.id, plane]));
+    const bars = bay.bars.flatMap((id) => {
+      const bar = this.#layout.bars.get(id);
+      const plane = bar && planes.get(bar.plane);
+      // Purlins and rails lie on top; a bar of an unknown section is not there.
+      return bar && plane && !bar.line && (!bar.angle || bar.angle.stock) ? [{ bar, plane }] : [];
+    });
+    for (const { bar } of bars) {
+      this.#node(bar.i);
+      this.#node(bar.j);
+    }
+    return bars.flatMap(({ bar, plane }) => {
+      const stops = bay.kind === 'free' && !bar.angle ? this.#nodesOn(bar, bay) : [];
+      const run = [this.#node(bar.i), ...stops, this.#node(bar.j)];
+      return run.slice(1).map((to, k) => ({ bar, plane, from: run[k] ?? to, to }));
+    });
+  }
+
+  /** In a bay drawn freely other bars may end on a member between its ends. */
+  #nodesOn(bar: Bar, bay: BayLayout): readonly number[] {
+    return [...new Set(bay.nodes)]
+      .flatMap((id) => {
+        const node = this.#indexOf.get(id);
+        const at = this.#layout.nodes.get(id)?.at;
+        if (node === undefined || !at || id === bar.i || id === bar.j) return [];
+        const s = dot(subtract(at, bar.from), bar.direction);
+        const off = length(subtract(subtract(at, bar.from), scale(bar.direction, s)));
+        return s > 1 && s < bar.length - 1 && off <= 1 ? [{ node, s }] : [];
+      })
+      .sort((a, b) => a.s - b.s)
+      .map(({ node }) => node);
+  }
+
+  #jointsOf(drafts: readonly Draft[]): ReadonlyMap<number, readonly Joint[]> {
+    const joints = new Map<number, Joint[]>();
+    for (const { bar, plane, from, to } of drafts) {
+      if (bar.angle) continue;
+      for (const node of [from, to]) {
+        const here = joints.get(node) ?? [];
+        joints.set(node, here);
+        const known = here.find((joint) => joint.plane === planeKey(bar, plane) && inLine(joint, bar));
+        if (known) known.ends += 1;
+        else here.push({ plane: planeKey(bar, plane), direction: bar.direction, ends: 1, turn: null });
+      }
+    }
+    for (const [node, here] of joints)
+      for (const joint of here)
+        if (joint.ends > 1) {
+          joint.turn = this.#turns.length;
+          this.#turns.push(node);
+        }
+    return joints;
+  }
+
+  #pieceOf({ bar, plane, from, to }: Draft, joints: ReadonlyMap<number, readonly Joint[]>): Piece {
+    const between = subtract(this.#at(to), this.#at(from));
+    const span = length(between);
+    const direction = scale(between, 1 / span);
+    const section = bar.angle?.stock?.properties;
+    const shared = { id: bar.id, i: from, j: to, direction, length: span } as const;
+    if (bar.angle && section)
+      return {
+        bar: bar.id,
+        axial: {
+          ...shared,
+          EA: this.#E * section.area,
+          tensionOnly: bar.angle.spec.countedOn === 'tension',
+          preset: 0,
+        },
+        bending: null,
+      };
+    const member = memberSection(structuralMember(bar));
+    const turnAt = (node: number): number | null =>
+      joints.get(node)?.find((joint) => joint.plane === planeKey(bar, plane) && inLine(joint, bar))?.turn ??
+      null;
+    const [turnI, turnJ] = [turnAt(from), turnAt(to)];
+    const across = cross(plane.normal, direction);
+    const bends = (turnI !== null || turnJ !== null) && length(across) > 1e-6;
+    // Beams and chords stand on edge in the plane; the other members have their depth square to it.
+    const onEdge = bar.role === 'beam' || bar.role === 'chord';
+    return {
+      bar: bar.id,
+      axial: { ...shared, EA: this.#E * member.area, tensionOnly: false, preset: 0 },
+      bending: bends
+        ? {
+            EI: this.#E * (onEdge ? member.Imajor : member.Iminor),
+            across: unit(across),
+            turnI,
+            turnJ,
+          }
+        : null,
+    };
+  }
+
+  #fixed(): ReadonlySet<number> {
+    const fixed = new Set<number>();
+    const standing = new Set(this.#bays.filter(({ kind }) => kind !== 'roof').flatMap(({ nodes }) => nodes));
+    this.#nodes.forEach((id, k) => {
+      const supports = this.#layout.nodes.get(id)?.supports ?? {};
+      const holds = this.#bays.some((bay) => {
+        const support = supports[bay.id];
+        return support !== undefined && (support.kind !== 'eaves' || !standing.has(id));
+      });
+      if (holds) for (let c = 0; c < 3; c++) fixed.add(3 * k + c);
+    });
+    return fixed;
+  }
+
+  /** What no plane at a node takes. The eaves of a roof give it no hold up the slope: frames hold them across the building. */
+  #holds(drafts: readonly Draft[]): readonly Hold[] {
+    const taken = new Map<number, Vec3[]>();
+    const roofs = new Set(this.#bays.filter(({ kind }) => kind === 'roof').map(({ id }) => id));
+    for (const { bar, plane, from, to } of drafts)
+      for (const node of [from, to]) {
+        const here = taken.get(node) ?? [];
+        taken.set(node, here);
+        const eaves =
+          roofs.has(bar.bay) && this.#layout.nodes.get(this.#nodes[node] ?? '')?.supports[bar.bay];
+        here.push(...(eaves ? [plane.right] : [plane.right, plane.up]));
+      }
+    return [...taken].flatMap(([node, directions]) =>
+      leftOver(directions).map((direction) => ({ node, direction })),
+    );
+  }
+}
+
+const planeKey = (bar: Bar, plane: Plane): string => `${bar.bay} ${plane.id}`;
+const inLine = (joint: Joint, bar: Bar): boolean => length(cross(joint.direction, bar.direction)) < IN_LINE;
+
+/** Unit vectors square to each other and to all of the given. */
+function leftOver(directions: readonly Vec3[]): readonly Vec3[] {
+  const taken: Vec3[] = [];
+  const rest = (v: Vec3): Vec3 =>
+    taken.reduce<Vec3>((left, known) => subtract(left, scale(known, dot(left, known))), v);
+  for (const direction of directions) {
+    const left = rest(direction);
+    if (length(left) > 1e-3) taken.push(unit(left));
+  }
+  const free: Vec3[] = [];
+  const [a, b] = taken;
+  if (taken.length === 2 && a && b) return [unit(cross(a, b))];
+  for (const axis of [
+    [1, 0, 0],
+    [0, 1, 0],
+    [0, 0, 1],
+  ] as const) {
+    const left = rest(axis);
+    if (length(left) > 0.5) {
+      taken.push(unit(left));
+      free.push(unit(left));
+    }
+  }
+  return free;
+}
