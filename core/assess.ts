@@ -10,6 +10,8 @@ import { scheduleRows } from './documents/schedule.ts';
 import { findingsOf } from './findings/findings.ts';
 import type { Finding, Severity } from './findings/model.ts';
 import type { Judged } from './findings/subject.ts';
+import { forcesOf } from './forces/forces.ts';
+import type { Forces } from './forces/model.ts';
 import { layOut } from './layout/layOut.ts';
 import type { Bar, BarId, BayLayout, Layout } from './layout/model.ts';
 import { limitInForce } from './practice/limit.ts';
@@ -38,10 +40,11 @@ export function assess(
   const stock = stockOf(project.settings.catalogue, project.ownStock, catalogues);
   const layout = layOut(project, stock);
   const context = restraintContext(layout);
+  const forces = project.actions ? forcesOf(project.actions, layout, practice) : null;
   const byMarks = judgedDiagonals(project, practice, layout, context);
   const { judged, movable } =
     depth === 'all levels'
-      ? withBowing(project, practice, layout, context, byMarks, memory)
+      ? withBowing(project, practice, layout, context, byMarks, forces, memory)
       : { judged: byMarks, movable: new Map<string, readonly NamedMechanism[]>() };
   const findings = findingsOf({ project, practice, layout, diagonals: judged, movable });
   const findingIds = idsByBar(findings);
@@ -53,6 +56,7 @@ export function assess(
     practice,
     layout,
     diagonals,
+    forces,
     findings,
     schedule: scheduleRows({ project, layout, diagonals, findings }),
     bays: new Map(
@@ -85,6 +89,7 @@ function withBowing(
   layout: Layout,
   context: RestraintContext,
   byMarks: ReadonlyMap<BarId, Judged>,
+  forces: Forces | null,
   memory: BowingMemory | null,
 ): {
   readonly judged: ReadonlyMap<BarId, Judged>;
@@ -93,7 +98,7 @@ function withBowing(
   const restraints = new Map(
     [...byMarks].flatMap(([id, { restraint }]) => (restraint ? [[id, restraint] as const] : [])),
   );
-  const input = { layout, context, restraints, steel: practice.steel };
+  const input = { layout, context, restraints, steel: practice.steel, forces };
   const judged = new Map(byMarks);
   const movable = new Map<string, readonly NamedMechanism[]>();
   layout.bays.forEach((bay, index) => {

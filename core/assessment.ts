@@ -1,6 +1,7 @@
 import type { Bowing } from './bowing/model.ts';
 import type { ScheduleRow } from './documents/model.ts';
 import type { Finding, Severity } from './findings/model.ts';
+import type { Forces } from './forces/model.ts';
 import type { BarId, Layout } from './layout/model.ts';
 import type { LimitInForce, Practice, Verdict } from './practice/model.ts';
 import type { Project } from './project/model.ts';
@@ -12,6 +13,8 @@ export interface Assessment {
   readonly practice: Practice;
   readonly layout: Layout;
   readonly diagonals: ReadonlyMap<BarId, DiagonalAssessment>;
+  /** Forces of every combination; null where nothing acts. */
+  readonly forces: Forces | null;
   /** Must-fix first, then by bay order. */
   readonly findings: readonly Finding[];
   readonly schedule: readonly ScheduleRow[];

@@ -20,6 +20,7 @@ export interface Partner {
   readonly crossing: Crossing;
   /** Tension in the partner over compression in the bar. */
   readonly tensionShare: number;
+  readonly shareFrom: PartnerState['shareFrom'];
 }
 
 /** Twist counts where it lowers the critical load by more than this. */
@@ -86,6 +87,7 @@ function stateOf(bar: BowingBar, partner: Partner, steel: Steel, twisting: numbe
     bar: other.bar.id,
     crossing: crossing.id,
     tensionShare,
+    shareFrom: partner.shareFrom,
     cut: cutBar === null ? 'neither' : cutBar === bar.bar.key ? 'this bar' : 'partner',
     slackLoad: slack === null ? null : slack * twisting,
   };

@@ -1,3 +1,5 @@
+import type { Forces } from '../forces/model.ts';
+import { type PartnerShare, partnerShare } from '../forces/partnerShare.ts';
 import { bayFrame, GUSSETED } from '../frame/bayFrame.ts';
 import type { Mechanism } from '../frame/model.ts';
 import { offeredTo } from '../frame/push.ts';
@@ -16,6 +18,8 @@ export interface BowingInput {
   readonly context: RestraintContext;
   readonly restraints: ReadonlyMap<BarId, Restraint>;
   readonly steel: Steel;
+  /** Forces of every combination, where actions are given: they say how taut a partner is. */
+  readonly forces: Forces | null;
 }
 
 export interface BayBowings {
@@ -89,14 +93,21 @@ function partnersOf(
       (a, b) => Math.abs(place(a) - bar.length / 2) - Math.abs(place(b) - bar.length / 2),
     )[0];
     const other = nearest && bars.get(nearest.a === id ? nearest.b : nearest.a);
-    if (nearest && other)
-      partners.set(id, {
-        bar: other,
-        crossing: nearest,
-        tensionShare: bay.tensionShares?.[nearest.key] ?? 0,
-      });
+    if (!nearest || !other) continue;
+    const found = shareAt(input, id, nearest);
+    partners.set(id, {
+      bar: other,
+      crossing: nearest,
+      tensionShare: found?.share ?? bay.tensionShares?.[nearest.key] ?? 0,
+      shareFrom: found ? { kind: 'combination', state: found.state } : { kind: 'assumed' },
+    });
   }
   return partners;
+}
+
+/** What the forces say of a crossing's other bar while this one is squeezed; null where no combination squeezes it. */
+export function shareAt({ forces }: BowingInput, bar: BarId, crossing: Crossing): PartnerShare | null {
+  return forces && partnerShare(forces, bar, crossing.a === bar ? crossing.b : crossing.a);
 }
 
 const isJoined = ({ join }: Crossing): boolean =>

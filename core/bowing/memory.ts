@@ -1,6 +1,6 @@
 import type { BayLayout } from '../layout/model.ts';
 import type { Bay, Project } from '../project/model.ts';
-import type { BayBowings, BowingInput } from './bowings.ts';
+import { type BayBowings, type BowingInput, shareAt } from './bowings.ts';
 
 /**
  * Bowings of bays that an edit did not touch, kept from one assessment to the next. Given by whoever assesses again and again; the
@@ -37,6 +37,14 @@ export function circumstances(input: BowingInput, layout: BayLayout, bay: Bay, p
   );
   const holding = input.context.holdings.get(bay.id);
   const supports = layout.nodes.map((node) => holding?.held.get(node)?.kind ?? '');
+  const shares = input.forces
+    ? layout.crossings.flatMap((crossingId) => {
+        const crossing = input.layout.crossings.get(crossingId);
+        return crossing?.kind === 'diagonals'
+          ? [shareAt(input, crossing.a, crossing), shareAt(input, crossing.b, crossing)]
+          : [];
+      })
+    : null;
   const { id, recipe, diagonals, bars, joins, tensionShares } = bay;
   return JSON.stringify([
     id,
@@ -52,5 +60,6 @@ export function circumstances(input: BowingInput, layout: BayLayout, bay: Bay, p
     ownStock,
     holds,
     supports,
+    shares,
   ]);
 }

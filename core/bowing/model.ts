@@ -58,6 +58,8 @@ export interface PartnerState {
   readonly crossing: string;
   /** Tension in the partner over compression in the bar. */
   readonly tensionShare: number;
+  /** From the combination that is worst for this bar, or as the user assumes. */
+  readonly shareFrom: { readonly kind: 'combination'; readonly state: string } | { readonly kind: 'assumed' };
   readonly cut: 'neither' | 'this bar' | 'partner';
   /** Critical load with the partner slack, N; null where the partner is not counted on as taut. */
   readonly slackLoad: number | null;

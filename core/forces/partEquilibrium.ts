@@ -71,7 +71,9 @@ function answerOf(
   const elongations = new Map<BarId, number>();
   const displacements = new Map<string, Vec3>();
   const internal = new Float64Array(load.length);
-  part.nodes.forEach((id, k) => displacements.set(id, at(q, k)));
+  part.nodes.forEach((id, k) => {
+    displacements.set(id, at(q, k));
+  });
   part.pieces.forEach(({ bar, bending }, index) => {
     const piece = bars[index];
     if (!piece) return;

@@ -95,7 +95,13 @@ function sceneOf(assessment: Assessment, id: BarId): Scene | null {
       restraint ? [[key, restraint] as const] : [],
     ),
   );
-  const input = { layout, context: restraintContext(layout), restraints, steel: practice.steel };
+  const input = {
+    layout,
+    context: restraintContext(layout),
+    restraints,
+    steel: practice.steel,
+    forces: assessment.forces,
+  };
   const bowing = bayBowing(input, bay, source);
   const studied = bowing.bars.get(id);
   return studied

@@ -183,7 +183,7 @@ describe('what holds must be', () => {
         restraint ? [[id, restraint] as const] : [],
       ),
     );
-    const input = { layout, context: restraintContext(layout), restraints, steel };
+    const input = { layout, context: restraintContext(layout), restraints, steel, forces: null };
     const bar = first && bayBowing(input, first, crossedBay(length, given)).bars.get(RISE);
     if (!bar) throw new Error('no bar');
     return bar;
@@ -217,7 +217,12 @@ describe('what holds must be', () => {
     const assessment = assessed(5000);
     const crossing = assessment.layout.crossings.get(`B/${KEY}`);
     if (!crossing) throw new Error('no crossing');
-    const partner = { bar: { ...bar, bar: { ...bar.bar } }, crossing, tensionShare: 0 };
+    const partner = {
+      bar: { ...bar, bar: { ...bar.bar } },
+      crossing,
+      tensionShare: 0,
+      shareFrom: { kind: 'assumed' as const },
+    };
     const points = loadAgainstPartner(bar, partner, steel, 8);
     expect(points.map(({ at }) => at)).toEqual([-1, -0.75, -0.5, -0.25, 0, 0.25, 0.5, 0.75, 1]);
     points.slice(1).forEach(({ N }, k) => {
