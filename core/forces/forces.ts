@@ -48,7 +48,11 @@ export function forcesOf(actions: Actions, layout: Layout, practice: Practice): 
             starts,
           })
         : null;
-    return stateOf(state, found, slackened, layout);
+    const bothWays =
+      state.use === 'strength' && found.answers.some(({ slack }) => slack.length > 0)
+        ? solved({ state, loads, order, carries, layout, practice, starts: new Map() }, 'all both ways')
+        : null;
+    return stateOf(state, found, slackened, bothWays, layout);
   });
   return {
     states,
@@ -150,7 +154,10 @@ interface Solved {
   readonly noWay: readonly NoWay[];
 }
 
-function solved({ state, loads, order, carries, layout, practice, starts }: Solving): Solved {
+function solved(
+  { state, loads, order, carries, layout, practice, starts }: Solving,
+  bars: 'as counted on' | 'all both ways' = 'as counted on',
+): Solved {
   const answers: PartAnswer[] = [];
   const noWay: NoWay[] = [];
   const nodes = new Map(loads.nodes);
@@ -171,6 +178,7 @@ function solved({ state, loads, order, carries, layout, practice, starts }: Solv
       stiffness,
       { nodes, shortened: loads.shortened },
       starts.get(stiffness) ?? null,
+      bars,
     );
     if (!('kind' in found)) {
       noWay.push(found);
@@ -215,10 +223,12 @@ function stateOf(
   state: CombinationState,
   { answers, noWay }: Solved,
   slackened: Solved | null,
+  bothWays: Solved | null,
   layout: Layout,
 ): ForceState {
   const merged = <T>(of: (answer: PartAnswer) => ReadonlyMap<string, T>): ReadonlyMap<string, T> =>
     new Map(answers.flatMap((answer) => [...of(answer)]));
+  const slack = new Set(answers.flatMap((answer) => answer.slack));
   const displacements = merged((answer) => answer.displacements);
   const after = slackened && new Map(slackened.answers.flatMap((answer) => [...answer.displacements]));
   return {
@@ -226,7 +236,8 @@ function stateOf(
     forces: merged((answer) => answer.forces),
     moments: merged((answer) => answer.moments),
     elongations: merged((answer) => answer.elongations),
-    slack: new Set(answers.flatMap((answer) => answer.slack)),
+    slack,
+    attracted: attractedBy(slack, bothWays),
     displacements,
     reactions: merged((answer) => answer.reactions),
     drifts: layout.bays.flatMap((bay) => {
@@ -241,4 +252,14 @@ function stateOf(
     noWay,
     residual: answers.reduce((most, { residual }) => Math.max(most, residual), 0),
   };
+}
+
+function attractedBy(slack: ReadonlySet<BarId>, bothWays: Solved | null): ReadonlyMap<BarId, number> {
+  const found = new Map<BarId, number>();
+  for (const answer of bothWays?.answers ?? [])
+    for (const bar of slack) {
+      const squeezed = -(answer.forces.get(bar) ?? 0);
+      if (squeezed > 0) found.set(bar, squeezed);
+    }
+  return found;
 }

@@ -90,6 +90,8 @@ export interface ForceState extends CombinationState {
   readonly moments: ReadonlyMap<BarId, number>;
   readonly elongations: ReadonlyMap<BarId, number>;
   readonly slack: ReadonlySet<BarId>;
+  /** Compression that each slack bar would take if it did not bow out of the way: an analysis with all bars working both ways. Only strength. */
+  readonly attracted: ReadonlyMap<BarId, number>;
   readonly displacements: ReadonlyMap<string, Vec3>;
   /** What supports push with, N. */
   readonly reactions: ReadonlyMap<string, Vec3>;

@@ -39,22 +39,24 @@ export function partEquilibrium(
   { part, rest }: PartStiffness,
   loads: PartLoads,
   start: Float64Array | null,
+  bars: 'as counted on' | 'all both ways' = 'as counted on',
 ): PartAnswer | NoWay {
   const load = new Float64Array(3 * part.nodes.length + part.turns.length);
   part.nodes.forEach((id, k) => {
     const force = loads.nodes.get(id);
     if (force) load.set(force, 3 * k);
   });
-  const bars = part.pieces.map(({ bar, axial }): AxialBar => {
+  const working = part.pieces.map(({ bar, axial }): AxialBar => {
     const short = loads.shortened.get(bar);
-    return short === undefined ? axial : { ...axial, preset: short };
+    const own = bars === 'as counted on' ? axial : { ...axial, tensionOnly: false };
+    return short === undefined ? own : { ...own, preset: short };
   });
   const found = tensionOnlyEquilibrium(
-    { nodes: part.nodes.length, turns: part.turns, held: part.fixed, bars, rest, load },
+    { nodes: part.nodes.length, turns: part.turns, held: part.fixed, bars: working, rest, load },
     start,
   );
-  if (found.kind === 'no way to carry') return noWay(part, bars, found.motion);
-  return answerOf(part, bars, found.displacement, found.forces, found.residual, load, found.slack);
+  if (found.kind === 'no way to carry') return noWay(part, working, found.motion);
+  return answerOf(part, working, found.displacement, found.forces, found.residual, load, found.slack);
 }
 
 function answerOf(

@@ -37,6 +37,31 @@ export interface Settings {
   readonly sagRatio: number | null;
   /** Unbraced lengths between set-out points, or between the centres of the end connections. */
   readonly lengthBasis: 'set-out' | 'connections';
+  /** What the user chooses about resistances; what is left out goes by the practice. */
+  readonly resistance?: ResistanceSettings;
+  /** Grades of the user's own: yield stress and tensile strength, N/mm². */
+  readonly ownGrades?: readonly OwnGrade[];
+}
+
+export interface ResistanceSettings {
+  /** AISC 360: load and resistance factors, or allowable strength. */
+  readonly method?: 'LRFD' | 'ASD';
+  /** EN 1993. */
+  readonly gammaM0?: number;
+  readonly gammaM1?: number;
+  readonly gammaM2?: number;
+  /** EN 1993: block tearing of an angle held by one leg. */
+  readonly blockTearing?: 'off the middle' | 'through the middle';
+  /** Holes punched full size. */
+  readonly punchedHoles?: boolean;
+  /** IS 800: what the gusset gives the end of a strut. */
+  readonly gussetFixity?: 'fixed' | 'hinged';
+}
+
+export interface OwnGrade {
+  readonly grade: string;
+  readonly fy: number;
+  readonly fu: number;
 }
 
 /** A bay takes its place by the origin of its own axes and a turn about the upright. */

@@ -176,6 +176,7 @@ const ownAngle = z.strictObject({
   toeRadius: millimetres(0, 200),
 });
 
+const partialFactor = z.number().min(0.5).max(3);
 const settings = z.strictObject({
   practice: z.enum(['sans10162', 'csaS16', 'aisc360', 'en1993', 'as4100', 'is800']),
   memberClass: z.string().max(60).nullable(),
@@ -184,6 +185,27 @@ const settings = z.strictObject({
   units: z.enum(['metric', 'us']),
   sagRatio: z.number().min(20).max(5_000).nullable(),
   lengthBasis: z.enum(['set-out', 'connections']),
+  resistance: z
+    .strictObject({
+      method: z.enum(['LRFD', 'ASD']).optional(),
+      gammaM0: partialFactor.optional(),
+      gammaM1: partialFactor.optional(),
+      gammaM2: partialFactor.optional(),
+      blockTearing: z.enum(['off the middle', 'through the middle']).optional(),
+      punchedHoles: z.boolean().optional(),
+      gussetFixity: z.enum(['fixed', 'hinged']).optional(),
+    })
+    .optional(),
+  ownGrades: z
+    .array(
+      z.strictObject({
+        grade: said(60),
+        fy: z.number().min(50).max(2_000),
+        fu: z.number().min(50).max(3_000),
+      }),
+    )
+    .max(100)
+    .optional(),
 });
 
 /** "W1/t1.rise", "R1/a.L2". */
