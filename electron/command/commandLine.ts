@@ -4,6 +4,7 @@ import { addAssessCommand } from './assessCommand.ts';
 import { addBowCommand } from './bowCommand.ts';
 import { endingOn } from './ending.ts';
 import { BAD_INPUT, type ExitCode, FINE } from './exitCode.ts';
+import { addForcesCommand } from './forcesCommand.ts';
 import { addNewCommand } from './newCommand.ts';
 import { addPushCommand } from './pushCommand.ts';
 import { addReportCommand } from './reportCommand.ts';
@@ -59,6 +60,7 @@ export async function runCommandLine(words: readonly string[], where: Terminal):
   addReportCommand(program, ending);
   addBowCommand(program, ending);
   addPushCommand(program, ending);
+  addForcesCommand(program, ending);
   try {
     await program.parseAsync(words, { from: 'user' });
     return ending.code();
