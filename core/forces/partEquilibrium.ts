@@ -1,6 +1,6 @@
 /** Equilibrium of one part of the framing under given loads. */
 import { add, dot, scale, subtract, type Vec3 } from '../geometry/vector.ts';
-import type { BarId, Layout } from '../layout/model.ts';
+import type { BarId } from '../layout/model.ts';
 import { type FramingPart, HELD_BY_THE_BUILDING, type Piece, TURN_ARM } from './framingPart.ts';
 import type { AxialBar, NoWay } from './model.ts';
 import { tensionOnlyEquilibrium } from './tensionOnly.ts';
@@ -204,6 +204,3 @@ function noWay(part: FramingPart, bars: readonly AxialBar[], motion: Float64Arra
     slackened: [...new Set(slackened)],
   };
 }
-
-/** Labels of the nodes that move, for words. */
-export const labelOf = (layout: Layout, node: string): string => layout.nodes.get(node)?.label ?? node;

@@ -1,7 +1,6 @@
-const normalHole = (_p: string, d: number): number => d + 2;
-
 import type { AngleBar, Bar } from '../layout/model.ts';
 import type { PracticeId } from '../project/model.ts';
+import { normalHole } from '../resistance/holes.ts';
 
 /** N/mm³. */
 const WEIGHT = 77e-6;

@@ -242,7 +242,21 @@ export interface EndConnection {
   /** From the set-out point to the nearest bolt; of a welded end, to the end of the bar. */
   readonly setBack: number;
   readonly weldLength: number;
+  /** Rows of bolts along the bar, 1 unless said; the second stands `rowSpacing` farther from the heel. */
+  readonly rows?: 1 | 2;
+  readonly rowSpacing?: number;
+  /** The second row stands half a pitch farther on. */
+  readonly staggered?: boolean;
+  /** "8.8" unless said. */
+  readonly boltGrade?: BoltGrade;
+  /** Threads lie in the plane of shear; they do unless said. */
+  readonly threadsInShear?: boolean;
+  /** Leg of the fillet weld, mm; 6 unless said. */
+  readonly weldSize?: number;
 }
+
+export const BOLT_GRADES = ['4.6', '8.8', '10.9', 'A325', 'A490'] as const;
+export type BoltGrade = (typeof BOLT_GRADES)[number];
 
 /** What differs from the bay's diagonals for one bar. */
 export interface BarMark {

@@ -1,6 +1,6 @@
 /** What a project file may hold. Types stand in `model.ts`; this is the gate that files pass through. */
 import { z } from 'zod';
-import { PROJECT_FORMAT, PROJECT_VERSION, type Project } from './model.ts';
+import { BOLT_GRADES, PROJECT_FORMAT, PROJECT_VERSION, type Project } from './model.ts';
 
 const millimetres = (least: number, most: number) => z.number().min(least).max(most);
 /** Members of a braced bay are between a hand's breadth and a stadium long. */
@@ -111,6 +111,12 @@ const ends = z.strictObject({
   legs: z.enum(['one', 'both']),
   setBack: millimetres(0, 20_000),
   weldLength: millimetres(0, 5_000),
+  rows: z.union([z.literal(1), z.literal(2)]).optional(),
+  rowSpacing: millimetres(10, 300).optional(),
+  staggered: z.boolean().optional(),
+  boltGrade: z.enum(BOLT_GRADES).optional(),
+  threadsInShear: z.boolean().optional(),
+  weldSize: millimetres(2, 30).optional(),
 });
 
 const diagonals = z.strictObject({
