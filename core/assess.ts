@@ -5,6 +5,8 @@ import { type BowingMemory, circumstances } from './bowing/memory.ts';
 import type { NamedMechanism } from './bowing/model.ts';
 import type { Catalogues } from './catalogue/model.ts';
 import { stockOf } from './catalogue/stock.ts';
+import { barChecks } from './checks/barChecks.ts';
+import type { CheckInput } from './checks/input.ts';
 import { governingSentence } from './documents/governingSentence.ts';
 import { scheduleRows } from './documents/schedule.ts';
 import { findingsOf } from './findings/findings.ts';
@@ -46,10 +48,13 @@ export function assess(
     depth === 'all levels'
       ? withBowing(project, practice, layout, context, byMarks, forces, memory)
       : { judged: byMarks, movable: new Map<string, readonly NamedMechanism[]>() };
-  const findings = findingsOf({ project, practice, layout, diagonals: judged, movable });
+  const checked = withChecks({ project, practice, forces }, judged, depth);
+  const findings = findingsOf({ project, practice, layout, diagonals: checked, forces, movable });
   const findingIds = idsByBar(findings);
   const diagonals = new Map(
-    [...judged].map(([id, each]) => [id, assessed(each, layout, project, findingIds.get(id) ?? [])] as const),
+    [...checked].map(
+      ([id, each]) => [id, assessed(each, layout, project, findingIds.get(id) ?? [])] as const,
+    ),
   );
   return {
     project,
@@ -80,6 +85,16 @@ function judgedDiagonals(
       if (bar) addJudged(judged, bar, project, practice, context);
     }
   return judged;
+}
+
+/** Resistances, where all levels are asked for: compression rests on the critical loads. */
+function withChecks(
+  input: CheckInput,
+  judged: ReadonlyMap<BarId, Judged>,
+  depth: AssessmentDepth,
+): ReadonlyMap<BarId, Judged> {
+  if (depth === 'by the marks') return judged;
+  return new Map([...judged].map(([id, each]) => [id, { ...each, checks: barChecks(input, each) }]));
 }
 
 /** Levels 2 and 3, bay by bay. */
@@ -150,6 +165,7 @@ function addJudged(
         ? verdict('inService', inServiceSlenderness(angle.stock.properties, restraint))
         : null,
     bowing: null,
+    checks: null,
   });
 }
 
@@ -169,6 +185,7 @@ function assessed(
     handling,
     inService,
     bowing: judged.bowing,
+    checks: judged.checks,
     nearness,
     status: nearness === null ? 'unknown' : nearness > 1 ? 'over' : nearness >= NEAR ? 'near' : 'within',
     reason: restraint

@@ -1,4 +1,5 @@
 import type { Bowing } from './bowing/model.ts';
+import type { BarChecks } from './checks/model.ts';
 import type { ScheduleRow } from './documents/model.ts';
 import type { Finding, Severity } from './findings/model.ts';
 import type { Forces } from './forces/model.ts';
@@ -33,6 +34,8 @@ export interface DiagonalAssessment {
   readonly inService: Verdict | null;
   /** By stiffness and by critical load; null where not asked for or not assessed. */
   readonly bowing: Bowing | null;
+  /** Resistances against what acts; null where not asked for. */
+  readonly checks: BarChecks | null;
   /** 0…: worst asked slenderness over limit. */
   readonly nearness: number | null;
   readonly status: 'over' | 'near' | 'within' | 'unknown';

@@ -1,6 +1,6 @@
 import type { Assessment } from '../assessment.ts';
-import type { Drift, ForceState } from '../forces/model.ts';
-import { labelOf } from '../forces/partEquilibrium.ts';
+import type { Drift } from '../forces/model.ts';
+import { motionInWords } from '../forces/motionWords.ts';
 
 /** One combination as the command line writes it: N, mm; tension positive. Documented in README.md. */
 export interface ForceRow {
@@ -62,26 +62,4 @@ export function forceRows({ forces, layout }: Assessment): readonly ForceRow[] {
     })),
     residual: state.residual,
   }));
-}
-
-/** "left head of tier 1 moves right; D1 goes slack". */
-export function motionInWords(
-  { moving, slackened }: ForceState['noWay'][number],
-  layout: Assessment['layout'],
-): string {
-  const [first, ...others] = moving;
-  if (!first) return 'it moves';
-  const rest =
-    others.length > 0 ? ` with ${others.length} more ${others.length === 1 ? 'place' : 'places'}` : '';
-  const slack =
-    slackened.length > 0
-      ? `, and ${slackened.map((id) => layout.bars.get(id)?.mark ?? id).join(', ')} cannot push`
-      : '';
-  return `${labelOf(layout, first.node)} moves ${wayInWords(first.direction)}${rest}${slack}`;
-}
-
-function wayInWords([x, y, z]: readonly [number, number, number]): string {
-  const [a, b, c] = [Math.abs(x), Math.abs(y), Math.abs(z)];
-  if (c >= a && c >= b) return z > 0 ? 'up' : 'down';
-  return a >= b ? (x > 0 ? 'along X' : 'against X') : y > 0 ? 'along Y' : 'against Y';
 }

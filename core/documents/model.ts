@@ -42,6 +42,12 @@ export interface ScheduleRow {
   readonly limit: number;
   readonly handling: RowVerdict | null;
   readonly inService: RowVerdict | null;
+  /** Greatest pull and squeeze in the combinations for strength, N; null where nothing acts. */
+  readonly force: { readonly tension: number; readonly compression: number } | null;
+  /** Demand over resistance of the check that is used most; null where nothing acts or nothing is known. */
+  readonly utilisation: number | null;
+  /** "net rupture, end i, 13.2(a)(iii)"; null as above. */
+  readonly governingCheck: string | null;
   readonly overrides: readonly {
     readonly axis: Axis;
     readonly length: number | null;

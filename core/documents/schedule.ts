@@ -1,3 +1,4 @@
+import type { BarChecks, Check } from '../checks/model.ts';
 import type { Finding } from '../findings/model.ts';
 import type { AngleBar, Bar, BarId, BayLayout, Crossing, Layout } from '../layout/model.ts';
 import type { LimitInForce, Verdict } from '../practice/model.ts';
@@ -14,6 +15,7 @@ export interface ScheduledDiagonal {
   readonly handling: Verdict | null;
   readonly inService: Verdict | null;
   readonly reason: string;
+  readonly checks: BarChecks | null;
 }
 
 export interface ScheduleInput {
@@ -90,6 +92,15 @@ function rowOf(
     limit: diagonal.limit.limit,
     handling: rowVerdict(diagonal.handling),
     inService: rowVerdict(diagonal.inService),
+    force:
+      diagonal.checks && diagonal.checks.status !== 'no load'
+        ? {
+            tension: diagonal.checks.tension?.force ?? 0,
+            compression: diagonal.checks.compression?.force ?? 0,
+          }
+        : null,
+    utilisation: diagonal.checks?.governing?.utilisation ?? null,
+    governingCheck: checkWords(diagonal.checks?.governing ?? null),
     overrides: (angle.mark.overrides ?? []).map(({ axis, length, factor, reason }) => ({
       axis,
       length,
@@ -99,6 +110,13 @@ function rowOf(
     reason: diagonal.reason,
     findings: findings.map(({ id, kind, severity, title }) => ({ id, kind, severity, title })),
   };
+}
+
+/** Where something acts, what is used most: "net rupture, end i, 13.2(a)(iii)". */
+function checkWords(check: Check | null): string | null {
+  if (check === null || check.utilisation === null) return null;
+  const { kind, end, clause } = check.resistance;
+  return [kind, ...(end === null ? [] : [`end ${end}`]), clause].join(', ');
 }
 
 function byAxis(restraint: Restraint, figureOf: (lane: Lane) => number): Readonly<Record<Axis, number>> {

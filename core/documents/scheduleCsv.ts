@@ -1,5 +1,6 @@
 import type { UnitSystem } from '../project/model.ts';
 import { AXES } from '../section/model.ts';
+import { forceIn } from '../units/loads.ts';
 import { KG_PER_POUND, MM_PER_INCH } from '../units/unitSystem.ts';
 import { type CsvCell, csvText } from './csv.ts';
 import type { RowVerdict, ScheduleRow } from './model.ts';
@@ -30,6 +31,8 @@ function columnsFor(units: UnitSystem): readonly Column[] {
   const radius = (mm: number): number => (units === 'us' ? rounded(mm / MM_PER_INCH, 3) : rounded(mm, 2));
   const mass = (kg: number | null): number | null =>
     kg === null ? null : units === 'us' ? rounded(kg / KG_PER_POUND, 1) : rounded(kg, 2);
+  const forceUnit = units === 'us' ? 'kip' : 'kN';
+  const force = (N: number | null): number | null => (N === null ? null : rounded(forceIn(N, units), 2));
   const several = (lengths: readonly number[]): string => lengths.map((mm) => String(length(mm))).join('; ');
 
   return [
@@ -87,6 +90,10 @@ function columnsFor(units: UnitSystem): readonly Column[] {
     { head: 'limit', cell: (row) => rounded(row.limit, 1) },
     ...verdictColumns('in service', (row) => row.inService),
     ...verdictColumns('handling', (row) => row.handling),
+    { head: `pulled (${forceUnit})`, cell: (row) => force(row.force?.tension ?? null) },
+    { head: `squeezed (${forceUnit})`, cell: (row) => force(row.force?.compression ?? null) },
+    { head: 'used', cell: (row) => (row.utilisation === null ? null : rounded(row.utilisation, 3)) },
+    { head: 'governing check', cell: (row) => row.governingCheck },
     {
       head: 'set by hand',
       cell: (row) => row.overrides.map((override) => overrideWords(override, units)).join('; '),

@@ -1,8 +1,9 @@
 import type { UnitSystem } from '../project/model.ts';
 import { AXES } from '../section/model.ts';
 import { grouped } from '../units/figures.ts';
+import { showForce } from '../units/loads.ts';
 import { showSlenderness } from '../units/quantity.ts';
-import { KG_PER_POUND } from '../units/unitSystem.ts';
+import { KG_PER_POUND, unitNames } from '../units/unitSystem.ts';
 import type { RowVerdict, ScheduleRow } from './model.ts';
 import { oneLine } from './oneLine.ts';
 import { type TextColumn, textTable } from './textTable.ts';
@@ -15,9 +16,10 @@ const ABSENT = '–';
  */
 export function scheduleTable(rows: readonly ScheduleRow[], units: UnitSystem): string {
   if (rows.length === 0) return 'No diagonals.\n';
+  const loaded = rows.some((row) => row.force !== null);
   const table = textTable(
-    columnsFor(units),
-    rows.map((row) => cellsOf(row, units)),
+    [...columnsFor(units), ...(loaded ? loadColumns(units) : [])],
+    rows.map((row) => [...cellsOf(row, units), ...(loaded ? loadCells(row, units) : [])]),
   );
   const massTotal = rows.reduce((sum, row) => sum + (row.massTotal ?? 0), 0);
   const pieces = rows.reduce((sum, row) => sum + row.numberOff * Math.max(1, row.pieces.length), 0);
@@ -44,6 +46,26 @@ function columnsFor(units: UnitSystem): readonly TextColumn[] {
     right('limit'),
     left('in service'),
     left('handling'),
+  ];
+}
+
+function loadColumns(units: UnitSystem): readonly TextColumn[] {
+  const unit = unitNames(units).force;
+  return [
+    { head: `pulled ${unit}`, align: 'right' },
+    { head: `squeezed ${unit}`, align: 'right' },
+    { head: 'used', align: 'right' },
+    { head: 'by', align: 'left' },
+  ];
+}
+
+function loadCells(row: ScheduleRow, units: UnitSystem): readonly string[] {
+  const force = (N: number | undefined): string => (N ? showForce(N, units, 'bare') : ABSENT);
+  return [
+    force(row.force?.tension),
+    force(row.force?.compression),
+    row.utilisation === null ? ABSENT : row.utilisation.toFixed(2),
+    row.governingCheck ?? ABSENT,
   ];
 }
 

@@ -1,5 +1,7 @@
+import { actingFindings } from './acting.ts';
 import { barFindings } from './bars.ts';
 import { bowingFindings } from './bowing.ts';
+import { checkedFindings } from './checked.ts';
 import { crossingFindings } from './crossings.ts';
 import { holderFindings } from './holders.ts';
 import type { Finding, Severity } from './model.ts';
@@ -21,5 +23,7 @@ export function findingsOf(input: FindingInput): readonly Finding[] {
     ...holderFindings(subject),
     ...patternFindings(subject),
     ...bowingFindings(subject),
+    ...actingFindings(subject),
+    ...checkedFindings(subject),
   ].sort((a, b) => RANK[a.severity] - RANK[b.severity] || place(a) - place(b));
 }

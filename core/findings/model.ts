@@ -19,7 +19,18 @@ export type FindingKind =
   | 'rule unsafe here'
   | 'twist governs'
   | 'both diagonals squeezed'
-  | 'loses support when the partner goes slack';
+  | 'loses support when the partner goes slack'
+  | 'load on nothing'
+  | 'no way to carry a load'
+  | 'reversed load not carried'
+  | 'beam bends under the pull'
+  | 'squeezed with no partner'
+  | 'too stocky to go slack'
+  | 'pretension lost'
+  | 'moves far before it works'
+  | 'resistance exceeded'
+  | 'not checked'
+  | 'end detail too small';
 
 export type Severity = 'must fix' | 'look into' | 'note';
 

@@ -1,4 +1,6 @@
 import type { Bowing, NamedMechanism } from '../bowing/model.ts';
+import type { BarChecks } from '../checks/model.ts';
+import type { Forces } from '../forces/model.ts';
 import type { AngleBar, Bar, BarId, BayLayout, Layout } from '../layout/model.ts';
 import type { LimitInForce, Practice, Verdict } from '../practice/model.ts';
 import type { Project } from '../project/model.ts';
@@ -14,6 +16,8 @@ export interface Judged {
   readonly inService: Verdict | null;
   /** Levels 2 and 3; null where they were not asked for or the bar is not assessed. */
   readonly bowing: Bowing | null;
+  /** Resistances against what acts; null where they were not asked for. */
+  readonly checks: BarChecks | null;
 }
 
 /** What findings are made from. */
@@ -27,6 +31,8 @@ export interface FindingInput {
   readonly practice: Practice;
   readonly layout: Layout;
   readonly diagonals: ReadonlyMap<BarId, Judged>;
+  /** Null where nothing acts. */
+  readonly forces: Forces | null;
   /** Ways in which a bay can move without resistance, by bay. */
   readonly movable: ReadonlyMap<string, readonly NamedMechanism[]>;
 }

@@ -2,6 +2,8 @@
 import type { Assessment } from '../assessment.ts';
 import type { Catalogues } from '../catalogue/model.ts';
 import type { Finding } from '../findings/model.ts';
+import { takeAway } from './acting.ts';
+import { knownGrades, strongerEnds, usualDistances } from './ends.ts';
 import {
   boltToLines,
   hangFromLines,
@@ -75,6 +77,33 @@ export function proposalsFor(
     case 'rule unsafe here':
     case 'twist governs':
       return [...turnTheLeg(assessment, finding.bars), ...otherSections(assessment, finding, catalogues)];
+    case 'load on nothing':
+      return takeAway(assessment, finding);
+    case 'no way to carry a load':
+    case 'reversed load not carried':
+      return [
+        ...crossOpenPanels(assessment, finding),
+        ...changePattern(assessment, finding, 'crossed', 'Cross the panel'),
+        ...(finding.bars.length > 0 ? [countOnBoth(finding.bars)] : []),
+      ];
+    case 'beam bends under the pull':
+      return [...changePattern(assessment, finding, 'crossed', 'Cross the tier'), countOnBoth(finding.bars)];
+    case 'squeezed with no partner':
+      return [...changePattern(assessment, finding, 'crossed', 'Cross the panel'), countOnBoth(finding.bars)];
+    case 'too stocky to go slack':
+      return [countOnBoth(finding.bars)];
+    case 'resistance exceeded':
+      return [
+        ...strongerEnds(assessment, finding),
+        ...joinTheCrossings(assessment, finding.bars),
+        ...heavier(assessment, finding, catalogues),
+      ];
+    case 'not checked':
+      return knownGrades(assessment, finding);
+    case 'end detail too small':
+      return usualDistances(assessment, finding);
+    case 'pretension lost':
+    case 'moves far before it works':
     case 'both diagonals squeezed':
     case 'loses support when the partner goes slack':
     case 'steep or flat':

@@ -78,6 +78,7 @@ function figureOf(assessment: Assessment, finding: Finding): number | null {
   const figures = finding.bars.flatMap((bar) => {
     if (finding.kind === 'sag') return sagRatioOf(assessment, bar);
     const diagonal = assessment.diagonals.get(bar);
+    if (finding.kind === 'resistance exceeded') return diagonal?.checks?.governing?.utilisation ?? [];
     const verdict = finding.kind === 'too slender to handle' ? diagonal?.handling : diagonal?.inService;
     return verdict ? [verdict.slenderness] : [];
   });
@@ -96,6 +97,7 @@ function sagRatioOf(assessment: Assessment, id: BarId): readonly number[] {
 /** What the figure is held against. */
 function limitOf(after: Assessment, finding: Finding): number | null {
   if (finding.kind === 'sag') return after.project.settings.sagRatio;
+  if (finding.kind === 'resistance exceeded') return 1;
   return after.diagonals.get(finding.bars[0] ?? '')?.limit.limit ?? finding.limit;
 }
 
@@ -109,6 +111,7 @@ function heaviest(assessment: Assessment, bars: readonly BarId[]): number {
 /** By more than a half, which is what a reader sees: a smaller slenderness, a larger ratio of length to sag. */
 function improves(finding: Finding, { before, after }: RemedyEffect): boolean {
   if (before === null || after === null) return false;
+  if (finding.kind === 'resistance exceeded') return after < before - 0.005;
   return finding.kind === 'sag' ? after > before + 0.5 : after < before - 0.5;
 }
 

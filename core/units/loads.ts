@@ -18,6 +18,17 @@ export function newtonsPerForceUnit(units: UnitSystem): number {
   return units === 'us' ? N_PER_KIP : 1000;
 }
 
+/** N·mm as `22.5 kN·m` or `16.6 kip·ft`. */
+export function showMoment(
+  newtonMillimetres: number,
+  units: UnitSystem,
+  style: QuantityStyle = 'full',
+): string {
+  return units === 'us'
+    ? shown(newtonMillimetres / (N_PER_KIP * 12 * MM_PER_INCH), 'kip·ft', style)
+    : shown(newtonMillimetres / 1e6, 'kN·m', style);
+}
+
 /** N/mm as `62 200 N/mm` or `355 kip/in`. */
 export function showStiffness(
   newtonsPerMm: number,

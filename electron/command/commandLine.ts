@@ -2,6 +2,7 @@ import { Command, CommanderError } from 'commander';
 import { oneLine } from '../../core/documents/oneLine.ts';
 import { addAssessCommand } from './assessCommand.ts';
 import { addBowCommand } from './bowCommand.ts';
+import { addCheckCommand } from './checkCommand.ts';
 import { endingOn } from './ending.ts';
 import { BAD_INPUT, type ExitCode, FINE } from './exitCode.ts';
 import { addForcesCommand } from './forcesCommand.ts';
@@ -28,7 +29,9 @@ Examples
   tautline shortlist --length 4000 --crossing joined
   tautline report shed.json -o shed.html
   tautline push shed.json --bar D1 --at 2500
-  tautline bow cases.json`;
+  tautline bow cases.json
+  tautline forces shed.json --combination C2
+  tautline check shed.json`;
 
 /**
  * Runs one command.
@@ -61,6 +64,7 @@ export async function runCommandLine(words: readonly string[], where: Terminal):
   addBowCommand(program, ending);
   addPushCommand(program, ending);
   addForcesCommand(program, ending);
+  addCheckCommand(program, ending);
   try {
     await program.parseAsync(words, { from: 'user' });
     return ending.code();

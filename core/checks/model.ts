@@ -1,0 +1,38 @@
+/** Demand against resistance, bar by bar. N. */
+import type { BarId } from '../layout/model.ts';
+import type { Resistance, Steel } from '../resistance/model.ts';
+
+/** The greatest force of one sign, and where it comes from. */
+export interface Demand {
+  /** N, above 0. */
+  readonly force: number;
+  /** Id and name of the combination's state. */
+  readonly state: string;
+  readonly name: string;
+}
+
+export interface Check {
+  readonly resistance: Resistance;
+  /** Null while nothing acts: the resistance stands alone. */
+  readonly demand: Demand | null;
+  /** Demand over resistance; null where one of them is missing. */
+  readonly utilisation: number | null;
+}
+
+export interface BarChecks {
+  readonly bar: BarId;
+  readonly steel: Steel | null;
+  readonly tension: Demand | null;
+  readonly compression: Demand | null;
+  /** States in which the bar hangs slack. */
+  readonly slackIn: readonly string[];
+  /** Every check, in order of working: the bar, end i, end j, compression. */
+  readonly checks: readonly Check[];
+  /** The check that is used most; where nothing acts, the one with the least resistance in tension. */
+  readonly governing: Check | null;
+  /** What compression is judged by, if the bar is counted on in it or is squeezed. */
+  readonly compressionBy: Resistance | null;
+  readonly status: 'over' | 'near' | 'within' | 'unknown' | 'no load';
+  /** Why nothing could be checked; null otherwise. */
+  readonly unknown: string | null;
+}

@@ -1,0 +1,91 @@
+/** What resistances are asked, put together from a bar as it is laid out. */
+import type { StockAngle } from '../catalogue/model.ts';
+import type { ResistanceSettings } from '../project/model.ts';
+import type {
+  CompressionQuestion,
+  ResistanceOptions,
+  ResistingSection,
+  Steel,
+  TensionQuestion,
+} from '../resistance/model.ts';
+import { resistingEnd } from '../resistance/resistingEnd.ts';
+import type { Restraint } from '../restraint/model.ts';
+import type { CheckedBar, CheckInput } from './input.ts';
+
+export function tensionQuestion(
+  { project, practice }: CheckInput,
+  { angle }: CheckedBar,
+  stock: StockAngle,
+  steel: Steel,
+): TensionQuestion {
+  const section = resistingSection(stock, angle.spec.legInPlane);
+  const end = (name: 'i' | 'j') =>
+    resistingEnd(name, angle.ends[name], {
+      practice: practice.id,
+      leg: section.connectedLeg,
+      gauge: angle.placement.gauge,
+      gusset: angle.spec.gusset,
+    });
+  return {
+    practice: practice.id,
+    section,
+    steel,
+    ends: [end('i'), end('j')],
+    options: resistanceOptions(project.settings.resistance ?? {}),
+  };
+}
+
+export function resistingSection(stock: StockAngle, legInPlane: 'longer' | 'shorter'): ResistingSection {
+  const { outline, properties } = stock;
+  const longer = legInPlane === 'longer';
+  return {
+    designation: stock.designation,
+    shape: 'angle',
+    properties,
+    connectedLeg: longer ? outline.longLeg : outline.shortLeg,
+    outstandingLeg: longer ? outline.shortLeg : outline.longLeg,
+    thickness: outline.thickness,
+    rootRadius: outline.rootRadius,
+    // The outer face of the leg on the gusset is the heel's.
+    offCentroid: longer ? properties.centroidX : properties.centroidY,
+  };
+}
+
+export function resistanceOptions(chosen: ResistanceSettings): ResistanceOptions {
+  return {
+    method: chosen.method ?? 'LRFD',
+    partialFactors: {
+      gammaM0: chosen.gammaM0 ?? null,
+      gammaM1: chosen.gammaM1 ?? null,
+      gammaM2: chosen.gammaM2 ?? null,
+    },
+    blockTearing: chosen.blockTearing ?? 'off the middle',
+    punchedHoles: chosen.punchedHoles ?? false,
+    gussetFixity: chosen.gussetFixity ?? 'hinged',
+  };
+}
+
+export function compressionQuestion(
+  question: TensionQuestion,
+  { bar, bowing }: CheckedBar,
+  restraint: Restraint,
+): CompressionQuestion {
+  const { x, y, u, v } = restraint.lanes;
+  const inner = restraint.stations.slice(1, -1);
+  return {
+    ...question,
+    length: bar.length,
+    unbraced: { x: x.unbraced, y: y.unbraced, u: u.unbraced, v: v.unbraced },
+    twistLength: longestBetween([
+      restraint.stations[0]?.at ?? 0,
+      ...inner.filter(({ twistHeld }) => twistHeld).map(({ at }) => at),
+      restraint.stations.at(-1)?.at ?? bar.length,
+    ]),
+    criticalLoad: bowing && bowing.unsupported === null && bowing.real.N > 0 ? bowing.real.N : null,
+    system: 'planar',
+    joinedBetween: inner.some(({ held }) => held.ways > 0),
+  };
+}
+
+const longestBetween = (places: readonly number[]): number =>
+  places.slice(1).reduce((most, at, k) => Math.max(most, at - (places[k] ?? 0)), 0);

@@ -1,0 +1,122 @@
+/** What the checks of resistance show. */
+import type { Check } from '../checks/model.ts';
+import { showForce } from '../units/loads.ts';
+import type { Finding } from './model.ts';
+import { type FindingSubject, grouped, isAre, type Judged, judgedIn, marksInWords } from './subject.ts';
+
+const blank = {
+  crossing: null,
+  breaksLimit: false,
+  value: null,
+  limit: null,
+  quantity: 'none',
+  path: null,
+} as const;
+
+export function checkedFindings(subject: FindingSubject): readonly Finding[] {
+  return subject.layout.bays.flatMap((bay) => {
+    const all = judgedIn(subject, bay);
+    return [...exceeded(subject, all), ...unchecked(subject, all), ...endDetails(all)];
+  });
+}
+
+/** Alike bars in one: the same section and the same check. */
+function exceeded(subject: FindingSubject, all: readonly Judged[]): readonly Finding[] {
+  const units = subject.project.settings.units;
+  const over = all.filter(({ checks }) => (checks?.governing?.utilisation ?? 0) > 1);
+  return grouped(
+    over,
+    ({ angle, checks }) => `${angle.spec.section} ${checks?.governing?.resistance.kind ?? ''}`,
+  ).flatMap((group): readonly Finding[] => {
+    const worst = group.reduce((most, each) => (used(each) > used(most) ? each : most));
+    const check = worst.checks?.governing;
+    if (!check?.demand || check.resistance.resistance === null) return [];
+    const { resistance, demand } = check;
+    return [
+      {
+        ...blank,
+        id: `resistance:${worst.bar.bay}:${group[0]?.bar.key ?? ''}:${resistance.kind}`,
+        kind: 'resistance exceeded',
+        severity: 'must fix',
+        breaksLimit: true,
+        bay: worst.bar.bay,
+        bars: group.map(({ bar }) => bar.id),
+        title: `${marksInWords(group)} ${isAre(group)} too weak: ${resistance.title.toLowerCase()} used ${(100 * used(worst)).toFixed(0)} %`,
+        detail: `${worst.bar.mark} carries ${showForce(demand.force, units)} in ${demand.name}; it resists ${showForce(resistance.resistance ?? 0, units)} by ${resistance.standard} ${resistance.clause} (${resistance.confidence})${resistance.end === null ? '' : `, at end ${resistance.end}`}.`,
+        value: used(worst),
+        limit: 1,
+        quantity: 'ratio',
+      },
+    ];
+  });
+}
+
+const used = ({ checks }: Judged): number => checks?.governing?.utilisation ?? 0;
+
+/** Loaded, and some check that it needs gives no figure. */
+function unchecked(subject: FindingSubject, all: readonly Judged[]): readonly Finding[] {
+  if (!subject.forces) return [];
+  const open = all.flatMap((judged) => {
+    const { checks } = judged;
+    if (!checks || !judged.angle.stock || !judged.restraint) return [];
+    if (checks.unknown !== null) return [{ judged, why: checks.unknown }];
+    if (checks.compression && (checks.compressionBy?.resistance ?? null) === null)
+      return [{ judged, why: whyNot(checks.checks, 'compression') }];
+    return [];
+  });
+  return grouped(open, ({ why }) => why).flatMap((group): readonly Finding[] => {
+    const [first] = group;
+    if (!first) return [];
+    const judged = group.map((each) => each.judged);
+    return [
+      {
+        ...blank,
+        id: `unchecked:${first.judged.bar.id}`,
+        kind: 'not checked',
+        severity: 'must fix',
+        bay: first.judged.bar.bay,
+        bars: judged.map(({ bar }) => bar.id),
+        title: `${marksInWords(judged)} ${isAre(judged)} not checked for what ${judged.length > 1 ? 'they carry' : 'it carries'}`,
+        detail: first.why,
+      },
+    ];
+  });
+}
+
+function whyNot(checks: readonly Check[], against: 'compression'): string {
+  const failed = checks
+    .filter(({ resistance }) => resistance.against === against)
+    .flatMap(({ resistance }) => resistance.conditions.filter(({ met }) => !met))
+    .map(({ says, found }) => (found === null ? says : `${says} (${found})`));
+  return failed.length > 0
+    ? `No rule for compression applies here: ${[...new Set(failed)].join('; ')}.`
+    : 'No rule for compression applies here.';
+}
+
+/** Edges, ends and pitches below the least, and single bolts. */
+function endDetails(all: readonly Judged[]): readonly Finding[] {
+  const broken = all.flatMap((judged) => {
+    const says = (judged.checks?.checks ?? [])
+      .filter(({ resistance }) => resistance.kind === 'bolt bearing' || resistance.kind === 'weld')
+      .flatMap(({ resistance }) => resistance.conditions.filter(({ met }) => !met))
+      .map(({ says: what, found }) => (found === null ? what : `${what}: ${found}`));
+    return says.length > 0 ? [{ judged, says: [...new Set(says)].join('; ') }] : [];
+  });
+  return grouped(broken, ({ says }) => says).flatMap((group): readonly Finding[] => {
+    const [first] = group;
+    if (!first) return [];
+    const judged = group.map((each) => each.judged);
+    return [
+      {
+        ...blank,
+        id: `end-detail:${first.judged.bar.id}`,
+        kind: 'end detail too small',
+        severity: 'look into',
+        bay: first.judged.bar.bay,
+        bars: judged.map(({ bar }) => bar.id),
+        title: `The ends of ${marksInWords(judged)} break a least distance`,
+        detail: `${first.says}.`,
+      },
+    ];
+  });
+}

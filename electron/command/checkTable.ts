@@ -1,0 +1,46 @@
+import type { CheckLine, CheckRow } from '../../core/documents/checkRows.ts';
+import { textTable } from '../../core/documents/textTable.ts';
+import type { UnitSystem } from '../../core/project/model.ts';
+import { showForce } from '../../core/units/loads.ts';
+
+/** Every check of every diagonal, the one used most marked; then what could not be checked, and what comes from memory. */
+export function checkTable(rows: readonly CheckRow[], units: UnitSystem): string {
+  if (rows.length === 0) return 'No diagonals.\n';
+  const table = textTable(
+    [
+      { head: 'Bar', align: 'left' },
+      { head: 'Section', align: 'left' },
+      { head: 'Check', align: 'left' },
+      { head: 'Clause', align: 'left' },
+      { head: 'Acts', align: 'right' },
+      { head: 'Resists', align: 'right' },
+      { head: 'Used', align: 'right' },
+      { head: '', align: 'left' },
+    ],
+    rows.flatMap((row) => row.checks.map((check) => lineOf(row, check, units))),
+  );
+  const unknown = rows
+    .filter((row) => row.unknown !== null)
+    .map((row) => `${row.mark}: ${row.unknown ?? ''}`);
+  return `${[table, ...unknown, SOURCES].join('\n')}\n`;
+}
+
+const SOURCES =
+  'Clauses tagged “verify” are from memory: check them against the standard in hand before use. All figures are an aid, not a proof.';
+
+function lineOf(row: CheckRow, check: CheckLine, units: UnitSystem): readonly string[] {
+  const governs = row.governing?.kind === check.kind && row.governing.end === check.end;
+  const failed = check.conditions.filter(({ met }) => !met).map(({ says }) => says);
+  return [
+    row.mark,
+    row.section,
+    check.end === null ? check.title : `${check.title}, end ${check.end}`,
+    `${check.standard} ${check.clause}${check.confidence === 'from memory, verify' ? ' (verify)' : ''}`,
+    check.demand === null ? '–' : showForce(check.demand.force, units),
+    check.resistance === null ? '–' : showForce(check.resistance, units),
+    check.utilisation === null ? '–' : check.utilisation.toFixed(2),
+    [...(governs ? ['governs'] : []), ...(failed.length > 0 ? [`not met: ${failed.join('; ')}`] : [])].join(
+      '; ',
+    ),
+  ];
+}
