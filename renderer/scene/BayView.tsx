@@ -17,6 +17,7 @@ import { viewKey } from './pointer/keys.ts';
 import { usePointer } from './pointer/usePointer.ts';
 import './scene.css';
 import './bowing/motion.css';
+import './forces/forcesScene.css';
 import { useSize } from './useSize.ts';
 import type { SheetView } from './view/sheetView.ts';
 import { subjectOf } from './view/subject.ts';
@@ -42,7 +43,9 @@ export function BayView(props: BayViewProps): JSX.Element {
     onHoverBar,
     onViewChange,
   } = props;
-  const { selectedCrossing, units, bow, shape, push, onPush } = props;
+  const { selectedCrossing, units, shape, push, onPush, forces } = props;
+  // Forces take the place of what bows.
+  const bow = props.bow && forces === null;
   const { layout } = assessment;
   const bay = useMemo(() => bayOf(layout, bayId), [layout, bayId]);
   const [drawnBy, setDrawnBy] = useState<'webgl' | 'flat, none' | 'flat, lost'>(() =>
@@ -79,8 +82,8 @@ export function BayView(props: BayViewProps): JSX.Element {
   const whole = useMemo(() => subjectOf(layout, null), [layout]);
   const subject = useMemo(() => (bay === null ? null : subjectOf(layout, bay)), [layout, bay]);
   const content = useMemo(
-    () => overlayContent({ assessment, bay: bayId, selectedBar, selectedCrossing, units, bow }),
-    [assessment, bayId, selectedBar, selectedCrossing, units, bow],
+    () => overlayContent({ assessment, bay: bayId, selectedBar, selectedCrossing, units, bow, forces }),
+    [assessment, bayId, selectedBar, selectedCrossing, units, bow, forces],
   );
 
   const chosen = content.selected;
@@ -182,6 +185,7 @@ export function BayView(props: BayViewProps): JSX.Element {
           element={legendElement}
           crossings={content.crossings}
           scale={scale}
+          forces={forces !== null && forces.states.length > 0}
           motion={moves.motion === null ? null : { kind: moves.motion.kind, times: push?.times ?? 1 }}
         />
       </div>

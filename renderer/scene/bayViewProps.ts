@@ -1,11 +1,13 @@
 import type { ReactNode } from 'react';
 import type { Assessment } from '../../core/assessment.ts';
 import type { BarMovement } from '../../core/frame/pushTest.ts';
+import type { Vec3 } from '../../core/geometry/vector.ts';
 import type { BarId, CrossingId } from '../../core/layout/model.ts';
 import type { UnitSystem } from '../../core/project/model.ts';
 import type { TrailStep } from '../../core/restraint/model.ts';
 import type { ModeInSpace } from '../../core/study/model.ts';
 import type { PushChange, PushShown } from './bowing/pushShown.ts';
+import type { ForcesShown } from './forces/forcesShown.ts';
 import type { AngleScale } from './geometry/steelPart.ts';
 import type { ViewName } from './view/namedView.ts';
 
@@ -37,12 +39,16 @@ export interface BayViewProps {
   readonly figure: ReactNode;
   /** Joins that a change on trial takes away. */
   readonly removed: readonly CrossingId[];
+  /** Forces, drawn in place of what bows; null: not wanted. */
+  readonly forces: ForcesShown | null;
   /** A hold's way to its support, to light up. */
   readonly trail: readonly TrailStep[] | null;
   readonly onSelectBar: (bar: BarId | null) => void;
   readonly onSelectCrossing: (crossing: CrossingId | null) => void;
   readonly onSelectEnd: (bar: BarId, end: 'i' | 'j') => void;
   readonly onPush: (change: PushChange) => void;
+  /** A force put on a node, kN; all noughts take it away. `place` as a load names it. */
+  readonly onForce: (place: string, force: Vec3) => void;
   readonly onHoverBar: (bar: BarId | null) => void;
   /** The user has turned the view away from the named one. */
   readonly onViewChange?: (view: 'free') => void;

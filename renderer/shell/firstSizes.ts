@@ -19,6 +19,7 @@ export function firstSizes(width: number, height: number): FirstSizes {
       shortlist: share(0.36, 380),
       findings: share(0.34, 380),
       bowing: share(0.36, 380),
+      forces: share(0.3, 320),
     },
   };
 }

@@ -23,6 +23,7 @@ import {
   withRenamedBay,
 } from './selection.ts';
 import { presentProject, shownAssessment } from './shown.ts';
+import { steppedState } from './shownForces.ts';
 import { type Trial, tryingOf } from './trying.ts';
 import { type DockTab, NO_RESULTS, type ViewName, type ViewState, type WindowState } from './windowState.ts';
 
@@ -47,7 +48,17 @@ export interface WindowActions {
   look(view: ViewName): void;
   /** The user has turned the drawing away from the named view. */
   turnView(): void;
-  setView(change: Partial<Pick<ViewState, 'scale' | 'bow' | 'shape' | 'playing' | 'trail'>>): void;
+  setView(
+    change: Partial<Pick<ViewState, 'scale' | 'bow' | 'shape' | 'playing' | 'trail' | 'loadCase'>>,
+  ): void;
+  /** Draws the chosen bar bowed, or straight; bowed, in the place of forces. */
+  setBow(bow: boolean): void;
+  /** Draws forces, or what bows. */
+  showForces(forces: boolean): void;
+  /** Shows one combination, and forces with it; null: the greatest of all. */
+  chooseForceState(state: string | null): void;
+  /** The next combination, or the one before; beyond either end the greatest of all. */
+  stepForceState(step: 1 | -1): void;
   /** Turns pushing on or off; either way nothing pushes any more. */
   setPushMode(push: boolean): void;
   /** Pushes the chosen bar otherwise. */
@@ -131,7 +142,20 @@ export function windowActions(
       setState(({ view }) => ({ view: { ...view, name, turned: false, nonce: view.nonce + 1 } })),
     turnView: () => setState(({ view }) => (view.turned ? {} : { view: { ...view, turned: true } })),
     setView: (change) => setState(({ view }) => ({ view: { ...view, ...change } })),
-    setPushMode: (push) => setState(({ view }) => ({ view: { ...view, push }, pushing: NO_PUSH })),
+    setBow: (bow) => setState(({ view }) => ({ view: { ...view, bow, forces: bow ? false : view.forces } })),
+    showForces: (forces) =>
+      setState(({ view }) => ({ view: { ...view, forces, push: forces ? false : view.push } })),
+    chooseForceState: (forceState) =>
+      setState(({ view }) => ({ view: { ...view, forces: true, push: false, forceState } })),
+    stepForceState: (step) =>
+      setState((state) => ({
+        view: { ...state.view, forces: true, push: false, forceState: steppedState(state, step) },
+      })),
+    setPushMode: (push) =>
+      setState(({ view }) => ({
+        view: { ...view, push, forces: push ? false : view.forces },
+        pushing: NO_PUSH,
+      })),
     push: (change) =>
       setState(({ pushing, selection }) => {
         const before = pushing.bar === selection.bar ? pushing : NO_PUSH;
@@ -153,7 +177,7 @@ export function windowActions(
         hovered: null,
         pushing: NO_PUSH,
         closer: NOTHING_CLOSER,
-        view: { ...view, name: 'axonometric', turned: false, nonce: view.nonce + 1 },
+        view: { ...view, name: 'axonometric', turned: false, nonce: view.nonce + 1, forceState: null },
       })),
     markSaved: (project, name, token) => setState({ file: { name, token, saved: project } }),
   };

@@ -53,11 +53,17 @@ export interface ViewState {
   /** Whether the pointer and the arrow keys push the chosen bar. */
   readonly push: boolean;
   readonly trail: boolean;
+  /** Whether forces are drawn in place of what bows. */
+  readonly forces: boolean;
+  /** The combination that is shown, by the id of its state; null: the greatest of each bar in all of them. */
+  readonly forceState: string | null;
+  /** The case that forces placed in the drawing go into; null: the first that is there. */
+  readonly loadCase: string | null;
 }
 
 export type BowedShape = 'marks' | 'bar' | 'bay';
 
-export type DockTab = 'schedule' | 'shortlist' | 'findings' | 'bowing';
+export type DockTab = 'schedule' | 'shortlist' | 'findings' | 'bowing' | 'forces';
 
 export interface WindowState {
   readonly started: boolean;
@@ -98,6 +104,9 @@ export function firstState(theme: ThemeSetting): WindowState {
       playing: false,
       push: false,
       trail: true,
+      forces: false,
+      forceState: null,
+      loadCase: null,
     },
     pushing: NO_PUSH,
     closer: NOTHING_CLOSER,

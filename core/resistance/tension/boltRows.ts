@@ -46,6 +46,7 @@ export function netArea(question: TensionQuestion, end: ResistingEnd, working: W
     deductedWidth(practice, end.hole, options.punchedHoles),
     'length',
   );
+  working.given('thickness', 't', section.thickness, 'length');
   const taken = deductionOf(holesOf(end, section, width), section.thickness);
   return working.step(
     'net area',

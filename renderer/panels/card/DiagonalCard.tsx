@@ -6,6 +6,7 @@ import { beforeAssessment, shownProject } from '../../store/shown.ts';
 import { CardReadings } from '../bowing/CardReadings.tsx';
 import { BarMarks } from './BarMarks.tsx';
 import { CardHead } from './CardHead.tsx';
+import { ForcePart } from './forces/ForcePart.tsx';
 import { HoldsTable } from './HoldsTable.tsx';
 import { Lanes } from './Lanes.tsx';
 import { Overrides } from './Overrides.tsx';
@@ -65,6 +66,15 @@ export function DiagonalCard({ bar, angle, assessment }: DiagonalCardProps): JSX
       <div className="card-after">
         {diagonal !== undefined && (
           <CardReadings bar={bar} diagonal={diagonal} assessment={assessment} units={units} />
+        )}
+        {diagonal?.checks != null && (
+          <ForcePart
+            key={`forces ${bar.id}`}
+            bar={bar}
+            checks={diagonal.checks}
+            assessment={assessment}
+            units={units}
+          />
         )}
         <RemedyList bar={bar} assessment={assessment} />
         {/* New keys for each bar, so that no field keeps what was typed for another. */}

@@ -2,11 +2,14 @@ import { Tabs } from 'radix-ui';
 import { type JSX, useState } from 'react';
 import { useActions, useWindow } from '../../shell/services.tsx';
 import { shownAssessment } from '../../store/shown.ts';
+import { shownForces } from '../../store/shownForces.ts';
 import type { DockTab } from '../../store/windowState.ts';
 import { BowingBar } from '../bowing/BowingBar.tsx';
 import { BowingPanel } from '../bowing/BowingPanel.tsx';
 import { FindingsBar } from '../findings/FindingsBar.tsx';
 import { FindingsPanel } from '../findings/FindingsPanel.tsx';
+import { ForcesBar, type ForcesView } from '../forces/ForcesBar.tsx';
+import { ForcesPanel } from '../forces/ForcesPanel.tsx';
 import { ScheduleBar } from '../schedule/ScheduleBar.tsx';
 import { SchedulePanel } from '../schedule/SchedulePanel.tsx';
 import { FIRST_SCHEDULE_VIEW } from '../schedule/scheduleView.ts';
@@ -31,6 +34,8 @@ export function Dock(): JSX.Element {
   const [shortlist, setShortlist] = useState(FIRST_SHORTLIST_VIEW);
   const answer = useShortlist(tab === 'shortlist', shortlist);
   const [onlyBay, setOnlyBay] = useState(false);
+  const [forcesView, setForcesView] = useState<ForcesView>('combinations');
+  const states = useWindow((state) => shownForces(state)?.states.length ?? 0);
   return (
     <Tabs.Root
       className="dock"
@@ -57,11 +62,15 @@ export function Dock(): JSX.Element {
           <Tabs.Trigger value="bowing" className="dock-tab">
             Bowing <small>{mark}</small>
           </Tabs.Trigger>
+          <Tabs.Trigger value="forces" className="dock-tab">
+            Forces <small>{states === 0 ? '' : states}</small>
+          </Tabs.Trigger>
         </Tabs.List>
         <div className="dock-tools">
           {tab === 'schedule' && <ScheduleBar view={schedule} onChange={setSchedule} />}
           {tab === 'findings' && <FindingsBar onlyBay={onlyBay} onOnlyBay={setOnlyBay} />}
           {tab === 'bowing' && <BowingBar />}
+          {tab === 'forces' && <ForcesBar view={forcesView} onChange={setForcesView} />}
           {tab === 'shortlist' && <ShortlistBar view={shortlist} answer={answer} onChange={setShortlist} />}
         </div>
       </div>
@@ -77,10 +86,13 @@ export function Dock(): JSX.Element {
       <Tabs.Content value="bowing" className="dock-content" tabIndex={-1}>
         <BowingPanel />
       </Tabs.Content>
+      <Tabs.Content value="forces" className="dock-content" tabIndex={-1}>
+        <ForcesPanel view={forcesView} onView={setForcesView} />
+      </Tabs.Content>
     </Tabs.Root>
   );
 }
 
 function isTab(value: string): value is DockTab {
-  return value === 'schedule' || value === 'shortlist' || value === 'findings' || value === 'bowing';
+  return ['schedule', 'shortlist', 'findings', 'bowing', 'forces'].includes(value);
 }

@@ -23,12 +23,15 @@ export function Legend({
   crossings,
   scale,
   motion,
+  forces,
   element,
 }: {
   readonly crossings: readonly Crossing[];
   readonly scale: AngleScale;
   /** What is drawn moved, and how many times its size; null: nothing computed is. */
   readonly motion: { readonly kind: DrawnMotion['kind']; readonly times: number } | null;
+  /** Whether forces are drawn. */
+  readonly forces: boolean;
   readonly element: RefObject<HTMLDivElement | null>;
 }) {
   const present = new Set<JoinShape>(crossings.map((one) => one.join?.kind ?? 'unmarked'));
@@ -42,6 +45,7 @@ export function Legend({
             : 'linear; a shape has no size of its own'}
         </p>
       )}
+      {forces && <ForcesKey />}
       {scale === 'doubled' && <p>angles drawn twice their size, set-out true</p>}
       {shown.length > 0 && (
         <ul>
@@ -66,4 +70,49 @@ function nameOf(shape: JoinShape): string {
     default:
       return JOIN_NAMES[shape satisfies JoinKind];
   }
+}
+
+/** What bands and arrows mean. */
+function ForcesKey() {
+  return (
+    <ul className="scene-forces-key">
+      <li>
+        <KeyPicture d="M1 2h28v8H1ZM8 3 5 6l3 3M22 3l3 3-3 3" fill="var(--sheet)" /> pulled apart
+      </li>
+      <li>
+        <KeyPicture d="M1 2h28v8H1ZM5 3l3 3-3 3M25 3l-3 3 3 3" fill="var(--dg2)" /> pushed together
+      </li>
+      <li>
+        <KeyPicture d="M1 3Q15 14 29 3" fill="none" dash /> slack
+      </li>
+      <li>
+        <KeyPicture d="M1 6h20M21 2l8 4-8 4Z" fill="var(--ink)" /> given
+      </li>
+      <li>
+        <KeyPicture d="M1 4h19V1l9 5-9 5V8H1Z" fill="var(--sheet)" /> answered
+      </li>
+    </ul>
+  );
+}
+
+function KeyPicture({
+  d,
+  fill,
+  dash = false,
+}: {
+  readonly d: string;
+  readonly fill: string;
+  readonly dash?: boolean;
+}) {
+  return (
+    <svg width="30" height="12" viewBox="0 0 30 12" aria-hidden="true">
+      <path
+        d={d}
+        fill={fill}
+        stroke="currentColor"
+        strokeWidth="1.2"
+        strokeDasharray={dash ? '4 3' : undefined}
+      />
+    </svg>
+  );
 }

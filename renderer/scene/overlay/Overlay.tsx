@@ -7,6 +7,7 @@ import type { BayViewProps } from '../bayViewProps.ts';
 import type { OverlayMotion } from '../bowing/overlayMotion.ts';
 import { useSwing } from '../bowing/useSwing.ts';
 import { Detail } from '../detail/Detail.tsx';
+import { ForceNodes } from '../forces/ForceNodes.tsx';
 import type { Size } from '../useSize.ts';
 import type { SheetView } from '../view/sheetView.ts';
 import { InkPainter } from './inkPainter.ts';
@@ -31,7 +32,8 @@ export type OverlayProps = BayViewProps & {
  * are written straight to the page whenever the view moves.
  */
 export function Overlay(props: OverlayProps) {
-  const { content, moves, handle, assessment, units, trail, legend, stiffness, removed, playing } = props;
+  const { content, moves, handle, assessment, units, trail, legend, stiffness, removed, playing, forces } =
+    props;
   const figure = props.figure !== null;
   const root = useRef<HTMLDivElement>(null);
   const ink = useRef<SVGGElement>(null);
@@ -42,8 +44,19 @@ export function Overlay(props: OverlayProps) {
   const detailAt = useRef<number | null>(null);
   const view = useRef<SheetView | null>(null);
   const candidates = useRef<ReadonlyMap<string, number>>(new Map());
-  const latest = useRef({ content, moves, assessment, units, trail, legend, stiffness, removed, figure });
-  latest.current = { content, moves, assessment, units, trail, legend, stiffness, removed, figure };
+  const latest = useRef({
+    content,
+    moves,
+    assessment,
+    units,
+    trail,
+    legend,
+    stiffness,
+    removed,
+    figure,
+    forces,
+  });
+  latest.current = { content, moves, assessment, units, trail, legend, stiffness, removed, figure, forces };
   const bowed =
     moves.key !== null || content.bow === null || content.selected === null
       ? moves.key
@@ -99,6 +112,7 @@ export function Overlay(props: OverlayProps) {
     stiffness,
     removed,
     figure,
+    forces,
     repaint,
   ]);
 
@@ -115,7 +129,16 @@ export function Overlay(props: OverlayProps) {
       )}
       <Crossings {...props} />
       <Labels {...props} />
-      <Ends {...props} />
+      {props.forces === null && <Ends {...props} />}
+      {props.forces?.placing != null && content.bay !== null && (
+        <ForceNodes
+          placing={props.forces.placing}
+          units={units}
+          right={content.bay.planes[0]?.right ?? [1, 0, 0]}
+          view={view}
+          onForce={props.onForce}
+        />
+      )}
     </div>
   );
 }

@@ -3,6 +3,7 @@ import type { Bar, BayLayout, Crossing } from '../../../core/layout/model.ts';
 import type { BayViewProps } from '../bayViewProps.ts';
 import { type CrossingDetail, crossingDetail, crossingToShow } from '../detail/crossingDetail.ts';
 import { type BowShape, bowShape } from '../drawing/bowShape.ts';
+import { forceLabel } from '../forces/forceLabel.ts';
 import { type BarLabel, barLabel } from './barLabel.ts';
 
 /** What lies over the steel, before it takes its place on the sheet. */
@@ -25,9 +26,10 @@ export function overlayContent({
   selectedCrossing,
   units,
   bow: bowWanted,
+  forces,
 }: Pick<
   BayViewProps,
-  'assessment' | 'bay' | 'selectedBar' | 'selectedCrossing' | 'units' | 'bow'
+  'assessment' | 'bay' | 'selectedBar' | 'selectedCrossing' | 'units' | 'bow' | 'forces'
 >): OverlayContent {
   const { layout } = assessment;
   const bay = layout.bays.find((one) => one.id === bayId) ?? null;
@@ -41,7 +43,13 @@ export function overlayContent({
   const shownLarge = crossingToShow(layout, bay, selectedCrossing, selectedBar);
   return {
     bay,
-    diagonals: bars.map((bar) => ({ bar, label: barLabel(assessment, bar) })),
+    diagonals: bars.map((bar) => ({
+      bar,
+      label:
+        forces !== null && forces.states.length > 0
+          ? forceLabel(assessment, bar, forces, units)
+          : barLabel(assessment, bar),
+    })),
     crossings,
     selected,
     bow:

@@ -19,6 +19,8 @@ import { from, heading, type Ink, line, PLAQUE_HALF, wordsBox } from '../drawing
 import { lineNamesInk } from '../drawing/lineNamesInk.ts';
 import { setOutInk } from '../drawing/setOutInk.ts';
 import { trailInk } from '../drawing/trailInk.ts';
+import { forcesInk } from '../forces/forcesInk.ts';
+import type { ForcesShown } from '../forces/forcesShown.ts';
 import { type Box, boxAbout, clipped } from '../view/box.ts';
 import { onSheet, type SheetView } from '../view/sheetView.ts';
 import { crossingPlaces } from './crossingPlaces.ts';
@@ -36,6 +38,8 @@ export interface OverlayInput {
   /** Whether what is offered at the stations is drawn there. */
   readonly stiffness: boolean;
   readonly removed: readonly CrossingId[];
+  /** Forces, where they are drawn. */
+  readonly forces: ForcesShown | null;
   /** Whether a figure is wanted in the stead of a crossing's detail. */
   readonly figure: boolean;
   /** How far the bow has grown, 0 to about 1; of a shape that swings, −1 to 1. */
@@ -82,6 +86,12 @@ export function layOutOverlay(input: OverlayInput): OverlayLayout {
   for (const [id, [x, y]] of glyphs) if (within(sheet, x, y)) places.set(`crossing ${id}`, { x, y });
   for (const [key, place] of ends(view, content)) if (within(sheet, place.x, place.y)) places.set(key, place);
 
+  for (const { id } of input.forces?.placing?.nodes ?? []) {
+    const at = input.assessment.layout.nodes.get(id)?.at;
+    const [x, y] = at ? onSheet(view, at) : [-1, -1];
+    if (at && within(sheet, x, y)) places.set(`node ${id}`, { x, y });
+  }
+
   const marks = [
     ...[...glyphs.values()].map((at) => boxAbout(at, GLYPH_HALF)),
     ...[...places]
@@ -120,7 +130,7 @@ export function layOutOverlay(input: OverlayInput): OverlayLayout {
   const taken = [...inTheWay, ...[...labels.values()].map((place) => place.box)];
   const figure = figureOf(input, taken);
   if (figure !== null) places.set('figure', { x: figure.at[0], y: figure.at[1] });
-  const detail = input.figure ? null : detailOf(input, taken, glyphs);
+  const detail = input.figure || input.forces !== null ? null : detailOf(input, taken, glyphs);
   return {
     ink: [
       ...steelInk,
@@ -230,6 +240,9 @@ function inkOf(input: OverlayInput, marks: readonly Box[]): readonly Ink[] {
         )
       : []),
     ...(moves.push === null ? [] : pushInk(view, moves.push)),
+    ...(input.forces === null || bay === null
+      ? []
+      : forcesInk(view, layout, bay, input.forces, selected?.id ?? null, units)),
     // A lit trail says what holds the bar, and where; the notes of the bow would lie on it.
     ...(selected?.angle && bow !== null && restraint !== null && trail === null && !isPushed
       ? holdInk(view, selected, selected.angle, restraint, bow, {

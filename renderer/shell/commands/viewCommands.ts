@@ -1,3 +1,4 @@
+import { shownForces } from '../../store/shownForces.ts';
 import type { DockTab, ViewName } from '../../store/windowState.ts';
 import type { ThemeSetting } from '../../theme/themeSetting.ts';
 import type { Command } from './command.ts';
@@ -14,6 +15,7 @@ const TABS: readonly { readonly tab: DockTab; readonly label: string }[] = [
   { tab: 'shortlist', label: 'Shortlist' },
   { tab: 'findings', label: 'Findings' },
   { tab: 'bowing', label: 'Bowing' },
+  { tab: 'forces', label: 'Forces' },
 ];
 
 const THEMES: readonly { readonly theme: ThemeSetting; readonly label: string }[] = [
@@ -50,8 +52,11 @@ export const viewCommands: readonly Command[] = [
     group: 2,
     label: () => 'Bow the chosen diagonal',
     shortcut: { key: 'b' },
-    checked: ({ view }) => view.bow,
-    run: ({ store, actions }) => actions.setView({ bow: !store.getState().view.bow }),
+    checked: ({ view }) => view.bow && !view.forces,
+    run: ({ store, actions }) => {
+      const { view } = store.getState();
+      actions.setBow(!view.bow || view.forces);
+    },
   },
   {
     id: 'play shape',
@@ -70,6 +75,33 @@ export const viewCommands: readonly Command[] = [
     shortcut: { key: 'p' },
     checked: ({ view }) => view.push,
     run: ({ store, actions }) => actions.setPushMode(!store.getState().view.push),
+  },
+  {
+    id: 'forces',
+    menu: 'View',
+    group: 2,
+    label: () => 'Draw the forces',
+    shortcut: { key: 'f' },
+    checked: ({ view }) => view.forces,
+    run: ({ store, actions }) => actions.showForces(!store.getState().view.forces),
+  },
+  {
+    id: 'next combination',
+    menu: 'View',
+    group: 2,
+    label: () => 'Next combination',
+    shortcut: { key: '.' },
+    enabled: (state) => shownForces(state) !== null,
+    run: ({ actions }) => actions.stepForceState(1),
+  },
+  {
+    id: 'combination before',
+    menu: 'View',
+    group: 2,
+    label: () => 'Combination before',
+    shortcut: { key: ',' },
+    enabled: (state) => shownForces(state) !== null,
+    run: ({ actions }) => actions.stepForceState(-1),
   },
   {
     id: 'trail',

@@ -53,9 +53,9 @@ export function ViewBar(): JSX.Element {
         <button
           type="button"
           className="toggle"
-          aria-pressed={view.bow}
+          aria-pressed={view.bow && !view.forces}
           aria-keyshortcuts="B"
-          onClick={() => actions.setView({ bow: !view.bow })}
+          onClick={() => actions.setBow(!view.bow || view.forces)}
         >
           <span className="toggle-box" aria-hidden="true" />
           Bow{mark === null ? '' : ` ${mark}`} <Key>B</Key>
@@ -72,6 +72,16 @@ export function ViewBar(): JSX.Element {
             Push <Key>P</Key>
           </button>
         )}
+        <button
+          type="button"
+          className="toggle"
+          aria-pressed={view.forces}
+          aria-keyshortcuts="F"
+          onClick={() => actions.showForces(!view.forces)}
+        >
+          <span className="toggle-box" aria-hidden="true" />
+          Forces <Key>F</Key>
+        </button>
         <button
           type="button"
           className="toggle view-trail"

@@ -9,12 +9,17 @@ import { ShapeStrip } from '../../panels/bowing/ShapeStrip.tsx';
 import { CrossingPanel } from '../../panels/crossing/CrossingPanel.tsx';
 import { EndPanel } from '../../panels/end/EndPanel.tsx';
 import { TryBanner } from '../../panels/findings/TryBanner.tsx';
+import { ForceStrip } from '../../panels/forces/ForceStrip.tsx';
+import type { ForcesShown } from '../../scene/forces/forcesShown.ts';
 import { presentProject, shownAssessment, shownProject } from '../../store/shown.ts';
 import type { Trying } from '../../store/trying.ts';
+import type { WindowState } from '../../store/windowState.ts';
 import type { Theme } from '../../theme/themeSetting.ts';
 import { useServices, useWindow } from '../services.tsx';
 import { EmptyProject } from './EmptyProject.tsx';
 import { FailedFigures } from './FailedFigures.tsx';
+import { caseForArrows, forcesToShow } from './forcesToShow.ts';
+import { forceEdit } from './placeForce.ts';
 import { pushToShow } from './pushToShow.ts';
 import { shapeToShow } from './shapeToShow.ts';
 import { trailToShow } from './trail.ts';
@@ -46,10 +51,12 @@ export function ViewPanel({ theme }: { readonly theme: Theme }): JSX.Element {
 /** What is said and set of what moves in the drawing. */
 function ViewStrip(): JSX.Element | null {
   const push = useWindow((state) => state.view.push);
+  const forces = useWindow((state) => state.view.forces);
   const bow = useWindow((state) => state.view.bow);
   // What is on trial has a bar of its own, and the drawing needs its room.
   const trying = useWindow((state) => state.trying !== null);
   if (push) return <PushStrip />;
+  if (forces) return <ForceStrip />;
   return bow && !trying ? <ShapeStrip /> : null;
 }
 
@@ -64,6 +71,7 @@ function Drawing({ theme }: { readonly theme: Theme }): JSX.Element {
   const { selection, hovered, view, trying } = state;
   const shape = shapeToShow(state);
   const push = pushToShow(state);
+  const forces = useForces(state);
   const figure = useMemo(
     () => pushFigure(assessment, selection.bar, push?.at ?? null, units),
     [assessment, selection.bar, push?.at, units],
@@ -97,6 +105,11 @@ function Drawing({ theme }: { readonly theme: Theme }): JSX.Element {
           stiffness={view.push || state.tab === 'bowing'}
           figure={figure}
           removed={removed}
+          forces={forces}
+          onForce={(place, force) => {
+            const into = caseForArrows(store.getState());
+            if (into !== null) actions.edit(forceEdit(into, place, force));
+          }}
           trail={trail}
           onSelectBar={(bar) => (bar === null ? actions.stepBack() : actions.selectBar(bar))}
           onSelectCrossing={(crossing) =>
@@ -110,6 +123,16 @@ function Drawing({ theme }: { readonly theme: Theme }): JSX.Element {
       </Suspense>
       {failure !== null && <FailedFigures failure={failure} />}
     </>
+  );
+}
+
+/** The same object while nothing of it changes, so that the drawing rests. */
+function useForces(state: WindowState): ForcesShown | null {
+  const { view, selection, history, assessing, trying } = state;
+  // biome-ignore lint/correctness/useExhaustiveDependencies: what the forces are made from
+  return useMemo(
+    () => forcesToShow(state),
+    [view.forces, view.forceState, view.loadCase, selection.bay, history, assessing, trying],
   );
 }
 
