@@ -2,12 +2,13 @@ import type { Project } from '../../core/project/model.ts';
 
 /** Whether two projects say the same, so that an edit that changes nothing leaves no step to undo. Untouched bays are told by identity. */
 export function sameProject(a: Project, b: Project): boolean {
+  const { bays: baysA, ...restA } = a;
+  const { bays: baysB, ...restB } = b;
   return (
-    a.name === b.name &&
-    same(a.settings, b.settings) &&
-    same(a.ownStock, b.ownStock) &&
-    a.bays.length === b.bays.length &&
-    a.bays.every((bay, index) => same(bay, b.bays[index]))
+    // Everything but the bays, whatever a project may come to hold.
+    same(restA, restB) &&
+    baysA.length === baysB.length &&
+    baysA.every((bay, index) => same(bay, baysB[index]))
   );
 }
 
