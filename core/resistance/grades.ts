@@ -3,74 +3,157 @@ import type { Confidence } from '../practice/model.ts';
 import type { OwnGrade, PracticeId } from '../project/model.ts';
 import type { Steel } from './model.ts';
 
+/** Strength of one range of thicknesses, from where the one before ends. */
 interface Band {
-  /** Thickness up to which it holds, mm. */
-  readonly upTo: number;
+  /** mm. */
+  readonly limit: number;
+  /** Whether the limit itself still belongs to it: "t ≤ 16" or "t < 11". */
+  readonly with: boolean;
   readonly fy: number;
   readonly fu: number;
 }
 
 interface Grade {
-  /** Tells the grade from what is typed, in capitals without spaces and dashes. */
+  /** Tells the grade from what is typed, in capitals without spaces, dashes, dots, slashes and brackets. */
   readonly names: RegExp;
+  /** Practices that mean this steel by the name, where the name has two meanings. */
+  readonly meantBy?: readonly PracticeId[];
+  /** From thin to thick; thicker is unknown. */
   readonly bands: readonly Band[];
   readonly source: string;
   readonly confidence: Confidence;
 }
 
-const ANY = Number.POSITIVE_INFINITY;
-const en = (names: RegExp, fy: readonly [number, number, number], fu: number): Grade => ({
-  names,
+const anyThickness = (fy: number, fu: number): readonly Band[] => [
+  { limit: Number.POSITIVE_INFINITY, with: true, fy, fu },
+];
+
+/** Steps at 16, 40, 63 and 80 mm, each in the thinner range. */
+const european = (
+  fy16: number,
+  fy40: number,
+  fy63: number,
+  fy80: number,
+  fu: number,
+): Pick<Grade, 'bands' | 'source' | 'confidence'> => ({
   bands: [
-    { upTo: 16, fy: fy[0], fu },
-    { upTo: 40, fy: fy[1], fu },
-    { upTo: 63, fy: fy[2], fu },
+    { limit: 16, with: true, fy: fy16, fu },
+    { limit: 40, with: true, fy: fy40, fu },
+    { limit: 63, with: true, fy: fy63, fu },
+    { limit: 80, with: true, fy: fy80, fu },
   ],
-  source: 'EN 10025-2',
+  // EN 1993-1-1:2005 Table 3.1 has f_u 430 and 490 for S275 and S355 up to 40 mm, and steps in f_y at 40 only. Many national annexes send
+  // to the product standard, whose figures are never above those of the table: they are taken.
+  source: 'EN 10025-2, least of the range; nowhere above EN 1993-1-1:2005 Table 3.1',
   confidence: 'from memory, sure',
 });
-const plain = (names: RegExp, fy: number, fu: number, source: string, confidence: Confidence): Grade => ({
-  names,
-  bands: [{ upTo: ANY, fy, fu }],
-  source,
-  confidence,
+
+/** Steps at 11 and 17 mm, each in the thicker range. */
+const australian = (
+  thin: number,
+  middle: number,
+  thick: number,
+  fu: number,
+): Pick<Grade, 'bands' | 'source' | 'confidence'> => ({
+  bands: [
+    { limit: 11, with: false, fy: thin, fu },
+    { limit: 17, with: false, fy: middle, fu },
+    { limit: Number.POSITIVE_INFINITY, with: true, fy: thick, fu },
+  ],
+  source: 'AS/NZS 3679.1',
+  confidence: 'from memory, sure',
 });
 
-/** As EN 1993-1-1:2005 has them in Table 3.1, where fu of S355 is 490 and thickness steps at 40. */
+/** Steps at 20 mm, in the thicker range, and 40 mm, in the thinner. The steps are less sure than the first figure. */
+const indian = (
+  thin: number,
+  middle: number,
+  thick: number,
+  fu: number,
+): Pick<Grade, 'bands' | 'source'> => ({
+  bands: [
+    { limit: 20, with: false, fy: thin, fu },
+    { limit: 40, with: true, fy: middle, fu },
+    { limit: Number.POSITIVE_INFINITY, with: true, fy: thick, fu },
+  ],
+  source: 'IS 2062',
+});
+
+const SUFFIX = '(JR|J0|J2|K2|N|NL|M|ML|W|G[1-4]|\\+|AR)*';
+const EN_STANDARD = '(SANS50025|BSEN10025|EN10025)?(2)?';
+
 const GRADES: readonly Grade[] = [
-  en(/^S?235/, [235, 225, 215], 360),
-  en(/^S?275/, [275, 265, 255], 410),
-  en(/^S?355/, [355, 345, 335], 470),
-  plain(/^300WA?$/, 300, 450, 'SANS 1431, handbook', 'from memory, verify'),
-  plain(/^350WA$/, 350, 480, 'SANS 1431, handbook', 'from memory, verify'),
-  plain(/^G40\.?21?300W$|^CSA300W$/, 300, 440, 'CSA G40.21', 'from memory, sure'),
-  plain(/^(G40\.?21)?350W$/, 350, 450, 'CSA G40.21', 'read in a source'),
-  plain(/^(ASTM)?A36/, 250, 400, 'ASTM A36', 'from memory, sure'),
-  plain(/^(ASTM)?A572(GR(ADE)?)?\.?50/, 345, 450, 'ASTM A572', 'from memory, sure'),
-  plain(/^(ASTM)?A572/, 345, 450, 'ASTM A572, grade 50', 'from memory, sure'),
-  plain(/^(ASTM)?A529/, 345, 450, 'ASTM A529, grade 50', 'from memory, sure'),
+  { names: new RegExp(`^${EN_STANDARD}S?235${SUFFIX}$`), ...european(235, 225, 215, 215, 360) },
+  { names: new RegExp(`^${EN_STANDARD}S?275${SUFFIX}$`), ...european(275, 265, 255, 245, 410) },
+  { names: new RegExp(`^${EN_STANDARD}S?355${SUFFIX}$`), ...european(355, 345, 335, 325, 470) },
   {
-    names: /^(GRADE|GR|G)?300(PLUS)?$/,
-    bands: [
-      { upTo: 10.999, fy: 320, fu: 440 },
-      { upTo: 16.999, fy: 300, fu: 440 },
-      { upTo: ANY, fy: 280, fu: 440 },
-    ],
-    source: 'AS/NZS 3679.1',
+    names: /^(SANS1431)?300WA?$/,
+    meantBy: ['sans10162'],
+    bands: anyThickness(300, 450),
+    source: 'SANS 1431, as handbooks give it; no steps of thickness',
+    confidence: 'from memory, verify',
+  },
+  {
+    names: /^(SANS1431)?300WA$/,
+    bands: anyThickness(300, 450),
+    source: 'SANS 1431, as handbooks give it; no steps of thickness',
+    confidence: 'from memory, verify',
+  },
+  {
+    names: /^(SANS1431)?350WA$/,
+    bands: anyThickness(350, 480),
+    source: 'SANS 1431, as handbooks give it; no steps of thickness',
+    confidence: 'from memory, verify',
+  },
+  {
+    // 450 in older prints.
+    names: /^(CSA)?(G4021)?300W$/,
+    bands: anyThickness(300, 440),
+    source: 'CSA G40.21',
     confidence: 'from memory, sure',
   },
   {
-    names: /^(GRADE|GR|G)?350$/,
-    bands: [
-      { upTo: 10.999, fy: 360, fu: 480 },
-      { upTo: 16.999, fy: 340, fu: 480 },
-      { upTo: ANY, fy: 330, fu: 480 },
-    ],
-    source: 'AS/NZS 3679.1',
+    names: /^(CSA)?(G4021)?350W$/,
+    bands: anyThickness(350, 450),
+    source: 'CSA G40.21, as a teaching example gives it',
+    confidence: 'read in a source',
+  },
+  {
+    names: /^(ASTM)?A36(M|A36M)?$/,
+    bands: anyThickness(250, 400),
+    source: 'ASTM A36 (36 and 58 ksi)',
     confidence: 'from memory, sure',
   },
-  plain(/^E250/, 250, 410, 'IS 2062', 'from memory, sure'),
-  plain(/^E350/, 350, 490, 'IS 2062', 'from memory, sure'),
+  {
+    names: /^(ASTM)?A572(M|A572M)?((GRADE|GR)?(50|345))?$/,
+    bands: anyThickness(345, 450),
+    source: 'ASTM A572, grade 50',
+    confidence: 'from memory, sure',
+  },
+  {
+    names: /^(ASTM)?A529(M|A529M)?((GRADE|GR)?(50|345))?$/,
+    bands: anyThickness(345, 450),
+    source: 'ASTM A529, grade 50',
+    confidence: 'from memory, sure',
+  },
+  {
+    names: /^(ASNZS36791)?(GRADE|GR|G)?300(PLUS)?(S0|L0|L15)?$/,
+    ...australian(320, 300, 280, 440),
+  },
+  {
+    names: /^(ASNZS36791)?(GRADE|GR|G)?350(PLUS)?(S0|L0|L15)?$/,
+    ...australian(360, 340, 330, 480),
+  },
+  {
+    names: /^(IS2062)?E250(FE410W?)?(A|BR|B0|C)?$/,
+    ...indian(250, 240, 230, 410),
+    confidence: 'from memory, sure',
+  },
+  {
+    names: /^(IS2062)?E350(FE490)?(A|BR|B0|C)?$/,
+    ...indian(350, 330, 320, 490),
+    confidence: 'from memory, sure',
+  },
 ];
 
 const USUAL: Readonly<Record<PracticeId, readonly string[]>> = {
@@ -82,11 +165,11 @@ const USUAL: Readonly<Record<PracticeId, readonly string[]>> = {
   is800: ['E250', 'E350'],
 };
 
-/** Grades that a designer of that practice names most. */
+/** Grades that a designer of that practice names most. Every one of them is known to `steelFor`. */
 export const usualGrades = (practice: PracticeId): readonly string[] => USUAL[practice];
 
 /**
- * The steel that a grade names; null when it names none. The user's own grades come first.
+ * The steel that a grade names; null when it names none, or is thicker than its list goes. The user's own grades come first.
  *
  * @param thickness mm, of the thickest part
  */
@@ -110,24 +193,12 @@ export function steelFor(
       source: 'as given in the project',
       confidence: 'read in a source',
     };
-  const found = named(practice, typed);
-  const band = found?.bands.find(({ upTo }) => thickness <= upTo);
+  const found = GRADES.find(
+    ({ names, meantBy }) => names.test(typed) && (meantBy === undefined || meantBy.includes(practice)),
+  );
+  const band = found?.bands.find((each) => thickness < each.limit || (each.with && thickness === each.limit));
   if (!found || !band) return null;
-  const { fy, fu } = practice === 'en1993' ? tableThreeOne(typed, thickness, band) : band;
-  return { grade, fy, fu, E, G, source: found.source, confidence: found.confidence };
+  return { grade, fy: band.fy, fu: band.fu, E, G, source: found.source, confidence: found.confidence };
 }
 
-function named(practice: PracticeId, typed: string): Grade | undefined {
-  // "300W" is Canadian or South African steel, by the practice.
-  if (practice === 'csaS16' && typed === '300W')
-    return plain(/^/, 300, 440, 'CSA G40.21', 'from memory, sure');
-  return GRADES.find(({ names }) => names.test(typed));
-}
-
-/** EN 1993-1-1:2005 Table 3.1 as corrected: S355 490; steps at 40 mm. The safer of it and the product standard is taken. */
-function tableThreeOne(typed: string, thickness: number, band: Band): { fy: number; fu: number } {
-  const table = /355/.test(typed) ? 490 : /275/.test(typed) ? 430 : 360;
-  return { fy: band.fy, fu: thickness <= 40 ? Math.min(table, band.fu) : band.fu };
-}
-
-const plainName = (typed: string): string => typed.toUpperCase().replaceAll(/[\s_-]/g, '');
+const plainName = (typed: string): string => typed.toUpperCase().replaceAll(/[\s_\-–./()]/g, '');

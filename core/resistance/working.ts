@@ -4,6 +4,12 @@ import type { Condition, Quantity, Resistance, Step } from './model.ts';
 export class Working {
   readonly steps: Step[] = [];
   readonly conditions: Condition[] = [];
+  /** A condition that the rule rests on is not met: it gives no resistance. */
+  #refused = false;
+
+  get refused(): boolean {
+    return this.#refused;
+  }
 
   given(name: string, symbol: string, value: number, quantity: Quantity): number {
     this.steps.push({ name, symbol, value, quantity });
@@ -15,27 +21,37 @@ export class Working {
     return value;
   }
 
-  /** @param found what is there, for when it is not met */
+  /**
+   * What the rule rests on: without it there is no resistance.
+   *
+   * @param found what is there, for when it is not met
+   */
   requires(says: string, met: boolean, found: string): boolean {
-    this.conditions.push({ says, met, found: met ? null : found });
+    this.limits(says, met, found);
+    if (!met) this.#refused = true;
     return met;
+  }
+
+  /** A least distance and its like: told when it is broken, while the figure still stands. */
+  limits(says: string, met: boolean, found: string): void {
+    this.conditions.push({ says, met, found: met ? null : found });
   }
 }
 
 type Stated = Omit<Resistance, 'conditions' | 'applies' | 'steps' | 'end' | 'note' | 'ownRule'> &
   Partial<Pick<Resistance, 'end' | 'note' | 'ownRule'>>;
 
-/** A check with its working; a rule whose conditions are not met gives no resistance. */
-export function resistance(stated: Stated, { steps, conditions }: Working): Resistance {
-  const applies = conditions.every(({ met }) => met);
+/** A check with its working; a rule that rests on what is not there gives no resistance. */
+export function resistance(stated: Stated, working: Working): Resistance {
+  const { steps, conditions, refused } = working;
   return {
     end: null,
     note: null,
     ownRule: true,
     ...stated,
-    resistance: applies ? stated.resistance : null,
+    resistance: refused ? null : stated.resistance,
     conditions,
-    applies,
+    applies: conditions.every(({ met }) => met),
     steps,
   };
 }

@@ -1,101 +1,102 @@
 import { deductedWidth } from '../holes.ts';
 import type { ResistingEnd, ResistingSection, TensionQuestion } from '../model.ts';
 import type { Working } from '../working.ts';
-import { type ChainHole, deductionOf } from './netArea.ts';
+import { type ChainHole, deductionOf, straightDeductionOf } from './netArea.ts';
+
+/** Thicknesses that a bolt goes through beside the gusset: a pair of angles has a leg on either side. */
+export function pliesOf({ shape }: ResistingSection): 1 | 2 {
+  return shape === 'angles back to back' || shape === 'starred angles' ? 2 : 1;
+}
+
+/** One line of bolts along the bar. mm. */
+export interface BoltRow {
+  readonly bolts: number;
+  /** From the end of the bar to the bolt nearest to it. */
+  readonly start: number;
+  /** From the heel over the flattened section; below zero in the leg off the gusset. */
+  readonly across: number;
+}
+
+/**
+ * The rows of an end. All bolts are shared out over them, the first row taking what is left over.
+ * With both legs bolted half of them go through the other leg, on the same gauge, side by side with the first.
+ */
+export function rowsOf(end: ResistingEnd, { thickness }: ResistingSection): readonly BoltRow[] {
+  const inLeg = Array.from({ length: end.rows }, (_, k) => ({
+    start: end.endDistance + (k === 1 && end.staggered ? end.pitch / 2 : 0),
+    across: end.gauge + k * end.rowSpacing,
+  }));
+  // Flattened, the distance across the heel is the sum of both gauges less the thickness.
+  const places =
+    end.legs === 'both'
+      ? [...inLeg, ...inLeg.map(({ start, across }) => ({ start, across: thickness - across }))]
+      : inLeg;
+  const least = Math.floor(end.bolts / places.length);
+  const over = end.bolts - least * places.length;
+  return places
+    .map((place, k) => ({ ...place, bolts: least + (k < over ? 1 : 0) }))
+    .filter(({ bolts }) => bolts > 0);
+}
+
+/** Bolts in the longest row. */
+export const boltsInLine = (end: ResistingEnd, section: ResistingSection): number =>
+  Math.max(0, ...rowsOf(end, section).map(({ bolts }) => bolts));
 
 /** Lines of bolts across the force: bolts of one row, staggered rows counted apart. */
-export function boltLines({ bolts, rows, staggered }: ResistingEnd): number {
-  return staggered ? bolts : Math.ceil(bolts / rows);
+export function boltLines(end: ResistingEnd, section: ResistingSection): number {
+  return new Set(holesOf(end, section, 0).map(({ along }) => along)).size;
 }
 
 /** From the first bolt to the last along the force, mm. */
-export function boltedLength(end: ResistingEnd): number {
-  const inRow = Math.ceil(end.bolts / end.rows);
-  return (inRow - 1) * end.pitch + (end.staggered ? end.pitch / 2 : 0);
+export function boltedLength(end: ResistingEnd, section: ResistingSection): number {
+  const along = holesOf(end, section, 0).map((hole) => hole.along);
+  return Math.max(...along) - Math.min(...along);
 }
 
-/** All holes of an end, across counted from the heel over the flattened leg. With both legs bolted the other leg has its own row, on the far side of the heel. */
+/** All holes of an end, along from the end of the bar. */
 export function holesOf(end: ResistingEnd, section: ResistingSection, width: number): readonly ChainHole[] {
-  const rows = Array.from({ length: end.rows }, (_, row) => ({
-    across: end.gauge + row * end.rowSpacing,
-    shift: row === 1 && end.staggered ? end.pitch / 2 : 0,
-  }));
-  // Legs flattened: across the heel the distance is the sum of the gauges less the thickness.
-  const other = end.legs === 'both' ? [{ across: -(end.gauge - section.thickness), shift: 0 }] : [];
-  return [...rows, ...other].flatMap(({ across, shift }) =>
-    Array.from({ length: Math.ceil(end.bolts / end.rows) }, (_, k) => ({
-      along: k * end.pitch + shift,
-      across,
-      width,
-    })),
+  return rowsOf(end, section).flatMap(({ bolts, start, across }) =>
+    Array.from({ length: bolts }, (_, k) => ({ along: start + k * end.pitch, across, width })),
   );
 }
 
-/** Net area with its working. mm². */
+/** Net area with its working, both plies of a pair. mm². */
 export function netArea(question: TensionQuestion, end: ResistingEnd, working: Working): number {
-  const { section, practice, options } = question;
+  const { section } = question;
   const gross = working.given('gross area', 'A_g', section.properties.area, 'area');
-  const width = working.step(
-    'width deducted for a hole',
-    'd_h',
-    practice === 'aisc360' || practice === 'sans10162' || practice === 'csaS16'
-      ? 'hole + 2 mm'
-      : options.punchedHoles && practice !== 'en1993'
-        ? 'hole + 2 mm, punched'
-        : 'hole',
-    deductedWidth(practice, end.hole, options.punchedHoles),
-    'length',
-  );
+  return netOf(gross, 'A_g', question, end, working);
+}
+
+/** What holes leave of a given area. */
+export function netOf(
+  gross: number,
+  symbol: string,
+  question: TensionQuestion,
+  end: ResistingEnd,
+  working: Working,
+): number {
+  const { section, practice, options } = question;
+  const { width, formula } = deductedWidth(practice, end, options.punchedHoles);
   working.given('thickness', 't', section.thickness, 'length');
-  const taken = deductionOf(holesOf(end, section, width), section.thickness);
+  working.step('width deducted for a hole', 'd_h', formula, width, 'length');
+  const plies = pliesOf(section);
+  const holes = holesOf(end, section, width);
+  const straight = plies * straightDeductionOf(holes, section.thickness);
+  const each = plies === 2 ? '2 ' : '';
+  const cut = working.step('taken by a straight cut', 'ΔA_1', `${each}Σd_h t`, straight, 'area');
+  if (!end.staggered) return working.step('net area', 'A_n', `${symbol} − ΔA_1`, gross - cut, 'area');
+  const zigzag = working.step(
+    'taken by the worst chain of holes',
+    'ΔA_2',
+    `${each}(Σd_h t − Σs²t/(4g))`,
+    plies * deductionOf(holes, section.thickness),
+    'area',
+  );
   return working.step(
     'net area',
     'A_n',
-    end.rows === 2 || end.legs === 'both' ? 'A_g − Σd_h t + Σs²t/(4g)' : 'A_g − d_h t',
-    gross - taken,
+    `${symbol} − max(ΔA_1, ΔA_2)`,
+    gross - Math.max(cut, zigzag),
     'area',
   );
-}
-
-export interface Block {
-  /** Tension along the end line, net and gross; shear along the rows, net and gross. mm². */
-  readonly netTension: number;
-  readonly grossTension: number;
-  readonly netShear: number;
-  readonly grossShear: number;
-}
-
-/** The block that may tear out of the leg: across from the first row to the toe, along that row. Practice-facts C. */
-export function blockOf(question: TensionQuestion, end: ResistingEnd, working: Working): Block {
-  const { section, practice, options } = question;
-  const t = working.given('thickness', 't', section.thickness, 'length');
-  const d = deductedWidth(practice, end.hole, options.punchedHoles);
-  const across = end.edgeDistance + end.rowSpacing;
-  const stagger = end.staggered ? end.pitch / 2 : 0;
-  const along = end.endDistance + boltedLength(end) - stagger;
-  const inRow = Math.ceil(end.bolts / end.rows);
-  const slanted = end.staggered && end.rowSpacing > 0 ? (stagger * stagger * t) / (4 * end.rowSpacing) : 0;
-  const block = {
-    grossTension: across * t,
-    netTension: (across - (end.rows - 0.5) * d) * t + slanted,
-    grossShear: along * t,
-    netShear: (along - (inRow - 0.5) * d) * t,
-  };
-  working.step(
-    'net area in tension',
-    'A_nt',
-    'from the first row to the toe, holes out',
-    block.netTension,
-    'area',
-  );
-  working.step('gross area in tension', 'A_gt', 'from the first row to the toe', block.grossTension, 'area');
-  working.step(
-    'net area in shear',
-    'A_nv',
-    'along the first row to the end, holes out',
-    block.netShear,
-    'area',
-  );
-  working.step('gross area in shear', 'A_gv', 'along the first row to the end', block.grossShear, 'area');
-  return block;
 }

@@ -1,8 +1,12 @@
 /** EN 1993-1-1 6.2.3, EN 1993-1-8 3.10 and 4.13. Practice-facts B4, C. */
-import type { ResistanceOptions, ResistingEnd, TensionQuestion } from '../model.ts';
+
+import { stressArea } from '../connection/fasteners.ts';
+import type { Resistance, ResistanceOptions, ResistingEnd, TensionQuestion } from '../model.ts';
 import { resistance, Working } from '../working.ts';
-import { blockOf, netArea } from './boltRows.ts';
-import { isOneLeg, isWhole, type TensionPack } from './pack.ts';
+import { type Block, blocksOf, weakestBlock } from './blocks.ts';
+import { netArea, netOf, pliesOf } from './boltRows.ts';
+import { heldBy, isOneLeg, isWhole, refuseShape, type TensionPack } from './pack.ts';
+import { rodDiameter } from './rods.ts';
 
 /** Recommended values; a national annex may have others. */
 export function partialFactors({ partialFactors: chosen }: ResistanceOptions): {
@@ -32,102 +36,151 @@ export const EN: TensionPack = {
       working,
     );
   },
-  netRupture: (question, end) => (end.kind === 'bolted' ? bolted(question, end) : welded(question, end)),
+  netRupture: (question, end) => {
+    if (end.kind === 'welded') return welded(question, end);
+    return isOneLeg(question, end) ? oneLeg(question, end) : concentric(question, end);
+  },
   blockShear: (question, end) => {
     const working = new Working();
-    const { netTension, netShear } = blockOf(question, end, working);
     const { fy, fu } = question.steel;
     const { M0, M2 } = partialFactors(question.options);
-    const off = question.options.blockTearing === 'off the middle';
-    const N = (off ? 0.5 : 1) * ((fu * netTension) / M2) + (fy * netShear) / (Math.sqrt(3) * M0);
+    // A block of an angle by one leg is off the force's line: (3.10), unless the user holds with (3.9).
+    const share = ({ even }: Block): number =>
+      even || question.options.blockTearing === 'through the middle' ? 1 : 0.5;
+    const strength = (block: Block): number =>
+      (share(block) * fu * block.netTension) / M2 + (fy * block.netShear) / (Math.sqrt(3) * M0);
+    const block = weakestBlock(blocksOf(question, end), strength, working);
+    const off = block !== null && share(block) < 1;
+    if (block) {
+      working.given('partial factor', 'γ_M0', M0, 'factor');
+      working.given('partial factor', 'γ_M2', M2, 'factor');
+    }
     return resistance(
       {
         kind: 'block shear',
         title: 'Block tearing',
         against: 'tension',
         end: end.end,
-        resistance: working.step(
-          'resistance',
-          off ? 'V_eff,2,Rd' : 'V_eff,1,Rd',
-          `${off ? '0.5 ' : ''}f_u A_nt/γ_M2 + f_y A_nv/(√3 γ_M0)`,
-          N,
-          'force',
-        ),
+        resistance:
+          block &&
+          working.step(
+            'resistance',
+            off ? 'V_eff,2,Rd' : 'V_eff,1,Rd',
+            `${off ? '0.5 ' : ''}f_u A_nt/γ_M2 + f_y A_nv/(√3 γ_M0)`,
+            strength(block),
+            'force',
+          ),
         standard: 'EN 1993-1-8',
         clause: off ? '3.10.2(3), (3.10)' : '3.10.2(2), (3.9)',
         confidence: 'from memory, sure',
-        note: 'Practice differs on (3.9) or (3.10) for an angle by one leg; the settings choose.',
+        note: isOneLeg(question, end)
+          ? 'Practice differs on (3.9) or (3.10) for an angle by one leg; the settings choose.'
+          : null,
+      },
+      working,
+    );
+  },
+  threadRupture: ({ section, steel, options }, end) => {
+    const working = new Working();
+    const d = working.given('diameter', 'd', rodDiameter(section), 'length');
+    const A = working.step('stress area', 'A_s', 'π/4 (d − 0.9382 p)²', stressArea(d), 'area');
+    const fu = working.given('tensile strength', 'f_u', steel.fu, 'stress');
+    const gamma = working.given('partial factor', 'γ_M2', partialFactors(options).M2, 'factor');
+    return resistance(
+      {
+        kind: 'net rupture',
+        title: 'Rupture at the thread',
+        against: 'tension',
+        end: end.end,
+        resistance: working.step('resistance', 'F_t,Rd', '0.9 f_u A_s/γ_M2', (0.9 * fu * A) / gamma, 'force'),
+        standard: 'EN 1993-1-8',
+        clause: 'Table 3.4',
+        confidence: 'from memory, sure',
+        note: '3.6.1(3) takes 0.85 of this where threads are cut by others than makers of bolts.',
       },
       working,
     );
   },
 };
 
-function bolted(question: TensionQuestion, end: ResistingEnd) {
+const RUPTURE = { kind: 'net rupture', against: 'tension', confidence: 'from memory, sure' } as const;
+
+/** (6.7): what is wholly connected. */
+function concentric(question: TensionQuestion, end: ResistingEnd): Resistance {
+  const working = new Working();
+  const { steel, options } = question;
+  const gamma = partialFactors(options).M2;
+  const holds = isWhole(question, end);
+  if (!holds) refuseShape(question, end, 'a flat, or a single angle', working);
+  const An = holds ? netArea(question, end, working) : null;
+  if (An !== null) working.given('partial factor', 'γ_M2', gamma, 'factor');
+  return resistance(
+    {
+      ...RUPTURE,
+      end: end.end,
+      title: 'Rupture of the net section',
+      resistance:
+        An === null
+          ? null
+          : working.step(
+              'resistance',
+              'N_u,Rd',
+              '0.9 A_net f_u/γ_M2',
+              (0.9 * An * steel.fu) / gamma,
+              'force',
+            ),
+      standard: 'EN 1993-1-1',
+      clause: '6.2.3(2)b, (6.7)',
+    },
+    working,
+  );
+}
+
+/** 3.10.3: one row of bolts in one leg. */
+function oneLeg(question: TensionQuestion, end: ResistingEnd): Resistance {
   const working = new Working();
   const { section, steel, options } = question;
   const gamma = partialFactors(options).M2;
-  const fu = steel.fu;
-  const common = {
-    kind: 'net rupture',
-    against: 'tension',
-    end: end.end,
-    confidence: 'from memory, sure',
-  } as const;
-  if (!isOneLeg(question, end) || !isSingleAngle(question)) {
-    const An = netArea(question, end, working);
-    working.given('partial factor', 'γ_M2', gamma, 'factor');
-    working.requires(
-      'the force goes through the centroid, or the outstanding part is small',
-      isWhole(question, end),
-      'part of the section is not connected',
-    );
+  const { fu } = steel;
+  const common = { ...RUPTURE, end: end.end, standard: 'EN 1993-1-8' } as const;
+  working.requires('one row of bolts: 3.10.3 speaks of no more', end.rows === 1, 'two rows');
+  if (working.refused)
     return resistance(
-      {
-        ...common,
-        title: 'Rupture of the net section',
-        resistance: working.step(
-          'resistance',
-          'N_u,Rd',
-          '0.9 A_net f_u/γ_M2',
-          (0.9 * An * fu) / gamma,
-          'force',
-        ),
-        standard: 'EN 1993-1-1',
-        clause: '6.2.3(2)b, (6.7)',
-      },
+      { ...common, title: 'Rupture of the net section, shear lag', resistance: null, clause: '3.10.3' },
       working,
     );
-  }
-  working.requires('one row of bolts', end.rows === 1, 'two rows');
   const d0 = working.given('hole', 'd_0', end.hole, 'length');
-  const t = working.given('thickness', 't', section.thickness, 'length');
-  working.given('partial factor', 'γ_M2', gamma, 'factor');
   if (end.bolts === 1) {
+    const t = working.given('thickness', 't', section.thickness, 'length');
     const e2 = working.given('edge distance', 'e_2', end.edgeDistance, 'length');
-    const N = (2 * (e2 - 0.5 * d0) * t * fu) / gamma;
+    working.given('partial factor', 'γ_M2', gamma, 'factor');
+    const N = (2 * Math.max(0, e2 - 0.5 * d0) * t * fu) / gamma;
     return resistance(
       {
         ...common,
-        title: 'Rupture with shear lag, one bolt',
+        title: 'Rupture of the net section, one bolt',
         resistance: working.step('resistance', 'N_u,Rd', '2.0 (e_2 − 0.5 d_0) t f_u/γ_M2', N, 'force'),
-        standard: 'EN 1993-1-8',
         clause: '3.10.3, (3.11)',
       },
       working,
     );
   }
-  const An = smallerLegNet(question, end, working);
+  const An = oneLegNet(question, end, working);
   const p = working.given('pitch', 'p_1', end.pitch, 'length');
   const two = end.bolts === 2;
-  const low = two ? 0.4 : 0.5;
-  const beta = low + (0.7 - low) * Math.min(1, Math.max(0, (p / d0 - 2.5) / 2.5));
   const symbol = two ? 'β_2' : 'β_3';
-  working.step('reduction', symbol, 'Table 3.8 by p_1/d_0', beta, 'factor');
+  const beta = working.step(
+    'reduction',
+    symbol,
+    `Table 3.8: ${two ? '0.4' : '0.5'} up to p_1 = 2.5 d_0, 0.7 from 5 d_0`,
+    betaOf(end.bolts, p / d0),
+    'factor',
+  );
+  working.given('partial factor', 'γ_M2', gamma, 'factor');
   return resistance(
     {
       ...common,
-      title: 'Rupture with shear lag',
+      title: 'Rupture of the net section, shear lag',
       resistance: working.step(
         'resistance',
         'N_u,Rd',
@@ -135,53 +188,63 @@ function bolted(question: TensionQuestion, end: ResistingEnd) {
         (beta * An * fu) / gamma,
         'force',
       ),
-      standard: 'EN 1993-1-8',
       clause: two ? '3.10.3, (3.12)' : '3.10.3, (3.13)',
     },
     working,
   );
 }
 
-const isSingleAngle = ({ section }: TensionQuestion): boolean => section.shape === 'angle';
-
-/** An unequal angle by its smaller leg counts as an equal one of that leg. */
-function smallerLegNet(question: TensionQuestion, end: ResistingEnd, working: Working): number {
-  const { section } = question;
-  if (section.connectedLeg >= section.outstandingLeg) return netArea(question, end, working);
-  const A = smallerLegArea(question, working);
-  return working.step('net area', 'A_net', 'A_eq − d_0 t', A - end.hole * section.thickness, 'area');
+/** Table 3.8, linear between p_1 = 2.5 d_0 and 5 d_0. */
+export function betaOf(bolts: number, pitchOverHole: number): number {
+  const low = bolts === 2 ? 0.4 : 0.5;
+  return low + (0.7 - low) * Math.min(1, Math.max(0, (pitchOverHole - 2.5) / 2.5));
 }
 
+/** An unequal angle by its smaller leg counts as an equal one of that leg. */
+function oneLegNet(question: TensionQuestion, end: ResistingEnd, working: Working): number {
+  const { section } = question;
+  if (section.connectedLeg >= section.outstandingLeg) return netArea(question, end, working);
+  return netOf(smallerLegArea(question, working), 'A_eq', question, end, working);
+}
+
+/** Area of the equal angle, both of a pair. */
 function smallerLegArea({ section }: TensionQuestion, working: Working): number {
-  const lost = (section.outstandingLeg - section.connectedLeg) * section.thickness;
+  const lost = pliesOf(section) * (section.outstandingLeg - section.connectedLeg) * section.thickness;
+  const pair = pliesOf(section) === 2 ? '2 ' : '';
   return working.step(
     'area of an equal angle of the smaller leg',
     'A_eq',
-    'A − (h − b) t',
+    `A − ${pair}(h − b) t`,
     section.properties.area - lost,
     'area',
   );
 }
 
-function welded(question: TensionQuestion, end: ResistingEnd) {
+/** 4.13: the area that counts beside the weld. */
+function welded(question: TensionQuestion, end: ResistingEnd): Resistance {
   const working = new Working();
   const { section, steel, options } = question;
   const gamma = partialFactors(options).M0;
-  const oneLeg = isSingleAngle(question) && section.connectedLeg < section.outstandingLeg;
-  const A = oneLeg
-    ? smallerLegArea(question, working)
-    : working.given('effective area', 'A', section.properties.area, 'area');
-  working.given('partial factor', 'γ_M0', gamma, 'factor');
+  const held = heldBy(question, end);
+  if (held === 'in part') refuseShape(question, end, 'a flat, an angle or a pair', working);
+  const smaller = held !== 'whole' && section.connectedLeg < section.outstandingLeg;
+  const A = working.refused
+    ? null
+    : smaller
+      ? smallerLegArea(question, working)
+      : working.given('effective area', 'A', section.properties.area, 'area');
+  if (A !== null) working.given('partial factor', 'γ_M0', gamma, 'factor');
   return resistance(
     {
-      kind: 'net rupture',
-      title: 'Effective section at the weld',
-      against: 'tension',
+      ...RUPTURE,
       end: end.end,
-      resistance: working.step('resistance', 'N_Rd', 'A_eff f_y/γ_M0', (A * steel.fy) / gamma, 'force'),
+      title: 'Effective section at the weld',
+      resistance:
+        A === null
+          ? null
+          : working.step('resistance', 'N_Rd', 'A_eff f_y/γ_M0', (A * steel.fy) / gamma, 'force'),
       standard: 'EN 1993-1-8',
       clause: '4.13',
-      confidence: 'from memory, sure',
     },
     working,
   );
