@@ -37,6 +37,7 @@ export function blocksOf(question: TensionQuestion, end: ResistingEnd): readonly
   const rows = rowsOf(end, section);
   const [first, second] = rows;
   if (!first) return 'no bolts';
+  if (Math.min(end.edgeDistance, end.gauge) <= end.hole / 2) return 'a hole breaks its edge';
 
   const along = ({ start, bolts }: BoltRow): Cut => ({
     length: start + (bolts - 1) * end.pitch,
@@ -139,11 +140,7 @@ export function weakestBlock(
   working: Working,
 ): Block | null {
   if (typeof blocks === 'string') {
-    working.requires(
-      'a block that is worked out here: bolts in one leg, in both, or in a flat',
-      false,
-      blocks,
-    );
+    working.requires('a block that is worked out here: bolts inside one leg, both, or a flat', false, blocks);
     return null;
   }
   const [first, ...rest] = blocks;

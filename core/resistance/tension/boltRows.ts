@@ -67,6 +67,14 @@ export function netArea(question: TensionQuestion, end: ResistingEnd, working: W
   return netOf(gross, 'A_g', question, end, working);
 }
 
+/** Holes lie inside what is bolted, or there is no net section to speak of. Tees and channels are not drawn well enough to tell. */
+export function holesLieInside(section: ResistingSection, end: ResistingEnd, working: Working): boolean {
+  if (section.shape === 'tee' || section.shape === 'channel') return true;
+  const least = Math.min(end.edgeDistance, end.gauge) - end.hole / 2;
+  // Said only when it fails: it is no rule of a standard.
+  return least > 0 || working.requires('every hole lies inside the leg', false, 'a hole breaks its edge');
+}
+
 /** What holes leave of a given area. */
 export function netOf(
   gross: number,
@@ -76,6 +84,7 @@ export function netOf(
   working: Working,
 ): number {
   const { section, practice, options } = question;
+  holesLieInside(section, end, working);
   const { width, formula } = deductedWidth(practice, end, options.punchedHoles);
   working.given('thickness', 't', section.thickness, 'length');
   working.step('width deducted for a hole', 'd_h', formula, width, 'length');
@@ -84,7 +93,7 @@ export function netOf(
   const straight = plies * straightDeductionOf(holes, section.thickness);
   const each = plies === 2 ? '2 ' : '';
   const cut = working.step('taken by a straight cut', 'ΔA_1', `${each}Σd_h t`, straight, 'area');
-  if (!end.staggered) return working.step('net area', 'A_n', `${symbol} − ΔA_1`, gross - cut, 'area');
+  if (!end.staggered) return left(gross - cut, `${symbol} − ΔA_1`, working);
   const zigzag = working.step(
     'taken by the worst chain of holes',
     'ΔA_2',
@@ -92,11 +101,10 @@ export function netOf(
     plies * deductionOf(holes, section.thickness),
     'area',
   );
-  return working.step(
-    'net area',
-    'A_n',
-    `${symbol} − max(ΔA_1, ΔA_2)`,
-    gross - Math.max(cut, zigzag),
-    'area',
-  );
+  return left(gross - Math.max(cut, zigzag), `${symbol} − max(ΔA_1, ΔA_2)`, working);
+}
+
+function left(area: number, formula: string, working: Working): number {
+  if (area <= 0) working.requires('the holes leave some of the section', false, 'nothing is left of it');
+  return working.step('net area', 'A_n', formula, area, 'area');
 }

@@ -4,7 +4,7 @@ import { stressArea } from '../connection/fasteners.ts';
 import type { Resistance, ResistanceOptions, ResistingEnd, TensionQuestion } from '../model.ts';
 import { resistance, Working } from '../working.ts';
 import { type Block, blocksOf, weakestBlock } from './blocks.ts';
-import { netArea, netOf, pliesOf } from './boltRows.ts';
+import { holesLieInside, netArea, netOf, pliesOf } from './boltRows.ts';
 import { heldBy, isOneLeg, isWhole, refuseShape, type TensionPack } from './pack.ts';
 import { rodDiameter } from './rods.ts';
 
@@ -151,6 +151,7 @@ function oneLeg(question: TensionQuestion, end: ResistingEnd): Resistance {
     );
   const d0 = working.given('hole', 'd_0', end.hole, 'length');
   if (end.bolts === 1) {
+    holesLieInside(section, end, working);
     const t = working.given('thickness', 't', section.thickness, 'length');
     const e2 = working.given('edge distance', 'e_2', end.edgeDistance, 'length');
     working.given('partial factor', 'γ_M2', gamma, 'factor');
