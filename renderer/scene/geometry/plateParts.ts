@@ -1,5 +1,15 @@
 import type { Vec2, Vec3 } from '../../../core/geometry/vector.ts';
-import { add, along, cross, dot, scale, subtract, unit } from '../../../core/geometry/vector.ts';
+import {
+  add,
+  along,
+  cross,
+  distance,
+  dot,
+  length,
+  scale,
+  subtract,
+  unit,
+} from '../../../core/geometry/vector.ts';
 import type { AngleBar, Bar, BayLayout, Crossing, Gusset, Layout } from '../../../core/layout/model.ts';
 import { legInPlaneSize } from './angleParts.ts';
 import { boxOf, type Prism } from './prism.ts';
@@ -19,12 +29,18 @@ const CLEAT_THICKNESS = 8;
 const BASE_EDGE = 60;
 const BASE_THICKNESS = 25;
 
-/** A plate of the given thickness, its middle plane through the corners. Null for fewer than three corners. */
+/** Corners nearer than this are one, mm. */
+const ONE_CORNER = 1e-3;
+
+/** A plate of the given thickness, its middle plane through the corners. Null for fewer than three corners apart. */
 export function gussetPrism(gusset: Gusset): Prism | null {
-  const [first, second] = gusset.corners;
-  if (!first || !second || gusset.corners.length < 3) return null;
+  const [first, ...others] = gusset.corners;
+  const second = first && others.find((corner) => distance(first, corner) > ONE_CORNER);
+  if (!first || !second || others.length < 2) return null;
   const x = unit(subtract(second, first));
-  const y = unit(cross(gusset.normal, x));
+  const across = cross(gusset.normal, x);
+  if (length(across) < ONE_CORNER) return null;
+  const y = unit(across);
   const outline = gusset.corners.map((corner): Vec2 => {
     const from = subtract(corner, first);
     return [dot(from, x), dot(from, y)];

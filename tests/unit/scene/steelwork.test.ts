@@ -1,8 +1,9 @@
 import { describe, expect, it } from 'vitest';
-import { dot, subtract } from '../../../core/geometry/vector.ts';
+import { dot, subtract, type Vec3 } from '../../../core/geometry/vector.ts';
 import { anglePrisms } from '../../../renderer/scene/geometry/angleParts.ts';
 import { drawPlan, OVERLAY_DRAWS } from '../../../renderer/scene/geometry/drawPlan.ts';
 import { mergedSteel } from '../../../renderer/scene/geometry/mergedSteel.ts';
+import { gussetPrism } from '../../../renderer/scene/geometry/plateParts.ts';
 import { type Prism, pointOf } from '../../../renderer/scene/geometry/prism.ts';
 import { steelwork } from '../../../renderer/scene/geometry/steelwork.ts';
 import { crossedWall, laidOut, roof, walls } from './given/bays.ts';
@@ -72,6 +73,40 @@ describe('the steel of a wall bay', () => {
     const wall = crossedWall();
     const unknown = laidOut({ ...wall, diagonals: { ...wall.diagonals, section: 'no such angle' } });
     expect(steelwork(unknown, 'true').filter((part) => part.paint === 'diagonal')).toEqual([]);
+  });
+});
+
+describe('a plate whose corners say too little', () => {
+  const plate = (corners: readonly Vec3[]) => ({
+    node: 'n',
+    plane: 'p',
+    thickness: 10,
+    normal: [0, -1, 0] as const,
+    corners,
+  });
+
+  it('is drawn from its first corners that lie apart', () => {
+    const prism = gussetPrism(
+      plate([
+        [0, 0, 0],
+        [0, 0, 0],
+        [100, 0, 0],
+        [100, 0, 100],
+      ]),
+    );
+    expect(prism?.x).toEqual([1, 0, 0]);
+  });
+
+  it('is left out where none do', () => {
+    expect(
+      gussetPrism(
+        plate([
+          [0, 0, 0],
+          [0, 0, 0],
+          [0, 0, 0],
+        ]),
+      ),
+    ).toBeNull();
   });
 });
 
