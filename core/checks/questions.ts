@@ -5,18 +5,15 @@ import type {
   CompressionQuestion,
   ResistanceOptions,
   ResistingSection,
-  Steel,
   TensionQuestion,
 } from '../resistance/model.ts';
 import { resistingEnd } from '../resistance/resistingEnd.ts';
-import type { Restraint } from '../restraint/model.ts';
-import type { CheckedBar, CheckInput } from './input.ts';
+import type { CheckInput } from './input.ts';
+import type { PlacedSection } from './placedSection.ts';
 
 export function tensionQuestion(
   { project, practice }: CheckInput,
-  { angle }: CheckedBar,
-  stock: StockAngle,
-  steel: Steel,
+  { angle, stock, steel }: Pick<PlacedSection, 'angle' | 'stock' | 'steel'>,
 ): TensionQuestion {
   const section = resistingSection(stock, angle.spec.legInPlane);
   const end = (name: 'i' | 'j') =>
@@ -67,8 +64,7 @@ export function resistanceOptions(chosen: ResistanceSettings): ResistanceOptions
 
 export function compressionQuestion(
   question: TensionQuestion,
-  { bar, bowing }: CheckedBar,
-  restraint: Restraint,
+  { bar, restraint, criticalLoad }: Pick<PlacedSection, 'bar' | 'restraint' | 'criticalLoad'>,
 ): CompressionQuestion {
   const { x, y, u, v } = restraint.lanes;
   const inner = restraint.stations.slice(1, -1);
@@ -81,7 +77,7 @@ export function compressionQuestion(
       ...inner.filter(({ twistHeld }) => twistHeld).map(({ at }) => at),
       restraint.stations.at(-1)?.at ?? bar.length,
     ]),
-    criticalLoad: bowing && bowing.unsupported === null && bowing.real.N > 0 ? bowing.real.N : null,
+    criticalLoad,
     system: 'planar',
     joinedBetween: inner.some(({ held }) => held.ways > 0),
   };

@@ -3,6 +3,7 @@ import { RING_CLIP } from './elevation/sectionInPlace.ts';
 import { HATCHES } from './hatches.ts';
 import { markup, styleText } from './markup.ts';
 import type { ReportOptions } from './reportOptions.ts';
+import { actionsSheet } from './sheets/actionsSheet.ts';
 import { baySheet } from './sheets/baySheet.ts';
 import { pageStyle, sheetStyle } from './sheets/reportStyle.ts';
 import { titleSheet } from './sheets/titleSheet.ts';
@@ -25,6 +26,7 @@ export function reportHtml(assessment: Assessment, options: ReportOptions): stri
   const document = markup`<!doctype html>
 <html lang="en"><head><meta charset="utf-8"><meta name="viewport" content="width=device-width"><title>${project.name}: bracing report</title><style>${styleText(style)}</style></head><body>${HATCHES}${RING_CLIP}
 ${titleSheet(assessment, options)}
+${actionsSheet(assessment, options.units)}
 ${pages.map(({ bay, page }) => baySheet(assessment, bay, options, page))}
 </body></html>
 `;

@@ -3,7 +3,7 @@ import { add, dot, scale, subtract, type Vec3 } from '../geometry/vector.ts';
 import type { BarId } from '../layout/model.ts';
 import { type FramingPart, HELD_BY_THE_BUILDING, type Piece, TURN_ARM } from './framingPart.ts';
 import type { AxialBar, NoWay } from './model.ts';
-import { tensionOnlyEquilibrium } from './tensionOnly.ts';
+import { type SharedPattern, tensionOnlyEquilibrium } from './tensionOnly.ts';
 
 export interface PartLoads {
   /** N, by node id. */
@@ -29,14 +29,16 @@ export interface PartAnswer {
 export interface PartStiffness {
   readonly part: FramingPart;
   readonly rest: readonly (readonly [number, number, number])[];
+  /** Filled by the first solution, used by the others. */
+  readonly pattern: SharedPattern;
 }
 
 export function partStiffness(part: FramingPart): PartStiffness {
-  return { part, rest: [...bendingEntries(part), ...holdEntries(part)] };
+  return { part, rest: [...bendingEntries(part), ...holdEntries(part)], pattern: { symbolic: null } };
 }
 
 export function partEquilibrium(
-  { part, rest }: PartStiffness,
+  { part, rest, pattern }: PartStiffness,
   loads: PartLoads,
   start: Float64Array | null,
   bars: 'as counted on' | 'all both ways' = 'as counted on',
@@ -54,6 +56,7 @@ export function partEquilibrium(
   const found = tensionOnlyEquilibrium(
     { nodes: part.nodes.length, turns: part.turns, held: part.fixed, bars: working, rest, load },
     start,
+    pattern,
   );
   if (found.kind === 'no way to carry') return noWay(part, working, found.motion);
   return answerOf(part, working, found.displacement, found.forces, found.residual, load, found.slack);

@@ -19,6 +19,8 @@ export interface Candidate {
   readonly handling: number;
   readonly limit: number;
   readonly passes: boolean;
+  /** Of what acts: demand over resistance of the check that is used most, worst bar; null where nothing acts or it was not asked. */
+  readonly utilisation: number | null;
   /** Bolts do not fit the leg: gauge and edge distance (common practice); null when they do. */
   readonly fit: string | null;
   /** Why it fails, in words; null when it passes. */

@@ -1,6 +1,10 @@
 import { type InServiceReading, inServiceSlenderness } from '../bowing/exactSlenderness.ts';
 import type { Catalogues, Stock, StockAngle } from '../catalogue/model.ts';
 import { stockOf } from '../catalogue/stock.ts';
+import { steelOf } from '../checks/barChecks.ts';
+import type { BarChecks } from '../checks/model.ts';
+import { sectionChecks } from '../checks/sectionChecks.ts';
+import type { Forces } from '../forces/model.ts';
 import type { AngleBar, Bar, BarId, Layout, Placement } from '../layout/model.ts';
 import type { LimitInForce, Practice } from '../practice/model.ts';
 import type { Project } from '../project/model.ts';
@@ -15,7 +19,9 @@ export interface ShortlistSubject {
   readonly project: Project;
   readonly practice: Practice;
   readonly layout: Layout;
-  readonly diagonals: ReadonlyMap<BarId, { readonly limit: LimitInForce }>;
+  readonly diagonals: ReadonlyMap<BarId, { readonly limit: LimitInForce; readonly checks: BarChecks | null }>;
+  /** Forces of the combinations: a candidate must carry what acts. Null where nothing acts. */
+  readonly forces: Forces | null;
 }
 
 type Leg = 'longer' | 'shorter';
@@ -24,6 +30,8 @@ interface Seat {
   readonly bar: Bar;
   readonly angle: AngleBar;
   readonly limit: number;
+  /** What the bar carries; null where nothing acts. */
+  readonly demands: Pick<BarChecks, 'tension' | 'compression'> | null;
   /** Longest piece as fabricated, mm. */
   readonly piece: number;
   readonly stations: Readonly<Record<Leg, readonly Station[] | null>>;
@@ -43,7 +51,7 @@ export function shortlist(
   const stock = stockOf(project.settings.catalogue, project.ownStock, catalogues);
   const seats = seatsOf(subject, bars);
   const limit = seats.reduce((least, seat) => Math.min(least, seat.limit), Number.POSITIVE_INFINITY);
-  const candidates = seats.length > 0 ? tried(stock, subject.practice.asks, seats, options) : [];
+  const candidates = seats.length > 0 ? tried(stock, subject, seats, options) : [];
   const ranked = candidates.sort((p, q) => p.massPerMetre - q.massPerMetre || p.slenderness - q.slenderness);
   return {
     bars: seats.map((seat) => seat.bar.id),
@@ -59,15 +67,17 @@ function seatsOf(subject: ShortlistSubject, bars: readonly BarId[]): readonly Se
   const context = restraintContext(subject.layout);
   return bars.flatMap((id): Seat[] => {
     const bar = subject.layout.bars.get(id);
-    const limit = subject.diagonals.get(id)?.limit;
-    if (!bar?.angle || !limit) return [];
+    const diagonal = subject.diagonals.get(id);
+    if (!bar?.angle || !diagonal) return [];
+    const { limit, checks } = diagonal;
     const { angle } = bar;
     const basis = subject.project.settings.lengthBasis;
     const turned = (leg: Leg) => barStations(context, bar, withLeg(angle, leg), basis);
     const stations = { longer: turned('longer'), shorter: turned('shorter') };
     if (!stations.longer || !stations.shorter) return [];
     const piece = angle.cut.pieces.reduce((most, each) => Math.max(most, each.to - each.from), 0);
-    return [{ bar, angle, limit: limit.limit, piece, stations }];
+    const demands = subject.forces === null ? null : checks;
+    return [{ bar, angle, limit: limit.limit, demands, piece, stations }];
   });
 }
 
@@ -80,12 +90,17 @@ function withLeg(angle: AngleBar, leg: Leg): AngleBar {
 
 type Asks = Practice['asks'];
 
-function tried(stock: Stock, asks: Asks, seats: readonly Seat[], options: ShortlistOptions): Candidate[] {
+function tried(
+  stock: Stock,
+  subject: ShortlistSubject,
+  seats: readonly Seat[],
+  options: ShortlistOptions,
+): Candidate[] {
   return stock.choices
     .filter((angle) => isReached(stock, angle))
     .flatMap((angle) => {
       const legs = legsToTry(angle, seats, options);
-      return legs.map((leg) => candidateOf(asks, seats, angle, leg));
+      return legs.map((leg) => candidateOf(subject, seats, angle, leg));
     });
 }
 
@@ -111,7 +126,13 @@ interface Reading {
   readonly share: number;
 }
 
-function candidateOf(asks: Asks, seats: readonly Seat[], angle: StockAngle, leg: Leg): Candidate {
+function candidateOf(
+  subject: ShortlistSubject,
+  seats: readonly Seat[],
+  angle: StockAngle,
+  leg: Leg,
+): Candidate {
+  const { asks } = subject.practice;
   const readings = seats.map((seat): Reading => {
     const restraint = restraintWith(seat.bar, seat.angle, seat.stations[leg] ?? [], angle.properties);
     const handling = seat.piece / angle.properties.rv;
@@ -122,7 +143,9 @@ function candidateOf(asks: Asks, seats: readonly Seat[], angle: StockAngle, leg:
   const worst = readings.reduce((most, each) => (each.share > most.share ? each : most));
   const { governing, lanes } = worst.restraint;
   const slenderness = asks === 'handling' ? worst.handling : worst.inService.slenderness;
-  const passes = worst.share <= 1;
+  const slender = worst.share <= 1;
+  const used = slender ? mostUsed(subject, readings, angle, leg) : null;
+  const passes = slender && (used === null || used.utilisation <= 1);
   const fits = seats.map((seat) => fitOf(angle, leg, seat.angle));
   const fit = fits.find((reason) => reason !== null) ?? null;
   return {
@@ -142,8 +165,9 @@ function candidateOf(asks: Asks, seats: readonly Seat[], angle: StockAngle, leg:
     handling: worst.handling,
     limit: worst.seat.limit,
     passes,
+    utilisation: used?.utilisation ?? null,
     fit,
-    why: passes ? fit : whyNot(worst, slenderness, asks),
+    why: passes ? fit : slender ? (used?.says ?? null) : whyNot(worst, slenderness, asks),
     isPresent: seats.every(
       ({ angle: now }) =>
         now.stock?.designation === angle.designation &&
@@ -152,6 +176,50 @@ function candidateOf(asks: Asks, seats: readonly Seat[], angle: StockAngle, leg:
     ),
   };
 }
+
+interface Used {
+  readonly utilisation: number;
+  readonly says: string;
+}
+
+/** What acts on each bar against the candidate in its place, with the present bolts. The critical load is that of the in-service slenderness. */
+function mostUsed(
+  { project, practice, forces }: ShortlistSubject,
+  readings: readonly Reading[],
+  stock: StockAngle,
+  leg: Leg,
+): Used | null {
+  const input = { project, practice, forces };
+  const all = readings.flatMap(({ seat, restraint, inService }): readonly Used[] => {
+    if (!seat.demands) return [];
+    const steel = steelOf(input, seat.angle.spec.grade, stock.outline.thickness);
+    if (!steel) return [];
+    const criticalLoad = (Math.PI ** 2 * steel.E * stock.properties.area) / inService.slenderness ** 2;
+    const turned = withLeg(seat.angle, leg);
+    const width = leg === 'longer' ? stock.outline.longLeg : stock.outline.shortLeg;
+    const { gauge } = usualGauge(width, stock.catalogue === 'us' ? 'us' : 'metric');
+    const angle = { ...turned, placement: { ...turned.placement, gauge } };
+    const { governing } = sectionChecks(
+      input,
+      { bar: seat.bar, angle, stock, steel, restraint, criticalLoad },
+      seat.demands,
+    );
+    if (governing?.utilisation == null) return [];
+    const { resistance, demand, utilisation } = governing;
+    return [
+      {
+        utilisation,
+        says: `${seat.bar.mark}: ${resistance.title.toLowerCase()}, ${kilo(demand?.force ?? 0)} over ${kilo(resistance.resistance ?? 0)} kN, ${resistance.clause}`,
+      },
+    ];
+  });
+  return all.reduce<Used | null>(
+    (most, each) => (most === null || each.utilisation > most.utilisation ? each : most),
+    null,
+  );
+}
+
+const kilo = (newtons: number): string => (newtons / 1000).toFixed(1);
 
 function whyNot(worst: Reading, slenderness: number, asks: Asks): string {
   const { seat, restraint } = worst;

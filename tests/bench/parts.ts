@@ -3,6 +3,7 @@ import { assessing } from './assessing.ts';
 import { bundle } from './bundle.ts';
 import { choosing } from './choosing.ts';
 import { drawing } from './drawing.ts';
+import { forces } from './forces.ts';
 import type { Row } from './row.ts';
 import { sparse } from './sparse.ts';
 import { stability } from './stability.ts';
@@ -18,6 +19,7 @@ export const PARTS: readonly Part[] = [
   { name: 'shortlist and remedies', rows: choosing },
   { name: 'critical loads', rows: stability },
   { name: 'sparse factors', rows: sparse },
+  { name: 'forces and checks', rows: forces },
   { name: 'drawing', rows: drawing },
   { name: 'bundle', rows: bundle },
 ];

@@ -32,5 +32,15 @@ function lookOf({ bar, angle, diagonal }: SheetSubject): string | null {
   if (hasStory || (angle.mark.overrides ?? []).length > 0) return null;
   const { spec, side, ends, cut } = angle;
   const { roll = 0 } = angle.mark;
-  return JSON.stringify([spec, side, roll, ends, Math.round(bar.length), Math.round(cut.total)]);
+  const { tension = null, compression = null } = diagonal.checks ?? {};
+  return JSON.stringify([
+    spec,
+    side,
+    roll,
+    ends,
+    Math.round(bar.length),
+    Math.round(cut.total),
+    tension,
+    compression,
+  ]);
 }

@@ -26,12 +26,15 @@ ${SIGNATURES}
 
 const SIGNATURES: Markup = markup`<div class="signed">${['laid out', 'checked', 'issued'].map((step) => markup`<div><b>${step}</b><span>by</span><i></i><span>date</span><i class="short"></i></div>`)}</div>`;
 
-function scopeWords({ layout, diagonals }: Assessment): string {
+function scopeWords({ layout, diagonals, forces }: Assessment): string {
   const bays = layout.bays.length;
   const [bars, many] = [diagonals.size, bays === 1 ? 'one bay' : `${bays} bays`];
   return (
     `${bars === 1 ? 'One diagonal' : `${bars} diagonals`} of angle in ${many}: their set-out, their joins, the length over which each can bow about each axis, and its slenderness against its limit. ` +
-    'Not covered: forces, the resistance of bars, bolts and welds, columns, beams, struts, purlins, footings, gusset plates, and the steps of erection.'
+    (forces === null
+      ? 'Resistances stand alone, since nothing acts. '
+      : 'Forces by the combinations given, and the resistance of the diagonals and their ends. ') +
+    'Not covered: columns, beams, struts, purlins, footings, gusset plates, and the steps of erection.'
   );
 }
 
