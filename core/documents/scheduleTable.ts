@@ -2,17 +2,22 @@ import type { UnitSystem } from '../project/model.ts';
 import { AXES } from '../section/model.ts';
 import { grouped } from '../units/figures.ts';
 import { showForce } from '../units/loads.ts';
-import { showSlenderness } from '../units/quantity.ts';
+import { showLength, showSlenderness } from '../units/quantity.ts';
 import { KG_PER_POUND, unitNames } from '../units/unitSystem.ts';
 import type { RowVerdict, ScheduleRow } from './model.ts';
 import { oneLine } from './oneLine.ts';
+import { overrideWords } from './overrideWords.ts';
 import { type TextColumn, textTable } from './textTable.ts';
 
 const ABSENT = '–';
 
+/** Stands behind a figure that a length or factor set by hand has made. */
+const BY_HAND = '*';
+
 /**
- * The schedule as a table for the terminal: metres to the centimetre and kg, or feet to the hundredth and lb.
- * The verdict that the practice asks for stands without brackets, the other within them. Findings follow below, one a line.
+ * The schedule as a table for the terminal: metres to the centimetre and kg, or feet and inches to the sixteenth and lb.
+ * The verdict that the practice asks for stands without brackets, the other within them.
+ * What is set by hand follows below with its reason, then the findings, one a line.
  */
 export function scheduleTable(rows: readonly ScheduleRow[], units: UnitSystem): string {
   if (rows.length === 0) return 'No diagonals.\n';
@@ -24,12 +29,12 @@ export function scheduleTable(rows: readonly ScheduleRow[], units: UnitSystem): 
   const massTotal = rows.reduce((sum, row) => sum + (row.massTotal ?? 0), 0);
   const pieces = rows.reduce((sum, row) => sum + row.numberOff * Math.max(1, row.pieces.length), 0);
   const total = `${pieces} pieces, ${mass(massTotal, units)} ${units === 'us' ? 'lb' : 'kg'} in all`;
-  const found = findingLines(rows);
-  return [table, total, ...(found.length > 0 ? ['', ...found] : [])].join('\n').concat('\n');
+  const below = [handLines(rows, units), findingLines(rows)].filter((lines) => lines.length > 0);
+  return [table, total, ...below.flatMap((lines) => ['', ...lines])].join('\n').concat('\n');
 }
 
 function columnsFor(units: UnitSystem): readonly TextColumn[] {
-  const [lengthUnit, massUnit] = units === 'us' ? ['ft', 'lb'] : ['m', 'kg'];
+  const [lengthUnit, massUnit] = units === 'us' ? ['ft-in', 'lb'] : ['m', 'kg'];
   const right = (head: string): TextColumn => ({ head, align: 'right' });
   const left = (head: string): TextColumn => ({ head, align: 'left' });
   return [
@@ -79,7 +84,11 @@ function cellsOf(row: ScheduleRow, units: UnitSystem): readonly string[] {
     length(row.setOutLength, units),
     length(row.cutLength, units),
     row.massEach === null ? ABSENT : mass(row.massEach, units),
-    ...AXES.map((axis) => (unbraced === null ? ABSENT : length(unbraced[axis], units))),
+    ...AXES.map((axis) => {
+      if (unbraced === null) return ABSENT;
+      const byHand = row.overrides.some((override) => override.axis === axis);
+      return `${length(unbraced[axis], units)}${byHand ? BY_HAND : ''}`;
+    }),
     governing === null ? ABSENT : axisCell(governing),
     governing === null ? ABSENT : showSlenderness(governing.slenderness, row.limit),
     showSlenderness(row.limit),
@@ -100,6 +109,15 @@ function verdictCell(verdict: RowVerdict | null): string {
   return verdict.asked ? said : `(${said})`;
 }
 
+/** Each length or factor set by hand, once a bar and axis, with its reason. */
+function handLines(rows: readonly ScheduleRow[], units: UnitSystem): readonly string[] {
+  return rows.flatMap((row) =>
+    row.overrides.map((override) =>
+      oneLine(`${BY_HAND} ${row.bay} ${row.mark}, set by hand: ${overrideWords(override, units)}`),
+    ),
+  );
+}
+
 /** Each finding once, with the marks of the bars it names. */
 function findingLines(rows: readonly ScheduleRow[]): readonly string[] {
   const lines = new Map<string, string>();
@@ -109,10 +127,8 @@ function findingLines(rows: readonly ScheduleRow[]): readonly string[] {
   return [...lines.values()];
 }
 
-const MM_PER_FOOT = 304.8;
-
 function length(mm: number, units: UnitSystem): string {
-  return grouped(units === 'us' ? mm / MM_PER_FOOT : mm / 1000, 2);
+  return units === 'us' ? showLength(mm, units, 'bare') : grouped(mm / 1000, 2);
 }
 
 function mass(kg: number, units: UnitSystem): string {

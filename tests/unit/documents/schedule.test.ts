@@ -153,6 +153,24 @@ describe('the schedule as a table', () => {
     expect(scheduleTable(schedule, 'metric')).toContain('(320 OVER)');
   });
 
+  it('marks a length set by hand, and gives axis, length, factor and reason below', () => {
+    const overrides = [{ axis: 'y', length: 2500, factor: 0.9, reason: 'tied back, see sketch 4' }] as const;
+    const { schedule } = crossedTier({ join: { kind: 'bolted' }, bars: { 't1.rise': { overrides } } });
+    const lines = scheduleTable(schedule, 'metric').split('\n');
+    // 2500 × 0.9 = 2250 mm about y; the other three, and the other bar, are as found.
+    expect(lines.find((line) => /^B +D1 /.test(line))).toMatch(/ 2\.50 +2\.25\* +2\.50 +2\.50 /);
+    expect(lines.find((line) => /^B +D2 /.test(line))).not.toContain('*');
+    expect(lines).toContain('* B D1, set by hand: y: 2.50 m × 0.9, because tied back, see sketch 4');
+  });
+
+  it('gives US lengths in feet and inches to the sixteenth, as they are cut', () => {
+    const { schedule } = crossedTier({ join: { kind: 'bolted' } });
+    const lines = scheduleTable(schedule, 'us').split('\n');
+    expect(lines[0]).toMatch(/set-out ft-in +cut ft-in/);
+    // 5000/25.4 = 196.850 in = 16 ft 4 27.2/32 → 16'-4 7/8"; 4380/25.4 = 172.441 in = 14 ft 4 7.06/16 in.
+    expect(lines[2]).toContain('16\'-4 7/8"  14\'-4 7/16"');
+  });
+
   it('says when there is nothing to list', () => {
     expect(scheduleTable([], 'metric')).toBe('No diagonals.\n');
   });
