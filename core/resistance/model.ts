@@ -98,7 +98,7 @@ export interface Resistance {
   /** The rule is this practice's own; false where it is borrowed as an engineering choice, which `note` says. */
   readonly ownRule: boolean;
   readonly conditions: readonly Condition[];
-  /** All conditions are met. */
+  /** All conditions are met. A least distance of the end that is broken is told as one, and the resistance still stands. */
   readonly applies: boolean;
   /** In order of working; the last is the resistance itself. */
   readonly steps: readonly Step[];
@@ -106,7 +106,10 @@ export interface Resistance {
   readonly note: string | null;
 }
 
-/** The shape as resistance needs it. Legs only for angles. */
+/**
+ * The shape as resistance needs it. Legs only for angles. Of a pair `properties` are those of both angles, thickness and legs those of one;
+ * of a flat the connected leg is its width and the gauge is from one edge; of a rod the area alone counts.
+ */
 export interface ResistingSection {
   readonly designation: string;
   readonly shape: SectionShape;
@@ -134,8 +137,9 @@ export type SectionShape =
 /** How one end is fixed, ready for the checks. mm. */
 export interface ResistingEnd {
   readonly end: 'i' | 'j';
+  /** Of a rod "bolted" means a thread and a nut. */
   readonly kind: 'bolted' | 'welded';
-  /** All bolts, and how many rows (gauge lines along the bar) they stand in. */
+  /** All bolts, half of them through the other leg where both are held, and how many rows (gauge lines along a leg) they stand in. */
   readonly bolts: number;
   readonly rows: 1 | 2;
   /** Bolts of the second row stand half a pitch farther on. */

@@ -143,7 +143,9 @@ describe('EN 1993-1-8 3.10.3: Steel Buildings in Europe, part 8, worked example 
 });
 
 describe('AISC Design Examples v16 (results as printed; inputs from memory, not read: see each)', () => {
-  // Remembered: L4x4x1/2 to ASTM A572 or A529 grade 50 (50 and 65 ksi), 3/4 in bolts at 3 in. A 3.75, x̄ 1.18, r_z 0.776 in, as in AISC's shapes.
+  // Remembered: L4x4x1/2, 3/4 in bolts at 3 in; A 3.75, x̄ 1.18, r_z 0.776 in as AISC's shapes have them. The printed U and L_max fit these and no grade.
+  // The grade, 50 and 65 ksi, and the eight bolts of D.6 are taken because the printed strengths fit them: with A36 D.2 would have 125 kips.
+  // So these two strengths confirm the arithmetic, and only U and L_max the rule.
   const strength = { fy: 50 * KSI, fu: 65 * KSI };
   const single = printedAngle(4 * INCH, 4 * INCH, INCH / 2, 3.75 * INCH ** 2, 1.18 * INCH);
   const holes = {
