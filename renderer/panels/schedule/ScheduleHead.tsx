@@ -3,10 +3,12 @@ import type { UnitSystem } from '../../../core/project/model.ts';
 import { unitNames } from '../../../core/units/unitSystem.ts';
 import { columnLengthUnit } from '../../controls/figures.ts';
 import type { Column } from './scheduleColumns.ts';
+import type { ScheduleGrid } from './scheduleGrid.ts';
 import type { ScheduleView } from './scheduleView.ts';
 
 interface ScheduleHeadProps {
   readonly columns: readonly Column[];
+  readonly grid: ScheduleGrid;
   readonly view: ScheduleView;
   readonly units: UnitSystem;
   onChange(view: ScheduleView): void;
@@ -28,7 +30,7 @@ const DOWN_FIRST = new Set([
   'ruleError',
 ]);
 
-export function ScheduleHead({ columns, view, units, onChange }: ScheduleHeadProps): JSX.Element {
+export function ScheduleHead({ columns, grid, view, units, onChange }: ScheduleHeadProps): JSX.Element {
   const { column: sorted, down } = view.sort;
   const sortBy = (column: Column): void => {
     const again = column.id === sorted;
@@ -37,7 +39,12 @@ export function ScheduleHead({ columns, view, units, onChange }: ScheduleHeadPro
   return (
     // biome-ignore lint/a11y/useSemanticElements: rows that come and go as one scrolls cannot be a table element.
     // biome-ignore lint/a11y/useFocusableInteractive: the buttons in it take the focus.
-    <div role="row" aria-rowindex={1} className="schedule-head">
+    <div
+      role="row"
+      aria-rowindex={1}
+      className="schedule-head"
+      style={{ gridTemplateColumns: grid.columns, minWidth: grid.least }}
+    >
       {columns.map((column) => (
         // biome-ignore lint/a11y/useSemanticElements: as above.
         // biome-ignore lint/a11y/useFocusableInteractive: as above.
@@ -66,9 +73,8 @@ function unitText({ unit }: Column, units: UnitSystem): string {
     case 'length':
       return columnLengthUnit(units);
     case 'exact':
-      return units === 'us' ? 'ft-in' : 'mm';
     case 'small':
-      return units === 'us' ? 'in' : 'mm';
+      return units === 'us' ? 'ft-in' : 'mm';
     case 'mass':
       return unitNames(units).mass;
     case 'axis':

@@ -1,11 +1,13 @@
 import { useVirtualizer } from '@tanstack/react-virtual';
 import { type JSX, type KeyboardEvent, useEffect, useMemo, useRef } from 'react';
+import { useFontsLoaded } from '../../controls/useFontsLoaded.ts';
 import { useActions, useWindow } from '../../shell/services.tsx';
 import { shownAssessment, shownProject } from '../../store/shown.ts';
 import { ROW_DEEP } from './rowDeep.ts';
 import { ScheduleHead } from './ScheduleHead.tsx';
 import { ScheduleRowView } from './ScheduleRowView.tsx';
 import { COLUMN_SETS } from './scheduleColumns.ts';
+import { scheduleGrid } from './scheduleGrid.ts';
 import { type ScheduleView, seenRows } from './scheduleView.ts';
 import './schedule.css';
 
@@ -23,6 +25,9 @@ export function SchedulePanel({ view, onChange }: SchedulePanelProps): JSX.Eleme
   const scroller = useRef<HTMLDivElement>(null);
   const rows = useMemo(() => (assessment === null ? [] : seenRows(assessment, view)), [assessment, view]);
   const columns = COLUMN_SETS[view.columns];
+  const fonts = useFontsLoaded();
+  // biome-ignore lint/correctness/useExhaustiveDependencies: what was measured before the typefaces came is measured again.
+  const grid = useMemo(() => scheduleGrid(columns, rows, units), [columns, rows, units, fonts]);
   const at = rows.findIndex(({ row }) => row.bar === chosen);
   const virtual = useVirtualizer({
     count: rows.length,
@@ -47,24 +52,24 @@ export function SchedulePanel({ view, onChange }: SchedulePanelProps): JSX.Eleme
     choose(to);
   };
 
-  const template = columns.map(({ width }) => width).join(' ');
   return (
     // biome-ignore lint/a11y/useSemanticElements: rows that come and go as one scrolls cannot be a table element.
     <div
       ref={scroller}
       className="schedule"
-      data-columns={view.columns}
       role="grid"
       aria-label="Schedule"
       aria-rowcount={rows.length + 1}
       aria-activedescendant={at >= 0 ? `schedule-${at}` : undefined}
       tabIndex={0}
       onKeyDown={onKeyDown}
-      style={{ ['--columns' as string]: template }}
     >
-      <ScheduleHead columns={columns} view={view} units={units} onChange={onChange} />
+      <ScheduleHead columns={columns} grid={grid} view={view} units={units} onChange={onChange} />
       {/* biome-ignore lint/a11y/useSemanticElements: as above. */}
-      <div role="rowgroup" style={{ height: virtual.getTotalSize(), position: 'relative' }}>
+      <div
+        role="rowgroup"
+        style={{ height: virtual.getTotalSize(), minWidth: grid.least, position: 'relative' }}
+      >
         {virtual.getVirtualItems().map((item) => {
           const row = rows[item.index];
           return row === undefined ? null : (
@@ -75,6 +80,7 @@ export function SchedulePanel({ view, onChange }: SchedulePanelProps): JSX.Eleme
               top={item.start}
               seen={row}
               columns={columns}
+              grid={grid}
               units={units}
               chosen={row.row.bar === chosen}
             />

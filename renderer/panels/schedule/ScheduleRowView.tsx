@@ -9,6 +9,7 @@ import { beforeAssessment } from '../../store/shown.ts';
 import { cellText, slendernessText } from './cellText.ts';
 import { ROW_DEEP } from './rowDeep.ts';
 import type { Column, ColumnId } from './scheduleColumns.ts';
+import type { ScheduleGrid } from './scheduleGrid.ts';
 import type { SeenRow } from './seenRow.ts';
 
 interface ScheduleRowProps {
@@ -17,6 +18,7 @@ interface ScheduleRowProps {
   readonly top: number;
   readonly seen: SeenRow;
   readonly columns: readonly Column[];
+  readonly grid: ScheduleGrid;
   readonly units: UnitSystem;
   readonly chosen: boolean;
 }
@@ -27,6 +29,7 @@ export function ScheduleRowView({
   top,
   seen,
   columns,
+  grid,
   units,
   chosen,
 }: ScheduleRowProps): JSX.Element {
@@ -43,7 +46,7 @@ export function ScheduleRowView({
       aria-selected={chosen}
       className="schedule-row"
       data-hovered={hovered || undefined}
-      style={{ transform: `translateY(${top}px)`, height: ROW_DEEP }}
+      style={{ transform: `translateY(${top}px)`, height: ROW_DEEP, gridTemplateColumns: grid.columns }}
       onClick={() => actions.selectBar(seen.row.bar)}
       onPointerEnter={() => actions.hover(seen.row.bar)}
       onPointerLeave={() => actions.hover(null)}

@@ -43,6 +43,11 @@ export function cellText({ id, unit }: Column, seen: SeenRow, units: UnitSystem)
       return STATUS_WORDS[status];
     case 'off':
       return String(row.numberOff);
+    case 'cut':
+      // To judge a bar by, what is cut from it in all; to make it, its pieces.
+      return unit === 'exact' && row.pieces.length > 1
+        ? row.pieces.map((mm) => makingLength(mm, units)).join(' + ')
+        : figure(unit, row.cutLength, units);
     case 'holes':
       return row.crossingHoles.map((mm) => makingLength(mm, units)).join(', ') || '–';
     default: {
@@ -96,11 +101,14 @@ function figure(unit: Column['unit'], value: number, units: UnitSystem): string 
     case 'mass':
       return showMass(value, units, 'bare');
     case 'small':
-      return showLength(value, units, 'small').replace(/ ?mm$/, '');
+      return units === 'us'
+        ? makingLength(value, units)
+        : showLength(value, units, 'small').replace(/ ?mm$/, '');
     case 'exact':
       return makingLength(value, units);
     case 'length':
-      return columnLength(value, units);
+      // Inches alone would not do to cut a bar by, nor to check one.
+      return units === 'us' ? makingLength(value, units) : columnLength(value, units);
     case 'axis':
     case 'force':
     case 'percent':

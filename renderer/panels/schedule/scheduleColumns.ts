@@ -38,61 +38,63 @@ export interface Column {
   readonly sub?: string;
   readonly unit?: 'length' | 'exact' | 'mass' | 'small' | 'axis' | 'force' | 'percent';
   readonly left?: boolean;
-  /** CSS grid width. */
-  readonly width: string;
+  /** Least width, px; wider where its longest text is. */
+  readonly least: number;
+  /** Share of the room left over; 0 takes none. */
+  readonly share: number;
 }
 
 export const BRACING_COLUMNS: readonly Column[] = [
-  { id: 'mark', head: 'Mark', left: true, width: '54px' },
-  { id: 'bay', head: 'Bay', left: true, width: '44px' },
-  { id: 'section', head: 'Section', left: true, width: 'minmax(74px, 1.2fr)' },
-  { id: 'setOut', head: 'Set-out', unit: 'length', width: 'minmax(56px, 1fr)' },
-  { id: 'cut', head: 'Cut', unit: 'length', width: 'minmax(56px, 1fr)' },
-  { id: 'mass', head: 'Mass', unit: 'mass', width: 'minmax(50px, 0.9fr)' },
-  { id: 'Lx', head: 'L', sub: 'x', unit: 'length', width: 'minmax(52px, 0.9fr)' },
-  { id: 'Ly', head: 'L', sub: 'y', unit: 'length', width: 'minmax(52px, 0.9fr)' },
-  { id: 'Lu', head: 'L', sub: 'u', unit: 'length', width: 'minmax(52px, 0.9fr)' },
-  { id: 'Lv', head: 'L', sub: 'v', unit: 'length', width: 'minmax(52px, 0.9fr)' },
-  { id: 'governing', head: 'Governing', unit: 'axis', width: 'minmax(64px, 1fr)' },
-  { id: 'slenderness', head: 'Slenderness', width: '118px' },
-  { id: 'limit', head: 'Limit', width: '46px' },
-  { id: 'status', head: 'Status', left: true, width: 'minmax(86px, 1.2fr)' },
+  { id: 'mark', head: 'Mark', left: true, least: 54, share: 0 },
+  { id: 'bay', head: 'Bay', left: true, least: 44, share: 0 },
+  { id: 'section', head: 'Section', left: true, least: 74, share: 1.2 },
+  { id: 'setOut', head: 'Set-out', unit: 'length', least: 56, share: 1 },
+  { id: 'cut', head: 'Cut', unit: 'length', least: 56, share: 1 },
+  { id: 'mass', head: 'Mass', unit: 'mass', least: 50, share: 0.9 },
+  { id: 'Lx', head: 'L', sub: 'x', unit: 'length', least: 52, share: 0.9 },
+  { id: 'Ly', head: 'L', sub: 'y', unit: 'length', least: 52, share: 0.9 },
+  { id: 'Lu', head: 'L', sub: 'u', unit: 'length', least: 52, share: 0.9 },
+  { id: 'Lv', head: 'L', sub: 'v', unit: 'length', least: 52, share: 0.9 },
+  { id: 'governing', head: 'Governing', unit: 'axis', least: 64, share: 1 },
+  { id: 'slenderness', head: 'Slenderness', least: 118, share: 0 },
+  { id: 'limit', head: 'Limit', least: 46, share: 0 },
+  { id: 'status', head: 'Status', left: true, least: 86, share: 1.2 },
 ];
 
 export const MAKING_COLUMNS: readonly Column[] = [
-  { id: 'mark', head: 'Mark', left: true, width: '54px' },
-  { id: 'bay', head: 'Bay', left: true, width: '44px' },
-  { id: 'off', head: 'Off', width: '40px' },
-  { id: 'hand', head: 'Hand', left: true, width: '56px' },
-  { id: 'section', head: 'Section', left: true, width: 'minmax(74px, 1.1fr)' },
-  { id: 'grade', head: 'Grade', left: true, width: 'minmax(66px, 0.8fr)' },
-  { id: 'setOut', head: 'Set-out', unit: 'exact', width: 'minmax(74px, 1fr)' },
-  { id: 'setBackI', head: 'Set-back i', unit: 'small', width: 'minmax(58px, 0.8fr)' },
-  { id: 'setBackJ', head: 'Set-back j', unit: 'small', width: 'minmax(58px, 0.8fr)' },
-  { id: 'cut', head: 'Cut', unit: 'exact', width: 'minmax(74px, 1fr)' },
-  { id: 'holes', head: 'Holes from i', unit: 'exact', width: 'minmax(92px, 1.2fr)' },
-  { id: 'leg', head: 'Leg in plane', left: true, width: 'minmax(68px, 0.8fr)' },
-  { id: 'placed', head: 'Placed', left: true, width: 'minmax(106px, 1fr)' },
-  { id: 'packer', head: 'Packer', unit: 'small', width: '56px' },
-  { id: 'mass', head: 'Mass', unit: 'mass', width: 'minmax(50px, 0.8fr)' },
-  { id: 'massTotal', head: 'All', unit: 'mass', width: 'minmax(50px, 0.8fr)' },
+  { id: 'mark', head: 'Mark', left: true, least: 54, share: 0 },
+  { id: 'bay', head: 'Bay', left: true, least: 44, share: 0 },
+  { id: 'off', head: 'Off', least: 40, share: 0 },
+  { id: 'hand', head: 'Hand', left: true, least: 56, share: 0 },
+  { id: 'section', head: 'Section', left: true, least: 74, share: 1.1 },
+  { id: 'grade', head: 'Grade', left: true, least: 66, share: 0.8 },
+  { id: 'setOut', head: 'Set-out', unit: 'exact', least: 74, share: 1 },
+  { id: 'setBackI', head: 'Set-back i', unit: 'small', least: 58, share: 0.8 },
+  { id: 'setBackJ', head: 'Set-back j', unit: 'small', least: 58, share: 0.8 },
+  { id: 'cut', head: 'Cut', unit: 'exact', least: 74, share: 1 },
+  { id: 'holes', head: 'Holes from i', unit: 'exact', least: 92, share: 1.2 },
+  { id: 'leg', head: 'Leg in plane', left: true, least: 68, share: 0.8 },
+  { id: 'placed', head: 'Placed', left: true, least: 106, share: 1 },
+  { id: 'packer', head: 'Packer', unit: 'small', least: 56, share: 0 },
+  { id: 'mass', head: 'Mass', unit: 'mass', least: 50, share: 0.8 },
+  { id: 'massTotal', head: 'All', unit: 'mass', least: 50, share: 0.8 },
 ];
 
 /** By the marks, by critical load, and what lies between. */
 export const BOWING_COLUMNS: readonly Column[] = [
-  { id: 'mark', head: 'Mark', left: true, width: '54px' },
-  { id: 'bay', head: 'Bay', left: true, width: '44px' },
-  { id: 'section', head: 'Section', left: true, width: 'minmax(74px, 1.2fr)' },
-  { id: 'setOut', head: 'Set-out', unit: 'length', width: 'minmax(56px, 1fr)' },
-  { id: 'slenderness', head: 'Slenderness', width: '118px' },
-  { id: 'critical', head: 'By critical load', width: 'minmax(92px, 1.1fr)' },
-  { id: 'criticalLoad', head: 'N', sub: 'cr', unit: 'force', width: 'minmax(56px, 0.9fr)' },
-  { id: 'ruleError', head: 'Rule off by', unit: 'percent', width: 'minmax(66px, 0.9fr)' },
-  { id: 'grip', head: 'Least grip', unit: 'percent', width: 'minmax(62px, 0.9fr)' },
-  { id: 'twist', head: 'With twist', unit: 'percent', width: 'minmax(64px, 0.9fr)' },
-  { id: 'tensionShare', head: 'T/C', width: '46px' },
-  { id: 'limit', head: 'Limit', width: '46px' },
-  { id: 'status', head: 'Status', left: true, width: 'minmax(86px, 1.2fr)' },
+  { id: 'mark', head: 'Mark', left: true, least: 54, share: 0 },
+  { id: 'bay', head: 'Bay', left: true, least: 44, share: 0 },
+  { id: 'section', head: 'Section', left: true, least: 74, share: 1.2 },
+  { id: 'setOut', head: 'Set-out', unit: 'length', least: 56, share: 1 },
+  { id: 'slenderness', head: 'Slenderness', least: 118, share: 0 },
+  { id: 'critical', head: 'By critical load', least: 92, share: 1.1 },
+  { id: 'criticalLoad', head: 'N', sub: 'cr', unit: 'force', least: 56, share: 0.9 },
+  { id: 'ruleError', head: 'Rule off by', unit: 'percent', least: 66, share: 0.9 },
+  { id: 'grip', head: 'Least grip', unit: 'percent', least: 62, share: 0.9 },
+  { id: 'twist', head: 'With twist', unit: 'percent', least: 64, share: 0.9 },
+  { id: 'tensionShare', head: 'T/C', least: 46, share: 0 },
+  { id: 'limit', head: 'Limit', least: 46, share: 0 },
+  { id: 'status', head: 'Status', left: true, least: 86, share: 1.2 },
 ];
 
 /** The sets of columns that the schedule can show. */

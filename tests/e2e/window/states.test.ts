@@ -85,10 +85,32 @@ describe('a field', () => {
       .first();
     await width.fill("15'-9");
     await width.press('Enter');
-    // 15'-9" is 4800.6 mm; with 4.2 m up: √(4800.6² + 4200²) = 6378.6 mm, 20'-11 1/8", to the inch in the schedule.
+    // 15'-9" is 4800.6 mm; with 4.2 m up: √(4800.6² + 4200²) = 6378.6 mm, 20'-11 1/8".
     await expect
       .poll(async () => (await row(page, 'D1').innerText()).replace(/\s+/g, ' '))
-      .toContain('20\'-11" ');
+      .toContain('20\'-11 1/8" ');
+    await close();
+  });
+});
+
+describe('the schedule in US units', () => {
+  it.each([1280, 1440])('cuts no figure short in a window %i px wide', async (width) => {
+    const { page, close } = await stand.open({ width, height: 800 });
+    await choose(page, 'D1');
+    await page.getByRole('button', { name: /^Units: metric/ }).click();
+    for (const columns of ['Bracing', 'Making', 'Bowing']) {
+      await page.getByText(columns, { exact: true }).last().click();
+      await expect.poll(() => row(page, 'D1').textContent()).toContain('24\'-0 3/8"');
+      await expect
+        .poll(() =>
+          page
+            .locator('.schedule-row > div')
+            .evaluateAll((cells) =>
+              cells.filter((cell) => cell.scrollWidth > cell.clientWidth).map((cell) => cell.textContent),
+            ),
+        )
+        .toEqual([]);
+    }
     await close();
   });
 });
