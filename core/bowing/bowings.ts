@@ -4,6 +4,7 @@ import { bayFrame, GUSSETED } from '../frame/bayFrame.ts';
 import type { Mechanism } from '../frame/model.ts';
 import { offeredTo } from '../frame/push.ts';
 import { FrameSolver } from '../frame/solver.ts';
+import { isJoined } from '../layout/joined.ts';
 import type { BarId, BayLayout, Crossing, Layout } from '../layout/model.ts';
 import type { Bay } from '../project/model.ts';
 import type { Restraint } from '../restraint/model.ts';
@@ -109,6 +110,3 @@ function partnersOf(
 export function shareAt({ forces }: BowingInput, bar: BarId, crossing: Crossing): PartnerShare | null {
   return forces && partnerShare(forces, bar, crossing.a === bar ? crossing.b : crossing.a);
 }
-
-const isJoined = ({ join }: Crossing): boolean =>
-  join !== null && join.kind !== 'none' && join.kind !== 'hung';

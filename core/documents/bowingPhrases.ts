@@ -37,6 +37,8 @@ export function whyItSwings(claims: readonly Claim[], nameOf: NameOf): string {
         return reason.marked
           ? `is not joined to ${names}`
           : `has ${unmarkedCrossings(names)}, taken as not joined`;
+      case 'too far apart':
+        return `lies too far from ${names} to be joined`;
       case 'hung':
         return `only hangs from ${names}`;
       case 'line free along itself':
@@ -91,6 +93,7 @@ function holderNamed(reason: HoldReason): string {
     case 'partner only bends':
     case 'single plate hinges':
     case 'not joined':
+    case 'too far apart':
       return reason.partner;
     case 'hung':
     case 'line held along itself':

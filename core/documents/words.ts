@@ -78,6 +78,8 @@ export function reasonText(reason: HoldReason): string {
       return reason.marked
         ? `Not joined to ${reason.partner}.`
         : `The crossing with ${reason.partner} is unmarked, and is taken as not joined.`;
+    case 'too far apart':
+      return `${reason.partner} lies too far from it for any join: nothing is taken from the mark.`;
     case 'hung':
       return `Hung from ${reason.line}: that stops sag, and holds nothing.`;
     case 'line held along itself':

@@ -1,3 +1,4 @@
+import { MOST_BETWEEN } from '../layout/crossings.ts';
 import type { Crossing } from '../layout/model.ts';
 import { showLength } from '../units/quantity.ts';
 import type { Finding } from './model.ts';
@@ -55,18 +56,32 @@ function findingsAt(subject: FindingSubject, crossing: Crossing): readonly Findi
       limit: 0,
       quantity: 'length',
     });
+  if (crossing.tooFarApart && isJoinMarked(crossing))
+    found.push({
+      ...base,
+      id: `apart:${crossing.id}`,
+      kind: 'too far apart to join',
+      severity: 'look into',
+      title: `${name} lie too far apart to be joined`,
+      detail: `There are ${showLength(crossing.gap, units, 'small')} between them, and no join spans more than ${showLength(MOST_BETWEEN, units, 'small')} (common practice), so nothing is taken from the mark. Bring the bars nearer, or say that there is no join.`,
+      value: crossing.gap,
+      limit: MOST_BETWEEN,
+      quantity: 'length',
+    });
   const fit = packerFit(subject, crossing);
   if (fit)
     found.push({ ...base, id: `packer:${crossing.id}`, kind: 'packer differs', severity: 'note', ...fit });
   return found;
 }
 
+const isJoinMarked = ({ join }: Crossing): boolean => join !== null && join.kind !== 'none';
+
 function packerFit(
   subject: FindingSubject,
   crossing: Crossing,
 ): Pick<Finding, 'title' | 'detail' | 'value' | 'limit' | 'quantity'> | null {
   const { join, gap } = crossing;
-  if (crossing.clash || gap < 0) return null;
+  if (crossing.clash || crossing.tooFarApart || gap < 0) return null;
   const units = subject.project.settings.units;
   const name = nameOf(subject, crossing);
   if (join?.kind === 'bolted' && gap > CLOSES)

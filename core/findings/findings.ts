@@ -4,6 +4,7 @@ import { bowingFindings } from './bowing.ts';
 import { checkedFindings } from './checked.ts';
 import { crossingFindings } from './crossings.ts';
 import { holderFindings } from './holders.ts';
+import { markFindings } from './marks.ts';
 import type { Finding, Severity } from './model.ts';
 import { patternFindings } from './patterns.ts';
 import { slendernessFindings } from './slenderness.ts';
@@ -18,6 +19,7 @@ export function findingsOf(input: FindingInput): readonly Finding[] {
   const place = (finding: Finding) => places.get(finding.bay) ?? 0;
   return [
     ...barFindings(subject),
+    ...markFindings(subject),
     ...slendernessFindings(subject),
     ...crossingFindings(subject),
     ...holderFindings(subject),

@@ -4,6 +4,8 @@ export type FindingKind =
   | 'too slender in service'
   | 'too slender to handle'
   | 'crossing unmarked'
+  | 'mark given twice'
+  | 'too far apart to join'
   | 'hold without a holder'
   | 'clash'
   | 'no partner'

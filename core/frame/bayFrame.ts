@@ -1,4 +1,5 @@
 import { along, cross, distance, dot, scale, subtract, unit, type Vec3 } from '../geometry/vector.ts';
+import { isJoined } from '../layout/joined.ts';
 import type { Bar, BarId, BayLayout, Crossing, Layout, Plane } from '../layout/model.ts';
 import type { Holdings } from '../restraint/heldNodes.ts';
 import { lineHolding } from '../restraint/trails.ts';
@@ -355,10 +356,6 @@ function squared(direction: Vec3, bar: Vec3): Vec3 | null {
 
 const isBuilt = (bar: Bar | undefined): boolean =>
   bar?.angle ? bar.angle.stock !== null : (bar?.member ?? null) !== null;
-
-function isJoined({ join }: Crossing): boolean {
-  return join !== null && join.kind !== 'none' && join.kind !== 'hung';
-}
 
 function passes(bar: Bar, at: Vec3): boolean {
   const s = dot(subtract(at, bar.from), bar.direction);

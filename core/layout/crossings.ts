@@ -13,6 +13,9 @@ export interface CrossingBar {
 }
 
 const BETWEEN_DIAGONALS: readonly JoinKind[] = ['none', 'bolted', 'packed', 'cut', 'welded'];
+/** The most that bolts, a packer, a plate or a weld span between two diagonals, mm (common practice, no source). */
+export const MOST_BETWEEN = 60;
+
 const TO_A_LINE: readonly JoinKind[] = ['none', 'purlin', 'hung'];
 
 /** A meeting of bars with the mark that the bay has for it, the distance between the faces, and whether both can pass. */
@@ -43,6 +46,7 @@ export function crossingOf(
     angle: meeting.angle,
     gap,
     clash: gap < 0 && join?.kind !== 'cut',
+    tooFarApart: kind === 'diagonals' && gap > MOST_BETWEEN,
     join,
     choices,
     point: `${bay.id}/${key}`,

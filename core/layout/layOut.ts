@@ -26,7 +26,7 @@ export function layOut(project: Project, stock: Stock): Layout {
   const register = new NodeRegister();
   const bars = new Map<BarId, Bar>();
   const crossings = new Map<CrossingId, Crossing>();
-  const nextMark = numbering(project);
+  const nextMark = numbering();
   const bays = project.bays.map((bay): BayLayout => {
     const set = setOut(bay, stock, register, nextMark);
     for (const bar of set.bars) bars.set(bar.id, bar);
@@ -36,15 +36,11 @@ export function layOut(project: Project, stock: Stock): Layout {
   return { bays, nodes: register.all(), bars, crossings };
 }
 
-/** D1, D2, … without those that the user has given out: on site a mark must find one kind of bar. */
-function numbering(project: Project): () => string {
-  const taken = new Set(
-    project.bays.flatMap((bay) => Object.values(bay.bars).flatMap(({ mark }) => mark ?? [])),
-  );
+/** D1, D2, … by place. A bar with a mark of its own keeps its place in the count, so that naming it renames no other. */
+function numbering(): () => string {
   let number = 0;
   return () => {
-    do number += 1;
-    while (taken.has(`D${number}`));
+    number += 1;
     return `D${number}`;
   };
 }
@@ -77,12 +73,13 @@ function setOut(bay: Bay, stock: Stock, register: NodeRegister, nextMark: () => 
 
   const bars = [...drafts.values()].map((draft): Bar => {
     const { sketch: drawn } = draft;
+    const byPlace = draft.angle ? nextMark() : drawn.key;
     return {
       id: `${bay.id}/${drawn.key}`,
       bay: bay.id,
       key: drawn.key,
       role: drawn.role,
-      mark: draft.angle ? (draft.angle.mark.mark ?? nextMark()) : drawn.key,
+      mark: draft.angle?.mark.mark ?? byPlace,
       plane: draft.plane.id,
       i: draft.i,
       j: draft.j,

@@ -164,6 +164,8 @@ export interface Crossing {
   readonly gap: number;
   /** Both on one side, neither cut: they cannot both pass. */
   readonly clash: boolean;
+  /** Diagonals with more between them than can be joined: whatever is marked holds nothing. */
+  readonly tooFarApart: boolean;
   /** As marked; null: nothing was marked, taken as not joined. */
   readonly join: Join | null;
   /** The joins that make sense here. */

@@ -13,8 +13,10 @@ import {
   markLines,
   packTheGap,
   passEachOther,
+  sayNotJoined,
   weldTheCrossing,
 } from './joining.ts';
+import { clearTheMarks } from './marks.ts';
 import { changePattern, countOnBoth, crossOpenPanels } from './patterns.ts';
 import type { Proposal } from './proposal.ts';
 import { handlingSections, heavier, nearestSections, otherSections, turnTheLeg } from './sections.ts';
@@ -40,6 +42,10 @@ export function proposalsFor(
       return finding.crossing && isBetweenDiagonals(assessment, finding.crossing)
         ? markCrossing(assessment, finding.crossing)
         : markLines(assessment, finding.bay);
+    case 'mark given twice':
+      return clearTheMarks(assessment, finding);
+    case 'too far apart to join':
+      return sayNotJoined(finding);
     case 'hold without a holder':
       return [
         ...tieHolder(assessment, finding),

@@ -8,7 +8,7 @@ import type { Proposal } from './proposal.ts';
 
 export function joinTheCrossings(assessment: Assessment, bars: readonly BarId[]): readonly Proposal[] {
   const open = crossingsOn(assessment, bars).filter(
-    (each) => each.kind === 'diagonals' && unjoined(each) && !each.clash,
+    (each) => each.kind === 'diagonals' && unjoined(each) && !each.clash && !each.tooFarApart,
   );
   if (open.length === 0) return [];
   return [
@@ -55,6 +55,7 @@ export function hangFromLines(assessment: Assessment, bars: readonly BarId[]): r
 export function markCrossing(assessment: Assessment, id: string): readonly Proposal[] {
   const crossing = assessment.layout.crossings.get(id);
   if (!crossing) return [];
+  if (crossing.tooFarApart) return [noJoin(id)];
   const join = joinFor(crossing);
   return [
     {
@@ -62,13 +63,18 @@ export function markCrossing(assessment: Assessment, id: string): readonly Propo
       detail: join.kind === 'packed' ? 'bolted with packer' : 'bolted through',
       edits: [{ kind: 'join', crossings: [id], join }],
     },
-    {
-      label: 'Say that there is no join',
-      detail: 'they slide past each other',
-      edits: [{ kind: 'join', crossings: [id], join: { kind: 'none' } }],
-    },
+    noJoin(id),
   ];
 }
+
+export const sayNotJoined = ({ crossing }: Finding): readonly Proposal[] =>
+  crossing === null ? [] : [noJoin(crossing)];
+
+const noJoin = (id: string): Proposal => ({
+  label: 'Say that there is no join',
+  detail: 'they slide past each other',
+  edits: [{ kind: 'join', crossings: [id], join: { kind: 'none' } }],
+});
 
 export function markLines(assessment: Assessment, bay: string): readonly Proposal[] {
   const open = [...assessment.layout.crossings.values()]

@@ -33,11 +33,8 @@ export function claimsAt(
   const outwards = unit2(inSection(angle, angle.placement.outOfPlane));
   const along = crossing.kind === 'diagonals' ? 'in plane' : 'along holder';
 
-  if (join === 'none' || join === 'hung') {
-    const reason: HoldReason =
-      join === 'hung'
-        ? { kind: 'hung', line: partner.mark }
-        : { kind: 'not joined', partner: partner.mark, marked: crossing.join !== null };
+  const reason = whyUnjoined(crossing, partner);
+  if (reason) {
     return [
       claim(base, along, across, notHeld(reason)),
       claim(base, 'out of plane', outwards, notHeld(reason)),
@@ -46,6 +43,14 @@ export function claimsAt(
   return crossing.kind === 'diagonals'
     ? partnerClaims(context, base, partner, join, across, outwards)
     : lineClaims(context, base, crossing, partner, across, outwards);
+}
+
+/** Why a crossing is not joined at all; null where it is. */
+function whyUnjoined({ join, gap, tooFarApart }: Crossing, partner: Bar): HoldReason | null {
+  if (join === null || join.kind === 'none')
+    return { kind: 'not joined', partner: partner.mark, marked: join !== null };
+  if (join.kind === 'hung') return { kind: 'hung', line: partner.mark };
+  return tooFarApart ? { kind: 'too far apart', partner: partner.mark, gap } : null;
 }
 
 type Base = Pick<Claim, 'source' | 'join' | 'holder'>;

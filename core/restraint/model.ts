@@ -24,11 +24,14 @@ export interface Claim {
 /** Why a hold counts or does not; told in words by `reasonText`. */
 export type HoldReason =
   | { readonly kind: 'end' }
+  | { readonly kind: 'end marked free'; readonly end: 'i' | 'j' }
   | { readonly kind: 'partner end-on'; readonly partner: string; readonly join: JoinKind }
   | { readonly kind: 'partner half free'; readonly partner: string; readonly node: string }
   | { readonly kind: 'partner only bends'; readonly partner: string }
   | { readonly kind: 'single plate hinges'; readonly partner: string }
   | { readonly kind: 'not joined'; readonly partner: string; readonly marked: boolean }
+  /** Joined by the mark, with more between the bars, mm, than a join spans. */
+  | { readonly kind: 'too far apart'; readonly partner: string; readonly gap: number }
   | { readonly kind: 'hung'; readonly line: string }
   | { readonly kind: 'line held along itself'; readonly line: string; readonly by: string }
   | { readonly kind: 'line free along itself'; readonly line: string; readonly why: string }
@@ -65,9 +68,12 @@ export type Held =
   | { readonly ways: 1; readonly direction: Vec2 }
   | { readonly ways: 2 };
 
+/** A part of the bar that bows by itself, with the length that it counts as: more than its own where it reaches an end that does not hold. */
 export interface Piece {
   readonly from: number;
   readonly to: number;
+  /** mm. */
+  readonly counts: number;
 }
 
 export interface Lane {
@@ -75,6 +81,8 @@ export interface Lane {
   /** Unit vector in which the bar moves when it bends about the axis. */
   readonly motion: Vec2;
   readonly pieces: readonly Piece[];
+  /** Whether end i and end j stop this motion; both do unless marked otherwise. */
+  readonly endsStop: readonly [boolean, boolean];
   /** One for each interior station: whether it stops this motion, and why (not). */
   readonly cuts: readonly LaneCut[];
   /** Longest piece, mm; with an override in force, the user's length times factor. */
@@ -107,7 +115,7 @@ export interface MixedBound {
   readonly slenderness: number;
   readonly length: number;
   readonly radius: number;
-  /** a: holds of one direction only are counted; b: two perpendicular directions, each alone. */
+  /** a: holds of one direction only are counted, and what holds both ways; b: two perpendicular directions, each alone. */
   readonly route: 'a' | 'b';
   readonly freeDirection: Vec2 | null;
 }

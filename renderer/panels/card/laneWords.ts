@@ -46,13 +46,15 @@ function refusedClaim({ claims }: Station): Claim | null {
 
 /** Reasons that belong to the whole join, whatever the direction. */
 function isWholeJoin({ reason }: Claim): boolean {
-  return reason.kind === 'not joined' || reason.kind === 'hung';
+  return reason.kind === 'not joined' || reason.kind === 'hung' || reason.kind === 'too far apart';
 }
 
 function whyNot({ reason }: Claim): string | null {
   switch (reason.kind) {
     case 'not joined':
       return reason.marked ? 'is not joined' : 'is unmarked';
+    case 'too far apart':
+      return 'lies too far away';
     case 'hung':
       return 'only hangs it';
     case 'line free along itself':

@@ -162,6 +162,63 @@ describe('a clash', () => {
   });
 });
 
+describe('bars too far apart to be joined', () => {
+  /** Two crossing bars of 70 × 70 × 6 in planes `apart` mm from each other; between their legs a gusset of 10 more. */
+  const askew = (apart: number, join: Join | null) =>
+    bay(
+      free({ a: [0, 0, 0], b: [4000, 0, 4000], c: [4000, apart, 0], d: [0, apart, 4000] }, [
+        ['b1', 'a', 'b'],
+        ['b2', 'c', 'd'],
+      ]),
+      { joins: join ? { 'b1+b2': join } : {}, bars: { b1: { side: 'near' }, b2: { side: 'far' } } },
+    );
+  const lengthAboutV = (made: Bay) => assessed(made).diagonals.get('B/b1')?.restraint?.lanes.v.unbraced;
+
+  // Near is −Y: the legs stand away from each other, so the clear distance is the distance of the planes and the gusset's 10.
+  it.each<Join>([
+    { kind: 'bolted' },
+    { kind: 'welded' },
+    { kind: 'packed', packer: null },
+    { kind: 'cut', cutBar: 'b2' },
+  ])('are found past 60 mm when $kind, and hold each other nowhere', (join) => {
+    expect(one(askew(51, join), 'too far apart to join')).toMatchObject({
+      severity: 'look into',
+      crossing: 'B/b1+b2',
+      limit: 60,
+      quantity: 'length',
+    });
+    expect(one(askew(51, join), 'too far apart to join').value).toBeCloseTo(61, 6);
+    expect(lengthAboutV(askew(51, join))).toBeCloseTo(Math.sqrt(32_000_000), 6);
+  });
+
+  it('are not found up to 60 mm, where the join holds, nor where nothing is joined', () => {
+    expect(found(askew(49, { kind: 'bolted' }), 'too far apart to join')).toEqual([]);
+    expect(lengthAboutV(askew(49, { kind: 'bolted' }))).toBeCloseTo(Math.sqrt(32_000_000) / 2, 6);
+    for (const join of [null, { kind: 'none' }] as const)
+      expect(found(askew(300, join), 'too far apart to join')).toEqual([]);
+  });
+});
+
+describe('a mark given twice', () => {
+  const named = (bars: Bay['bars']) => crossed({ kind: 'bolted' }, { bars });
+
+  it('is found where a bar is called as another is by its place, with both bars', () => {
+    expect(one(named({ 't1.rise': { mark: 'D2' } }), 'mark given twice')).toMatchObject({
+      severity: 'look into',
+      bars: ['B/t1.rise', 'B/t1.fall'],
+      path: 'bays[0].bars.t1.rise.mark',
+    });
+  });
+
+  it('is found across bays, and not where all marks differ', () => {
+    const bays = ['B', 'C'].map((id) =>
+      bay(wall(6000, [[4000, 'rising']]), { id, bars: { 't1.rise': { mark: 'X' } } }),
+    );
+    expect(one(bays, 'mark given twice').bars).toEqual(['B/t1.rise', 'C/t1.rise']);
+    expect(found(named({ 't1.rise': { mark: 'X' } }), 'mark given twice')).toEqual([]);
+  });
+});
+
 describe('a packer that differs', () => {
   const kinds = (join: Join, gusset = 10) =>
     found(crossed(join, { diagonals: { gusset } }), 'packer differs');
