@@ -15,7 +15,7 @@ import type { Judged } from './findings/subject.ts';
 import { forcesOf } from './forces/forces.ts';
 import type { Forces } from './forces/model.ts';
 import { layOut } from './layout/layOut.ts';
-import type { Bar, BarId, BayLayout, Layout } from './layout/model.ts';
+import type { AngleBar, Bar, BarId, BayLayout, Layout } from './layout/model.ts';
 import { limitInForce } from './practice/limit.ts';
 import type { Practice, Verdict } from './practice/model.ts';
 import { practiceFor } from './practice/practices.ts';
@@ -53,7 +53,7 @@ export function assess(
   const findingIds = idsByBar(findings);
   const diagonals = new Map(
     [...checked].map(
-      ([id, each]) => [id, assessed(each, layout, project, findingIds.get(id) ?? [])] as const,
+      ([id, each]) => [id, assessed(each, layout, project, practice, findingIds.get(id) ?? [])] as const,
     ),
   );
   return {
@@ -147,7 +147,7 @@ function addJudged(
     ...reading,
     limit: limit.limit,
     ok: reading.slenderness <= limit.limit,
-    asked: practice.asks === asks,
+    asked: practice.asks === asks && !isExempt(practice, angle),
   });
   const piece = angle.cut.pieces.reduce((most, each) => Math.max(most, each.to - each.from), 0);
   const least = angle.stock?.properties.rv ?? null;
@@ -173,6 +173,7 @@ function assessed(
   judged: Judged,
   layout: Layout,
   project: Project,
+  practice: Practice,
   findings: readonly string[],
 ): DiagonalAssessment {
   const { bar, restraint, limit, handling, inService } = judged;
@@ -187,7 +188,16 @@ function assessed(
     bowing: judged.bowing,
     checks: judged.checks,
     nearness,
-    status: nearness === null ? 'unknown' : nearness > 1 ? 'over' : nearness >= NEAR ? 'near' : 'within',
+    status:
+      nearness === null && restraint && isExempt(practice, judged.angle)
+        ? 'within'
+        : nearness === null
+          ? 'unknown'
+          : nearness > 1
+            ? 'over'
+            : nearness >= NEAR
+              ? 'near'
+              : 'within',
     reason: restraint
       ? governingSentence(
           bar,
@@ -201,6 +211,12 @@ function assessed(
         : `${judged.angle.spec.section} is in no stock list, so ${bar.mark} is not assessed.`,
     findings,
   };
+}
+
+/** The standard's limit does not speak of such a shape, as AISC 360 leaves rods out. */
+function isExempt({ exempt }: Practice, { stock, spec }: AngleBar): boolean {
+  const kind = stock?.outline.shape?.kind;
+  return kind !== undefined && spec.countedOn === 'tension' && exempt.includes(kind);
 }
 
 function idsByBar(findings: readonly Finding[]): ReadonlyMap<BarId, readonly string[]> {

@@ -2,6 +2,7 @@ import { type DesignatedSizes, designatedSizes, designationKey } from './designa
 import type { CatalogueId, Catalogues, FoundAngle, OwnAngle, Stock, StockAngle } from './model.ts';
 import { nearestDesignations } from './nearest.ts';
 import { ownStockAngle } from './ownAngle.ts';
+import { shapeCalled } from './shapeDesignation.ts';
 
 const CATALOGUE_ORDER: readonly CatalogueId[] = ['en', 'us', 'au'];
 
@@ -29,9 +30,16 @@ export function stockOf(chosen: CatalogueId, own: readonly OwnAngle[], catalogue
   const find = (typed: string): FoundAngle => {
     const exact = byKey.get(designationKey(typed));
     if (exact) return { ok: true, angle: exact };
-    const known = searched.get(typed) ?? search(typed, choices, [...choices, ...others]);
+    const known = searched.get(typed) ?? shapeOrAngle(typed);
     searched.set(typed, known);
     return known;
+  };
+  const shapeOrAngle = (typed: string): FoundAngle => {
+    const shape = shapeCalled(typed, (designation) => {
+      const found = find(designation);
+      return found.ok ? found.angle : null;
+    });
+    return shape ? { ok: true, angle: shape } : search(typed, choices, [...choices, ...others]);
   };
   return { find, choices };
 }

@@ -1,4 +1,5 @@
 /** What resistances are asked, put together from a bar as it is laid out. */
+
 import type { StockAngle } from '../catalogue/model.ts';
 import type { ResistanceSettings } from '../project/model.ts';
 import type {
@@ -8,6 +9,8 @@ import type {
   TensionQuestion,
 } from '../resistance/model.ts';
 import { resistingEnd } from '../resistance/resistingEnd.ts';
+import { angleProperties } from '../section/angleProperties.ts';
+import type { BarShape } from '../section/barShape.ts';
 import type { CheckInput } from './input.ts';
 import type { PlacedSection } from './placedSection.ts';
 
@@ -33,6 +36,7 @@ export function tensionQuestion(
 }
 
 export function resistingSection(stock: StockAngle, legInPlane: 'longer' | 'shorter'): ResistingSection {
+  if (stock.outline.shape) return resistingShape(stock, stock.outline.shape);
   const { outline, properties } = stock;
   const longer = legInPlane === 'longer';
   return {
@@ -45,6 +49,29 @@ export function resistingSection(stock: StockAngle, legInPlane: 'longer' | 'shor
     rootRadius: outline.rootRadius,
     // The outer face of the leg on the gusset is the heel's.
     offCentroid: longer ? properties.centroidX : properties.centroidY,
+  };
+}
+
+/** Of a pair, legs and face are those of one angle; of the others the part against the gusset is the leg that is connected. */
+function resistingShape({ designation, outline, properties }: StockAngle, shape: BarShape): ResistingSection {
+  const common = { designation, shape: shape.kind, properties, rootRadius: 0 } as const;
+  if (shape.kind === 'angles back to back' || shape.kind === 'starred angles') {
+    const { angle } = shape;
+    return {
+      ...common,
+      connectedLeg: angle.longLeg,
+      outstandingLeg: angle.shortLeg,
+      thickness: angle.thickness,
+      rootRadius: angle.rootRadius,
+      offCentroid: angleProperties(angle).centroidX,
+    };
+  }
+  return {
+    ...common,
+    connectedLeg: outline.longLeg,
+    outstandingLeg: outline.shortLeg,
+    thickness: outline.thickness,
+    offCentroid: properties.centroidX,
   };
 }
 

@@ -1,6 +1,7 @@
 import type { Stock, StockAngle } from '../catalogue/model.ts';
 import { dot, type Vec3 } from '../geometry/vector.ts';
 import type { BarMark, Bay, DiagonalSpec, EndConnection } from '../project/model.ts';
+import { extentOf, isCentred } from '../section/barShape.ts';
 import { usualGauge } from '../section/gauge.ts';
 import type { Placement, Plane } from './model.ts';
 import { placementOf } from './placement.ts';
@@ -32,7 +33,7 @@ export function angleDraft(
 ): AngleDraft {
   const mark = bay.bars[sketch.key] ?? NO_MARK;
   const base = bay.diagonals;
-  const spec: DiagonalSpec = {
+  const named: DiagonalSpec = {
     ...base,
     section: mark.section ?? base.section,
     grade: mark.grade ?? base.grade,
@@ -41,8 +42,11 @@ export function angleDraft(
     heel: mark.heel ?? base.heel,
   };
   const side = mark.side ?? (base.arrangement === 'opposite' ? sketch.face.opposite : sketch.face.sameSide);
-  const found = stock.find(spec.section);
+  const found = stock.find(named.section);
   const angle = found.ok ? found.angle : null;
+  const shape = angle?.outline.shape ?? null;
+  // Only an angle has a leg to turn.
+  const spec: DiagonalSpec = shape ? { ...named, legInPlane: 'longer' } : named;
   const ends = {
     i: mark.endI ? { ...base.ends, ...mark.endI } : base.ends,
     j: mark.endJ ? { ...base.ends, ...mark.endJ } : base.ends,
@@ -62,6 +66,7 @@ export function angleDraft(
       side,
       roll: mark.roll ?? 0,
       gauge: ends.i.gauge ?? (angle ? gaugeOf(angle, spec.legInPlane) : UNKNOWN_GAUGE),
+      standsOff: shape && isCentred(shape) ? -extentOf(shape)[0] / 2 : spec.gusset / 2,
     }),
   };
 }
@@ -74,5 +79,9 @@ export function standingLegOf(angle: StockAngle, legInPlane: DiagonalSpec['legIn
   return legInPlane === 'longer' ? angle.outline.shortLeg : angle.outline.longLeg;
 }
 
-const gaugeOf = (angle: StockAngle, legInPlane: DiagonalSpec['legInPlane']): number =>
-  usualGauge(legInPlaneOf(angle, legInPlane), angle.catalogue === 'us' ? 'us' : 'metric').gauge;
+function gaugeOf(angle: StockAngle, legInPlane: DiagonalSpec['legInPlane']): number {
+  const { shape } = angle.outline;
+  // A pair is bolted on the line of its angles; the others on their middle.
+  if (shape && shape.kind !== 'angles back to back') return extentOf(shape)[1] / 2;
+  return usualGauge(legInPlaneOf(angle, legInPlane), angle.catalogue === 'us' ? 'us' : 'metric').gauge;
+}

@@ -10,6 +10,8 @@ export interface PlacementInput {
   /** Degrees. */
   readonly roll: number;
   readonly gauge: number;
+  /** From the plane to the face that lies on the gusset, mm; below 0 where the gusset goes through the middle of the shape. */
+  readonly standsOff: number;
 }
 
 /**
@@ -35,7 +37,7 @@ export function placementOf(input: PlacementInput): Placement {
     y: longerIn ? legTurned : standingTurned,
     inPlane,
     outOfPlane,
-    heel: add(scale(legTurned, -input.gauge), scale(standing, spec.gusset / 2)),
+    heel: add(scale(legTurned, -input.gauge), scale(standing, input.standsOff)),
     gauge: input.gauge,
   };
 }

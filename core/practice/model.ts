@@ -1,5 +1,6 @@
 /** What one design standard says of slenderness. */
 import type { PracticeId } from '../project/model.ts';
+import type { BarShape } from '../section/barShape.ts';
 import type { Axis } from '../section/model.ts';
 
 /** How sure we are of a clause: read in the source, or from memory. Shown on screen and in reports. */
@@ -28,6 +29,8 @@ export interface Practice {
   /** The standard's own letters for our axes. */
   readonly axisLetters: Readonly<Record<Axis, string>>;
   readonly note: string;
+  /** Shapes that the standard's limit for ties leaves out. */
+  readonly exempt: readonly BarShape['kind'][];
   /** Moduli of steel that the standard uses, N/mm². Practice-facts, from memory, sure. */
   readonly steel: { readonly E: number; readonly G: number };
 }

@@ -4,6 +4,8 @@
  * "Bending about an axis" moves the bar at right angles to that axis: about x along the longer leg, about y along the shorter.
  */
 
+import type { BarShape } from './barShape.ts';
+
 /** Outside dimensions of a rolled angle, mm. */
 export interface AngleOutline {
   readonly longLeg: number;
@@ -13,6 +15,8 @@ export interface AngleOutline {
   readonly rootRadius: number;
   /** Rounding at the inside of each toe. */
   readonly toeRadius: number;
+  /** Of anything but a single angle: what it is. Its legs are then its extent in the plane of the bay and out of it. */
+  readonly shape?: BarShape;
 }
 
 export type Axis = 'x' | 'y' | 'u' | 'v';

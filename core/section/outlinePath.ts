@@ -1,6 +1,7 @@
 import type { Vec2 } from '../geometry/vector.ts';
 import type { Segment } from './areaIntegrals.ts';
 import type { AngleOutline } from './model.ts';
+import { shapePolygon } from './shapePolygon.ts';
 
 /**
  * The outline of an angle, anticlockwise from the heel, in mm.
@@ -34,6 +35,7 @@ export function outlinePath(outline: AngleOutline): readonly Segment[] {
  * the first point not repeated at the end. Arcs become `stepsPerArc` (1 or more) chords.
  */
 export function outlinePolygon(outline: AngleOutline, stepsPerArc: number): readonly Vec2[] {
+  if (outline.shape) return shapePolygon(outline.shape, (angle) => outlinePolygon(angle, stepsPerArc));
   return outlinePath(outline).flatMap((piece) => {
     if (piece.kind === 'line') return [piece.from];
     return Array.from({ length: stepsPerArc }, (_, step): Vec2 => {

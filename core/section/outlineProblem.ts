@@ -2,7 +2,11 @@ import type { AngleOutline } from './model.ts';
 
 /** Why dimensions do not make an angle. */
 export type OutlineProblem =
-  | { readonly kind: 'not a size'; readonly which: keyof AngleOutline; readonly value: number }
+  | {
+      readonly kind: 'not a size';
+      readonly which: Exclude<keyof AngleOutline, 'shape'>;
+      readonly value: number;
+    }
   | { readonly kind: 'legs swapped'; readonly longLeg: number; readonly shortLeg: number }
   | { readonly kind: 'too thick'; readonly thickness: number; readonly shortLeg: number }
   | { readonly kind: 'toe rounder than thick'; readonly toeRadius: number; readonly thickness: number }
@@ -27,7 +31,7 @@ export function outlineProblem(outline: AngleOutline): OutlineProblem | null {
   return needed > shortLeg ? { kind: 'radii overlap', shortLeg, needed } : null;
 }
 
-const NAMES: Readonly<Record<keyof AngleOutline, string>> = {
+const NAMES: Readonly<Record<Exclude<keyof AngleOutline, 'shape'>, string>> = {
   longLeg: 'long leg',
   shortLeg: 'short leg',
   thickness: 'thickness',

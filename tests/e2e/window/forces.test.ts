@@ -1,4 +1,4 @@
-import type { Page } from 'playwright-core';
+import type { Locator, Page } from 'playwright-core';
 import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { choose, type OpenedWindow, WindowStand } from './openedWindow.ts';
 
@@ -57,6 +57,18 @@ describe('wind on the gables of the example', () => {
   });
 });
 
+/** Where something stands once the view has come to rest. */
+async function atRest(what: Locator): Promise<{ x: number; y: number; width: number; height: number }> {
+  let before = await what.boundingBox();
+  for (let tries = 0; tries < 40; tries++) {
+    await page.waitForTimeout(120);
+    const now = await what.boundingBox();
+    if (before && now && Math.hypot(now.x - before.x, now.y - before.y) < 0.5) return now;
+    before = now;
+  }
+  throw new Error('the view does not come to rest');
+}
+
 describe('what acts', () => {
   it('begins with an empty project that says how, and gets wind and the practice’s combinations', async () => {
     await page.getByRole('menuitem', { name: 'File', exact: true }).click();
@@ -96,8 +108,7 @@ describe('what acts', () => {
     await page.keyboard.press('1');
     await page.keyboard.press('f');
     const node = page.getByRole('button', { name: /^Force on left head of tier 1 in W/ });
-    const box = await node.boundingBox();
-    if (!box) throw new Error('the node is not on the sheet');
+    const box = await atRest(node);
     const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
     await page.mouse.move(x, y);
     await page.mouse.down();
