@@ -32,7 +32,7 @@ function tensionFindings(
   layout: BayLayout,
   all: readonly Judged[],
 ): readonly Finding[] {
-  const diagonals = all.filter(({ bar }) => bar.role === 'diagonal');
+  const diagonals = all.filter(({ bar }) => bar.role === 'diagonal' || bar.role === 'knee');
   const ties = diagonals.filter(({ angle }) => angle.spec.countedOn === 'tension');
   const peaked = new Set(
     tiersOf(bay)
@@ -75,8 +75,9 @@ function tensionFindings(
         severity: 'look into',
         bars: alone.map(({ bar }) => bar.id),
         title: `${marksInWords(alone)} ${isAre(alone)} tension only with no partner`,
-        detail:
-          'The reversed load finds no diagonal that it can pull. Cross the panel, count the bar on in compression too, or make sure that another bay of the line takes the reversed load.',
+        detail: alone.every(({ bar }) => bar.role === 'knee')
+          ? 'The reversed load finds no knee that it can pull. Put one on the other side, or count the knee on in compression too.'
+          : 'The reversed load finds no diagonal that it can pull. Cross the panel, count the bar on in compression too, or make sure that another bay of the line takes the reversed load.',
       } as const,
     ];
   });

@@ -125,7 +125,11 @@ export function newKneeBay(id: string, name: string, catalogue: CatalogueId = 'e
     },
     catalogue,
   );
-  return { ...made, diagonals: { ...made.diagonals, ends: { ...TWO_M16, bolts: 1, setBack: 120 } } };
+  // A knee steadies a flange both ways, and is short enough to be pressed.
+  return {
+    ...made,
+    diagonals: { ...made.diagonals, countedOn: 'both', ends: { ...TWO_M16, bolts: 1, setBack: 120 } },
+  };
 }
 
 /** A crossed square between four held nodes, to be drawn on. */

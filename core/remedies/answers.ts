@@ -17,7 +17,7 @@ import {
   weldTheCrossing,
 } from './joining.ts';
 import { clearTheMarks } from './marks.ts';
-import { changePattern, countOnBoth, crossOpenPanels } from './patterns.ts';
+import { changePattern, countOnBoth, crossOpenPanels, kneesOnBothSides } from './patterns.ts';
 import type { Proposal } from './proposal.ts';
 import { handlingSections, heavier, nearestSections, otherSections, turnTheLeg } from './sections.ts';
 import { tieHolder, tieLinesOf, withdrawClaim } from './tying.ts';
@@ -55,7 +55,11 @@ export function proposalsFor(
     case 'clash':
       return passEachOther(assessment, finding);
     case 'no partner':
-      return [...changePattern(assessment, finding, 'crossed', 'Cross the panel'), countOnBoth(finding.bars)];
+      return [
+        ...changePattern(assessment, finding, 'crossed', 'Cross the panel'),
+        ...kneesOnBothSides(assessment, finding),
+        countOnBoth(finding.bars),
+      ];
     case 'beam takes the pull':
       return [...changePattern(assessment, finding, 'crossed', 'Cross the tier'), countOnBoth(finding.bars)];
     case 'sag':

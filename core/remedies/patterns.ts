@@ -27,6 +27,14 @@ export function changePattern(
   return recipe ? [patternProposal(bay, recipe, label, 'a second diagonal for the reversed load')] : [];
 }
 
+/** Knees on one side of a chord get their partners on the other. */
+export function kneesOnBothSides(assessment: Assessment, finding: Finding): readonly Proposal[] {
+  const bay = assessment.project.bays.find((each) => each.id === finding.bay);
+  if (bay?.recipe.kind !== 'knee' || bay.recipe.sides === 'both') return [];
+  const recipe = { ...bay.recipe, sides: 'both' } as const;
+  return [patternProposal(bay, recipe, 'Put knees on both sides', 'one of each pair is always pulled')];
+}
+
 /** A partner whose end is free as a rule stands over an open tier: bracing that tier holds it. */
 export function crossOpenPanels(assessment: Assessment, finding: Finding): readonly Proposal[] {
   const bay = assessment.project.bays.find((each) => each.id === finding.bay);

@@ -94,7 +94,8 @@ function ReadingBox({ reading, was, worst }: ReadingBoxProps): JSX.Element {
         {isWorst && <span className="reading-worst"> worst</span>}
       </em>
       <span className="reading-figure">
-        {was !== figure && <s className="was">{was}</s>} <b>{figure}</b>
+        {was !== figure && <s className="was">{was}</s>}
+        <b>{figure}</b>
       </span>
       <span className="reading-says">{says}</span>
       {stateSays !== '' && (

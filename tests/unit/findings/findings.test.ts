@@ -2,6 +2,7 @@
 import { describe, expect, it } from 'vitest';
 import type { Finding, FindingKind } from '../../../core/findings/model.ts';
 import type { Bay, DiagonalSpec, Join, Pattern, Settings } from '../../../core/project/model.ts';
+import { newFreeBay, newKneeBay, newRoofBay, newWallBay } from '../../../core/project/newBay.ts';
 import { bay, ENDS, free, knee, line, roof, vouched, wall } from '../assess/given/bays.ts';
 import { assessed } from '../assess/given/reading.ts';
 
@@ -359,10 +360,29 @@ describe('tension only', () => {
     expect(found(tier(pattern), 'beam takes the pull')).toEqual([]);
   });
 
-  it('is not asked of knees', () => {
-    const all = assessed(bay(knee({ angle: 20 }))).findings.map((finding) => finding.kind);
-    expect(all).not.toContain('no partner');
-    expect(all).not.toContain('steep or flat');
+  it('is found of knees on one side, unless they are pressed too, and not of pairs', () => {
+    const oneSided = knee({ sides: 'one' });
+    expect(found(bay(oneSided), 'no partner').map(({ bars }) => bars)).toEqual([
+      ['B/k1.knee-a'],
+      ['B/k2.knee-a'],
+    ]);
+    expect(found(bay(oneSided, { diagonals: { countedOn: 'both' } }), 'no partner')).toEqual([]);
+    expect(found(bay(knee()), 'no partner')).toEqual([]);
+  });
+
+  it('asks nothing of the slope of knees', () => {
+    expect(found(bay(knee({ angle: 20 })), 'steep or flat')).toEqual([]);
+  });
+
+  it('is found of no bay as it is begun', () => {
+    for (const made of [
+      newWallBay('B', 'b'),
+      newRoofBay('B', 'b'),
+      newKneeBay('B', 'b'),
+      newFreeBay('B', 'b'),
+    ])
+      expect(found(made, 'no partner')).toEqual([]);
+    expect(newKneeBay('B', 'b').diagonals.countedOn).toBe('both');
   });
 });
 

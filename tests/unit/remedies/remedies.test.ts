@@ -10,7 +10,7 @@ import type { Remedy } from '../../../core/remedies/model.ts';
 import { remediesFor } from '../../../core/remedies/remedies.ts';
 import { anyProject } from '../../properties/given/projects.ts';
 import { runs } from '../../properties/given/runs.ts';
-import { bay, ENDS, free, line, project, roof, vouched, wall } from '../assess/given/bays.ts';
+import { bay, ENDS, free, knee, line, project, roof, vouched, wall } from '../assess/given/bays.ts';
 import { CATALOGUES } from '../assess/given/catalogues.ts';
 
 const KEY = 't1.fall+t1.rise';
@@ -283,6 +283,35 @@ describe('other findings', () => {
     const crossing = changedBy(made.before, made.remedies[0] as Remedy);
     expect(crossing.layout.bays[0]?.diagonals).toEqual(['B/t1.rise', 'B/t1.fall']);
     expectTrue(made);
+  });
+
+  it('knees on one side get their partners on the other', () => {
+    const { remedies } = trial(bay(knee({ sides: 'one' })), 'no partner');
+    expect(remedies.map(({ label, effect }) => [label, effect.answers])).toContainEqual([
+      'Put knees on both sides',
+      true,
+    ]);
+  });
+
+  it('a join too wide to be built is answered by saying that there is none', () => {
+    const nodes = { a: [0, 0, 0], b: [4000, 0, 4000], c: [4000, 300, 0], d: [0, 300, 4000] } as const;
+    const made = bay(
+      free(nodes, [
+        ['b1', 'a', 'b'],
+        ['b2', 'c', 'd'],
+      ]),
+      { joins: { 'b1+b2': { kind: 'bolted' } } },
+    );
+    const { remedies } = trial(made, 'too far apart to join');
+    expect(remedies.map(({ label }) => label)).toEqual(['Say that there is no join']);
+    expect(remedies[0]?.effect.answers).toBe(true);
+  });
+
+  it('a mark given twice is answered by taking away those that were typed', () => {
+    const { remedies } = trial(crossed(null, { bars: { 't1.rise': { mark: 'D2' } } }), 'mark given twice');
+    expect(remedies).toHaveLength(1);
+    expect(remedies[0]?.edits).toEqual([{ kind: 'bars', bars: ['B/t1.rise'], change: {}, clear: ['mark'] }]);
+    expect(remedies[0]?.effect.answers).toBe(true);
   });
 
   it('no partner is answered by crossing the panel of that bar and no other', () => {
