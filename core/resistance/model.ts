@@ -186,4 +186,6 @@ export interface CompressionQuestion extends TensionQuestion {
   readonly system: 'planar' | 'space';
   /** Crossed and joined between its ends: one-leg rules then speak of the whole length between working points. */
   readonly joinedBetween: boolean;
+  /** A load acts across it between its ends, own weight apart. Left out: none does. */
+  readonly loadedAcross?: boolean;
 }

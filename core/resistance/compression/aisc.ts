@@ -1,72 +1,127 @@
-/** AISC 360-16 and -22, chapter E. Practice-facts D2. */
+/**
+ * AISC 360-16 and -22, chapter E. Practice-facts D2. (E3-2), (E3-3), (E4-3), (E5-1), (E7-3), (E7-5), their limits and the conditions of E5 were read in a copy of
+ * the AISC Design Examples v16, E.5, E.6, E.14A and E.14B; (E5-2) to (E5-4) and the terms of the shorter leg are from memory.
+ */
 import type { CompressionQuestion } from '../model.ts';
 import { strengthOf } from '../tension/aisc.ts';
 import { resistance, Working } from '../working.ts';
 import { exponential } from './curves.ts';
-import { slenderOneLeg } from './modifiedSlenderness.ts';
-import { type CompressionPack, oneLegConditions } from './pack.ts';
+import { legsOf, slenderest } from './legs.ts';
+import { isByShorterLeg, modifiedSlenderness, wholeLengthNote } from './modifiedSlenderness.ts';
+import {
+  ONE_LEG,
+  requireEvenLegs,
+  requireFirmEnds,
+  requireNothingAcross,
+  requireSameLeg,
+} from './oneLegTerms.ts';
+import type { CompressionPack } from './pack.ts';
+
+/** E1. */
+const PHI = 0.9;
+const OMEGA = 1.67;
 
 function strength(question: CompressionQuestion, Fe: number, working: Working): number {
   const { steel, options } = question;
   const Fy = working.given('yield stress', 'F_y', steel.fy, 'stress');
-  const ratio = Fy / Fe;
-  const Fcr = working.step(
-    'critical stress',
-    'F_cr',
+  const ratio = working.step('yield over elastic stress', 'F_y/F_e', 'F_y/F_e', Fy / Fe, 'ratio');
+  const Fn = working.step(
+    'nominal stress',
+    'F_n',
     ratio <= 2.25 ? '0.658^(F_y/F_e) F_y' : '0.877 F_e',
     exponential(ratio) * Fy,
     'stress',
   );
-  const A = effectiveArea(question, Fcr, working);
-  const Pn = working.step('nominal strength', 'P_n', 'F_cr A_e', Fcr * A, 'force');
-  return strengthOf(Pn, 0.9, 1.67, options, working, 'P_n');
+  const { area, symbol } = effectiveArea(question, Fn, working);
+  const Pn = working.step('nominal strength', 'P_n', `F_n ${symbol}`, Fn * area, 'force');
+  return strengthOf(Pn, PHI, OMEGA, options, working, 'P_n');
 }
 
-/** E7, 360-16 on: legs too slender for the stress lose width. */
-function effectiveArea({ section, steel }: CompressionQuestion, Fcr: number, working: Working): number {
-  const A = working.given('area', 'A_g', section.properties.area, 'area');
-  const hasLegs = section.shape === 'angle' || section.shape.includes('angles');
-  if (!hasLegs) return A;
+/** E7, 360-16 on: what legs lose that are too slender for the stress, Table E7.1 case (c). */
+function effectiveArea(
+  { section, steel }: CompressionQuestion,
+  Fn: number,
+  working: Working,
+): { readonly area: number; readonly symbol: string } {
+  const gross = section.properties.area;
   const limit = 0.45 * Math.sqrt(steel.E / steel.fy);
-  const lost = [section.connectedLeg, section.outstandingLeg].reduce((sum, b) => {
-    const slender = b / section.thickness;
-    if (slender <= limit * Math.sqrt(steel.fy / Fcr)) return sum;
-    const Fel = ((1.49 * limit) / slender) ** 2 * steel.fy;
-    const root = Math.sqrt(Fel / Fcr);
-    return sum + b * (1 - Math.min(1, (1 - 0.22 * root) * root)) * section.thickness;
-  }, 0);
-  return lost === 0 ? A : working.step('effective area', 'A_e', 'A_g − Σ(b − b_e) t, E7', A - lost, 'area');
+  const reached = limit * Math.sqrt(steel.fy / Fn);
+  const slender = legsOf(section).filter(({ width, thickness }) => width / thickness > reached);
+  if (slender.length === 0) return { area: gross, symbol: 'A' };
+  working.given('modulus', 'E', steel.E, 'stress');
+  working.step('limit of slenderness', 'λ_r', '0.45 √(E/F_y)', limit, 'slenderness');
+  let lost = 0;
+  for (const { name, index, width, thickness, count } of slender) {
+    working.given(`width of the ${name}`, `b_${index}`, width, 'length');
+    const ratio = working.given(`slenderness of the ${name}`, `λ_${index}`, width / thickness, 'slenderness');
+    const Fel = working.step(
+      `elastic stress of the ${name}`,
+      `F_el,${index}`,
+      `(1.49 λ_r/λ_${index})² F_y`,
+      ((1.49 * limit) / ratio) ** 2 * steel.fy,
+      'stress',
+    );
+    const root = Math.sqrt(Fel / Fn);
+    // At its limit the formula gives 1.0016 b.
+    const kept = working.step(
+      `effective width of the ${name}`,
+      `b_e${index}`,
+      `b_${index} [1 − 0.22 √(F_el,${index}/F_n)] √(F_el,${index}/F_n)`,
+      width * Math.min(1, (1 - 0.22 * root) * root),
+      'length',
+    );
+    lost += count * (width - kept) * thickness;
+  }
+  working.given('thickness', 't', section.thickness, 'length');
+  const area = working.step('effective area', 'A_e', 'A − Σ(b − b_e) t', gross - lost, 'area');
+  return { area, symbol: 'A_e' };
+}
+
+/** E5: a single angle of stout legs need not be looked at for twist. */
+function twistLeftOut({ section, steel }: CompressionQuestion): string | null {
+  if (section.shape !== 'angle') return null;
+  const limit = 0.71 * Math.sqrt(steel.E / steel.fy);
+  return slenderest(section) <= limit ? `twist is not asked for up to b/t = ${limit.toFixed(1)}` : null;
 }
 
 export const AISC: CompressionPack = {
   column: {
     standard: 'AISC 360',
     clause: 'E3, E7',
-    twistClause: 'E4, E7',
-    confidence: 'from memory, sure',
+    confidence: 'read in a source',
+    twist: { clause: 'E4, E7', confidence: 'read in a source' },
+    twistLeftOut,
+    remark: () => null,
     strength,
   },
   oneLeg: (question) => {
     const working = new Working();
-    oneLegConditions(question, working, 1.7);
-    const ratio = slenderOneLeg(question, working);
-    working.requires('L_c/r not above 200', ratio <= 200 + 1e-9, ratio.toFixed(1));
+    requireSameLeg(question, working);
+    requireFirmEnds(question, working);
+    requireNothingAcross(question, working);
+    requireEvenLegs(question, working);
+    const slender = modifiedSlenderness(question, working);
+    working.requires('L_c/r not above 200', slender <= 200 + 1e-9, slender.toFixed(1));
+    const { steel, section, system, length } = question;
+    working.given('area', 'A', section.properties.area, 'area');
+    working.given('modulus', 'E', steel.E, 'stress');
     const Fe = working.step(
       'elastic stress',
       'F_e',
-      'π²E/(L_c/r)²',
-      (Math.PI ** 2 * question.steel.E) / ratio ** 2,
+      'π² E/(L_c/r)²',
+      (Math.PI ** 2 * steel.E) / slender ** 2,
       'stress',
     );
+    const planar = system === 'planar';
+    const wasRead = planar && !isByShorterLeg(question) && length <= 80 * section.properties.ry;
     return resistance(
       {
-        kind: 'compression, one leg',
-        title: 'Compression of an angle by one leg',
-        against: 'compression',
+        ...ONE_LEG,
         resistance: strength(question, Fe, working),
         standard: 'AISC 360',
-        clause: question.system === 'planar' ? 'E5(a), (E5-1), (E5-2)' : 'E5(b), (E5-3), (E5-4)',
-        confidence: 'from memory, sure',
+        clause: planar ? 'E5(a), (E5-1), (E5-2), E3, E7' : 'E5(b), (E5-3), (E5-4), E3, E7',
+        confidence: wasRead ? 'read in a source' : 'from memory, sure',
+        note: wholeLengthNote(question),
       },
       working,
     );

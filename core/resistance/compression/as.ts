@@ -1,52 +1,96 @@
 /** AS 4100 6.2 and 6.3. Practice-facts D4. */
-import type { CompressionQuestion } from '../model.ts';
+import type { CompressionQuestion, SectionShape } from '../model.ts';
 import { resistance, Working } from '../working.ts';
-import { member } from './curves.ts';
+import { memberReduction } from './curves.ts';
+import { legsOf } from './legs.ts';
+import { ONE_LEG } from './oneLegTerms.ts';
 import type { CompressionPack } from './pack.ts';
 
 const PHI = 0.9;
+/** Table 6.2.4: plate elements of hot-rolled sections held along one edge. */
+const YIELD_LIMIT = 16;
 
+/** 6.2.2: what slender legs leave of the section. */
 function formFactor({ section, steel }: CompressionQuestion, working: Working): number {
-  const hasLegs = section.shape === 'angle' || section.shape.includes('angles') || section.shape === 'tee';
-  if (!hasLegs) return 1;
-  const lost = [section.connectedLeg, section.outstandingLeg].reduce((sum, leg) => {
-    const b = leg - section.thickness;
-    const slender = (b / section.thickness) * Math.sqrt(steel.fy / 250);
-    return sum + b * (1 - Math.min(1, 16 / slender)) * section.thickness;
-  }, 0);
+  let lost = 0;
+  for (const { name, index, width, thickness, count } of legsOf(section)) {
+    const clear = working.step(
+      `clear width of the ${name}`,
+      `b_${index}`,
+      'leg − t',
+      width - thickness,
+      'length',
+    );
+    const slender = working.step(
+      `slenderness of the ${name}`,
+      `λ_e${index}`,
+      `(b_${index}/t) √(f_y/250)`,
+      (clear / thickness) * Math.sqrt(steel.fy / 250),
+      'slenderness',
+    );
+    lost += count * clear * (1 - Math.min(1, YIELD_LIMIT / slender)) * thickness;
+  }
   return working.step(
     'form factor',
     'k_f',
-    'Σ b_e t/A_g, λ_ey = 16',
+    lost > 0 ? '1 − Σ b (1 − 16/λ_e) t/A' : '1: no leg is beyond λ_ey = 16',
     1 - lost / section.properties.area,
     'factor',
   );
 }
 
+/** Table 6.3.3: 0.5 for angles, tees, channels and what is not named, with k_f = 1; 1.0 below (verify). Tubes as cold formed, −0.5. */
+function constantOf(shape: SectionShape, kf: number): number {
+  if (shape === 'round tube' || shape === 'square tube') return -0.5;
+  return kf < 1 - 1e-9 ? 1 : 0.5;
+}
+
 export const AS: CompressionPack = {
   column: {
     standard: 'AS 4100',
-    clause: '6.2, 6.3.3',
-    twistClause: '6.2, 6.3.3',
+    clause: '6.2.1, 6.3.3',
     confidence: 'from memory, sure',
+    twist: { clause: '6.3.3, F_e with twist', confidence: 'from memory, verify' },
+    twistLeftOut: () => null,
+    remark: () => null,
     strength: (question, Fe, working) => {
       const { section, steel } = question;
+      const fy = working.given('yield stress', 'f_y', steel.fy, 'stress');
+      working.given('thickness', 't', section.thickness, 'length');
       const kf = formFactor(question, working);
-      const slender = Math.PI * Math.sqrt(steel.E / Fe);
-      const lambda = working.step(
+      const E = working.given('modulus', 'E', steel.E, 'stress');
+      const slender = working.step(
+        'slenderness of that stress',
+        'l_e/r',
+        'π √(E/F_e)',
+        Math.PI * Math.sqrt(E / Fe),
+        'slenderness',
+      );
+      const lambdaN = working.step(
         'modified slenderness',
         'λ_n',
         '(l_e/r) √k_f √(f_y/250)',
-        slender * Math.sqrt(kf) * Math.sqrt(steel.fy / 250),
+        slender * Math.sqrt(kf) * Math.sqrt(fy / 250),
         'slenderness',
       );
-      const alphaB = working.given('section constant', 'α_b', alphaOf(section.shape, kf), 'factor');
-      const alphaC = working.step('slenderness reduction', 'α_c', '6.3.3', member(lambda, alphaB), 'factor');
+      const alphaB = working.given('section constant', 'α_b', constantOf(section.shape, kf), 'factor');
+      const { alphaA, lambda, eta, xi, alphaC } = memberReduction(lambdaN, alphaB);
+      working.step(
+        'slenderness added, α_b 1',
+        'α_a',
+        '2100 (λ_n − 13.5)/(λ_n² − 15.3 λ_n + 2050)',
+        alphaA,
+        'factor',
+      );
+      working.step('slenderness with its imperfection', 'λ', 'λ_n + α_a α_b', lambda, 'slenderness');
+      working.step('imperfection', 'η', '0.00326 (λ − 13.5), 0 at least', eta, 'factor');
+      working.step('term of the curve', 'ξ', '[(λ/90)² + 1 + η]/[2 (λ/90)²]', xi, 'factor');
+      working.step('slenderness reduction', 'α_c', 'ξ {1 − √[1 − (90/(ξ λ))²]}, 1 at most', alphaC, 'factor');
       const Ns = working.step(
         'section capacity',
         'N_s',
-        'k_f A_n f_y',
-        kf * section.properties.area * steel.fy,
+        'k_f A f_y',
+        kf * section.properties.area * fy,
         'force',
       );
       return working.step('capacity', 'φN_c', '0.90 α_c N_s', PHI * alphaC * Ns, 'force');
@@ -55,15 +99,13 @@ export const AS: CompressionPack = {
   oneLeg: () => {
     const working = new Working();
     working.requires(
-      'the interaction of 8.4.6 for web angles of trusses is worked out',
+      'the interaction of 8.4.6 for web angles of trusses is worked out here',
       false,
-      'it is not reproduced here: read the standard',
+      'it is not reproduced: read the standard',
     );
     return resistance(
       {
-        kind: 'compression, one leg',
-        title: 'Compression of an angle by one leg',
-        against: 'compression',
+        ...ONE_LEG,
         resistance: null,
         standard: 'AS 4100',
         clause: '8.4.6',
@@ -73,9 +115,3 @@ export const AS: CompressionPack = {
     );
   },
 };
-
-/** Table 6.3.3: 0.5 for hot-rolled angles, tees and channels with k_f = 1, 1.0 below; −0.5 for tubes, 0.5 for flats and rods (verify). */
-function alphaOf(shape: string, kf: number): number {
-  if (shape.includes('tube')) return -0.5;
-  return kf < 1 ? 1 : 0.5;
-}

@@ -1,12 +1,12 @@
 import type { PracticeId } from '../../project/model.ts';
-import type { CompressionQuestion, Resistance } from '../model.ts';
+import type { CompressionQuestion, Resistance, SectionShape } from '../model.ts';
 import { resistance, Working } from '../working.ts';
 import { AISC } from './aisc.ts';
 import { AS } from './as.ts';
-import { elasticStress } from './elastic.ts';
+import { elasticStress } from './elasticStress.ts';
 import { EN } from './en.ts';
 import { IS } from './is.ts';
-import type { CompressionPack } from './pack.ts';
+import type { ColumnRule, CompressionPack } from './pack.ts';
 import { CSA, SANS } from './sansAndCsa.ts';
 
 const PACKS: Readonly<Record<PracticeId, CompressionPack>> = {
@@ -18,61 +18,118 @@ const PACKS: Readonly<Record<PracticeId, CompressionPack>> = {
   is800: IS,
 };
 
-const ECCENTRIC =
-  'The load is taken through the centroid: eccentricity at the ends is left out, and a check with bending is still due.';
+/** Note of a concentric check of a bar that is held off its centroid. */
+export const ECCENTRICITY_LEFT_OUT =
+  'The load is taken through the centroid: eccentricity at the ends is left out, and a beam-column check is still due.';
 
-/** What a bar resists in compression: with its critical load as found, with the lengths by the marks, and by the rule for one leg. N. */
+/**
+ * What a bar resists in compression, N: through its centroid by its critical load as found, through its centroid over its unbraced lengths,
+ * and, for a single angle, by the practice's rule for one leg. Rules that do not speak of what is there give no resistance and say why.
+ */
 export function compressionResistances(question: CompressionQuestion): readonly Resistance[] {
-  const pack = PACKS[question.practice];
-  return [byCriticalLoad(question, pack), byLengths(question, pack), pack.oneLeg(question)];
+  const { column, oneLeg } = PACKS[question.practice];
+  const concentric = [byCriticalLoad(question, column), byLengths(question, column)];
+  return question.section.shape === 'angle' ? [...concentric, oneLeg(question)] : concentric;
 }
 
-const isEccentric = ({ section, ends }: CompressionQuestion): boolean =>
-  section.shape === 'angle' && ends.some(({ legs }) => legs === 'one');
-
-function byCriticalLoad(question: CompressionQuestion, { column }: CompressionPack): Resistance {
+function byCriticalLoad(question: CompressionQuestion, column: ColumnRule): Resistance {
   const working = new Working();
   const { criticalLoad, section } = question;
-  const known = working.requires(
-    'the critical load is known',
-    criticalLoad !== null,
-    'the framing gives the bar no critical load',
-  );
-  const N = known
-    ? working.given('critical load with the real holds', 'N_cr', criticalLoad ?? 0, 'force')
-    : 0;
-  const Fe = known
-    ? working.step('elastic stress', 'F_e', 'N_cr/A', N / section.properties.area, 'stress')
-    : 1;
+  const known = criticalLoad !== null && criticalLoad > 0 ? criticalLoad : null;
+  working.requires('the critical load is known', known !== null, 'the framing gives the bar none');
+  if (known !== null) {
+    working.given('area', 'A', section.properties.area, 'area');
+    working.given('critical load with the real holds', 'N_cr', known, 'force');
+    working.step('elastic stress', 'F_e', 'N_cr/A', known / section.properties.area, 'stress');
+  }
   return resistance(
     {
       kind: 'compression, critical load',
       title: 'Compression by the critical load',
       against: 'compression',
-      resistance: column.strength(question, Fe, working),
+      resistance: known === null ? null : column.strength(question, known / section.properties.area, working),
       standard: column.standard,
       clause: column.clause,
-      confidence: column.confidence,
-      note: isEccentric(question) ? ECCENTRIC : null,
+      confidence: hasRemark(question, column) ? 'from memory, verify' : column.confidence,
+      note: noteOf(question, column),
     },
     working,
   );
 }
 
-function byLengths(question: CompressionQuestion, { column }: CompressionPack): Resistance {
+function byLengths(question: CompressionQuestion, column: ColumnRule): Resistance {
   const working = new Working();
-  const { Fe, flexural } = elasticStress(question, working);
+  const { area } = question.section.properties;
+  working.given('area', 'A', area, 'area');
+  const { Fe, twists } = elasticStress(question, twistLeftOut(question, column), working);
+  working.step('elastic critical load', 'N_cr', 'A F_e', area * Fe, 'force');
+  const rule = twists ? column.twist : column;
   return resistance(
     {
       kind: 'compression, lengths by the practice',
-      title: 'Compression over the unbraced lengths',
+      title: `Compression over the unbraced lengths${twists ? ', bowing with twist' : ''}`,
       against: 'compression',
       resistance: column.strength(question, Fe, working),
       standard: column.standard,
-      clause: Fe < flexural ? column.twistClause : column.clause,
-      confidence: column.confidence,
-      note: isEccentric(question) ? ECCENTRIC : null,
+      clause: rule.clause,
+      confidence: hasRemark(question, column) ? 'from memory, verify' : rule.confidence,
+      note: noteOf(question, column),
     },
     working,
   );
+}
+
+/** Solid and hollow bars longer than they are wide bow before they twist. */
+function twistLeftOut(question: CompressionQuestion, column: ColumnRule): string | null {
+  switch (question.section.shape) {
+    case 'flat':
+    case 'rod':
+    case 'round tube':
+    case 'square tube':
+      return 'such a section bows before it twists';
+    case 'angle':
+    case 'angles back to back':
+    case 'starred angles':
+    case 'tee':
+    case 'channel':
+      return column.twistLeftOut(question);
+    default:
+      return question.section.shape satisfies never;
+  }
+}
+
+/** The rule is used beyond what was read or is surely remembered. */
+const hasRemark = (question: CompressionQuestion, column: ColumnRule): boolean =>
+  column.remark(question) !== null || question.section.shape !== 'angle';
+
+function noteOf(question: CompressionQuestion, column: ColumnRule): string | null {
+  const { section, ends, loadedAcross } = question;
+  const eccentric = section.shape === 'angle' && ends.some(({ legs }) => legs === 'one');
+  const notes = [
+    eccentric ? ECCENTRICITY_LEFT_OUT : null,
+    loadedAcross ? 'A load acts across the bar: a check with bending is still due.' : null,
+    column.remark(question),
+    shapeNote(section.shape),
+  ];
+  return notes.filter((note) => note !== null).join(' ') || null;
+}
+
+/** What is not looked at in a shape. */
+function shapeNote(shape: SectionShape): string | null {
+  switch (shape) {
+    case 'angle':
+    case 'flat':
+    case 'rod':
+      return null;
+    case 'angles back to back':
+    case 'starred angles':
+      return 'The two angles are taken as one bar: that battens or packs stand close enough to make them one is to be checked.';
+    case 'tee':
+    case 'channel':
+    case 'round tube':
+    case 'square tube':
+      return 'Whether its plates or walls are too slender to yield is not looked at.';
+    default:
+      return shape satisfies never;
+  }
 }

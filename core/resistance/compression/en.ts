@@ -1,119 +1,182 @@
-/** EN 1993-1-1 6.3.1 and BB.1.2. Practice-facts D3. */
+/** EN 1993-1-1 6.3.1 and BB.1.2, EN 1993-1-5 4.4. Practice-facts D3. */
 import type { CompressionQuestion, SectionShape } from '../model.ts';
 import { partialFactors } from '../tension/en.ts';
 import { resistance, Working } from '../working.ts';
 import { perry } from './curves.ts';
-import { type CompressionPack, oneLegConditions } from './pack.ts';
+import { legsOf, longAndShort } from './legs.ts';
+import { CROSSED, ONE_LEG, requireFirmEnds, requireNothingAcross, requireSameLeg } from './oneLegTerms.ts';
+import type { CompressionPack } from './pack.ts';
 
-/** Table 6.2: curve b for angles; from memory for the others: hot-finished tubes a, flats and rods c, tees and channels c, double angles c. */
-const IMPERFECTION: Readonly<Record<SectionShape, number>> = {
-  angle: 0.34,
-  'angles back to back': 0.34,
-  'starred angles': 0.34,
-  flat: 0.49,
-  rod: 0.49,
-  tee: 0.49,
-  channel: 0.49,
-  'round tube': 0.49,
-  'square tube': 0.49,
+/**
+ * Table 6.2: curve b for angles (2005, up to S460); for the others from memory: c for solid sections, tees and channels. Tubes are taken as cold formed, c
+ * (hot finished ones have a); pairs of angles, which the table does not name, as c too.
+ */
+const CURVES: Readonly<Record<SectionShape, 'b' | 'c'>> = {
+  angle: 'b',
+  'angles back to back': 'c',
+  'starred angles': 'c',
+  flat: 'c',
+  rod: 'c',
+  tee: 'c',
+  channel: 'c',
+  'round tube': 'c',
+  'square tube': 'c',
 };
+const IMPERFECTION = { b: 0.34, c: 0.49 } as const;
 
-/** Legs that are class 4 by Table 5.2 keep what EN 1993-1-5 4.4 leaves of them. */
-function effectiveShare({ section, steel }: CompressionQuestion, working: Working): number {
-  if (section.shape !== 'angle' && !section.shape.includes('angles')) return 1;
+/** Table 5.2, sheet 3: class 3 needs both. Legs that fail keep what EN 1993-1-5 4.4 leaves of them, often all. */
+function effectiveArea({ section, steel }: CompressionQuestion, working: Working): number {
+  const gross = section.properties.area;
+  const legs = legsOf(section);
+  if (legs.length === 0) return gross;
   const eps = Math.sqrt(235 / steel.fy);
-  const legs = [section.connectedLeg, section.outstandingLeg];
-  const [h, b] = [Math.max(...legs), Math.min(...legs)];
+  const [h, b] = longAndShort(section);
   const t = section.thickness;
-  if (h / t <= 15 * eps && (b + h) / (2 * t) <= 11.5 * eps) return 1;
-  const lost = legs.reduce((sum, leg) => {
-    const slender = leg / t / (28.4 * eps * Math.sqrt(0.43));
-    const rho = slender <= 0.748 ? 1 : (slender - 0.188) / slender ** 2;
-    return sum + (1 - rho) * leg * t;
-  }, 0);
-  return working.step(
-    'effective area over area',
-    'A_eff/A',
-    'class 4 by Table 5.2; ρ of EN 1993-1-5 4.4 for each leg',
-    Math.max(0, 1 - lost / section.properties.area),
-    'ratio',
-  );
+  if (h / t <= 15 * eps && (b + h) / (2 * t) <= 11.5 * eps) return gross;
+  working.step('of the steel', 'ε', '√(235/f_y)', eps, 'factor');
+  working.given('thickness', 't', t, 'length');
+  let lost = 0;
+  for (const { name, index, width, thickness, count } of legs) {
+    working.given(`width of the ${name}`, `b_${index}`, width, 'length');
+    const slender = working.step(
+      `relative slenderness of the ${name}, class 4`,
+      `λ̄_p${index}`,
+      `(b_${index}/t)/(28.4 ε √0.43)`,
+      width / thickness / (28.4 * eps * Math.sqrt(0.43)),
+      'ratio',
+    );
+    const rho = working.step(
+      `share left of the ${name}`,
+      `ρ_${index}`,
+      slender <= 0.748 ? '1, up to 0.748' : `(λ̄_p${index} − 0.188)/λ̄_p${index}²`,
+      slender <= 0.748 ? 1 : Math.min(1, (slender - 0.188) / slender ** 2),
+      'factor',
+    );
+    lost += count * (1 - rho) * width * thickness;
+  }
+  return working.step('effective area', 'A_eff', 'A − Σ(1 − ρ) b t', gross - lost, 'area');
 }
 
-function strengthAt(question: CompressionQuestion, lambda: number, share: number, working: Working): number {
+function strengthAt(question: CompressionQuestion, lambda: number, area: number, working: Working): number {
   const { section, steel, options } = question;
-  const alpha = working.given('imperfection', 'α', IMPERFECTION[section.shape], 'factor');
-  const chi = working.step('reduction', 'χ', '1/(Φ + √(Φ² − λ̄²))', perry(lambda, alpha), 'factor');
+  const curve = CURVES[section.shape];
+  const alpha = working.given(`imperfection, curve ${curve}`, 'α', IMPERFECTION[curve], 'factor');
+  const { phi, chi } = perry(lambda, alpha);
+  working.step('Perry’s term', 'Φ', '0.5 [1 + α (λ̄ − 0.2) + λ̄²]', phi, 'factor');
+  working.step('reduction', 'χ', '1/(Φ + √(Φ² − λ̄²)), 1 at most', chi, 'factor');
   const gamma = working.given('partial factor', 'γ_M1', partialFactors(options).M1, 'factor');
   return working.step(
     'resistance',
     'N_b,Rd',
-    share < 1 ? 'χ A_eff f_y/γ_M1' : 'χ A f_y/γ_M1',
-    (chi * share * section.properties.area * steel.fy) / gamma,
+    `χ ${symbolOf(question, area)} f_y/γ_M1`,
+    (chi * area * steel.fy) / gamma,
     'force',
   );
 }
+
+const symbolOf = ({ section }: CompressionQuestion, area: number): string =>
+  area < section.properties.area ? 'A_eff' : 'A';
+
+const TAKEN_FOR_GRANTED =
+  'The rule takes for granted that what the gussets sit on keeps the ends from turning. Eccentricity is then left out.';
 
 export const EN: CompressionPack = {
   column: {
     standard: 'EN 1993-1-1',
     clause: '6.3.1, Table 6.2',
-    twistClause: '6.3.1, 6.3.1.4',
     confidence: 'from memory, sure',
+    twist: { clause: '6.3.1.4, Table 6.2', confidence: 'from memory, sure' },
+    twistLeftOut: () => null,
+    remark: () => null,
     strength: (question, Fe, working) => {
-      const share = effectiveShare(question, working);
+      const { section, steel } = question;
+      const fy = working.given('yield stress', 'f_y', steel.fy, 'stress');
+      const area = effectiveArea(question, working);
       const lambda = working.step(
         'relative slenderness',
         'λ̄',
-        '√(A f_y/N_cr)',
-        Math.sqrt((share * question.steel.fy) / Fe),
+        `√(${symbolOf(question, area)} f_y/N_cr)`,
+        Math.sqrt((area * fy) / (section.properties.area * Fe)),
         'ratio',
       );
-      return strengthAt(question, lambda, share, working);
+      return strengthAt(question, lambda, area, working);
     },
   },
   oneLeg: (question) => {
     const working = new Working();
-    oneLegConditions(question, working, null);
-    const { section, steel, unbraced } = question;
-    const { rx, ry, rv } = section.properties;
-    const share = effectiveShare(question, working);
-    const one = Math.PI * Math.sqrt(steel.E / steel.fy);
-    const relative = (L: number, r: number): number => ((L / r) * Math.sqrt(share)) / one;
+    requireSameLeg(question, working);
+    requireFirmEnds(question, working);
+    requireNothingAcross(question, working);
+    const { section, steel, unbraced, joinedBetween, length } = question;
+    const { area: gross, rx, ry, rv } = section.properties;
+    working.given('area', 'A', gross, 'area');
+    const fy = working.given('yield stress', 'f_y', steel.fy, 'stress');
+    const E = working.given('modulus', 'E', steel.E, 'stress');
+    const area = effectiveArea(question, working);
+    const share =
+      area < gross
+        ? working.step('root of the share', '√β', '√(A_eff/A)', Math.sqrt(area / gross), 'ratio')
+        : 1;
+    const one = working.step(
+      'slenderness at yield',
+      'λ_1',
+      'π √(E/f_y)',
+      Math.PI * Math.sqrt(E / fy),
+      'slenderness',
+    );
+    const relative = (about: string, axis: 'v' | 'x' | 'y', L: number, r: number): number => {
+      working.given(`length ${about}`, `L_${axis}`, L, 'length');
+      working.given(`radius ${about}`, `r_${axis}`, r, 'length');
+      return working.step(
+        `relative slenderness ${about}`,
+        `λ̄_${axis}`,
+        `(L_${axis}/r_${axis})${share < 1 ? ' √β' : ''}/λ_1`,
+        ((L / r) * share) / one,
+        'ratio',
+      );
+    };
+    const lv = relative('about the minor axis', 'v', unbraced.v, rv);
+    const lx = relative('about the axis along the shorter leg', 'x', joinedBetween ? length : unbraced.x, rx);
+    const ly = relative('about the axis along the longer leg', 'y', joinedBetween ? length : unbraced.y, ry);
+    const eased = 0.35 + 0.7 * lv;
     const v = working.step(
-      'about v',
+      'effective, about the minor axis',
       'λ̄_eff,v',
-      '0.35 + 0.7 λ̄_v',
-      0.35 + 0.7 * relative(unbraced.v, rv),
+      joinedBetween ? 'max(0.35 + 0.7 λ̄_v, λ̄_v)' : '0.35 + 0.7 λ̄_v',
+      joinedBetween ? Math.max(eased, lv) : eased,
       'ratio',
     );
     const x = working.step(
-      'about the axis along the shorter leg',
-      'λ̄_eff,y',
-      '0.50 + 0.7 λ̄_y',
-      0.5 + 0.7 * relative(unbraced.x, rx),
+      'effective, along the shorter leg',
+      'λ̄_eff,x',
+      '0.50 + 0.7 λ̄_x',
+      0.5 + 0.7 * lx,
       'ratio',
     );
     const y = working.step(
-      'about the axis along the longer leg',
-      'λ̄_eff,z',
-      '0.50 + 0.7 λ̄_z',
-      0.5 + 0.7 * relative(unbraced.y, ry),
+      'effective, along the longer leg',
+      'λ̄_eff,y',
+      '0.50 + 0.7 λ̄_y',
+      0.5 + 0.7 * ly,
       'ratio',
     );
-    const lambda = working.step('the worst', 'λ̄_eff', 'max', Math.max(v, x, y), 'ratio');
+    const lambda = working.step(
+      'the worst',
+      'λ̄',
+      'max(λ̄_eff,v, λ̄_eff,x, λ̄_eff,y)',
+      Math.max(v, x, y),
+      'ratio',
+    );
     return resistance(
       {
-        kind: 'compression, one leg',
-        title: 'Compression of an angle by one leg',
-        against: 'compression',
-        resistance: strengthAt(question, lambda, share, working),
+        ...ONE_LEG,
+        resistance: strengthAt(question, lambda, area, working),
         standard: 'EN 1993-1-1',
-        clause: 'BB.1.2, (BB.1)',
+        clause: 'BB.1.2, (BB.1), 6.3.1',
         confidence: 'from memory, sure',
-        note: question.joinedBetween
-          ? 'Lengths between holds by the marks; the crossing’s one bolt fixes the end of a half less than the rule takes for granted.'
-          : null,
+        note: joinedBetween
+          ? `${TAKEN_FOR_GRANTED} ${CROSSED}; so the whole length is taken about the axes along the legs, and about the minor axis the length between holds without relief.`
+          : TAKEN_FOR_GRANTED,
       },
       working,
     );
