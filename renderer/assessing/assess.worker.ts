@@ -51,6 +51,12 @@ const api: AssessApi = {
       massPerMetre: angle.massPerMetre,
     })),
   }),
+  section: (catalogue, own, typed) => {
+    const found = stockOf(catalogue, own, catalogues).find(typed);
+    return found.ok
+      ? { designation: found.angle.designation, nearest: [] }
+      : { designation: null, nearest: found.nearest };
+  },
   report: (snapshot, { date, fonts }) => {
     const assessment = assessed(snapshot);
     const remedies = new Map(

@@ -56,6 +56,13 @@ export interface StockChoices {
   readonly choices: readonly SectionChoice[];
 }
 
+/** What a typed designation means, whatever list it is in; the nearest ones where it means nothing. */
+export interface SectionFound {
+  /** Null where no list has it. */
+  readonly designation: string | null;
+  readonly nearest: readonly string[];
+}
+
 export interface AssessApi {
   assess(snapshot: Snapshot): AssessAnswer;
   remedies(snapshot: Snapshot, finding: string): readonly Remedy[];
@@ -66,6 +73,7 @@ export interface AssessApi {
   push(snapshot: Snapshot, bar: BarId, at: number): PushTest | null;
   reliance(snapshot: Snapshot, bay: string): readonly Reliance[];
   stock(catalogue: CatalogueId, own: readonly OwnAngle[]): StockChoices;
+  section(catalogue: CatalogueId, own: readonly OwnAngle[], typed: string): SectionFound;
   /** One HTML document that stands alone. */
   report(snapshot: Snapshot, print: { readonly date: string; readonly fonts: string }): string;
   scheduleCsv(snapshot: Snapshot): string;

@@ -2,12 +2,13 @@ import { Popover } from 'radix-ui';
 import { type JSX, type KeyboardEvent, useEffect, useId, useRef, useState } from 'react';
 import type { UnitSystem } from '../../core/project/model.ts';
 import { showMassPerMetre } from '../../core/units/quantity.ts';
-import type { SectionChoice } from '../assessing/assessApi.ts';
+import type { SectionChoice, SectionFound } from '../assessing/assessApi.ts';
 import { StepSign } from '../glyphs/signs.tsx';
 import { shownSection } from './figures.ts';
 import { Row } from './Row.tsx';
 import { matchingSections, onlySection } from './sectionMatch.ts';
 import { useOverlays } from './useOverlays.ts';
+import { useRefusal } from './useRefusal.ts';
 
 interface SectionFieldProps {
   readonly label: string;
@@ -15,20 +16,22 @@ interface SectionFieldProps {
   readonly choices: readonly SectionChoice[];
   readonly units: UnitSystem;
   readonly bare?: boolean;
+  /** What a designation means that the list offered does not have. */
+  onFind(typed: string): Promise<SectionFound>;
   onChange(designation: string): string | null;
 }
 
 /** An angle by its designation, with the stock list narrowing as one types. */
 export function SectionField(props: SectionFieldProps): JSX.Element {
   const overlays = useOverlays();
-  const { label, designation, choices, units, bare = false, onChange } = props;
+  const { label, designation, choices, units, bare = false, onFind, onChange } = props;
   const id = useId();
   const listId = `${id}-list`;
   const messageId = `${id}-message`;
   const [typed, setTyped] = useState<string | null>(null);
   const [open, setOpen] = useState(false);
   const [active, setActive] = useState(0);
-  const [message, setMessage] = useState<string | null>(null);
+  const [message, setMessage] = useRefusal(designation);
   const activeOption = useRef<HTMLDivElement>(null);
 
   const offered = matchingSections(choices, typed ?? '');
@@ -57,13 +60,17 @@ export function SectionField(props: SectionFieldProps): JSX.Element {
     const chosen = leaving ? onlySection(offered, typed) : offered[active];
     if (chosen !== undefined) take(chosen.designation);
     else {
-      setMessage(
-        offered.length === 0
-          ? `No angle of the stock list is called “${typed.trim()}”. Pick one from the list, or add it to the own stock list.`
-          : `“${typed.trim()}” could be several angles: pick one from the list. The old one stays.`,
-      );
+      if (offered.length === 0) void takeFromElsewhere(typed.trim());
+      else
+        setMessage(`“${typed.trim()}” could be several angles: pick one from the list. The old one stays.`);
       if (leaving) setTyped(null);
     }
+  };
+  /** Not in the list offered: another stock list may have it, or it may be written otherwise. */
+  const takeFromElsewhere = async (wanted: string): Promise<void> => {
+    const found = await onFind(wanted).catch(() => null);
+    if (found !== null && found.designation !== null) take(found.designation);
+    else setMessage(notFound(wanted, found?.nearest ?? []));
   };
 
   const onKeyDown = (event: KeyboardEvent<HTMLInputElement>): void => {
@@ -160,7 +167,9 @@ export function SectionField(props: SectionFieldProps): JSX.Element {
               </div>
             ))}
           </div>
-          {offered.length === 0 && <p className="section-none">No angle in stock is called that.</p>}
+          {offered.length === 0 && (
+            <p className="section-none">None in this list; Enter looks in the others.</p>
+          )}
         </Popover.Content>
       </Popover.Portal>
     </Popover.Root>
@@ -182,4 +191,9 @@ export function SectionField(props: SectionFieldProps): JSX.Element {
       )}
     </div>
   );
+}
+
+function notFound(wanted: string, nearest: readonly string[]): string {
+  const near = nearest.length === 0 ? '' : ` Nearest: ${nearest.map(shownSection).join(', ')}.`;
+  return `No stock list has “${wanted}”.${near} Pick one from the list, or add it to the own stock list. The old one stays.`;
 }

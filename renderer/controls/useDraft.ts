@@ -1,4 +1,5 @@
 import { useState } from 'react';
+import { useRefusal } from './useRefusal.ts';
 
 /** What came of reading a text that was typed. */
 export type Reading<T> =
@@ -28,7 +29,7 @@ export function useDraft<T>(
   onValue: (value: T) => string | null,
 ): Draft {
   const [typed, setTyped] = useState<string | null>(null);
-  const [message, setMessage] = useState<string | null>(null);
+  const [message, setMessage] = useRefusal(shown);
 
   const commit = (leaving: boolean): void => {
     if (typed === null) return;

@@ -1,6 +1,7 @@
 import type { JSX } from 'react';
 import type { AngleBar, Bar } from '../../../core/layout/model.ts';
 import type { BarMark, UnitSystem } from '../../../core/project/model.ts';
+import { useFindSection } from '../../assessing/useFindSection.ts';
 import { useStockChoices } from '../../assessing/useStockChoices.ts';
 import { NumberField } from '../../controls/NumberField.tsx';
 import { SectionField } from '../../controls/SectionField.tsx';
@@ -31,6 +32,7 @@ const OWN: readonly (keyof BarMark)[] = [
 export function BarMarks({ bar, angle, units }: BarMarksProps): JSX.Element {
   const actions = useActions();
   const stock = useStockChoices();
+  const find = useFindSection();
   const trying = useWindow((state) => state.trying !== null);
   const { spec, mark } = angle;
   const own = OWN.filter((key) => mark[key] !== undefined);
@@ -59,6 +61,7 @@ export function BarMarks({ bar, angle, units }: BarMarksProps): JSX.Element {
           label="Section"
           designation={spec.section}
           choices={stock?.choices ?? []}
+          onFind={find}
           units={units}
           onChange={(section) => edit({ section }, 'section')}
         />

@@ -1,5 +1,6 @@
 import type { JSX } from 'react';
 import type { Bay, UnitSystem } from '../../../core/project/model.ts';
+import { useFindSection } from '../../assessing/useFindSection.ts';
 import { useStockChoices } from '../../assessing/useStockChoices.ts';
 import { LengthField } from '../../controls/LengthField.tsx';
 import { SectionField } from '../../controls/SectionField.tsx';
@@ -22,6 +23,7 @@ export function DiagonalFields({
   const edit = useDiagonalsEdit(bay);
   const actions = useActions();
   const stock = useStockChoices();
+  const find = useFindSection();
   const { diagonals } = bay;
   // While a change is on trial, what it replaces is shown struck.
   const was = useWindow((state) =>
@@ -41,6 +43,7 @@ export function DiagonalFields({
         label="Section"
         designation={diagonals.section}
         choices={stock?.choices ?? []}
+        onFind={find}
         units={units}
         onChange={(section) => edit({ section }, 'section')}
       />

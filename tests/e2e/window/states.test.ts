@@ -75,6 +75,32 @@ describe('a field', () => {
     await close();
   });
 
+  it('is no longer refused once anything else has changed', async () => {
+    const { page, close } = await stand.open();
+    await choose(page, 'D1');
+    const recipe = page.getByRole('region', { name: 'Recipe of W1' });
+    await recipe.getByRole('spinbutton', { name: 'Width' }).first().fill('wide');
+    await recipe.getByRole('spinbutton', { name: 'Tiers' }).first().focus();
+    await recipe.getByRole('alert').first().waitFor();
+    await recipe.getByRole('spinbutton', { name: 'Tiers' }).first().press('ArrowUp');
+    await expect.poll(() => recipe.getByRole('alert').count()).toBe(0);
+    await close();
+  });
+
+  it('for a section takes one of another stock list, and names the nearest where no list has it', async () => {
+    const { page, close } = await stand.open();
+    await choose(page, 'D1');
+    const recipe = page.getByRole('region', { name: 'Recipe of W1' });
+    const section = recipe.getByRole('combobox', { name: 'Section' });
+    await section.fill('71x71x6');
+    await section.press('Enter');
+    await expect.poll(() => recipe.getByRole('alert').first().textContent()).toMatch(/Nearest: .*70×70×6/);
+    await section.fill('L3x3x1/4');
+    await section.press('Enter');
+    await expect.poll(() => row(page, 'D1').textContent()).toMatch(/L3[×X]3[×X]1\/4/);
+    await close();
+  });
+
   it('takes feet and inches in US units', async () => {
     const { page, close } = await stand.open();
     await choose(page, 'D1');
