@@ -81,14 +81,7 @@ function rowOf(
     unbraced: restraint && byAxis(restraint, (lane) => lane.unbraced),
     radius: restraint && byAxis(restraint, (lane) => lane.radius),
     slenderness: restraint && byAxis(restraint, (lane) => lane.slenderness),
-    governing: restraint && {
-      axis: restraint.governing.axis,
-      angle: restraint.governing.angle,
-      length: restraint.governing.length,
-      radius: restraint.governing.radius,
-      slenderness: restraint.governing.slenderness,
-      basis: restraint.governing.basis,
-    },
+    ...(restraint ? governingOf(restraint, diagonal.inService) : { governing: null, bound: null }),
     limit: diagonal.limit.limit,
     handling: rowVerdict(diagonal.handling),
     inService: rowVerdict(diagonal.inService),
@@ -114,6 +107,21 @@ function rowOf(
 
 /** Where something acts, what is used most: "net rupture, end i, 13.2(a)(iii)". */
 function checkWords(check: Check | null): string | null {
+/** What the verdict rests on: the rule's span, a length set by hand, or of mixed holds the exact figure with the rule's bound beside it. */
+function governingOf(
+  { governing }: Restraint,
+  inService: Verdict | null,
+): Pick<ScheduleRow, 'governing' | 'bound'> {
+  const { axis, angle, length, radius, slenderness, basis } = governing;
+  if (basis !== 'mixed bound')
+    return { governing: { axis, angle, length, radius, slenderness, basis }, bound: null };
+  const exact = inService?.slenderness ?? slenderness;
+  return {
+    governing: { axis, angle, length: exact * radius, radius, slenderness: exact, basis: 'exact' },
+    bound: { length, radius, slenderness },
+  };
+}
+
   if (check === null || check.utilisation === null) return null;
   const { kind, end, clause } = check.resistance;
   return [kind, ...(end === null ? [] : [`end ${end}`]), clause].join(', ');

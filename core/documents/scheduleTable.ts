@@ -100,7 +100,7 @@ function cellsOf(row: ScheduleRow, units: UnitSystem): readonly string[] {
 function axisCell({ axis, angle, basis }: NonNullable<ScheduleRow['governing']>): string {
   const name = axis === 'free' ? `free, ${grouped(angle ?? 0, 0)}°` : axis;
   if (basis === 'span') return name;
-  return basis === 'override' ? `${name}, by hand` : `${name}, bound`;
+  return basis === 'override' ? `${name}, by hand` : `${name}, exact`;
 }
 
 function verdictCell(verdict: RowVerdict | null): string {
@@ -111,8 +111,8 @@ function verdictCell(verdict: RowVerdict | null): string {
 
 /** Each length or factor set by hand, once a bar and axis, with its reason. */
 function handLines(rows: readonly ScheduleRow[], units: UnitSystem): readonly string[] {
-  return rows.flatMap((row) =>
-    row.overrides.map((override) =>
+  return rows.flatMap((row) => [
+    ...row.overrides.map((override) =>
       oneLine(`${BY_HAND} ${row.bay} ${row.mark}, set by hand: ${overrideWords(override, units)}`),
     ),
   );

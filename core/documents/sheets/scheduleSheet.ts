@@ -54,8 +54,8 @@ function governingAxis({ axis, angle, basis }: NonNullable<ScheduleRow['governin
   switch (basis) {
     case 'span':
       return name;
-    case 'mixed bound':
-      return `${name}, bound`;
+    case 'exact':
+      return `${name}, exact`;
     case 'override':
       return `${name}, by hand`;
     default:

@@ -119,6 +119,6 @@ function isLane(column: ColumnId): boolean {
 
 function governs(column: ColumnId, row: ScheduleRow): boolean {
   return (
-    row.governing !== null && LANES[column] === row.governing.axis && row.governing.basis !== 'mixed bound'
+    row.governing !== null && LANES[column] === row.governing.axis && row.governing.basis !== 'exact'
   );
 }

@@ -123,5 +123,5 @@ function governingText({ governing }: ScheduleRow): string {
   if (governing === null) return '–';
   if (governing.axis === 'free')
     return governing.angle === null ? 'askew' : `${Math.round(governing.angle)}°`;
-  return governing.basis === 'mixed bound' ? 'mixed' : governing.axis;
+  return governing.basis === 'exact' ? 'mixed' : governing.axis;
 }

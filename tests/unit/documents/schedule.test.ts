@@ -1,7 +1,10 @@
 import { describe, expect, it } from 'vitest';
+import { assess } from '../../../core/assess.ts';
 import type { ScheduleRow } from '../../../core/documents/model.ts';
 import { scheduleCsv } from '../../../core/documents/scheduleCsv.ts';
 import { scheduleTable } from '../../../core/documents/scheduleTable.ts';
+import { bay, line, project, roof } from '../assess/given/bays.ts';
+import { CATALOGUES } from '../assess/given/catalogues.ts';
 import { crossedTier, RISE } from './given.ts';
 
 // Radii of 70x70x6 from the areas and second moments of METHODS.md §1: A 812.69 mm², Ix 368 840, Iu 585 000, Iv 152 679 mm⁴.
@@ -102,6 +105,50 @@ describe('other joins in the schedule', () => {
     expect(row.overrides).toEqual(overrides);
     expect(row.unbraced?.y).toBe(2500);
     expect(scheduleCsv([row], 'metric')).toContain('y: 2.50 m, because tied back, see sketch 4');
+  });
+});
+
+describe('a bar with mixed holds in the schedule', () => {
+  // Purlins at 1 and 3 m stop D1 out of the plane alone, its partner at 2 m in the plane alone.
+  const lines = [line('P1', 1000), line('P2', 3000)];
+  const joins = Object.fromEntries(
+    lines.map(({ id }) => [`${id}+a.p1.rise`, { kind: 'purlin', boltsAcross: 1 } as const]),
+  );
+  const mixed = assess(
+    project([
+      bay(roof(3000, 10, [[4000, 'crossed']], lines), {
+        joins: { 'a.p1.fall+a.p1.rise': { kind: 'bolted' }, ...joins },
+      }),
+    ]),
+    CATALOGUES,
+  );
+  const row = mixed.schedule.find(({ bar }) => bar === 'B/a.p1.rise');
+
+  it('is governed by the exact figure that its verdict rests on, with the bound beside it', () => {
+    expect(row?.governing?.basis).toBe('exact');
+    expect(row?.governing?.slenderness).toBe(row?.inService?.slenderness);
+    expect(row?.bound?.slenderness).toBe(
+      mixed.diagonals.get('B/a.p1.rise')?.restraint?.governing.slenderness,
+    );
+    expect(row?.bound?.slenderness).toBeGreaterThan(row?.governing?.slenderness ?? Infinity);
+    // Length over radius is the slenderness, in the figures as in any other row. Rounding of one division.
+    expect((row?.governing?.length ?? 0) / (row?.governing?.radius ?? 0)).toBeCloseTo(
+      row?.governing?.slenderness ?? -1,
+      9,
+    );
+  });
+
+  it('says one figure throughout its line of the table and of the CSV', () => {
+    const said = String(Math.round(row?.inService?.slenderness ?? 0));
+    const told = scheduleTable(row ? [row] : [], 'metric').split('\n')[2] ?? '';
+    expect(told).toMatch(new RegExp(`, exact +${said} +300 +${said} within`));
+    expect(scheduleCsv(row ? [row] : [], 'metric')).toContain(
+      `,exact,${row?.bound?.slenderness.toFixed(1)},`,
+    );
+  });
+
+  it('has no bound where the holds are not mixed', () => {
+    expect(rowOf(crossedTier({ join: { kind: 'bolted' } })).bound).toBeNull();
   });
 });
 
