@@ -115,7 +115,7 @@ function handLines(rows: readonly ScheduleRow[], units: UnitSystem): readonly st
     ...row.overrides.map((override) =>
       oneLine(`${BY_HAND} ${row.bay} ${row.mark}, set by hand: ${overrideWords(override, units)}`),
     ),
-  );
+  ]);
 }
 
 /** Each finding once, with the marks of the bars it names. */
