@@ -7,7 +7,7 @@ import type { WindowState } from '../../store/windowState.ts';
 import { shortcutText } from '../commands/command.ts';
 import { COMMANDS, runCommand } from '../commands/commands.ts';
 import type { Services } from '../services.tsx';
-import { scoreOf } from './fuzzy.ts';
+import { isWhole, scoreOf } from './fuzzy.ts';
 
 export type FindableKind = 'Diagonals' | 'Bays' | 'Crossings' | 'Findings' | 'Commands';
 
@@ -22,6 +22,8 @@ export interface Findable {
 const KINDS: readonly FindableKind[] = ['Diagonals', 'Bays', 'Crossings', 'Findings', 'Commands'];
 /** Of one kind, so that a long project leaves room for the others. */
 const MOST_OF_A_KIND = 6;
+/** Puts what is called exactly so before all that only fits, however long the rest of what is told of it. */
+const WHOLE_NAME = 100;
 
 /** What fits what was typed, best first within each kind, the kind of the best fit first. */
 export function found(typed: string, state: WindowState): readonly Findable[] {
@@ -29,7 +31,8 @@ export function found(typed: string, state: WindowState): readonly Findable[] {
   if (typed.trim() === '') return all.filter(({ kind }) => kind === 'Commands').slice(0, 12);
   const fitting = all.flatMap((findable) => {
     const score = scoreOf(typed, `${findable.label} ${findable.aside}`);
-    return score === null ? [] : [{ findable, score }];
+    if (score === null) return [];
+    return [{ findable, score: score + (isWhole(typed, findable.label) ? WHOLE_NAME : 0) }];
   });
   const byKind = KINDS.map((kind) =>
     fitting

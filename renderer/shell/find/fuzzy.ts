@@ -17,10 +17,15 @@ export function scoreOf(typed: string, text: string): number | null {
   return total - whole.length / 1000;
 }
 
+/** Whether a text is what was typed, whole: "d1" is D1, and not D10. */
+export function isWhole(typed: string, text: string): boolean {
+  return plain(typed) !== '' && plain(typed) === plain(text);
+}
+
 function wordFit(word: string, text: string): number | null {
   if (text === word) return 5;
   const at = text.indexOf(word);
-  if (at === 0) return 4;
+  if (at === 0) return text[word.length] === ' ' ? 4.5 : 4;
   if (at > 0) return text[at - 1] === ' ' ? 3 : 2;
   return inOrder(word, text) ? 1 : null;
 }

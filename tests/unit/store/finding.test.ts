@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import type { SectionChoice } from '../../../renderer/assessing/assessApi.ts';
 import { matchingSections, onlySection } from '../../../renderer/controls/sectionMatch.ts';
-import { scoreOf } from '../../../renderer/shell/find/fuzzy.ts';
+import { isWhole, scoreOf } from '../../../renderer/shell/find/fuzzy.ts';
 
 describe('finding by a few letters', () => {
   const better = (typed: string, good: string, worse: string): boolean =>
@@ -12,6 +12,13 @@ describe('finding by a few letters', () => {
     expect(better('save', 'Save as', 'Autosave')).toBe(true);
     expect(better('as', 'Save as', 'Phase')).toBe(true);
     expect(better('sav', 'Autosave', 'Set a value')).toBe(true);
+  });
+
+  it('puts a mark that was typed whole before those that begin so', () => {
+    expect(better('d1', 'D1 W1, 90×90×7 and a long name', 'D12 W1, 70×70×6')).toBe(true);
+    expect(isWhole('d1', 'D1')).toBe(true);
+    expect(isWhole('d1', 'D10')).toBe(false);
+    expect(isWhole(' ', '')).toBe(false);
   });
 
   it('wants every word that was typed', () => {
