@@ -41,7 +41,7 @@ h2, h3 { font-weight: 600; font-size: 12.5px; line-height: 18px; border-top: 1.5
 h3 { border-top-width: .8px; font-size: 11.5px; margin-top: 7px; }
 h2.bar { font-size: 16px; line-height: 22px; }
 h2 small, h3 small { font-weight: 400; font-size: 11px; margin-left: auto; text-align: right; }
-p { margin-bottom: 4px; }
+p { margin-bottom: 4px; orphans: 3; widows: 3; }
 p.small { font-size: 11px; line-height: 14px; margin-top: 4px; }
 .cells { display: flex; border-top: 1px solid #000; border-bottom: 1px solid #000; }
 .cells > div { flex: 1 1 auto; padding: 4px 8px 5px; }
@@ -83,6 +83,7 @@ b { font-weight: 600; }
 .bay { break-before: page; }
 .diagonal { margin: 18px 0; }
 .keep { break-inside: avoid; }
+.last { break-before: avoid; }
 .topline { display: grid; grid-template-columns: 220px 1fr; gap: 18px; align-items: start; }
 .topline p { margin-top: 7px; }
 .key { font-size: 11px; display: flex; flex-wrap: wrap; gap: 6px; align-items: center; margin-top: 5px; }
