@@ -9,6 +9,11 @@ export function csvText(lines: readonly (readonly CsvCell[])[]): string {
   return lines.map((cells) => cells.map(csvCell).join(',') + LINE_END).join('');
 }
 
+/** The same as a file: spreadsheets take a file for UTF-8 by the byte-order mark before it, and guess without. */
+export function csvFile(text: string): string {
+  return `\uFEFF${text}`;
+}
+
 function csvCell(cell: CsvCell): string {
   if (cell === null) return '';
   if (typeof cell === 'number') return Number.isFinite(cell) ? String(cell) : '';

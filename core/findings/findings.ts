@@ -6,6 +6,7 @@ import { crossingFindings } from './crossings.ts';
 import { holderFindings } from './holders.ts';
 import { markFindings } from './marks.ts';
 import type { Finding, Severity } from './model.ts';
+import { nameFindings } from './names.ts';
 import { patternFindings } from './patterns.ts';
 import { slendernessFindings } from './slenderness.ts';
 import type { FindingInput, FindingSubject } from './subject.ts';
@@ -20,6 +21,7 @@ export function findingsOf(input: FindingInput): readonly Finding[] {
   return [
     ...barFindings(subject),
     ...markFindings(subject),
+    ...nameFindings(subject),
     ...slendernessFindings(subject),
     ...crossingFindings(subject),
     ...holderFindings(subject),

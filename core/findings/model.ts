@@ -5,6 +5,7 @@ export type FindingKind =
   | 'too slender to handle'
   | 'crossing unmarked'
   | 'mark given twice'
+  | 'names what is not there'
   | 'too far apart to join'
   | 'hold without a holder'
   | 'clash'

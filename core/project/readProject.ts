@@ -24,7 +24,8 @@ const MOST_PROBLEMS = 20;
 export function readProject(text: string): ProjectRead {
   let data: unknown;
   try {
-    data = JSON.parse(text);
+    // Some editors put a byte-order mark before a text.
+    data = JSON.parse(text.replace(/^\uFEFF/, ''));
   } catch (error) {
     const where = error instanceof Error ? ` (${error.message})` : '';
     return refuse(

@@ -17,6 +17,7 @@ import {
   weldTheCrossing,
 } from './joining.ts';
 import { clearTheMarks } from './marks.ts';
+import { takeIdleEntriesAway } from './names.ts';
 import { changePattern, countOnBoth, crossOpenPanels, kneesOnBothSides } from './patterns.ts';
 import type { Proposal } from './proposal.ts';
 import { handlingSections, heavier, nearestSections, otherSections, turnTheLeg } from './sections.ts';
@@ -44,6 +45,8 @@ export function proposalsFor(
         : markLines(assessment, finding.bay);
     case 'mark given twice':
       return clearTheMarks(assessment, finding);
+    case 'names what is not there':
+      return takeIdleEntriesAway(assessment, finding);
     case 'too far apart to join':
       return sayNotJoined(finding);
     case 'hold without a holder':

@@ -1,5 +1,6 @@
 import { type Command, Option } from 'commander';
 import { assess } from '../../core/assess.ts';
+import { csvFile } from '../../core/documents/csv.ts';
 import { scheduleCsv } from '../../core/documents/scheduleCsv.ts';
 import { scheduleTable } from '../../core/documents/scheduleTable.ts';
 import type { UnitSystem } from '../../core/project/model.ts';
@@ -43,7 +44,11 @@ export function addScheduleCommand(program: Command, ending: Ending): void {
       const units = options.units ?? project.value.settings.units;
       const text = {
         table: () => scheduleTable(assessment.schedule, units),
-        csv: () => scheduleCsv(assessment.schedule, units),
+        csv: () => {
+          const csv = scheduleCsv(assessment.schedule, units);
+          // What goes on to another program begins with its first head.
+          return options.out === undefined ? csv : csvFile(csv);
+        },
         json: () => jsonText(assessment.schedule),
       }[options.format]();
       const delivered = await deliver(text, options.out, terminal, 'replace');

@@ -8,6 +8,7 @@ import { BowingMemory } from '../../core/bowing/memory.ts';
 import type { Catalogues } from '../../core/catalogue/model.ts';
 import { readCatalogue } from '../../core/catalogue/readCatalogue.ts';
 import { stockOf } from '../../core/catalogue/stock.ts';
+import { csvFile } from '../../core/documents/csv.ts';
 import { reportHtml } from '../../core/documents/report.ts';
 import { scheduleCsv } from '../../core/documents/scheduleCsv.ts';
 import type { Project } from '../../core/project/model.ts';
@@ -67,7 +68,8 @@ const api: AssessApi = {
     );
     return reportHtml(assessment, { units: snapshot.project.settings.units, date, fonts, remedies });
   },
-  scheduleCsv: (snapshot) => scheduleCsv(assessed(snapshot).schedule, snapshot.project.settings.units),
+  scheduleCsv: (snapshot) =>
+    csvFile(scheduleCsv(assessed(snapshot).schedule, snapshot.project.settings.units)),
   // As the command line writes it: two spaces of indent, a line feed at the end.
   scheduleJson: (snapshot) => `${JSON.stringify(assessed(snapshot).schedule, null, 2)}\n`,
 };

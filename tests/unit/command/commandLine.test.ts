@@ -157,7 +157,7 @@ describe('schedule', () => {
     const { code, out, err } = await run('schedule', file, '--format', 'csv', '-o', csv);
     expect({ code, out }).toEqual({ code: 0, out: '' });
     expect(err).toContain('schedule.csv: written.');
-    expect(await readFile(csv, 'utf8')).toMatch(/^mark,/);
+    expect(await readFile(csv, 'utf8')).toMatch(/^\uFEFFmark,/);
     expect(await readdir(path.dirname(file))).toEqual(['schedule.csv', 'shed.json']);
   });
 

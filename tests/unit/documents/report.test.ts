@@ -57,6 +57,12 @@ describe('the report', () => {
     expect(html).toContain('D2 is met end-on, and both its halves reach held points.');
   });
 
+  it('keeps the head of a diagonal on one page with its lanes, and its findings with what stands above them', () => {
+    for (const sheet of html.split('<h2 class="bar">').slice(1))
+      expect(sheet.slice(0, sheet.indexOf('aria-label="Lanes"'))).not.toContain('class="keep"');
+    expect(html).toContain('<div class="keep last"><h3>Findings</h3>');
+  });
+
   it('is the same each time, and leaves out a date that is not given', () => {
     expect(reportHtml(crossedTier({ join: { kind: 'bolted' } }), options)).toBe(html);
     expect(reportHtml(crossedTier(), { units: 'metric', date: null })).not.toContain('December');

@@ -1,7 +1,7 @@
 /** Each kind of finding is there when, and only when, its cause is. */
 import { describe, expect, it } from 'vitest';
 import type { Finding, FindingKind } from '../../../core/findings/model.ts';
-import type { Bay, DiagonalSpec, Join, Pattern, Settings } from '../../../core/project/model.ts';
+import type { Bay, DiagonalSpec, Join, Line, Pattern, Settings } from '../../../core/project/model.ts';
 import { newFreeBay, newKneeBay, newRoofBay, newWallBay } from '../../../core/project/newBay.ts';
 import { bay, ENDS, free, knee, line, roof, vouched, wall } from '../assess/given/bays.ts';
 import { assessed } from '../assess/given/reading.ts';
@@ -197,6 +197,46 @@ describe('bars too far apart to be joined', () => {
     expect(lengthAboutV(askew(49, { kind: 'bolted' }))).toBeCloseTo(Math.sqrt(32_000_000) / 2, 6);
     for (const join of [null, { kind: 'none' }] as const)
       expect(found(askew(300, join), 'too far apart to join')).toEqual([]);
+  });
+});
+
+describe('entries of the file that name what is not there', () => {
+  const KIND = 'names what is not there';
+  const rails = (heldBy: Line['heldBy']) => bay(wall(6000, [[4000, 'rising']], [line('G1', 1000, heldBy)]));
+
+  it.each<[string, Bay, string]>([
+    ['a bar', crossed(null, { bars: { 't9.rise': { mark: 'X' } } }), 'bays[0].bars.t9.rise'],
+    [
+      'a bar that is no diagonal',
+      crossed(null, { bars: { 't1.beam': { mark: 'X' } } }),
+      'bays[0].bars.t1.beam',
+    ],
+    ['a crossing', crossed(null, { joins: { 'a+b': { kind: 'bolted' } } }), 'bays[0].joins.a+b'],
+    ['a bar to be cut', crossed({ kind: 'cut', cutBar: 't2.rise' }), `bays[0].joins.${KEY}.cutBar`],
+    ['a join of another kind of crossing', crossed({ kind: 'hung' }), `bays[0].joins.${KEY}`],
+    ['a bay', rails({ kind: 'bay', bay: 'Z' }), 'bays[0].recipe.lines[0].heldBy.bay'],
+    ['its own bay', rails({ kind: 'bay', bay: 'B' }), 'bays[0].recipe.lines[0].heldBy.bay'],
+    ['a crossing with a force', crossed(null, { tensionShares: { 'a+b': 1 } }), 'bays[0].tensionShares.a+b'],
+  ])('are noted for %s, with the place', (_what, made, path) => {
+    const finding = one(made, KIND);
+    expect(finding).toMatchObject({ severity: 'note', breaksLimit: false, path });
+    expect(finding.detail).toContain(path);
+    expect(finding.detail).toMatch(/take it out, or correct the name\.$/);
+  });
+
+  it('are noted for a class of member that the practice does not have', () => {
+    expect(one(crossed(), KIND, { memberClass: 'no such' }).path).toBe('settings.memberClass');
+  });
+
+  it('are told together for one bay, and not where all is there', () => {
+    const both = crossed(null, { bars: { x: { mark: 'X' } }, joins: { 'a+b': { kind: 'none' } } });
+    expect(one(both, KIND).title).toBe('2 entries of B name what is not there');
+    expect(
+      found(crossed({ kind: 'cut', cutBar: 't1.rise' }, { bars: { 't1.rise': { mark: 'X' } } }), KIND),
+    ).toEqual([]);
+    expect(
+      found([rails({ kind: 'bay', bay: 'C' }), bay(wall(6000, [[4000, 'crossed']]), { id: 'C' })], KIND),
+    ).toEqual([]);
   });
 });
 

@@ -40,6 +40,13 @@ function refusal(text: string): readonly ProjectProblem[] {
 
 const first = (text: string): ProjectProblem => refusal(text)[0] ?? { path: '?', what: '', todo: '' };
 
+describe('a file that an editor has put a byte-order mark before', () => {
+  it('opens as the same without', () => {
+    const text = writeProject(sound());
+    expect(readProject(`\uFEFF${text}`)).toEqual(readProject(text));
+  });
+});
+
 describe('a file that is no project', () => {
   it('is refused when it is not JSON', () => {
     const problem = first('{ "format": "tautline-project", ');

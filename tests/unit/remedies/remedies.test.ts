@@ -307,6 +307,22 @@ describe('other findings', () => {
     expect(remedies[0]?.effect.answers).toBe(true);
   });
 
+  it('entries that name what is not there are taken away, and nothing else', () => {
+    const made = bay(wall(6000, [[4000, 'crossed']], [line('G1', 1000, { kind: 'bay', bay: 'Z' })]), {
+      bars: { 't9.rise': { mark: 'X' }, 't1.rise': { mark: 'Y' } },
+      joins: { [KEY]: { kind: 'cut', cutBar: 't2.fall' }, 'a+b': { kind: 'none' } },
+      tensionShares: { 'a+b': 1 },
+    });
+    const { before, remedies } = trial(made, 'names what is not there', { memberClass: 'no such' });
+    expect(remedies).toHaveLength(1);
+    const [remedy] = remedies;
+    expect(remedy?.effect.answers).toBe(true);
+    const after = remedy?.edits.reduce(applyEdit, before.project);
+    expect(after?.bays[0]?.bars).toEqual({ 't1.rise': { mark: 'Y' } });
+    expect(Object.keys(after?.bays[0]?.joins ?? {})).toEqual([KEY]);
+    expect(after?.settings.memberClass).toBeNull();
+  });
+
   it('a mark given twice is answered by taking away those that were typed', () => {
     const { remedies } = trial(crossed(null, { bars: { 't1.rise': { mark: 'D2' } } }), 'mark given twice');
     expect(remedies).toHaveLength(1);
