@@ -12,6 +12,7 @@ import { scheduleRows } from './documents/schedule.ts';
 import { findingsOf } from './findings/findings.ts';
 import type { Finding, Severity } from './findings/model.ts';
 import type { Judged } from './findings/subject.ts';
+import { turningSentence } from './findings/turning.ts';
 import { forcesOf } from './forces/forces.ts';
 import type { Forces } from './forces/model.ts';
 import { layOut } from './layout/layOut.ts';
@@ -20,7 +21,12 @@ import { limitInForce } from './practice/limit.ts';
 import type { Practice, Verdict } from './practice/model.ts';
 import { practiceFor } from './practice/practices.ts';
 import type { Pattern, Project } from './project/model.ts';
-import { type RestraintContext, restraintContext, restraintOf } from './restraint/restraint.ts';
+import {
+  type RestraintContext,
+  restraintContext,
+  restraintOf,
+  turningWaysOf,
+} from './restraint/restraint.ts';
 
 /** By the marks alone, or with stiffness and critical loads beside them. */
 export type AssessmentDepth = 'by the marks' | 'all levels';
@@ -142,7 +148,9 @@ function addJudged(
   if (!angle) return;
   const limit = limitInForce(practice, project.settings, angle.spec.countedOn);
   const steel = angle.cut.total > 0;
-  const restraint = steel ? restraintOf(context, bar, project.settings.lengthBasis) : null;
+  const { lengthBasis } = project.settings;
+  const restraint = steel ? restraintOf(context, bar, lengthBasis) : null;
+  const turns = steel && !restraint ? turningWaysOf(context, bar, lengthBasis) : null;
   const verdict = (asks: Practice['asks'], reading: InServiceReading): Verdict => ({
     ...reading,
     limit: limit.limit,
@@ -155,9 +163,10 @@ function addJudged(
     bar,
     angle,
     restraint,
+    turns,
     limit,
     handling:
-      restraint && least
+      (restraint || turns) && least
         ? verdict('handling', { slenderness: piece / least, length: piece, radius: least, bound: null })
         : null,
     inService:
@@ -176,20 +185,22 @@ function assessed(
   practice: Practice,
   findings: readonly string[],
 ): DiagonalAssessment {
-  const { bar, restraint, limit, handling, inService } = judged;
+  const { bar, restraint, turns, limit, handling, inService } = judged;
   const asked = [handling, inService].find((verdict) => verdict?.asked) ?? null;
   const nearness = asked ? asked.slenderness / asked.limit : null;
   return {
     bar: bar.id,
     restraint,
+    turns,
     limit,
     handling,
     inService,
     bowing: judged.bowing,
     checks: judged.checks,
     nearness,
-    status:
-      nearness === null && restraint && isExempt(practice, judged.angle)
+    status: turns
+      ? 'over'
+      : nearness === null && restraint && isExempt(practice, judged.angle)
         ? 'within'
         : nearness === null
           ? 'unknown'
@@ -206,9 +217,11 @@ function assessed(
           project.settings.units,
           inService && inService.bound !== null ? inService.slenderness : null,
         )
-      : judged.angle.stock
-        ? `The ends of ${bar.mark} leave no steel between them.`
-        : `${judged.angle.spec.section} is in no stock list, so ${bar.mark} is not assessed.`,
+      : turns
+        ? turningSentence(judged)
+        : judged.angle.stock
+          ? `The ends of ${bar.mark} leave no steel between them.`
+          : `${judged.angle.spec.section} is in no stock list, so ${bar.mark} is not assessed.`,
     findings,
   };
 }

@@ -7,6 +7,7 @@ import type { BarId, Layout } from './layout/model.ts';
 import type { LimitInForce, Practice, Verdict } from './practice/model.ts';
 import type { Project } from './project/model.ts';
 import type { Restraint } from './restraint/model.ts';
+import type { FreeWays } from './restraint/movable.ts';
 
 /** Everything derived from a project. Plain data (Maps included): it crosses to and from workers as it is. */
 export interface Assessment {
@@ -27,8 +28,10 @@ export interface Assessment {
 
 export interface DiagonalAssessment {
   readonly bar: BarId;
-  /** Null when the section is not in stock or the bar has no length left: a finding says so. */
+  /** Null when the section is not in stock, the bar has no length left, or it turns freely: a finding says so. */
   readonly restraint: Restraint | null;
+  /** The ways in which it turns freely, its ends being marked as they are; null for a bar that is kept in place. */
+  readonly turns: FreeWays | null;
   readonly limit: LimitInForce;
   readonly handling: Verdict | null;
   readonly inService: Verdict | null;

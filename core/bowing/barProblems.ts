@@ -3,7 +3,8 @@ import { dot, unit2, type Vec2 } from '../geometry/vector.ts';
 import type { AngleBar, Bar, Crossing } from '../layout/model.ts';
 import { inSection } from '../restraint/claims.ts';
 import { squareTo } from '../restraint/directions.ts';
-import type { Restraint, Station } from '../restraint/model.ts';
+import type { Held, Restraint, Station } from '../restraint/model.ts';
+import { bothEndsHold } from '../restraint/rule.ts';
 import type { SectionProperties } from '../section/model.ts';
 import { type BarProblem, type Hold, PINNED } from '../stability/model.ts';
 import type { PairBar } from '../stability/pair.ts';
@@ -23,7 +24,7 @@ export interface BowingBar {
   readonly offered: readonly StationStiffness[];
 }
 
-/** The bar between its end stations, without holds. */
+/** The bar between its end stations, without holds between them. */
 export function bareBar(
   { section, restraint }: Pick<BowingBar, 'section' | 'restraint'>,
   steel: Pick<Steel, 'E'>,
@@ -37,8 +38,32 @@ export function bareBar(
     axial: [{ from: 0, to: length, share: 1 }],
     endI: PINNED,
     endJ: PINNED,
+    ...endsThatStay(restraint),
     twist: null,
   };
+}
+
+/** Ends that hold both ways are what a problem takes where nothing is said. */
+function endsThatStay({ stations }: Restraint): Pick<BarProblem, 'endsStay'> {
+  if (bothEndsHold(stations)) return {};
+  const [first, last] = [stations[0], stations.at(-1)];
+  return { endsStay: { i: first ? waysHeld(first.held) : [], j: last ? waysHeld(last.held) : [] } };
+}
+
+function waysHeld(held: Held): readonly Vec2[] {
+  switch (held.ways) {
+    case 0:
+      return [];
+    case 1:
+      return [held.direction];
+    case 2:
+      return [
+        [1, 0],
+        [0, 1],
+      ];
+    default:
+      return held satisfies never;
+  }
 }
 
 const startOf = ({ stations }: Restraint): number => stations[0]?.at ?? 0;
@@ -56,21 +81,9 @@ export function innerStations(
 
 /** Counted holds as rigid. */
 export function rigidHolds({ restraint }: Pick<BowingBar, 'restraint'>): readonly Hold[] {
-  return innerStations(restraint).flatMap(({ station, at }): Hold[] => {
-    switch (station.held.ways) {
-      case 0:
-        return [];
-      case 1:
-        return [{ at, direction: station.held.direction, stiffness: 'rigid' }];
-      case 2:
-        return [
-          { at, direction: [1, 0], stiffness: 'rigid' },
-          { at, direction: [0, 1], stiffness: 'rigid' },
-        ];
-      default:
-        return station.held satisfies never;
-    }
-  });
+  return innerStations(restraint).flatMap(({ station, at }) =>
+    waysHeld(station.held).map((direction): Hold => ({ at, direction, stiffness: 'rigid' })),
+  );
 }
 
 /** What the frame offers, as two springs square to each other. */

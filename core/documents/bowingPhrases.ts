@@ -87,6 +87,7 @@ function phrases(
 function holderNamed(reason: HoldReason): string {
   switch (reason.kind) {
     case 'end':
+    case 'end marked free':
       return 'the end';
     case 'partner end-on':
     case 'partner half free':

@@ -1,5 +1,6 @@
 import type { Bar, Layout } from '../layout/model.ts';
 import type { UnitSystem } from '../project/model.ts';
+import { endsHoldOf, endsMarkedFree } from '../restraint/endWords.ts';
 import type { Claim, Governing, HoldDirection, Restraint, Station } from '../restraint/model.ts';
 import { grouped } from '../units/figures.ts';
 import { showLength, showSlenderness } from '../units/quantity.ts';
@@ -58,17 +59,21 @@ function boundSentence(bar: Bar, restraint: Restraint, units: UnitSystem, exact:
   const { governing, bound, stations } = restraint;
   const working = slendernessWorking(governing.length, governing.radius, governing.slenderness, units);
   const length = showLength(governing.length, units, 'spoken');
+  const ends = bar.angle ? listed(endsMarkedFree({ endsHold: endsHoldOf(bar.angle) })) : '';
   const ways = heldWays(stations).map(([way, labels]) => `${way} only at ${listed(labels)}`);
   const how =
-    bound?.route === 'b'
-      ? `the longest gap that either leaves, ${length}, over the least radius`
-      : `the holds of one way alone, so that ${length} bows ${aboutAxis(governing)}`;
-  return (
-    `${bar.mark} is held ${ways.join(', ')}, so between them it can bow both ways at once. ` +
-    (exact === null
+    ends !== ''
+      ? `${length} ${aboutAxis(governing)}, with the part beyond a last hold counted twice`
+      : bound?.route === 'b'
+        ? `the longest gap that either leaves, ${length}, over the least radius`
+        : `the holds of one way alone, so that ${length} bows ${aboutAxis(governing)}`;
+  const reading =
+    exact === null
       ? `A bound on the safe side is taken, ${how}: ${working}.`
-      : `Worked out exactly, with these holds rigid, that reads ${showSlenderness(exact)}, which is taken; the rule's bound, on the safe side, is ${how}: ${working}.`)
-  );
+      : `Worked out exactly, with these holds rigid, that reads ${showSlenderness(exact)}, which is taken; the rule's bound, on the safe side, is ${how}: ${working}.`;
+  if (ends !== '')
+    return `${ends.charAt(0).toUpperCase()}${ends.slice(1)}, as marked, so ${bar.mark} swings out beyond the last place that holds it there. ${reading}`;
+  return `${bar.mark} is held ${ways.join(', ')}, so between them it can bow both ways at once. ${reading}`;
 }
 
 /** The ways in which stations between the ends hold, each with the stations that do. */

@@ -68,11 +68,11 @@ function strip(
           top,
           `set by hand: ${showLength(lane.unbraced, units, 'spoken')}, L/r ${showSlenderness(lane.slenderness, limit)}`,
         );
-  return markup`<text x="0" y="${top + 15}" class="axis">${lane.axis}</text><text x="20" y="${top + 14}">${showRadius(lane.radius, units, 'bare')}</text>${pieces}${ends(top)}${cuts}${override}${governs && outline(governs, top, along)}`;
+  return markup`<text x="0" y="${top + 15}" class="axis">${lane.axis}</text><text x="20" y="${top + 14}">${showRadius(lane.radius, units, 'bare')}</text>${pieces}${ends(top, lane)}${cuts}${override}${governs && outline(governs, top, along)}`;
 }
 
 function pieceBox(
-  { from, to }: Piece,
+  { from, to, counts }: Piece,
   lane: Lane,
   top: number,
   along: (at: number) => number,
@@ -81,9 +81,9 @@ function pieceBox(
   units: UnitSystem,
 ): Markup {
   const [left, right] = [along(from), along(to)];
-  const slenderness = (to - from) / lane.radius;
+  const slenderness = counts / lane.radius;
   const clear = widestGap(left, right, tags);
-  return markup`<rect x="${left}" y="${top}" width="${right - left}" height="${DEEP}" fill="url(#${nearnessFill(slenderness / limit)})" stroke="#000" stroke-width=".8"/>${pieceFigures(clear, top, showLength(to - from, units, 'spoken'), showSlenderness(slenderness, limit))}`;
+  return markup`<rect x="${left}" y="${top}" width="${right - left}" height="${DEEP}" fill="url(#${nearnessFill(slenderness / limit)})" stroke="#000" stroke-width=".8"/>${pieceFigures(clear, top, showLength(counts, units, 'spoken'), showSlenderness(slenderness, limit))}`;
 }
 
 /** Length and slenderness, or the slenderness alone, or nothing, as there is room. */
@@ -111,8 +111,11 @@ function widestGap(left: number, right: number, tags: readonly number[]): Gap {
   return equal[Math.floor(equal.length / 2)] ?? [left, right];
 }
 
-function ends(top: number): Markup {
-  return markup`<path class="stop" d="M${START} ${top - 2.5}v${DEEP + 5}M${END} ${top - 2.5}v${DEEP + 5}"/>`;
+/** A full tick at an end that holds this motion, a dashed one at an end that does not. */
+function ends(top: number, { endsStop: [first, last] }: Lane): Markup {
+  const tick = (x: number, stops: boolean): Markup =>
+    markup`<path class="${stops ? 'stop' : 'nostop'}" d="M${x} ${top - 2.5}v${DEEP + 5}"/>`;
+  return markup`${tick(START, first)}${tick(END, last)}`;
 }
 
 /** A full tick where the station stops the motion; a dashed one where it was claimed to and does not. */

@@ -1,3 +1,4 @@
+import type { EndsHold } from '../restraint/endWords.ts';
 import type { Axis } from '../section/model.ts';
 
 /** One line of the bracing schedule: one diagonal. The JSON form of the command line; lengths mm, masses kg. Documented in README.md. */
@@ -50,6 +51,8 @@ export interface ScheduleRow {
   readonly utilisation: number | null;
   /** "net rupture, end i, 13.2(a)(iii)"; null as above. */
   readonly governingCheck: string | null;
+  /** What each end holds of the bar's movement across itself; 'both' unless marked otherwise. */
+  readonly endsHold: EndsHold;
   readonly overrides: readonly {
     readonly axis: Axis;
     readonly length: number | null;

@@ -3,6 +3,7 @@ import type { Finding } from '../findings/model.ts';
 import type { AngleBar, Bar, BarId, BayLayout, Crossing, Layout } from '../layout/model.ts';
 import type { LimitInForce, Verdict } from '../practice/model.ts';
 import type { Project } from '../project/model.ts';
+import { endsHoldOf } from '../restraint/endWords.ts';
 import type { Lane, Restraint } from '../restraint/model.ts';
 import type { Axis } from '../section/model.ts';
 import type { RowVerdict, ScheduleRow } from './model.ts';
@@ -94,6 +95,7 @@ function rowOf(
         : null,
     utilisation: diagonal.checks?.governing?.utilisation ?? null,
     governingCheck: checkWords(diagonal.checks?.governing ?? null),
+    endsHold: endsHoldOf(angle),
     overrides: (angle.mark.overrides ?? []).map(({ axis, length, factor, reason }) => ({
       axis,
       length,

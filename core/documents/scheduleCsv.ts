@@ -1,4 +1,5 @@
 import type { UnitSystem } from '../project/model.ts';
+import { endsMarkedFree } from '../restraint/endWords.ts';
 import { AXES } from '../section/model.ts';
 import { forceIn } from '../units/loads.ts';
 import { KG_PER_POUND, MM_PER_INCH } from '../units/unitSystem.ts';
@@ -100,7 +101,10 @@ function columnsFor(units: UnitSystem): readonly Column[] {
     { head: 'governing check', cell: (row) => row.governingCheck },
     {
       head: 'set by hand',
-      cell: (row) => row.overrides.map((override) => overrideWords(override, units)).join('; '),
+      cell: (row) =>
+        [...row.overrides.map((override) => overrideWords(override, units)), ...endsMarkedFree(row)].join(
+          '; ',
+        ),
     },
     { head: 'reason', cell: (row) => row.reason },
     {

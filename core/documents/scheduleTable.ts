@@ -1,4 +1,5 @@
 import type { UnitSystem } from '../project/model.ts';
+import { endsMarkedFree } from '../restraint/endWords.ts';
 import { AXES } from '../section/model.ts';
 import { grouped } from '../units/figures.ts';
 import { showForce } from '../units/loads.ts';
@@ -115,6 +116,7 @@ function handLines(rows: readonly ScheduleRow[], units: UnitSystem): readonly st
     ...row.overrides.map((override) =>
       oneLine(`${BY_HAND} ${row.bay} ${row.mark}, set by hand: ${overrideWords(override, units)}`),
     ),
+    ...endsMarkedFree(row).map((said) => oneLine(`${BY_HAND} ${row.bay} ${row.mark}, marked: ${said}`)),
   ]);
 }
 

@@ -66,6 +66,8 @@ export function reasonText(reason: HoldReason): string {
   switch (reason.kind) {
     case 'end':
       return 'The end connection holds every way.';
+    case 'end marked free':
+      return `End ${reason.end} is marked as not holding this way.`;
     case 'partner end-on':
       return `${reason.partner} is met end-on, and both its halves reach held points.`;
     case 'partner half free':

@@ -47,8 +47,8 @@ function unknownSection(subject: FindingSubject, group: readonly Judged[]): Find
   };
 }
 
-const hasNoSteel = ({ angle, restraint }: Judged): boolean =>
-  angle.cut.total <= 0 || (angle.stock !== null && restraint === null);
+const hasNoSteel = ({ angle, restraint, turns }: Judged): boolean =>
+  angle.cut.total <= 0 || (angle.stock !== null && restraint === null && turns === null);
 
 function noLength(subject: FindingSubject, { bar, angle }: Judged): Finding {
   const units = subject.project.settings.units;

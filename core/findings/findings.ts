@@ -10,6 +10,7 @@ import { nameFindings } from './names.ts';
 import { patternFindings } from './patterns.ts';
 import { slendernessFindings } from './slenderness.ts';
 import type { FindingInput, FindingSubject } from './subject.ts';
+import { turningFindings } from './turning.ts';
 
 const RANK: Readonly<Record<Severity, number>> = { 'must fix': 0, 'look into': 1, note: 2 };
 
@@ -22,6 +23,7 @@ export function findingsOf(input: FindingInput): readonly Finding[] {
     ...barFindings(subject),
     ...markFindings(subject),
     ...nameFindings(subject),
+    ...turningFindings(subject),
     ...slendernessFindings(subject),
     ...crossingFindings(subject),
     ...holderFindings(subject),

@@ -18,6 +18,7 @@ export type FindingKind =
   | 'no length left'
   | 'packer differs'
   | 'bay can move'
+  | 'bar can move'
   | 'hold weaker than claimed'
   | 'rule unsafe here'
   | 'twist governs'

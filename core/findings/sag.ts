@@ -3,6 +3,7 @@ import type { AngleBar, Bar } from '../layout/model.ts';
 import { inSection } from '../restraint/claims.ts';
 import { stopsMotion } from '../restraint/lanes.ts';
 import type { Station } from '../restraint/model.ts';
+import { longestCount, piecesOf } from '../restraint/pieces.ts';
 import type { SectionProperties } from '../section/model.ts';
 
 /** Weight of steel, N/mm³ (7 850 kg/m³; practice-facts, from memory, sure). */
@@ -48,16 +49,12 @@ function flexibility(p: SectionProperties, n: Vec2): number {
   return (n[0] * n[0] * p.Ixx - 2 * n[0] * n[1] * p.Ixy + n[1] * n[1] * p.Iyy) / determinant;
 }
 
-/** A hanger carries weight although it holds nothing against bowing. */
+/** A hanger carries weight although it holds nothing against bowing. Beyond the last support the bar sags as it bows: METHODS.md, "Ends that do not hold". */
 function longestUncarried(stations: readonly Station[], way: Vec2): number {
-  const carried = stations.filter(
-    (station, index) =>
-      index === 0 ||
-      index === stations.length - 1 ||
-      stopsMotion(station.held, way) ||
-      station.claims.some((claim) => claim.join === 'hung'),
-  );
-  return carried
-    .slice(1)
-    .reduce((most, station, k) => Math.max(most, station.at - (carried[k]?.at ?? station.at)), 0);
+  const carried = stations
+    .filter(
+      (station) => stopsMotion(station.held, way) || station.claims.some((claim) => claim.join === 'hung'),
+    )
+    .map(({ at }) => at);
+  return longestCount(piecesOf(stations[0]?.at ?? 0, stations.at(-1)?.at ?? 0, carried));
 }

@@ -5,12 +5,15 @@ import type { AngleBar, Bar, BarId, BayLayout, Layout } from '../layout/model.ts
 import type { LimitInForce, Practice, Verdict } from '../practice/model.ts';
 import type { Project } from '../project/model.ts';
 import type { Restraint } from '../restraint/model.ts';
+import type { FreeWays } from '../restraint/movable.ts';
 
 /** One diagonal with what is known of it before findings are made. */
 export interface Judged {
   readonly bar: Bar;
   readonly angle: AngleBar;
   readonly restraint: Restraint | null;
+  /** The ways in which it turns freely, its ends being marked as they are; null for a bar that is kept in place. */
+  readonly turns: FreeWays | null;
   readonly limit: LimitInForce;
   readonly handling: Verdict | null;
   readonly inService: Verdict | null;

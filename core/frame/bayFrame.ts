@@ -2,6 +2,7 @@ import { along, cross, distance, dot, scale, subtract, unit, type Vec3 } from '.
 import { isJoined } from '../layout/joined.ts';
 import type { Bar, BarId, BayLayout, Crossing, Layout, Plane } from '../layout/model.ts';
 import type { Holdings } from '../restraint/heldNodes.ts';
+import { endHolds } from '../restraint/stations.ts';
 import { lineHolding } from '../restraint/trails.ts';
 import { motionAbout } from '../section/direction.ts';
 import { memberSection } from './memberSection.ts';
@@ -75,8 +76,8 @@ class BayFrameBuilder {
       .filter((bar) => isBuilt(bar) && (!bar.line || joined.has(bar.id)));
     for (const bar of bars) {
       this.#places.set(bar.id, [
-        { at: 0, node: this.#nodeOf(bar.i, bar), cut: false },
-        { at: bar.length, node: this.#nodeOf(bar.j, bar), cut: false },
+        { at: 0, node: this.#endOf(bar, 'i'), cut: false },
+        { at: bar.length, node: this.#endOf(bar, 'j'), cut: false },
       ]);
     }
     this.#seatLines(bars);
@@ -118,6 +119,29 @@ class BayFrameBuilder {
     this.#layoutNode.set(id, index);
     if (!bar.line) this.#holdOutOfPlane(index, this.#planeOf(bar).normal);
     return index;
+  }
+
+  /** An end that does not hold both ways has a node of its own, kept along the bar, against turning, and in the ways that it does hold. */
+  #endOf(bar: Bar, end: 'i' | 'j'): number {
+    const node = this.#nodeOf(end === 'i' ? bar.i : bar.j, bar);
+    const marked = bar.angle?.ends[end].holds ?? 'both';
+    if (!bar.angle || marked === 'both') return node;
+    const { inPlane, outOfPlane } = bar.angle.placement;
+    const own = this.#add(`end ${end} of ${bar.mark}`, end === 'i' ? bar.from : bar.to, false, bar);
+    const tied: Vec3[] = [bar.direction];
+    if (endHolds(marked, 'in plane')) tied.push(inPlane);
+    if (endHolds(marked, 'out of plane')) tied.push(outOfPlane);
+    for (const direction of tied)
+      this.#springs.push({ node: own, other: node, kind: 'displacement', direction, stiffness: UNYIELDING });
+    for (const direction of [bar.direction, inPlane, outOfPlane])
+      this.#springs.push({
+        node: own,
+        other: node,
+        kind: 'rotation',
+        direction,
+        stiffness: UNYIELDING_TURN,
+      });
+    return own;
   }
 
   #holdOutOfPlane(node: number, normal: Vec3): void {

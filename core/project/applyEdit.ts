@@ -105,7 +105,7 @@ export function editLabel(edit: Edit): string {
     case 'diagonals':
       return `Change the diagonals of ${edit.bay}`;
     case 'bars':
-      return edit.bars.length === 1 ? `Change ${edit.bars[0]}` : `Change ${edit.bars.length} bars`;
+      return barsLabel(edit);
     case 'join':
       return edit.join === null ? 'Take the mark away' : `Mark the crossing: ${JOIN_WORDS[edit.join.kind]}`;
     case 'tension share':
@@ -125,6 +125,14 @@ export function editLabel(edit: Edit): string {
     default:
       return edit satisfies never;
   }
+}
+
+/** A change to one end alone says which. */
+function barsLabel({ bars, change, clear = [] }: Extract<Edit, { readonly kind: 'bars' }>): string {
+  const named = bars.length === 1 ? `${bars[0]}` : `${bars.length} bars`;
+  const [only, another] = [...Object.keys(change), ...clear];
+  if (another !== undefined || (only !== 'endI' && only !== 'endJ')) return `Change ${named}`;
+  return `Change end ${only === 'endI' ? 'i' : 'j'} of ${named}`;
 }
 
 /** How each join is called on screens and in documents. */

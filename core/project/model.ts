@@ -253,7 +253,12 @@ export interface EndConnection {
   readonly threadsInShear?: boolean;
   /** Leg of the fillet weld, mm; 6 unless said. */
   readonly weldSize?: number;
+  /** Which movements of the bar across itself this end holds; both unless said. It holds the bar along itself in any case. */
+  readonly holds?: EndHolds;
 }
+
+export const END_HOLDS = ['both', 'in plane only', 'out of plane only', 'nothing'] as const;
+export type EndHolds = (typeof END_HOLDS)[number];
 
 export const BOLT_GRADES = ['4.6', '8.8', '10.9', 'A325', 'A490'] as const;
 export type BoltGrade = (typeof BOLT_GRADES)[number];

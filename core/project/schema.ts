@@ -1,6 +1,6 @@
 /** What a project file may hold. Types stand in `model.ts`; this is the gate that files pass through. */
 import { z } from 'zod';
-import { BOLT_GRADES, PROJECT_FORMAT, PROJECT_VERSION, type Project } from './model.ts';
+import { BOLT_GRADES, END_HOLDS, PROJECT_FORMAT, PROJECT_VERSION, type Project } from './model.ts';
 
 const millimetres = (least: number, most: number) => z.number().min(least).max(most);
 /** Members of a braced bay are between a hand's breadth and a stadium long. */
@@ -117,6 +117,7 @@ const ends = z.strictObject({
   boltGrade: z.enum(BOLT_GRADES).optional(),
   threadsInShear: z.boolean().optional(),
   weldSize: millimetres(2, 30).optional(),
+  holds: z.enum(END_HOLDS).optional(),
 });
 
 const diagonals = z.strictObject({

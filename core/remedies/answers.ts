@@ -3,7 +3,7 @@ import type { Assessment } from '../assessment.ts';
 import type { Catalogues } from '../catalogue/model.ts';
 import type { Finding } from '../findings/model.ts';
 import { takeAway } from './acting.ts';
-import { knownGrades, strongerEnds, usualDistances } from './ends.ts';
+import { holdTheEnds, knownGrades, strongerEnds, usualDistances } from './ends.ts';
 import {
   boltToLines,
   hangFromLines,
@@ -83,6 +83,12 @@ export function proposalsFor(
       return nearestSections(assessment, finding);
     case 'packer differs':
       return packTheGap(finding);
+    case 'bar can move':
+      return [
+        ...holdTheEnds(assessment, finding),
+        ...joinTheCrossings(assessment, finding.bars),
+        ...boltToLines(assessment, finding.bars),
+      ];
     case 'bay can move':
       return crossOpenPanels(assessment, finding);
     case 'hold weaker than claimed':

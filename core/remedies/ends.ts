@@ -1,8 +1,10 @@
 /** Answers at the ends: more bolts, usual distances, a longer weld; and a grade that is known. */
 import type { Assessment } from '../assessment.ts';
 import type { Finding } from '../findings/model.ts';
-import type { EndConnection } from '../project/model.ts';
+import type { Edit } from '../project/edit.ts';
+import type { BarMark, EndConnection } from '../project/model.ts';
 import { usualGrades } from '../resistance/grades.ts';
+import { endsHoldOf, endsMarkedFree } from '../restraint/endWords.ts';
 import { barsOf } from './places.ts';
 import type { Proposal } from './proposal.ts';
 
@@ -13,10 +15,15 @@ export function strongerEnds(assessment: Assessment, finding: Finding): readonly
   if (!end) return [];
   if (end.kind === 'welded') {
     const weldLength = Math.ceil((end.weldLength * 1.5) / 10) * 10;
-    return [endProposal(finding, `Weld ${weldLength} mm at each end`, 'half as much again', { weldLength })];
+    return [
+      endProposal(assessment, finding, `Weld ${weldLength} mm at each end`, 'half as much again', {
+        weldLength,
+      }),
+    ];
   }
   return [1, 2].map((more) =>
     endProposal(
+      assessment,
       finding,
       `${end.bolts + more} bolts at each end`,
       `${more === 1 ? 'one' : 'two'} more in line`,
@@ -32,10 +39,16 @@ export function usualDistances(assessment: Assessment, finding: Finding): readon
   if (end?.kind !== 'bolted') return [];
   const roundUp = (mm: number): number => Math.ceil(mm / 5) * 5;
   return [
-    endProposal(finding, 'Usual distances', 'end twice, pitch three times the bolt, on the usual line', {
-      endDistance: Math.max(end.endDistance, roundUp(2 * end.boltDiameter)),
-      pitch: Math.max(end.pitch, roundUp(3 * end.boltDiameter)),
-    }),
+    endProposal(
+      assessment,
+      finding,
+      'Usual distances',
+      'end twice, pitch three times the bolt, on the usual line',
+      {
+        endDistance: Math.max(end.endDistance, roundUp(2 * end.boltDiameter)),
+        pitch: Math.max(end.pitch, roundUp(3 * end.boltDiameter)),
+      },
+    ),
   ];
 }
 
@@ -49,15 +62,38 @@ export function knownGrades(assessment: Assessment, finding: Finding): readonly 
     }));
 }
 
+/** Every end that is marked as holding less holds both ways, as an end does that is not marked. */
+export function holdTheEnds(assessment: Assessment, finding: Finding): readonly Proposal[] {
+  const edits = barsOf(assessment, finding.bars).flatMap(({ id, angle }): readonly Edit[] => {
+    if (!angle) return [];
+    const held = (end: 'i' | 'j', own: BarMark['endI']) =>
+      endsHoldOf(angle)[end] === 'both' ? own : { ...own, holds: 'both' as const };
+    const [endI, endJ] = [held('i', angle.mark.endI), held('j', angle.mark.endJ)];
+    return [{ kind: 'bars', bars: [id], change: { ...(endI && { endI }), ...(endJ && { endJ }) } }];
+  });
+  const ends = barsOf(assessment, finding.bars).flatMap(({ angle }) =>
+    angle ? endsMarkedFree({ endsHold: endsHoldOf(angle) }) : [],
+  );
+  if (ends.length === 0) return [];
+  const label = ends.length === 1 ? 'Hold the end' : 'Hold the ends';
+  return [{ label, detail: 'both ways, as a gusset does', edits }];
+}
+
+/** The rest of what each end has of its own stays. */
 function endProposal(
+  assessment: Assessment,
   finding: Finding,
   label: string,
   detail: string,
   change: Partial<EndConnection>,
 ): Proposal {
-  return {
-    label,
-    detail,
-    edits: [{ kind: 'bars', bars: finding.bars, change: { endI: change, endJ: change } }],
-  };
+  const edits = barsOf(assessment, finding.bars).map(({ id, angle }): Edit => {
+    const { endI = {}, endJ = {} } = angle?.mark ?? {};
+    return {
+      kind: 'bars',
+      bars: [id],
+      change: { endI: { ...endI, ...change }, endJ: { ...endJ, ...change } },
+    };
+  });
+  return { label, detail, edits };
 }

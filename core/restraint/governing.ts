@@ -51,14 +51,14 @@ function ofBound(section: Radii, bound: MixedBound, barLength: number): Governin
   return { axis, angle, length, radius, slenderness, from: 0, to: barLength, basis, freeDirection };
 }
 
-function ofLane(lane: Lane, { from, to }: Piece, basis: Governing['basis']): Governing {
+function ofLane(lane: Lane, { from, to }: Pick<Piece, 'from' | 'to'>, basis: Governing['basis']): Governing {
   const { axis, unbraced: length, radius, slenderness } = lane;
   const freeDirection = axis === 'v' ? null : lane.motion;
   return { axis, angle: null, length, radius, slenderness, from, to, basis, freeDirection };
 }
 
 const longestPiece = (lane: Lane): Piece =>
-  lane.pieces.reduce((most, piece) => (piece.to - piece.from > most.to - most.from ? piece : most));
+  lane.pieces.reduce((most, piece) => (piece.counts > most.counts ? piece : most));
 
 /** Ties go to the bowing that names an axis parallel to a leg, which is the one a reader can see. */
 function isWorse(each: Governing, worst: Governing): boolean {

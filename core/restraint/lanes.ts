@@ -3,7 +3,8 @@ import type { LengthOverride } from '../project/model.ts';
 import { motionAbout } from '../section/direction.ts';
 import type { Axis, Radii } from '../section/model.ts';
 import { HOLDS_FROM } from './claims.ts';
-import type { Claim, Held, Lane, LaneCut, Piece, Station } from './model.ts';
+import type { Claim, Held, Lane, LaneCut, Station } from './model.ts';
+import { longestCount, piecesOf } from './pieces.ts';
 
 /** One section axis as a strip along the bar, cut where a station stops its motion. */
 export function laneOf(
@@ -18,12 +19,19 @@ export function laneOf(
     const stops = stopsMotion(station.held, motion);
     return { at: station.at, station: k + 1, stops, claim: tellingClaim(station, motion, stops) };
   });
-  const pieces = piecesBetween(stations[0]?.at ?? 0, cuts, stations.at(-1)?.at ?? 0);
-  const found = pieces.reduce((most, piece) => Math.max(most, piece.to - piece.from), 0);
+  const [first, last] = [stations[0], stations.at(-1)];
+  const endsStop = [stopsAt(first, motion), stopsAt(last, motion)] as const;
+  const stops = stations.filter((station) => stopsMotion(station.held, motion)).map(({ at }) => at);
+  const pieces = piecesOf(first?.at ?? 0, last?.at ?? 0, stops);
+  const found = longestCount(pieces);
   const override = overrides.find((each) => each.axis === axis) ?? null;
   const unbraced = override ? (override.length ?? found) * override.factor : found;
-  return { axis, motion, pieces, cuts, unbraced, found, radius, slenderness: unbraced / radius, override };
+  const slenderness = unbraced / radius;
+  return { axis, motion, pieces, endsStop, cuts, unbraced, found, radius, slenderness, override };
 }
+
+const stopsAt = (station: Station | undefined, motion: Vec2): boolean =>
+  station !== undefined && stopsMotion(station.held, motion);
 
 /** A station stops a motion that is not within 10° of square to what it holds. */
 export function stopsMotion(held: Held, motion: Vec2): boolean {
@@ -43,18 +51,6 @@ function radiusOf(section: Radii, axis: Axis): number {
     default:
       return axis satisfies never;
   }
-}
-
-function piecesBetween(first: number, cuts: readonly LaneCut[], last: number): readonly Piece[] {
-  const pieces: Piece[] = [];
-  let from = first;
-  for (const { at, stops } of cuts) {
-    if (!stops) continue;
-    pieces.push({ from, to: at });
-    from = at;
-  }
-  pieces.push({ from, to: last });
-  return pieces;
 }
 
 /** The claim that says most about why a motion is stopped, or why it is not: the one most nearly along it. */

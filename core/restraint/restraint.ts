@@ -1,12 +1,13 @@
 import type { AngleBar, Bar, BarId, Crossing, Layout } from '../layout/model.ts';
 import type { Settings } from '../project/model.ts';
-import type { Axis, SectionProperties } from '../section/model.ts';
+import { AXES, type Axis, type SectionProperties } from '../section/model.ts';
 import type { ClaimContext } from './claims.ts';
 import { endings } from './endings.ts';
 import { governingOf } from './governing.ts';
 import { holdingsOf } from './heldNodes.ts';
 import { laneOf } from './lanes.ts';
 import type { Lane, Restraint, Station } from './model.ts';
+import { type FreeWays, freeWaysOf } from './movable.ts';
 import { freeDirectionRule } from './rule.ts';
 import { stationsOf } from './stations.ts';
 
@@ -31,7 +32,7 @@ export function restraintContext(layout: Layout): RestraintContext {
   return { layout, holdings: holdingsOf(layout), crossingsOf, endingOn };
 }
 
-/** The bar with its own section, as it lies. Null while its section is not in stock, or its ends leave no length. */
+/** The bar with its own section, as it lies. Null while its section is not in stock, its ends leave no length, or it turns freely. */
 export function restraintOf(
   context: RestraintContext,
   bar: Bar,
@@ -40,7 +41,25 @@ export function restraintOf(
   const { angle } = bar;
   if (!angle?.stock) return null;
   const stations = barStations(context, bar, angle, basis);
-  return stations ? restraintWith(bar, angle, stations, angle.stock.properties) : null;
+  const restraint = stations && restraintWith(bar, angle, stations, angle.stock.properties);
+  return restraint && isKept(restraint) ? restraint : null;
+}
+
+/** A bar has a length to bow over in every motion, unless an end lets it go and too little else holds it. */
+const isKept = ({ lanes, bound }: Restraint): boolean =>
+  AXES.every((axis) => Number.isFinite(lanes[axis].found)) && Number.isFinite(bound?.slenderness ?? 0);
+
+/** In which ways a bar turns without resistance, its ends being marked as they are; null where it does not, or has no length to speak of. */
+export function turningWaysOf(
+  context: RestraintContext,
+  bar: Bar,
+  basis: Settings['lengthBasis'],
+): FreeWays | null {
+  const { angle } = bar;
+  if (!angle?.stock) return null;
+  const stations = barStations(context, bar, angle, basis);
+  if (!stations || isKept(restraintWith(bar, angle, stations, angle.stock.properties))) return null;
+  return freeWaysOf(stations);
 }
 
 /** Stations depend on the bar's place and on how its section is turned, not on the section's size. Null when the ends leave no length. */

@@ -7,8 +7,9 @@ import { radiusFor } from '../section/direction.ts';
 import type { Radii } from '../section/model.ts';
 import { areOneDirection, sameDirection, singleDirections, squareTo } from './directions.ts';
 import type { Held, MixedBound, SpanCheck } from './model.ts';
+import { longestCount, piecesOf } from './pieces.ts';
 
-/** A station of the rule: `at` in mm from end i, in order; the first and last are the ends, which hold both ways. */
+/** A station of the rule: `at` in mm from end i, in order; the first and last are the ends, which hold both ways unless marked otherwise. */
 export interface RuleStation {
   readonly at: number;
   readonly held: Held;
@@ -16,7 +17,7 @@ export interface RuleStation {
 
 export interface RuleResult {
   readonly spans: readonly SpanCheck[];
-  /** Present when interior stations hold different single directions. */
+  /** Present when interior stations hold different single directions, or an end does not hold both ways; infinite where nothing is known to keep the bar in place. */
   readonly bound: MixedBound | null;
   /** Largest of the spans and the bound. */
   readonly slenderness: number;
@@ -31,11 +32,16 @@ const NEARLY_SQUARE = Math.sin((10 * Math.PI) / 180);
  */
 export function freeDirectionRule(section: Radii, stations: readonly RuleStation[]): RuleResult {
   const spans = spanChecks(section, stations);
-  const directions = singleDirections(stations.slice(1, -1).map((station) => station.held));
-  const bound = areOneDirection(directions) ? null : mixedBound(section, stations, directions);
+  const endsHold = bothEndsHold(stations);
+  const asked = endsHold ? stations.slice(1, -1) : stations;
+  const directions = singleDirections(asked.map((station) => station.held));
+  const bound = endsHold && areOneDirection(directions) ? null : mixedBound(section, stations, directions);
   const worst = spans.reduce((most, span) => Math.max(most, span.slenderness), 0);
   return { spans, bound, slenderness: Math.max(worst, bound?.slenderness ?? 0) };
 }
+
+export const bothEndsHold = (stations: readonly RuleStation[]): boolean =>
+  stations[0]?.held.ways === 2 && stations.at(-1)?.held.ways === 2;
 
 /** Between every two stations: free every way, in one direction, or not at all. */
 export const spanChecks = (section: Radii, stations: readonly RuleStation[]): readonly SpanCheck[] =>
@@ -82,18 +88,43 @@ function mixedBound(
   stations: readonly RuleStation[],
   directions: readonly Vec2[],
 ): MixedBound {
+  const endsHold = bothEndsHold(stations);
+  const pairs = directions.flatMap((first, k) =>
+    directions.slice(k + 1).map((second) => ({ first, second })),
+  );
+  const square = pairs.filter(({ first, second }) => Math.abs(dot2(first, second)) <= NEARLY_SQUARE);
+  const slanting = pairs.filter(({ first, second }) => isSlanting(first, second));
   const routes = [
-    ...directions.map((direction) => oneDirectionAlone(section, stations, direction)),
-    ...directions.flatMap((first, k) =>
-      directions
-        .slice(k + 1)
-        .filter((second) => Math.abs(dot2(first, second)) <= NEARLY_SQUARE)
-        .map((second) => twoSquareDirections(section, stations, first, second)),
-    ),
+    // Checks over spans hold between ends that stay in place; beside one that does not, only what follows from the energy is taken.
+    ...(endsHold
+      ? directions.map((direction) => oneDirectionAlone(section, stations, direction))
+      : [bothWaysAlone(section, stations)]),
+    ...square.map(({ first, second }) => twoDirections(section, stations, first, second, 0)),
+    // There two slanting directions may be all that keeps the bar; no less than its whole length is taken.
+    ...(endsHold
+      ? []
+      : slanting.map(({ first, second }) =>
+          twoDirections(section, stations, first, second, wholeLength(stations)),
+        )),
   ];
   const [first, ...others] = routes;
   if (!first) throw new Error('a bound for mixed holds wants at least one direction');
   return others.reduce((best, route) => (route.slenderness < best.slenderness ? route : best), first);
+}
+
+const isSlanting = (first: Vec2, second: Vec2): boolean =>
+  Math.abs(dot2(first, second)) > NEARLY_SQUARE && !sameDirection(first, second);
+
+const wholeLength = (stations: readonly RuleStation[]): number =>
+  (stations.at(-1)?.at ?? 0) - (stations[0]?.at ?? 0);
+
+/** (a) The stations that hold both ways and no others. */
+function bothWaysAlone(section: Radii, stations: readonly RuleStation[]): MixedBound {
+  const length = countedLength(
+    stations,
+    stations.filter(({ held }) => held.ways === 2),
+  );
+  return { slenderness: length / section.rv, length, radius: section.rv, route: 'a', freeDirection: null };
 }
 
 /** (a) The holds of one direction, and the stations that hold both ways: leaving the others out is safe. */
@@ -111,23 +142,39 @@ function oneDirectionAlone(section: Radii, stations: readonly RuleStation[], dir
   };
 }
 
-/** (b) Bending energy is at least E Iv ∫|w″|², and each of two perpendicular parts of w is a bar over pins at most g apart. */
-function twoSquareDirections(
+/**
+ * (b) Bending energy is at least E Iv ∫|w″|², and each of two directions' parts of w is a bar over pins.
+ *
+ * @param least mm, taken where the pieces count as less
+ */
+function twoDirections(
   section: Radii,
   stations: readonly RuleStation[],
   first: Vec2,
   second: Vec2,
+  least: number,
 ): MixedBound {
-  const gap = Math.max(longestGap(stations, first), longestGap(stations, second));
-  // For directions not quite square, |w″|² ≥ (a″² + b″²)/(1 + s) and |w′|² ≤ (a′² + b′²)/(1 − s), s the cosine between them.
+  const [one, other] = [first, second].map((direction) =>
+    countedLength(
+      stations,
+      stations.filter(({ held }) => holds(held, direction)),
+    ),
+  );
+  // For directions not square, |w″|² ≥ (a″² + b″²)/(1 + s) and |w′|² ≤ (a′² + b′²)/(1 − s), s the cosine between them.
   const s = Math.abs(dot2(first, second));
-  const length = gap * Math.sqrt((1 + s) / (1 - s));
+  const length = Math.max(least, Math.max(one ?? 0, other ?? 0) * Math.sqrt((1 + s) / (1 - s)));
   return { slenderness: length / section.rv, length, radius: section.rv, route: 'b', freeDirection: null };
 }
 
-function longestGap(stations: readonly RuleStation[], direction: Vec2): number {
-  const at = stations.filter(({ held }) => holds(held, direction)).map((station) => station.at);
-  return at.slice(1).reduce((most, value, k) => Math.max(most, value - (at[k] ?? value)), 0);
+/** The longest piece of the bar when only some of its stations hold. */
+function countedLength(all: readonly RuleStation[], kept: readonly RuleStation[]): number {
+  return longestCount(
+    piecesOf(
+      all[0]?.at ?? 0,
+      all.at(-1)?.at ?? 0,
+      kept.map(({ at }) => at),
+    ),
+  );
 }
 
 const holds = (held: Held, direction: Vec2): boolean =>

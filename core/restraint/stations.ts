@@ -1,8 +1,9 @@
 import { along, distance, dot, subtract, unit2 } from '../geometry/vector.ts';
 import type { AngleBar, Bar, Crossing, Layout } from '../layout/model.ts';
-import type { EndConnection, Settings } from '../project/model.ts';
+import type { EndConnection, EndHolds, Settings } from '../project/model.ts';
 import { type ClaimContext, claimsAt, HOLDS_FROM, inSection } from './claims.ts';
 import { heldBy } from './directions.ts';
+import { endsHoldOf } from './endWords.ts';
 import type { Claim, Station } from './model.ts';
 import { labelOf, trailFromNode } from './trails.ts';
 
@@ -61,26 +62,47 @@ function centreOf(end: EndConnection): number {
 }
 
 function endStation(angle: AngleBar, end: 'i' | 'j', at: number): Station {
-  const claim = (direction: 'in plane' | 'out of plane'): Claim => ({
-    source: 'end',
-    join: 'end',
-    holder: null,
-    direction,
-    vector: unit2(
-      inSection(angle, direction === 'in plane' ? angle.placement.inPlane : angle.placement.outOfPlane),
-    ),
-    counted: true,
-    reason: { kind: 'end' },
-    trail: [],
-  });
+  const marked = endsHoldOf(angle)[end];
+  const claim = (direction: 'in plane' | 'out of plane'): Claim => {
+    const counted = endHolds(marked, direction);
+    return {
+      source: 'end',
+      join: 'end',
+      holder: null,
+      direction,
+      vector: unit2(
+        inSection(angle, direction === 'in plane' ? angle.placement.inPlane : angle.placement.outOfPlane),
+      ),
+      counted,
+      reason: counted ? { kind: 'end' } : { kind: 'end marked free', end },
+      trail: [],
+    };
+  };
+  const claims = [claim('in plane'), claim('out of plane')];
   return {
     at,
     label: end,
     crossings: [],
-    claims: [claim('in plane'), claim('out of plane')],
-    held: { ways: 2 },
+    claims,
+    held: heldBy(claims.flatMap(({ counted, vector }) => (counted && vector ? [vector] : []))),
     twistHeld: true,
   };
+}
+
+/** Whether an end that is marked so stops the bar from moving across itself this way. */
+export function endHolds(marked: EndHolds, direction: 'in plane' | 'out of plane'): boolean {
+  switch (marked) {
+    case 'both':
+      return true;
+    case 'in plane only':
+      return direction === 'in plane';
+    case 'out of plane only':
+      return direction === 'out of plane';
+    case 'nothing':
+      return false;
+    default:
+      return marked satisfies never;
+  }
 }
 
 function labelAcross(layout: Layout, crossing: Crossing, bar: Bar): string {

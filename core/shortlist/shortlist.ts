@@ -9,6 +9,7 @@ import type { AngleBar, Bar, BarId, Layout, Placement } from '../layout/model.ts
 import type { LimitInForce, Practice } from '../practice/model.ts';
 import type { Project } from '../project/model.ts';
 import type { Restraint, Station } from '../restraint/model.ts';
+import type { FreeWays } from '../restraint/movable.ts';
 import { barStations, restraintContext, restraintWith } from '../restraint/restraint.ts';
 import { usualGauge } from '../section/gauge.ts';
 import { AXES, type Axis } from '../section/model.ts';
@@ -19,7 +20,10 @@ export interface ShortlistSubject {
   readonly project: Project;
   readonly practice: Practice;
   readonly layout: Layout;
-  readonly diagonals: ReadonlyMap<BarId, { readonly limit: LimitInForce; readonly checks: BarChecks | null }>;
+  readonly diagonals: ReadonlyMap<
+    BarId,
+    { readonly limit: LimitInForce; readonly checks: BarChecks | null; readonly turns: FreeWays | null }
+  >;
   /** Forces of the combinations: a candidate must carry what acts. Null where nothing acts. */
   readonly forces: Forces | null;
 }
@@ -68,7 +72,8 @@ function seatsOf(subject: ShortlistSubject, bars: readonly BarId[]): readonly Se
   return bars.flatMap((id): Seat[] => {
     const bar = subject.layout.bars.get(id);
     const diagonal = subject.diagonals.get(id);
-    if (!bar?.angle || !diagonal) return [];
+    // No angle helps a bar that turns freely.
+    if (!bar?.angle || !diagonal || diagonal.turns) return [];
     const { limit, checks } = diagonal;
     const { angle } = bar;
     const basis = subject.project.settings.lengthBasis;

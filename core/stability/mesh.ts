@@ -1,6 +1,6 @@
 /** A bar as nodes with what is free at each, and pieces between them. Built once for a problem; loads come later. */
 import type { Vec2 } from '../geometry/vector.ts';
-import type { BarProblem, EndRotation, Hold } from './model.ts';
+import type { BarProblem, Hold } from './model.ts';
 import { freeWays, type Spring, type Way } from './ways.ts';
 
 export interface MeshNode {
@@ -46,7 +46,7 @@ export function meshOf(problem: BarProblem, split = 1): Mesh {
   const nodes: MeshNode[] = [];
   const pieces: MeshPiece[] = [];
   stops.forEach((at, k) => {
-    const end = k === 0 ? problem.endI : k === last ? problem.endJ : null;
+    const end = k === 0 ? 'i' : k === last ? 'j' : null;
     nodes.push(end ? endNode(problem, fields, at, end) : innerNode(problem, fields, at, stops));
     const to = stops[k + 1];
     if (to === undefined) return;
@@ -97,12 +97,13 @@ const freeNode = (fields: 2 | 3, at: number): MeshNode => ({
   slopeSprings: NONE,
 });
 
-/** Ends stay in place and against twist; their slopes are free, sprung or held along x and along y. */
-function endNode({ section }: BarProblem, fields: 2 | 3, at: number, end: EndRotation): MeshNode {
-  const { alongX, alongY } = end;
+/** Ends stay against twist, and in place as far as they are held; their slopes are free, sprung or held along x and along y. */
+function endNode(problem: BarProblem, fields: 2 | 3, at: number, end: 'i' | 'j'): MeshNode {
+  const { alongX, alongY } = end === 'i' ? problem.endI : problem.endJ;
+  const displacements = endDisplacements(problem, fields, end);
   if (alongX === 0 && alongY === 0)
-    return { at, displacements: NONE, slopes: WAYS[fields], springs: NONE, slopeSprings: NONE };
-  const { weak, strong } = principalMotions(section.alpha);
+    return { at, displacements, slopes: WAYS[fields], springs: NONE, slopeSprings: NONE };
+  const { weak, strong } = principalMotions(problem.section.alpha);
   const held: Way[] = [];
   const slopeSprings: Spring[] = [];
   ([alongX, alongY] as const).forEach((stiffness, k) => {
@@ -110,13 +111,14 @@ function endNode({ section }: BarProblem, fields: 2 | 3, at: number, end: EndRot
     if (stiffness === 'rigid') held.push(row);
     else if (stiffness > 0) slopeSprings.push({ row, stiffness });
   });
-  return {
-    at,
-    displacements: NONE,
-    slopes: freeWays(held, slopeSprings, fields),
-    springs: NONE,
-    slopeSprings,
-  };
+  return { at, displacements, slopes: freeWays(held, slopeSprings, fields), springs: NONE, slopeSprings };
+}
+
+function endDisplacements(problem: BarProblem, fields: 2 | 3, end: 'i' | 'j'): readonly Way[] {
+  const stays = problem.endsStay?.[end];
+  if (!stays) return NONE;
+  const held = stays.map((direction) => rowOf(problem, fields, { at: 0, direction, stiffness: 'rigid' }));
+  return freeWays(fields === 3 ? [...held, [0, 0, 1]] : held, [], fields);
 }
 
 function innerNode(problem: BarProblem, fields: 2 | 3, at: number, stops: readonly number[]): MeshNode {

@@ -53,6 +53,8 @@ export interface BarProblem {
   readonly axial: readonly AxialPiece[];
   readonly endI: EndRotation;
   readonly endJ: EndRotation;
+  /** Directions in which end i and end j stay in place; both ways where left out. The force keeps its direction at an end that moves. */
+  readonly endsStay?: { readonly i: readonly Vec2[]; readonly j: readonly Vec2[] };
   /** Null: bowing only. Otherwise bowing and twisting coupled, ends held against twist, free to warp. */
   readonly twist: { readonly G: number; readonly heldAt: readonly number[] } | null;
 }

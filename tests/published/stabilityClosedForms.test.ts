@@ -186,3 +186,72 @@ describe('what a hold must be', () => {
     expect(Math.abs((48 * steel * angle.Ixx) / length ** 3 - 9.0)).toBeLessThan(0.05);
   });
 });
+
+describe('a bar that runs on beyond its last hold to an end that does not hold', () => {
+  // Span b and the part a beyond it, load keeping its direction. Beyond the hold w = A sin k(L − z) less its value at the tip, so the slope over the
+  // moment there is k cot ka; in the span it is 1/b − k cot kb: k(cot ka + cot kb) = 1/b. Beam-column formulas of Timoshenko and Gere, §1.11.
+  const root = (a: number, b: number): number =>
+    bisected((k) => 1 / b - k / Math.tan(k * a) - k / Math.tan(k * b), 1e-7, Math.PI / Math.max(2 * a, b));
+  const withSpan = (b: number): number =>
+    loadOf({
+      endsStay: {
+        i: [
+          [1, 0],
+          [0, 1],
+        ],
+        j: [],
+      },
+      holds: ([0, 90] as const).map((way) => ({
+        at: b,
+        direction: direction(way),
+        stiffness: 'rigid' as const,
+      })),
+    });
+
+  it('has the load of k(cot ka + cot kb) = 1/b about its least axis', () => {
+    for (const b of [400, 1000, 2000, 3000, 3600])
+      near(withSpan(b), E * angle.Iv * root(L - b, b) ** 2, 1e-8);
+  });
+
+  it('carries no less than a pinned bar of the span and twice the part beyond, and tends to it at both extremes', () => {
+    for (const b of [40, 400, 1000, 2000, 3000, 3600, 3960])
+      expect(withSpan(b)).toBeGreaterThanOrEqual(euler(angle.Iv, b + 2 * (L - b)) * (1 - EXACT));
+    // With 1 % of the bar as span, or beyond it, the lengths differ by less than that, the loads by twice as much.
+    for (const b of [40, 3960]) expect(withSpan(b) / euler(angle.Iv, b + 2 * (L - b))).toBeLessThan(1.02);
+  });
+
+  it('is a mechanism with one hold alone: no load is carried', () => {
+    expect(
+      loadOf({
+        endsStay: {
+          i: [
+            [1, 0],
+            [0, 1],
+          ],
+          j: [[1, 0]],
+        },
+      }),
+    ).toBe(0);
+  });
+
+  it('with one end held in one direction alone bows square to it as if the end were not there', () => {
+    // Legs at right angles to the principal axes do not part the two; held along the weak motion at j, the strong motion swings out past the hold.
+    const weak = [Math.cos(angle.alpha), Math.sin(angle.alpha)] as const;
+    const load = loadOf({
+      endsStay: {
+        i: [
+          [1, 0],
+          [0, 1],
+        ],
+        j: [weak],
+      },
+      holds: ([0, 90] as const).map((way) => ({
+        at: 2000,
+        direction: direction(way),
+        stiffness: 'rigid' as const,
+      })),
+    });
+    // About v over 2 m: π²EI_v/b²; about u with the part beyond: from the same equation. Whichever is less.
+    near(load, Math.min(E * angle.Iu * root(2000, 2000) ** 2, euler(angle.Iv, 2000)), 1e-8);
+  });
+});

@@ -1,5 +1,6 @@
 import type { Assessment, DiagonalAssessment } from '../../assessment.ts';
 import type { AngleBar, Bar, BayLayout } from '../../layout/model.ts';
+import { endsHoldOf, endsMarkedFree } from '../../restraint/endWords.ts';
 import { numberedClaims } from '../claimNumbers.ts';
 
 export interface SheetSubject {
@@ -29,7 +30,12 @@ export function groupedAlike(assessment: Assessment, bay: BayLayout): readonly (
 function lookOf({ bar, angle, diagonal }: SheetSubject): string | null {
   const { restraint, findings } = diagonal;
   const hasStory = restraint === null || numberedClaims(restraint).length > 0 || findings.length > 0;
-  if (hasStory || (angle.mark.overrides ?? []).length > 0) return null;
+  if (
+    hasStory ||
+    (angle.mark.overrides ?? []).length > 0 ||
+    endsMarkedFree({ endsHold: endsHoldOf(angle) }).length > 0
+  )
+    return null;
   const { spec, side, ends, cut } = angle;
   const { roll = 0 } = angle.mark;
   const { tension = null, compression = null } = diagonal.checks ?? {};

@@ -2,6 +2,7 @@ import type { Assessment, DiagonalAssessment } from '../../assessment.ts';
 import type { AngleBar, Bar, Plane } from '../../layout/model.ts';
 import type { Verdict } from '../../practice/model.ts';
 import type { EndConnection, LengthOverride, UnitSystem } from '../../project/model.ts';
+import { endsHoldOf, endsMarkedFree } from '../../restraint/endWords.ts';
 import type { Restraint } from '../../restraint/model.ts';
 import { AXES, type Axis } from '../../section/model.ts';
 import { grouped } from '../../units/figures.ts';
@@ -54,6 +55,12 @@ export function diagonalSheet(
 function overridesTable(overrides: readonly LengthOverride[], units: UnitSystem): Markup {
   return checkTable(
     overrides.map((override) => markup`<b>Set by hand</b>, about ${overrideWords(override, units)}.`),
+/** Ends that are marked as holding less than both ways; null where none is. */
+function endMarks(angle: AngleBar): Markup | null {
+  const said = listed(endsMarkedFree({ endsHold: endsHoldOf(angle) }));
+  return said === '' ? null : markup`<p><b>Marked</b>: ${said}.</p>`;
+}
+
   );
 }
 

@@ -32,7 +32,7 @@ export function DiagonalCard({ bar, angle, assessment }: DiagonalCardProps): JSX
       <CardHead bar={bar} angle={angle} assessment={assessment} units={units} />
       <div className="card-body">
         {diagonal === undefined || restraint === null ? (
-          <Unassessed bar={bar} angle={angle} />
+          <Unassessed bar={bar} angle={angle} turns={diagonal?.turns ? diagonal.reason : null} />
         ) : (
           <>
             <SectionPart
@@ -85,7 +85,15 @@ export function DiagonalCard({ bar, angle, assessment }: DiagonalCardProps): JSX
   );
 }
 
-function Unassessed({ bar, angle }: { readonly bar: Bar; readonly angle: AngleBar }): JSX.Element {
+interface UnassessedProps {
+  readonly bar: Bar;
+  readonly angle: AngleBar;
+  /** Why it turns freely; null where it does not. */
+  readonly turns: string | null;
+}
+
+function Unassessed({ bar, angle, turns }: UnassessedProps): JSX.Element {
+  if (turns !== null) return <p className="card-problem">{turns}</p>;
   if (angle.stock === null)
     return (
       <p className="card-problem">

@@ -1,6 +1,7 @@
 import type { JSX } from 'react';
 import type { AngleBar, Layout } from '../../../core/layout/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
+import { END_HOLDS_WORDS, endsHoldOf } from '../../../core/restraint/endWords.ts';
 import type { Restraint, Station } from '../../../core/restraint/model.ts';
 import { columnLength } from '../../controls/figures.ts';
 import { JoinMark, type JoinShape } from '../../glyphs/JoinGlyph.tsx';
@@ -111,7 +112,10 @@ export function shapeOf(station: Station, layout: Layout): JoinShape {
   return layout.crossings.get(id)?.join?.kind ?? 'unmarked';
 }
 
-/** "gusset, 2 × M16", without what leg it is by. */
-function shortEnd({ ends }: AngleBar, end: 'i' | 'j', units: UnitSystem): string {
-  return `gusset, ${endText(ends[end], units).split(',')[0] ?? ''}`;
+/** "gusset, 2 × M16", without what leg it is by; of an end that does not hold both ways, what it does hold. */
+function shortEnd(angle: AngleBar, end: 'i' | 'j', units: UnitSystem): string {
+  const holds = endsHoldOf(angle)[end];
+  return holds === 'both'
+    ? `gusset, ${endText(angle.ends[end], units).split(',')[0] ?? ''}`
+    : END_HOLDS_WORDS[holds];
 }

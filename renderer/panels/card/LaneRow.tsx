@@ -50,8 +50,12 @@ export function LaneRow({ lane, letter, ends, limit, units }: LaneRowProps): JSX
           </text>
         </>
       )}
-      {ends.map((x) => (
-        <path key={x} className="lane-stop" d={`M${x} ${top - 2}v${LANE_DEEP + 4}`} />
+      {ends.map((x, end) => (
+        <path
+          key={x}
+          className={lane.endsStop[end] ? 'lane-stop' : 'lane-claimed'}
+          d={`M${x} ${top - 2}v${LANE_DEEP + 4}`}
+        />
       ))}
       {lane.cuts.map(({ x, stops, claimed }) =>
         stops ? (
@@ -80,7 +84,7 @@ interface PieceProps {
 
 function Piece({ piece, top, limit, units, byHand }: PieceProps): JSX.Element {
   const { left, right, step } = piece;
-  const length = byHand ? 'by hand' : showLength(piece.to - piece.from, units, 'spoken');
+  const length = byHand ? 'by hand' : showLength(piece.counts, units, 'spoken');
   const figure = showSlenderness(piece.slenderness, limit);
   const both = condensedWidth(length, 12) + 8 + condensedWidth(figure, 12, 600);
   const alone = condensedWidth(figure, 12, 600);

@@ -1,7 +1,7 @@
 import type { JSX } from 'react';
 import type { Bar } from '../../../core/layout/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
-import type { Restraint } from '../../../core/restraint/model.ts';
+import type { Lane, Restraint } from '../../../core/restraint/model.ts';
 import { AXES } from '../../../core/section/model.ts';
 import { showLength, showRadius, showSlenderness } from '../../../core/units/quantity.ts';
 import { chipText } from './laneWords.ts';
@@ -43,12 +43,13 @@ export function LanesInWords({ bar, restraint, read, limit, units }: LanesInWord
                 {restraint.governing.axis === axis && !ownLane && ', governs'}
               </td>
               <td>
-                {lane.cuts
-                  .flatMap((cut) => {
+                {[
+                  ...lane.cuts.flatMap((cut) => {
                     const station = restraint.stations[cut.station];
                     return station === undefined ? [] : [chipText(cut, station).long];
-                  })
-                  .join('; ')}
+                  }),
+                  ...endsThatLetGo(lane),
+                ].join('; ')}
               </td>
             </tr>
           );
@@ -65,4 +66,13 @@ export function LanesInWords({ bar, restraint, read, limit, units }: LanesInWord
       </tbody>
     </table>
   );
+}
+
+/** "end j is marked as not holding this way, so the part beyond counts twice" */
+function endsThatLetGo({ endsStop }: Lane): readonly string[] {
+  return (['i', 'j'] as const)
+    .filter((_, k) => !endsStop[k])
+    .map(
+      (end) => `end ${end} is marked as not holding this way, so the part beyond the last cut counts twice`,
+    );
 }

@@ -16,7 +16,8 @@ const BEFORE_DEEP = 6;
 
 export interface LanePiece {
   readonly from: number;
-  readonly to: number;
+  /** The length it counts as, mm. */
+  readonly counts: number;
   readonly left: number;
   readonly right: number;
   readonly slenderness: number;
@@ -40,6 +41,8 @@ export interface DrawnLane {
   readonly radius: number;
   readonly top: number;
   readonly pieces: readonly LanePiece[];
+  /** Whether end i and end j stop the motion. */
+  readonly endsStop: readonly [boolean, boolean];
   readonly cuts: readonly { readonly x: number; readonly stops: boolean; readonly claimed: boolean }[];
   readonly chips: readonly LaneChip[];
   readonly governs: boolean;
@@ -117,6 +120,7 @@ export function laneDrawing({
         lane === null
           ? [governingPiece(governing, read, along, limit)]
           : piecesOf(lane, along, limit, claimedAt(lane, restraint, along)),
+      endsStop: lane?.endsStop ?? [true, true],
       cuts: lane === null ? [] : cutsOf(lane, restraint, along),
       chips: chips.map((chip) => ({ ...chip, y: many ? top - CHIP_DEEP - 1 : top + LANE_DEEP + below + 3 })),
       governs: governs(axis),
@@ -168,9 +172,9 @@ function piecesOf(
   limit: number,
   marks: readonly number[],
 ): readonly LanePiece[] {
-  return lane.pieces.map(({ from, to }) => {
+  return lane.pieces.map(({ from, to, counts }) => {
     // A length set by hand stands for the whole lane.
-    const slenderness = lane.override === null ? (to - from) / lane.radius : lane.slenderness;
+    const slenderness = lane.override === null ? counts / lane.radius : lane.slenderness;
     const left = along(from);
     const right = along(to);
     const inside = [left, ...marks.filter((x) => x > left + 2 && x < right - 2), right];
@@ -179,7 +183,7 @@ function piecesOf(
     const [a, b] = gaps.find(([p, q]) => q - p > widest - 1) ?? [left, right];
     return {
       from,
-      to,
+      counts,
       left,
       right,
       slenderness,
@@ -207,7 +211,7 @@ function governingPiece(
   const right = along(governing.to);
   return {
     from: governing.from,
-    to: governing.to,
+    counts: governing.to - governing.from,
     left,
     right,
     slenderness,

@@ -68,6 +68,7 @@ function whyNot({ reason }: Claim): string | null {
     case 'nearly along the bar':
       return 'runs nearly along it';
     case 'end':
+    case 'end marked free':
     case 'partner end-on':
     case 'partner only bends':
     case 'single plate hinges':

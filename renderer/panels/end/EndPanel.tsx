@@ -1,9 +1,11 @@
 import type { JSX } from 'react';
 import type { NodeSupport } from '../../../core/layout/model.ts';
-import type { EndConnection } from '../../../core/project/model.ts';
+import { END_HOLDS, type EndConnection, type EndHolds } from '../../../core/project/model.ts';
+import { END_HOLDS_WORDS, endsHoldOf } from '../../../core/restraint/endWords.ts';
 import { showLength } from '../../../core/units/quantity.ts';
 import { IconButton } from '../../controls/IconButton.tsx';
 import { LengthField } from '../../controls/LengthField.tsx';
+import { SelectField } from '../../controls/SelectField.tsx';
 import { CloseSign } from '../../glyphs/signs.tsx';
 import { useActions, useWindow } from '../../shell/services.tsx';
 import type { BarEnd } from '../../store/selection.ts';
@@ -65,6 +67,12 @@ export function EndPanel({ end: { bar: barId, end } }: { readonly end: BarEnd })
           usualGauge={angle.placement.gauge}
           onChange={change}
         />
+        <SelectField
+          label="Holds the bar"
+          value={endsHoldOf(angle)[end]}
+          options={END_HOLDS.map((value) => ({ value, label: HOLDS[value] }))}
+          onChange={(holds) => change({ holds }, 'what is held')}
+        />
         <LengthField
           label={`Gusset, all of ${bar.bay}`}
           mm={angle.spec.gusset}
@@ -83,6 +91,7 @@ export function EndPanel({ end: { bar: barId, end } }: { readonly end: BarEnd })
           }
         />
       </fieldset>
+      <p className="end-note">{holdsText(endsHoldOf(angle)[end])}</p>
       {own !== undefined && (
         <div className="docked-buttons">
           <button type="button" className="link-button" disabled={trying} onClick={asBay}>
@@ -92,6 +101,20 @@ export function EndPanel({ end: { bar: barId, end } }: { readonly end: BarEnd })
       )}
     </section>
   );
+}
+
+const HOLDS: Readonly<Record<EndHolds, string>> = {
+  both: 'Both ways',
+  'in plane only': 'In the plane only',
+  'out of plane only': 'Out of the plane only',
+  nothing: 'Neither way',
+};
+
+/** What the choice means for the lengths. */
+function holdsText(holds: EndHolds): string {
+  return holds === 'both'
+    ? 'An end holds its bar both ways across itself, unless what it is fixed to can move.'
+    : `As marked, this end ${END_HOLDS_WORDS[holds]}: the bar swings out past the last place that holds it there, and that part counts twice.`;
 }
 
 function heldText(support: NodeSupport | undefined): string {

@@ -220,7 +220,14 @@ export const barMark: fc.Arbitrary<BarMark> = fc.record(
     heel: fc.constantFrom('up', 'down'),
     side: fc.constantFrom('near', 'far'),
     roll: fc.constantFrom(0, 30, -45, 90, 12.5, 360),
-    endI: fc.record({ setBack: span(0, 600), bolts: fc.constantFrom(1, 3) }, { requiredKeys: [] }),
+    endI: fc.record(
+      {
+        setBack: span(0, 600),
+        bolts: fc.constantFrom(1, 3),
+        holds: fc.constantFrom('both', 'in plane only', 'out of plane only', 'nothing'),
+      },
+      { requiredKeys: [] },
+    ),
     endJ: fc.record({ setBack: span(0, 600), kind: fc.constantFrom('welded') }, { requiredKeys: [] }),
     overrides,
   },
