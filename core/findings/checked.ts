@@ -62,7 +62,11 @@ function unchecked(subject: FindingSubject, all: readonly Judged[]): readonly Fi
     if (checks.unknown !== null) return [{ judged, why: checks.unknown }];
     if (checks.compression && (checks.compressionBy?.resistance ?? null) === null)
       return [{ judged, why: whyNot(checks.checks, 'compression') }];
-    return [];
+    // A pull that some rule gives no figure for is not shown to be carried.
+    const silent = checks.checks.some(
+      ({ resistance }) => resistance.against === 'tension' && resistance.resistance === null,
+    );
+    return checks.tension && silent ? [{ judged, why: whyNot(checks.checks, 'tension') }] : [];
   });
   return grouped(open, ({ why }) => why).flatMap((group): readonly Finding[] => {
     const [first] = group;
@@ -83,14 +87,14 @@ function unchecked(subject: FindingSubject, all: readonly Judged[]): readonly Fi
   });
 }
 
-function whyNot(checks: readonly Check[], against: 'compression'): string {
+function whyNot(checks: readonly Check[], against: 'tension' | 'compression'): string {
   const failed = checks
-    .filter(({ resistance }) => resistance.against === against)
+    .filter(({ resistance }) => resistance.against === against && resistance.resistance === null)
     .flatMap(({ resistance }) => resistance.conditions.filter(({ met }) => !met))
     .map(({ says, found }) => (found === null ? says : `${says} (${found})`));
   return failed.length > 0
-    ? `No rule for compression applies here: ${[...new Set(failed)].join('; ')}.`
-    : 'No rule for compression applies here.';
+    ? `No rule for ${against} applies here: ${[...new Set(failed)].join('; ')}.`
+    : `No rule for ${against} applies here.`;
 }
 
 /** Edges, ends and pitches below the least, and single bolts. */

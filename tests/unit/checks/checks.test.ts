@@ -1,0 +1,97 @@
+/** Demands against resistances, and what is found of them. */
+import { describe, expect, it } from 'vitest';
+import { assess } from '../../../core/assess.ts';
+import type { Assessment } from '../../../core/assessment.ts';
+import type { Actions } from '../../../core/project/actions.ts';
+import type { DiagonalSpec, Settings } from '../../../core/project/model.ts';
+import { remediesFor } from '../../../core/remedies/remedies.ts';
+import { bay, project, wall } from '../assess/given/bays.ts';
+import { CATALOGUES } from '../assess/given/catalogues.ts';
+
+/** Pushed at its head, 5 m wide and 4 m high. */
+function pushed(
+  kN: number,
+  diagonals: Partial<DiagonalSpec> = {},
+  settings: Partial<Settings> = {},
+): Assessment {
+  const actions: Actions = {
+    cases: [
+      {
+        id: 'W',
+        name: 'wind',
+        kind: 'wind',
+        selfWeight: false,
+        reverses: true,
+        loads: [{ kind: 'node', id: 'f', node: 'B/L1', force: [kN, 0, 0] }],
+      },
+    ],
+    combinations: [{ id: 'C', name: 'wind alone', use: 'strength', factors: { W: 1 }, leaning: false }],
+    carries: [],
+  };
+  const given = project([bay(wall(5000, [[4000, 'crossed']]), { diagonals })], settings);
+  return assess({ ...given, actions }, CATALOGUES);
+}
+
+const checksOf = (assessment: Assessment) => {
+  const checks = assessment.diagonals.get('B/t1.rise')?.checks;
+  if (!checks) throw new Error('no checks');
+  return checks;
+};
+const kinds = (assessment: Assessment) => assessment.findings.map(({ kind }) => kind);
+
+describe('a diagonal that is pulled', () => {
+  it('is used by its force over the least of what resists', () => {
+    // Statics: 40 kN × √41/5 = 51.2 kN.
+    const checks = checksOf(pushed(40));
+    expect(checks.tension?.force).toBeCloseTo((40_000 * Math.sqrt(41)) / 5, 2);
+    const least = Math.min(
+      ...checks.checks.flatMap(({ resistance }) =>
+        resistance.against === 'compression' || resistance.resistance === null ? [] : [resistance.resistance],
+      ),
+    );
+    expect(checks.governing?.resistance.resistance).toBe(least);
+    expect(checks.governing?.utilisation).toBeCloseTo((checks.tension?.force ?? 0) / least, 12);
+  });
+
+  it('is found too weak, and a remedy makes it strong enough', () => {
+    const assessment = pushed(100);
+    const finding = assessment.findings.find(({ kind }) => kind === 'resistance exceeded');
+    expect(finding?.breaksLimit).toBe(true);
+    expect(assessment.breaksLimit).toBe(true);
+    const remedies = finding ? remediesFor(assessment, finding, CATALOGUES) : [];
+    expect(remedies.some(({ effect }) => effect.answers)).toBe(true);
+  });
+
+  it('is not called checked while its steel is unknown', () => {
+    const assessment = pushed(10, { grade: 'best iron' });
+    expect(checksOf(assessment).status).toBe('unknown');
+    expect(kinds(assessment)).toContain('not checked');
+  });
+
+  it('is not called checked where a rule gives no figure', () => {
+    // EN 1993-1-8, 3.10.3 speaks of one row of bolts.
+    const { ends } = bay(wall(5000, [[4000, 'crossed']])).diagonals;
+    const assessment = pushed(
+      10,
+      { section: '150x150x12', ends: { ...ends, rows: 2, rowSpacing: 50, bolts: 4 } },
+      { practice: 'en1993' },
+    );
+    expect(kinds(assessment)).toContain('not checked');
+  });
+
+  it('uses as much in US units as in metric ones', () => {
+    const metric = checksOf(pushed(40));
+    const us = checksOf(pushed(40, {}, { units: 'us' }));
+    expect(us.governing?.utilisation).toBe(metric.governing?.utilisation);
+  });
+});
+
+describe('a diagonal counted on in compression too', () => {
+  it('is judged by no more than its critical load', () => {
+    const assessment = pushed(2, { countedOn: 'both' });
+    const checks = checksOf(assessment);
+    const critical = assessment.diagonals.get('B/t1.rise')?.bowing?.real.N ?? 0;
+    expect(checks.compression?.force).toBeGreaterThan(0);
+    expect(checks.compressionBy?.resistance).toBeLessThan(critical);
+  });
+});
