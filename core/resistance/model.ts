@@ -108,7 +108,8 @@ export interface Resistance {
 
 /**
  * The shape as resistance needs it. Legs only for angles. Of a pair `properties` are those of both angles, thickness and legs those of one;
- * of a flat the connected leg is its width and the gauge is from one edge; of a rod the area alone counts.
+ * of a flat the connected leg is its width and the gauge is from one edge; of a tube the connected leg is its diameter or side and the thickness its wall;
+ * of a rod the area alone counts in tension.
  */
 export interface ResistingSection {
   readonly designation: string;

@@ -90,6 +90,10 @@ export const AISC: CompressionPack = {
     clause: 'E3, E7',
     confidence: 'read in a source',
     twist: { clause: 'E4, E7', confidence: 'read in a source' },
+    walls: {
+      round: { most: ({ E, fy }) => (0.11 * E) / fy, says: '0.11 E/F_y' },
+      square: { most: ({ E, fy }) => 1.4 * Math.sqrt(E / fy), says: '1.40 √(E/F_y)' },
+    },
     twistLeftOut,
     remark: () => null,
     strength,

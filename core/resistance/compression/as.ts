@@ -51,6 +51,10 @@ export const AS: CompressionPack = {
     clause: '6.2.1, 6.3.3',
     confidence: 'from memory, sure',
     twist: { clause: '6.3.3, F_e with twist', confidence: 'from memory, verify' },
+    walls: {
+      round: { most: ({ fy }) => (82 * 250) / fy, says: '82 × 250/f_y' },
+      square: { most: ({ fy }) => 40 * Math.sqrt(250 / fy), says: '40 √(250/f_y)' },
+    },
     twistLeftOut: () => null,
     remark: () => null,
     strength: (question, Fe, working) => {

@@ -8,6 +8,7 @@ import { EN } from './en.ts';
 import { IS } from './is.ts';
 import type { ColumnRule, CompressionPack } from './pack.ts';
 import { CSA, SANS } from './sansAndCsa.ts';
+import { requireStoutWall } from './walls.ts';
 
 const PACKS: Readonly<Record<PracticeId, CompressionPack>> = {
   sans10162: SANS,
@@ -37,6 +38,7 @@ function byCriticalLoad(question: CompressionQuestion, column: ColumnRule): Resi
   const { criticalLoad, section } = question;
   const known = criticalLoad !== null && criticalLoad > 0 ? criticalLoad : null;
   working.requires('the critical load is known', known !== null, 'the framing gives the bar none');
+  requireStoutWall(question, column.walls, working);
   if (known !== null) {
     working.given('area', 'A', section.properties.area, 'area');
     working.given('critical load with the real holds', 'N_cr', known, 'force');
@@ -60,6 +62,7 @@ function byCriticalLoad(question: CompressionQuestion, column: ColumnRule): Resi
 function byLengths(question: CompressionQuestion, column: ColumnRule): Resistance {
   const working = new Working();
   const { area } = question.section.properties;
+  requireStoutWall(question, column.walls, working);
   working.given('area', 'A', area, 'area');
   const { Fe, twists } = elasticStress(question, twistLeftOut(question, column), working);
   working.step('elastic critical load', 'N_cr', 'A F_e', area * Fe, 'force');
@@ -103,15 +106,20 @@ const hasRemark = (question: CompressionQuestion, column: ColumnRule): boolean =
   column.remark(question) !== null || question.section.shape !== 'angle';
 
 function noteOf(question: CompressionQuestion, column: ColumnRule): string | null {
-  const { section, ends, loadedAcross } = question;
-  const eccentric = section.shape === 'angle' && ends.some(({ legs }) => legs === 'one');
+  const { section, loadedAcross } = question;
   const notes = [
-    eccentric ? ECCENTRICITY_LEFT_OUT : null,
+    isEccentric(question) ? ECCENTRICITY_LEFT_OUT : null,
     loadedAcross ? 'A load acts across the bar: a check with bending is still due.' : null,
     column.remark(question),
     shapeNote(section.shape),
   ];
   return notes.filter((note) => note !== null).join(' ') || null;
+}
+
+/** An angle by one leg, and what lies with a face against the gusset. */
+function isEccentric({ section, ends }: CompressionQuestion): boolean {
+  if (section.shape === 'angle') return ends.some(({ legs }) => legs === 'one');
+  return section.shape === 'flat' || section.shape === 'tee' || section.shape === 'channel';
 }
 
 /** What is not looked at in a shape. */
@@ -120,15 +128,15 @@ function shapeNote(shape: SectionShape): string | null {
     case 'angle':
     case 'flat':
     case 'rod':
+    case 'round tube':
+    case 'square tube':
       return null;
     case 'angles back to back':
     case 'starred angles':
       return 'The two angles are taken as one bar: that battens or packs stand close enough to make them one is to be checked.';
     case 'tee':
     case 'channel':
-    case 'round tube':
-    case 'square tube':
-      return 'Whether its plates or walls are too slender to yield is not looked at.';
+      return 'Whether its plates are too slender to yield is not looked at.';
     default:
       return shape satisfies never;
   }

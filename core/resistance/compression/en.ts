@@ -86,6 +86,10 @@ export const EN: CompressionPack = {
     clause: '6.3.1, Table 6.2',
     confidence: 'from memory, sure',
     twist: { clause: '6.3.1.4, Table 6.2', confidence: 'from memory, sure' },
+    walls: {
+      round: { most: ({ fy }) => (90 * 235) / fy, says: '90 ε²' },
+      square: { most: ({ fy }) => 42 * Math.sqrt(235 / fy), says: '42 ε' },
+    },
     twistLeftOut: () => null,
     remark: () => null,
     strength: (question, Fe, working) => {

@@ -112,6 +112,10 @@ export const IS: CompressionPack = {
     clause: '7.1.2',
     confidence: 'from memory, sure',
     twist: { clause: '7.1.2, 7.5.1.1, f_cc with twist', confidence: 'from memory, verify' },
+    walls: {
+      round: { most: ({ fy }) => (88 * 250) / fy, says: '88 ε²' },
+      square: { most: ({ fy }) => 42 * Math.sqrt(250 / fy), says: '42 ε' },
+    },
     twistLeftOut: () => null,
     remark: slenderRemark,
     strength: (question, Fe, working) => {

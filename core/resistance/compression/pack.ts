@@ -1,6 +1,7 @@
 import type { Confidence } from '../../practice/model.ts';
 import type { CompressionQuestion, Resistance } from '../model.ts';
 import type { Working } from '../working.ts';
+import type { WallLimits } from './walls.ts';
 
 /** How a practice makes a resistance of an elastic stress. */
 export interface ColumnRule {
@@ -9,6 +10,8 @@ export interface ColumnRule {
   readonly confidence: Confidence;
   /** Where twist takes part. */
   readonly twist: { readonly clause: string; readonly confidence: Confidence };
+  /** Of tubes. */
+  readonly walls: WallLimits;
   /** Why the practice does not ask for bowing with twist; null where it does. */
   twistLeftOut(question: CompressionQuestion): string | null;
   /** What the rule does beyond its plain form, where it is less sure than the rest; null where nothing. */

@@ -103,6 +103,10 @@ const pack = (standard: string, own: boolean): CompressionPack => ({
     clause: '13.3.1',
     confidence: 'from memory, sure',
     twist: { clause: '13.3.2, 13.3.1', confidence: 'from memory, sure' },
+    walls: {
+      round: { most: ({ fy }) => 23_000 / fy, says: '23 000/f_y' },
+      square: { most: ({ fy }) => 670 / Math.sqrt(fy), says: '670/√f_y' },
+    },
     twistLeftOut: () => null,
     remark: (question) => class4Remark(question, own),
     strength,

@@ -316,7 +316,30 @@ describe('other shapes', () => {
       compressionOf(compressed('csaS16', { ...round, shape }, 1000, { fy: 300 }), CRITICAL).note;
     expect(note('angles back to back')).toContain('battens');
     expect(note('channel')).toContain('too slender to yield');
-    expect(note('flat')).toBeNull();
+    expect(note('rod')).toBeNull();
+  });
+
+  it('say that eccentricity is left out where a face lies against the gusset', () => {
+    const note = (shape: SectionShape) =>
+      compressionOf(compressed('csaS16', { ...round, shape }, 1000, { fy: 300 }), CRITICAL).note ?? '';
+    for (const shape of ['flat', 'tee', 'channel'] as const) expect(note(shape)).toContain('beam-column');
+    for (const shape of ['rod', 'round tube', 'angles back to back'] as const)
+      expect(note(shape)).not.toContain('beam-column');
+  });
+
+  it('are refused with a wall that buckles before it yields: tubes of 100 with walls of 1 and 2', () => {
+    // At f_y 250: limits on D/t 92, 88, 84.6, 82 and 88; on (side − 3t)/t 42.4, 39.6, 40.7, 40 and 42. D/t 100 and 50; 97 and 47.
+    for (const practice of PRACTICES) {
+      const tube = (shape: SectionShape, thickness: number) => {
+        const section = { ...round, shape, connectedLeg: 100, outstandingLeg: 100, thickness };
+        return compressionOf(compressed(practice, section, 1000, { fy: 250 }), LENGTHS);
+      };
+      expect(tube('round tube', 1).resistance, practice).toBeNull();
+      expect(tube('round tube', 2).resistance, practice).not.toBeNull();
+      expect(tube('square tube', 2).resistance, practice).toBeNull();
+      expect(tube('square tube', 2.5).resistance, practice).not.toBeNull();
+      expect(tube('square tube', 2).conditions[0]?.found).toBe('47.0');
+    }
   });
 
   it('may twist about their own centroid: starred angles short and thin', () => {
