@@ -12,6 +12,7 @@ const CAPPED =
  *   The concentric checks cap it, both of them. Rules for one leg allow more than the centroid where they reckon with ends that do not turn (slender bars); that gain is
  *   not taken, since no one vouches for such ends here.
  * - Otherwise the lower concentric check. Its note says that the eccentricity is left out and a beam-column check still due.
+ *   Where a condition stops being met (one bolt fewer, a slenderness past 200) this may be more than the rule gave just before: the caution then stands for what is missing.
  *
  * Both concentric checks count, the critical load and the lengths by the practice, so that a hold which one of them sees and the other does not never makes the bar stronger.
  */
