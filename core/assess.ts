@@ -20,6 +20,7 @@ import type { AngleBar, Bar, BarId, BayLayout, Layout } from './layout/model.ts'
 import { limitInForce } from './practice/limit.ts';
 import type { Practice, Verdict } from './practice/model.ts';
 import { practiceFor } from './practice/practices.ts';
+import { endFixityOf } from './project/endFixity.ts';
 import type { Pattern, Project } from './project/model.ts';
 import {
   type RestraintContext,
@@ -119,7 +120,14 @@ function withBowing(
   const restraints = new Map(
     [...byMarks].flatMap(([id, { restraint }]) => (restraint ? [[id, restraint] as const] : [])),
   );
-  const input = { layout, context, restraints, steel: practice.steel, forces };
+  const input = {
+    layout,
+    context,
+    restraints,
+    steel: practice.steel,
+    ends: endFixityOf(project.settings),
+    forces,
+  };
   const judged = new Map(byMarks);
   const movable = new Map<string, readonly NamedMechanism[]>();
   layout.bays.forEach((bay, index) => {

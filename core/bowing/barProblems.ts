@@ -1,10 +1,13 @@
 import type { StationStiffness } from '../frame/push.ts';
 import { dot, unit2, type Vec2 } from '../geometry/vector.ts';
 import type { AngleBar, Bar, Crossing } from '../layout/model.ts';
+import type { EndFixity } from '../project/model.ts';
 import { inSection } from '../restraint/claims.ts';
 import { squareTo } from '../restraint/directions.ts';
+import { endsHoldOf } from '../restraint/endWords.ts';
 import type { Held, Restraint, Station } from '../restraint/model.ts';
 import { bothEndsHold } from '../restraint/rule.ts';
+import { endHolds } from '../restraint/stations.ts';
 import type { SectionProperties } from '../section/model.ts';
 import { type BarProblem, type Hold, PINNED } from '../stability/model.ts';
 import type { PairBar } from '../stability/pair.ts';
@@ -22,6 +25,8 @@ export interface BowingBar {
   readonly restraint: Restraint;
   /** Offered at its places in the frame; empty when nothing is joined. */
   readonly offered: readonly StationStiffness[];
+  /** How its ends turn. */
+  readonly ends: EndFixity;
 }
 
 /** The bar between its end stations, without holds between them. */
@@ -97,6 +102,20 @@ export function realHolds(bar: BowingBar): readonly Hold[] {
   });
 }
 
+/** The bar in question with its real holds. In the plane its ends are taken as hinges, on the safe side; out of it they turn as the project says. */
+export function realProblem(bar: BowingBar, steel: Steel): BarProblem {
+  return { ...bareBar(bar, steel), ...slopesThatStay(bar), holds: realHolds(bar) };
+}
+
+/** An end that does not stay in place out of the plane does not keep its slope there either. */
+function slopesThatStay(bar: BowingBar): Pick<BarProblem, 'slopesStay'> {
+  if (bar.ends.outOfPlane === 'hinged') return {};
+  const hold = endsHoldOf(bar.angle);
+  const { outOfPlane } = planeWays(bar);
+  const kept = (end: 'i' | 'j'): readonly Vec2[] => (endHolds(hold[end], 'out of plane') ? [outOfPlane] : []);
+  return { slopesStay: { i: kept('i'), j: kept('j') } };
+}
+
 /** "In plane, across" and "out of plane" as unit vectors of the section plane. */
 export function planeWays({ angle }: Pick<BowingBar, 'angle'>): {
   readonly inPlane: Vec2;
@@ -158,7 +177,7 @@ export function pairBar(
   const endOn: Hold[] = here
     ? [{ at: place, direction: ways.inPlane, stiffness: stiffnessAlong(here, ways.inPlane) }]
     : [];
-  const problem = bareBar(bar, steel);
+  const problem = realProblem(bar, steel);
   const sign = dot(bar.angle.placement.outOfPlane, normal) < 0 ? -1 : 1;
   return {
     problem: {

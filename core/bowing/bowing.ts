@@ -5,7 +5,7 @@ import {
   type BowingBar,
   bareBar,
   pairBar,
-  realHolds,
+  realProblem,
   rigidHolds,
   type Steel,
   withTwist,
@@ -31,7 +31,7 @@ export function bowingOf(bar: BowingBar, partner: Partner | null, steel: Steel):
   const bare = bareBar(bar, steel);
   const rigidProblem = { ...bare, holds: rigidHolds(bar) };
   const rigidLoad = loadOf(rigidProblem);
-  const springProblem = { ...bare, holds: realHolds(bar) };
+  const springProblem = realProblem(bar, steel);
   const springLoad = loadOf(springProblem);
   const twist = twistEffect(bar, steel, springProblem, springLoad);
   const pair = partner ? pairProblem(bar, partner, steel) : null;

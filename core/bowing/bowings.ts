@@ -1,12 +1,12 @@
 import type { Forces } from '../forces/model.ts';
 import { type PartnerShare, partnerShare } from '../forces/partnerShare.ts';
-import { bayFrame, GUSSETED } from '../frame/bayFrame.ts';
+import { bayFrame } from '../frame/bayFrame.ts';
 import type { Mechanism } from '../frame/model.ts';
 import { offeredTo } from '../frame/push.ts';
 import { FrameSolver } from '../frame/solver.ts';
 import { isJoined } from '../layout/joined.ts';
 import type { BarId, BayLayout, Crossing, Layout } from '../layout/model.ts';
-import type { Bay } from '../project/model.ts';
+import type { Bay, EndFixity } from '../project/model.ts';
 import type { Restraint } from '../restraint/model.ts';
 import type { RestraintContext } from '../restraint/restraint.ts';
 import type { BowingBar, Steel } from './barProblems.ts';
@@ -19,6 +19,8 @@ export interface BowingInput {
   readonly context: RestraintContext;
   readonly restraints: ReadonlyMap<BarId, Restraint>;
   readonly steel: Steel;
+  /** How the ends of diagonals turn. */
+  readonly ends: EndFixity;
   /** Forces of every combination, where actions are given: they say how taut a partner is. */
   readonly forces: Forces | null;
 }
@@ -59,7 +61,7 @@ export function bayBowing(input: BowingInput, layout: BayLayout, bay: Bay): BayB
   const { context, steel } = input;
   const frame = bayFrame(input.layout, context.holdings, layout, {
     ...steel,
-    ends: GUSSETED,
+    ends: input.ends,
     tension: new Map(),
   });
   const solver = new FrameSolver(frame);
@@ -70,7 +72,7 @@ export function bayBowing(input: BowingInput, layout: BayLayout, bay: Bay): BayB
     const angle = bar?.angle;
     if (!bar || !angle?.stock || !restraint) continue;
     const offered = offeredTo(solver, id, angle.placement) ?? [];
-    bars.set(id, { bar, angle, section: angle.stock.properties, restraint, offered });
+    bars.set(id, { bar, angle, section: angle.stock.properties, restraint, offered, ends: input.ends });
   }
   return { solver, mechanisms: solver.mechanisms(), bars, partners: partnersOf(input, bay, bars) };
 }

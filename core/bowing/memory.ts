@@ -57,6 +57,7 @@ export function circumstances(input: BowingInput, layout: BayLayout, bay: Bay, p
     settings.practice,
     settings.catalogue,
     settings.lengthBasis,
+    input.ends,
     ownStock,
     holds,
     supports,

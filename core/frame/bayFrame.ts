@@ -1,6 +1,8 @@
 import { along, cross, distance, dot, scale, subtract, unit, type Vec3 } from '../geometry/vector.ts';
 import { isJoined } from '../layout/joined.ts';
 import type { Bar, BarId, BayLayout, Crossing, Layout, Plane } from '../layout/model.ts';
+import type { EndFixity } from '../project/model.ts';
+import { endsHoldOf } from '../restraint/endWords.ts';
 import type { Holdings } from '../restraint/heldNodes.ts';
 import { endHolds } from '../restraint/stations.ts';
 import { lineHolding } from '../restraint/trails.ts';
@@ -11,16 +13,13 @@ import type { Frame, FrameElement, FrameNode, FrameSpring, NodeAlong, Release } 
 export interface FrameOptions {
   readonly E: number;
   readonly G: number;
-  /** How a diagonal's end turns: about the normal of the plane, and about the line in the plane across the bar. */
-  readonly ends: { readonly inPlane: 'stiff' | 'hinged'; readonly outOfPlane: 'stiff' | 'hinged' };
+  /** How a diagonal's end turns. */
+  readonly ends: EndFixity;
   /** Axial forces already in the bars, tension positive, N. */
   readonly tension: ReadonlyMap<BarId, number>;
   /** Places on bars that get a node although nothing is joined there, mm from end i. */
   readonly extraPlaces?: ReadonlyMap<BarId, readonly number[]>;
 }
-
-/** Gusset stiff in its plane, a hinge out of it. */
-export const GUSSETED: FrameOptions['ends'] = { inPlane: 'stiff', outOfPlane: 'hinged' };
 
 /** Stiffness that stands in for "does not give", N/mm and N·mm/rad: a thousand times a short stocky bar's, well inside working accuracy. */
 const UNYIELDING = 1e9;
@@ -124,7 +123,7 @@ class BayFrameBuilder {
   /** An end that does not hold both ways has a node of its own, kept along the bar, against turning, and in the ways that it does hold. */
   #endOf(bar: Bar, end: 'i' | 'j'): number {
     const node = this.#nodeOf(end === 'i' ? bar.i : bar.j, bar);
-    const marked = bar.angle?.ends[end].holds ?? 'both';
+    const marked = bar.angle ? endsHoldOf(bar.angle)[end] : 'both';
     if (!bar.angle || marked === 'both') return node;
     const { inPlane, outOfPlane } = bar.angle.placement;
     const own = this.#add(`end ${end} of ${bar.mark}`, end === 'i' ? bar.from : bar.to, false, bar);
@@ -350,11 +349,13 @@ class BayFrameBuilder {
     const outOfPlane = cross(bar.direction, inPlane);
     if (bar.angle) {
       const { ends } = this.#options;
-      const free = [
-        ...(ends.inPlane === 'hinged' ? [outOfPlane] : []),
-        ...(ends.outOfPlane === 'hinged' ? [inPlane] : []),
+      const hold = endsHoldOf(bar.angle);
+      // An end that does not hold the bar in a way does not keep it from turning that way either.
+      const freeAt = (end: 'i' | 'j'): readonly Vec3[] => [
+        ...(ends.inPlane === 'hinged' || !endHolds(hold[end], 'in plane') ? [outOfPlane] : []),
+        ...(ends.outOfPlane === 'hinged' || !endHolds(hold[end], 'out of plane') ? [inPlane] : []),
       ];
-      return [free, free];
+      return [freeAt('i'), freeAt('j')];
     }
     switch (bar.role) {
       case 'column':

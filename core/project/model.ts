@@ -37,10 +37,18 @@ export interface Settings {
   readonly sagRatio: number | null;
   /** Unbraced lengths between set-out points, or between the centres of the end connections. */
   readonly lengthBasis: 'set-out' | 'connections';
+  /** How the ends of diagonals turn; as a gusset lets them unless said: stiff in the plane, a hinge out of it. */
+  readonly endFixity?: EndFixity;
   /** What the user chooses about resistances; what is left out goes by the practice. */
   readonly resistance?: ResistanceSettings;
   /** Grades of the user's own: yield stress and tensile strength, N/mm². */
   readonly ownGrades?: readonly OwnGrade[];
+}
+
+/** Turning about the normal of the plane, and about the line in the plane across the bar. */
+export interface EndFixity {
+  readonly inPlane: 'stiff' | 'hinged';
+  readonly outOfPlane: 'stiff' | 'hinged';
 }
 
 export interface ResistanceSettings {

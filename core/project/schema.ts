@@ -192,6 +192,9 @@ const settings = z.strictObject({
   units: z.enum(['metric', 'us']),
   sagRatio: z.number().min(20).max(5_000).nullable(),
   lengthBasis: z.enum(['set-out', 'connections']),
+  endFixity: z
+    .strictObject({ inPlane: z.enum(['stiff', 'hinged']), outOfPlane: z.enum(['stiff', 'hinged']) })
+    .optional(),
   resistance: z
     .strictObject({
       method: z.enum(['LRFD', 'ASD']).optional(),

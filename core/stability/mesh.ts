@@ -101,10 +101,14 @@ const freeNode = (fields: 2 | 3, at: number): MeshNode => ({
 function endNode(problem: BarProblem, fields: 2 | 3, at: number, end: 'i' | 'j'): MeshNode {
   const { alongX, alongY } = end === 'i' ? problem.endI : problem.endJ;
   const displacements = endDisplacements(problem, fields, end);
-  if (alongX === 0 && alongY === 0)
+  const kept = problem.slopesStay?.[end] ?? NONE;
+  if (alongX === 0 && alongY === 0 && kept.length === 0)
     return { at, displacements, slopes: WAYS[fields], springs: NONE, slopeSprings: NONE };
   const { weak, strong } = principalMotions(problem.section.alpha);
-  const held: Way[] = [];
+  const held: Way[] = kept.map(([x, y]) => {
+    const row = [x * weak[0] + y * weak[1], x * strong[0] + y * strong[1]];
+    return fields === 3 ? [...row, 0] : row;
+  });
   const slopeSprings: Spring[] = [];
   ([alongX, alongY] as const).forEach((stiffness, k) => {
     const row = fields === 3 ? [weak[k] ?? 0, strong[k] ?? 0, 0] : [weak[k] ?? 0, strong[k] ?? 0];

@@ -55,6 +55,8 @@ export interface BarProblem {
   readonly endJ: EndRotation;
   /** Directions in which end i and end j stay in place; both ways where left out. The force keeps its direction at an end that moves. */
   readonly endsStay?: { readonly i: readonly Vec2[]; readonly j: readonly Vec2[] };
+  /** Directions in which end i and end j keep their slope; none where left out. */
+  readonly slopesStay?: { readonly i: readonly Vec2[]; readonly j: readonly Vec2[] };
   /** Null: bowing only. Otherwise bowing and twisting coupled, ends held against twist, free to warp. */
   readonly twist: { readonly G: number; readonly heldAt: readonly number[] } | null;
 }

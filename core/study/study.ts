@@ -1,22 +1,16 @@
 import type { Assessment } from '../assessment.ts';
-import {
-  type BowingBar,
-  bareBar,
-  planeWays,
-  realHolds,
-  type Steel,
-  stiffnessAlong,
-} from '../bowing/barProblems.ts';
+import { type BowingBar, planeWays, realProblem, type Steel, stiffnessAlong } from '../bowing/barProblems.ts';
 import { type Partner, pairProblem } from '../bowing/bowing.ts';
 import { type BayBowing, bayBowing } from '../bowing/bowings.ts';
 import { loadAgainstPartner, loadAgainstPosition } from '../bowing/curves.ts';
 import { neededStiffness } from '../bowing/needs.ts';
 import { bayCriticalLoad } from '../frame/bayCriticalLoad.ts';
-import { bayFrame, GUSSETED } from '../frame/bayFrame.ts';
+import { bayFrame } from '../frame/bayFrame.ts';
 import { type BarMovement, evenPlaces, type PushTest, pushTest } from '../frame/pushTest.ts';
 import type { Vec2, Vec3 } from '../geometry/vector.ts';
 import type { BarId, BayLayout, Placement } from '../layout/model.ts';
 import { restraintDemands } from '../practice/restraintDemand.ts';
+import { endFixityOf } from '../project/endFixity.ts';
 import { restraintContext } from '../restraint/restraint.ts';
 import { criticalLoad } from '../stability/criticalLoad.ts';
 import { bucklingMode } from '../stability/mode.ts';
@@ -71,7 +65,7 @@ export function pushOf(assessment: Assessment, bar: BarId, at: number): PushTest
     assessment.layout,
     holdings,
     bay,
-    { ...assessment.practice.steel, ends: GUSSETED, tension: new Map() },
+    { ...assessment.practice.steel, ends: endFixityOf(assessment.project.settings), tension: new Map() },
     { bar, at, axes: { x, y } },
   );
 }
@@ -100,6 +94,7 @@ function sceneOf(assessment: Assessment, id: BarId): Scene | null {
     context: restraintContext(layout),
     restraints,
     steel: practice.steel,
+    ends: endFixityOf(project.settings),
     forces: assessment.forces,
   };
   const bowing = bayBowing(input, bay, source);
@@ -115,7 +110,7 @@ function realMode(bar: BowingBar, partner: Partner | null, steel: Steel): Buckli
     const { factor } = pairCriticalLoad(pair);
     if (factor !== null) return pairMode(pair, factor);
   }
-  const problem = { ...bareBar(bar, steel), holds: realHolds(bar) };
+  const problem = realProblem(bar, steel);
   const { factor } = criticalLoad(problem, { second: false });
   if (factor === null) throw new Error('a bar without compression has no mode');
   return bucklingMode(problem, factor);
@@ -161,10 +156,10 @@ function bayStudy(assessment: Assessment, bay: BayLayout, { studied, partner, st
   const places = new Map(
     bay.diagonals.map((id) => [id, evenPlaces(layout.bars.get(id)?.length ?? 0)] as const),
   );
-  // Pinned both ways, as the single bar is taken, so that the two can be compared.
+  // Hinged in the plane, as the single bar is taken, so that the two can be compared.
   const frame = bayFrame(layout, holdings, bay, {
     ...steel,
-    ends: { inPlane: 'hinged', outOfPlane: 'hinged' },
+    ends: { ...endFixityOf(assessment.project.settings), inPlane: 'hinged' },
     tension: new Map(),
     extraPlaces: places,
   });
@@ -172,7 +167,7 @@ function bayStudy(assessment: Assessment, bay: BayLayout, { studied, partner, st
   if (partner) shares.set(partner.bar.bar.id, partner.tensionShare);
   const single = partner
     ? pairCriticalLoad(pairProblem(studied, partner, steel)).N
-    : criticalLoad({ ...bareBar(studied, steel), holds: realHolds(studied) }, { second: false }).N;
+    : criticalLoad(realProblem(studied, steel), { second: false }).N;
   const { factor, mode } = bayCriticalLoad(frame, shares, single ?? 1000);
   const movement = bay.diagonals.flatMap((bar): BarMovement[] => {
     const along = frame.along.get(bar);

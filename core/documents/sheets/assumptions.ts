@@ -1,6 +1,8 @@
 /** What the figures of a report stand on, stated so that a checker can agree or not. */
 import type { Assessment } from '../../assessment.ts';
 import type { LimitInForce, Practice } from '../../practice/model.ts';
+import { endFixityOf } from '../../project/endFixity.ts';
+import { endsHoldOf, endsMarkedFree } from '../../restraint/endWords.ts';
 import { showSlenderness } from '../../units/quantity.ts';
 import { CATALOGUE_NAMES } from '../words.ts';
 
@@ -15,7 +17,7 @@ export function projectAssumptions(assessment: Assessment): readonly string[] {
     settings.lengthBasis === 'set-out'
       ? 'Unbraced lengths run between set-out points.'
       : 'Unbraced lengths run between the centres of the end connections.',
-    'The end connections hold every way; no fixity of them is counted on.',
+    endsWords(assessment),
     'No load but their own weight acts on the bars between their stations.',
     'Every mark on the drawing is built as it stands there, bolts in place and tight, before the bar is relied on.',
     `Sections are of ${CATALOGUE_NAMES[settings.catalogue]}${project.ownStock.length > 0 ? `, and of the project's own list (${project.ownStock.length} sizes)` : ''}.`,
@@ -42,6 +44,16 @@ export function limitWords(limit: LimitInForce, practice: Practice): string {
     default:
       return limit.source satisfies never;
   }
+}
+
+function endsWords({ project, layout }: Assessment): string {
+  const marked = [...layout.bars.values()].some(
+    ({ angle }) => angle !== null && endsMarkedFree({ endsHold: endsHoldOf(angle) }).length > 0,
+  );
+  const hold = `The end connections hold every way${marked ? ', but where they are marked otherwise' : ''}`;
+  return endFixityOf(project.settings).outOfPlane === 'stiff'
+    ? `${hold}; unbraced lengths count on no fixity of them, critical loads take them as stiff out of the plane, as the project says.`
+    : `${hold}; no fixity of them is counted on.`;
 }
 
 function lowered(text: string): string {

@@ -2,6 +2,7 @@ import type { JSX } from 'react';
 import type { CatalogueId } from '../../../core/catalogue/model.ts';
 import type { MemberClass, Practice } from '../../../core/practice/model.ts';
 import { PRACTICES, practiceFor } from '../../../core/practice/practices.ts';
+import { endFixityOf } from '../../../core/project/endFixity.ts';
 import type { Settings } from '../../../core/project/model.ts';
 import { CheckField } from '../../controls/CheckField.tsx';
 import { NumberField } from '../../controls/NumberField.tsx';
@@ -61,6 +62,7 @@ export function SettingsDialog(): JSX.Element {
           ]}
           onChange={(lengthBasis) => set({ lengthBasis }, 'what lengths run between')}
         />
+        <EndFixityFields settings={settings} onChange={set} />
         <SagFields settings={settings} onChange={set} />
         <h3>Stock and units</h3>
         <SelectField
@@ -165,6 +167,34 @@ function LimitFields({
           onChange={(ownLimit) => onChange({ ownLimit }, 'the own limit')}
         />
       )}
+    </>
+  );
+}
+
+const TURNING = [
+  { value: 'stiff', label: 'Stiff' },
+  { value: 'hinged', label: 'A hinge' },
+] as const;
+
+/** How ends turn in the push test and the critical loads; the rule by the marks takes them as hinges in any case. */
+function EndFixityFields({ settings, onChange }: SetProps): JSX.Element {
+  const ends = endFixityOf(settings);
+  return (
+    <>
+      <Segmented
+        label="Ends, in the plane"
+        value={ends.inPlane}
+        options={TURNING}
+        onChange={(inPlane) => onChange({ endFixity: { ...ends, inPlane } }, 'how ends turn in the plane')}
+      />
+      <Segmented
+        label="Ends, out of the plane"
+        value={ends.outOfPlane}
+        options={TURNING}
+        onChange={(outOfPlane) =>
+          onChange({ endFixity: { ...ends, outOfPlane } }, 'how ends turn out of the plane')
+        }
+      />
     </>
   );
 }

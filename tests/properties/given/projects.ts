@@ -297,7 +297,7 @@ const ownAngle: OwnAngle = {
   toeRadius: 4,
 };
 
-export const settings: fc.Arbitrary<Settings> = fc.record({
+const plainSettings: fc.Arbitrary<Settings> = fc.record({
   practice: fc.constantFrom('sans10162', 'csaS16', 'aisc360', 'en1993', 'as4100', 'is800'),
   memberClass: fc.constantFrom(null, 'wind', 'no such class'),
   ownLimit: fc.constantFrom(null, 20, 250),
@@ -306,6 +306,12 @@ export const settings: fc.Arbitrary<Settings> = fc.record({
   sagRatio: fc.constantFrom(null, 200, 5000),
   lengthBasis: fc.constantFrom('set-out', 'connections'),
 });
+const turning = fc.constantFrom('stiff', 'hinged');
+const endFixity = fc.record({ inPlane: turning, outOfPlane: turning });
+
+export const settings: fc.Arbitrary<Settings> = fc
+  .tuple(plainSettings, fc.option(endFixity, { nil: null }))
+  .map(([plain, ends]) => (ends === null ? plain : { ...plain, endFixity: ends }));
 
 const unmarkedProject: fc.Arbitrary<Project> = fc.subarray([...BAY_IDS], { maxLength: 3 }).chain((ids) =>
   fc.record({

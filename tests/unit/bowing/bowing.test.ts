@@ -5,13 +5,16 @@ import type { Assessment } from '../../../core/assessment.ts';
 import { type BowingBar, planeWays, type Steel } from '../../../core/bowing/barProblems.ts';
 import { bayBowing } from '../../../core/bowing/bowings.ts';
 import { loadAgainstPartner, loadAgainstPosition } from '../../../core/bowing/curves.ts';
+import { BowingMemory } from '../../../core/bowing/memory.ts';
 import type { Bowing } from '../../../core/bowing/model.ts';
 import { neededStiffness } from '../../../core/bowing/needs.ts';
 import { bayCriticalLoad } from '../../../core/frame/bayCriticalLoad.ts';
 import { bayFrame } from '../../../core/frame/bayFrame.ts';
 import { memberSection } from '../../../core/frame/memberSection.ts';
-import type { Bay, DiagonalSpec, Join } from '../../../core/project/model.ts';
+import { GUSSETED } from '../../../core/project/endFixity.ts';
+import type { Bay, DiagonalSpec, EndFixity, Join } from '../../../core/project/model.ts';
 import { restraintContext } from '../../../core/restraint/restraint.ts';
+import { pushOf } from '../../../core/study/study.ts';
 import { bisected } from '../../published/bisected.ts';
 import { BEAM, bay, COLUMN, project, wall } from '../assess/given/bays.ts';
 import { CATALOGUES, propertiesOf } from '../assess/given/catalogues.ts';
@@ -183,7 +186,14 @@ describe('what holds must be', () => {
         restraint ? [[id, restraint] as const] : [],
       ),
     );
-    const input = { layout, context: restraintContext(layout), restraints, steel, forces: null };
+    const input = {
+      layout,
+      context: restraintContext(layout),
+      restraints,
+      steel,
+      ends: GUSSETED,
+      forces: null,
+    };
     const bar = first && bayBowing(input, first, crossedBay(length, given)).bars.get(RISE);
     if (!bar) throw new Error('no bar');
     return bar;
@@ -236,5 +246,68 @@ describe('what holds must be', () => {
     places.forEach(({ at: here, N }) => {
       expect(N / (places.find((point) => Math.abs(point.at - (1 - here)) < 1e-9)?.N ?? 0)).toBeCloseTo(1, 7);
     });
+  });
+});
+
+describe('how the ends turn', () => {
+  const withEnds = (length: number, endFixity: EndFixity, given: Given = {}): Assessment =>
+    assess(project([crossedBay(length, given)], { endFixity }), CATALOGUES);
+  const STIFF: EndFixity = { inPlane: 'stiff', outOfPlane: 'stiff' };
+
+  it('is as a gusset lets them where the project says nothing', () => {
+    expect(bowingIn(withEnds(5000, GUSSETED))).toEqual(bowing(5000));
+  });
+
+  it('raises the load of a bar that is not joined, to less than four times, when they are stiff out of the plane', () => {
+    // Longer leg in the plane and not joined: pinned, the bar bows about v. Stiff out of the plane alone, it bows in the plane about the axis square to it, or both at once:
+    // the load lies between that of v pinned and that of v with both ends fixed.
+    const none = { join: { kind: 'none' } } as const;
+    const load = bowingIn(withEnds(5000, STIFF, none)).real.N;
+    expect(load).toBeGreaterThan(euler(angle.Iv, 5000) * 1.5);
+    expect(load).toBeLessThan(4 * euler(angle.Iv, 5000));
+  });
+
+  it('never lowers a critical load out of the plane when stiff', () => {
+    // Where twist starts to count, up to a hundredth of the load leaves the figure: TWIST_COUNTS.
+    const TWIST = 0.01;
+    for (const length of [2500, 4000, 7320])
+      for (const section of ['70x70x6', '100x75x8', '150x90x10'])
+        for (const join of ['none', 'bolted', 'welded'] as const)
+          for (const taut of [-0.5, 0, 0.6]) {
+            const given = { section, join: { kind: join }, taut };
+            const hinged = bowingIn(withEnds(length, GUSSETED, given));
+            const stiff = bowingIn(withEnds(length, STIFF, given));
+            expect(stiff.real.N, JSON.stringify({ length, ...given })).toBeGreaterThanOrEqual(
+              hinged.real.N * (1 - TWIST),
+            );
+            stiff.stations.forEach(({ holds }, k) => {
+              holds.forEach(({ offered }, h) => {
+                // Two factorisations of frames with springs of 1e9 N/mm in them: nine figures are left.
+                expect(offered).toBeGreaterThanOrEqual(
+                  (hinged.stations[k]?.holds[h]?.offered ?? 0) * (1 - 1e-6),
+                );
+              });
+            });
+          }
+  });
+
+  it('reaches the push test: an unjoined bar with stiff ends is four times as stiff at its middle out of the plane', () => {
+    // 48EI/L³ between hinges, 192EI/L³ between fixed ends; in the plane the gusset is stiff in both. An equal angle bends about skew axes, so the plain ratio is its upper limit.
+    const push = (ends: EndFixity): number => {
+      const test = pushOf(withEnds(5000, ends, { join: { kind: 'none' } }), RISE, 2500);
+      return test?.ellipse?.soft ?? 0;
+    };
+    const ratio = push(STIFF) / push(GUSSETED);
+    expect(ratio).toBeGreaterThan(1.5);
+    expect(ratio).toBeLessThanOrEqual(4.001);
+  });
+
+  it('is remembered apart: another answer for other ends', () => {
+    const memory = new BowingMemory();
+    const made = (endFixity: EndFixity) =>
+      assess(project([crossedBay(5000)], { endFixity }), CATALOGUES, 'all levels', memory);
+    const first = bowingIn(made(GUSSETED)).real.N;
+    expect(bowingIn(made(STIFF)).real.N).toBeGreaterThan(first);
+    expect(bowingIn(made(GUSSETED)).real.N).toBe(first);
   });
 });

@@ -1,7 +1,7 @@
 /** Bays as frames: what they offer, that they are in equilibrium, symmetric where the bay is, and named where they can move. */
 import { describe, expect, it } from 'vitest';
 import { namedMechanism } from '../../../core/bowing/mechanismNames.ts';
-import { GUSSETED } from '../../../core/frame/bayFrame.ts';
+import { GUSSETED } from '../../../core/project/endFixity.ts';
 import { movementUnder } from '../../../core/frame/push.ts';
 import { pushTest } from '../../../core/frame/pushTest.ts';
 import { dot, type Vec3 } from '../../../core/geometry/vector.ts';
