@@ -1,4 +1,4 @@
-import { type FormEvent, type JSX, useId, useState } from 'react';
+import { type FormEvent, type JSX, useEffect, useId, useRef, useState } from 'react';
 import type { LengthOverride, UnitSystem } from '../../../core/project/model.ts';
 import type { Restraint } from '../../../core/restraint/model.ts';
 import { AXES, type Axis } from '../../../core/section/model.ts';
@@ -22,6 +22,9 @@ export function OverrideForm({ restraint, units, onTake, onDone }: OverrideFormP
   const [factor, setFactor] = useState('1');
   const [reason, setReason] = useState('');
   const [message, setMessage] = useState<string | null>(null);
+  const form = useRef<HTMLFormElement>(null);
+  // It unfolds at the foot of the card, below what is seen of it.
+  useEffect(() => form.current?.scrollIntoView({ block: 'nearest' }), []);
   const found = restraint?.lanes[axis].found ?? null;
 
   const submit = (event: FormEvent): void => {
@@ -33,7 +36,7 @@ export function OverrideForm({ restraint, units, onTake, onDone }: OverrideFormP
   };
 
   return (
-    <form className="override-form" onSubmit={submit} noValidate>
+    <form ref={form} className="override-form" onSubmit={submit} noValidate>
       <SelectField<Axis>
         label="About axis"
         value={axis}

@@ -8,11 +8,16 @@ interface FoldProps {
   readonly children: ReactNode;
 }
 
+/** Once it has unfolded, which may be below what is seen of its panel. */
+function showWhole(fold: HTMLElement | null): void {
+  requestAnimationFrame(() => fold?.scrollIntoView({ block: 'nearest' }));
+}
+
 /** A part of the recipe that is folded away until wanted. */
 export function Fold({ title, aside, open = false, children }: FoldProps): JSX.Element {
   return (
     <details className="fold" open={open}>
-      <summary>
+      <summary onClick={(event) => showWhole(event.currentTarget.parentElement)}>
         <span>{title}</span>
         <span className="fold-aside">{aside}</span>
       </summary>

@@ -48,19 +48,31 @@ const MM_PER_FOOT = 304.8;
 /** Lengths that a scale may show, in metres or feet. */
 const STEPS = [0.1, 0.2, 0.5, 1, 2, 5, 10, 20, 50, 100, 200, 500, 1000];
 
+/** Width that the last figure with its unit may take, px. */
+const LAST_FIGURE = 62;
+
 /**
- * A scale of two parts in the lower left corner. It measures what lies square to the view; where uprights are foreshortened it measures
+ * A scale of two parts in the lower left corner, beside the triad, or above it where the legend leaves no room there. It measures what lies square to the view; where uprights are foreshortened it measures
  * those instead and says so, as they are what one reads off an axonometric.
  */
-export function scaleInk(view: SheetView, units: UnitSystem): readonly Ink[] {
+export function scaleInk(
+  view: SheetView,
+  units: UnitSystem,
+  legend: { readonly width: number; readonly height: number },
+): readonly Ink[] {
   const upright = view.up[2];
   const foreshortened = upright > 0.3 && upright < 0.9998;
   const pxPerUnit = view.pxPerMm * (foreshortened ? upright : 1) * (units === 'us' ? MM_PER_FOOT : 1000);
   const step = STEPS.find((one) => one * pxPerUnit >= 36);
-  if (step === undefined || view.width < 420) return [];
-  const left = 96;
-  const y = view.height - 24;
+  if (step === undefined) return [];
   const part = step * pxPerUnit;
+  const free = view.width - legend.width - 14 - 2 * part - LAST_FIGURE;
+  const place = [
+    { left: 96, y: view.height - 24 },
+    { left: 20, y: view.height - 100 },
+  ].find(({ left }) => left <= free);
+  if (place === undefined) return [];
+  const { left, y } = place;
   const unit = `${units === 'us' ? 'ft' : 'm'}${foreshortened ? ' upright' : ''}`;
   const figure = (parts: number, text: string, key: string): Ink => ({
     kind: 'words',

@@ -138,7 +138,7 @@ export function layOutOverlay(input: OverlayInput): OverlayLayout {
       ...leaders,
       ...(detail?.around ?? []),
       ...triadInk(view),
-      ...scaleInk(view, units),
+      ...scaleInk(view, units, input.legend),
     ],
     places,
     detail,

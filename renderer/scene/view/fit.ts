@@ -1,5 +1,5 @@
 import type { Vec2, Vec3 } from '../../../core/geometry/vector.ts';
-import { add, dot, scale } from '../../../core/geometry/vector.ts';
+import { add, along, dot, scale } from '../../../core/geometry/vector.ts';
 import type { BayLayout, Layout } from '../../../core/layout/model.ts';
 import { type Box, boxAbout, overlap } from './box.ts';
 import type { ViewDirections } from './namedView.ts';
@@ -30,13 +30,25 @@ const CLOSEST = 0.6;
 
 const BARE: Vec2 = [0, 0];
 
-/** The points that a view of a bay must show: all bars with their offsets; of every bay where there is none. */
+/** Shares of a bar's length at which it is looked for under what is taken. */
+const ALONG = [0, 0.125, 0.25, 0.375, 0.5, 0.625, 0.75, 0.875, 1];
+
+/** The points that a view of a bay must show: all bars with their offsets, members with their depth; of every bay where there is none. */
 export function pointsToShow(layout: Layout, bay: BayLayout | null): readonly Vec3[] {
   const bays = bay === null ? layout.bays : [bay];
   return bays.flatMap((one) =>
     one.bars.flatMap((id) => {
       const bar = layout.bars.get(id);
-      return bar ? [add(bar.from, bar.offset), add(bar.to, bar.offset)] : [];
+      if (!bar) return [];
+      const middle = ALONG.map((share) =>
+        add(along(bar.from, bar.direction, share * bar.length), bar.offset),
+      );
+      const half = (bar.member?.depth ?? 0) / 2;
+      // Depths stand upright on what runs level; of a column they are a hair beside it.
+      const isLevel = Math.abs(bar.direction[2]) < 0.7;
+      return half > 0 && isLevel
+        ? middle.flatMap((at) => [add(at, [0, 0, half]), add(at, [0, 0, -half])])
+        : middle;
     }),
   );
 }

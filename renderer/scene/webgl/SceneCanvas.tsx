@@ -17,6 +17,9 @@ import {
   setView,
 } from './materials.ts';
 import { Steel } from './Steel.tsx';
+import { hearThree } from './threeNotices.ts';
+
+hearThree();
 
 export interface SceneCanvasProps {
   readonly merged: MergedSteel;

@@ -141,6 +141,38 @@ describe('the schedule in US units', () => {
   });
 });
 
+describe('the window', () => {
+  it('is no taller than its page, and leads back to the example', async () => {
+    const { page, complaints, close } = await stand.open({ width: 1280, height: 800 });
+    const notices: string[] = [];
+    page.on('console', (message) => {
+      if (message.type() === 'warning') notices.push(message.text());
+    });
+    await choose(page, 'D1');
+    expect(await page.evaluate(() => document.documentElement.scrollHeight)).toBe(800);
+    await command(page, 'File', 'New project');
+    const offers = page.locator('.empty-offer');
+    await offers.first().waitFor();
+    const heights = await offers.evaluateAll((all) => all.map((each) => each.getBoundingClientRect().height));
+    expect(new Set(heights).size).toBe(1);
+    await command(page, 'File', 'Open the example');
+    await row(page, 'D1').waitFor();
+    expect(notices.filter((text) => text.includes('THREE'))).toEqual([]);
+    expect(complaints).toEqual([]);
+    await close();
+  });
+
+  it('shows the whole form for a length by hand as it unfolds', async () => {
+    const { page, close } = await stand.open({ width: 1280, height: 800 });
+    await choose(page, 'D1');
+    await page.getByText('Lengths by hand', { exact: true }).click();
+    await page.getByRole('button', { name: /^Take another length/ }).click();
+    const take = page.getByRole('button', { name: 'Take it', exact: true });
+    await expect.poll(async () => ((await take.boundingBox())?.y ?? 9999) + 20).toBeLessThan(780);
+    await close();
+  });
+});
+
 describe('without WebGL', () => {
   it('the bay is drawn flat, with the same buttons', async () => {
     const { page, close } = await stand.open({

@@ -3,11 +3,12 @@ import { distance, dot } from '../../../core/geometry/vector.ts';
 import { bowedPoint } from '../../../renderer/scene/drawing/bowShape.ts';
 import { scaleInk } from '../../../renderer/scene/drawing/cornerInk.ts';
 import { dimensionInk } from '../../../renderer/scene/drawing/dimensionInk.ts';
+import { lineNamesInk } from '../../../renderer/scene/drawing/lineNamesInk.ts';
 import { crossingPlaces } from '../../../renderer/scene/overlay/crossingPlaces.ts';
 import { growth } from '../../../renderer/scene/overlay/useBowGrowth.ts';
 import { namedView, type ViewName } from '../../../renderer/scene/view/namedView.ts';
 import type { SheetView } from '../../../renderer/scene/view/sheetView.ts';
-import { crossedWall, laidOut } from './given/bays.ts';
+import { crossedWall, laidOut, roof } from './given/bays.ts';
 
 const layout = laidOut(crossedWall());
 const bay = layout.bays[0];
@@ -39,19 +40,47 @@ describe('the dimensions of a bay', () => {
   });
 });
 
+const NO_LEGEND = { width: 0, height: 0 };
+
+describe('the names of purlins', () => {
+  const made = laidOut(roof());
+  const names = (pxPerMm: number) =>
+    lineNamesInk({ ...sheet('elevation'), pxPerMm }, made, made.bays[0] ?? bay).length;
+
+  it('stand at each where there is room, and never on one another', () => {
+    // Five purlins 1500 mm apart up a slope of 8°, seen along it: 209 mm apart in height, 2.1 px at 0.01.
+    expect(names(0.1)).toBe(5);
+    expect(names(0.01)).toBeLessThan(5);
+    expect(names(0.01)).toBeGreaterThan(0);
+  });
+});
+
 describe('the scale', () => {
+  it('keeps out of the legend: above the triad where that reaches its place, and gone where it reaches that too', () => {
+    const leftOf = (width: number) => {
+      const [first] = scaleInk({ ...sheet('elevation'), width: 480 }, 'metric', { width, height: 90 });
+      return first?.kind === 'path' ? Number(/M(-?[\d.]+)/.exec(first.d)?.[1]) : null;
+    };
+    // Two parts of 50 px and the figure's 62 px: from 96 it ends at 258, and the legend's edge is 480 − 14 − its width.
+    expect(leftOf(200)).toBe(96);
+    expect(leftOf(230)).toBe(20);
+    expect(leftOf(300)).toBeNull();
+  });
+
   it('is true to the view: two parts of a metre at 0.1 px a millimetre are 200 px', () => {
-    const filled = scaleInk(sheet('elevation'), 'metric').find((ink) => ink.key === 'scale filled');
+    const filled = scaleInk(sheet('elevation'), 'metric', NO_LEGEND).find(
+      (ink) => ink.key === 'scale filled',
+    );
     // 0.5 m is the first step of at least 36 px: 50 px.
     expect(filled?.kind === 'path' && filled.d).toContain('L146.0');
-    const words = scaleInk(sheet('elevation'), 'metric').flatMap((ink) =>
+    const words = scaleInk(sheet('elevation'), 'metric', NO_LEGEND).flatMap((ink) =>
       ink.kind === 'words' ? [ink.text] : [],
     );
     expect(words).toEqual(['0', '0.5', '1 m']);
   });
 
   it('says that it measures uprights where they are foreshortened', () => {
-    const words = scaleInk(sheet('axonometric'), 'us').flatMap((ink) =>
+    const words = scaleInk(sheet('axonometric'), 'us', NO_LEGEND).flatMap((ink) =>
       ink.kind === 'words' ? [ink.text] : [],
     );
     expect(words.at(-1)).toMatch(/ ft upright$/);

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { cross, dot } from '../../../core/geometry/vector.ts';
+import { along, cross, dot } from '../../../core/geometry/vector.ts';
+import { newKneeBay } from '../../../core/project/newBay.ts';
 import { bare, fitOf, pointsToShow } from '../../../renderer/scene/view/fit.ts';
 import { cameraAngles, namedView, type ViewName } from '../../../renderer/scene/view/namedView.ts';
 import { onSheet } from '../../../renderer/scene/view/sheetView.ts';
@@ -90,6 +91,23 @@ describe('fitting a bay to the sheet', () => {
     const found = fitOf(bare(points), view, sheet, margins, [taken]);
     if (!found) throw new Error('nothing to fit');
     for (const point of points) expect(onSheet({ ...view, ...found, ...sheet }, point)[1]).toBeLessThan(420);
+  });
+
+  it('keeps a long bar out of a corner that only its middle would cross, with its depth', () => {
+    const knees = laidOut(newKneeBay('K1', 'knees'));
+    const made = knees.bays[0] ?? null;
+    const view = namedView('axonometric', made);
+    const taken = { left: 400, top: 400, width: 300, height: 100 };
+    const found = fitOf(bare(pointsToShow(knees, made)), view, sheet, margins, [taken]);
+    if (!found) throw new Error('nothing to fit');
+    for (const bar of knees.bars.values())
+      for (let share = 0; share <= 1; share += 0.01) {
+        const [x, y] = onSheet(
+          { ...view, ...found, ...sheet },
+          along(bar.from, bar.direction, share * bar.length),
+        );
+        expect(x > taken.left && y > taken.top).toBe(false);
+      }
   });
 
   it('says so when there is nothing to fit', () => {
