@@ -5,6 +5,8 @@ import type { Edit } from '../project/edit.ts';
 import type { BarMark, EndConnection } from '../project/model.ts';
 import { usualGrades } from '../resistance/grades.ts';
 import { endsHoldOf, endsMarkedFree } from '../restraint/endWords.ts';
+import { showLength } from '../units/quantity.ts';
+import { MM_PER_INCH } from '../units/unitSystem.ts';
 import { barsOf } from './places.ts';
 import type { Proposal } from './proposal.ts';
 
@@ -14,11 +16,19 @@ export function strongerEnds(assessment: Assessment, finding: Finding): readonly
   const end = first?.angle?.ends.i;
   if (!end) return [];
   if (end.kind === 'welded') {
-    const weldLength = Math.ceil((end.weldLength * 1.5) / 10) * 10;
+    const { units } = assessment.project.settings;
+    const step = units === 'us' ? MM_PER_INCH / 2 : 10;
+    const weldLength = Math.ceil((end.weldLength * 1.5) / step) * step;
     return [
-      endProposal(assessment, finding, `Weld ${weldLength} mm at each end`, 'half as much again', {
-        weldLength,
-      }),
+      endProposal(
+        assessment,
+        finding,
+        `Weld ${showLength(weldLength, units)} at each end`,
+        'half as much again',
+        {
+          weldLength,
+        },
+      ),
     ];
   }
   return [1, 2].map((more) =>

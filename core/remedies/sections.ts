@@ -4,6 +4,7 @@ import type { Catalogues } from '../catalogue/model.ts';
 import type { Finding } from '../findings/model.ts';
 import type { BarId } from '../layout/model.ts';
 import { shortlist } from '../shortlist/shortlist.ts';
+import { showMassPerMetre } from '../units/quantity.ts';
 import { barsOf } from './places.ts';
 import type { Proposal } from './proposal.ts';
 
@@ -36,7 +37,7 @@ export function otherSections(
       each.kind === 'equal'
         ? `Change to ${shown(each.designation)}`
         : `Change to ${shown(each.designation)}, longer leg ${each.legInPlane === 'longer' ? 'in plane' : 'out'}`,
-    detail: `${signed(each.massPerMetre - present)} kg/m, ${each === lightest ? 'the lightest that passes' : 'the lightest equal angle that passes'}`,
+    detail: `${massChange(assessment, each.massPerMetre - present)}, ${each === lightest ? 'the lightest that passes' : 'the lightest equal angle that passes'}`,
     edits: [
       {
         kind: 'bars',
@@ -109,7 +110,7 @@ function sectionProposal(
 ): Proposal {
   return {
     label: `Change to ${shown(designation)}`,
-    detail: `${signed(massPerMetre - presentMass(assessment, bars))} kg/m, ${what}`,
+    detail: `${massChange(assessment, massPerMetre - presentMass(assessment, bars))}, ${what}`,
     edits: [{ kind: 'bars', bars, change: { section: designation } }],
   };
 }
@@ -121,6 +122,9 @@ function presentMass(assessment: Assessment, bars: readonly BarId[]): number {
   );
 }
 
-const signed = (value: number): string => `${value < 0 ? '−' : '+'}${Math.abs(value).toFixed(1)}`;
+/** "+2.1 kg/m", "−0.75 lb/ft": heavier or lighter for each length of bar, in the units of the project. */
+function massChange({ project }: Assessment, kgPerMetre: number): string {
+  return `${kgPerMetre < 0 ? '−' : '+'}${showMassPerMetre(Math.abs(kgPerMetre), project.settings.units)}`;
+}
 
 const shown = (designation: string): string => designation.replaceAll(/(?<=\d)x(?=\d)/gi, '×');

@@ -213,6 +213,21 @@ describe('too slender in service', () => {
     }
   });
 
+  it('is answered in the units of the project', () => {
+    const said = (units: Settings['units']) =>
+      trial(crossed({ kind: 'packed', packer: null }), 'too slender in service', { units }).remedies.map(
+        ({ label, detail }) => ({ label, detail }),
+      );
+    const [metric, us] = [said('metric'), said('us')];
+    expect(us.map(({ label }) => label)).toEqual(metric.map(({ label }) => label));
+    metric.forEach(({ detail }, index) => {
+      const kg = Number(/^\+([\d.]+) kg\/m,/.exec(detail)?.[1]);
+      const lb = Number(/^\+([\d.]+) lb\/ft,/.exec(us[index]?.detail ?? '')?.[1]);
+      // 1 lb/ft is 0.45359237/0.3048 kg/m (both by definition). Tolerance: half the last figure shown of each, below 10 to hundredths.
+      expect(Math.abs((lb * 0.45359237) / 0.3048 - kg)).toBeLessThan(0.05 + 0.05 * 1.5);
+    });
+  });
+
   it('is not said to be answered when a bar of the same finding stays over', () => {
     // Two pairs as long as each other; joined, the first is halved and passes, the second is joined far from its middle and does not.
     const made = trial(
