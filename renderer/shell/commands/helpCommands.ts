@@ -6,7 +6,16 @@ export const helpCommands: readonly Command[] = [
     menu: 'Help',
     group: 1,
     label: () => 'Keyboard',
+    shortcut: { key: 'F1' },
+    run: ({ actions }) => actions.openDialog({ kind: 'keyboard' }),
+  },
+  {
+    id: 'keyboard by sign',
+    menu: 'Help',
+    group: 1,
+    label: () => 'Keyboard',
     shortcut: { key: '?' },
+    hidden: true,
     run: ({ actions }) => actions.openDialog({ kind: 'keyboard' }),
   },
   {
