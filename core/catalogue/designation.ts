@@ -18,8 +18,9 @@ export function designationKey(text: string): string {
 }
 
 /**
- * Sizes from a designation as people type it: "70x70x6", "L70×70×6", "RSA 70 X 70 X 6", "70x6" (equal legs), "90*90*8EA", "L3x3x1/4",
- * "3 x 3 x 0.25", "6 x 3 1/2 x 5/16". Legs in either order. Null when it does not read as an angle.
+ * Sizes from a designation as people type it: "70x70x6", "L70×70×6", "RSA 70 X 70 X 6", "EQ 70x70x6", "70x6" (equal legs), "70 70 6", "70,70,6",
+ * "90*90*8EA", "L3x3x1/4", "3 x 3 x 0.25", "6 x 3 1/2 x 5/16", "L3½x3x¼", "L31/2X3X1/4". Legs in either order. Null when it does not read as an
+ * angle.
  */
 export function designatedSizes(text: string): DesignatedSizes | null {
   const [first, second, third, ...more] = numbersIn(text) ?? [];
@@ -48,26 +49,54 @@ function scaleOf(longLeg: number): { readonly inches: boolean; readonly mm: numb
 
 /** The numbers between the multiplication signs, in order, without the letters before and after; null when some part is no number above zero. */
 function numbersIn(text: string): readonly number[] | null {
-  const body = text
+  const body = withPlainFractions(text)
     .toUpperCase()
     .replace(/[×*]/g, 'X')
     .replace(/[−–—]/g, '-')
     .replace(/MM|IN\b|["″”]/g, ' ')
     .trim()
-    .replace(/^(?:RSA|EA|UA|LL?|∟|∠)[\s:]*/, '')
+    .replace(/^(?:RSA|EQ(?:UAL)?|UNEQ(?:UAL)?|EA|UA|LL?|∟|∠)[\s:]*/, '')
     .replace(/\s*(?:EA|UA|L)$/, '')
     .trim();
-  const sizes = body.split(/\s*X\s*/).map(sizeOf);
+  const sizes = partsOf(body).map(sizeOf);
   const numbers = sizes.filter((size): size is number => size !== null && size > 0);
   return numbers.length === sizes.length ? numbers : null;
 }
 
-/** "6", "4.5", "4,5", "1/4", "3-1/2", "3 1/2". */
+/** Between multiplication signs; of three sizes without any, between spaces, commas or semicolons. */
+function partsOf(body: string): readonly string[] {
+  if (!body.includes('X')) {
+    const listed = body.split(/\s*[,;]\s*|\s+/);
+    if (listed.length === 3) return listed;
+  }
+  return body.split(/\s*X\s*/);
+}
+
+/** "3½" as "3 1/2". */
+function withPlainFractions(text: string): string {
+  return text.replace(/[¼½¾⅐-⅞]/g, (sign) => ` ${sign.normalize('NFKC').replace('⁄', '/')}`);
+}
+
+/** "6", "4.5", "4,5", "1/4", "3-1/2", "3 1/2", "31/2". */
 function sizeOf(text: string): number | null {
-  const fraction = /^(?:(\d+)[\s-]+)?(\d+)\s*\/\s*(\d+)$/.exec(text);
+  const fraction = closedUp(text) ?? /^(?:(\d+)[\s-]+)?(\d+)\s*\/\s*(\d+)$/.exec(text);
   if (fraction) {
     const value = Number(fraction[1] ?? 0) + Number(fraction[2]) / Number(fraction[3]);
     return Number.isFinite(value) ? value : null;
   }
   return /^(?:\d+(?:[.,]\d*)?|[.,]\d+)$/.test(text) ? Number(text.replace(',', '.')) : null;
+}
+
+/**
+ * The whole, top and bottom of a number whose space was lost, "31/2" for 3 1/2 and "511/16" for 5 11/16: no size is written with more in the
+ * top than in the bottom. Of several ways to part it the one with the least whole. Null where it is no such number.
+ */
+function closedUp(text: string): readonly [string, string, string, string] | null {
+  const [, digits = '', bottom = ''] = /^(\d+)\/(\d+)$/.exec(text) ?? [];
+  if (Number(digits) < Number(bottom)) return null;
+  for (let cut = 1; cut < digits.length; cut++) {
+    const top = digits.slice(cut);
+    if (Number(top) > 0 && Number(top) < Number(bottom)) return [text, digits.slice(0, cut), top, bottom];
+  }
+  return null;
 }
