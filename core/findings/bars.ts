@@ -41,7 +41,7 @@ function unknownSection(subject: FindingSubject, group: readonly Judged[]): Find
     severity: 'must fix',
     bay: first.bar.bay,
     bars: group.map(({ bar }) => bar.id),
-    title: `${section} is in no stock list`,
+    title: `${section.trim() === '' ? 'A section without a name' : section} is in no stock list`,
     detail: `${marksInWords(group)} cannot be assessed.${near.length > 0 ? ` Nearest: ${near.join(', ')}.` : ''} Choose one that is in stock, or add it to the own stock list.`,
     path: first.angle.mark.section ? `${path}.bars.${first.bar.key}.section` : `${path}.diagonals.section`,
   };

@@ -105,6 +105,13 @@ function packerFit(
 
 function unmarkedLinesFinding(subject: FindingSubject, bay: string, crossings: readonly Crossing[]): Finding {
   const many = crossings.length > 1;
+  const lines = crossings.filter(({ kind }) => kind === 'line').length;
+  const passed =
+    lines === crossings.length
+      ? { title: 'purlins or rails', one: 'one purlin or rail', more: 'purlins or rails' }
+      : lines === 0
+        ? { title: 'struts or other members', one: 'one member', more: 'struts or other members' }
+        : { title: 'purlins, rails and members', one: '', more: 'purlins, rails and members' };
   return {
     id: `unmarked-lines:${bay}`,
     kind: 'crossing unmarked',
@@ -113,8 +120,8 @@ function unmarkedLinesFinding(subject: FindingSubject, bay: string, crossings: r
     bay,
     bars: [...new Set(crossings.map((crossing) => crossing.a))],
     crossing: crossings[0]?.id ?? null,
-    title: `${crossings.length} ${many ? 'crossings' : 'crossing'} with purlins or rails ${many ? 'are' : 'is'} unmarked`,
-    detail: `In ${bay} the diagonals pass ${crossings.length === 1 ? 'one purlin, rail or member' : 'purlins, rails or members'} without a mark; nothing is taken from them.`,
+    title: `${crossings.length} ${many ? 'crossings' : 'crossing'} with ${passed.title} ${many ? 'are' : 'is'} unmarked`,
+    detail: `In ${bay} the diagonals pass ${many ? passed.more : passed.one} without a mark; nothing is taken from them.`,
     value: crossings.length,
     limit: null,
     quantity: 'none',

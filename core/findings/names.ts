@@ -7,11 +7,14 @@ import { bayPath, type FindingSubject } from './subject.ts';
 interface Idle {
   readonly path: string;
   readonly what: string;
+  /** Whether another figure is taken in its place, so that it is more than a note. */
+  readonly changesFigures?: boolean;
 }
 
 /**
  * Entries that name what is not there: marks of bars and crossings left from another pattern, lines held by a bay that is gone or by their
- * own, a bar to be cut that does not cross, a class of member that the practice does not have. One note a bay.
+ * own, a bar to be cut that does not cross, a class of member that the practice does not have. One finding a bay: a note, but for the class,
+ * which decides the limits of all.
  */
 export function nameFindings(subject: FindingSubject): readonly Finding[] {
   return subject.layout.bays.flatMap((layout, index) => {
@@ -32,7 +35,7 @@ function finding(bay: string, idle: readonly Idle[]): Finding {
   return {
     id: `idle-names:${bay}`,
     kind: 'names what is not there',
-    severity: 'note',
+    severity: idle.some(({ changesFigures = false }) => changesFigures) ? 'look into' : 'note',
     breaksLimit: false,
     bay,
     bars: [],
@@ -58,6 +61,7 @@ function unknownClass({ project, practice }: FindingSubject): readonly Idle[] {
         {
           path: 'settings.memberClass',
           what: `${practice.name} has no class of member “${memberClass}”, and its first is taken`,
+          changesFigures: true,
         },
       ];
 }

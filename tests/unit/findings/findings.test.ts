@@ -119,6 +119,18 @@ describe('a crossing that is unmarked', () => {
     });
   });
 
+  it('names a strut as a member, not as a purlin or rail', () => {
+    const passed = (role: 'strut' | 'diagonal') =>
+      free({ n1: [0, 0, 0], n2: [4000, 0, 4000], n3: [0, 0, 2000], n4: [4000, 0, 2000] }, [
+        ['b1', 'n1', 'n2'],
+        ['b2', 'n3', 'n4', role],
+      ]);
+    expect(one(bay(passed('strut')), 'crossing unmarked').title).toBe(
+      '1 crossing with struts or other members is unmarked',
+    );
+    expect(one(bay(passed('diagonal')), 'crossing unmarked').title).toBe('D1 × D2 is unmarked');
+  });
+
   it.each<Join>([{ kind: 'none' }, { kind: 'bolted' }, { kind: 'welded' }])(
     'is not found when marked $kind',
     (join) => {
@@ -224,8 +236,11 @@ describe('entries of the file that name what is not there', () => {
     expect(finding.detail).toMatch(/take it out, or correct the name\.$/);
   });
 
-  it('are noted for a class of member that the practice does not have', () => {
-    expect(one(crossed(), KIND, { memberClass: 'no such' }).path).toBe('settings.memberClass');
+  it('are to be looked into for a class of member that the practice does not have', () => {
+    expect(one(crossed(), KIND, { memberClass: 'no such' })).toMatchObject({
+      severity: 'look into',
+      path: 'settings.memberClass',
+    });
   });
 
   it('are told together for one bay, and not where all is there', () => {
