@@ -89,13 +89,13 @@ function problemOf(issue: z.core.$ZodIssue, data: unknown): ProjectProblem {
       return {
         path,
         what: `${shown(value)} is too small.`,
-        todo: `Give at least ${issue.minimum}${unitOf(issue.origin)}.`,
+        todo: `Give at least ${counted(Number(issue.minimum), issue.origin)}.`,
       };
     case 'too_big':
       return {
         path,
         what: `${shown(value)} is too large.`,
-        todo: `Give at most ${issue.maximum}${unitOf(issue.origin)}.`,
+        todo: `Give at most ${counted(Number(issue.maximum), issue.origin)}.`,
       };
     case 'invalid_value':
       return {
@@ -127,8 +127,12 @@ function problemOf(issue: z.core.$ZodIssue, data: unknown): ProjectProblem {
   }
 }
 
-const unitOf = (origin: string): string =>
-  origin === 'array' ? ' entries' : origin === 'string' ? ' characters' : '';
+/** "1 entry", "60 characters", "6000". */
+function counted(value: number, origin: string): string {
+  const one = value === 1;
+  if (origin === 'array') return `${value} ${one ? 'entry' : 'entries'}`;
+  return origin === 'string' ? `${value} ${one ? 'character' : 'characters'}` : String(value);
+}
 
 function article(expected: string): string {
   switch (expected) {

@@ -1,4 +1,5 @@
-import type { Bay, FreeRecipe, Project, RoofRecipe, WallRecipe } from './model.ts';
+import type { Vec3 } from '../geometry/vector.ts';
+import type { Bay, FreeBar, FreeNode, FreeRecipe, Project, RoofRecipe, WallRecipe } from './model.ts';
 import type { ProjectProblem } from './problem.ts';
 
 /** What a schema cannot say: names that must differ, ends that must exist, heights that must fit. */
@@ -105,7 +106,38 @@ function freeProblems(recipe: FreeRecipe, path: string): ProjectProblem[] {
       what: 'The normal has no direction.',
       todo: 'Give a vector that is not zero, or null.',
     });
+  else if (recipe.normal) problems.push(...alongTheNormal(recipe, recipe.normal, nodes, path));
   return problems;
+}
+
+/** A diagonal within this of its plane's normal has no plane to lie in: the sine of half a degree. */
+const ALONG = 0.0087;
+
+/** A bar of angle along the normal has no "in plane" of its own. One among others may stand so; where all do, there is no plane. */
+function alongTheNormal(
+  recipe: FreeRecipe,
+  [x, y, z]: Vec3,
+  nodes: ReadonlyMap<string, FreeNode>,
+  path: string,
+): ProjectProblem[] {
+  const angles = recipe.bars.filter(({ role }) => role === 'diagonal' || role === 'knee' || role === 'tie');
+  const isAlong = ({ from, to }: FreeBar): boolean => {
+    const [a, b] = [nodes.get(from)?.at, nodes.get(to)?.at];
+    if (!a || !b) return false;
+    const [u, v, w] = [b[0] - a[0], b[1] - a[1], b[2] - a[2]];
+    const across = Math.hypot(v * z - w * y, w * x - u * z, u * y - v * x);
+    return across <= ALONG * Math.hypot(u, v, w) * Math.hypot(x, y, z);
+  };
+  const [first] = angles;
+  return first !== undefined && angles.every(isAlong)
+    ? [
+        {
+          path: `${path}.normal`,
+          what: `The normal lies along bar ${first.id}, so that no plane holds the bar.`,
+          todo: 'Give the direction square to the plane of the bars, or null to have it found.',
+        },
+      ]
+    : [];
 }
 
 type Named = { readonly id: string };

@@ -53,7 +53,7 @@ export function troubleText(trouble: Trouble): string {
     case 'would overwrite':
       return `${trouble.file}: is there already. Choose another name, or give --force to replace it; nothing was changed.`;
     case 'no such section':
-      return `${trouble.typed}: in no stock list. ${nearestText(trouble.nearest)}`;
+      return `${trouble.typed.trim() === '' ? '“”' : trouble.typed}: in no stock list. ${nearestText(trouble.nearest)}`;
     case 'section in another list':
       return `${trouble.typed}: not in the list asked for (${trouble.list}), but in ${trouble.other}. Leave --catalogue out, or give --catalogue ${trouble.other}.`;
     case 'bad value':

@@ -1,7 +1,7 @@
 /** Projects of every kind of bay, as a user might draw them and as nobody would; all of them pass the gate of the file format. */
 import fc from 'fast-check';
 import type { OwnAngle } from '../../../core/catalogue/model.ts';
-import type { Vec3 } from '../../../core/geometry/vector.ts';
+import { cross, length, subtract, type Vec3 } from '../../../core/geometry/vector.ts';
 import { layOut } from '../../../core/layout/layOut.ts';
 import type {
   BarMark,
@@ -161,13 +161,22 @@ const free: fc.Arbitrary<FreeRecipe> = fc
   .map(({ places, supports, ends, member: shape, normal }): FreeRecipe => {
     const at = (id: string): Vec3 => places[NODE_IDS.indexOf(id as (typeof NODE_IDS)[number])] ?? [0, 0, 0];
     const apart = (a: Vec3, b: Vec3) => Math.hypot(a[0] - b[0], a[1] - b[1], a[2] - b[2]);
+    const bars = ends
+      .filter(([from, to]) => apart(at(from), at(to)) >= 10)
+      .map(([from, to, role], k) => ({ id: BAR_IDS[k] ?? 'b9', from, to, role, member: shape }));
     return {
       kind: 'free',
       nodes: NODE_IDS.map((id, k) => ({ id, at: at(id), support: supports[k] ?? false })),
-      bars: ends
-        .filter(([from, to]) => apart(at(from), at(to)) >= 10)
-        .map(([from, to, role], k) => ({ id: BAR_IDS[k] ?? 'b9', from, to, role, member: shape })),
-      normal,
+      bars,
+      // A file whose diagonals all lie along their normal is refused.
+      normal: bars.some(
+        ({ from, to, role }) =>
+          normal &&
+          (role === 'diagonal' || role === 'knee' || role === 'tie') &&
+          length(cross(normal, subtract(at(to), at(from)))) > 100,
+      )
+        ? normal
+        : null,
     };
   });
 

@@ -256,6 +256,31 @@ describe('names and places that do not fit together', () => {
     expect(readProject(one(10, 'n2')).ok).toBe(true);
   });
 
+  it('refuses a normal that lies along a diagonal, however long, and takes one across it', () => {
+    const along = (normal: readonly [number, number, number], role: 'diagonal' | 'strut' = 'diagonal') =>
+      writeProject(
+        project([bay(free({ n1: [0, 0, 0], n2: [4000, 0, 3000] }, [['b1', 'n1', 'n2', role]], { normal }))]),
+      );
+    for (const normal of [
+      [4, 0, 3],
+      [-4000, 0, -3000],
+    ] as const) {
+      const problem = first(along(normal));
+      expect(problem.path).toBe('bays[0].recipe.normal');
+      expect(problem.what).toContain('b1');
+    }
+    expect(readProject(along([0, -1, 0])).ok).toBe(true);
+    expect(readProject(along([4, 0, 3], 'strut')).ok).toBe(true);
+  });
+
+  it('counts in good grammar what is to be given', () => {
+    expect(first(spoilt(fileOf(), 'bays.0.recipe.tiers', [])).todo).toBe('Give at least 1 entry.');
+    expect(first(spoilt(fileOf(), 'bays.0.diagonals.section', '')).todo).toBe('Give at least 1 character.');
+    expect(first(spoilt(fileOf(), 'bays.0.diagonals.section', 'x'.repeat(61))).todo).toBe(
+      'Give at most 60 characters.',
+    );
+  });
+
   it('refuses a normal without direction', () => {
     const recipe = free({ n1: [0, 0, 0], n2: [4000, 0, 0] }, [['b1', 'n1', 'n2']], { normal: [0, 0, 0] });
     expect(first(writeProject(project([bay(recipe)]))).path).toBe('bays[0].recipe.normal');
