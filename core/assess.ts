@@ -1,10 +1,9 @@
+import { isExempt, type Prepared, prepared } from './assess/prepared.ts';
 import type { Assessment, BaySummary, DiagonalAssessment } from './assessment.ts';
 import { bayBowings } from './bowing/bowings.ts';
-import { type InServiceReading, inServiceSlenderness } from './bowing/exactSlenderness.ts';
 import { type BowingMemory, circumstances } from './bowing/memory.ts';
 import type { NamedMechanism } from './bowing/model.ts';
 import type { Catalogues } from './catalogue/model.ts';
-import { stockOf } from './catalogue/stock.ts';
 import { barChecks } from './checks/barChecks.ts';
 import type { CheckInput } from './checks/input.ts';
 import { governingSentence } from './documents/governingSentence.ts';
@@ -13,21 +12,9 @@ import { findingsOf } from './findings/findings.ts';
 import type { Finding, Severity } from './findings/model.ts';
 import type { Judged } from './findings/subject.ts';
 import { turningSentence } from './findings/turning.ts';
-import { forcesOf } from './forces/forces.ts';
-import type { Forces } from './forces/model.ts';
-import { layOut } from './layout/layOut.ts';
-import type { AngleBar, Bar, BarId, BayLayout, Layout } from './layout/model.ts';
-import { limitInForce } from './practice/limit.ts';
-import type { Practice, Verdict } from './practice/model.ts';
-import { practiceFor } from './practice/practices.ts';
-import { endFixityOf } from './project/endFixity.ts';
+import type { BarId, BayLayout, Layout } from './layout/model.ts';
+import type { Practice } from './practice/model.ts';
 import type { Pattern, Project } from './project/model.ts';
-import {
-  type RestraintContext,
-  restraintContext,
-  restraintOf,
-  turningWaysOf,
-} from './restraint/restraint.ts';
 
 /** By the marks alone, or with stiffness and critical loads beside them. */
 export type AssessmentDepth = 'by the marks' | 'all levels';
@@ -45,15 +32,19 @@ export function assess(
   depth: AssessmentDepth = 'all levels',
   memory: BowingMemory | null = null,
 ): Assessment {
-  const practice = practiceFor(project.settings.practice);
-  const stock = stockOf(project.settings.catalogue, project.ownStock, catalogues);
-  const layout = layOut(project, stock);
-  const context = restraintContext(layout);
-  const forces = project.actions ? forcesOf(project.actions, layout, practice) : null;
-  const byMarks = judgedDiagonals(project, practice, layout, context);
+  return assessmentOf(prepared(project, catalogues), depth, memory);
+}
+
+/** The rest of that road, from what has been prepared on. */
+export function assessmentOf(
+  prepared: Prepared,
+  depth: AssessmentDepth = 'all levels',
+  memory: BowingMemory | null = null,
+): Assessment {
+  const { project, practice, layout, forces, byMarks } = prepared;
   const { judged, movable } =
     depth === 'all levels'
-      ? withBowing(project, practice, layout, context, byMarks, forces, memory)
+      ? withBowing(prepared, memory)
       : { judged: byMarks, movable: new Map<string, readonly NamedMechanism[]>() };
   const checked = withChecks({ project, practice, forces }, judged, depth);
   const findings = findingsOf({ project, practice, layout, diagonals: checked, forces, movable });
@@ -79,21 +70,6 @@ export function assess(
   };
 }
 
-function judgedDiagonals(
-  project: Project,
-  practice: Practice,
-  layout: Layout,
-  context: RestraintContext,
-): ReadonlyMap<BarId, Judged> {
-  const judged = new Map<BarId, Judged>();
-  for (const bay of layout.bays)
-    for (const id of bay.diagonals) {
-      const bar = layout.bars.get(id);
-      if (bar) addJudged(judged, bar, project, practice, context);
-    }
-  return judged;
-}
-
 /** Resistances, where all levels are asked for: compression rests on the critical loads. */
 function withChecks(
   input: CheckInput,
@@ -106,35 +82,19 @@ function withChecks(
 
 /** Levels 2 and 3, bay by bay. */
 function withBowing(
-  project: Project,
-  practice: Practice,
-  layout: Layout,
-  context: RestraintContext,
-  byMarks: ReadonlyMap<BarId, Judged>,
-  forces: Forces | null,
+  { project, layout, byMarks, bowingInput }: Prepared,
   memory: BowingMemory | null,
 ): {
   readonly judged: ReadonlyMap<BarId, Judged>;
   readonly movable: ReadonlyMap<string, readonly NamedMechanism[]>;
 } {
-  const restraints = new Map(
-    [...byMarks].flatMap(([id, { restraint }]) => (restraint ? [[id, restraint] as const] : [])),
-  );
-  const input = {
-    layout,
-    context,
-    restraints,
-    steel: practice.steel,
-    ends: endFixityOf(project.settings),
-    forces,
-  };
   const judged = new Map(byMarks);
   const movable = new Map<string, readonly NamedMechanism[]>();
   layout.bays.forEach((bay, index) => {
     const source = project.bays[index];
     if (!source) return;
-    const find = () => bayBowings(input, bay, source);
-    const found = memory ? memory.recall(circumstances(input, bay, source, project), find) : find();
+    const find = () => bayBowings(bowingInput, bay, source);
+    const found = memory ? memory.recall(circumstances(bowingInput, bay, source, project), find) : find();
     if (found.movable.length > 0) movable.set(bay.id, found.movable);
     for (const [id, bowing] of found.bowings) {
       const known = judged.get(id);
@@ -143,47 +103,6 @@ function withBowing(
   });
   memory?.turn();
   return { judged, movable };
-}
-
-function addJudged(
-  judged: Map<BarId, Judged>,
-  bar: Bar,
-  project: Project,
-  practice: Practice,
-  context: RestraintContext,
-): void {
-  const { angle } = bar;
-  if (!angle) return;
-  const limit = limitInForce(practice, project.settings, angle.spec.countedOn);
-  const steel = angle.cut.total > 0;
-  const { lengthBasis } = project.settings;
-  const restraint = steel ? restraintOf(context, bar, lengthBasis) : null;
-  const turns = steel && !restraint ? turningWaysOf(context, bar, lengthBasis) : null;
-  const verdict = (asks: Practice['asks'], reading: InServiceReading): Verdict => ({
-    ...reading,
-    limit: limit.limit,
-    ok: reading.slenderness <= limit.limit,
-    asked: practice.asks === asks && !isExempt(practice, angle),
-  });
-  const piece = angle.cut.pieces.reduce((most, each) => Math.max(most, each.to - each.from), 0);
-  const least = angle.stock?.properties.rv ?? null;
-  judged.set(bar.id, {
-    bar,
-    angle,
-    restraint,
-    turns,
-    limit,
-    handling:
-      (restraint || turns) && least
-        ? verdict('handling', { slenderness: piece / least, length: piece, radius: least, bound: null })
-        : null,
-    inService:
-      restraint && angle.stock
-        ? verdict('inService', inServiceSlenderness(angle.stock.properties, restraint))
-        : null,
-    bowing: null,
-    checks: null,
-  });
 }
 
 function assessed(
@@ -232,12 +151,6 @@ function assessed(
           : `${judged.angle.spec.section} is in no stock list, so ${bar.mark} is not assessed.`,
     findings,
   };
-}
-
-/** The standard's limit does not speak of such a shape, as AISC 360 leaves rods out. */
-function isExempt({ exempt }: Practice, { stock, spec }: AngleBar): boolean {
-  const kind = stock?.outline.shape?.kind;
-  return kind !== undefined && spec.countedOn === 'tension' && exempt.includes(kind);
 }
 
 function idsByBar(findings: readonly Finding[]): ReadonlyMap<BarId, readonly string[]> {

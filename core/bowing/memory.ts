@@ -17,6 +17,15 @@ export class BowingMemory {
     return found;
   }
 
+  knows(key: string): boolean {
+    return this.#kept.has(key);
+  }
+
+  /** Keeps what was found elsewhere under the same circumstances. */
+  remember(key: string, found: BayBowings): void {
+    this.#kept.set(key, found);
+  }
+
   /** Called once an assessment is done. */
   turn(): void {
     this.#kept = this.#used;
