@@ -8,6 +8,7 @@ import { markFindings } from './marks.ts';
 import type { Finding, Severity } from './model.ts';
 import { nameFindings } from './names.ts';
 import { patternFindings } from './patterns.ts';
+import { sharingFindings } from './sharing.ts';
 import { slendernessFindings } from './slenderness.ts';
 import type { FindingInput, FindingSubject } from './subject.ts';
 import { turningFindings } from './turning.ts';
@@ -26,6 +27,7 @@ export function findingsOf(input: FindingInput): readonly Finding[] {
     ...turningFindings(subject),
     ...slendernessFindings(subject),
     ...crossingFindings(subject),
+    ...sharingFindings(subject),
     ...holderFindings(subject),
     ...patternFindings(subject),
     ...bowingFindings(subject),

@@ -103,14 +103,17 @@ export function passEachOther(assessment: Assessment, finding: Finding): readonl
   const crossing = finding.crossing ? assessment.layout.crossings.get(finding.crossing) : undefined;
   const bars = barsOf(assessment, finding.bars);
   const [a, b] = bars;
-  if (!crossing || !a?.angle || !b) return [];
+  if (!a?.angle || !b) return [];
   const other = a.angle.side === 'near' ? 'far' : 'near';
+  const otherSide: Proposal = {
+    label: `Put ${a.mark} on the ${other} side`,
+    detail: 'back to back on the gusset',
+    edits: [{ kind: 'bars', bars: [a.id], change: { side: other } }],
+  };
+  // Of bars that lie along each other there is nothing to cut; of bays in one place nothing to put on the other side.
+  if (!crossing) return a.bay === b.bay ? [otherSide] : [];
   return [
-    {
-      label: `Put ${a.mark} on the ${other} side`,
-      detail: 'back to back on the gusset',
-      edits: [{ kind: 'bars', bars: [a.id], change: { side: other } }],
-    },
+    otherSide,
     {
       label: `Cut ${b.mark} and plate it`,
       detail: `${a.mark} runs through`,

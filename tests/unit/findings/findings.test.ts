@@ -275,6 +275,31 @@ describe('a mark given twice', () => {
   });
 });
 
+describe('a clash of bars along each other', () => {
+  const doubled = (arrangement: 'same side' | 'opposite') =>
+    bay(
+      free({ n1: [0, 0, 0], n2: [4000, 0, 3000] }, [
+        ['b1', 'n1', 'n2'],
+        ['b2', 'n1', 'n2'],
+      ]),
+      { diagonals: { arrangement } },
+    );
+
+  it('is found between the same nodes on one side of the gusset, and not on both', () => {
+    expect(one(doubled('same side'), 'clash')).toMatchObject({
+      severity: 'must fix',
+      bars: ['B/b1', 'B/b2'],
+      title: 'D1 and D2 lie in one place',
+    });
+    expect(found(doubled('opposite'), 'clash')).toEqual([]);
+  });
+
+  it('is found once for two bays in one place', () => {
+    const bays = ['B', 'C'].map((id) => bay(wall(6000, [[4000, 'crossed']]), { id }));
+    expect(one(bays, 'clash')).toMatchObject({ title: 'B and C stand in one place', path: 'bays[1].place' });
+  });
+});
+
 describe('a packer that differs', () => {
   const kinds = (join: Join, gusset = 10) =>
     found(crossed(join, { diagonals: { gusset } }), 'packer differs');

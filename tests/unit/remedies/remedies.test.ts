@@ -291,6 +291,20 @@ describe('other findings', () => {
     expectTrue(made);
   });
 
+  it('a clash of bars along each other is answered by passing on the other side', () => {
+    const made = bay(
+      free({ n1: [0, 0, 0], n2: [4000, 0, 3000] }, [
+        ['b1', 'n1', 'n2'],
+        ['b2', 'n1', 'n2'],
+      ]),
+      { diagonals: { arrangement: 'same side' } },
+    );
+    const { remedies } = trial(made, 'clash');
+    expect(remedies.map(({ label, effect }) => [label, effect.answers])).toEqual([
+      ['Put D1 on the far side', true],
+    ]);
+  });
+
   it('a peaked tier is answered by crossing it, or by counting both bars on in compression', () => {
     const made = trial(bay(wall(6000, [[4000, 'peaked']])), 'beam takes the pull');
     expect(made.remedies).toHaveLength(2);
