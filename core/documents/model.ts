@@ -40,9 +40,9 @@ export interface ScheduleRow {
     readonly slenderness: number;
     readonly basis: 'span' | 'exact' | 'override';
   } | null;
-  readonly limit: number;
   /** Of a bar with mixed holds: the rule's safe bound, beside the exact figure that governs. Null for the others. */
   readonly bound: { readonly length: number; readonly radius: number; readonly slenderness: number } | null;
+  readonly limit: number;
   readonly handling: RowVerdict | null;
   readonly inService: RowVerdict | null;
   /** Greatest pull and squeeze in the combinations for strength, N; null where nothing acts. */

@@ -107,8 +107,6 @@ function rowOf(
   };
 }
 
-/** Where something acts, what is used most: "net rupture, end i, 13.2(a)(iii)". */
-function checkWords(check: Check | null): string | null {
 /** What the verdict rests on: the rule's span, a length set by hand, or of mixed holds the exact figure with the rule's bound beside it. */
 function governingOf(
   { governing }: Restraint,
@@ -124,6 +122,8 @@ function governingOf(
   };
 }
 
+/** Where something acts, what is used most: "net rupture, end i, 13.2(a)(iii)". */
+function checkWords(check: Check | null): string | null {
   if (check === null || check.utilisation === null) return null;
   const { kind, end, clause } = check.resistance;
   return [kind, ...(end === null ? [] : [`end ${end}`]), clause].join(', ');

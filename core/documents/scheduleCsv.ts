@@ -88,11 +88,11 @@ function columnsFor(units: UnitSystem): readonly Column[] {
       cell: (row) => (row.governing === null ? null : rounded(row.governing.slenderness, 1)),
     },
     { head: 'governing basis', cell: (row) => row.governing?.basis ?? null },
-    { head: 'limit', cell: (row) => rounded(row.limit, 1) },
     {
       head: 'bound L/r',
       cell: (row) => (row.bound === null ? null : rounded(row.bound.slenderness, 1)),
     },
+    { head: 'limit', cell: (row) => rounded(row.limit, 1) },
     ...verdictColumns('in service', (row) => row.inService),
     ...verdictColumns('handling', (row) => row.handling),
     { head: `pulled (${forceUnit})`, cell: (row) => force(row.force?.tension ?? null) },

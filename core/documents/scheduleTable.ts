@@ -110,7 +110,7 @@ function verdictCell(verdict: RowVerdict | null): string {
   return verdict.asked ? said : `(${said})`;
 }
 
-/** Each length or factor set by hand, once a bar and axis, with its reason. */
+/** Each length or factor set by hand, once a bar and axis, with its reason; and each end marked as holding less than both ways. */
 function handLines(rows: readonly ScheduleRow[], units: UnitSystem): readonly string[] {
   return rows.flatMap((row) => [
     ...row.overrides.map((override) =>

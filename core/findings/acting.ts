@@ -128,10 +128,10 @@ function bentBeams(subject: FindingSubject, forces: Forces, all: readonly Judged
 
 /** Beams and struts that run through a node at which one of the ties ends. */
 function beamsPulledAt(subject: FindingSubject, ties: readonly Judged[]): readonly Bar[] {
-  const bay = ties[0]?.bar.bay;
-  const beams = [...subject.layout.bars.values()].filter(
-    (bar) => bar.bay === bay && (bar.role === 'beam' || bar.role === 'strut'),
-  );
+  const bay = subject.layout.bays[subject.places.get(ties[0]?.bar.bay ?? '') ?? -1];
+  const beams = (bay?.bars ?? [])
+    .flatMap((id) => subject.layout.bars.get(id) ?? [])
+    .filter(({ role }) => role === 'beam' || role === 'strut');
   const ends = new Set(ties.flatMap(({ bar }) => [bar.i, bar.j]));
   const through = [...ends].filter(
     (node) => beams.filter((beam) => beam.i === node || beam.j === node).length > 1,
@@ -313,12 +313,13 @@ function pretensionLost(subject: FindingSubject, forces: Forces, all: readonly J
 
 function driftFindings(subject: FindingSubject, forces: Forces): readonly Finding[] {
   const units = subject.project.settings.units;
-  return subject.layout.bays.flatMap(({ id: bay }): readonly Finding[] => {
-    const all = forces.states.flatMap((state) =>
-      state.drifts
-        .filter((drift) => drift.bay === bay && drift.withTakeUp !== null)
-        .map((drift) => ({ state, drift, ratio: Math.abs(drift.withTakeUp ?? 0) / drift.height })),
-    );
+  const found = forces.states.flatMap((state) =>
+    state.drifts
+      .filter((drift) => drift.withTakeUp !== null)
+      .map((drift) => ({ state, drift, ratio: Math.abs(drift.withTakeUp ?? 0) / drift.height })),
+  );
+  return grouped(found, ({ drift }) => drift.bay).flatMap((all): readonly Finding[] => {
+    const bay = all[0]?.drift.bay ?? '';
     const worst = all.reduce<(typeof all)[number] | null>(
       (top, each) => (top === null || each.ratio > top.ratio ? each : top),
       null,
@@ -350,7 +351,10 @@ interface Pair {
 
 function pairsOf(subject: FindingSubject, all: readonly Judged[]): readonly Pair[] {
   const byId = new Map<BarId, Judged>(all.map((judged) => [judged.bar.id, judged]));
-  return [...subject.layout.crossings.values()].flatMap((crossing) => {
+  const bay = subject.layout.bays[subject.places.get(all[0]?.bar.bay ?? '') ?? -1];
+  return (bay?.crossings ?? []).flatMap((id) => {
+    const crossing = subject.layout.crossings.get(id);
+    if (!crossing) return [];
     const [a, b] = [byId.get(crossing.a), byId.get(crossing.b)];
     return crossing.kind === 'diagonals' && a && b ? [{ a, b, crossing: crossing.id }] : [];
   });

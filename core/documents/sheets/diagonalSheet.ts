@@ -39,7 +39,10 @@ export function diagonalSheet(
   const findings = assessment.findings.filter(({ bars }) => bars.includes(bar.id));
   const section = designationText(angle.stock?.designation ?? angle.spec.section);
   const head = markup`<h2 class="bar">${bar.mark} · ${section} · ${showLength(bar.length, units, 'spoken')} set-out<small>${alike.length > 0 ? `the same for ${listed(alike)}; ` : ''}${bar.bay}, ${STATUS_NAMES[diagonal.status]}</small></h2>`;
-  const found = findings.length > 0 ? markup`<div class="keep last"><h3>Findings</h3>${findingLines(findings, options)}</div>` : null;
+  const found =
+    findings.length > 0
+      ? markup`<div class="keep last"><h3>Findings</h3>${findingLines(findings, options)}</div>`
+      : null;
   if (restraint === null)
     return markup`<section class="diagonal">${head}<p>${placedWords(bar, angle, assessment, units)}</p><p>${diagonal.reason}</p>${found}</section>`;
 
@@ -48,19 +51,19 @@ export function diagonalSheet(
   const overrides = angle.mark.overrides ?? [];
   return markup`<section class="diagonal"><div class="keep">${head}<div class="topline"><div>${plane ? sectionInPlace(bar, angle, plane, restraint) : null}</div><div>${axisTable(assessment, angle, restraint, diagonal.limit.limit, units)}<p>${placedWords(bar, angle, assessment, units)}</p><p class="key"><svg width="22" height="8"><path class="free" d="M0 4h22"/></svg> free over the governing length <svg width="22" height="10"><path class="held" d="M0 8h22"/><path class="edl" d="M2 7l2-4M7 7l2-4M12 7l2-4M17 7l2-4"/></svg> held; seen from i</p></div></div>
 <h3>Lanes<small>one strip an axis, cut where a station stops that motion; numbers are those of the holds</small></h3>${laneStrips(restraint, diagonal.limit.limit, claims, units)}<p class="key fills">${NEARNESS_FILLS.map(({ fill, words }) => markup`<svg width="26" height="10"><rect x=".5" y=".5" width="25" height="9" fill="url(#${fill})" stroke="#000" stroke-width=".8"/></svg> ${words} `)}</p></div>
-<div class="keep"><h3>Why it bows there</h3><p>${diagonal.reason}</p>${overrides.length > 0 ? overridesTable(overrides, units) : null}<div class="two verdicts">${verdictBox('in service: governing free direction, restraints in place', diagonal.inService, diagonal, units)}${verdictBox('handling: as fabricated, over the least radius', diagonal.handling, diagonal, units)}</div></div>
+<div class="keep"><h3>Why it bows there</h3><p>${diagonal.reason}</p>${overrides.length > 0 ? overridesTable(overrides, units) : null}${endMarks(angle)}<div class="two verdicts">${verdictBox('in service: governing free direction, restraints in place', diagonal.inService, diagonal, units)}${verdictBox('handling: as fabricated, over the least radius', diagonal.handling, diagonal, units)}</div></div>
 <h3>Holds between the ends</h3>${holdsTable(restraint, claims, units)}${diagonal.checks ? strengthPart(diagonal.checks, units) : null}${found}</section>`;
 }
 
-function overridesTable(overrides: readonly LengthOverride[], units: UnitSystem): Markup {
-  return checkTable(
-    overrides.map((override) => markup`<b>Set by hand</b>, about ${overrideWords(override, units)}.`),
 /** Ends that are marked as holding less than both ways; null where none is. */
 function endMarks(angle: AngleBar): Markup | null {
   const said = listed(endsMarkedFree({ endsHold: endsHoldOf(angle) }));
   return said === '' ? null : markup`<p><b>Marked</b>: ${said}.</p>`;
 }
 
+function overridesTable(overrides: readonly LengthOverride[], units: UnitSystem): Markup {
+  return checkTable(
+    overrides.map((override) => markup`<b>Set by hand</b>, about ${overrideWords(override, units)}.`),
   );
 }
 
