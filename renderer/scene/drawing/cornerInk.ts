@@ -12,24 +12,38 @@ const AXES: readonly (readonly [string, Vec3])[] = [
 /** Length of a triad arm seen square on, px. */
 const ARM = 26;
 
+/** From the edges of the sheet to the end of an arm with its name, px. */
+const TRIAD_EDGE = 20;
+/** Names of arms keep this far from one another, px. */
+const NAMES_APART = 12;
+/** Where the name of an arm may stand from its usual place beyond the tip: there, farther out, above, below. */
+const NAME_PLACES: readonly { readonly out: number; readonly down: number }[] = [
+  { out: 0, down: 0 },
+  { out: NAMES_APART, down: 0 },
+  { out: 0, down: -NAMES_APART },
+  { out: 0, down: NAMES_APART },
+];
+
 /** The directions X, Y and Z of the project, in the lower left corner. */
 export function triadInk(view: SheetView): readonly Ink[] {
-  const foot: Vec2 = [36, view.height - 34];
-  const ink: Ink[] = [{ kind: 'ring', key: 'triad foot', look: 'scene-solid', at: foot, radius: 2.2 }];
-  const named: Vec2[] = [];
-  for (const [name, axis] of AXES) {
-    // Directions alone: the scale of the view has no say in the triad.
-    const run: Vec2 = [
+  // Directions alone: the scale of the view has no say in the triad.
+  const arms = AXES.map(([name, axis]) => ({
+    name,
+    run: [
       axis[0] * view.right[0] + axis[1] * view.right[1] + axis[2] * view.right[2],
       -(axis[0] * view.up[0] + axis[1] * view.up[1] + axis[2] * view.up[2]),
-    ];
+    ] as Vec2,
+  }));
+  const reach = (axis: 0 | 1, sign: 1 | -1): number =>
+    ARM * Math.max(0, ...arms.map(({ run }) => sign * run[axis])) + 8 + TRIAD_EDGE;
+  const foot: Vec2 = [Math.max(36, reach(0, -1)), view.height - Math.max(34, reach(1, 1))];
+  const ink: Ink[] = [{ kind: 'ring', key: 'triad foot', look: 'scene-solid', at: foot, radius: 2.2 }];
+  const named: Vec2[] = [];
+  for (const { name, run } of arms) {
     const way = heading(run, 0.08);
     if (way === null) continue;
     const tip = from(foot, run, ARM);
-    const beyond = from(tip, way, 8);
-    // Two arms that nearly meet on the sheet would have their names on one another.
-    const crowded = named.some((other) => Math.hypot(other[0] - beyond[0], other[1] - beyond[1]) < 11);
-    const label: Vec2 = crowded ? [beyond[0], beyond[1] - 9] : beyond;
+    const label = namePlace(tip, way, named);
     named.push(label);
     ink.push({ kind: 'path', key: `triad ${name}`, look: 'scene-triad', d: line(foot, tip) });
     ink.push({
@@ -42,6 +56,17 @@ export function triadInk(view: SheetView): readonly Ink[] {
     });
   }
   return ink;
+}
+
+/** Two arms that nearly meet on the sheet would have their names on one another: the later one gives way. */
+function namePlace(tip: Vec2, way: Vec2, named: readonly Vec2[]): Vec2 {
+  const places = NAME_PLACES.map(({ out, down }): Vec2 => {
+    const [x, y] = from(tip, way, 8 + out);
+    return [x, y + down];
+  });
+  const isFree = (at: Vec2): boolean =>
+    named.every((other) => Math.hypot(other[0] - at[0], other[1] - at[1]) >= NAMES_APART);
+  return places.find(isFree) ?? from(tip, way, 8);
 }
 
 const MM_PER_FOOT = 304.8;

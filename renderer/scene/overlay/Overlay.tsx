@@ -237,6 +237,7 @@ function putInPlace(root: HTMLElement, laid: OverlayLayout): void {
     if (element.style.visibility !== visibility) element.style.visibility = visibility;
     if (!place) continue;
     element.style.transform = `translate(${place.x.toFixed(1)}px, ${place.y.toFixed(1)}px)`;
+    if (place.ring !== undefined) element.style.setProperty('--ring', `${place.ring}px`);
     if (place.turn !== undefined) element.style.setProperty('--turn', `${place.turn.toFixed(1)}deg`);
   }
 }

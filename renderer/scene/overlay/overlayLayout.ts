@@ -26,6 +26,7 @@ import { onSheet, type SheetView } from '../view/sheetView.ts';
 import { crossingPlaces } from './crossingPlaces.ts';
 import { type LabelWish, labelPlaces } from './labelPlaces.ts';
 import type { OverlayContent } from './overlayContent.ts';
+import { ringSizes, WIDEST_RING } from './ringSize.ts';
 
 export interface OverlayInput {
   readonly view: SheetView;
@@ -57,6 +58,8 @@ export interface Place {
   readonly x: number;
   readonly y: number;
   readonly turn?: number;
+  /** Across the ring of a crossing, px. */
+  readonly ring?: number;
 }
 
 export interface OverlayLayout {
@@ -76,6 +79,14 @@ const EDGE = 6;
 /** Where a bar is drawn shorter than this its ends cannot be told apart, px. */
 const SHORTEST_WITH_ENDS = 60;
 
+/** Where there is no room for every label, the graver ones are kept. */
+const WEIGHT: Readonly<Record<OverlayContent['diagonals'][number]['label']['status'], number>> = {
+  over: 3,
+  near: 2,
+  unknown: 1,
+  within: 0,
+};
+
 /** Lays everything over the steel out on the sheet, for one view of it. */
 export function layOutOverlay(input: OverlayInput): OverlayLayout {
   const { view, content, units } = input;
@@ -83,7 +94,11 @@ export function layOutOverlay(input: OverlayInput): OverlayLayout {
   const sheet: Box = { left: EDGE, top: EDGE, width: view.width - 2 * EDGE, height: view.height - 2 * EDGE };
 
   const glyphs = crossingPlaces(view, input.assessment.layout, content.crossings);
-  for (const [id, [x, y]] of glyphs) if (within(sheet, x, y)) places.set(`crossing ${id}`, { x, y });
+  const rings = ringSizes([...glyphs.values()]);
+  [...glyphs].forEach(([id, [x, y]], index) => {
+    const ring = rings[index] ?? WIDEST_RING;
+    if (within(sheet, x, y)) places.set(`crossing ${id}`, { x, y, ring });
+  });
   for (const [key, place] of ends(view, content)) if (within(sheet, place.x, place.y)) places.set(key, place);
 
   for (const { id } of input.forces?.placing?.nodes ?? []) {
@@ -93,14 +108,16 @@ export function layOutOverlay(input: OverlayInput): OverlayLayout {
   }
 
   const marks = [
-    ...[...glyphs.values()].map((at) => boxAbout(at, GLYPH_HALF)),
+    ...[...glyphs.values()].map((at, index) =>
+      boxAbout(at, (GLYPH_HALF * (rings[index] ?? WIDEST_RING)) / WIDEST_RING),
+    ),
     ...[...places]
       .filter(([key]) => key.startsWith('end '))
       .map(([, { x, y }]) => boxAbout([x, y], END_HALF)),
   ];
   const steelInk = inkOf(input, marks);
   const inTheWay = [...marks, ...wordsIn(steelInk)];
-  const wishes = content.diagonals.flatMap(({ bar }): readonly LabelWish[] => {
+  const wishes = content.diagonals.flatMap(({ bar, label }): readonly LabelWish[] => {
     const size = input.sizes.get(bar.id);
     const seen = clipped([onSheet(view, bar.from), onSheet(view, bar.to)], sheet);
     if (!size || seen === null) return [];
@@ -110,6 +127,7 @@ export function layOutOverlay(input: OverlayInput): OverlayLayout {
         ...size,
         bar: seen,
         must: bar.id === content.selected?.id,
+        weight: WEIGHT[label.status],
       },
     ];
   });

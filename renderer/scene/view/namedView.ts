@@ -50,6 +50,11 @@ export function namedView(name: ViewName, bay: BayLayout | null): ViewDirections
   }
 }
 
+/** The same view with the sheet turned a quarter, so that what ran up it runs to the right. */
+export function quarterTurned({ right, up, towards }: ViewDirections): ViewDirections {
+  return { right: up, up: scale(right, -1), towards };
+}
+
 /** The view towards which `towards` points, upright kept upright; seen straight from above or below, `rightWhenLevel` runs to the right. */
 function looking(towards: Vec3, rightWhenLevel: Vec3): ViewDirections {
   const out = unit(towards);

@@ -5,18 +5,24 @@ import { dimensionRoom } from '../drawing/dimensionInk.ts';
 import { reducedMotion } from '../overlay/reducedMotion.ts';
 import type { Size } from '../useSize.ts';
 import type { CameraHandle } from '../webgl/CameraRig.tsx';
-import { bare, fitOf, type Margins, pointsToShow } from './fit.ts';
-import { namedView, type ViewDirections } from './namedView.ts';
+import { closeUpPoints, isCrowded, NARROW } from './closeUp.ts';
+import { bare, type Fit, fitOf, type Margins, pointsToShow } from './fit.ts';
+import { namedView, quarterTurned, type ViewDirections } from './namedView.ts';
 import type { SheetView } from './sheetView.ts';
 
 /** Room round the bay and its dimensions, px. */
 const MARGINS: Margins = { left: 30, right: 30, top: 28, bottom: 18 };
+/** Round a bar or two that are seen alone, with room for their labels, px. */
+const CLOSE_MARGINS: Margins = { left: 44, right: 44, top: 44, bottom: 44 };
+/** A plan is turned on the sheet where that makes it larger by this much. */
+const WORTH_TURNING = 1.15;
 /** The lower left corner, where the triad and the scale stand, px. */
 const CORNER: Size = { width: 210, height: 70 };
 /** The legend's distance from the edges, px. */
 const LEGEND_EDGE = 14;
 
-export interface NamedViewWishes extends Pick<BayViewProps, 'view' | 'viewNonce'> {
+export interface NamedViewWishes
+  extends Pick<BayViewProps, 'view' | 'viewNonce' | 'selectedBar' | 'selectedCrossing'> {
   readonly layout: Layout;
   readonly bay: BayLayout | null;
   readonly camera: RefObject<CameraHandle | null>;
@@ -39,6 +45,8 @@ export interface NamedView {
 export function useNamedView({
   view,
   viewNonce,
+  selectedBar,
+  selectedCrossing,
   layout,
   bay,
   camera,
@@ -52,13 +60,9 @@ export function useNamedView({
   /** What the bay's extent depends on, so that a mark that changes none of it leaves the view alone. */
   const extent = useMemo(() => JSON.stringify(pointsToShow(layout, bay)), [layout, bay]);
 
-  const look = useCallback(
-    (directions: ViewDirections, smooth: boolean): void => {
-      const points = [
-        ...bare(pointsToShow(layout, bay)),
-        ...(bay === null ? [] : dimensionRoom(bay, directions)),
-      ];
-      const found = fitOf(points, directions, size, MARGINS, [
+  const fitted = useCallback(
+    (directions: ViewDirections): Fit | null => {
+      const taken = [
         { left: 0, top: size.height - CORNER.height, ...CORNER },
         {
           left: size.width - legend.width - LEGEND_EDGE,
@@ -66,14 +70,40 @@ export function useNamedView({
           width: legend.width + LEGEND_EDGE,
           height: legend.height + LEGEND_EDGE,
         },
-      ]);
-      if (found !== null) camera.current?.look(directions, found, smooth && !reducedMotion());
+      ];
+      const points = [
+        ...bare(pointsToShow(layout, bay)),
+        ...(bay === null ? [] : dimensionRoom(bay, directions)),
+      ];
+      const whole = fitOf(points, directions, size, MARGINS, taken);
+      if (whole === null || size.width >= NARROW) return whole;
+      if (!isCrowded(layout, bay, { ...directions, ...whole, ...size })) return whole;
+      const close = bare(closeUpPoints(layout, selectedCrossing, selectedBar));
+      return fitOf(close, directions, size, CLOSE_MARGINS, taken) ?? whole;
     },
-    [layout, bay, camera, size, legend],
+    [layout, bay, size, legend, selectedCrossing, selectedBar],
+  );
+  const named = useCallback((): ViewDirections => {
+    const straight = namedView(view, bay);
+    if (view !== 'plan') return straight;
+    const turned = quarterTurned(straight);
+    const gain = (fitted(turned)?.pxPerMm ?? 0) / (fitted(straight)?.pxPerMm ?? 1);
+    return gain > WORTH_TURNING ? turned : straight;
+  }, [view, bay, fitted]);
+  const look = useCallback(
+    (directions: ViewDirections | null, smooth: boolean): void => {
+      const towards = directions ?? named();
+      const found = fitted(towards);
+      if (found !== null) camera.current?.look(towards, found, smooth && !reducedMotion());
+    },
+    [camera, fitted, named],
   );
   const latest = useRef(look);
   latest.current = look;
 
+  /** What is seen close up where the sheet is narrow; the whole bay elsewhere. */
+  const closeUp = size.width < NARROW ? `${selectedCrossing} ${selectedBar}` : '';
+  const closeUpSeen = useRef(closeUp);
   // biome-ignore lint/correctness/useExhaustiveDependencies: `extent` and `drawnBy` say when to look again
   useEffect(() => {
     if (size.width === 0 || size.height === 0) return;
@@ -82,22 +112,24 @@ export function useNamedView({
     const anew = seen.current !== asked;
     if (anew) left.current = false;
     seen.current = asked;
+    const goesElsewhere = anew || closeUpSeen.current !== closeUp;
+    closeUpSeen.current = closeUp;
     if (left.current) return;
-    // The first view is simply there, and a resized sheet keeps up with its edge; only a change of view is shown as a movement.
-    latest.current(namedView(view, bay), anew && !first);
-  }, [view, viewNonce, bayId, drawnBy, extent, size, legend]);
+    // The first view is simply there, and a resized sheet keeps up with its edge; only a change of what is looked at is shown as a movement.
+    latest.current(null, goesElsewhere && !first);
+  }, [view, viewNonce, bayId, drawnBy, extent, size, legend, closeUp]);
 
   const first = useRef<() => void>(() => {});
-  first.current = () => latest.current(namedView(view, bay), false);
+  first.current = () => latest.current(null, false);
   const begin = useCallback(() => first.current(), []);
   const leave = useCallback(() => {
     left.current = true;
   }, []);
   const fitAgain = useCallback(
     (now: SheetView | null) => {
-      look(now ?? namedView(view, bay), true);
+      look(now, true);
     },
-    [look, view, bay],
+    [look],
   );
   return { begin, leave, fitAgain };
 }

@@ -75,6 +75,43 @@ describe('the labels of diagonals', () => {
     expect(places.size).toBeLessThan(40);
   });
 
+  it('never lie on one another, wherever the bars are, and leave the graver ones where there is no room for all', () => {
+    const coordinate = fc.integer({ min: 100, max: 500 });
+    const point = fc.tuple(coordinate, coordinate);
+    fc.assert(
+      fc.property(fc.array(fc.tuple(point, point), { minLength: 2, maxLength: 30 }), (bars) => {
+        const wishes = bars.map((bar, index) => ({
+          ...wish(`bar ${index}`, bar, index === 3),
+          weight: index,
+        }));
+        const boxes = [...labelPlaces(wishes, [], [], SHEET, NONE).values()].map(({ box }) => box);
+        return boxes.every((a, k) => boxes.slice(k + 1).every((b) => overlap(a, b) === 0));
+      }),
+      { seed: 3, numRuns: 200 },
+    );
+    const onOne = Array.from({ length: 40 }, (_, index) => ({
+      ...wish(`bar ${index}`, [
+        [390, 290],
+        [410, 310],
+      ]),
+      weight: index === 25 ? 1 : 0,
+    }));
+    expect(labelPlaces(onOne, [], [], SHEET, NONE).has('bar 25')).toBe(true);
+  });
+
+  it('take a longer leader where the shorter finds no room', () => {
+    // All that a leader of 16 px reaches beside the bar is covered.
+    const covered = { left: 150, top: 270, width: 500, height: 60 };
+    const level = wish('level', [
+      [200, 300],
+      [600, 300],
+    ]);
+    const place = labelPlaces([level], [covered], [], SHEET, NONE).get('level');
+    if (!place) throw new Error('no place');
+    expect(Math.hypot(place.onBox[0] - place.onBar[0], place.onBox[1] - place.onBar[1])).toBe(40);
+    expect(overlap(place.box, covered)).toBe(0);
+  });
+
   it('never leave the sheet, wherever the bars are', () => {
     const coordinate = fc.integer({ min: -200, max: 1000 });
     const point = fc.tuple(coordinate, coordinate);
