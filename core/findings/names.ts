@@ -81,17 +81,10 @@ function idleMarks(
     const at = `${path}.joins.${key}`;
     const found = crossing(key);
     if (!found) return [{ path: at, what: 'there is no such crossing' }];
-    if (found.join === null)
-      return [{ path: at, what: `what crosses there cannot be joined as “${join.kind}”` }];
-    const cuts = [found.a, found.b].map((id) => id.slice(bay.id.length + 1));
-    return join.kind === 'cut' && !cuts.includes(join.cutBar)
-      ? [
-          {
-            path: `${at}.cutBar`,
-            what: `“${join.cutBar}” does not cross there, and ${cuts[1]} is taken to be cut`,
-          },
-        ]
-      : [];
+    if (found.join !== null) return [];
+    return join.kind === 'cut' && found.choices.includes('cut')
+      ? [{ path: `${at}.cutBar`, what: `“${join.cutBar}” does not cross there` }]
+      : [{ path: at, what: `what crosses there cannot be joined as “${join.kind}”` }];
   });
   const shares = Object.keys(bay.tensionShares ?? {})
     .filter((key) => !crossing(key))

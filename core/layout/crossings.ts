@@ -64,12 +64,11 @@ export function withSharedPoints(crossings: readonly Crossing[]): readonly Cross
   });
 }
 
-/** A mark of a kind that this crossing cannot have (left from another pattern) is no mark. */
+/** A mark of a kind that this crossing cannot have (left from another pattern), or that cuts a bar which does not cross here, is no mark. */
 function joinThatFits(join: Join | undefined, choices: readonly JoinKind[], meeting: Meeting): Join | null {
   if (!join || !choices.includes(join.kind)) return null;
-  if (join.kind === 'cut' && join.cutBar !== meeting.a && join.cutBar !== meeting.b)
-    return { kind: 'cut', cutBar: meeting.b };
-  return join;
+  const cutsNone = join.kind === 'cut' && join.cutBar !== meeting.a && join.cutBar !== meeting.b;
+  return cutsNone ? null : join;
 }
 
 /** From…to along the normal, measured from the bar's own line, mm. */

@@ -38,14 +38,9 @@ function markEdits({ layout }: Assessment, bay: Bay): readonly Edit[] {
           },
         ],
   );
-  const joins = Object.entries(bay.joins).flatMap(([key, join]): readonly Edit[] => {
+  const joins = Object.keys(bay.joins).flatMap((key): readonly Edit[] => {
     const id = `${bay.id}/${key}`;
-    const found = layout.crossings.get(id);
-    if (!found || found.join === null) return [{ kind: 'join', crossings: [id], join: null }];
-    // The layout has put a bar that crosses in the place of one that does not.
-    return join.kind === 'cut' && found.join.kind === 'cut' && found.join.cutBar !== join.cutBar
-      ? [{ kind: 'join', crossings: [id], join: found.join }]
-      : [];
+    return layout.crossings.get(id)?.join ? [] : [{ kind: 'join', crossings: [id], join: null }];
   });
   const shares = Object.keys(bay.tensionShares ?? {}).flatMap((crossing): readonly Edit[] =>
     layout.crossings.has(`${bay.id}/${crossing}`)
