@@ -9,15 +9,21 @@ interface FoldProps {
 }
 
 /** Once it has unfolded, which may be below what is seen of its panel. */
-function showWhole(fold: HTMLElement | null): void {
-  requestAnimationFrame(() => fold?.scrollIntoView({ block: 'nearest' }));
+function showWhole(fold: HTMLElement): void {
+  requestAnimationFrame(() => fold.scrollIntoView({ block: 'nearest' }));
 }
 
 /** A part of the recipe that is folded away until wanted. */
 export function Fold({ title, aside, open = false, children }: FoldProps): JSX.Element {
   return (
-    <details className="fold" open={open}>
-      <summary onClick={(event) => showWhole(event.currentTarget.parentElement)}>
+    <details
+      className="fold"
+      open={open}
+      onToggle={({ currentTarget }) => {
+        if (currentTarget.open) showWhole(currentTarget);
+      }}
+    >
+      <summary>
         <span>{title}</span>
         <span className="fold-aside">{aside}</span>
       </summary>

@@ -118,7 +118,5 @@ function isLane(column: ColumnId): boolean {
 }
 
 function governs(column: ColumnId, row: ScheduleRow): boolean {
-  return (
-    row.governing !== null && LANES[column] === row.governing.axis && row.governing.basis !== 'exact'
-  );
+  return row.governing !== null && LANES[column] === row.governing.axis && row.governing.basis !== 'exact';
 }

@@ -1,9 +1,9 @@
 /** The whole bay's critical load against that of the pair, of the single bar, and of a column by formula. */
 import { describe, expect, it } from 'vitest';
 import { bayCriticalLoad } from '../../../core/frame/bayCriticalLoad.ts';
-import { GUSSETED } from '../../../core/project/endFixity.ts';
 import type { FrameSpring } from '../../../core/frame/model.ts';
 import { dot, unit2, type Vec2, type Vec3 } from '../../../core/geometry/vector.ts';
+import { GUSSETED } from '../../../core/project/endFixity.ts';
 import { criticalLoad } from '../../../core/stability/criticalLoad.ts';
 import { type BarProblem, type EndRotation, PINNED } from '../../../core/stability/model.ts';
 import { type PairBar, pairCriticalLoad } from '../../../core/stability/pair.ts';

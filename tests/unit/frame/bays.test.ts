@@ -1,10 +1,10 @@
 /** Bays as frames: what they offer, that they are in equilibrium, symmetric where the bay is, and named where they can move. */
 import { describe, expect, it } from 'vitest';
 import { namedMechanism } from '../../../core/bowing/mechanismNames.ts';
-import { GUSSETED } from '../../../core/project/endFixity.ts';
 import { movementUnder } from '../../../core/frame/push.ts';
 import { pushTest } from '../../../core/frame/pushTest.ts';
 import { dot, type Vec3 } from '../../../core/geometry/vector.ts';
+import { GUSSETED } from '../../../core/project/endFixity.ts';
 import { restraintContext } from '../../../core/restraint/restraint.ts';
 import { times } from '../../../core/sparse/symmetricMatrix.ts';
 import { bay, free, knee, line, roof, STRUT, wall } from '../assess/given/bays.ts';
