@@ -2,6 +2,7 @@ import { StrictMode } from 'react';
 import { createRoot } from 'react-dom/client';
 import { createStore } from 'zustand/vanilla';
 import { assessWorker, createAssessor } from './assessing/assessor.ts';
+import { bowingPool, bowingWorker, workersFor } from './assessing/bowingPool.ts';
 import { followCloser } from './assessing/closerLook.ts';
 import { chooseHost } from './host/chooseHost.ts';
 import { App } from './shell/App.tsx';
@@ -24,7 +25,9 @@ const now = (): number => performance.now();
 const host = chooseHost();
 const store = createStore<WindowState>(() => firstState(keptTheme(localStorage)));
 const actions = windowActions(store, now);
-const assessor = createAssessor(store, assessWorker, now);
+const assessor = createAssessor(store, assessWorker, now, () =>
+  bowingPool(bowingWorker, workersFor(navigator.hardwareConcurrency)),
+);
 const services: Services = {
   host,
   store,

@@ -1,12 +1,9 @@
 /** Assesses projects away from the window's own thread. All engineering is core's; this file only passes it plain data. */
 import { expose } from 'comlink';
-import au from '../../assets/catalogues/au.json';
-import en from '../../assets/catalogues/en.json';
-import us from '../../assets/catalogues/us.json';
-import { assess } from '../../core/assess.ts';
+import { unremembered } from '../../core/assess/bayWork.ts';
+import { prepared } from '../../core/assess/prepared.ts';
+import { assess, assessmentOf } from '../../core/assess.ts';
 import { BowingMemory } from '../../core/bowing/memory.ts';
-import type { Catalogues } from '../../core/catalogue/model.ts';
-import { readCatalogue } from '../../core/catalogue/readCatalogue.ts';
 import { stockOf } from '../../core/catalogue/stock.ts';
 import { csvFile } from '../../core/documents/csv.ts';
 import { reportHtml } from '../../core/documents/report.ts';
@@ -17,14 +14,22 @@ import { shortlist } from '../../core/shortlist/shortlist.ts';
 import { relianceOf } from '../../core/study/reliance.ts';
 import { pushOf, studyOf } from '../../core/study/study.ts';
 import type { AssessApi } from './assessApi.ts';
-import { rememberedAssess } from './memory.ts';
+import { headOf, partOf, partsOf } from './assessmentParts.ts';
+import type { Keeper } from './bowingApi.ts';
+import { catalogues } from './catalogues.ts';
+import { remembered } from './memory.ts';
 import { joinReadings } from './readings.ts';
 
-const catalogues: Catalogues = { en: readCatalogue(en), us: readCatalogue(us), au: readCatalogue(au) };
 /** Bays that an edit does not touch keep their critical loads. */
 const bowingMemory = new BowingMemory();
 const assessFresh = (project: Project) => assess(project, catalogues, 'all levels', bowingMemory);
-const assessed = rememberedAssess(assessFresh);
+const preparedOnce = remembered(({ project }) => prepared(project, catalogues), 1);
+const assessed = remembered((snapshot) => assessmentOf(preparedOnce(snapshot), 'all levels', bowingMemory));
+const keeper: Keeper = {
+  remember: (found) => {
+    for (const { key, bowings } of found) bowingMemory.remember(key, bowings);
+  },
+};
 
 const api: AssessApi = {
   assess: (snapshot) => {
@@ -32,6 +37,10 @@ const api: AssessApi = {
     const assessment = assessed(snapshot);
     return { assessment, took: performance.now() - began };
   },
+  unremembered: (snapshot) => unremembered(preparedOnce(snapshot), bowingMemory),
+  keep: (port) => expose(keeper, port),
+  head: (snapshot) => ({ head: headOf(assessed(snapshot)), parts: partsOf(assessed(snapshot)) }),
+  part: (snapshot, k) => partOf(assessed(snapshot), k),
   remedies: (snapshot, id) => {
     const assessment = assessed(snapshot);
     const finding = assessment.findings.find((each) => each.id === id);

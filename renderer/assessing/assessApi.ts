@@ -8,6 +8,8 @@ import type { Remedy } from '../../core/remedies/model.ts';
 import type { Shortlist, ShortlistOptions } from '../../core/shortlist/model.ts';
 import type { BarStudy, Reliance } from '../../core/study/model.ts';
 
+import type { AssessmentHead, AssessmentPart } from './assessmentParts.ts';
+
 /** A project with a number of its own, by which a worker knows whether it has assessed it already. */
 export interface Snapshot {
   readonly serial: number;
@@ -65,6 +67,13 @@ export interface SectionFound {
 
 export interface AssessApi {
   assess(snapshot: Snapshot): AssessAnswer;
+  /** Places in the project of the bays whose critical loads are not remembered. */
+  unremembered(snapshot: Snapshot): readonly number[];
+  /** Remembers what comes through the port. */
+  keep(port: MessagePort): void;
+  /** Assesses; the rest is fetched part by part. */
+  head(snapshot: Snapshot): { readonly head: AssessmentHead; readonly parts: number };
+  part(snapshot: Snapshot, k: number): AssessmentPart;
   remedies(snapshot: Snapshot, finding: string): readonly Remedy[];
   readings(snapshot: Snapshot, crossing: CrossingId): readonly JoinReading[];
   shortlist(snapshot: Snapshot, bars: readonly BarId[], options: ShortlistOptions): Shortlist;

@@ -1,6 +1,7 @@
 /**
  * Keeps the figures in step with the project. One worker assesses, newest project first: while it works, only the latest
- * request waits, and a result for a project that is no longer wanted is dropped. A second worker tries things out
+ * request waits, and a result for a project that is no longer wanted is dropped. The critical loads of many bays are shared out to a
+ * pool, which lasts as long as that work. A second worker tries things out
  * (remedies, joins, shortlists, documents), so that a long trial never keeps the figures waiting. A third looks closer at what is
  * chosen (its mode, a push), since a hand that pushes cannot wait for trials.
  */
@@ -12,13 +13,17 @@ import { settled } from '../store/selection.ts';
 import { presentProject, shownAssessment } from '../store/shown.ts';
 import type { Assessed, WindowState } from '../store/windowState.ts';
 import type { AssessApi, Snapshot } from './assessApi.ts';
+import type { BowingPool } from './bowingPool.ts';
+import { type FiguresRun, figuresRun } from './figuresRun.ts';
 import { newestFirst } from './newestFirst.ts';
 
 export interface Assessor {
   /** Begins to follow the store; returns how to stop. */
   start(): () => void;
-  /** Begins afresh after a failure. */
+  /** Begins afresh after a failure, or after a stop. */
   retry(): void;
+  /** Leaves off; the figures stay as they are until `retry`, or until another project is opened. */
+  stop(): void;
   /** Asks the second worker. Rejects when the worker fails. */
   ask<T>(
     question: (api: Remote<AssessApi>, snapshotOf: (project: Project) => Snapshot) => Promise<T>,
@@ -53,12 +58,15 @@ export function createAssessor(
   store: StoreApi<WindowState>,
   makeWorker: () => AssessWorker,
   now: () => number,
+  makePool: () => BowingPool,
 ): Assessor {
   const snapshotOf = numberedSnapshots();
   let figures: AssessWorker | null = null;
   let trials: AssessWorker | null = null;
   let looks: LookWorker | null = null;
-  let running = false;
+  let running: { readonly project: Project; readonly run: FiguresRun } | null = null;
+  /** Workers of figures that have been asked before, and may remember. */
+  const begun = new WeakSet<AssessWorker>();
   /** A project that could not be assessed is not tried again by itself; another one is. */
   let failedOn: Project | null = null;
 
@@ -70,34 +78,59 @@ export function createAssessor(
     return figures;
   };
 
+  /** Ends what is under way; a worker that is busy is ended too, and with it all that it remembers. */
+  const endRun = (): void => {
+    if (running === null) return;
+    const { run } = running;
+    if (!run.isShared()) {
+      figures?.end();
+      figures = null;
+    }
+    run.end();
+    running = null;
+  };
+
   const fail = (what: string): void => {
     failedOn = wanted(store.getState());
-    running = false;
+    running?.run.end();
+    running = null;
     figures?.end();
     figures = null;
-    setAssessing(store, { workingSince: null, failure: what });
+    setAssessing(store, { ...NOT_WORKING, failure: what });
   };
 
   const follow = (): void => {
     const state = store.getState();
     const project = wanted(state);
+    if (state.assessing.stopped) return;
+    // Work that is shared out is left for a later project at once, and what was found is kept; the rest is short.
+    if (running?.run.isShared() && running.project !== project) endRun();
     if (running || (project !== null && project === failedOn)) return;
     if (project === null) {
-      if (state.assessing.workingSince !== null) setAssessing(store, { workingSince: null });
+      if (state.assessing.workingSince !== null) setAssessing(store, NOT_WORKING);
       return;
     }
-    running = true;
-    if (state.assessing.workingSince === null) setAssessing(store, { workingSince: now() });
     const worker = figuresWorker();
-    worker.api.assess(snapshotOf(project)).then(
+    const progress = (done: number, of: number): void => setAssessing(store, { progress: { done, of } });
+    const remembersNothing = !begun.has(worker);
+    begun.add(worker);
+    const run = figuresRun(worker.api, snapshotOf(project), {
+      makePool,
+      progress,
+      now,
+      remembersNothing,
+    });
+    running = { project, run };
+    setAssessing(store, { workingSince: state.assessing.workingSince ?? now(), progress: null });
+    run.answer.then(
       (answer) => {
-        if (worker !== figures) return;
-        running = false;
+        if (worker !== figures || running?.run !== run || answer === 'ended') return;
+        running = null;
         accept(store, { project, ...answer });
         follow();
       },
       (error: unknown) => {
-        if (worker === figures) fail(wordsOf(error));
+        if (worker === figures && running?.run === run) fail(wordsOf(error));
       },
     );
   };
@@ -142,19 +175,25 @@ export function createAssessor(
       follow();
       return () => {
         stop();
+        running?.run.end();
         figures?.end();
         trials?.end();
         looks?.worker.end();
         figures = null;
         trials = null;
         looks = null;
-        running = false;
+        running = null;
       };
     },
     retry: () => {
       failedOn = null;
-      setAssessing(store, { failure: null });
+      setAssessing(store, { failure: null, stopped: false });
       follow();
+    },
+    stop: () => {
+      if (running === null) return;
+      endRun();
+      setAssessing(store, { ...NOT_WORKING, stopped: true });
     },
     ask,
     look,
@@ -168,6 +207,8 @@ export function createAssessor(
     },
   };
 }
+
+const NOT_WORKING = { workingSince: null, progress: null } as const;
 
 /** A worker of this window's own script, reached over comlink. */
 export function assessWorker(): AssessWorker {
@@ -203,7 +244,7 @@ function accept(store: StoreApi<WindowState>, assessed: Assessed): void {
     const next = {
       ...assessing,
       ...(isBase ? { base: assessed } : { tried: assessed }),
-      workingSince: null,
+      ...NOT_WORKING,
       failure: null,
     };
     const shown = shownAssessment({ ...state, assessing: next });

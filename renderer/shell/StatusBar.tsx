@@ -1,6 +1,7 @@
-import { type JSX, useEffect, useState } from 'react';
+import { type JSX, useEffect } from 'react';
 import { useStockChoices } from '../assessing/useStockChoices.ts';
-import { shownAssessed, shownAssessment, shownProject } from '../store/shown.ts';
+import { shownAssessment } from '../store/shown.ts';
+import { AssessingStatus } from './AssessingStatus.tsx';
 import { useActions, useWindow } from './services.tsx';
 
 /** What is chosen, how long the figures took, which stock list, what has just happened. */
@@ -10,7 +11,7 @@ export function StatusBar(): JSX.Element {
     <footer className="status" data-region tabIndex={-1}>
       <ChosenText />
       <TrialText />
-      <AssessingText />
+      <AssessingStatus />
       {stock !== null && <span>Stock list: {stock.name}</span>}
       <NoticeText />
       <span className="status-caution">An aid for competent people: check figures before use.</span>
@@ -33,31 +34,6 @@ function ChosenText(): JSX.Element | null {
 function TrialText(): JSX.Element | null {
   const trying = useWindow((state) => state.trying !== null);
   return trying ? <span className="status-trial">On trial: nothing is changed until you keep it</span> : null;
-}
-
-/** ms after which waiting is worth a word. */
-const SLOW = 250;
-
-function AssessingText(): JSX.Element | null {
-  const since = useWindow((state) => state.assessing.workingSince);
-  const failed = useWindow((state) => state.assessing.failure !== null);
-  const took = useWindow((state) => shownAssessed(state)?.took ?? null);
-  const bays = useWindow((state) => shownProject(state).bays.length);
-  const [slow, setSlow] = useState(false);
-  useEffect(() => {
-    setSlow(false);
-    if (since === null) return;
-    const timer = setTimeout(() => setSlow(true), SLOW);
-    return () => clearTimeout(timer);
-  }, [since]);
-  if (failed) return <span className="status-failure">Not assessed: the figures are missing or old</span>;
-  if (slow)
-    return (
-      <span role="status">
-        Assessing {bays} {bays === 1 ? 'bay' : 'bays'}…
-      </span>
-    );
-  return took === null ? null : <span>Assessed in {Math.max(1, Math.round(took))} ms</span>;
 }
 
 /** ms that a notice stays. */

@@ -24,6 +24,10 @@ export interface AssessingState {
   readonly tried: Assessed | null;
   /** Since when a result is awaited, ms; null when nothing is. */
   readonly workingSince: number | null;
+  /** How many bays are worked out while many are; null when not known. */
+  readonly progress: { readonly done: number; readonly of: number } | null;
+  /** The user has stopped the work; figures may be missing or old until it is taken up again. */
+  readonly stopped: boolean;
   /** Why no result came; the project is untouched by it. */
   readonly failure: string | null;
 }
@@ -82,7 +86,14 @@ export interface WindowState {
   readonly notice: string | null;
 }
 
-export const NO_RESULTS: AssessingState = { base: null, tried: null, workingSince: null, failure: null };
+export const NO_RESULTS: AssessingState = {
+  base: null,
+  tried: null,
+  workingSince: null,
+  progress: null,
+  stopped: false,
+  failure: null,
+};
 
 export function firstState(theme: ThemeSetting): WindowState {
   const project = newProject('New project');

@@ -9,8 +9,10 @@ import { readCatalogue } from '../../../core/catalogue/readCatalogue.ts';
 import { newWallBay } from '../../../core/project/newBay.ts';
 import { newProject } from '../../../core/project/newProject.ts';
 import type { AssessAnswer, Snapshot } from '../../../renderer/assessing/assessApi.ts';
+import { headOf, partOf, partsOf } from '../../../renderer/assessing/assessmentParts.ts';
 import { type AssessWorker, createAssessor } from '../../../renderer/assessing/assessor.ts';
-import { presentProject } from '../../../renderer/store/shown.ts';
+import type { BowingPool } from '../../../renderer/assessing/bowingPool.ts';
+import { isUpToDate, presentProject } from '../../../renderer/store/shown.ts';
 import { windowActions } from '../../../renderer/store/windowActions.ts';
 import { firstState, type WindowState } from '../../../renderer/store/windowState.ts';
 
@@ -24,8 +26,13 @@ interface Asked {
 }
 
 /** A worker that answers only when told to, so that the order of things is in the test's hand. */
-function handWorker(): { readonly make: () => AssessWorker; readonly asked: Asked[] } {
+function handWorker(): {
+  readonly make: () => AssessWorker;
+  readonly asked: Asked[];
+  readonly ended: () => number;
+} {
   const asked: Asked[] = [];
+  let ended = 0;
   const make = (): AssessWorker => ({
     api: {
       assess: (snapshot: Snapshot) =>
@@ -36,11 +43,52 @@ function handWorker(): { readonly make: () => AssessWorker; readonly asked: Aske
             fail: (why) => reject(new Error(why)),
           });
         }),
+      unremembered: async (snapshot: Snapshot) => snapshot.project.bays.map((_, k) => k),
+      keep: async () => undefined,
+      head: async ({ project }: Snapshot) => {
+        const whole = assess(project, catalogues, 'by the marks');
+        return { head: headOf(whole), parts: partsOf(whole) };
+      },
+      part: async ({ project }: Snapshot, k: number) =>
+        partOf(assess(project, catalogues, 'by the marks'), k),
     } as unknown as AssessWorker['api'],
     onBroken: () => undefined,
-    end: () => undefined,
+    end: () => {
+      ended += 1;
+    },
   });
-  return { make, asked };
+  return { make, asked, ended: () => ended };
+}
+
+interface Pooled {
+  readonly bays: readonly number[];
+  progress(done: number): void;
+  finish(how: 'done' | 'lost'): void;
+}
+
+/** A pool that gets on only when told to. */
+function handPool(): {
+  readonly make: () => BowingPool;
+  readonly given: Pooled[];
+  readonly ended: () => number;
+} {
+  const given: Pooled[] = [];
+  let ended = 0;
+  const make = (): BowingPool => {
+    let end = (): void => undefined;
+    return {
+      work: (_, bays, told) =>
+        new Promise((resolve) => {
+          end = () => resolve('ended');
+          given.push({ bays, progress: (done) => told.progress(done, bays.length), finish: resolve });
+        }),
+      end: () => {
+        ended += 1;
+        end();
+      },
+    };
+  };
+  return { make, given, ended: () => ended };
 }
 
 /** Lets the promises that are settled run on. */
@@ -49,12 +97,13 @@ const settle = (): Promise<void> => new Promise((resolve) => setTimeout(resolve,
 function begun() {
   const store = createStore<WindowState>(() => firstState('light'));
   const actions = windowActions(store, () => 0);
-  const { make, asked } = handWorker();
-  const assessor = createAssessor(store, make, () => 0);
+  const { make, asked, ended } = handWorker();
+  const pools = handPool();
+  const assessor = createAssessor(store, make, () => 0, pools.make);
   assessor.start();
   actions.replaceProject(shed, { name: 'shed', token: null, saved: true });
   const grade = (to: string) => actions.edit({ kind: 'diagonals', bay: 'W1', change: { grade: to } });
-  return { store, actions, assessor, asked, grade };
+  return { store, actions, assessor, asked, ended, pools, grade };
 }
 
 describe('keeping the figures in step', () => {
@@ -122,5 +171,89 @@ describe('keeping the figures in step', () => {
     await settle();
     expect(store.getState().assessing.base?.project).toBe(presentProject(store.getState()));
     expect(asked).toHaveLength(2);
+  });
+});
+
+describe('many bays', () => {
+  const many = {
+    ...newProject('many'),
+    bays: Array.from({ length: 45 }, (_, k) => newWallBay(`W${k + 1}`, `wall ${k + 1}`)),
+  };
+  const rename = { kind: 'name project', name: 'another' } as const;
+
+  async function opened() {
+    const window = begun();
+    window.asked[0]?.answer();
+    await settle();
+    window.actions.replaceProject(many, { name: 'many', token: null, saved: true });
+    await settle();
+    return window;
+  }
+
+  it('are shared out, tell how far they are, and then have their figures', async () => {
+    const { store, pools } = await opened();
+    expect(pools.given[0]?.bays).toHaveLength(45);
+    pools.given[0]?.progress(9);
+    expect(store.getState().assessing.progress).toEqual({ done: 9, of: 45 });
+    pools.given[0]?.finish('done');
+    await settle();
+    const { assessing } = store.getState();
+    expect(assessing).toMatchObject({ workingSince: null, progress: null, stopped: false });
+    expect(assessing.base?.project).toBe(many);
+    expect(assessing.base?.assessment.diagonals.size).toBe(
+      assess(many, catalogues, 'by the marks').diagonals.size,
+    );
+  });
+
+  it('have their figures even when every worker of the pool is lost', async () => {
+    const { store, pools } = await opened();
+    pools.given[0]?.finish('lost');
+    await settle();
+    expect(store.getState().assessing.base?.project).toBe(many);
+  });
+
+  it('can be left off: what is remembered stays, nothing is begun by itself, and the work is taken up again when asked', async () => {
+    const { store, actions, assessor, pools, ended } = await opened();
+    assessor.stop();
+    await settle();
+    expect(store.getState().assessing).toMatchObject({
+      stopped: true,
+      workingSince: null,
+      progress: null,
+      base: null,
+    });
+    expect([pools.ended(), ended()]).toEqual([1, 0]);
+    actions.edit(rename);
+    await settle();
+    expect(pools.given).toHaveLength(1);
+    expect(isUpToDate(store.getState())).toBe(false);
+    assessor.retry();
+    await settle();
+    expect(pools.given).toHaveLength(2);
+    pools.given[1]?.finish('done');
+    await settle();
+    expect(store.getState().assessing).toMatchObject({ stopped: false, workingSince: null });
+    expect(isUpToDate(store.getState())).toBe(true);
+  });
+
+  it('are left at once for a later project, whose figures come', async () => {
+    const { store, actions, pools } = await opened();
+    actions.edit(rename);
+    await settle();
+    expect(pools.ended()).toBe(1);
+    expect(pools.given).toHaveLength(2);
+    pools.given[1]?.finish('done');
+    await settle();
+    expect(store.getState().assessing.base?.project).toBe(presentProject(store.getState()));
+  });
+
+  it('can be left off while the one worker is busy, which ends it; another project begins afresh', async () => {
+    const { store, actions, assessor, asked, ended } = begun();
+    assessor.stop();
+    expect([ended(), store.getState().assessing.stopped]).toEqual([1, true]);
+    actions.replaceProject(shed, { name: 'shed', token: null, saved: true });
+    await settle();
+    expect(asked).toHaveLength(2);
+    expect(store.getState().assessing.stopped).toBe(false);
   });
 });

@@ -30,6 +30,8 @@ function begun() {
       base: { project: assessment.project, assessment, took: 1 },
       tried: null,
       workingSince: null,
+      progress: null,
+      stopped: false,
       failure: null,
     },
   }));
