@@ -2,7 +2,15 @@
  * Shapes other than a single angle that can be a diagonal. mm. In the section plane y runs in the plane of the bay and x out of it; the origin is the corner
  * where both are least, as the heel is of an angle.
  */
-import type { AngleOutline } from './model.ts';
+
+/** Outside dimensions of one angle of a pair. */
+export interface AngleSizes {
+  readonly longLeg: number;
+  readonly shortLeg: number;
+  readonly thickness: number;
+  readonly rootRadius: number;
+  readonly toeRadius: number;
+}
 
 export type BarShape =
   | { readonly kind: 'flat'; readonly width: number; readonly thickness: number }
@@ -27,9 +35,9 @@ export type BarShape =
       readonly flange: number;
     }
   /** A leg of each against either face of the gusset. */
-  | { readonly kind: 'angles back to back'; readonly angle: AngleOutline; readonly gap: number }
+  | { readonly kind: 'angles back to back'; readonly angle: AngleSizes; readonly gap: number }
   /** Heel to heel across the gusset. */
-  | { readonly kind: 'starred angles'; readonly angle: AngleOutline; readonly gap: number };
+  | { readonly kind: 'starred angles'; readonly angle: AngleSizes; readonly gap: number };
 
 /** Extent out of the plane and in it, mm. */
 export function extentOf(shape: BarShape): readonly [number, number] {
