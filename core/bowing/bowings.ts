@@ -42,13 +42,15 @@ export interface BayBowing {
 export function bayBowings(input: BowingInput, layout: BayLayout, bay: Bay): BayBowings {
   const prepared = bayBowing(input, layout, bay);
   const bowings = new Map(
-    [...prepared.bars.values()].map((bar) => {
+    [...prepared.bars.values()].flatMap((bar) => {
       const bowing = bowingOf(bar, prepared.partners.get(bar.bar.id) ?? null, input.steel);
       const moving = prepared.mechanisms.some(({ bars }) => bars.includes(bar.bar.id));
       const unsupported = moving
         ? 'The bay can move without resistance, so the framing holds nothing.'
         : null;
-      return [bar.bar.id, { ...bowing, unsupported }] as const;
+      // A bar that its marks leave free to turn has no critical load; the finding says so.
+      if (!(bowing.real.N > 0 && bowing.rigid.N > 0)) return [];
+      return [[bar.bar.id, { ...bowing, unsupported }] as const];
     }),
   );
   return {

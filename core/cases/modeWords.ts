@@ -8,9 +8,7 @@ export function barInWords(mode: BucklingMode | null, solved: SolvedMode | null)
   if (!mode || !solved) return 'nothing presses it, so it does not buckle';
   const waves = `${mode.halfWaves} half-wave${mode.halfWaves === 1 ? '' : 's'}`;
   const symmetry =
-    mode.symmetry === 'unsymmetric'
-      ? 'neither symmetric nor antisymmetric about mid-length'
-      : `${mode.symmetry} about mid-length`;
+    mode.symmetry === 'unsymmetric' ? 'lopsided about mid-length' : `${mode.symmetry} about mid-length`;
   const where = `moves most at ${solved.largestAt.toFixed(3)} L, ${solved.largestDirection.toFixed(1)}° from x`;
   return [waves, bendingInWords(mode), symmetry, where, ...twistInWords(mode)].join('; ');
 }

@@ -183,6 +183,7 @@ function withJoin(project: Project, id: string, join: Join | null): Project {
 
 /** A bay in which nothing is said of any crossing's forces has no entry for them at all, as one that never had. */
 function withTensionShare(bay: Bay, crossing: string, share: number | null): Bay {
+  if (share === null && bay.tensionShares?.[crossing] === undefined) return bay;
   const { tensionShares = {}, ...rest } = bay;
   const shares = withEntry(tensionShares, crossing, share);
   return Object.keys(shares).length === 0 ? rest : { ...rest, tensionShares: shares };
@@ -193,6 +194,8 @@ function withEntry<T>(
   key: string,
   value: T | null,
 ): Readonly<Record<string, T>> {
+  // No bar or crossing is called so, and no file can hold it.
+  if (key === '__proto__') return entries;
   if (value !== null) return { ...entries, [key]: value };
   const { [key]: _gone, ...rest } = entries;
   return rest;

@@ -12,5 +12,5 @@ export function modeInWords(mode: BucklingMode): string {
       : v < 0.5
         ? 'about u alone'
         : `${v.toFixed(0)} % of the bending about v, the rest about u`;
-  return `${waves}, ${about}, ${mode.symmetry === 'unsymmetric' ? 'neither symmetric nor antisymmetric' : mode.symmetry} about the middle`;
+  return `${waves}, ${about}, ${mode.symmetry === 'unsymmetric' ? 'lopsided' : mode.symmetry} about the middle`;
 }

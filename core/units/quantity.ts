@@ -1,6 +1,7 @@
 /** Quantities as they are shown. Everything comes in mm and kg; the unit system is always given, never kept. */
 import { feetAndInches, tapeInches } from './feetAndInches.ts';
 import { grouped } from './figures.ts';
+import { parseLength } from './parseLength.ts';
 import { KG_PER_METRE_PER_POUND_FOOT, KG_PER_POUND, MM_PER_INCH, type UnitSystem } from './unitSystem.ts';
 
 // What is typed is read in the room that shows it, and callers want both from one place.
@@ -12,15 +13,19 @@ export type QuantityStyle = 'full' | 'bare';
 /**
  * full: `7 324 mm`, `24'-0 3/8"` (to 1/16 in). bare: the same without "mm".
  * spoken: `7.32 m`, `24'-0 3/8"`: for sentences. small: thicknesses, bolts, packers: `4.5 mm`, `3/8"` or `0.472"` where no sixteenth is meant.
+ * tape: set-backs, gussets, gauges in fields: `350 mm`, `13 3/4"` in inches alone, to the nearest sixteenth.
  */
-export type LengthStyle = QuantityStyle | 'spoken' | 'small';
+export type LengthStyle = QuantityStyle | 'spoken' | 'small' | 'tape';
 
 const SIXTEENTHS = 16;
 /** A size this near to a sixteenth of an inch, in mm, is taken as that sixteenth: less than any rolling tolerance. */
 const SAME_ON_TAPE = 0.1;
 
 export function showLength(mm: number, units: UnitSystem, style: LengthStyle = 'full'): string {
-  if (units === 'us') return style === 'small' ? smallInches(mm) : feetAndInches(mm, SIXTEENTHS);
+  if (units === 'us') {
+    if (style === 'tape') return `${mm < 0 ? '−' : ''}${tapeInches(Math.abs(mm) / MM_PER_INCH, SIXTEENTHS)}"`;
+    return style === 'small' ? smallInches(mm) : feetAndInches(mm, SIXTEENTHS);
+  }
   switch (style) {
     case 'full':
       return `${grouped(mm, 0)} mm`;
@@ -29,6 +34,7 @@ export function showLength(mm: number, units: UnitSystem, style: LengthStyle = '
     case 'spoken':
       return `${grouped(mm / 1000, 2)} m`;
     case 'small':
+    case 'tape':
       return `${grouped(mm, Math.abs(mm - Math.round(mm)) < 0.05 ? 0 : 1)} mm`;
     default:
       return style satisfies never;
@@ -77,6 +83,16 @@ export function showSlenderness(slenderness: number, limit: number | null = null
   }
   return grouped(Math.ceil(slenderness * 1000) / 1000, 3);
 }
+
+/** The exact length in mm, where what is shown in inches is only near it; null where it is the same. */
+export function exactBehind(mm: number, shown: string): string | null {
+  const read = parseLength(shown, 'us');
+  if (read.ok && Math.abs(read.mm - mm) < SAME_AS_SHOWN) return null;
+  return `${grouped(mm, Math.abs(mm - Math.round(mm)) < 0.005 ? 0 : 2)} mm exactly`;
+}
+
+/** Rounding of a length that was typed in inches, mm. */
+const SAME_AS_SHOWN = 0.005;
 
 /** A sixteenth where the size is one, otherwise thousandths of an inch. */
 function smallInches(mm: number): string {

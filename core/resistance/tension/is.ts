@@ -172,7 +172,8 @@ function oneLeg(question: TensionQuestion, end: ResistingEnd, working: Working):
     (w - t / 2) * t,
     'area',
   );
-  const raw = 1.4 - 0.076 * (w / t) * (fy / fu) * (bs / Lc);
+  // A weld of less than a millimetre is none, and would divide by nothing.
+  const raw = 1.4 - 0.076 * (w / t) * (fy / fu) * (bs / Math.max(Lc, 1));
   working.step('shear lag, before its bounds', 'β_0', '1.4 − 0.076 (w/t)(f_y/f_u)(b_s/L_c)', raw, 'factor');
   const most = working.step(
     'at most',

@@ -60,10 +60,12 @@ describe('wind on the gables of the example', () => {
 /** Where something stands once the view has come to rest. */
 async function atRest(what: Locator): Promise<{ x: number; y: number; width: number; height: number }> {
   let before = await what.boundingBox();
+  let still = 0;
   for (let tries = 0; tries < 40; tries++) {
-    await page.waitForTimeout(120);
+    await page.waitForTimeout(150);
     const now = await what.boundingBox();
-    if (before && now && Math.hypot(now.x - before.x, now.y - before.y) < 0.5) return now;
+    still = before && now && Math.hypot(now.x - before.x, now.y - before.y) < 0.5 ? still + 1 : 0;
+    if (now && still >= 5) return now;
     before = now;
   }
   throw new Error('the view does not come to rest');
@@ -108,6 +110,8 @@ describe('what acts', () => {
     await page.keyboard.press('1');
     await page.keyboard.press('f');
     const node = page.getByRole('button', { name: /^Force on left head of tier 1 in W/ });
+    // The view comes to rest only once its figures are there.
+    await node.hover();
     const box = await atRest(node);
     const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
     await page.mouse.move(x, y);
