@@ -1,4 +1,4 @@
-import type { Locator, Page } from 'playwright-core';
+import type { Page } from 'playwright-core';
 import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { choose, type OpenedWindow, WindowStand } from './openedWindow.ts';
 
@@ -57,20 +57,6 @@ describe('wind on the gables of the example', () => {
   });
 });
 
-/** Where something stands once the view has come to rest. */
-async function atRest(what: Locator): Promise<{ x: number; y: number; width: number; height: number }> {
-  let before = await what.boundingBox();
-  let still = 0;
-  for (let tries = 0; tries < 40; tries++) {
-    await page.waitForTimeout(150);
-    const now = await what.boundingBox();
-    still = before && now && Math.hypot(now.x - before.x, now.y - before.y) < 0.5 ? still + 1 : 0;
-    if (now && still >= 5) return now;
-    before = now;
-  }
-  throw new Error('the view does not come to rest');
-}
-
 describe('what acts', () => {
   it('begins with an empty project that says how, and gets wind and the practice’s combinations', async () => {
     await page.getByRole('menuitem', { name: 'File', exact: true }).click();
@@ -103,22 +89,5 @@ describe('what acts', () => {
     await page.getByRole('button', { name: 'Force on left head of tier 1 in W: 10.0 kN across' }).waitFor();
     await page.keyboard.press('Control+z');
     await page.getByRole('button', { name: 'Force on left head of tier 1 in W', exact: true }).waitFor();
-  });
-
-  it('takes an arrow that is dragged from a node', async () => {
-    await choose(page, 'D1');
-    await page.keyboard.press('1');
-    await page.keyboard.press('f');
-    const node = page.getByRole('button', { name: /^Force on left head of tier 1 in W/ });
-    // The view comes to rest only once its figures are there.
-    await node.hover();
-    const box = await atRest(node);
-    const [x, y] = [box.x + box.width / 2, box.y + box.height / 2];
-    await page.mouse.move(x, y);
-    await page.mouse.down();
-    await page.mouse.move(x + 60, y + 4, { steps: 5 });
-    await page.mouse.up();
-    // 3 px a kN along the bay.
-    await page.getByRole('button', { name: 'Force on left head of tier 1 in W: 20.0 kN across' }).waitFor();
   });
 });
