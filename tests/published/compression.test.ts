@@ -4,9 +4,9 @@
  */
 import { EigenvalueDecomposition, Matrix } from 'ml-matrix';
 import { describe, expect, it } from 'vitest';
+import { shearCentreInPrincipal } from '../../core/resistance/compression/bowingWithTwist.ts';
 import { coupledStress } from '../../core/resistance/compression/coupledStress.ts';
 import { exponential, perry } from '../../core/resistance/compression/curves.ts';
-import { shearCentreInPrincipal } from '../../core/resistance/compression/elasticStress.ts';
 import type { ResistingSection } from '../../core/resistance/model.ts';
 import { angleProperties } from '../../core/section/angleProperties.ts';
 import { publishedProperties } from '../../core/section/publishedProperties.ts';

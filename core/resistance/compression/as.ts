@@ -9,6 +9,8 @@ import type { CompressionPack } from './pack.ts';
 const PHI = 0.9;
 /** Table 6.2.4: plate elements of hot-rolled sections held along one edge. */
 const YIELD_LIMIT = 16;
+/** k_f from which on nothing is lost, rounding apart. */
+const FULL = 1 - 1e-9;
 
 /** 6.2.2: what slender legs leave of the section. */
 function formFactor({ section, steel }: CompressionQuestion, working: Working): number {
@@ -39,10 +41,16 @@ function formFactor({ section, steel }: CompressionQuestion, working: Working): 
   );
 }
 
+/** α_b 1 below k_f = 1 is less sure than the rest. */
+const slenderRemark = (question: CompressionQuestion): string | null =>
+  formFactor(question, new Working()) < FULL
+    ? 'A leg is beyond the yield limit, so k_f is below 1: α_b is then 1.0, from memory, verify.'
+    : null;
+
 /** Table 6.3.3: 0.5 for angles, tees, channels and what is not named, with k_f = 1; 1.0 below (verify). Tubes as cold formed, −0.5. */
 function constantOf(shape: SectionShape, kf: number): number {
   if (shape === 'round tube' || shape === 'square tube') return -0.5;
-  return kf < 1 - 1e-9 ? 1 : 0.5;
+  return kf < FULL ? 1 : 0.5;
 }
 
 export const AS: CompressionPack = {
@@ -56,7 +64,7 @@ export const AS: CompressionPack = {
       square: { most: ({ fy }) => 40 * Math.sqrt(250 / fy), says: '40 √(250/f_y)' },
     },
     twistLeftOut: () => null,
-    remark: () => null,
+    remark: slenderRemark,
     strength: (question, Fe, working) => {
       const { section, steel } = question;
       const fy = working.given('yield stress', 'f_y', steel.fy, 'stress');

@@ -23,6 +23,10 @@ const PACKS: Readonly<Record<PracticeId, CompressionPack>> = {
 export const ECCENTRICITY_LEFT_OUT =
   'The load is taken through the centroid: eccentricity at the ends is left out, and a beam-column check is still due.';
 
+/** Note where a leg axis with its own longer length governs with twist. */
+const ALONG_LEG =
+  'It bows about an axis along a leg, over a longer length of its own, and twists: the standard does not speak of that, and its formula for an axis of symmetry is used.';
+
 /**
  * What a bar resists in compression, N: through its centroid by its critical load as found, through its centroid over its unbraced lengths,
  * and, for a single angle, by the practice's rule for one leg. Rules that do not speak of what is there give no resistance and say why.
@@ -64,7 +68,7 @@ function byLengths(question: CompressionQuestion, column: ColumnRule): Resistanc
   const { area } = question.section.properties;
   requireStoutWall(question, column.walls, working);
   working.given('area', 'A', area, 'area');
-  const { Fe, twists } = elasticStress(question, twistLeftOut(question, column), working);
+  const { Fe, twists, beyondStandards } = elasticStress(question, twistLeftOut(question, column), working);
   working.step('elastic critical load', 'N_cr', 'A F_e', area * Fe, 'force');
   const rule = twists ? column.twist : column;
   return resistance(
@@ -75,8 +79,8 @@ function byLengths(question: CompressionQuestion, column: ColumnRule): Resistanc
       resistance: column.strength(question, Fe, working),
       standard: column.standard,
       clause: rule.clause,
-      confidence: hasRemark(question, column) ? 'from memory, verify' : rule.confidence,
-      note: noteOf(question, column),
+      confidence: beyondStandards || hasRemark(question, column) ? 'from memory, verify' : rule.confidence,
+      note: noteOf(question, column, beyondStandards ? ALONG_LEG : null),
     },
     working,
   );
@@ -105,11 +109,16 @@ function twistLeftOut(question: CompressionQuestion, column: ColumnRule): string
 const hasRemark = (question: CompressionQuestion, column: ColumnRule): boolean =>
   column.remark(question) !== null || question.section.shape !== 'angle';
 
-function noteOf(question: CompressionQuestion, column: ColumnRule): string | null {
+function noteOf(
+  question: CompressionQuestion,
+  column: ColumnRule,
+  ofLengths: string | null = null,
+): string | null {
   const { section, loadedAcross } = question;
   const notes = [
     isEccentric(question) ? ECCENTRICITY_LEFT_OUT : null,
     loadedAcross ? 'A load acts across the bar: a check with bending is still due.' : null,
+    ofLengths,
     column.remark(question),
     shapeNote(section.shape),
   ];

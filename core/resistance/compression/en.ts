@@ -57,6 +57,13 @@ function effectiveArea({ section, steel }: CompressionQuestion, working: Working
   return working.step('effective area', 'A_eff', 'A − Σ(1 − ρ) b t', gross - lost, 'area');
 }
 
+/** What class 4 takes off is less sure than the rest of 6.3.1. */
+function class4Remark(question: CompressionQuestion): string | null {
+  return effectiveArea(question, new Working()) < question.section.properties.area
+    ? 'The legs are class 4: EN 1993-1-5 4.4 takes width off, with the whole leg as its width, from memory, verify; that the centroid moves by it is left out.'
+    : null;
+}
+
 function strengthAt(question: CompressionQuestion, lambda: number, area: number, working: Working): number {
   const { section, steel, options } = question;
   const curve = CURVES[section.shape];
@@ -80,6 +87,8 @@ const symbolOf = ({ section }: CompressionQuestion, area: number): string =>
 const TAKEN_FOR_GRANTED =
   'The rule takes for granted that what the gussets sit on keeps the ends from turning. Eccentricity is then left out.';
 
+const WHOLE_ALONG_LEGS = `${CROSSED}; so the whole length is taken about the axes along the legs, and about the minor axis the length between holds without relief.`;
+
 export const EN: CompressionPack = {
   column: {
     standard: 'EN 1993-1-1',
@@ -91,7 +100,7 @@ export const EN: CompressionPack = {
       square: { most: ({ fy }) => 42 * Math.sqrt(235 / fy), says: '42 ε' },
     },
     twistLeftOut: () => null,
-    remark: () => null,
+    remark: class4Remark,
     strength: (question, Fe, working) => {
       const { section, steel } = question;
       const fy = working.given('yield stress', 'f_y', steel.fy, 'stress');
@@ -171,16 +180,16 @@ export const EN: CompressionPack = {
       Math.max(v, x, y),
       'ratio',
     );
+    const slender = class4Remark(question);
+    const notes = [TAKEN_FOR_GRANTED, joinedBetween ? WHOLE_ALONG_LEGS : null, slender];
     return resistance(
       {
         ...ONE_LEG,
         resistance: strengthAt(question, lambda, area, working),
         standard: 'EN 1993-1-1',
         clause: 'BB.1.2, (BB.1), 6.3.1',
-        confidence: 'from memory, sure',
-        note: joinedBetween
-          ? `${TAKEN_FOR_GRANTED} ${CROSSED}; so the whole length is taken about the axes along the legs, and about the minor axis the length between holds without relief.`
-          : TAKEN_FOR_GRANTED,
+        confidence: slender === null ? 'from memory, sure' : 'from memory, verify',
+        note: notes.filter((note) => note !== null).join(' '),
       },
       working,
     );

@@ -154,10 +154,11 @@ export const IS: CompressionPack = {
       'ratio',
     );
     const lambda = equivalent(question, vv, phi, working);
+    const slender = slenderRemark(question);
     const notes = [
       'Between a fixed and a hinged gusset the standard interpolates.',
       question.joinedBetween ? `${CROSSED}; so the length is that between holds, without relief.` : null,
-      slenderRemark(question),
+      slender,
     ];
     return resistance(
       {
@@ -165,7 +166,7 @@ export const IS: CompressionPack = {
         resistance: strengthAt(question, lambda, 'λ_e', working),
         standard: 'IS 800',
         clause: '7.5.1.2, Table 12',
-        confidence: 'from memory, sure',
+        confidence: slender === null ? 'from memory, sure' : 'from memory, verify',
         note: notes.filter((note) => note !== null).join(' '),
       },
       working,

@@ -53,6 +53,12 @@ describe('what an angle by one leg is judged by', () => {
     expect(judged(compressed('as4100', section, 2500, { fy: 320 }))?.kind).toBe(LENGTHS);
   });
 
+  it('leaves out a figure whose conditions are not all met', () => {
+    const all = compressionResistances(compressed('csaS16', section, 2500, { fy: 350 }));
+    const broken = all.map((each) => (each.kind === ONE_LEG ? { ...each, applies: false } : each));
+    expect(governingCompression(broken)?.kind).toBe(LENGTHS);
+  });
+
   it('is nothing where nothing gives a figure', () => {
     const tee = { ...section, shape: 'tee', properties: { ...section.properties, J: 0 } } as const;
     expect(judged(compressed('csaS16', tee, 2500, { fy: 350 }))).toBeNull();
