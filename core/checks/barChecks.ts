@@ -13,12 +13,13 @@ const NO_DEMANDS: Demands = { tension: null, compression: null, slackIn: [] };
 /** All that a diagonal and its ends resist, against what acts. */
 export function barChecks(input: CheckInput, checked: CheckedBar): BarChecks {
   const { practice, forces } = input;
-  const { bar, angle, restraint, bowing } = checked;
+  const { bar, angle, restraint, turns, bowing } = checked;
   const { stock } = angle;
   const demands = forces ? demandsOn(forces, bar.id) : NO_DEMANDS;
   const blank = { bar: bar.id, steel: null, ...demands, checks: [], governing: null, compressionBy: null };
   const unknown = (why: string): BarChecks => ({ ...blank, status: 'unknown', unknown: why });
   if (!stock) return unknown(`${angle.spec.section} is in no stock list.`);
+  if (turns) return unknown(`${bar.mark} turns without resistance, its ends being marked as they are.`);
   if (!restraint) return unknown(`The ends of ${bar.mark} leave no steel between them.`);
   const steel = steelOf(input, angle.spec.grade, stock.outline.thickness);
   if (!steel)

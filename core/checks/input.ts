@@ -4,6 +4,7 @@ import type { AngleBar, Bar } from '../layout/model.ts';
 import type { Practice } from '../practice/model.ts';
 import type { Project } from '../project/model.ts';
 import type { Restraint } from '../restraint/model.ts';
+import type { FreeWays } from '../restraint/movable.ts';
 
 export interface CheckInput {
   readonly project: Project;
@@ -15,5 +16,7 @@ export interface CheckedBar {
   readonly bar: Bar;
   readonly angle: AngleBar;
   readonly restraint: Restraint | null;
+  /** The ways in which it turns freely; null for a bar that is kept in place. */
+  readonly turns: FreeWays | null;
   readonly bowing: Bowing | null;
 }

@@ -1,24 +1,14 @@
 /** The words that every document and screen uses for joins, statuses and reasons. Chosen here once. */
 import type { CatalogueId } from '../catalogue/model.ts';
 import type { Crossing } from '../layout/model.ts';
-import type { Join, JoinKind } from '../project/model.ts';
+import { JOIN_NAMES } from '../project/joinNames.ts';
+import type { Join } from '../project/model.ts';
 import type { Claim, HoldDirection, HoldReason, TrailStep } from '../restraint/model.ts';
 
 /** A designation as it is printed: "70×70×6" for "70x70x6". */
 export function designationText(designation: string): string {
   return designation.replace(/(?<=\d)x(?=\d)/gi, '×');
 }
-
-/** What a join is called. */
-export const JOIN_NAMES: Readonly<Record<JoinKind, string>> = {
-  none: 'not joined',
-  bolted: 'bolted through',
-  packed: 'bolted with packer',
-  cut: 'one bar cut and plated',
-  welded: 'welded',
-  purlin: 'bolted to purlin',
-  hung: 'hung, sag only',
-};
 
 /** The same for what a claim stands on, which may also be an end of the bar or another bar that ends on it. */
 export function joinKindName(join: Claim['join']): string {

@@ -43,9 +43,12 @@ function serviceFinding(subject: FindingSubject, group: readonly Judged[]): Find
     bars: group.map((each) => each.bar.id),
     crossing: null,
     title: `${marksInWords(group)} ${isAre(group)} too slender${way}`,
-    detail: governing
-      ? `${showLength(governing.length, units, 'spoken')} over a radius of ${showRadius(governing.radius, units)} gives ${showSlenderness(governing.slenderness, limit.limit)}; the limit is ${limit.limit} (${limit.clause}).`
-      : '',
+    detail:
+      inService?.bound != null
+        ? `Worked out exactly, with its holds rigid, it reads ${showSlenderness(inService.slenderness, limit.limit)} (the rule's safe bound is ${showSlenderness(inService.bound, limit.limit)}); the limit is ${limit.limit} (${limit.clause}).`
+        : governing
+          ? `${showLength(governing.length, units, 'spoken')} over a radius of ${showRadius(governing.radius, units)} gives ${showSlenderness(governing.slenderness, limit.limit)}; the limit is ${limit.limit} (${limit.clause}).`
+          : '',
     value: inService?.slenderness ?? null,
     limit: limit.limit,
     quantity: 'slenderness',

@@ -7,6 +7,7 @@ import {
   withLoadCase,
 } from './actionEdits.ts';
 import type { Edit } from './edit.ts';
+import { JOIN_NAMES } from './joinNames.ts';
 import type { BarMark, Bay, Join, Line, LineHolder, Project, Recipe } from './model.ts';
 import type { ProjectProblem } from './problem.ts';
 import { readProjectData } from './readProject.ts';
@@ -107,7 +108,7 @@ export function editLabel(edit: Edit): string {
     case 'bars':
       return barsLabel(edit);
     case 'join':
-      return edit.join === null ? 'Take the mark away' : `Mark the crossing: ${JOIN_WORDS[edit.join.kind]}`;
+      return edit.join === null ? 'Take the mark away' : `Mark the crossing: ${JOIN_NAMES[edit.join.kind]}`;
     case 'tension share':
       return `Set the forces at a crossing of ${edit.bay}`;
     case 'line holder':
@@ -134,17 +135,6 @@ function barsLabel({ bars, change, clear = [] }: Extract<Edit, { readonly kind: 
   if (another !== undefined || (only !== 'endI' && only !== 'endJ')) return `Change ${named}`;
   return `Change end ${only === 'endI' ? 'i' : 'j'} of ${named}`;
 }
-
-/** How each join is called on screens and in documents. */
-export const JOIN_WORDS: Readonly<Record<Join['kind'], string>> = {
-  none: 'not joined',
-  bolted: 'bolted through',
-  packed: 'bolted with packer',
-  cut: 'one bar cut and plated',
-  welded: 'welded',
-  purlin: 'bolted to purlin',
-  hung: 'hung, sag only',
-};
 
 function withBay(project: Project, id: string, change: (bay: Bay) => Bay): Project {
   if (!project.bays.some((bay) => bay.id === id)) return project;

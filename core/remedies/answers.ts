@@ -31,6 +31,7 @@ export function proposalsFor(
   switch (finding.kind) {
     case 'too slender in service':
       return [
+        ...holdTheEnds(assessment, finding),
         ...joinTheCrossings(assessment, finding.bars),
         ...boltToLines(assessment, finding.bars),
         ...tieLinesOf(assessment, finding.bars),

@@ -1,7 +1,7 @@
 /** What is worked out for one bar when someone looks closer: too much to do for every bar at every edit. */
 import type { CurvePoint, PositionPoint } from '../bowing/curves.ts';
 import type { NeededStiffness } from '../bowing/needs.ts';
-import type { BarMovement } from '../frame/pushTest.ts';
+import type { BarMovement } from '../frame/pushing.ts';
 import type { Vec2, Vec3 } from '../geometry/vector.ts';
 import type { BarId, CrossingId } from '../layout/model.ts';
 import type { RestraintDemand } from '../practice/restraintDemand.ts';

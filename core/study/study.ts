@@ -6,7 +6,7 @@ import { loadAgainstPartner, loadAgainstPosition } from '../bowing/curves.ts';
 import { neededStiffness } from '../bowing/needs.ts';
 import { bayCriticalLoad } from '../frame/bayCriticalLoad.ts';
 import { bayFrame } from '../frame/bayFrame.ts';
-import { type BarMovement, evenPlaces, type PushTest, pushTest } from '../frame/pushTest.ts';
+import { type BarMovement, evenPlaces, type PushTest, pushTest } from '../frame/pushing.ts';
 import type { Vec2, Vec3 } from '../geometry/vector.ts';
 import type { BarId, BayLayout, Placement } from '../layout/model.ts';
 import { restraintDemands } from '../practice/restraintDemand.ts';

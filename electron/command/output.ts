@@ -1,8 +1,8 @@
 import { stat } from 'node:fs/promises';
+import { replaceFile } from '../files/replaceFile.ts';
 import { systemWords } from './projectFile.ts';
 import type { Terminal } from './terminal.ts';
 import type { Attempt } from './trouble.ts';
-import { writeWholeFile } from './wholeFile.ts';
 
 /**
  * Writes a result to the file of -o, all or nothing, or to the terminal when there is none.
@@ -22,7 +22,7 @@ export async function deliver(
   if (existing === 'refuse' && (await isThere(file)))
     return { ok: false, trouble: { kind: 'would overwrite', file } };
   try {
-    await writeWholeFile(file, text);
+    await replaceFile(file, text);
   } catch (error) {
     return { ok: false, trouble: { kind: 'unwritable', file, why: systemWords(error) } };
   }

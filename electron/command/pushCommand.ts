@@ -45,7 +45,8 @@ export function addPushCommand(program: Command, ending: Ending): void {
       const test = pushedAt(assessment, bar.value, options.at);
       if (!test.ok) return ending.trouble(test.trouble);
       const { format, out } = options;
-      const text = format === 'json' ? jsonText(test.value) : pushTable(test.value);
+      const text =
+        format === 'json' ? jsonText(test.value) : pushTable(test.value, assessment.project.settings.units);
       const delivered = await deliver(text, out, ending.terminal, 'replace');
       if (!delivered.ok) return ending.trouble(delivered.trouble);
     });

@@ -1,17 +1,22 @@
 import { textTable } from '../../core/documents/textTable.ts';
+import type { UnitSystem } from '../../core/project/model.ts';
 import { grouped } from '../../core/units/figures.ts';
+import { showStiffness } from '../../core/units/loads.ts';
+import { showLength } from '../../core/units/quantity.ts';
+import { unitNames } from '../../core/units/unitSystem.ts';
 import type { Pushed, PushedStiffness } from './pushed.ts';
 
-export function pushTable(test: Pushed): string {
+/** A push test as a table, in the units of the project: N/mm or kip/in, which stands over it. */
+export function pushTable(test: Pushed, units: UnitSystem): string {
   const { mark, bay, section, length, at, inPlace, offered } = test;
-  const head = `${mark} of ${bay}, ${section}, ${grouped(length, 0)} mm; pushed ${grouped(at, 0)} mm from end A`;
+  const head = `${mark} of ${bay}, ${section}, ${showLength(length, units)}; pushed ${showLength(at, units)} from end A`;
   const rows = [
-    ...(inPlace ? [rowOf('bar in place', inPlace)] : []),
-    ...(offered ? [rowOf('offered by the rest', offered)] : []),
+    ...(inPlace ? [rowOf('bar in place', inPlace, units)] : []),
+    ...(offered ? [rowOf('offered by the rest', offered, units)] : []),
   ];
   const table = textTable(
     [
-      { head: 'N/mm', align: 'left' },
+      { head: unitNames(units).stiffness, align: 'left' },
       { head: 'in plane, across', align: 'right' },
       { head: 'out of plane', align: 'right' },
       { head: 'stiffest', align: 'right' },
@@ -28,8 +33,8 @@ export function pushTable(test: Pushed): string {
   ].join('\n');
 }
 
-function rowOf(name: string, s: PushedStiffness): readonly string[] {
-  const figure = (value: number): string => grouped(value, value < 100 ? 2 : 0);
+function rowOf(name: string, s: PushedStiffness, units: UnitSystem): readonly string[] {
+  const figure = (value: number): string => showStiffness(value, units, 'bare');
   return [
     name,
     figure(s.inPlane),

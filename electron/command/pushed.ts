@@ -1,7 +1,7 @@
 import type { Assessment } from '../../core/assessment.ts';
 import { planeWays, stiffnessAlong } from '../../core/bowing/barProblems.ts';
 import type { StiffnessEllipse } from '../../core/frame/push.ts';
-import type { PushTest } from '../../core/frame/pushTest.ts';
+import type { PushTest } from '../../core/frame/pushing.ts';
 import { degreesOf } from '../../core/geometry/vector.ts';
 import type { DiagonalBar } from './diagonalNamed.ts';
 

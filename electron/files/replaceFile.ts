@@ -1,4 +1,4 @@
-import { readFile } from 'node:fs/promises';
+import { readFile, stat, writeFile } from 'node:fs/promises';
 import writeFileAtomic from 'write-file-atomic';
 import { errorCode } from './fileProblem.ts';
 
@@ -9,10 +9,13 @@ export function previousCopyOf(path: string): string {
 
 /**
  * Puts new bytes in place of what a file holds, all or nothing: a sibling is written, synced and takes the file's
- * name, so a power cut leaves either the old file or the new one, never half of one.
+ * name, so a power cut leaves either the old file or the new one, never half of one. Links are followed and the rights of
+ * a file that is there are kept; what is no plain file (a pipe, a terminal) is written to as it is.
  */
 export async function replaceFile(path: string, content: string | Uint8Array): Promise<void> {
-  await writeFileAtomic(path, typeof content === 'string' ? content : Buffer.from(content));
+  const there = await stat(path).catch(() => null);
+  if (there !== null && !there.isFile()) await writeFile(path, content);
+  else await writeFileAtomic(path, typeof content === 'string' ? content : Buffer.from(content));
 }
 
 /** As `replaceFile`, and keeps what the file held before as "<file>.previous". */

@@ -1,7 +1,7 @@
 /** What the workers do for the window. Everything that crosses is plain data. */
 import type { Assessment } from '../../core/assessment.ts';
 import type { CatalogueId, OwnAngle } from '../../core/catalogue/model.ts';
-import type { PushTest } from '../../core/frame/pushTest.ts';
+import type { PushTest } from '../../core/frame/pushing.ts';
 import type { BarId, CrossingId } from '../../core/layout/model.ts';
 import type { Join, Project } from '../../core/project/model.ts';
 import type { Remedy } from '../../core/remedies/model.ts';

@@ -1,6 +1,6 @@
 import type { ReactNode } from 'react';
 import type { Assessment } from '../../core/assessment.ts';
-import type { BarMovement } from '../../core/frame/pushTest.ts';
+import type { BarMovement } from '../../core/frame/pushing.ts';
 import type { Vec3 } from '../../core/geometry/vector.ts';
 import type { BarId, CrossingId } from '../../core/layout/model.ts';
 import type { UnitSystem } from '../../core/project/model.ts';

@@ -1,5 +1,5 @@
 /** The answers about the chosen bar, as they are shown. */
-import type { PushTest } from '../../core/frame/pushTest.ts';
+import type { PushTest } from '../../core/frame/pushing.ts';
 import type { BarStudy, Reliance } from '../../core/study/model.ts';
 import { shownAssessed } from './shown.ts';
 import type { WindowState } from './windowState.ts';
@@ -25,9 +25,12 @@ export function shownPush(state: WindowState): PushTest | null {
 }
 
 /** As `shownStudy`, but while figures are worked out anew the last ones of the same bar, so that pictures do not flicker. */
-export function latestStudy({ closer, selection }: WindowState): BarStudy | null {
-  const { study } = closer;
-  return study !== null && study.question.bar === selection.bar ? study.answer : null;
+export function latestStudy(state: WindowState): BarStudy | null {
+  const { study } = state.closer;
+  if (study === null || study.question.bar !== state.selection.bar) return null;
+  // A bar that has lost its figures meanwhile has no shape any more.
+  const assessed = shownAssessed(state)?.assessment.diagonals.get(study.question.bar);
+  return assessed?.restraint == null ? null : study.answer;
 }
 
 /** What the joins of the chosen bay are worth, in the project as it stands; while it is worked out anew, as it was. */

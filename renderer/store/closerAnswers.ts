@@ -1,5 +1,5 @@
 /** What is worked out of the chosen bar and its bay when someone looks closer; each answer says of what it is. */
-import type { PushTest } from '../../core/frame/pushTest.ts';
+import type { PushTest } from '../../core/frame/pushing.ts';
 import type { BarId } from '../../core/layout/model.ts';
 import type { Project } from '../../core/project/model.ts';
 import type { BarStudy, Reliance } from '../../core/study/model.ts';

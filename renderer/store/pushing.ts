@@ -1,7 +1,7 @@
 /** Where the chosen bar can be pushed, and with what. */
 import type { Assessment } from '../../core/assessment.ts';
 import { planeWays } from '../../core/bowing/barProblems.ts';
-import type { PushTest } from '../../core/frame/pushTest.ts';
+import type { PushTest } from '../../core/frame/pushing.ts';
 import type { Vec2 } from '../../core/geometry/vector.ts';
 import type { AngleBar, BarId } from '../../core/layout/model.ts';
 import type { Pushing, PushWay } from './push.ts';

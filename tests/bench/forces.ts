@@ -65,7 +65,8 @@ export function forces(): readonly Row[] {
   const input = { project: apart, practice, forces: assessment.forces };
   const diagonals = [...assessment.diagonals.values()].flatMap((each) => {
     const bar = layout.bars.get(each.bar);
-    return bar?.angle ? [{ bar, angle: bar.angle, restraint: each.restraint, bowing: each.bowing }] : [];
+    const { restraint, turns, bowing } = each;
+    return bar?.angle ? [{ bar, angle: bar.angle, restraint, turns, bowing }] : [];
   });
   const checks = timed(() => diagonals.map((each) => barChecks(input, each)), 3, 1);
 

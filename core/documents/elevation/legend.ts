@@ -1,5 +1,6 @@
+import { JOIN_NAMES } from '../../project/joinNames.ts';
 import { type Markup, markup } from '../markup.ts';
-import { JOIN_NAMES, STATUS_NAMES, UNMARKED } from '../words.ts';
+import { STATUS_NAMES, UNMARKED } from '../words.ts';
 import type { Elevation } from './elevation.ts';
 import { type JoinShape, joinGlyph } from './joinGlyph.ts';
 import { inlineSign, statusSign } from './signs.ts';

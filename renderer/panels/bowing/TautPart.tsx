@@ -48,7 +48,7 @@ export function TautPart({
         <h3 className="plot-title">Against the force in {other?.mark ?? 'a partner'}</h3>
         {choice}
         {crossing !== undefined && partner !== null && (
-          <fieldset className="taut-field" disabled={trying}>
+          <fieldset className="taut-field" disabled={trying || partner.shareFrom.kind === 'combination'}>
             <legend className="unseen">Force in {other?.mark}</legend>
             <span aria-hidden="true">T/C</span>
             <NumberField
@@ -101,6 +101,9 @@ export function TautPart({
             }}
             units={units}
           />
+          {partner.shareFrom.kind === 'combination' && (
+            <p className="bowing-note">T/C from the combination that is worst for {bar.mark}.</p>
+          )}
           {diagonal.bowing?.twist.governs === true && (
             <p className="bowing-note">
               By bowing alone; twist takes {grouped((1 - diagonal.bowing.twist.ratio) * 100, 1)} % more.

@@ -119,7 +119,7 @@ export function laneDrawing({
       pieces:
         lane === null
           ? [governingPiece(governing, read, along, limit)]
-          : piecesOf(lane, along, limit, claimedAt(lane, restraint, along)),
+          : piecesOf(lane, along, limit, ticksAt(lane, restraint, along)),
       endsStop: lane?.endsStop ?? [true, true],
       cuts: lane === null ? [] : cutsOf(lane, restraint, along),
       chips: chips.map((chip) => ({ ...chip, y: many ? top - CHIP_DEEP - 1 : top + LANE_DEEP + below + 3 })),
@@ -194,10 +194,10 @@ function piecesOf(
   });
 }
 
-/** Where dashed ticks stand in a lane: holds that were claimed and do not count. */
-function claimedAt(lane: Lane, restraint: Restraint, along: (at: number) => number): readonly number[] {
+/** Where ticks stand in a lane: its cuts, some of which lie within a piece that runs on to a free end, and holds that were claimed and do not count. */
+function ticksAt(lane: Lane, restraint: Restraint, along: (at: number) => number): readonly number[] {
   return cutsOf(lane, restraint, along)
-    .filter(({ claimed }) => claimed)
+    .filter(({ stops, claimed }) => stops || claimed)
     .map(({ x }) => x);
 }
 

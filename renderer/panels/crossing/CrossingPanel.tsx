@@ -1,6 +1,6 @@
-import type { JSX } from 'react';
-import { JOIN_NAMES } from '../../../core/documents/words.ts';
+import { type JSX, useRef } from 'react';
 import type { Crossing, CrossingId, Layout } from '../../../core/layout/model.ts';
+import { JOIN_NAMES } from '../../../core/project/joinNames.ts';
 import type { Join } from '../../../core/project/model.ts';
 import { showLength } from '../../../core/units/quantity.ts';
 import { IconButton } from '../../controls/IconButton.tsx';
@@ -10,6 +10,7 @@ import { shownAssessment, shownProject } from '../../store/shown.ts';
 import { CrossingPicture } from './CrossingPicture.tsx';
 import { JoinDetails } from './JoinDetails.tsx';
 import { JoinTable } from './JoinTable.tsx';
+import { usePanelFocus } from './usePanelFocus.ts';
 import { useReadings } from './useReadings.ts';
 import './crossing.css';
 
@@ -21,6 +22,8 @@ export function CrossingPanel({ crossingId }: { readonly crossingId: CrossingId 
   const trying = useWindow((state) => state.trying !== null);
   const chosenBar = useWindow((state) => state.selection.bar);
   const readings = useReadings(crossingId);
+  const panel = useRef<HTMLElement>(null);
+  usePanelFocus(panel, crossingId, readings !== null);
   const layout = assessment?.layout;
   const crossing = layout?.crossings.get(crossingId);
   if (layout === undefined || crossing === undefined) return null;
@@ -36,7 +39,7 @@ export function CrossingPanel({ crossingId }: { readonly crossingId: CrossingId 
   };
   const alike = alikeIn(crossing, layout);
   return (
-    <section className="docked" data-region tabIndex={-1} aria-label={`Crossing ${title}`}>
+    <section ref={panel} className="docked" data-region tabIndex={-1} aria-label={`Crossing ${title}`}>
       <div className="docked-head">
         <h2>
           Crossing {title} at {showLength(at, units, 'spoken')}

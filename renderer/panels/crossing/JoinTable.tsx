@@ -1,6 +1,6 @@
 import { type JSX, useId } from 'react';
-import { JOIN_NAMES } from '../../../core/documents/words.ts';
 import type { BarId, Crossing } from '../../../core/layout/model.ts';
+import { JOIN_NAMES } from '../../../core/project/joinNames.ts';
 import type { Join, JoinKind, UnitSystem } from '../../../core/project/model.ts';
 import { showSlenderness } from '../../../core/units/quantity.ts';
 import type { BarReading, HoldReading, JoinReading } from '../../assessing/assessApi.ts';

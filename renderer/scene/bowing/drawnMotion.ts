@@ -1,5 +1,5 @@
 /** How bars are drawn moved away from their lines: a computed shape, or what a push does. The amounts are core's; only the size of the drawing is chosen here. */
-import type { BarMovement, PushTest } from '../../../core/frame/pushTest.ts';
+import type { BarMovement, PushTest } from '../../../core/frame/pushing.ts';
 import { add, along, scale, type Vec2, type Vec3 } from '../../../core/geometry/vector.ts';
 import type { Bar, BarId, Layout } from '../../../core/layout/model.ts';
 import type { ModeInSpace } from '../../../core/study/model.ts';

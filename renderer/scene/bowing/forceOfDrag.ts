@@ -1,5 +1,5 @@
 import { stiffnessAlong } from '../../../core/bowing/barProblems.ts';
-import type { PushTest } from '../../../core/frame/pushTest.ts';
+import type { PushTest } from '../../../core/frame/pushing.ts';
 import { dot, type Vec2 } from '../../../core/geometry/vector.ts';
 import type { AngleBar } from '../../../core/layout/model.ts';
 import type { PushWay } from '../../store/push.ts';

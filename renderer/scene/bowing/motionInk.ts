@@ -1,6 +1,7 @@
 import { add, scale, type Vec2 } from '../../../core/geometry/vector.ts';
 import type { Layout } from '../../../core/layout/model.ts';
-import { type Ink, line, polyline } from '../drawing/ink.ts';
+import { type Ink, line, polyline, wordsBox } from '../drawing/ink.ts';
+import { type Box, overlap } from '../view/box.ts';
 import { onSheet, type SheetView } from '../view/sheetView.ts';
 import type { DrawnMotion, MotionLine, MovedPoint } from './drawnMotion.ts';
 
@@ -9,35 +10,37 @@ const SEEN = 1.5;
 /** A line must move by this to be worth a word, px. */
 const WORTH_A_WORD = 14;
 
-/** The bars where they have moved to, over where they were: the chosen one in full, those that go with it dashed. @param part of the drawn displacement, −1 to 1 */
+/**
+ * The bars where they have moved to, over where they were: the chosen one in full, those that go with it dashed.
+ *
+ * @param part of the drawn displacement, −1 to 1
+ * @param inTheWay where words of the motion cannot be read
+ */
 export function motionInk(
   view: SheetView,
   layout: Layout,
   motion: DrawnMotion,
   part: number,
+  inTheWay: readonly Box[] = [],
 ): readonly Ink[] {
   // What goes along lies under the chosen bar.
   const inOrder = [...motion.lines].sort((a, b) => Number(a.chosen) - Number(b.chosen));
-  return inOrder.flatMap((moved) => lineInk(view, layout, motion.kind, moved, part));
+  return [
+    ...inOrder.flatMap((moved) => lineInk(view, motion.kind, moved, part)),
+    ...(motion.kind === 'push' ? wordsOf(view, layout, inOrder, part, inTheWay) : []),
+  ];
 }
 
 function lineInk(
   view: SheetView,
-  layout: Layout,
   kind: DrawnMotion['kind'],
   moved: MotionLine,
   part: number,
 ): readonly Ink[] {
-  const on = moved.points.map((point) => onSheet(view, point.on));
-  const to = moved.points.map((point) => onSheet(view, moveTo(point, part)));
-  const most = farthest(on, to);
-  const from = on[most];
-  const tip = to[most];
-  if (from === undefined || tip === undefined) return [];
-  const far = Math.hypot(tip[0] - from[0], tip[1] - from[1]);
+  const { on, to, far } = seenMotion(view, moved, part);
   const key = `motion ${moved.bar}`;
   if (far < SEEN) return moved.chosen ? [curve(key, kind, true, to)] : [];
-  if (!moved.chosen) return [curve(key, kind, false, to), ...word(view, layout, kind, moved, far)];
+  if (!moved.chosen) return [curve(key, kind, false, to)];
   return [
     {
       kind: 'path',
@@ -47,8 +50,14 @@ function lineInk(
     },
     { kind: 'path', key: `${key} ribs`, look: 'scene-bow-rib', d: ribs(on, to) },
     curve(key, kind, true, to),
-    ...word(view, layout, kind, moved, far),
   ];
+}
+
+/** A bar's line as it was and as it has moved, and the most that a place of it has moved, px. */
+function seenMotion(view: SheetView, { points }: MotionLine, part: number) {
+  const on = points.map((point) => onSheet(view, point.on));
+  const to = points.map((point) => onSheet(view, moveTo(point, part)));
+  return { on, to, far: farthest(on, to) };
 }
 
 function moveTo({ on, by }: MovedPoint, part: number): MovedPoint['on'] {
@@ -60,17 +69,35 @@ function curve(key: string, kind: DrawnMotion['kind'], chosen: boolean, to: read
   return { kind: 'path', key: `${key} line`, look, d: smooth(to) };
 }
 
-/** "D2 follows", "D1 bends": beside the line, between its farthest place and an end. */
-function word(
+/** Shares of a bar's points beside which its word may stand, the likeliest first. */
+const BESIDE = { chosen: [0.78, 0.22, 0.9, 0.1], along: [0.24, 0.76, 0.1, 0.9] } as const;
+
+/** "D2 follows", "D1 bends": beside the line, between its farthest place and an end; left out where there is no room. */
+function wordsOf(
   view: SheetView,
   layout: Layout,
-  kind: DrawnMotion['kind'],
-  moved: MotionLine,
-  far: number,
+  lines: readonly MotionLine[],
+  part: number,
+  inTheWay: readonly Box[],
 ): readonly Ink[] {
-  const bar = layout.bars.get(moved.bar);
-  if (kind !== 'push' || far < WORTH_A_WORD || bar === undefined) return [];
-  const at = moved.points[Math.round(moved.points.length * (moved.chosen ? 0.78 : 0.24))];
+  const words: Words[] = [];
+  for (const moved of lines) {
+    const mark = layout.bars.get(moved.bar)?.mark;
+    if (mark === undefined || seenMotion(view, moved, part).far < WORTH_A_WORD) continue;
+    const taken = [...inTheWay, ...words.map(wordsBox)];
+    const text = `${mark} ${moved.chosen ? 'follows' : 'bends'}`;
+    const found = BESIDE[moved.chosen ? 'chosen' : 'along']
+      .flatMap((share) => wordBeside(view, moved, share, text))
+      .find((word) => taken.every((box) => overlap(wordsBox(word), box) === 0));
+    if (found !== undefined) words.push(found);
+  }
+  return words;
+}
+
+type Words = Extract<Ink, { readonly kind: 'words' }>;
+
+function wordBeside(view: SheetView, moved: MotionLine, share: number, text: string): readonly Words[] {
+  const at = moved.points[Math.round(moved.points.length * share)];
   if (at === undefined) return [];
   const [x, y] = onSheet(view, moveTo(at, 1));
   const [ox, oy] = onSheet(view, at.on);
@@ -82,7 +109,7 @@ function word(
       look: 'scene-words motion',
       at: [x + (left ? -9 : 9), y + 4],
       anchor: left ? 'end' : 'start',
-      text: `${bar.mark} ${moved.chosen ? 'follows' : 'bends'}`,
+      text,
     },
   ];
 }
@@ -99,17 +126,10 @@ function ribs(on: readonly Vec2[], to: readonly Vec2[]): string {
 }
 
 function farthest(on: readonly Vec2[], to: readonly Vec2[]): number {
-  let most = 0;
-  let best = -1;
-  on.forEach(([x, y], k) => {
+  return on.reduce((most, [x, y], k) => {
     const tip = to[k];
-    const far = tip === undefined ? -1 : Math.hypot(tip[0] - x, tip[1] - y);
-    if (far > best) {
-      best = far;
-      most = k;
-    }
-  });
-  return most;
+    return tip === undefined ? most : Math.max(most, Math.hypot(tip[0] - x, tip[1] - y));
+  }, 0);
 }
 
 /** A curve through all its points: cubic pieces whose slopes are those between the neighbours. */

@@ -1,6 +1,8 @@
-import type { Vec2 } from '../../../core/geometry/vector.ts';
+import { add, along, scale, type Vec2 } from '../../../core/geometry/vector.ts';
 import type { Bar } from '../../../core/layout/model.ts';
 import { onSheet, type SheetView } from '../view/sheetView.ts';
+import { placeMovement } from './drawnMotion.ts';
+import type { PushShown } from './pushShown.ts';
 
 /** How near the pointer must come to the bar's line, and to a named place on it to mean that place, px. */
 const REACH = 15;
@@ -30,4 +32,12 @@ export function placeUnder(
   const near = places.find((place) => (Math.abs(place - at) / bar.length) * long <= SNAP);
   // Whole centimetres: nobody points at a tenth of a millimetre.
   return near ?? Math.round(at / 10) * 10;
+}
+
+/** Whether the pointer is on the pushed place as it is drawn, moved away from the bar. */
+export function isOnPushedPlace(view: SheetView, bar: Bar, push: PushShown, pointer: Vec2): boolean {
+  if (push.test === null) return false;
+  const moved = scale(placeMovement(push.test, push.force), push.times);
+  const [x, y] = onSheet(view, add(along(bar.from, bar.direction, push.at), moved));
+  return Math.hypot(pointer[0] - x, pointer[1] - y) <= REACH;
 }

@@ -1,6 +1,7 @@
 import { add, along, scale, type Vec2, type Vec3 } from '../../../core/geometry/vector.ts';
 import type { Bar } from '../../../core/layout/model.ts';
-import { arrowHead, from, heading, type Ink, line } from '../drawing/ink.ts';
+import { arrowHead, from, heading, type Ink, line, wordsBox } from '../drawing/ink.ts';
+import { type Box, clipped, inside } from '../view/box.ts';
 import { directionOnSheet, onSheet, type SheetView } from '../view/sheetView.ts';
 
 export interface ShownPush {
@@ -21,6 +22,8 @@ const LONGEST = 58;
 const SHORTEST = 16;
 /** A force foreshortened to less than this is seen end on. */
 const END_ON = 0.2;
+/** Kept free along the edges of the sheet, px. */
+const EDGE = 6;
 
 /** The pushed place, where it has gone to, and the force as an arrow with its size. */
 export function pushInk(view: SheetView, push: ShownPush): readonly Ink[] {
@@ -66,8 +69,10 @@ function arrow(view: SheetView, push: ShownPush, to: Vec2, gone: number): readon
         text: says,
       },
     ];
-  const long = SHORTEST + (LONGEST - SHORTEST) * Math.min(1, size / push.most);
-  const tip = from(to, way, long + 9);
+  const sheet: Box = { left: EDGE, top: EDGE, width: view.width - 2 * EDGE, height: view.height - 2 * EDGE };
+  const wished = SHORTEST + (LONGEST - SHORTEST) * Math.min(1, size / push.most) + 9;
+  const long = Math.max(SHORTEST + 9, Math.min(wished, roomAlong(to, way, wished, sheet)));
+  const tip = from(to, way, long);
   return [
     {
       kind: 'path',
@@ -76,16 +81,36 @@ function arrow(view: SheetView, push: ShownPush, to: Vec2, gone: number): readon
       d: line(from(to, way, 8), from(tip, way, -9)),
     },
     { kind: 'path', key: 'push head', look: 'scene-solid', d: arrowHead(tip, way) },
-    {
-      kind: 'words',
-      key: 'push force',
-      look: 'scene-words strong',
-      at: [
-        tip[0] + (way[0] < -0.3 ? -6 : way[0] > 0.3 ? 6 : 0),
-        tip[1] + (way[1] > 0.5 ? 16 : way[1] < -0.5 ? -8 : 4),
-      ],
-      anchor: way[0] < -0.3 ? 'end' : way[0] > 0.3 ? 'start' : 'middle',
-      text: says,
-    },
+    forceWords(tip, way, says, sheet),
   ];
+}
+
+/** How far an arrow can go before it leaves the sheet, px. */
+function roomAlong(to: Vec2, way: Vec2, most: number, sheet: Box): number {
+  const seen = clipped([to, from(to, way, most)], sheet);
+  return seen === null ? most : Math.hypot(seen[1][0] - to[0], seen[1][1] - to[1]);
+}
+
+/** Beyond the arrow's head, or beside its shaft where that would be off the sheet. */
+function forceWords(
+  tip: Vec2,
+  way: Vec2,
+  text: string,
+  sheet: Box,
+): Extract<Ink, { readonly kind: 'words' }> {
+  const words = { kind: 'words', key: 'push force', look: 'scene-words strong', text } as const;
+  const beyond = {
+    ...words,
+    at: [
+      tip[0] + (way[0] < -0.3 ? -6 : way[0] > 0.3 ? 6 : 0),
+      tip[1] + (way[1] > 0.5 ? 16 : way[1] < -0.5 ? -8 : 4),
+    ],
+    anchor: way[0] < -0.3 ? 'end' : way[0] > 0.3 ? 'start' : 'middle',
+  } as const;
+  if (inside(wordsBox(beyond), sheet)) return beyond;
+  const beside = from(tip, way, -12);
+  const right = { ...words, at: [beside[0] + 9, beside[1] + 4], anchor: 'start' } as const;
+  return inside(wordsBox(right), sheet)
+    ? right
+    : { ...right, at: [beside[0] - 9, beside[1] + 4], anchor: 'end' };
 }

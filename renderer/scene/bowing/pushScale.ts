@@ -1,4 +1,4 @@
-import type { PushTest } from '../../../core/frame/pushTest.ts';
+import type { PushTest } from '../../../core/frame/pushing.ts';
 
 /** The greatest push is drawn as about this share of the bar's length. */
 const SHARE = 0.3;

@@ -1,4 +1,4 @@
-import type { PushTest } from '../../../core/frame/pushTest.ts';
+import type { PushTest } from '../../../core/frame/pushing.ts';
 import type { Vec2 } from '../../../core/geometry/vector.ts';
 import type { PushWay } from '../../store/push.ts';
 

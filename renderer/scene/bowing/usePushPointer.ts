@@ -3,7 +3,7 @@ import type { Vec2 } from '../../../core/geometry/vector.ts';
 import type { Bar } from '../../../core/layout/model.ts';
 import type { SheetView } from '../view/sheetView.ts';
 import { forceOfDrag } from './forceOfDrag.ts';
-import { placeUnder } from './placeUnder.ts';
+import { isOnPushedPlace, placeUnder } from './placeUnder.ts';
 import type { PushChange, PushShown } from './pushShown.ts';
 import { dragOf, NOT_PUSHING, type PushEvent, type PushTool, pushToolAfter } from './pushTool.ts';
 
@@ -40,7 +40,9 @@ export function usePushPointer(wishes: PushPointerWishes): void {
         return;
       if (event.target instanceof Element && event.target.closest('.scene-label, .scene-end')) return;
       const at = placeOf(element, event);
-      const place = placeUnder(view.current, bar, at, push.places);
+      const place = isOnPushedPlace(view.current, bar, push, at)
+        ? push.at
+        : placeUnder(view.current, bar, at, push.places);
       if (place === null) return;
       event.stopPropagation();
       event.preventDefault();

@@ -1,9 +1,10 @@
 import type { Vec2 } from '../../../core/geometry/vector.ts';
 import { type Box, crosses, overlap } from '../view/box.ts';
 
-/** Radius of a detail and height of its two lines of caption, px. */
+/** Radius of a detail and height of its lines of caption, px. */
 export const DETAIL_RADIUS = 74;
 export const DETAIL_CAPTION = 38;
+export const FIGURE_CAPTION = 54;
 
 /** From the edges of the sheet, px. */
 const EDGE = 16;
@@ -38,8 +39,9 @@ export function detailPlace(
   bars: readonly (readonly [Vec2, Vec2])[],
   taken: readonly Box[],
   previous: number | null,
+  caption = DETAIL_CAPTION,
 ): DetailPlace | null {
-  const height = 2 * DETAIL_RADIUS + DETAIL_CAPTION;
+  const height = 2 * DETAIL_RADIUS + caption;
   const free = PLACES.flatMap(([right, down], place) => {
     const box: Box = {
       left: EDGE + right * (sheet.width - 2 * EDGE - 2 * DETAIL_RADIUS),

@@ -1,6 +1,7 @@
 import type { RefObject } from 'react';
-import { JOIN_NAMES, UNMARKED } from '../../../core/documents/words.ts';
+import { UNMARKED } from '../../../core/documents/words.ts';
 import type { Crossing } from '../../../core/layout/model.ts';
+import { JOIN_NAMES } from '../../../core/project/joinNames.ts';
 import type { JoinKind } from '../../../core/project/model.ts';
 import { grouped } from '../../../core/units/figures.ts';
 import { JoinGlyph, type JoinShape } from '../../glyphs/JoinGlyph.tsx';

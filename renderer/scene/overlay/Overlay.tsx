@@ -85,7 +85,8 @@ export function Overlay(props: OverlayProps) {
     facePainter.current ??= new InkPainter(faces.current);
     facePainter.current.paint(laid.detail?.faces ?? []);
     if (!latest.current.figure) detailAt.current = laid.detail?.place ?? null;
-    frame.current.setAttribute('visibility', laid.detail ? 'visible' : 'hidden');
+    // Not by visibility, which children take up a frame late: the disc would stand empty for a moment.
+    frame.current.style.display = laid.detail ? '' : 'none';
     if (laid.detail) frame.current.setAttribute('transform', `translate(${laid.detail.at.join(' ')})`);
   }, [grown, swing, swings]);
   step.current = repaint;

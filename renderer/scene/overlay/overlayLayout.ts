@@ -8,7 +8,7 @@ import type { OverlayMotion } from '../bowing/overlayMotion.ts';
 import { pushInk } from '../bowing/pushInk.ts';
 import { stiffnessInk } from '../bowing/stiffnessInk.ts';
 import { detailInk } from '../detail/detailInk.ts';
-import { DETAIL_RADIUS, type DetailPlace, detailPlace } from '../detail/detailPlace.ts';
+import { DETAIL_RADIUS, type DetailPlace, detailPlace, FIGURE_CAPTION } from '../detail/detailPlace.ts';
 import { bowInk } from '../drawing/bowInk.ts';
 import { scaleInk, triadInk } from '../drawing/cornerInk.ts';
 import { dimensionInk, dimensionLine } from '../drawing/dimensionInk.ts';
@@ -173,7 +173,8 @@ function figureOf(
   const { bar, at } = moves.push;
   const of = onSheet(view, along(bar.from, bar.direction, at));
   const bars = content.steelLines.map(([a, b]) => [onSheet(view, a), onSheet(view, b)] as const);
-  const place = detailPlace(view, of, bars, [...inTheWay, ...corners(view, legend)], previousDetail);
+  const taken = [...inTheWay, ...corners(view, legend)];
+  const place = detailPlace(view, of, bars, taken, previousDetail, FIGURE_CAPTION);
   if (place === null) return null;
   const way = heading([place.at[0] - of[0], place.at[1] - of[1]]) ?? [1, 0];
   const d = line(from(of, way, GLYPH_HALF + 4), from(place.at, way, -DETAIL_RADIUS));
@@ -236,6 +237,7 @@ function inkOf(input: OverlayInput, marks: readonly Box[]): readonly Ink[] {
   const isPushed = moves.push !== null;
   const { layout } = assessment;
   const dimensions = bay === null ? [] : dimensionInk(view, bay, units);
+  const push = moves.push === null ? [] : pushInk(view, moves.push);
   const restraint = selected === null ? null : (assessment.diagonals.get(selected.id)?.restraint ?? null);
   return [
     ...(bay === null ? [] : groundInk(view, layout, bay)),
@@ -248,7 +250,9 @@ function inkOf(input: OverlayInput, marks: readonly Box[]): readonly Ink[] {
     ...(selected === null || bow === null || isPushed || moves.motion !== null
       ? []
       : bowInk(view, selected, bow, grown)),
-    ...(moves.motion === null ? [] : motionInk(view, layout, moves.motion, isPushed ? 1 : grown)),
+    ...(moves.motion === null
+      ? []
+      : motionInk(view, layout, moves.motion, isPushed ? 1 : grown, [...marks, ...wordsIn(push)])),
     ...(selected?.angle && input.stiffness
       ? stiffnessInk(
           view,
@@ -257,7 +261,7 @@ function inkOf(input: OverlayInput, marks: readonly Box[]): readonly Ink[] {
           assessment.diagonals.get(selected.id)?.bowing?.stations ?? [],
         )
       : []),
-    ...(moves.push === null ? [] : pushInk(view, moves.push)),
+    ...push,
     ...(input.forces === null || bay === null
       ? []
       : forcesInk(view, layout, bay, input.forces, selected?.id ?? null, units)),

@@ -64,6 +64,24 @@ describe('push', () => {
     expect(elsewhere.out).toContain('Nothing is joined to it there');
   });
 
+  it('says in which units the table is: those of the project, while JSON keeps N/mm', async () => {
+    const us = (text: string): string => {
+      const project = JSON.parse(text);
+      return JSON.stringify({ ...project, settings: { ...project.settings, units: 'us' } });
+    };
+    const [metric, american] = [await projectFile(BOLTED), await projectFile(BOLTED, us)];
+    const push = async (file: string) => (await run('push', file, '--bar', 'D1', '--at', '2500')).out;
+    const outOfPlane = (out: string): number =>
+      Number(/bar in place +\S+(?: \S+)? +([\d.]+) /.exec(out.replace(/[\u2009\u202f]/g, ''))?.[1]);
+    const [first, second] = [await push(metric), await push(american)];
+    expect(first).toMatch(/^N\/mm /m);
+    expect(second).toMatch(/^kip\/in /m);
+    // 1 kip = 4 448.22 N, 1 in = 25.4 mm; to the three figures shown.
+    expect(outOfPlane(second) / (outOfPlane(first) * (25.4 / 4448.22))).toBeCloseTo(1, 2);
+    const json = JSON.parse((await run('push', american, '--bar', 'D1', '--at', '2500', '-f', 'json')).out);
+    expect(json.inPlace.outOfPlane).toBeCloseTo((await pushed(HALF)).inPlace.outOfPlane, 9);
+  });
+
   it('knows a bar by mark, by bay and mark, and by id', async () => {
     const file = await projectFile(BOLTED);
     const all = await Promise.all(

@@ -2,7 +2,7 @@
 import { describe, expect, it } from 'vitest';
 import { namedMechanism } from '../../../core/bowing/mechanismNames.ts';
 import { movementUnder } from '../../../core/frame/push.ts';
-import { pushTest } from '../../../core/frame/pushTest.ts';
+import { pushTest } from '../../../core/frame/pushing.ts';
 import { dot, type Vec3 } from '../../../core/geometry/vector.ts';
 import { GUSSETED } from '../../../core/project/endFixity.ts';
 import { restraintContext } from '../../../core/restraint/restraint.ts';

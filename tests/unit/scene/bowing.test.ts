@@ -1,16 +1,19 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import type { PushTest } from '../../../core/frame/pushTest.ts';
-import { dot, type Vec2, type Vec3 } from '../../../core/geometry/vector.ts';
+import type { PushTest } from '../../../core/frame/pushing.ts';
+import { add, along, dot, scale, type Vec2, type Vec3 } from '../../../core/geometry/vector.ts';
 import { pushOf, studyOf } from '../../../core/study/study.ts';
 import { barShape, bayShape, placeMovement, pushMotion } from '../../../renderer/scene/bowing/drawnMotion.ts';
 import { forceOfDrag, type Grip, stiffnessOf } from '../../../renderer/scene/bowing/forceOfDrag.ts';
 import { motionInk } from '../../../renderer/scene/bowing/motionInk.ts';
-import { placeUnder } from '../../../renderer/scene/bowing/placeUnder.ts';
+import { isOnPushedPlace, placeUnder } from '../../../renderer/scene/bowing/placeUnder.ts';
+import { pushInk } from '../../../renderer/scene/bowing/pushInk.ts';
 import { forceAfterKey, placeAfterKey, pushKey } from '../../../renderer/scene/bowing/pushKeys.ts';
 import { pushTimes } from '../../../renderer/scene/bowing/pushScale.ts';
 import { dragOf, NOT_PUSHING, pushToolAfter } from '../../../renderer/scene/bowing/pushTool.ts';
 import { stiffnessInk } from '../../../renderer/scene/bowing/stiffnessInk.ts';
+import { type Ink, wordsBox } from '../../../renderer/scene/drawing/ink.ts';
+import { type Box, inside, overlap } from '../../../renderer/scene/view/box.ts';
 import { namedView } from '../../../renderer/scene/view/namedView.ts';
 import { directionOnSheet, onSheet, type SheetView } from '../../../renderer/scene/view/sheetView.ts';
 import { wayVector } from '../../../renderer/store/pushing.ts';
@@ -78,6 +81,68 @@ describe('what a push does, as it is drawn', () => {
       { seed: 7, numRuns: 100 },
     );
   });
+});
+
+describe('the words of a push', () => {
+  const force: Vec2 = [300 * outOfPlane[0], 300 * outOfPlane[1]];
+  const motion = pushMotion(layout, test, force, 200);
+  const sheet: Box = { left: 0, top: 0, width: view.width, height: view.height };
+  type Words = Extract<Ink, { readonly kind: 'words' }>;
+  const wordsIn = (inks: readonly Ink[]): readonly Words[] => inks.filter((ink) => ink.kind === 'words');
+
+  it('go where there is room, and are left out where there is none', () => {
+    const free = wordsIn(motionInk(view, layout, motion, 1));
+    expect(free.map(({ key }) => key).sort()).toEqual([FALL, RISE].map((id) => `motion ${id} word`).sort());
+    const taken = free.map(wordsBox);
+    const moved = wordsIn(motionInk(view, layout, motion, 1, taken));
+    expect(moved).toHaveLength(2);
+    for (const word of moved) for (const box of taken) expect(overlap(wordsBox(word), box)).toBe(0);
+    expect(wordsIn(motionInk(view, layout, motion, 1, [sheet]))).toEqual([]);
+  });
+
+  it.each(['top', 'right', 'bottom', 'left'] as const)(
+    'stay on the sheet with the arrow when the place has moved near its %s',
+    (edge) => {
+      // Towards that edge, and away from it.
+      const across = scale(edge === 'left' || edge === 'right' ? view.right : view.up, 300);
+      const at = onSheet(view, along(bar.from, bar.direction, 2500));
+      // The sheet is moved so that the place lies 30 px from its edge, where an arrow of 67 px has no room.
+      const to: Vec2 = [
+        edge === 'left' ? 30 : edge === 'right' ? view.width - 30 : view.width / 2,
+        edge === 'top' ? 30 : edge === 'bottom' ? view.height - 30 : view.height / 2,
+      ];
+      const shift = [to[0] - at[0], to[1] - at[1]] as const;
+      const near: SheetView = {
+        ...view,
+        centre: add(
+          view.centre,
+          add(scale(view.right, -shift[0] / view.pxPerMm), scale(view.up, shift[1] / view.pxPerMm)),
+        ),
+      };
+      const place = onSheet(near, along(bar.from, bar.direction, 2500));
+      expect(Math.hypot(place[0] - to[0], place[1] - to[1])).toBeLessThan(0.01); // Rounding.
+      const inks = [1, -1].flatMap((sign) =>
+        pushInk(near, {
+          bar,
+          at: 2500,
+          force: scale(across, sign),
+          most: 300,
+          by: [0, 0, 0],
+          forceSays: '0.300 kN',
+          movementSays: '5.30 mm',
+        }),
+      );
+      for (const word of wordsIn(inks)) expect(inside(wordsBox(word), sheet)).toBe(true);
+      const heads = inks.flatMap((ink) => (ink.kind === 'path' && ink.key === 'push head' ? [ink.d] : []));
+      expect(heads).toHaveLength(2);
+      for (const [x = 0, y = 0] of heads.map((d) => /M(\S+) (\S+?)L/.exec(d)?.slice(1).map(Number) ?? [])) {
+        expect(x).toBeGreaterThanOrEqual(0);
+        expect(x).toBeLessThanOrEqual(view.width);
+        expect(y).toBeGreaterThanOrEqual(0);
+        expect(y).toBeLessThanOrEqual(view.height);
+      }
+    },
+  );
 });
 
 describe('the force of a drag', () => {
@@ -161,6 +226,26 @@ describe('the pointer that pushes', () => {
     expect(placeUnder(view, bar, on(0.3), [2500])).toBe(1500);
     expect(placeUnder(view, bar, on(1.2), [2500])).toBeNull();
     expect(placeUnder(view, bar, [on(0.5)[0] + 60, on(0.5)[1]], [2500])).toBeNull();
+  });
+
+  it('takes hold of the pushed place where it is drawn, however far from the bar', () => {
+    const force: Vec2 = [300 * outOfPlane[0], 300 * outOfPlane[1]];
+    const shown = {
+      at: 2500,
+      places: [],
+      way: 'any way',
+      test,
+      most: 300,
+      force,
+      byHand: true,
+      times: 200,
+    } as const;
+    const moved = scale(placeMovement(test, force), shown.times);
+    const drawn = onSheet(view, add(along(bar.from, bar.direction, 2500), moved));
+    expect(placeUnder(view, bar, drawn, [2500])).toBeNull();
+    expect(isOnPushedPlace(view, bar, shown, drawn)).toBe(true);
+    expect(isOnPushedPlace(view, bar, shown, [drawn[0] + 30, drawn[1]])).toBe(false);
+    expect(isOnPushedPlace(view, bar, { ...shown, test: null }, drawn)).toBe(false);
   });
 });
 

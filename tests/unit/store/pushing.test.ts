@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { createStore } from 'zustand/vanilla';
-import type { PushTest } from '../../../core/frame/pushTest.ts';
+import type { PushTest } from '../../../core/frame/pushing.ts';
 import { pushOf } from '../../../core/study/study.ts';
 import { NO_PUSH } from '../../../renderer/store/push.ts';
 import {
