@@ -1,6 +1,12 @@
 import { type JSX, useId } from 'react';
 import type { UnitSystem } from '../../core/project/model.ts';
-import { type LengthStyle, lengthProblemText, parseLength, showLength } from '../../core/units/quantity.ts';
+import {
+  exactBehind,
+  type LengthStyle,
+  lengthProblemText,
+  parseLength,
+  showLength,
+} from '../../core/units/quantity.ts';
 import { Row } from './Row.tsx';
 import { SteppedInput } from './SteppedInput.tsx';
 import { type Reading, useDraft } from './useDraft.ts';
@@ -14,7 +20,7 @@ export interface LengthFieldProps {
   readonly most?: number;
   /** Of the arrow keys, mm; in US units the nearest inch or quarter inch. */
   readonly step?: number;
-  /** For thicknesses and bolts: sixteenths or thousandths of an inch in US units. */
+  /** For set-backs, gussets and gauges: inches without feet in US units. */
   readonly small?: boolean;
   /** Without a label beside it, inside a row or a table that names it. */
   readonly bare?: boolean;
@@ -39,7 +45,8 @@ export function LengthField(props: LengthFieldProps): JSX.Element {
       draft={draft}
       unit={units === 'us' ? '' : 'mm'}
       value={mm}
-      valueText={showLength(mm, units, small ? 'small' : 'full')}
+      valueText={showLength(mm, units, small ? 'tape' : 'full')}
+      title={units === 'us' ? exactBehind(mm, shown) : null}
       messageId={messageId}
       onStep={step}
     />
@@ -63,7 +70,7 @@ export function LengthField(props: LengthFieldProps): JSX.Element {
 }
 
 function shownLength(mm: number, units: UnitSystem, small: boolean): string {
-  const style: LengthStyle = small ? 'small' : 'bare';
+  const style: LengthStyle = small ? 'tape' : 'bare';
   const text = showLength(mm, units, style);
   return units === 'metric' ? text.replace(/ ?mm$/, '') : text;
 }

@@ -12,6 +12,8 @@ interface SteppedInputProps {
   readonly valueText: string;
   readonly messageId: string;
   readonly left?: boolean;
+  /** What stands behind the figure that is shown; null where that is all. */
+  readonly title?: string | null;
   /** A step up or down, ten of them with page keys; the draft is handed on first. */
   onStep(steps: number): void;
 }
@@ -20,7 +22,7 @@ const STEPS: Readonly<Record<string, number>> = { ArrowUp: 1, ArrowDown: -1, Pag
 
 /** A number to type, with steps by arrow keys and by two small buttons. */
 export function SteppedInput(props: SteppedInputProps): JSX.Element {
-  const { id, name, draft, unit, value, valueText, messageId, left = false, onStep } = props;
+  const { id, name, draft, unit, value, valueText, messageId, left = false, title = null, onStep } = props;
   const onKeyDown = (event: KeyboardEvent<HTMLInputElement>): void => {
     const steps = STEPS[event.key];
     if (steps !== undefined) {
@@ -39,6 +41,7 @@ export function SteppedInput(props: SteppedInputProps): JSX.Element {
         className={left ? 'field-text' : 'field-number'}
         role="spinbutton"
         aria-label={name}
+        title={title ?? undefined}
         aria-valuenow={value ?? undefined}
         aria-valuetext={valueText}
         aria-invalid={draft.message !== null || undefined}

@@ -1,28 +1,27 @@
-import { type JSX, useState } from 'react';
+import type { JSX } from 'react';
 import { Group, Panel, Separator } from 'react-resizable-panels';
 import { BaysPanel } from '../panels/bays/BaysPanel.tsx';
 import { CardPanel } from '../panels/card/CardPanel.tsx';
 import { Dock } from '../panels/dock/Dock.tsx';
 import { RecipePanel } from '../panels/recipe/RecipePanel.tsx';
 import type { Theme } from '../theme/themeSetting.ts';
-import { firstSizes } from './firstSizes.ts';
 import { PartBoundary } from './PartBoundary.tsx';
-import { useTablesHeight } from './useTablesHeight.ts';
+import { useDockSizes } from './useDockSizes.ts';
 import { ViewPanel } from './view/ViewPanel.tsx';
 import './layout.css';
 
 /** Bays and recipe to the left, the bay in 3D in the middle, the card at full height to the right, the tables below. */
 export function Layout({ theme }: { readonly theme: Theme }): JSX.Element {
-  const [sizes] = useState(() => firstSizes(window.innerWidth, window.innerHeight));
-  const tables = useTablesHeight(sizes.tables);
+  const { sizes, tables, onLeft, onCard, onLayoutChanged } = useDockSizes();
   return (
-    <Group orientation="horizontal" className="docks">
+    <Group orientation="horizontal" className="docks" onLayoutChanged={onLayoutChanged}>
       <Panel id="workspace" minSize={560} className="dock-panel">
-        <Group orientation="vertical" className="docks">
+        <Group orientation="vertical" className="docks" onLayoutChanged={onLayoutChanged}>
           <Panel id="upper" minSize={240} className="dock-panel">
-            <Group orientation="horizontal" className="docks">
+            <Group orientation="horizontal" className="docks" onLayoutChanged={onLayoutChanged}>
               <Panel
                 id="bays"
+                onResize={onLeft}
                 defaultSize={sizes.left}
                 minSize={200}
                 maxSize={400}
@@ -64,10 +63,12 @@ export function Layout({ theme }: { readonly theme: Theme }): JSX.Element {
       <Separator className="gutter upright" aria-label="Width of the card" />
       <Panel
         id="card"
+        onResize={onCard}
         defaultSize={sizes.card}
         minSize={356}
         maxSize={560}
-        groupResizeBehavior="preserve-pixel-size"
+        // In a window made narrower the tables need their share of the room too.
+        groupResizeBehavior="preserve-relative-size"
         className="dock-panel"
       >
         <PartBoundary part="the card">

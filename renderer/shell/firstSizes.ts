@@ -1,6 +1,6 @@
 import type { DockTab } from '../store/windowState.ts';
 
-export interface FirstSizes {
+export interface DockSizes {
   readonly left: number;
   readonly card: number;
   /** Height of the tables by what they show: the picture of the shortlist wants more than the schedule. */
@@ -8,7 +8,7 @@ export interface FirstSizes {
 }
 
 /** The docks' sizes to begin with, px, by the window's. */
-export function firstSizes(width: number, height: number): FirstSizes {
+export function firstSizes(width: number, height: number): DockSizes {
   const narrow = width < 1400;
   const share = (part: number, most: number): number => Math.round(Math.min(most, height * part));
   return {

@@ -6,6 +6,8 @@ import { useWindow } from './services.tsx';
 interface TablesHeight {
   readonly panel: Ref<PanelImperativeHandle | null>;
   onResize(size: PanelSize): void;
+  /** As they are now, px. */
+  heights(): Readonly<Record<DockTab, number>>;
 }
 
 /** Each of the tables keeps a height of its own, which the user's drag changes. */
@@ -24,5 +26,6 @@ export function useTablesHeight(first: Readonly<Record<DockTab, number>>): Table
     onResize: ({ inPixels }) => {
       heights.current[shown.current] = inPixels;
     },
+    heights: () => ({ ...heights.current }),
   };
 }

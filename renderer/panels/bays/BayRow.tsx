@@ -1,5 +1,5 @@
 import { DropdownMenu } from 'radix-ui';
-import type { JSX } from 'react';
+import { type JSX, useEffect, useRef } from 'react';
 import type { BaySummary } from '../../../core/assessment.ts';
 import type { Bay } from '../../../core/project/model.ts';
 import { showSlenderness } from '../../../core/units/quantity.ts';
@@ -16,8 +16,12 @@ export function BayRow({ bay }: { readonly bay: Bay }): JSX.Element {
   const chosen = useWindow((state) => state.selection.bay === bay.id);
   const summary = useWindow((state) => shownAssessment(state)?.bays.get(bay.id) ?? null);
   const before = useWindow((state) => beforeAssessment(state)?.bays.get(bay.id) ?? null);
+  const row = useRef<HTMLLIElement>(null);
+  useEffect(() => {
+    if (chosen) row.current?.scrollIntoView({ block: 'nearest' });
+  }, [chosen]);
   return (
-    <li className="bay" data-chosen={chosen || undefined}>
+    <li ref={row} className="bay" data-chosen={chosen || undefined}>
       <button
         type="button"
         className="bay-choose"

@@ -55,7 +55,7 @@ function KeyTable({
       <table className="shortcuts" aria-label={title}>
         <tbody>
           {rows.map(({ keys, does }) => (
-            <tr key={does}>
+            <tr key={`${keys} ${does}`}>
               <th scope="row">{does}</th>
               <td>
                 <kbd>{keys}</kbd>

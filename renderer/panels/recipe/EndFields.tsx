@@ -144,5 +144,5 @@ export function endText(ends: EndConnection, units: UnitSystem): string {
   const legs = ends.legs === 'one' ? 'one leg' : 'both legs';
   return ends.kind === 'bolted'
     ? `${ends.bolts} × ${boltName(ends.boltDiameter, units)}, ${legs}`
-    : `welded ${showLength(ends.weldLength, units, 'small')}, ${legs}`;
+    : `welded ${showLength(ends.weldLength, units, 'tape')}, ${legs}`;
 }

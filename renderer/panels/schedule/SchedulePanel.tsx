@@ -4,6 +4,7 @@ import { useFontsLoaded } from '../../controls/useFontsLoaded.ts';
 import { useActions, useWindow } from '../../shell/services.tsx';
 import { shownAssessment, shownProject } from '../../store/shown.ts';
 import { ROW_DEEP } from './rowDeep.ts';
+import { ScheduleFilter } from './ScheduleFilter.tsx';
 import { ScheduleHead } from './ScheduleHead.tsx';
 import { ScheduleRowView } from './ScheduleRowView.tsx';
 import { COLUMN_SETS } from './scheduleColumns.ts';
@@ -53,47 +54,58 @@ export function SchedulePanel({ view, onChange }: SchedulePanelProps): JSX.Eleme
   };
 
   return (
-    // biome-ignore lint/a11y/useSemanticElements: rows that come and go as one scrolls cannot be a table element.
-    <div
-      ref={scroller}
-      className="schedule"
-      role="grid"
-      aria-label="Schedule"
-      aria-rowcount={rows.length + 1}
-      aria-activedescendant={at >= 0 ? `schedule-${at}` : undefined}
-      tabIndex={0}
-      onKeyDown={onKeyDown}
-    >
-      <ScheduleHead columns={columns} grid={grid} view={view} units={units} onChange={onChange} />
-      {/* biome-ignore lint/a11y/useSemanticElements: as above. */}
-      <div
-        role="rowgroup"
-        style={{ height: virtual.getTotalSize(), minWidth: grid.least, position: 'relative' }}
-      >
-        {virtual.getVirtualItems().map((item) => {
-          const row = rows[item.index];
-          return row === undefined ? null : (
-            <ScheduleRowView
-              key={row.row.bar}
-              id={`schedule-${item.index}`}
-              index={item.index}
-              top={item.start}
-              seen={row}
-              columns={columns}
-              grid={grid}
-              units={units}
-              chosen={row.row.bar === chosen}
-            />
-          );
-        })}
-      </div>
-      {assessment !== null && rows.length === 0 && (
-        <p className="schedule-none">
-          {assessment.schedule.length === 0
-            ? 'No diagonals are set out yet.'
-            : 'No diagonal fits the filter.'}
-        </p>
+    <div className="schedule-whole">
+      {view.filtering && (
+        <ScheduleFilter
+          view={view}
+          shown={rows.length}
+          all={assessment?.schedule.length ?? 0}
+          onChange={onChange}
+          onClosed={() => scroller.current?.focus()}
+        />
       )}
+      {/* biome-ignore lint/a11y/useSemanticElements: rows that come and go as one scrolls cannot be a table element. */}
+      <div
+        ref={scroller}
+        className="schedule"
+        role="grid"
+        aria-label="Schedule"
+        aria-rowcount={rows.length + 1}
+        aria-activedescendant={at >= 0 ? `schedule-${at}` : undefined}
+        tabIndex={0}
+        onKeyDown={onKeyDown}
+      >
+        <ScheduleHead columns={columns} grid={grid} view={view} units={units} onChange={onChange} />
+        {/* biome-ignore lint/a11y/useSemanticElements: as above. */}
+        <div
+          role="rowgroup"
+          style={{ height: virtual.getTotalSize(), minWidth: grid.least, position: 'relative' }}
+        >
+          {virtual.getVirtualItems().map((item) => {
+            const row = rows[item.index];
+            return row === undefined ? null : (
+              <ScheduleRowView
+                key={row.row.bar}
+                id={`schedule-${item.index}`}
+                index={item.index}
+                top={item.start}
+                seen={row}
+                columns={columns}
+                grid={grid}
+                units={units}
+                chosen={row.row.bar === chosen}
+              />
+            );
+          })}
+        </div>
+        {assessment !== null && rows.length === 0 && (
+          <p className="schedule-none">
+            {assessment.schedule.length === 0
+              ? 'No diagonals are set out yet.'
+              : 'No diagonal fits the filter.'}
+          </p>
+        )}
+      </div>
     </div>
   );
 }

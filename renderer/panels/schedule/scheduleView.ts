@@ -20,6 +20,11 @@ export const FIRST_SCHEDULE_VIEW: ScheduleView = {
   only: 'all',
 };
 
+/** The filter shown or, with all that was asked of it, put away. */
+export function withFilterTurned(view: ScheduleView): ScheduleView {
+  return view.filtering ? { ...view, filtering: false, text: '', only: 'all' } : { ...view, filtering: true };
+}
+
 export function seenRows(assessment: Assessment, view: ScheduleView): readonly SeenRow[] {
   const wanted = view.text.trim().toLowerCase();
   const rows = assessment.schedule.flatMap((row): SeenRow[] => {

@@ -3,6 +3,7 @@ import { type JSX, type KeyboardEvent, useEffect, useId, useRef, useState } from
 import { Key } from '../../controls/Key.tsx';
 import { useOverlays } from '../../controls/useOverlays.ts';
 import { FindSign } from '../../glyphs/signs.tsx';
+import { toDrawing } from '../keys/regions.ts';
 import { useServices } from '../services.tsx';
 import { type Findable, found } from './findables.ts';
 import './find.css';
@@ -31,7 +32,8 @@ export function FindBox(): JSX.Element {
   };
   const choose = (findable: Findable): void => {
     finish();
-    input.current?.blur();
+    // What is chosen shows in the drawing, and a dialog that is asked for gives the keys back to it.
+    toDrawing();
     findable.choose(services);
   };
   const onKeyDown = (event: KeyboardEvent<HTMLInputElement>): void => {
@@ -53,7 +55,7 @@ export function FindBox(): JSX.Element {
       case 'Escape':
         event.preventDefault();
         finish();
-        input.current?.blur();
+        toDrawing();
         return;
     }
   };

@@ -6,3 +6,9 @@ export function toNextRegion(step: 1 | -1): void {
   const next = regions[(at + step + regions.length) % regions.length];
   next?.focus();
 }
+
+/** The drawing takes the keys, or the part that it stands in where there is none. */
+export function toDrawing(): void {
+  const drawing = document.querySelector<HTMLElement>('.scene-stage');
+  (drawing ?? document.querySelector<HTMLElement>('.view-panel'))?.focus();
+}

@@ -7,6 +7,8 @@ export interface WindowWish {
   readonly width?: number;
   readonly height?: number;
   readonly theme?: 'light' | 'dark';
+  /** Things may swing and grow; else the window is asked for little motion. */
+  readonly motion?: boolean;
   /** Run in the page before anything of the program. */
   readonly before?: string;
 }
@@ -42,7 +44,7 @@ export class WindowStand {
     const context: BrowserContext = await browser.newContext({
       viewport: { width: wish.width ?? 1440, height: wish.height ?? 900 },
       colorScheme: wish.theme ?? 'light',
-      reducedMotion: 'reduce',
+      reducedMotion: wish.motion ? 'no-preference' : 'reduce',
     });
     context.setDefaultTimeout(8000);
     if (wish.before !== undefined) await context.addInitScript({ content: wish.before });

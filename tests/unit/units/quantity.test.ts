@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import {
+  exactBehind,
   showLength,
   showMass,
   showMassPerMetre,
@@ -74,5 +75,24 @@ describe('showing a slenderness', () => {
     expect(showSlenderness(300.000_01, 300)).toBe('300.001');
     expect(showSlenderness(300.6, 300)).toBe('301');
     expect(showSlenderness(212.6, 212.5)).toBe('213');
+  });
+});
+
+describe('a set-back, a gusset or a gauge in a field', () => {
+  it('is in inches to the sixteenth, without feet, and in mm to the tenth', () => {
+    // 350 mm is 13.780 in, 13 12.5/16; 10 mm is 0.394 in, 6.3/16.
+    expect(showLength(350, 'us', 'tape')).toBe('13 3/4"');
+    expect(showLength(10, 'us', 'tape')).toBe('3/8"');
+    expect(showLength(-9.525, 'us', 'tape')).toBe('−3/8"');
+    expect(showLength(350, 'metric', 'tape')).toBe('350 mm');
+    expect(showLength(4.5, 'metric', 'tape')).toBe('4.5 mm');
+  });
+
+  it('tells the mm behind it where the inches are only near', () => {
+    expect(exactBehind(350, showLength(350, 'us', 'tape'))).toBe('350 mm exactly');
+    expect(exactBehind(12.25, showLength(12.25, 'us', 'tape'))).toBe('12.25 mm exactly');
+    // 3/8 in is 9.525 mm by definition.
+    expect(exactBehind(9.525, showLength(9.525, 'us', 'tape'))).toBeNull();
+    expect(exactBehind(7315.2, showLength(7315.2, 'us'))).toBeNull();
   });
 });
