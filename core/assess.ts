@@ -189,6 +189,7 @@ function summaryOf(
     diagonals: all.length,
     worst:
       worst && verdict ? { bar: worst.bar, slenderness: verdict.slenderness, limit: verdict.limit } : null,
+    turning: all.filter(({ turns }) => turns !== null).length,
     mass: bay.diagonals.reduce((sum, id) => sum + (layout.bars.get(id)?.angle?.mass ?? 0), 0) * bay.numberOff,
     says: inWords(project, index, all.length),
   };

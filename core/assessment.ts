@@ -52,6 +52,8 @@ export interface BaySummary {
   readonly bars: number;
   readonly diagonals: number;
   readonly worst: { readonly bar: BarId; readonly slenderness: number; readonly limit: number } | null;
+  /** Diagonals that turn without resistance, their ends being marked as they are: they have no slenderness, and are worse than any. */
+  readonly turning: number;
   readonly mass: number;
   /** "2 tiers, crossed" */
   readonly says: string;

@@ -92,6 +92,7 @@ export function resistanceOptions(chosen: ResistanceSettings): ResistanceOptions
 export function compressionQuestion(
   question: TensionQuestion,
   { bar, restraint, criticalLoad }: Pick<PlacedSection, 'bar' | 'restraint' | 'criticalLoad'>,
+  { project }: CheckInput,
 ): CompressionQuestion {
   const { x, y, u, v } = restraint.lanes;
   const inner = restraint.stations.slice(1, -1);
@@ -106,6 +107,9 @@ export function compressionQuestion(
     ]),
     criticalLoad,
     system: 'planar',
+    loadedAcross: (project.actions?.cases ?? []).some(({ loads }) =>
+      loads.some((load) => load.kind === 'line' && load.bar === bar.id),
+    ),
     joinedBetween: inner.some(({ held }) => held.ways > 0),
   };
 }

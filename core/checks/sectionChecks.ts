@@ -16,7 +16,7 @@ export function sectionChecks(
 ): Pick<BarChecks, 'checks' | 'governing' | 'compressionBy'> {
   const question = tensionQuestion(input, placed);
   const squeezes = placed.angle.spec.countedOn === 'both' || demands.compression !== null;
-  const inCompression = squeezes ? compressionResistances(compressionQuestion(question, placed)) : [];
+  const inCompression = squeezes ? compressionResistances(compressionQuestion(question, placed, input)) : [];
   const compressionBy = squeezes ? governingCompression(inCompression) : null;
   // Bolts and welds know no sign.
   const greater = greaterOf(demands.tension, demands.compression);

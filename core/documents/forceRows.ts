@@ -16,7 +16,8 @@ export interface ForceRow {
     readonly role: string;
     readonly force: number;
     readonly slack: boolean;
-    readonly elongation: number;
+    /** Of diagonals, knees and ties; null for members. */
+    readonly elongation: number | null;
     /** Greatest bending moment in the plane, N·mm; 0 for bars that do not bend. */
     readonly moment: number;
     /** Of a slack bar, the compression that it would take if it did not bow away; null otherwise. */
@@ -48,7 +49,7 @@ export function forceRows({ forces, layout }: Assessment): readonly ForceRow[] {
       role: layout.bars.get(bar)?.role ?? '',
       force,
       slack: state.slack.has(bar),
-      elongation: state.elongations.get(bar) ?? 0,
+      elongation: state.elongations.get(bar) ?? null,
       moment: state.moments.get(bar) ?? 0,
       attracted: state.attracted.get(bar) ?? null,
     })),

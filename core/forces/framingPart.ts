@@ -26,6 +26,7 @@ export interface FramingPart {
 export interface Piece {
   readonly bar: BarId;
   readonly axial: AxialBar;
+  readonly isDiagonal: boolean;
   /** Bending in the plane of the bay; null for bars that only pull and push. */
   readonly bending: Bending | null;
 }
@@ -217,6 +218,7 @@ class PartBuilder {
           tensionOnly: bar.angle.spec.countedOn === 'tension',
           preset: 0,
         },
+        isDiagonal: true,
         bending: null,
       };
     const member = memberSection(structuralMember(bar));
@@ -231,6 +233,7 @@ class PartBuilder {
     return {
       bar: bar.id,
       axial: { ...shared, EA: this.#E * member.area, tensionOnly: false, preset: 0 },
+      isDiagonal: false,
       bending: bends
         ? {
             EI: this.#E * (onEdge ? member.Imajor : member.Iminor),
@@ -244,13 +247,13 @@ class PartBuilder {
 
   #fixed(): ReadonlySet<number> {
     const fixed = new Set<number>();
+    const own = new Set(this.#bays.map(({ id }) => id));
     const standing = new Set(this.#bays.filter(({ kind }) => kind !== 'roof').flatMap(({ nodes }) => nodes));
     this.#nodes.forEach((id, k) => {
       const supports = this.#layout.nodes.get(id)?.supports ?? {};
-      const holds = this.#bays.some((bay) => {
-        const support = supports[bay.id];
-        return support !== undefined && (support.kind !== 'eaves' || !standing.has(id));
-      });
+      const holds = Object.entries(supports).some(
+        ([bay, { kind }]) => own.has(bay) && (kind !== 'eaves' || !standing.has(id)),
+      );
       if (holds) for (let c = 0; c < 3; c++) fixed.add(3 * k + c);
     });
     return fixed;

@@ -88,6 +88,7 @@ export interface ForceState extends CombinationState {
   readonly forces: ReadonlyMap<BarId, number>;
   /** Greatest bending moment in the plane, N·mm, of members that bend. */
   readonly moments: ReadonlyMap<BarId, number>;
+  /** Of diagonals, knees and ties. */
   readonly elongations: ReadonlyMap<BarId, number>;
   readonly slack: ReadonlySet<BarId>;
   /** Compression that each slack bar would take if it did not bow out of the way: an analysis with all bars working both ways. Only strength. */

@@ -79,14 +79,16 @@ function answerOf(
   part.nodes.forEach((id, k) => {
     displacements.set(id, at(q, k));
   });
-  part.pieces.forEach(({ bar, bending }, index) => {
+  part.pieces.forEach(({ bar, bending, isDiagonal }, index) => {
     const piece = bars[index];
     if (!piece) return;
     const force = axial[index] ?? 0;
     const known = forces.get(bar);
     if (known === undefined || Math.abs(force) > Math.abs(known)) forces.set(bar, force);
-    const stretch = dot(piece.direction, subtract(at(q, piece.j), at(q, piece.i)));
-    elongations.set(bar, (elongations.get(bar) ?? 0) + stretch);
+    if (isDiagonal) {
+      const stretch = dot(piece.direction, subtract(at(q, piece.j), at(q, piece.i)));
+      elongations.set(bar, (elongations.get(bar) ?? 0) + stretch);
+    }
     put(internal, piece.i, scale(piece.direction, -force));
     put(internal, piece.j, scale(piece.direction, force));
     if (bending) {

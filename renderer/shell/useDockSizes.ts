@@ -14,6 +14,9 @@ interface Docks {
   onLayoutChanged(layout: Sizes, meta: LayoutChangedMeta): void;
 }
 
+/** So long after a drag its sizes may still come in, ms. */
+const SETTLED = 1000;
+
 /** How large the docks are: as they were left, or by the window's size. */
 export function useDockSizes(): Docks {
   const [sizes] = useState(() => {
@@ -25,20 +28,28 @@ export function useDockSizes(): Docks {
   const { heights } = tables;
   const heightsNow = useRef(heights);
   heightsNow.current = heights;
-  const onLayoutChanged = useCallback((_: Sizes, { isUserInteraction }: LayoutChangedMeta): void => {
-    if (!isUserInteraction) return;
-    // Panels tell their new sizes within the same turn.
-    setTimeout(() => keepSizes(localStorage, { ...now.current, tables: heightsNow.current() }), 0);
+  const draggedAt = useRef(Number.NEGATIVE_INFINITY);
+  const keep = useCallback((): void => {
+    keepSizes(localStorage, { ...now.current, tables: heightsNow.current() });
   }, []);
+  const onLayoutChanged = useCallback(
+    (_: Sizes, { isUserInteraction }: LayoutChangedMeta): void => {
+      if (!isUserInteraction) return;
+      draggedAt.current = performance.now();
+      keep();
+    },
+    [keep],
+  );
+  // Panels are measured after the change of layout is told, by a frame or more.
+  const measured = (dock: 'left' | 'card', { inPixels }: PanelSize): void => {
+    now.current[dock] = inPixels;
+    if (performance.now() - draggedAt.current < SETTLED) keep();
+  };
   return {
     sizes,
     tables,
-    onLeft: ({ inPixels }) => {
-      now.current.left = inPixels;
-    },
-    onCard: ({ inPixels }) => {
-      now.current.card = inPixels;
-    },
+    onLeft: (size) => measured('left', size),
+    onCard: (size) => measured('card', size),
     onLayoutChanged,
   };
 }

@@ -3,6 +3,7 @@ import { LEANING } from '../../forces/leaning.ts';
 import type { Load } from '../../project/actions.ts';
 import type { UnitSystem } from '../../project/model.ts';
 import { showForce, showMovement } from '../../units/loads.ts';
+import { showLoad } from '../../units/loadUnits.ts';
 import { showLength } from '../../units/quantity.ts';
 import { type Markup, markup } from '../markup.ts';
 
@@ -37,18 +38,22 @@ export function actionsSheet(
 
 /** "gable of R1 0.75 kN/m² on rafter 1". */
 function loadWords(load: Load, units: UnitSystem): string {
-  const force = (kN: number): string => showForce(1000 * kN, units);
+  const along = (parts: readonly number[], of: 'force' | 'perLength'): string =>
+    parts
+      .map((part, k) => (part === 0 ? null : `${'XYZ'[k]} ${showLoad(part, of, units)}`))
+      .filter((part) => part !== null)
+      .join(', ');
   switch (load.kind) {
     case 'node':
-      return `${load.node} (${load.force.map(force).join(', ')})`;
+      return `${load.node}: ${along(load.force, 'force')}`;
     case 'line':
-      return `along ${load.bar} (${load.perMetre.map(force).join(', ')}) a metre`;
+      return `along ${load.bar}: ${along(load.perMetre, 'perLength')}`;
     case 'shortened':
       return `${load.bar} ${showLength(Math.abs(load.by), units, 'small')} ${load.by < 0 ? 'too long' : 'short'}`;
     case 'gable':
-      return `gable of ${load.bay} ${load.pressure} kN/m² on rafter ${load.rafter}`;
+      return `gable of ${load.bay} ${showLoad(load.pressure, 'pressure', units)} on rafter ${load.rafter}`;
     case 'side':
-      return `wall on ${load.bay} ${load.pressure} kN/m² over ${showLength(load.width, units, 'spoken')}`;
+      return `wall on ${load.bay} ${showLoad(load.pressure, 'pressure', units)} over ${showLength(load.width, units, 'spoken')}`;
     default:
       return load satisfies never;
   }

@@ -5,6 +5,7 @@ import type { Bay } from '../../../core/project/model.ts';
 import { showSlenderness } from '../../../core/units/quantity.ts';
 import { useOverlays } from '../../controls/useOverlays.ts';
 import { NearnessChip } from '../../glyphs/NearnessChip.tsx';
+import { SeverityGlyph } from '../../glyphs/SeverityGlyph.tsx';
 import { MoreSign } from '../../glyphs/signs.tsx';
 import { duplicateBay } from '../../shell/commands/bayCommands.ts';
 import { useServices, useWindow } from '../../shell/services.tsx';
@@ -52,6 +53,17 @@ function Worst({
   readonly summary: BaySummary | null;
   readonly before: BaySummary | null;
 }): JSX.Element {
+  if (summary !== null && summary.turning > 0)
+    return (
+      <span className="bay-worst">
+        <SeverityGlyph severity="must fix" />
+        <span
+          title={`${summary.turning} ${summary.turning === 1 ? 'bar turns' : 'bars turn'} without resistance`}
+        >
+          loose
+        </span>
+      </span>
+    );
   const worst = summary?.worst ?? null;
   if (worst === null) return <span className="bay-worst">{summary === null ? '' : '–'}</span>;
   const now = showSlenderness(worst.slenderness, worst.limit);

@@ -10,7 +10,7 @@ import { useActions } from '../../shell/services.tsx';
 import { refusalText } from '../recipe/useRecipeEdit.ts';
 import { freshId } from './freshId.ts';
 import { LoadFields } from './LoadFields.tsx';
-import { firstLoad, LOAD_KINDS, loadsThatFit } from './loadKinds.ts';
+import { firstLoad, hasPlaceFor, LOAD_KINDS } from './loadKinds.ts';
 
 const KINDS: readonly { readonly value: CaseKind; readonly label: string }[] = [
   { value: 'permanent', label: 'permanent' },
@@ -80,7 +80,7 @@ export function CaseFields({ loadCase, project }: CaseFieldsProps): JSX.Element 
       </ul>
       <div className="loads-add">
         Add
-        {LOAD_KINDS.filter(({ kind }) => loadsThatFit(kind, project)).map(({ kind, label }) => (
+        {LOAD_KINDS.filter(({ kind }) => hasPlaceFor(kind, project)).map(({ kind, label }) => (
           <button key={kind} type="button" className="link-button" onClick={() => add(kind)}>
             {label}
           </button>

@@ -10,7 +10,7 @@ export const LOAD_KINDS: readonly { readonly kind: Load['kind']; readonly label:
 ];
 
 /** Whether the project has anything that such a load could act on. */
-export function loadsThatFit(kind: Load['kind'], { bays }: Project): boolean {
+export function hasPlaceFor(kind: Load['kind'], { bays }: Project): boolean {
   switch (kind) {
     case 'gable':
       return bays.some(({ recipe }) => recipe.kind === 'roof');

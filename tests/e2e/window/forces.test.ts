@@ -1,6 +1,6 @@
 import type { Page } from 'playwright-core';
 import { afterAll, afterEach, beforeAll, beforeEach, describe, expect, it } from 'vitest';
-import { choose, type OpenedWindow, WindowStand } from './openedWindow.ts';
+import { choose, command, type OpenedWindow, WindowStand } from './openedWindow.ts';
 
 const stand = new WindowStand();
 let opened: OpenedWindow;
@@ -55,6 +55,33 @@ describe('wind on the gables of the example', () => {
     await expect.poll(() => part.innerText()).toMatch(/0\.90 × 813 × 355[\s\S]*260 kN/);
     expect(await part.innerText()).toMatch(/from memory, verify/);
   });
+});
+
+describe('the faults planted in the example', () => {
+  it('are mended by one remedy after another until nothing must be fixed, and the report is made of what is left', async () => {
+    const counts = page.getByRole('button', { name: /^Findings: / });
+    const mustFix = async () =>
+      Number(/: (\d+) must fix/.exec((await counts.getAttribute('aria-label')) ?? '')?.[1]);
+    expect(await mustFix()).toBeGreaterThan(5);
+    await page.getByRole('tab', { name: /^Findings/ }).click();
+    for (let steps = 0; steps < 16 && (await mustFix()) > 0; steps++) {
+      const before = await counts.getAttribute('aria-label');
+      const first = page.getByRole('article').filter({ hasText: 'must fix: ' }).first();
+      await first.getByRole('button', { name: /^Try/ }).first().click({ timeout: 20_000 });
+      await page
+        .getByRole('region', { name: 'Change on trial' })
+        .getByText(/[Cc]loses/)
+        .waitFor();
+      await page.getByRole('button', { name: /^Keep/ }).click();
+      await expect.poll(() => counts.getAttribute('aria-label'), { timeout: 10_000 }).not.toBe(before);
+    }
+    expect(await mustFix()).toBe(0);
+    await command(page, 'Report', 'Report…');
+    const report = (await page.getByTitle('Report preview').getAttribute('srcdoc')) ?? '';
+    expect(report).toContain('What acts');
+    expect(report).toContain('Working of the check that governs');
+    expect(report).toMatch(/\b0 to fix/);
+  }, 240_000);
 });
 
 describe('what acts', () => {

@@ -1,7 +1,7 @@
-import type { UnitSystem } from '../../../core/project/model.ts';
-import { MM_PER_INCH, N_PER_KIP, unitNames } from '../../../core/units/unitSystem.ts';
+import { grouped } from './figures.ts';
+import { MM_PER_INCH, N_PER_KIP, type UnitSystem, unitNames } from './unitSystem.ts';
 
-interface LoadUnit {
+export interface LoadUnit {
   readonly unit: string;
   /** Shown units in one kN, kN/m or kN/m². */
   readonly shown: number;
@@ -25,4 +25,10 @@ export function loadUnits(units: UnitSystem): Readonly<Record<'force' | 'perLeng
     perLength: { unit: 'kN/m', shown: 1, step: 0.5, decimals: 3 },
     pressure: { unit: 'kN/m²', shown: 1, step: 0.05, decimals: 3 },
   };
+}
+
+/** kN, kN/m or kN/m² of a file in the project's units: "0.75 kN/m²", "15.7 psf". */
+export function showLoad(value: number, of: 'force' | 'perLength' | 'pressure', units: UnitSystem): string {
+  const { unit, shown, decimals } = loadUnits(units)[of];
+  return `${grouped(value * shown, decimals)} ${unit}`;
 }
