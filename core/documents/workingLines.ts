@@ -61,7 +61,8 @@ export function substituted(formula: string, steps: readonly Step[], units: Unit
 /** The symbol where it stands alone: not inside a word or a longer symbol. */
 function boundary(symbol: string): RegExp {
   const plain = symbol.replaceAll(/[.*+?^${}()|[\]\\]/g, '\\$&');
-  return new RegExp(`(?<![\\p{L}_])${plain}(?![\\p{L}_′])`, 'u');
+  // A sum or a root sign stands before a symbol, and is no part of it.
+  return new RegExp(`(?<!(?![Σ√])[\\p{L}_])${plain}(?![\\p{L}_′])`, 'u');
 }
 
 /** Values beside each other are multiplied, as symbols beside each other were. */

@@ -5,6 +5,7 @@ import { type Block, blocksOf, weakestBlock } from './blocks.ts';
 import { boltedLength, boltsInLine, netArea, pliesOf } from './boltRows.ts';
 import { heldBy, refuseShape, ruptureTitle, type TensionPack } from './pack.ts';
 import { rodDiameter } from './rods.ts';
+import { givenStresses } from './stresses.ts';
 
 const STANDARD = 'AISC 360';
 
@@ -72,7 +73,7 @@ export const AISC: TensionPack = {
   },
   blockShear: (question, end) => {
     const working = new Working();
-    const { fy, fu } = question.steel;
+    const { fy, fu } = givenStresses(question.steel, 'F', working);
     const tension = ({ netTension }: Block): number => fu * netTension;
     const tears = ({ netShear }: Block): number => 0.6 * fu * netShear;
     const yields = ({ grossShear }: Block): number => 0.6 * fy * grossShear;

@@ -6,6 +6,7 @@ import { type Block, blocksOf, weakestBlock } from './blocks.ts';
 import { netArea } from './boltRows.ts';
 import { refuseShape, ruptureTitle, type TensionPack } from './pack.ts';
 import { rodDiameter } from './rods.ts';
+import { givenStresses } from './stresses.ts';
 
 const STANDARD = 'AS 4100';
 const PHI = 0.9;
@@ -53,7 +54,7 @@ export const AS: TensionPack = {
   },
   blockShear: (question, end) => {
     const working = new Working();
-    const { fy, fu } = question.steel;
+    const { fy, fu } = givenStresses(question.steel, 'f', working);
     const tears = ({ netShear, netTension }: Block): number => 0.6 * fu * netShear + fu * netTension;
     const yields = ({ grossShear, netTension }: Block): number => 0.6 * fy * grossShear + fu * netTension;
     const nominal = (block: Block): number => Math.min(tears(block), yields(block));

@@ -7,6 +7,7 @@ import { type Block, blocksOf, weakestBlock } from './blocks.ts';
 import { holesLieInside, netArea, netOf, pliesOf } from './boltRows.ts';
 import { heldBy, isOneLeg, isWhole, refuseShape, type TensionPack } from './pack.ts';
 import { rodDiameter } from './rods.ts';
+import { givenStresses } from './stresses.ts';
 
 /** Recommended values; a national annex may have others. */
 export function partialFactors({ partialFactors: chosen }: ResistanceOptions): {
@@ -42,7 +43,7 @@ export const EN: TensionPack = {
   },
   blockShear: (question, end) => {
     const working = new Working();
-    const { fy, fu } = question.steel;
+    const { fy, fu } = givenStresses(question.steel, 'f', working);
     const { M0, M2 } = partialFactors(question.options);
     // A block of an angle by one leg is off the force's line: (3.10), unless the user holds with (3.9).
     const share = ({ even }: Block): number =>

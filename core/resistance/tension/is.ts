@@ -6,6 +6,7 @@ import { type Block, blocksOf, weakestBlock } from './blocks.ts';
 import { boltedLength, netArea, netOf } from './boltRows.ts';
 import { isOneLeg, isWhole, refuseShape, ruptureTitle, type TensionPack } from './pack.ts';
 import { rodDiameter } from './rods.ts';
+import { givenStresses } from './stresses.ts';
 
 const STANDARD = 'IS 800';
 export const GAMMA_M0 = 1.1;
@@ -48,7 +49,7 @@ export const IS: TensionPack = {
   },
   blockShear: (question, end) => {
     const working = new Working();
-    const { fy, fu } = question.steel;
+    const { fy, fu } = givenStresses(question.steel, 'f', working);
     const root = Math.sqrt(3);
     const yields = ({ grossShear, netTension }: Block): number =>
       (grossShear * fy) / (root * GAMMA_M0) + (0.9 * netTension * fu) / GAMMA_M1;

@@ -6,6 +6,7 @@ import { type Block, blocksOf, weakestBlock } from './blocks.ts';
 import { boltLines, netArea, pliesOf, rowsOf } from './boltRows.ts';
 import { heldBy, isWhole, refuseShape, ruptureTitle, type TensionPack } from './pack.ts';
 import { rodDiameter } from './rods.ts';
+import { givenStresses } from './stresses.ts';
 import { weldedArea } from './weldedArea.ts';
 
 const PHI = 0.9;
@@ -155,7 +156,7 @@ export const SANS: TensionPack = pack({
   confidence: { gross: 'from memory, sure', oneLeg: 'from memory, sure', weld: 'from memory, verify' },
   blockShear: (question, end) => {
     const working = new Working();
-    const { fy, fu } = question.steel;
+    const { fy, fu } = givenStresses(question.steel, 'f', working);
     const yields = ({ netTension, grossShear }: Block): number =>
       PHI * netTension * fu + 0.6 * PHI * grossShear * fy;
     const tears = ({ netTension, netShear }: Block): number =>
@@ -206,7 +207,7 @@ export const CSA: TensionPack = pack({
   confidence: { gross: 'read in a source', oneLeg: 'read in a source', weld: 'from memory, sure' },
   blockShear: (question, end) => {
     const working = new Working();
-    const { fy, fu } = question.steel;
+    const { fy, fu } = givenStresses(question.steel, 'F', working);
     const fv = fy > 460 ? fy : (fy + fu) / 2;
     // 0.6 where the block is pulled off its middle, as in an angle by one leg.
     const evenness = ({ even }: Block): number => (even ? 1 : 0.6);

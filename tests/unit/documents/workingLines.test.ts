@@ -20,6 +20,10 @@ describe('a formula with its values put in', () => {
     expect(substituted('A_gv f_y', steps, 'metric')).toBe('A_gv f_y');
   });
 
+  it('is taken for a symbol after a sum sign too', () => {
+    expect(substituted('Σd_h t', steps, 'metric')).toBe('Σ20.0 × 6.0');
+  });
+
   it('multiplies a plain number by the value after it', () => {
     expect(substituted('0.90 A_g', steps, 'metric')).toBe('0.90 × 813');
   });

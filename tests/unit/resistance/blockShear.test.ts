@@ -129,7 +129,27 @@ describe('block shear that is not worked out', () => {
 it('names the block that counts, and of how many it is the least', () => {
   const end = boltedEnd(150, { bolts: 4, rows: 2, rowSpacing: 60, gauge: 55 });
   const check = checkOf(questionOf('csaS16', angleOf(150, 150, 12, 16), S350, end), 'block shear');
-  expect(check.steps[0]?.formula).toBe('along the first row and out to the toe: the least of 3; holes out');
+  const netTension = check.steps.find(({ symbol }) => symbol === 'A_nt');
+  expect(netTension?.formula).toBe('along the first row and out to the toe: the least of 3; holes out');
+});
+
+it('shows the steel’s stresses in the working of every practice, ahead of what is worked out with them', () => {
+  const end = boltedEnd(100, { bolts: 3 });
+  const section = angleOf(100, 100, 10, 12);
+  for (const [practice, letter] of [
+    ['aisc360', 'F'],
+    ['csaS16', 'F'],
+    ['en1993', 'f'],
+    ['as4100', 'f'],
+    ['is800', 'f'],
+    ['sans10162', 'f'],
+  ] as const) {
+    const { steps } = checkOf(questionOf(practice, section, S350, end), 'block shear');
+    expect(steps.slice(0, 2).map(({ symbol, value }) => [symbol, value])).toEqual([
+      [`${letter}_y`, 350],
+      [`${letter}_u`, 450],
+    ]);
+  }
 });
 
 it('CSA also lets a row tear out along both its sides where the toe is far', () => {

@@ -2,7 +2,7 @@ import type { JSX } from 'react';
 
 /** Symbols as they are written by hand: what follows an underscore is set low. */
 export function SymbolText({ text }: { readonly text: string }): JSX.Element {
-  const parts = text.split(/_([\p{L}\d,′]+)/u);
+  const parts = text.split(/_((?:[\p{L}\d′]|,(?=\p{L}))+)/u);
   return (
     <>
       {parts.map((part, index) =>
