@@ -6,6 +6,9 @@ import type { NamedMechanism } from './bowing/model.ts';
 import type { Catalogues } from './catalogue/model.ts';
 import { barChecks } from './checks/barChecks.ts';
 import type { CheckInput } from './checks/input.ts';
+import { memberChecks } from './checks/memberChecks.ts';
+import { memberLengths, squeezedMembers } from './checks/memberRuns.ts';
+import type { MemberChecks } from './checks/model.ts';
 import { governingSentence } from './documents/governingSentence.ts';
 import { scheduleRows } from './documents/schedule.ts';
 import { findingsOf } from './findings/findings.ts';
@@ -47,7 +50,8 @@ export function assessmentOf(
       ? withBowing(prepared, memory)
       : { judged: byMarks, movable: new Map<string, readonly NamedMechanism[]>() };
   const checked = withChecks({ project, practice, forces }, judged, depth);
-  const findings = findingsOf({ project, practice, layout, diagonals: checked, forces, movable });
+  const members = depth === 'all levels' ? membersChecked({ project, practice, forces }, layout) : new Map();
+  const findings = findingsOf({ project, practice, layout, diagonals: checked, members, forces, movable });
   const findingIds = idsByBar(findings);
   const diagonals = new Map(
     [...checked].map(
@@ -59,6 +63,7 @@ export function assessmentOf(
     practice,
     layout,
     diagonals,
+    members,
     forces,
     findings,
     schedule: scheduleRows({ project, layout, diagonals, findings }),
@@ -78,6 +83,23 @@ function withChecks(
 ): ReadonlyMap<BarId, Judged> {
   if (depth === 'by the marks') return judged;
   return new Map([...judged].map(([id, each]) => [id, { ...each, checks: barChecks(input, each) }]));
+}
+
+/** Struts and beams, bay by bay. */
+function membersChecked(input: CheckInput, layout: Layout): ReadonlyMap<BarId, MemberChecks> {
+  return new Map(
+    layout.bays.flatMap((bay, index) => {
+      const grade = input.project.bays[index]?.diagonals.grade ?? '';
+      const members = squeezedMembers(bay, layout);
+      const lengths = memberLengths(bay, layout, members);
+      return members.flatMap((bar) => {
+        const between = lengths.get(bar.id);
+        return bar.member && between
+          ? [[bar.id, memberChecks(input, bar, bar.member, between, bar.member.grade ?? grade)] as const]
+          : [];
+      });
+    }),
+  );
 }
 
 /** Levels 2 and 3, bay by bay. */

@@ -1,5 +1,5 @@
 import type { Bowing } from './bowing/model.ts';
-import type { BarChecks } from './checks/model.ts';
+import type { BarChecks, MemberChecks } from './checks/model.ts';
 import type { ScheduleRow } from './documents/model.ts';
 import type { Finding, Severity } from './findings/model.ts';
 import type { Forces } from './forces/model.ts';
@@ -15,6 +15,8 @@ export interface Assessment {
   readonly practice: Practice;
   readonly layout: Layout;
   readonly diagonals: ReadonlyMap<BarId, DiagonalAssessment>;
+  /** Struts and beams in compression; empty where resistances were not asked for. */
+  readonly members: ReadonlyMap<BarId, MemberChecks>;
   /** Forces of every combination; null where nothing acts. */
   readonly forces: Forces | null;
   /** Must-fix first, then by bay order. */

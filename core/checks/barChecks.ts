@@ -38,7 +38,8 @@ export function steelOf({ practice, project }: CheckInput, grade: string, thickn
   return steelFor(practice.id, grade, thickness, E, G, project.settings.ownGrades ?? []);
 }
 
-function statusOf(governing: Check | null, loaded: boolean): BarChecks['status'] {
+/** How a bar stands whose most used check is this. */
+export function statusOf(governing: Check | null, loaded: boolean): BarChecks['status'] {
   if (!loaded) return 'no load';
   const utilisation = governing?.utilisation;
   if (utilisation == null) return 'unknown';

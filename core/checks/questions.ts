@@ -4,6 +4,7 @@ import type { StockAngle } from '../catalogue/model.ts';
 import type { ResistanceSettings } from '../project/model.ts';
 import type {
   CompressionQuestion,
+  Plate,
   ResistanceOptions,
   ResistingSection,
   TensionQuestion,
@@ -72,7 +73,21 @@ function resistingShape({ designation, outline, properties }: StockAngle, shape:
     outstandingLeg: outline.shortLeg,
     thickness: outline.thickness,
     offCentroid: properties.centroidX,
+    ...(shape.kind === 'tee' || shape.kind === 'channel' ? { plates: platesOf(shape) } : {}),
   };
+}
+
+function platesOf(shape: Extract<BarShape, { readonly kind: 'tee' | 'channel' }>): readonly Plate[] {
+  const { depth, width, web, flange } = shape;
+  return shape.kind === 'tee'
+    ? [
+        { name: 'flange', width: width / 2, thickness: flange },
+        { name: 'stem', width: depth, thickness: web },
+      ]
+    : [
+        { name: 'flange', width, thickness: flange },
+        { name: 'web', width: depth - 2 * flange, thickness: web },
+      ];
 }
 
 export function resistanceOptions(chosen: ResistanceSettings): ResistanceOptions {

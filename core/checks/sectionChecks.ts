@@ -31,7 +31,8 @@ export function sectionChecks(
   return { checks, governing: governingOf(checks), compressionBy };
 }
 
-function checkOf(resistance: Resistance, demand: Demand | null): Check {
+/** A resistance with what acts against it. */
+export function checkOf(resistance: Resistance, demand: Demand | null): Check {
   const { resistance: most } = resistance;
   return {
     resistance,

@@ -5,6 +5,7 @@ import { checkedFindings } from './checked.ts';
 import { crossingFindings } from './crossings.ts';
 import { holderFindings } from './holders.ts';
 import { markFindings } from './marks.ts';
+import { memberFindings } from './members.ts';
 import type { Finding, Severity } from './model.ts';
 import { nameFindings } from './names.ts';
 import { patternFindings } from './patterns.ts';
@@ -33,5 +34,6 @@ export function findingsOf(input: FindingInput): readonly Finding[] {
     ...bowingFindings(subject),
     ...actingFindings(subject),
     ...checkedFindings(subject),
+    ...memberFindings(subject),
   ].sort((a, b) => RANK[a.severity] - RANK[b.severity] || place(a) - place(b));
 }

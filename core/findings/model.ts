@@ -34,7 +34,10 @@ export type FindingKind =
   | 'moves far before it works'
   | 'resistance exceeded'
   | 'not checked'
-  | 'end detail too small';
+  | 'end detail too small'
+  | 'strut too weak'
+  | 'strut too slender'
+  | 'strut not checked';
 
 export type Severity = 'must fix' | 'look into' | 'note';
 

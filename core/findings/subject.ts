@@ -1,5 +1,5 @@
 import type { Bowing, NamedMechanism } from '../bowing/model.ts';
-import type { BarChecks } from '../checks/model.ts';
+import type { BarChecks, MemberChecks } from '../checks/model.ts';
 import type { Forces } from '../forces/model.ts';
 import type { AngleBar, Bar, BarId, BayLayout, Layout } from '../layout/model.ts';
 import type { LimitInForce, Practice, Verdict } from '../practice/model.ts';
@@ -34,6 +34,8 @@ export interface FindingInput {
   readonly practice: Practice;
   readonly layout: Layout;
   readonly diagonals: ReadonlyMap<BarId, Judged>;
+  /** Struts and beams. */
+  readonly members: ReadonlyMap<BarId, MemberChecks>;
   /** Null where nothing acts. */
   readonly forces: Forces | null;
   /** Ways in which a bay can move without resistance, by bay. */

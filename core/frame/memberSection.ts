@@ -1,4 +1,5 @@
 import type { Member } from '../project/model.ts';
+import { memberPlates } from './memberPlates.ts';
 
 /** Of a member given by its outside size only: second moments in mm⁴, area in mm². */
 export interface MemberSection {
@@ -10,20 +11,17 @@ export interface MemberSection {
   readonly J: number;
 }
 
-/**
- * Stiffness of a member whose thicknesses are not known: flange depth/25, web depth/40, tube and cold-formed walls depth/25 and 2 mm, none below 2 mm.
- * Common practice, no source: ordinary light sections lie near these. Shown as an assumption wherever a figure rests on it.
- */
+/** Stiffness of a member. */
 export function memberSection(member: Member): MemberSection {
   const { depth: h, width: b } = member;
+  const { flange, web } = memberPlates(member);
   switch (member.shape) {
     case 'I':
     case 'channel':
-      return flanged(h, b, Math.max(3, h / 25), Math.max(3, h / 40));
     case 'zed':
-      return flanged(h, b, 2, 2);
+      return flanged(h, b, flange, web);
     case 'tube': {
-      const t = Math.max(2, h / 25);
+      const t = web;
       const box = (x: number, y: number) => (x * y ** 3 - (x - 2 * t) * (y - 2 * t) ** 3) / 12;
       const around = 2 * (h + b - 2 * t);
       const enclosed = (h - t) * (b - t);

@@ -104,12 +104,17 @@ export type RecipeKind = Recipe['kind'];
 export type Pattern = 'crossed' | 'rising' | 'falling' | 'peaked' | 'vee' | 'open';
 export const PATTERNS: readonly Pattern[] = ['crossed', 'rising', 'falling', 'peaked', 'vee', 'open'];
 
-/** A member that is not a diagonal: drawn to size, not checked. */
+/** A member that is not a diagonal. Struts and beams are checked for what squeezes them; the others are drawn to size. */
 export interface Member {
   readonly name: string;
   readonly shape: 'I' | 'channel' | 'tube' | 'zed';
   readonly depth: number;
   readonly width: number;
+  /** Of its web, or of the wall of a tube or a zed; taken at a usual proportion where it is left out. */
+  readonly web?: number;
+  readonly flange?: number;
+  /** That of the bay's diagonals where it is left out. */
+  readonly grade?: string;
 }
 
 export interface WallRecipe {

@@ -3,13 +3,41 @@ import type { Vec3 } from '../geometry/vector.ts';
 import type { Bay, DiagonalSpec, EndConnection, Member, Recipe } from './model.ts';
 
 /** Sizes to begin with; every one is there to be changed. */
-export const COLUMN: Member = { name: 'column 254 × 146', shape: 'I', depth: 254, width: 146 };
-export const BEAM: Member = { name: 'beam 203 × 133', shape: 'I', depth: 203, width: 133 };
-export const RAFTER: Member = { name: 'rafter 305 × 165', shape: 'I', depth: 305, width: 165 };
-export const STRUT: Member = { name: 'strut, tube 114', shape: 'tube', depth: 114, width: 114 };
+export const COLUMN: Member = {
+  name: 'column 254 × 146',
+  shape: 'I',
+  depth: 254,
+  width: 146,
+  web: 6,
+  flange: 8.6,
+};
+export const BEAM: Member = {
+  name: 'beam 203 × 133',
+  shape: 'I',
+  depth: 203,
+  width: 133,
+  web: 5.7,
+  flange: 7.8,
+};
+export const RAFTER: Member = {
+  name: 'rafter 305 × 165',
+  shape: 'I',
+  depth: 305,
+  width: 165,
+  web: 6,
+  flange: 10.2,
+};
+export const STRUT: Member = { name: 'strut, tube 114', shape: 'tube', depth: 114, width: 114, web: 5 };
 export const PURLIN: Member = { name: 'purlin, channel 150 × 65', shape: 'channel', depth: 150, width: 65 };
 export const RAIL: Member = { name: 'rail, channel 125 × 50', shape: 'channel', depth: 125, width: 50 };
-export const CHORD: Member = { name: 'chord 203 × 133', shape: 'I', depth: 203, width: 133 };
+export const CHORD: Member = {
+  name: 'chord 203 × 133',
+  shape: 'I',
+  depth: 203,
+  width: 133,
+  web: 5.7,
+  flange: 7.8,
+};
 
 export const TWO_M16: EndConnection = {
   kind: 'bolted',

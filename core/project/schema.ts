@@ -30,6 +30,9 @@ const member = z.strictObject({
   shape: z.enum(['I', 'channel', 'tube', 'zed']),
   depth: millimetres(10, 3_000),
   width: millimetres(10, 3_000),
+  web: millimetres(0.5, 200).optional(),
+  flange: millimetres(0.5, 200).optional(),
+  grade: z.string().max(60).optional(),
 });
 
 const pattern = z.enum(['crossed', 'rising', 'falling', 'peaked', 'vee', 'open']);

@@ -126,6 +126,9 @@ export function proposalsFor(
     case 'moves far before it works':
     case 'both diagonals squeezed':
     case 'loses support when the partner goes slack':
+    case 'strut too weak':
+    case 'strut too slender':
+    case 'strut not checked':
     case 'steep or flat':
     case 'no length left':
       return [];

@@ -122,6 +122,16 @@ export interface ResistingSection {
   readonly rootRadius: number;
   /** From the face against the gusset to the centroid, mm. */
   readonly offCentroid: number;
+  /** Plates of a shape that has no legs and is no tube, for whether they buckle before they yield; left out where they are not looked at. */
+  readonly plates?: readonly Plate[];
+}
+
+/** A plate held along one edge (flange, stem) or along both (web). mm. */
+export interface Plate {
+  readonly name: 'flange' | 'web' | 'stem';
+  /** Of an I or a tee half the flange, of a channel the whole; of a web what is clear between flanges; of a stem the whole depth. */
+  readonly width: number;
+  readonly thickness: number;
 }
 
 export type SectionShape =
@@ -132,6 +142,7 @@ export type SectionShape =
   | 'rod'
   | 'tee'
   | 'channel'
+  | 'I section'
   | 'round tube'
   | 'square tube';
 
@@ -174,7 +185,9 @@ export interface TensionQuestion {
   readonly options: ResistanceOptions;
 }
 
-export interface CompressionQuestion extends TensionQuestion {
+export interface CompressionQuestion extends Omit<TensionQuestion, 'ends'> {
+  /** Those that matter to an angle by one leg; empty for a member of the frame. */
+  readonly ends: readonly ResistingEnd[];
   /** System length between the working points, mm. */
   readonly length: number;
   /** Unbraced lengths by the marks, K = 1, mm. */

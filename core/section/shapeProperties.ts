@@ -2,7 +2,11 @@ import type { Vec2 } from '../geometry/vector.ts';
 import { angleProperties } from './angleProperties.ts';
 import { type BarShape, extentOf } from './barShape.ts';
 import type { SectionProperties } from './model.ts';
+import { boxProperties } from './plateShapes.ts';
 import { principal } from './principal.ts';
+
+/** Shapes that are put together from parts. */
+type Parted = Exclude<BarShape, { readonly kind: 'square tube' }>;
 
 /** A part of a section: area, where its centroid lies, and its second moments about its own centroid. */
 interface Part {
@@ -14,10 +18,11 @@ interface Part {
 }
 
 /**
- * Properties of a shape put together from its parts; fillets of tees and channels are left out, corners of tubes are square. mm.
+ * Properties of a shape put together from its parts; fillets of tees and channels are left out, corners of square tubes are rounded as cold-formed ones are. mm.
  * Torsion: closed tubes by Bredt, 4A²t/s; open shapes Σbt³/3. Shear centre of a channel by its flanges' shear flow, e = b²h²t_f/(4I) from the web's middle.
  */
 export function shapeProperties(shape: BarShape): SectionProperties {
+  if (shape.kind === 'square tube') return boxProperties(shape.side, shape.side, shape.wall);
   const parts = partsOf(shape);
   const area = parts.reduce((sum, part) => sum + part.area, 0);
   const centroid: Vec2 = [
@@ -76,7 +81,7 @@ function angleAt(outline: Parameters<typeof angleProperties>[0], heel: Vec2, mir
   };
 }
 
-function partsOf(shape: BarShape): readonly Part[] {
+function partsOf(shape: Parted): readonly Part[] {
   switch (shape.kind) {
     case 'flat':
       return [rectangle(0, 0, shape.thickness, shape.width)];
@@ -85,10 +90,6 @@ function partsOf(shape: BarShape): readonly Part[] {
     case 'round tube': {
       const { diameter: d, wall: t } = shape;
       return [disc(d / 2, d), disc(d / 2, d - 2 * t, -1)];
-    }
-    case 'square tube': {
-      const { side: b, wall: t } = shape;
-      return [rectangle(0, 0, b, b), rectangle(t, t, b - 2 * t, b - 2 * t, -1)];
     }
     case 'tee': {
       const { width: b, depth: h, flange: f, web: w } = shape;
@@ -119,7 +120,7 @@ function partsOf(shape: BarShape): readonly Part[] {
   }
 }
 
-function twistOf(shape: BarShape, centroid: Vec2): Pick<SectionProperties, 'shearCentre' | 'J' | 'Iw'> {
+function twistOf(shape: Parted, centroid: Vec2): Pick<SectionProperties, 'shearCentre' | 'J' | 'Iw'> {
   const none: Vec2 = [0, 0];
   switch (shape.kind) {
     case 'flat':
@@ -129,10 +130,6 @@ function twistOf(shape: BarShape, centroid: Vec2): Pick<SectionProperties, 'shea
     case 'round tube': {
       const { diameter: d, wall: t } = shape;
       return { shearCentre: none, J: (Math.PI * (d ** 4 - (d - 2 * t) ** 4)) / 32, Iw: 0 };
-    }
-    case 'square tube': {
-      const { side, wall } = shape;
-      return { shearCentre: none, J: (side - wall) ** 3 * wall, Iw: 0 };
     }
     case 'tee': {
       const { width: b, depth: h, flange: f, web: w } = shape;

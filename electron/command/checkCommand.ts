@@ -18,7 +18,7 @@ export function addCheckCommand(program: Command, ending: Ending): void {
   program
     .command('check')
     .description(
-      'what every diagonal and its ends resist by the practice, clause by clause, against what acts on it',
+      'what every diagonal and its ends, and every squeezed strut and beam, resist by the practice, clause by clause, against what acts',
     )
     .argument('<file>', 'project file')
     .addOption(

@@ -3,7 +3,7 @@ import { textTable } from '../../core/documents/textTable.ts';
 import type { UnitSystem } from '../../core/project/model.ts';
 import { showForce } from '../../core/units/loads.ts';
 
-/** Every check of every diagonal, the one used most marked; then what could not be checked, and what comes from memory. */
+/** Every check of every diagonal, and of the struts and beams that are squeezed, the one used most marked; then what could not be checked, and what comes from memory. */
 export function checkTable(rows: readonly CheckRow[], units: UnitSystem): string {
   if (rows.length === 0) return 'No diagonals.\n';
   const table = textTable(
@@ -21,18 +21,21 @@ export function checkTable(rows: readonly CheckRow[], units: UnitSystem): string
   );
   const unknown = rows
     .filter((row) => row.unknown !== null)
-    .map((row) => `${row.mark}: ${row.unknown ?? ''}`);
+    .map((row) => `${nameOf(row)}: ${row.unknown ?? ''}`);
   return `${[table, ...unknown, SOURCES].join('\n')}\n`;
 }
 
 const SOURCES =
   'Clauses tagged “verify” are from memory: check them against the standard in hand before use. All figures are an aid, not a proof.';
 
+/** Members of two bays may be called alike. */
+const nameOf = ({ role, mark, bar }: CheckRow): string => (role === 'beam' || role === 'strut' ? bar : mark);
+
 function lineOf(row: CheckRow, check: CheckLine, units: UnitSystem): readonly string[] {
   const governs = row.governing?.kind === check.kind && row.governing.end === check.end;
   const failed = check.conditions.filter(({ met }) => !met).map(({ says }) => says);
   return [
-    row.mark,
+    nameOf(row),
     row.section,
     check.end === null ? check.title : `${check.title}, end ${check.end}`,
     `${check.standard} ${check.clause}${check.confidence === 'from memory, verify' ? ' (verify)' : ''}`,

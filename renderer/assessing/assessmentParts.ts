@@ -14,6 +14,7 @@ export interface AssessmentPart {
   readonly bars: Entries<Layout['bars']>;
   readonly crossings: Entries<Layout['crossings']>;
   readonly diagonals: Entries<Assessment['diagonals']>;
+  readonly members: Entries<Assessment['members']>;
   readonly schedule: Assessment['schedule'];
   readonly bays: Entries<Assessment['bays']>;
 }
@@ -34,13 +35,14 @@ export function partOf(assessment: Assessment, k: number): AssessmentPart {
   const of = partsOf(assessment);
   const share = <T>(all: readonly T[]): readonly T[] =>
     all.slice(Math.floor((k * all.length) / of), Math.floor(((k + 1) * all.length) / of));
-  const { layout, diagonals, schedule, bays } = assessment;
+  const { layout, diagonals, members, schedule, bays } = assessment;
   return {
     layoutBays: share(layout.bays),
     nodes: share([...layout.nodes]),
     bars: share([...layout.bars]),
     crossings: share([...layout.crossings]),
     diagonals: share([...diagonals]),
+    members: share([...members]),
     schedule: share(schedule),
     bays: share([...bays]),
   };
@@ -61,6 +63,7 @@ export function joinedAssessment(
       crossings: new Map(parts.flatMap((part) => part.crossings)),
     },
     diagonals: new Map(parts.flatMap((part) => part.diagonals)),
+    members: new Map(parts.flatMap((part) => part.members)),
     schedule: parts.flatMap((part) => part.schedule),
     bays: new Map(parts.flatMap((part) => part.bays)),
   };

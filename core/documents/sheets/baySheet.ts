@@ -11,6 +11,7 @@ import { type Markup, markup } from '../markup.ts';
 import type { ReportOptions } from '../reportOptions.ts';
 import { groupedAlike } from './alike.ts';
 import { diagonalSheet } from './diagonalSheet.ts';
+import { memberSheet } from './memberSheet.ts';
 import { scheduleSheet } from './scheduleSheet.ts';
 
 const BESIDE_LEGEND: Room = {
@@ -54,7 +55,7 @@ export function baySheet(
   return markup`<section class="bay ${page}"><h1>${bay.id}: ${bay.name}<small>${summary?.says ?? ''}${off}${mass}</small></h1>
 <h2>As it will be built<small>${seenFrom(bay)}${options.units === 'metric' ? ', mm unless marked' : ''}</small></h2>
 <div class="drawings ${drawings.length > 1 ? 'stacked' : ''}"><div class="planes">${drawings.map(({ title, drawing }) => markup`<figure>${title === '' ? null : markup`<figcaption>${title}</figcaption>`}${drawing.svg}${scaleBar(drawing, options.units)}</figure>`)}</div><div class="side">${sections.map(({ svg, caption, title }) => markup`<div class="keep"><h3>${title}</h3>${svg}<p>${caption}</p></div>`)}<div class="keep"><h3>Legend</h3>${legend(drawings.map(({ drawing }) => drawing))}</div></div></div>
-${scheduleSheet(assessment, bay, options)}</section><div class="${page}">${diagonals}</div>`;
+${scheduleSheet(assessment, bay, options)}${memberSheet(assessment, bay, options)}</section><div class="${page}">${diagonals}</div>`;
 }
 
 function seenFrom({ kind }: BayLayout): string {

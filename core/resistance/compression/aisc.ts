@@ -93,6 +93,9 @@ export const AISC: CompressionPack = {
     walls: {
       round: { most: ({ E, fy }) => (0.11 * E) / fy, says: '0.11 E/F_y' },
       square: { most: ({ E, fy }) => 1.4 * Math.sqrt(E / fy), says: '1.40 √(E/F_y)' },
+      flange: { most: ({ E, fy }) => 0.56 * Math.sqrt(E / fy), says: '0.56 √(E/F_y)' },
+      web: { most: ({ E, fy }) => 1.49 * Math.sqrt(E / fy), says: '1.49 √(E/F_y)' },
+      stem: { most: ({ E, fy }) => 0.75 * Math.sqrt(E / fy), says: '0.75 √(E/F_y)' },
     },
     twistLeftOut,
     remark: () => null,

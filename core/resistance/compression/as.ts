@@ -47,9 +47,10 @@ const slenderRemark = (question: CompressionQuestion): string | null =>
     ? 'A leg is beyond the yield limit, so k_f is below 1: α_b is then 1.0, from memory, verify.'
     : null;
 
-/** Table 6.3.3: 0.5 for angles, tees, channels and what is not named, with k_f = 1; 1.0 below (verify). Tubes as cold formed, −0.5. */
+/** Table 6.3.3: 0 for a rolled I with flanges up to 40 mm, 0.5 for angles, tees, channels and what is not named, with k_f = 1; 1.0 below (verify). Tubes as cold formed, −0.5. */
 function constantOf(shape: SectionShape, kf: number): number {
   if (shape === 'round tube' || shape === 'square tube') return -0.5;
+  if (shape === 'I section' && kf >= FULL) return 0;
   return kf < FULL ? 1 : 0.5;
 }
 
@@ -62,6 +63,9 @@ export const AS: CompressionPack = {
     walls: {
       round: { most: ({ fy }) => (82 * 250) / fy, says: '82 × 250/f_y' },
       square: { most: ({ fy }) => 40 * Math.sqrt(250 / fy), says: '40 √(250/f_y)' },
+      flange: { most: ({ fy }) => 16 * Math.sqrt(250 / fy), says: '16 √(250/f_y)' },
+      web: { most: ({ fy }) => 45 * Math.sqrt(250 / fy), says: '45 √(250/f_y)' },
+      stem: { most: ({ fy }) => 16 * Math.sqrt(250 / fy), says: '16 √(250/f_y)' },
     },
     twistLeftOut: () => null,
     remark: slenderRemark,

@@ -1,5 +1,5 @@
 import type { PracticeId } from '../../project/model.ts';
-import type { CompressionQuestion, Resistance, SectionShape } from '../model.ts';
+import type { CompressionQuestion, Resistance, ResistingSection } from '../model.ts';
 import { resistance, Working } from '../working.ts';
 import { AISC } from './aisc.ts';
 import { AS } from './as.ts';
@@ -8,7 +8,7 @@ import { EN } from './en.ts';
 import { IS } from './is.ts';
 import type { ColumnRule, CompressionPack } from './pack.ts';
 import { CSA, SANS } from './sansAndCsa.ts';
-import { requireStoutWall } from './walls.ts';
+import { plateRemark, requireStoutWall, withStoutPlates } from './walls.ts';
 
 const PACKS: Readonly<Record<PracticeId, CompressionPack>> = {
   sans10162: SANS,
@@ -53,7 +53,14 @@ function byCriticalLoad(question: CompressionQuestion, column: ColumnRule): Resi
       kind: 'compression, critical load',
       title: 'Compression by the critical load',
       against: 'compression',
-      resistance: known === null ? null : column.strength(question, known / section.properties.area, working),
+      resistance:
+        known === null
+          ? null
+          : column.strength(
+              withStoutPlates(question, column.walls, working),
+              known / section.properties.area,
+              working,
+            ),
       standard: column.standard,
       clause: column.clause,
       confidence: hasRemark(question, column) ? 'from memory, verify' : column.confidence,
@@ -76,7 +83,7 @@ function byLengths(question: CompressionQuestion, column: ColumnRule): Resistanc
       kind: 'compression, lengths by the practice',
       title: `Compression over the unbraced lengths${twists ? ', bowing with twist' : ''}`,
       against: 'compression',
-      resistance: column.strength(question, Fe, working),
+      resistance: column.strength(withStoutPlates(question, column.walls, working), Fe, working),
       standard: column.standard,
       clause: rule.clause,
       confidence: beyondStandards || hasRemark(question, column) ? 'from memory, verify' : rule.confidence,
@@ -99,6 +106,7 @@ function twistLeftOut(question: CompressionQuestion, column: ColumnRule): string
     case 'starred angles':
     case 'tee':
     case 'channel':
+    case 'I section':
       return column.twistLeftOut(question);
     default:
       return question.section.shape satisfies never;
@@ -120,7 +128,8 @@ function noteOf(
     loadedAcross ? 'A load acts across the bar: a check with bending is still due.' : null,
     ofLengths,
     column.remark(question),
-    shapeNote(section.shape),
+    plateRemark(question, column.walls),
+    shapeNote(section),
   ];
   return notes.filter((note) => note !== null).join(' ') || null;
 }
@@ -132,11 +141,12 @@ function isEccentric({ section, ends }: CompressionQuestion): boolean {
 }
 
 /** What is not looked at in a shape. */
-function shapeNote(shape: SectionShape): string | null {
+function shapeNote({ shape, plates }: ResistingSection): string | null {
   switch (shape) {
     case 'angle':
     case 'flat':
     case 'rod':
+    case 'I section':
     case 'round tube':
     case 'square tube':
       return null;
@@ -145,7 +155,7 @@ function shapeNote(shape: SectionShape): string | null {
       return 'The two angles are taken as one bar: that battens or packs stand close enough to make them one is to be checked.';
     case 'tee':
     case 'channel':
-      return 'Whether its plates are too slender to yield is not looked at.';
+      return plates ? null : 'Whether its plates are too slender to yield is not looked at.';
     default:
       return shape satisfies never;
   }

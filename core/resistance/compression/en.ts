@@ -1,5 +1,5 @@
 /** EN 1993-1-1 6.3.1 and BB.1.2, EN 1993-1-5 4.4. Practice-facts D3. */
-import type { CompressionQuestion, SectionShape } from '../model.ts';
+import type { CompressionQuestion, ResistingSection, SectionShape } from '../model.ts';
 import { partialFactors } from '../tension/en.ts';
 import { resistance, Working } from '../working.ts';
 import { perry } from './curves.ts';
@@ -11,7 +11,7 @@ import type { CompressionPack } from './pack.ts';
  * Table 6.2: curve b for angles (2005, up to S460); for the others from memory: c for solid sections, tees and channels. Tubes are taken as cold formed, c
  * (hot finished ones have a); pairs of angles, which the table does not name, as c too.
  */
-const CURVES: Readonly<Record<SectionShape, 'b' | 'c'>> = {
+const CURVES: Readonly<Record<Exclude<SectionShape, 'I section'>, 'b' | 'c'>> = {
   angle: 'b',
   'angles back to back': 'c',
   'starred angles': 'c',
@@ -23,6 +23,12 @@ const CURVES: Readonly<Record<SectionShape, 'b' | 'c'>> = {
   'square tube': 'c',
 };
 const IMPERFECTION = { b: 0.34, c: 0.49 } as const;
+
+/** Of a rolled I that of its weaker axis, flanges up to 40 mm: b for h/b > 1.2, c below. */
+function curveOf({ shape, connectedLeg: depth, outstandingLeg: width }: ResistingSection): 'b' | 'c' {
+  if (shape !== 'I section') return CURVES[shape];
+  return depth > 1.2 * width ? 'b' : 'c';
+}
 
 /** Table 5.2, sheet 3: class 3 needs both. Legs that fail keep what EN 1993-1-5 4.4 leaves of them, often all. */
 function effectiveArea({ section, steel }: CompressionQuestion, working: Working): number {
@@ -66,7 +72,7 @@ function class4Remark(question: CompressionQuestion): string | null {
 
 function strengthAt(question: CompressionQuestion, lambda: number, area: number, working: Working): number {
   const { section, steel, options } = question;
-  const curve = CURVES[section.shape];
+  const curve = curveOf(section);
   const alpha = working.given(`imperfection, curve ${curve}`, 'α', IMPERFECTION[curve], 'factor');
   const { phi, chi } = perry(lambda, alpha);
   working.step('Perry’s term', 'Φ', '0.5 [1 + α (λ̄ − 0.2) + λ̄²]', phi, 'factor');
@@ -98,6 +104,9 @@ export const EN: CompressionPack = {
     walls: {
       round: { most: ({ fy }) => (90 * 235) / fy, says: '90 ε²' },
       square: { most: ({ fy }) => 42 * Math.sqrt(235 / fy), says: '42 ε' },
+      flange: { most: ({ fy }) => 14 * Math.sqrt(235 / fy), says: '14 ε' },
+      web: { most: ({ fy }) => 42 * Math.sqrt(235 / fy), says: '42 ε' },
+      stem: { most: ({ fy }) => 14 * Math.sqrt(235 / fy), says: '14 ε' },
     },
     twistLeftOut: () => null,
     remark: class4Remark,

@@ -1,5 +1,5 @@
 /** IS 800:2007 7.1.2 and 7.5.1. Practice-facts D5. */
-import type { CompressionQuestion, ResistingEnd, SectionShape } from '../model.ts';
+import type { CompressionQuestion, ResistingEnd, ResistingSection } from '../model.ts';
 import { GAMMA_M0 } from '../tension/is.ts';
 import { resistance, Working } from '../working.ts';
 import { perry } from './curves.ts';
@@ -8,8 +8,11 @@ import { CROSSED, isFirm, ONE_LEG, requireNothingAcross, requireSameLeg } from '
 import type { CompressionPack } from './pack.ts';
 
 /** Table 10, class c for all but hollow sections; those as cold formed, class b (verify). Table 7. */
-const classOf = (shape: SectionShape): 'b' | 'c' =>
-  shape === 'round tube' || shape === 'square tube' ? 'b' : 'c';
+function classOf({ shape, connectedLeg: depth, outstandingLeg: width }: ResistingSection): 'b' | 'c' {
+  if (shape === 'round tube' || shape === 'square tube') return 'b';
+  // Of a rolled I that of its weaker axis, flanges up to 40 mm.
+  return shape === 'I section' && depth > 1.2 * width ? 'b' : 'c';
+}
 const IMPERFECTION = { b: 0.34, c: 0.49 } as const;
 
 /** Table 2, angles in axial compression: each leg, and both together, over t (from memory, verify). */
@@ -54,7 +57,7 @@ function effectiveArea(question: CompressionQuestion, working: Working): number 
 
 function strengthAt(question: CompressionQuestion, lambda: number, symbol: string, working: Working): number {
   const { section, steel } = question;
-  const letter = classOf(section.shape);
+  const letter = classOf(section);
   const area = effectiveArea(question, working);
   const alpha = working.given(`imperfection, class ${letter}`, 'α', IMPERFECTION[letter], 'factor');
   const { phi, chi } = perry(lambda, alpha);
@@ -115,6 +118,9 @@ export const IS: CompressionPack = {
     walls: {
       round: { most: ({ fy }) => (88 * 250) / fy, says: '88 ε²' },
       square: { most: ({ fy }) => 42 * Math.sqrt(250 / fy), says: '42 ε' },
+      flange: { most: ({ fy }) => 15.7 * Math.sqrt(250 / fy), says: '15.7 ε' },
+      web: { most: ({ fy }) => 42 * Math.sqrt(250 / fy), says: '42 ε' },
+      stem: { most: ({ fy }) => 18.9 * Math.sqrt(250 / fy), says: '18.9 ε' },
     },
     twistLeftOut: () => null,
     remark: slenderRemark,

@@ -106,6 +106,9 @@ const pack = (standard: string, own: boolean): CompressionPack => ({
     walls: {
       round: { most: ({ fy }) => 23_000 / fy, says: '23 000/f_y' },
       square: { most: ({ fy }) => 670 / Math.sqrt(fy), says: '670/√f_y' },
+      flange: { most: ({ fy }) => 200 / Math.sqrt(fy), says: '200/√f_y' },
+      web: { most: ({ fy }) => 670 / Math.sqrt(fy), says: '670/√f_y' },
+      stem: { most: ({ fy }) => 340 / Math.sqrt(fy), says: '340/√f_y' },
     },
     twistLeftOut: () => null,
     remark: (question) => class4Remark(question, own),

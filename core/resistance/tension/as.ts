@@ -135,6 +135,7 @@ function correctionFor(
     case 'starred angles':
     case 'rod':
     case 'tee':
+    case 'I section':
     case 'round tube':
     case 'square tube':
       return null;

@@ -25,6 +25,7 @@ export function heldBy({ section }: TensionQuestion, end: ResistingEnd): Held {
     case 'rod':
     case 'tee':
     case 'channel':
+    case 'I section':
     case 'round tube':
     case 'square tube':
       return 'in part';

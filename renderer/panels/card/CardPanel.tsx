@@ -1,9 +1,8 @@
 import { type JSX, useEffect, useRef } from 'react';
-import type { Bar } from '../../../core/layout/model.ts';
-import { showLength } from '../../../core/units/quantity.ts';
 import { useWindow } from '../../shell/services.tsx';
 import { shownAssessment, shownProject } from '../../store/shown.ts';
 import { DiagonalCard } from './DiagonalCard.tsx';
+import { MemberCard } from './MemberCard.tsx';
 import './card.css';
 
 /** The card of the chosen bar, at full height: section, lanes, verdicts, reason, remedies. */
@@ -21,7 +20,7 @@ export function CardPanel(): JSX.Element {
       {assessment === null || found === undefined ? (
         <NothingChosen />
       ) : found.angle === null ? (
-        <MemberCard bar={found} />
+        <MemberCard bar={found} assessment={assessment} />
       ) : (
         <DiagonalCard bar={found} angle={found.angle} assessment={assessment} />
       )}
@@ -37,22 +36,5 @@ function NothingChosen(): JSX.Element {
         ? 'The card of a diagonal stands here: its section, its four lanes, the verdicts and the reason.'
         : 'Choose a diagonal in the view or in the schedule.'}
     </p>
-  );
-}
-
-/** A bar that is drawn to size and not checked. */
-function MemberCard({ bar }: { readonly bar: Bar }): JSX.Element {
-  const units = useWindow((state) => shownProject(state).settings.units);
-  return (
-    <div className="card-member">
-      <h2 className="card-title">
-        {bar.mark} · {bar.role === 'rail' ? 'side rail' : bar.role}
-      </h2>
-      <p className="second">
-        {bar.bay}. {bar.member?.name ?? 'No size given'}, {showLength(bar.length, units, 'spoken')} between
-        set-out points.
-      </p>
-      <p className="second">Drawn to size and not checked: only diagonals, knees and ties are.</p>
-    </div>
   );
 }

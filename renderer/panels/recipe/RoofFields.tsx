@@ -116,6 +116,7 @@ export function RoofMore({ bay, recipe, units }: FieldsProps): JSX.Element {
         word="Struts"
         member={recipe.struts}
         units={units}
+        checked
         onChange={(struts) => edit({ ...recipe, struts }, 'struts')}
       />
       <MemberFields

@@ -52,7 +52,7 @@ export function WallMore({ bay, recipe, units }: FieldsProps<WallRecipe>): JSX.E
           onChange={(lines, what) => edit({ ...recipe, lines }, what)}
         />
       </Fold>
-      <Fold title="Members" aside="drawn, not checked">
+      <Fold title="Members" aside="beams checked when squeezed">
         <MemberFields
           word="Columns"
           member={recipe.columns}
@@ -63,6 +63,7 @@ export function WallMore({ bay, recipe, units }: FieldsProps<WallRecipe>): JSX.E
           word="Beams"
           member={recipe.beams}
           units={units}
+          checked
           onChange={(beams) => edit({ ...recipe, beams }, 'beams')}
         />
         <MemberFields

@@ -1,6 +1,6 @@
 import type { Role } from '../../../core/project/model.ts';
 
-/** What a bar of a free bay may be; diagonals, knees and ties are checked. */
+/** What a bar of a free bay may be; diagonals, knees and ties are checked, beams and struts for what squeezes them. */
 export const ROLES: readonly { readonly value: Role; readonly label: string }[] = [
   { value: 'diagonal', label: 'diagonal' },
   { value: 'knee', label: 'knee' },

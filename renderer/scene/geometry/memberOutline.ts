@@ -2,8 +2,8 @@ import type { Vec2 } from '../../../core/geometry/vector.ts';
 import type { Member } from '../../../core/project/model.ts';
 
 /**
- * The outline of a member about its middle, anticlockwise in [across, along the depth], mm. The project names depth and width alone:
- * the thicknesses are those of ordinary sections of the size, for drawing only.
+ * The outline of a member about its middle, anticlockwise in [across, along the depth], mm. Thicknesses that
+ * the project does not give are those of ordinary sections of the size, for drawing only.
  */
 export function memberOutline(member: Member): readonly Vec2[] {
   const h = member.depth / 2;
@@ -17,8 +17,8 @@ export function memberOutline(member: Member): readonly Vec2[] {
         [-w, h],
       ];
     case 'I': {
-      const flange = Math.min(h, thickness(member.depth, 0.05, 6, 24));
-      const web = Math.min(w, thickness(member.depth, 0.03, 5, 16) / 2);
+      const flange = Math.min(h, member.flange ?? thickness(member.depth, 0.05, 6, 24));
+      const web = Math.min(w, (member.web ?? thickness(member.depth, 0.03, 5, 16)) / 2);
       return [
         [-w, -h],
         [w, -h],
@@ -48,7 +48,7 @@ export function memberOutline(member: Member): readonly Vec2[] {
       ];
     }
     case 'zed': {
-      const t = Math.min(h, w, thickness(member.depth, 0.015, 3, 6));
+      const t = Math.min(h, w, member.web ?? thickness(member.depth, 0.015, 3, 6));
       // The web stands in the middle; the lower flange points one way and the upper the other.
       return [
         [-t / 2, -h],
