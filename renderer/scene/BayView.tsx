@@ -1,5 +1,5 @@
 import { type JSX, type KeyboardEvent, useCallback, useMemo, useRef, useState } from 'react';
-import type { BayLayout, Layout } from '../../core/layout/model.ts';
+import type { Bar, BayLayout, Layout } from '../../core/layout/model.ts';
 import type { BayViewProps } from './bayViewProps.ts';
 import { overlayMotion } from './bowing/overlayMotion.ts';
 import { forceAfterKey, placeAfterKey, pushKey } from './bowing/pushKeys.ts';
@@ -75,10 +75,7 @@ export function BayView(props: BayViewProps): JSX.Element {
     () => partsOf(hoveredBar === selectedBar ? null : hoveredBar),
     [partsOf, hoveredBar, selectedBar],
   );
-  const targets = useMemo(
-    () => targetsOf(inHand, (id) => layout.bars.get(id)?.angle != null),
-    [inHand, layout],
-  );
+  const targets = useMemo(() => targetsOf(inHand, (id) => isChosen(layout.bars.get(id))), [inHand, layout]);
   const whole = useMemo(() => subjectOf(layout, null), [layout]);
   const subject = useMemo(() => (bay === null ? null : subjectOf(layout, bay)), [layout, bay]);
   const content = useMemo(
@@ -210,3 +207,7 @@ function stageName(bay: BayLayout | null, turns: boolean, pushed: string | null)
   const keys = turns ? 'Arrows turn it, shift and arrows move it' : 'Shift and arrows move it';
   return `Drawing of ${of}. ${keys}, plus and minus zoom, Home fits it.`;
 }
+
+/** What a click chooses: bars of angle, and the members that are checked beside them. */
+const isChosen = (bar: Bar | undefined): boolean =>
+  bar !== undefined && (bar.angle !== null || bar.role === 'strut' || bar.role === 'beam');

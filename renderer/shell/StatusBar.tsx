@@ -25,8 +25,9 @@ function ChosenText(): JSX.Element | null {
     if (assessment === null) return null;
     const count = assessment.schedule.length;
     const diagonals = `${count} ${count === 1 ? 'diagonal' : 'diagonals'}`;
-    const mark = state.selection.bar === null ? null : assessment.layout.bars.get(state.selection.bar)?.mark;
-    return mark == null ? diagonals : `${mark} selected, 1 of ${diagonals}`;
+    const bar = state.selection.bar === null ? null : assessment.layout.bars.get(state.selection.bar);
+    if (!bar) return diagonals;
+    return bar.angle ? `${bar.mark} selected, 1 of ${diagonals}` : `${bar.bay} ${bar.mark} selected`;
   });
   return text === null ? null : <span>{text}</span>;
 }

@@ -99,14 +99,14 @@ function Squeezed({ bar, checks, assessment, units }: SqueezedProps): JSX.Elemen
           {check.resistance.conditions
             .filter(({ met }) => !met)
             .map((condition) => (
-              <p key={condition.says} className="second">
-                <SeverityGlyph severity="look into" /> {conditionWords(condition)}
+              <p key={condition.says} className="member-caution">
+                <SeverityGlyph severity="look into" /> <span>{conditionWords(condition)}</span>
               </p>
             ))}
           {moment > 0 && (
-            <p className="second">
-              <SeverityGlyph severity="look into" /> It bends too, by up to {showMoment(moment, units)}: that
-              is not checked here.
+            <p className="member-caution">
+              <SeverityGlyph severity="look into" />{' '}
+              <span>It bends too, by up to {showMoment(moment, units)}: that is not checked here.</span>
             </p>
           )}
           {forces !== null && (

@@ -28,7 +28,8 @@ export function Dock(): JSX.Element {
   const bay = useWindow((state) => state.selection.bay);
   const mark = useWindow((state) => {
     const { bar } = state.selection;
-    return bar === null ? '' : (shownAssessment(state)?.layout.bars.get(bar)?.mark ?? '');
+    const chosen = bar === null ? undefined : shownAssessment(state)?.layout.bars.get(bar);
+    return chosen?.angle ? chosen.mark : '';
   });
   const [schedule, setSchedule] = useState(FIRST_SCHEDULE_VIEW);
   const [shortlist, setShortlist] = useState(FIRST_SHORTLIST_VIEW);

@@ -1,7 +1,7 @@
 import { type JSX, useState } from 'react';
 import type { Candidate } from '../../../core/shortlist/model.ts';
 import { useWindow } from '../../shell/services.tsx';
-import { shownProject } from '../../store/shown.ts';
+import { shownAssessment, shownProject } from '../../store/shown.ts';
 import { CandidateCard } from './CandidateCard.tsx';
 import { candidateKey } from './candidateKey.ts';
 import { ShortlistPicture } from './ShortlistPicture.tsx';
@@ -21,7 +21,10 @@ interface ShortlistPanelProps {
 export function ShortlistPanel({ view, answer, onChange }: ShortlistPanelProps): JSX.Element {
   const units = useWindow((state) => shownProject(state).settings.units);
   const [chosen, setChosen] = useState<string | null>(null);
-  const bar = useWindow((state) => state.selection.bar);
+  const bar = useWindow((state) => {
+    const { bar: id } = state.selection;
+    return id !== null && shownAssessment(state)?.diagonals.has(id) ? id : null;
+  });
   if (answer === null)
     return (
       <p className="shortlist-none" role="status">

@@ -1,4 +1,4 @@
-/** What the find box can find: commands, bays, diagonals, crossings and findings, each with what choosing it does. */
+/** What the find box can find: commands, bays, diagonals, struts, beams, crossings and findings, each with what choosing it does. */
 import type { Assessment } from '../../../core/assessment.ts';
 import type { Crossing } from '../../../core/layout/model.ts';
 import { shownSection } from '../../controls/figures.ts';
@@ -9,7 +9,7 @@ import { COMMANDS, runCommand } from '../commands/commands.ts';
 import type { Services } from '../services.tsx';
 import { isWhole, scoreOf } from './fuzzy.ts';
 
-export type FindableKind = 'Diagonals' | 'Bays' | 'Crossings' | 'Findings' | 'Commands';
+export type FindableKind = 'Diagonals' | 'Struts and beams' | 'Bays' | 'Crossings' | 'Findings' | 'Commands';
 
 export interface Findable {
   readonly id: string;
@@ -19,7 +19,14 @@ export interface Findable {
   choose(services: Services): void;
 }
 
-const KINDS: readonly FindableKind[] = ['Diagonals', 'Bays', 'Crossings', 'Findings', 'Commands'];
+const KINDS: readonly FindableKind[] = [
+  'Diagonals',
+  'Struts and beams',
+  'Bays',
+  'Crossings',
+  'Findings',
+  'Commands',
+];
 /** Of one kind, so that a long project leaves room for the others. */
 const MOST_OF_A_KIND = 6;
 /** Puts what is called exactly so before all that only fits, however long the rest of what is told of it. */
@@ -46,7 +53,7 @@ export function found(typed: string, state: WindowState): readonly Findable[] {
 
 function inProject(assessment: Assessment | null): readonly Findable[] {
   if (assessment === null) return [];
-  const { layout, findings, schedule } = assessment;
+  const { layout, findings, members, schedule } = assessment;
   const markOf = (bar: string): string => layout.bars.get(bar)?.mark ?? bar;
   return [
     ...schedule.map(
@@ -56,6 +63,15 @@ function inProject(assessment: Assessment | null): readonly Findable[] {
         label: row.mark,
         aside: `${row.bay}, ${shownSection(row.section)}`,
         choose: ({ actions }) => actions.selectBar(row.bar),
+      }),
+    ),
+    ...[...members.values()].map(
+      ({ bar, member }): Findable => ({
+        id: `member ${bar}`,
+        kind: 'Struts and beams',
+        label: markOf(bar),
+        aside: `${layout.bars.get(bar)?.bay ?? ''}, ${member.name}`,
+        choose: ({ actions }) => actions.selectBar(bar),
       }),
     ),
     ...layout.bays.map(

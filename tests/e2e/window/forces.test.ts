@@ -57,6 +57,26 @@ describe('wind on the gables of the example', () => {
   });
 });
 
+describe('a beam at the head of a tier', () => {
+  it('is found by its name, shows what squeezes it and what it resists, and gains by a thicker web and flange', async () => {
+    await page.keyboard.press('Control+k');
+    await page.getByRole('combobox', { name: 'Find a bar or a command' }).fill('t1.beam W1');
+    await page.getByRole('option', { name: /t1\.beam W1/ }).click();
+    const part = page.getByRole('region', { name: 'Compression of t1.beam' });
+    // SANS 10162-1, 13.3.1, by hand: UB 203 × 133 × 25 without fillets over 6 m, L/r_y 192, 143 kN.
+    await expect.poll(() => part.innerText()).toMatch(/143 kN[\s\S]*192/);
+    await part.getByText('Show the working').click();
+    expect(await part.innerText()).toMatch(/13\.3\.1/);
+    await page.locator('summary', { hasText: 'Members' }).click();
+    const beams = page.getByRole('group', { name: 'Beams' });
+    await beams.getByRole('spinbutton', { name: 'Flange' }).fill('12');
+    await beams.getByRole('spinbutton', { name: 'Flange' }).press('Enter');
+    await expect.poll(() => part.innerText()).not.toMatch(/143 kN/);
+    await beams.getByRole('checkbox', { name: 'Usual thicknesses for its size' }).check();
+    await expect.poll(() => part.innerText()).toMatch(/Not met: its thicknesses are given/);
+  });
+});
+
 describe('the faults planted in the example', () => {
   it('are mended by one remedy after another until nothing must be fixed, and the report is made of what is left', async () => {
     const counts = page.getByRole('button', { name: /^Findings: / });
