@@ -82,7 +82,8 @@ function withChecks(
   depth: AssessmentDepth,
 ): ReadonlyMap<BarId, Judged> {
   if (depth === 'by the marks') return judged;
-  return new Map([...judged].map(([id, each]) => [id, { ...each, checks: barChecks(input, each) }]));
+  const remembering = { ...input, tensions: new Map() };
+  return new Map([...judged].map(([id, each]) => [id, { ...each, checks: barChecks(remembering, each) }]));
 }
 
 /** Struts and beams, bay by bay. */

@@ -1,6 +1,6 @@
 import { compressionResistances } from '../resistance/compression/compressionResistances.ts';
 import { governingCompression } from '../resistance/compression/governingCompression.ts';
-import type { Resistance } from '../resistance/model.ts';
+import type { Resistance, TensionQuestion } from '../resistance/model.ts';
 import { tensionResistances } from '../resistance/tension/tensionResistances.ts';
 import type { Demands } from './demands.ts';
 import type { CheckInput } from './input.ts';
@@ -21,7 +21,7 @@ export function sectionChecks(
   // Bolts and welds know no sign.
   const greater = greaterOf(demands.tension, demands.compression);
   const checks = [
-    ...tensionResistances(question).map((each) =>
+    ...inTension(input, placed, question).map((each) =>
       checkOf(each, each.against === 'either' ? greater : demands.tension),
     ),
     ...inCompression.map((each) =>
@@ -29,6 +29,29 @@ export function sectionChecks(
     ),
   ];
   return { checks, governing: governingOf(checks), compressionBy };
+}
+
+/** Alike bars share one list: it is the same, and found once. */
+function inTension(
+  { tensions }: CheckInput,
+  { angle, steel }: PlacedSection,
+  question: TensionQuestion,
+): readonly Resistance[] {
+  if (!tensions) return tensionResistances(question);
+  const { spec, placement, ends } = angle;
+  const key = JSON.stringify([
+    question.section.designation,
+    spec.legInPlane,
+    spec.gusset,
+    placement.gauge,
+    steel.grade,
+    ends,
+  ]);
+  const known = tensions.get(key);
+  if (known) return known;
+  const found = tensionResistances(question);
+  tensions.set(key, found);
+  return found;
 }
 
 /** A resistance with what acts against it. */

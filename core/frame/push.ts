@@ -135,9 +135,7 @@ function stiffnessAt(solver: FrameSolver, unknowns: readonly number[]): Float64A
   const n = unknowns.length;
   const F = new Float64Array(n * n);
   unknowns.forEach((unknown, column) => {
-    const load = new Float64Array(solver.size);
-    load[unknown] = 1;
-    const x = solver.solve(load);
+    const x = solver.solveUnit(unknown);
     unknowns.forEach((other, row) => {
       F[row * n + column] = x[other] ?? 0;
     });

@@ -23,6 +23,7 @@ export class FrameSolver {
   /** First unknown of the displacements and of the rotations of each node, in its axes; −1 where fixed. */
   readonly displacementOf: Int32Array;
   readonly rotationOf: Int32Array;
+  readonly #units = new Map<number, Float64Array>();
   readonly #factors: Factored;
   #hidden = 0;
 
@@ -87,6 +88,17 @@ export class FrameSolver {
 
   solve(load: Float64Array): Float64Array {
     return solved(this.#factors, load);
+  }
+
+  /** Displacements under a load of one on an unknown. Bars that end at one node ask for the same. */
+  solveUnit(unknown: number): Float64Array {
+    const known = this.#units.get(unknown);
+    if (known) return known;
+    const load = new Float64Array(this.size);
+    load[unknown] = 1;
+    const found = this.solve(load);
+    this.#units.set(unknown, found);
+    return found;
   }
 
   loadOf(forces: readonly NodeForce[]): Float64Array {
