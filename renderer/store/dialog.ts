@@ -4,6 +4,7 @@ import type { HostProblem, RecoveryCopy } from '../host/host.ts';
 /** What was asked for when unsaved changes stood in the way. */
 export type NextStep =
   | { readonly kind: 'new' }
+  | { readonly kind: 'example' }
   | { readonly kind: 'open' }
   | { readonly kind: 'open recent'; readonly token: string }
   | { readonly kind: 'close' };

@@ -1,7 +1,7 @@
 /** Opening, saving and handing over: what passes between the window and its host. The open project is never touched by a failure. */
 import type { StoreApi } from 'zustand/vanilla';
 import { newProject } from '../../core/project/newProject.ts';
-import { readProject } from '../../core/project/readProject.ts';
+import { readProject, readProjectData } from '../../core/project/readProject.ts';
 import { writeProject } from '../../core/project/writeProject.ts';
 import type { Assessor } from '../assessing/assessor.ts';
 import { reportFonts } from '../assessing/reportFonts.ts';
@@ -15,6 +15,8 @@ export interface Documents {
   /** The file given at start, the example, or what a crash left over. */
   begin(): Promise<void>;
   newProject(): Promise<void>;
+  /** As at the first start: a project of its own, in no file. */
+  openExample(): Promise<void>;
   open(): Promise<void>;
   openRecent(token: string): Promise<void>;
   /** True when the project is safely in its file. */
@@ -54,6 +56,14 @@ export function documents(parts: Parts): Documents {
       case 'new': {
         const fresh = newProject('New project');
         actions.replaceProject(fresh, { name: fresh.name, token: null, saved: true });
+        return;
+      }
+      case 'example': {
+        const { default: example } = await import('../../assets/examples/marrow-lane.json');
+        const name = 'marrow-lane.json';
+        const read = readProjectData(example);
+        if (read.ok) actions.replaceProject(read.project, { name, token: null, saved: true });
+        else actions.openDialog({ kind: 'broken file', name, problems: read.problems });
         return;
       }
       case 'open':
@@ -155,6 +165,7 @@ export function documents(parts: Parts): Documents {
       if (recovery !== null) actions.openDialog({ kind: 'recovery', copy: recovery });
     },
     newProject: () => unlessUnsaved({ kind: 'new' }),
+    openExample: () => unlessUnsaved({ kind: 'example' }),
     open: () => unlessUnsaved({ kind: 'open' }),
     openRecent: (token) => unlessUnsaved({ kind: 'open recent', token }),
     save,

@@ -1,16 +1,4 @@
-import { readProjectData } from '../../../core/project/readProject.ts';
-import { isChanged } from '../../store/shown.ts';
-import type { Services } from '../services.tsx';
 import type { Command } from './command.ts';
-
-/** As at the first start: a project of its own, in no file. */
-async function openExample({ actions }: Services): Promise<void> {
-  const name = 'marrow-lane.json';
-  const { default: example } = await import('../../../assets/examples/marrow-lane.json');
-  const read = readProjectData(example);
-  if (read.ok) actions.replaceProject(read.project, { name, token: null, saved: true });
-  else actions.openDialog({ kind: 'broken file', name, problems: read.problems });
-}
 
 export const fileCommands: readonly Command[] = [
   {
@@ -33,9 +21,7 @@ export const fileCommands: readonly Command[] = [
     menu: 'File',
     group: 1,
     label: () => 'Open the example',
-    // What is in no file yet would be lost.
-    enabled: (state) => !isChanged(state),
-    run: (services) => void openExample(services),
+    run: ({ documents }) => void documents.openExample(),
   },
   {
     id: 'save',

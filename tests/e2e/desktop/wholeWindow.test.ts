@@ -1,6 +1,7 @@
 import { readFile, writeFile } from 'node:fs/promises';
 import path from 'node:path';
 import { afterEach, beforeEach, describe, expect, it } from 'vitest';
+import { choose, command, lanes } from '../window/openedWindow.ts';
 import { until } from './asking.ts';
 import type { Desktop } from './desktop.ts';
 import { startDesktop, testFolder } from './startDesktop.ts';
@@ -62,6 +63,77 @@ describe('the whole window on the desktop', () => {
       (text) => text !== '',
     );
     expect(schedule.split('\n')[0]).toMatch(/mark/i);
+    expect(complaints).toEqual([]);
+  });
+
+  it('takes a wall bay from nothing to its schedule: joined, mended, a size picked, undone, saved, opened again', async () => {
+    await start([]);
+    await until(desktop.title, (title) => title.includes('Marrow Lane'));
+    const { page } = desktop;
+    await desktop.clickMenu('file.new');
+    await until(desktop.title, (title) => title.includes('New project'));
+    await command(page, 'Bay', 'Add a wall bay');
+    const recipe = page.getByRole('region', { name: /^Recipe of/ });
+    for (const [name, value] of [
+      ['Width', '4800'],
+      [/^Tier 1/, '3600'],
+    ] as const) {
+      const field = recipe.getByRole('spinbutton', { name }).first();
+      await field.fill(value);
+      await field.press('Enter');
+    }
+    await choose(page, 'D1');
+    // 6.000 m over 1.37 cm (SCI P363, L 70×70×6) where nothing is joined; the half of it about v where the crossing is bolted.
+    await expect.poll(async () => Math.abs((await lanes(page, 'D1')).v ?? 0)).toBeGreaterThan(435);
+    await page.locator('[data-crossing]').first().click();
+    const crossing = page.getByRole('region', { name: /^Crossing D1/ });
+    await crossing.getByRole('radio', { name: 'bolted through' }).locator('xpath=ancestor::label').click();
+    await expect.poll(async () => (await lanes(page, 'D1')).v).toBeLessThan(221);
+    await page.keyboard.press('Escape');
+
+    await page.getByRole('tab', { name: /^Shortlist/ }).click();
+    const list = page.getByRole('listbox', { name: 'Stock angles by mass' });
+    await list.getByRole('option').first().waitFor();
+    await list.focus();
+    for (let step = 0; step < 60; step++) await page.keyboard.press('ArrowRight');
+    await page
+      .getByRole('region', { name: 'Chosen stock angle' })
+      .getByRole('button', { name: /^Take it for/ })
+      .click();
+    await until(
+      async () => Math.max(...Object.values(await lanes(page, 'D1'))),
+      (worst) => worst < 150,
+    );
+    await desktop.clickMenu('edit.undo');
+    await expect.poll(async () => (await lanes(page, 'D1')).v).toBeGreaterThan(210);
+
+    const file = path.join(folder.path, 'wall.json');
+    await desktop.reply('save', { canceled: false, filePath: file });
+    await desktop.clickMenu('file.save');
+    await until(desktop.title, (title) => title.includes('wall'));
+    const saved = JSON.parse(await readFile(file, 'utf8'));
+    expect(saved.bays[0].recipe.width).toBe(4800);
+    expect(Object.values(saved.bays[0].joins)).toEqual([{ kind: 'bolted' }]);
+
+    await desktop.clickMenu('file.new');
+    await until(
+      () => page.getByRole('grid', { name: 'Schedule' }).getByRole('row', { name: /^D1/ }).count(),
+      (count) => count === 0,
+    );
+    await desktop.reply('open', { canceled: false, filePaths: [file] });
+    await desktop.clickMenu('file.open');
+    await choose(page, 'D1');
+    await expect.poll(async () => (await lanes(page, 'D1')).v).toBeLessThan(221);
+
+    const csv = path.join(folder.path, 'wall.csv');
+    await desktop.reply('save', { canceled: false, filePath: csv });
+    await desktop.clickMenu('file.exportCsv');
+    const schedule = await until(
+      () => readFile(csv, 'utf8').catch(() => ''),
+      (text) => text !== '',
+    );
+    // One head and two diagonals.
+    expect(schedule.trim().split(/\r?\n/)).toHaveLength(3);
     expect(complaints).toEqual([]);
   });
 
