@@ -3,7 +3,7 @@ import type { Steel } from '../resistance/model.ts';
 import { type Demands, demandsOn } from './demands.ts';
 import type { CheckedBar, CheckInput } from './input.ts';
 import type { BarChecks, Check } from './model.ts';
-import { greaterOf, sectionChecks } from './sectionChecks.ts';
+import { greaterOf, sectionChecks, silentChecks } from './sectionChecks.ts';
 
 /** From this share of a resistance on, a bar is near it. */
 const NEAR = 0.85;
@@ -29,7 +29,8 @@ export function barChecks(input: CheckInput, checked: CheckedBar): BarChecks {
   const criticalLoad = bowing && bowing.unsupported === null && bowing.real.N > 0 ? bowing.real.N : null;
   const found = sectionChecks(input, { bar, angle, stock, steel, restraint, criticalLoad }, demands);
   const loaded = greaterOf(demands.tension, demands.compression) !== null;
-  return { ...blank, ...found, steel, status: statusOf(found.governing, loaded), unknown: null };
+  const silent = silentChecks({ ...demands, ...found }).length > 0;
+  return { ...blank, ...found, steel, status: statusOf(found.governing, loaded, silent), unknown: null };
 }
 
 /** The steel that a grade names under the project's practice; null when it names none. */
@@ -39,9 +40,10 @@ export function steelOf({ practice, project }: CheckInput, grade: string, thickn
 }
 
 /** How a bar stands whose most used check is this. */
-export function statusOf(governing: Check | null, loaded: boolean): BarChecks['status'] {
+export function statusOf(governing: Check | null, loaded: boolean, silent: boolean): BarChecks['status'] {
   if (!loaded) return 'no load';
   const utilisation = governing?.utilisation;
   if (utilisation == null) return 'unknown';
-  return utilisation > 1 ? 'over' : utilisation >= NEAR ? 'near' : 'within';
+  if (utilisation > 1) return 'over';
+  return silent ? 'unknown' : utilisation >= NEAR ? 'near' : 'within';
 }

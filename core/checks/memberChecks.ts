@@ -88,7 +88,7 @@ export function memberChecks(
     slenderness,
     limit: limit.limit,
     check,
-    status: statusOf(check, demands.compression !== null),
+    status: statusOf(check, demands.compression !== null, false),
     unknown: null,
   };
 }

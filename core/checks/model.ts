@@ -17,7 +17,7 @@ export interface Check {
   readonly resistance: Resistance;
   /** Null while nothing acts: the resistance stands alone. */
   readonly demand: Demand | null;
-  /** Demand over resistance; null where one of them is missing. */
+  /** Demand over resistance, 999 at most: nothing resists. Null where one of them is missing. */
   readonly utilisation: number | null;
 }
 
@@ -34,6 +34,7 @@ export interface BarChecks {
   readonly governing: Check | null;
   /** What compression is judged by, if the bar is counted on in it or is squeezed. */
   readonly compressionBy: Resistance | null;
+  /** 'unknown' too where a check that what acts calls for gives no figure, unless another is over. */
   readonly status: 'over' | 'near' | 'within' | 'unknown' | 'no load';
   /** Why nothing could be checked; null otherwise. */
   readonly unknown: string | null;

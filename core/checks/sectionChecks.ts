@@ -54,19 +54,48 @@ function inTension(
   return found;
 }
 
+/** Nothing resists, or next to nothing. */
+export const MOST_USED = 999;
+
+const usedOf = (force: number, resistance: number): number =>
+  resistance > 0 ? Math.min(MOST_USED, force / resistance) : MOST_USED;
+
 /** A resistance with what acts against it. */
 export function checkOf(resistance: Resistance, demand: Demand | null): Check {
   const { resistance: most } = resistance;
   return {
     resistance,
     demand,
-    utilisation: demand !== null && most !== null && most > 0 ? demand.force / most : null,
+    utilisation: demand !== null && most !== null ? usedOf(demand.force, most) : null,
   };
 }
 
 export function greaterOf(a: Demand | null, b: Demand | null): Demand | null {
   if (!a || !b) return a ?? b;
   return b.force > a.force ? b : a;
+}
+
+/** Checks that what acts calls for and that give no figure: what they are to show is not shown. */
+export function silentChecks({
+  checks,
+  tension,
+  compression,
+  compressionBy,
+}: Pick<BarChecks, 'checks' | 'tension' | 'compression' | 'compressionBy'>): readonly Check[] {
+  const noFigure = compression !== null && (compressionBy?.resistance ?? null) === null;
+  return checks.filter(({ resistance: { against, resistance } }) => {
+    if (resistance !== null) return false;
+    switch (against) {
+      case 'tension':
+        return tension !== null;
+      case 'compression':
+        return noFigure;
+      case 'either':
+        return tension !== null || compression !== null;
+      default:
+        return against satisfies never;
+    }
+  });
 }
 
 /** The most used; of what nothing acts on, the weakest in tension. */

@@ -1,4 +1,4 @@
-import type { BarChecks, Check } from '../checks/model.ts';
+import type { BarChecks } from '../checks/model.ts';
 import type { Finding } from '../findings/model.ts';
 import type { AngleBar, Bar, BarId, BayLayout, Crossing, Layout } from '../layout/model.ts';
 import type { LimitInForce, Verdict } from '../practice/model.ts';
@@ -93,8 +93,9 @@ function rowOf(
             compression: diagonal.checks.compression?.force ?? 0,
           }
         : null,
-    utilisation: diagonal.checks?.governing?.utilisation ?? null,
-    governingCheck: checkWords(diagonal.checks?.governing ?? null),
+    utilisation:
+      diagonal.checks && isShown(diagonal.checks) ? (diagonal.checks.governing?.utilisation ?? null) : null,
+    governingCheck: diagonal.checks && checkWords(diagonal.checks),
     endsHold: endsHoldOf(angle),
     overrides: (angle.mark.overrides ?? []).map(({ axis, length, factor, reason }) => ({
       axis,
@@ -122,9 +123,14 @@ function governingOf(
   };
 }
 
+/** A bar whose checks leave something open has no figure for how much of it is used. */
+const isShown = ({ status }: BarChecks): boolean => status !== 'unknown';
+
 /** Where something acts, what is used most: "net rupture, end i, 13.2(a)(iii)". */
-function checkWords(check: Check | null): string | null {
+function checkWords(checks: BarChecks): string | null {
+  const check = checks.governing;
   if (check === null || check.utilisation === null) return null;
+  if (!isShown(checks)) return 'not checked: a rule gives no figure';
   const { kind, end, clause } = check.resistance;
   return [kind, ...(end === null ? [] : [`end ${end}`]), clause].join(', ');
 }

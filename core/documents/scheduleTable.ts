@@ -2,7 +2,7 @@ import type { UnitSystem } from '../project/model.ts';
 import { endsMarkedFree } from '../restraint/endWords.ts';
 import { AXES } from '../section/model.ts';
 import { grouped } from '../units/figures.ts';
-import { showForce } from '../units/loads.ts';
+import { showForce, showUse } from '../units/loads.ts';
 import { showLength, showSlenderness } from '../units/quantity.ts';
 import { KG_PER_POUND, unitNames } from '../units/unitSystem.ts';
 import type { RowVerdict, ScheduleRow } from './model.ts';
@@ -70,7 +70,7 @@ function loadCells(row: ScheduleRow, units: UnitSystem): readonly string[] {
   return [
     force(row.force?.tension),
     force(row.force?.compression),
-    row.utilisation === null ? ABSENT : row.utilisation.toFixed(2),
+    showUse(row.utilisation),
     row.governingCheck ?? ABSENT,
   ];
 }

@@ -1,6 +1,7 @@
 /** What the checks of resistance show. */
 import type { Check } from '../checks/model.ts';
-import { showForce } from '../units/loads.ts';
+import { silentChecks } from '../checks/sectionChecks.ts';
+import { sayUsed, showForce } from '../units/loads.ts';
 import type { Finding } from './model.ts';
 import { type FindingSubject, grouped, isAre, type Judged, judgedIn, marksInWords } from './subject.ts';
 
@@ -41,7 +42,7 @@ function exceeded(subject: FindingSubject, all: readonly Judged[]): readonly Fin
         breaksLimit: true,
         bay: worst.bar.bay,
         bars: group.map(({ bar }) => bar.id),
-        title: `${marksInWords(group)} ${isAre(group)} too weak: ${resistance.title.toLowerCase()} used ${(100 * used(worst)).toFixed(0)} %`,
+        title: `${marksInWords(group)} ${isAre(group)} too weak: ${resistance.title.toLowerCase()} ${sayUsed(used(worst))}`,
         detail: `${worst.bar.mark} carries ${showForce(demand.force, units)} in ${demand.name}; it resists ${showForce(resistance.resistance ?? 0, units)} by ${resistance.standard} ${resistance.clause} (${resistance.confidence})${resistance.end === null ? '' : `, at end ${resistance.end}`}.`,
         value: used(worst),
         limit: 1,
@@ -60,13 +61,8 @@ function unchecked(subject: FindingSubject, all: readonly Judged[]): readonly Fi
     const { checks } = judged;
     if (!checks || !judged.angle.stock || !judged.restraint) return [];
     if (checks.unknown !== null) return [{ judged, why: checks.unknown }];
-    if (checks.compression && (checks.compressionBy?.resistance ?? null) === null)
-      return [{ judged, why: whyNot(checks.checks, 'compression') }];
-    // A pull that some rule gives no figure for is not shown to be carried.
-    const silent = checks.checks.some(
-      ({ resistance }) => resistance.against === 'tension' && resistance.resistance === null,
-    );
-    return checks.tension && silent ? [{ judged, why: whyNot(checks.checks, 'tension') }] : [];
+    const silent = silentChecks(checks);
+    return silent.length > 0 ? [{ judged, why: whyNot(silent) }] : [];
   });
   return grouped(open, ({ why }) => why).flatMap((group): readonly Finding[] => {
     const [first] = group;
@@ -78,6 +74,7 @@ function unchecked(subject: FindingSubject, all: readonly Judged[]): readonly Fi
         id: `unchecked:${first.judged.bar.id}`,
         kind: 'not checked',
         severity: 'must fix',
+        breaksLimit: true,
         bay: first.judged.bar.bay,
         bars: judged.map(({ bar }) => bar.id),
         title: `${marksInWords(judged)} ${isAre(judged)} not checked for what ${judged.length > 1 ? 'they carry' : 'it carries'}`,
@@ -87,14 +84,12 @@ function unchecked(subject: FindingSubject, all: readonly Judged[]): readonly Fi
   });
 }
 
-function whyNot(checks: readonly Check[], against: 'tension' | 'compression'): string {
-  const failed = checks
-    .filter(({ resistance }) => resistance.against === against && resistance.resistance === null)
+function whyNot(silent: readonly Check[]): string {
+  const failed = silent
     .flatMap(({ resistance }) => resistance.conditions.filter(({ met }) => !met))
     .map(({ says, found }) => (found === null ? says : `${says} (${found})`));
-  return failed.length > 0
-    ? `No rule for ${against} applies here: ${[...new Set(failed)].join('; ')}.`
-    : `No rule for ${against} applies here.`;
+  const against = [...new Set(silent.map(({ resistance }) => resistance.title.toLowerCase()))].join(', ');
+  return `No rule held here gives a figure for ${against}${failed.length > 0 ? `: ${[...new Set(failed)].join('; ')}` : ''}.`;
 }
 
 /** Edges, ends and pitches below the least, and single bolts. */

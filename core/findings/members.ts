@@ -1,6 +1,6 @@
 /** What struts and beams show when they are squeezed. */
 import type { MemberChecks } from '../checks/model.ts';
-import { showForce } from '../units/loads.ts';
+import { sayUsed, showForce } from '../units/loads.ts';
 import type { Finding } from './model.ts';
 import { type FindingSubject, grouped } from './subject.ts';
 
@@ -55,7 +55,7 @@ function tooWeak(subject: FindingSubject, all: readonly MemberChecks[]): readonl
         kind: 'strut too weak',
         bay: subject.layout.bars.get(worst.bar)?.bay ?? '',
         bars: group.map(({ bar }) => bar),
-        title: `${worst.member.name}: squeezed too far, compression used ${(100 * used(worst)).toFixed(0)} %`,
+        title: `${worst.member.name}: squeezed too far, compression ${sayUsed(used(worst))}`,
         detail: `${showForce(compression.force, units)} in ${compression.name} against ${showForce(resistance.resistance ?? 0, units)} by ${resistance.standard} ${resistance.clause} (${resistance.confidence}).${assumedWords(worst)} Choose a heavier member in the bay’s fields.`,
         value: used(worst),
         limit: 1,

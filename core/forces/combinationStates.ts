@@ -16,15 +16,12 @@ function statesOf(combination: Combination, actions: Actions): readonly Combinat
     combination.name.trim() ||
     acting.map(({ id }) => `${String(combination.factors[id] ?? 0)} ${id}`).join(' + ');
   return turnings(either).flatMap((turned) =>
-    leanings(combination, either, turned).map((leaning): CombinationState => {
+    leanings(combination).map((leaning): CombinationState => {
       const says = [
         ...(turned.length > 0 ? [`${turned.join(' and ')} turned round`] : []),
-        ...(combination.leaning && either.length === 0 ? [`leaning ${leaning > 0 ? 'right' : 'left'}`] : []),
+        ...(leaning === 0 ? [] : [leaning > 0 ? 'leaning on' : 'leaning back']),
       ];
-      const marks = [
-        ...turned.map((id) => `-${id}`),
-        ...(leaning < 0 && either.length === 0 ? ['-lean'] : []),
-      ];
+      const marks = [...turned.map((id) => `-${id}`), ...(leaning < 0 ? ['-lean'] : [])];
       return {
         id: [combination.id, ...marks].join(' '),
         combination: combination.id,
@@ -49,14 +46,6 @@ function turnings(either: readonly string[]): readonly (readonly string[])[] {
   );
 }
 
-/** What leans goes with the first of the cases that turn; alone it leans both ways. */
-function leanings(
-  combination: Combination,
-  either: readonly string[],
-  turned: readonly string[],
-): readonly CombinationState['leaning'][] {
-  if (!combination.leaning) return [0];
-  const [first] = either;
-  if (first === undefined) return [1, -1];
-  return [turned.includes(first) ? -1 : 1];
-}
+/** What is out of plumb may lean with any load and against it: towards greater X or Y, and back. */
+const leanings = ({ leaning }: Combination): readonly CombinationState['leaning'][] =>
+  leaning ? [1, -1] : [0];

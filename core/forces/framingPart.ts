@@ -20,6 +20,8 @@ export interface FramingPart {
   /** Diagonals, and members between the nodes on them. */
   readonly pieces: readonly Piece[];
   readonly holds: readonly Hold[];
+  /** By node, the level directions along which its bays are braced: what acts square to them is for the frames. */
+  readonly braced: readonly (readonly Vec3[])[];
 }
 
 /** A straight run of a bar between two nodes. */
@@ -44,12 +46,16 @@ export interface Bending {
 export interface Hold {
   readonly node: number;
   readonly direction: Vec3;
+  /** At the eaves of a roof on walls: the frames take there what is loaded in their own plane, and do not keep the roof from turning in plan. */
+  readonly ofFrames: boolean;
 }
 
 /** A turn of 1 in these units moves a point this far away, mm, by 1 mm: keeps turns and displacements alike in size. */
 export const TURN_ARM = 1000;
 /** Stiffness with which the rest of the building holds a node, N/mm: gives a thousandth of a millimetre under 10 kN. */
 export const HELD_BY_THE_BUILDING = 1e7;
+/** What is left of it against a roof that turns in plan, N/mm: enough to tell where it stands, too little to share in what walls carry. */
+export const YIELDING = 10;
 
 /** Within this angle two members run through, rad. */
 const IN_LINE = Math.sin(Math.PI / 180);
@@ -133,6 +139,7 @@ class PartBuilder {
       fixed: this.#fixed(),
       pieces,
       holds: this.#holds(drafts),
+      braced: this.#braced(drafts),
     };
   }
 
@@ -271,9 +278,31 @@ class PartBuilder {
           roofs.has(bar.bay) && this.#layout.nodes.get(this.#nodes[node] ?? '')?.supports[bar.bay];
         here.push(...(eaves ? [plane.right] : [plane.right, plane.up]));
       }
+    const onWalls = this.#eavesOnWalls(roofs);
     return [...taken].flatMap(([node, directions]) =>
-      leftOver(directions).map((direction) => ({ node, direction })),
+      leftOver(directions).map((direction) => ({ node, direction, ofFrames: onWalls.has(node) })),
     );
+  }
+
+  /** Nodes at the eaves of a roof that walls of this part stand under. */
+  #eavesOnWalls(roofs: ReadonlySet<string>): ReadonlySet<number> {
+    const found = new Set<number>();
+    const walls = new Set(this.#bays.filter(({ kind }) => kind === 'wall').flatMap(({ nodes }) => nodes));
+    this.#nodes.forEach((id, k) => {
+      const supports = this.#layout.nodes.get(id)?.supports ?? {};
+      if (walls.has(id) && Object.keys(supports).some((bay) => roofs.has(bay))) found.add(k);
+    });
+    return found;
+  }
+
+  #braced(drafts: readonly Draft[]): readonly (readonly Vec3[])[] {
+    const ways = this.#nodes.map((): Vec3[] => []);
+    for (const { plane, from, to } of drafts)
+      for (const node of [from, to]) {
+        const here = ways[node];
+        if (here && !here.some((known) => length(cross(known, plane.right)) < 1e-3)) here.push(plane.right);
+      }
+    return ways;
   }
 }
 

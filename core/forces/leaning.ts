@@ -20,7 +20,7 @@ export const LEANING: Readonly<Record<PracticeId, LeaningRule>> = {
   is800: { share: 0.005, clause: '4.3.6, notional horizontal forces', confidence: 'from memory, verify' },
 };
 
-/** @param loads vertical and other loads on nodes, N; @returns what leans, N, by node, towards the right of each bay for `way` 1 */
+/** @param loads vertical and other loads on nodes, N; @returns what leans, N, by node, along each bay, the whole building one way: towards greater X, or Y across it, for `way` 1 */
 export function leaningForces(
   loads: ReadonlyMap<string, Vec3>,
   bays: readonly BayLayout[],
@@ -37,8 +37,8 @@ export function leaningForces(
       for (const node of [bar.i, bar.j]) {
         const known = ways.get(node) ?? [];
         ways.set(node, known);
-        // The second slope of a roof is seen from the other side: the building leans one way all the same.
-        const right = sameSense(plane.right, bay.planes[0]?.right ?? plane.right);
+        // Facing walls, and the second slope of a roof, are seen from the other side: the building leans one way all the same.
+        const right = oneSense(plane.right);
         if (!known.some((each) => Math.abs(each[0] * right[0] + each[1] * right[1]) > 0.999))
           known.push(right);
       }
@@ -53,5 +53,6 @@ export function leaningForces(
   return forces;
 }
 
-const sameSense = (a: Vec3, b: Vec3): Vec3 =>
-  a[0] * b[0] + a[1] * b[1] + a[2] * b[2] < 0 ? scale(a, -1) : a;
+/** Of a direction and its opposite the one towards greater X, or greater Y where it has no X to speak of. */
+const oneSense = (way: Vec3): Vec3 =>
+  (Math.abs(way[0]) > 1e-3 ? way[0] : way[1]) < 0 ? scale(way, -1) : way;

@@ -56,7 +56,7 @@ export interface CombinationState {
   readonly use: 'strength' | 'service';
   /** By the case's id, its sign with it. */
   readonly factors: Readonly<Record<string, number>>;
-  /** Which way the practice's horizontal share of vertical loads acts along the bays; 0 where it is left out. */
+  /** Which way the practice's horizontal share of vertical loads acts along the bays, 1 towards greater X, or Y; 0 where it is left out. */
   readonly leaning: -1 | 0 | 1;
   /** Cases that act the other way round than they are given. */
   readonly turned: readonly string[];

@@ -1,7 +1,7 @@
 /** Equilibrium of one part of the framing under given loads. */
 import { add, dot, scale, subtract, type Vec3 } from '../geometry/vector.ts';
 import type { BarId } from '../layout/model.ts';
-import { type FramingPart, HELD_BY_THE_BUILDING, type Piece, TURN_ARM } from './framingPart.ts';
+import { type FramingPart, HELD_BY_THE_BUILDING, type Piece, TURN_ARM, YIELDING } from './framingPart.ts';
 import type { AxialBar, NoWay } from './model.ts';
 import { type SharedPattern, tensionOnlyEquilibrium } from './tensionOnly.ts';
 
@@ -29,16 +29,29 @@ export interface PartAnswer {
 export interface PartStiffness {
   readonly part: FramingPart;
   readonly rest: readonly (readonly [number, number, number])[];
+  /** The same with the frames as stiff across the building as they are taken to be; null where nothing leans on them. */
+  readonly withFrames: readonly (readonly [number, number, number])[] | null;
   /** Filled by the first solution, used by the others. */
   readonly pattern: SharedPattern;
 }
 
 export function partStiffness(part: FramingPart): PartStiffness {
-  return { part, rest: [...bendingEntries(part), ...holdEntries(part)], pattern: { symbolic: null } };
+  const bending = [...bendingEntries(part)];
+  const leansOnFrames = part.holds.some(({ ofFrames }) => ofFrames);
+  return {
+    part,
+    rest: [...bending, ...holdEntries(part, YIELDING)],
+    withFrames: leansOnFrames ? [...bending, ...holdEntries(part, HELD_BY_THE_BUILDING)] : null,
+    pattern: { symbolic: null },
+  };
 }
 
+/**
+ * Forces under given loads. What acts in the frames' own planes is held by them across the building; what acts along the bracing goes to the walls by statics,
+ * the frames not keeping the roof from turning in plan. METHODS.md, "Bars that only pull".
+ */
 export function partEquilibrium(
-  { part, rest, pattern }: PartStiffness,
+  { part, rest, withFrames, pattern }: PartStiffness,
   loads: PartLoads,
   start: Float64Array | null,
   bars: 'as counted on' | 'all both ways' = 'as counted on',
@@ -53,13 +66,35 @@ export function partEquilibrium(
     const own = bars === 'as counted on' ? axial : { ...axial, tensionOnly: false };
     return short === undefined ? own : { ...own, preset: short };
   });
-  const found = tensionOnlyEquilibrium(
-    { nodes: part.nodes.length, turns: part.turns, held: part.fixed, bars: working, rest, load },
-    start,
-    pattern,
-  );
+  const problem = { nodes: part.nodes.length, turns: part.turns, held: part.fixed, bars: working };
+  if (withFrames) {
+    const own = tensionOnlyEquilibrium(
+      { ...problem, rest: withFrames, load: acrossBracing(part, load) },
+      null,
+      pattern,
+    );
+    if (own.kind === 'balanced') addHeldByFrames(part, own.displacement, load);
+  }
+  const found = tensionOnlyEquilibrium({ ...problem, rest, load }, start, pattern);
   if (found.kind === 'no way to carry') return noWay(part, working, found.motion);
   return answerOf(part, working, found.displacement, found.forces, found.residual, load, found.slack);
+}
+
+/** The part of the load that is square to the bracing at each node. */
+function acrossBracing(part: FramingPart, load: Float64Array): Float64Array {
+  const across = new Float64Array(load.length);
+  part.nodes.forEach((_, k) => {
+    const ways = part.braced[k] ?? [];
+    const left = ways.reduce<Vec3>((force, way) => subtract(force, scale(way, dot(force, way))), at(load, k));
+    across.set(left, 3 * k);
+  });
+  return across;
+}
+
+/** Lays on the load what the frames hold it with. */
+function addHeldByFrames(part: FramingPart, moved: Float64Array, load: Float64Array): void {
+  for (const { node, direction, ofFrames } of part.holds)
+    if (ofFrames) put(load, node, scale(direction, -HELD_BY_THE_BUILDING * dot(direction, at(moved, node))));
 }
 
 function answerOf(
@@ -167,9 +202,13 @@ function* bendingEntries(part: FramingPart): Generator<readonly [number, number,
   }
 }
 
-function* holdEntries(part: FramingPart): Generator<readonly [number, number, number]> {
-  for (const { node, direction } of part.holds)
-    yield* rankOne([3 * node, 3 * node + 1, 3 * node + 2], direction, HELD_BY_THE_BUILDING);
+function* holdEntries(part: FramingPart, ofFrames: number): Generator<readonly [number, number, number]> {
+  for (const hold of part.holds)
+    yield* rankOne(
+      [3 * hold.node, 3 * hold.node + 1, 3 * hold.node + 2],
+      hold.direction,
+      hold.ofFrames ? ofFrames : HELD_BY_THE_BUILDING,
+    );
 }
 
 function* rankOne(

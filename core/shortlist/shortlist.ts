@@ -3,7 +3,7 @@ import type { Catalogues, Stock, StockAngle } from '../catalogue/model.ts';
 import { stockOf } from '../catalogue/stock.ts';
 import { steelOf } from '../checks/barChecks.ts';
 import type { BarChecks } from '../checks/model.ts';
-import { sectionChecks } from '../checks/sectionChecks.ts';
+import { MOST_USED, sectionChecks, silentChecks } from '../checks/sectionChecks.ts';
 import type { Forces } from '../forces/model.ts';
 import type { AngleBar, Bar, BarId, Layout, Placement } from '../layout/model.ts';
 import type { LimitInForce, Practice } from '../practice/model.ts';
@@ -204,11 +204,20 @@ function mostUsed(
     const width = leg === 'longer' ? stock.outline.longLeg : stock.outline.shortLeg;
     const { gauge } = usualGauge(width, stock.catalogue === 'us' ? 'us' : 'metric');
     const angle = { ...turned, placement: { ...turned.placement, gauge } };
-    const { governing } = sectionChecks(
+    const found = sectionChecks(
       input,
       { bar: seat.bar, angle, stock, steel, restraint, criticalLoad },
       seat.demands,
     );
+    const { governing } = found;
+    const [silent] = silentChecks({ ...seat.demands, ...found });
+    if (silent)
+      return [
+        {
+          utilisation: MOST_USED,
+          says: `${seat.bar.mark}: no figure for ${silent.resistance.title.toLowerCase()}`,
+        },
+      ];
     if (governing?.utilisation == null) return [];
     const { resistance, demand, utilisation } = governing;
     return [

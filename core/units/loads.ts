@@ -60,3 +60,16 @@ function shown(value: number, unit: string, style: QuantityStyle): string {
   const figure = threeFigures(value);
   return style === 'bare' ? figure : `${figure} ${unit}`;
 }
+
+/** Above it there is next to no resistance, and the figure says no more. */
+const MOST_SHOWN = 99;
+
+/** How much of a resistance is used: "0.87", "over 99", and a dash where that is not known. */
+export function showUse(used: number | null): string {
+  if (used === null) return '–';
+  return used > MOST_SHOWN ? `over ${MOST_SHOWN}` : used.toFixed(2);
+}
+
+/** "used 87 %"; "nothing to speak of resists". */
+export const sayUsed = (used: number): string =>
+  used > MOST_SHOWN ? 'nothing to speak of resists' : `used ${(100 * used).toFixed(0)} %`;

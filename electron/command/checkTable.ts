@@ -1,7 +1,7 @@
 import type { CheckLine, CheckRow } from '../../core/documents/checkRows.ts';
 import { textTable } from '../../core/documents/textTable.ts';
 import type { UnitSystem } from '../../core/project/model.ts';
-import { showForce } from '../../core/units/loads.ts';
+import { showForce, showUse } from '../../core/units/loads.ts';
 
 /** Every check of every diagonal, and of the struts and beams that are squeezed, the one used most marked; then what could not be checked, and what comes from memory. */
 export function checkTable(rows: readonly CheckRow[], units: UnitSystem): string {
@@ -41,7 +41,7 @@ function lineOf(row: CheckRow, check: CheckLine, units: UnitSystem): readonly st
     `${check.standard} ${check.clause}${check.confidence === 'from memory, verify' ? ' (verify)' : ''}`,
     check.demand === null ? '–' : showForce(check.demand.force, units),
     check.resistance === null ? '–' : showForce(check.resistance, units),
-    check.utilisation === null ? '–' : check.utilisation.toFixed(2),
+    showUse(check.utilisation),
     [...(governs ? ['governs'] : []), ...(failed.length > 0 ? [`not met: ${failed.join('; ')}`] : [])].join(
       '; ',
     ),

@@ -1,7 +1,7 @@
 import type { Assessment } from '../../assessment.ts';
 import type { MemberChecks } from '../../checks/model.ts';
 import type { BayLayout } from '../../layout/model.ts';
-import { showForce, showMoment } from '../../units/loads.ts';
+import { showForce, showMoment, showUse } from '../../units/loads.ts';
 import { showSlenderness } from '../../units/quantity.ts';
 import { type Markup, markup } from '../markup.ts';
 import { conditionWords, memberPlacing } from '../memberWords.ts';
@@ -23,7 +23,7 @@ export function memberSheet(
   const row = (each: MemberChecks): Markup => {
     const { check, compression, slenderness, limit, moment } = each;
     const resists = check?.resistance.resistance ?? null;
-    return markup`<tr><td class="l"><b>${layout.bars.get(each.bar)?.mark ?? each.bar}</b></td><td class="l wrap">${each.member.name}<br>${memberPlacing(each, units)}</td><td>${slenderness === null ? ABSENT : `${showSlenderness(slenderness, limit)} of ${limit}`}</td><td>${compression === null ? ABSENT : showForce(compression.force, units)}</td><td>${resists === null ? ABSENT : showForce(resists, units)}</td><td>${check?.utilisation == null ? ABSENT : markup`<b>${check.utilisation.toFixed(2)}</b>`}</td><td class="l wrap">${notes(each)}${moment > 0 ? ` Bends too, by up to ${showMoment(moment, units)}: not checked here.` : ''}</td></tr>`;
+    return markup`<tr><td class="l"><b>${layout.bars.get(each.bar)?.mark ?? each.bar}</b></td><td class="l wrap">${each.member.name}<br>${memberPlacing(each, units)}</td><td>${slenderness === null ? ABSENT : `${showSlenderness(slenderness, limit)} of ${limit}`}</td><td>${compression === null ? ABSENT : showForce(compression.force, units)}</td><td>${resists === null ? ABSENT : showForce(resists, units)}</td><td><b>${showUse(check?.utilisation ?? null)}</b></td><td class="l wrap">${notes(each)}${moment > 0 ? ` Bends too, by up to ${showMoment(moment, units)}: not checked here.` : ''}</td></tr>`;
   };
   return markup`<h2>Struts and beams in compression<small>along themselves, K = 1 between what holds them; bending is not checked</small></h2>
 <table class="t"><thead><tr><th class="l">Member</th><th class="l">Size, and what it is free over</th><th>L/r</th><th>Acts</th><th>Resists</th><th>Used</th><th class="l">Clause and what to mind</th></tr></thead><tbody>${squeezed.map(row)}</tbody></table>`;

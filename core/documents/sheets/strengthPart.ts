@@ -1,6 +1,6 @@
 import type { BarChecks, Check } from '../../checks/model.ts';
 import type { UnitSystem } from '../../project/model.ts';
-import { showForce } from '../../units/loads.ts';
+import { showForce, showUse } from '../../units/loads.ts';
 import { type Markup, markup } from '../markup.ts';
 import { workingLines } from '../workingLines.ts';
 
@@ -29,7 +29,7 @@ export function strengthPart(checks: BarChecks, units: UnitSystem): Markup | nul
 function row({ resistance, demand, utilisation }: Check, governs: boolean, units: UnitSystem): Markup {
   const unmet = resistance.conditions.filter(({ met }) => !met).map(({ says }) => says);
   const name = `${resistance.title}${resistance.end === null ? '' : `, end ${resistance.end}`}`;
-  return markup`<tr class="${governs ? 'governs' : ''}"><td class="l wrap">${governs ? markup`<b>${name}</b>` : name}${unmet.length > 0 ? markup`<br>not met: ${unmet.join('; ')}` : null}</td><td class="l wrap">${resistance.clause}</td><td class="l">${resistance.confidence}${resistance.ownRule ? '' : ', borrowed'}</td><td>${demand === null ? '–' : showForce(demand.force, units)}</td><td>${resistance.resistance === null ? '–' : showForce(resistance.resistance, units)}</td><td>${utilisation === null ? '–' : markup`<b>${utilisation.toFixed(2)}</b>`}</td></tr>`;
+  return markup`<tr class="${governs ? 'governs' : ''}"><td class="l wrap">${governs ? markup`<b>${name}</b>` : name}${unmet.length > 0 ? markup`<br>not met: ${unmet.join('; ')}` : null}</td><td class="l wrap">${resistance.clause}</td><td class="l">${resistance.confidence}${resistance.ownRule ? '' : ', borrowed'}</td><td>${demand === null ? '–' : showForce(demand.force, units)}</td><td>${resistance.resistance === null ? '–' : showForce(resistance.resistance, units)}</td><td><b>${showUse(utilisation)}</b></td></tr>`;
 }
 
 function working({ resistance }: Check, units: UnitSystem): Markup {

@@ -31,6 +31,38 @@ function oneInShear(question: TensionQuestion, end: ResistingEnd): number {
   );
 }
 
+/** 3.6.1(10): a lap on one side with one row of bolts across the force, which turns under it. N, all bolts. */
+function oneRow(
+  { steel, section, options }: TensionQuestion,
+  end: ResistingEnd,
+  bolts: number,
+  one: (alpha: number) => number,
+  working: Working,
+): number {
+  const lead = working.step(
+    'a bolt at the end',
+    'F_b,e',
+    'k_1 α_b f_u d t/γ_M2, α_b = min(e_1/(3d_0), f_ub/f_u, 1)',
+    one(end.endDistance / (3 * end.hole)),
+    'force',
+  );
+  const most = working.step(
+    'at most, one row lapped on one side',
+    'F_b,(3.2)',
+    '1.5 f_u d t/γ_M2',
+    (1.5 * steel.fu * end.boltDiameter * section.thickness) / partialFactors(options).M2,
+    'force',
+  );
+  working.given('bolts', 'n', bolts, 'count');
+  return working.step(
+    'resistance',
+    'F_b,Rd',
+    'n min(F_b,e, F_b,(3.2))',
+    bolts * Math.min(lead, most),
+    'force',
+  );
+}
+
 export const EN_ENDS: EndPack = {
   standard: 'EN 1993-1-8',
   boltShear: {
@@ -59,7 +91,7 @@ export const EN_ENDS: EndPack = {
     },
   },
   bearing: {
-    clause: 'Table 3.4, 3.7',
+    clause: 'Table 3.4, 3.6.1(10), 3.7',
     confidence: 'from memory, sure',
     of: (question, end, working) => {
       const { t, d, fu } = borneOn(question, end, working);
@@ -77,6 +109,8 @@ export const EN_ENDS: EndPack = {
       const one = (alpha: number): number =>
         (k1 * Math.max(0, Math.min(alpha, fub / fu, 1)) * fu * d * t) / gamma;
       const { first, behind } = bolted(end, question.section);
+      if (behind === 0 && shearPlanes(question.section) === 1)
+        return oneRow(question, end, first, one, working);
       const lead = working.step(
         'a bolt at the end',
         'F_b,e',
@@ -127,7 +161,7 @@ export const EN_ENDS: EndPack = {
         'correlation factor',
         'β_w',
         'Table 4.1 by f_u',
-        fu <= 360 ? 0.8 : fu <= 430 ? 0.85 : 0.9,
+        fu <= 360 ? 0.8 : fu <= 430 ? 0.85 : fu <= 510 ? 0.9 : 1,
         'factor',
       );
       const gamma = gammaM2(question, working);

@@ -4,7 +4,7 @@ import type { MemberChecks } from '../../../core/checks/model.ts';
 import { conditionWords, memberPlacing } from '../../../core/documents/memberWords.ts';
 import type { Bar } from '../../../core/layout/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
-import { showForce, showMoment } from '../../../core/units/loads.ts';
+import { showForce, showMoment, showUse } from '../../../core/units/loads.ts';
 import { showLength, showSlenderness } from '../../../core/units/quantity.ts';
 import { SeverityGlyph } from '../../glyphs/SeverityGlyph.tsx';
 import { STATUS_WORDS, StatusGlyph } from '../../glyphs/StatusGlyph.tsx';
@@ -86,7 +86,7 @@ function Squeezed({ bar, checks, assessment, units }: SqueezedProps): JSX.Elemen
             <li className="reading" data-worst={checks.status === 'over' ? 'breaks' : undefined}>
               <em>used</em>
               <span className="reading-figure">
-                <b>{check.utilisation === null ? '–' : check.utilisation.toFixed(2)}</b>
+                <b>{showUse(check.utilisation)}</b>
               </span>
               {checks.status !== 'no load' && (
                 <span className="reading-state">

@@ -23,7 +23,7 @@ describe('wind on the gables of the example', () => {
   it('is followed from the roof to the ground, and slackens the other diagonals when it is turned round', async () => {
     await choose(page, 'D1');
     await page.getByRole('tab', { name: /^Forces/ }).click();
-    await combination('0.9 G + 1.3 W strength').click();
+    await combination('0.9 G + 1.3 W, leaning on strength').click();
     // The label on the drawing says the force, so that it is there for those who do not see the band.
     const labelled = (mark: string, what: RegExp) =>
       expect
@@ -31,7 +31,7 @@ describe('wind on the gables of the example', () => {
         .toMatch(what);
     await labelled('D1', /^D1, pulled, [\d.]+ kN$/);
     await labelled('D2', /^D2, slack$/);
-    await combination('0.9 G + 1.3 W, W turned round strength').click();
+    await combination('0.9 G + 1.3 W, W turned round, leaning back strength').click();
     await labelled('D1', /^D1, slack$/);
     await labelled('D2', /^D2, pulled, [\d.]+ kN$/);
   });
@@ -42,7 +42,7 @@ describe('wind on the gables of the example', () => {
     const strip = page.getByRole('toolbar', { name: 'Forces' });
     await strip.getByText('Greatest of all').waitFor();
     await page.keyboard.press('.');
-    await strip.getByText('1 of 9').waitFor();
+    await strip.getByText('1 of 13').waitFor();
     await page.keyboard.press(',');
     await strip.getByText('Greatest of all').waitFor();
   });

@@ -73,10 +73,29 @@ describe('a diagonal that is pulled', () => {
     const { ends } = bay(wall(5000, [[4000, 'crossed']])).diagonals;
     const assessment = pushed(
       10,
-      { section: '150x150x12', ends: { ...ends, rows: 2, rowSpacing: 50, bolts: 4 } },
+      { section: '150x150x12', ends: { ...ends, rows: 2, rowSpacing: 60, gauge: 50, bolts: 4 } },
       { practice: 'en1993' },
     );
     expect(kinds(assessment)).toContain('not checked');
+    // Other checks pass; the bar is not called within for that, nor is the command content.
+    expect(checksOf(assessment).status).toBe('unknown');
+    expect(assessment.breaksLimit).toBe(true);
+    const row = assessment.schedule.find(({ bar }) => bar === 'B/t1.rise');
+    expect(row?.utilisation).toBeNull();
+    expect(row?.governingCheck).toContain('not checked');
+  });
+
+  it('is over where nothing resists: a weld without length', () => {
+    const { ends } = bay(wall(5000, [[4000, 'crossed']])).diagonals;
+    const assessment = pushed(10, { ends: { ...ends, kind: 'welded', weldLength: 0 } });
+    const checks = checksOf(assessment);
+    expect(checks.governing?.resistance.resistance).toBe(0);
+    expect(checks.governing?.utilisation).toBe(999);
+    expect(checks.status).toBe('over');
+    expect(assessment.findings.find(({ kind }) => kind === 'resistance exceeded')?.title).toContain(
+      'nothing to speak of resists',
+    );
+    expect(assessment.breaksLimit).toBe(true);
   });
 
   it('uses as much in US units as in metric ones', () => {

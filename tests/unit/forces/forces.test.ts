@@ -221,6 +221,79 @@ describe('what leans', () => {
     expect(across[0]).toBeCloseTo(-1000, 3);
     expect(across[1]).toBeCloseTo(1000, 3);
   });
+
+  it('comes on top of the wind whichever way the wind is given', () => {
+    // 0.005 × 2000 kN = 10 kN beside 50 kN of wind: 60 kN × √41/5 = 76.8 kN pulls either diagonal in one state, by statics.
+    for (const blows of [50, -50]) {
+      const { found } = forces(
+        [crossed()],
+        acting(
+          [
+            wind([push('B/L1', [0, 0, -1000]), push('B/R1', [0, 0, -1000])], { id: 'G', kind: 'permanent' }),
+            wind([push('B/L1', [blows, 0, 0])], { reverses: true }),
+          ],
+          [{ ...alone('W', { leaning: true }), factors: { G: 1, W: 1 } }],
+        ),
+      );
+      for (const bar of ['B/t1.rise', 'B/t1.fall']) {
+        const most = Math.max(...found.states.map((state) => state.forces.get(bar) ?? 0));
+        expect(most, `${blows} ${bar}`).toBeCloseTo((60_000 * Math.sqrt(41)) / 5, 0);
+      }
+      expect(new Set(found.states.map(({ id }) => id)).size).toBe(4);
+    }
+  });
+
+  it('leans facing walls the same way', () => {
+    const facing = bay(wall(5000, [[4000, 'crossed']]), {
+      id: 'F',
+      place: { origin: [5000, 12_000, 0], turn: 180 },
+    });
+    const { found } = forces(
+      [crossed(), facing],
+      acting(
+        [wind([push('B/L1', [0, 0, -1000]), push('F/L1', [0, 0, -1000])], { id: 'G', kind: 'permanent' })],
+        [alone('G', { leaning: true })],
+      ),
+    );
+    for (const state of found.states) {
+      const [one, other] = ['B', 'F'].map((of) =>
+        [...state.reactions].reduce((sum, [node, [x]]) => (node.startsWith(of) ? sum + x : sum), 0),
+      );
+      expect(other).toBeCloseTo(one ?? 0, 3);
+    }
+  });
+});
+
+describe('a roof bay on two unlike walls that share its eaves', () => {
+  // Walls of one and of two braced tiers, so that one is twice as stiff as the other.
+  const R = bay(
+    roof(5000, 0, [
+      [5000, 'crossed'],
+      [5000, 'crossed'],
+    ]),
+    { id: 'R', place: { origin: [0, 0, 8000], turn: 0 } },
+  );
+  const near = bay(wall(5000, [[8000, 'crossed']]), { id: 'N' });
+  const far = bay(
+    wall(5000, [
+      [4000, 'crossed'],
+      [4000, 'crossed'],
+    ]),
+    { id: 'F', place: { origin: [0, 10_000, 0], turn: 0 } },
+  );
+
+  it('hands wind at its middle to each by statics, half and half, although one is stiffer', () => {
+    const state = only(forces([R, near, far], acting([wind([push('R/a.L1', [20, 0, 0])])], [alone('W')])));
+    const at = (of: string): number =>
+      [...state.reactions].reduce((sum, [node, [x]]) => (node.startsWith(of) ? sum + x : sum), 0);
+    expect(at('N') / -10_000).toBeCloseTo(1, 2);
+    expect(at('F') / -10_000).toBeCloseTo(1, 2);
+  });
+
+  it('leaves what acts across the building to its frames', () => {
+    const state = only(forces([R, near, far], acting([wind([push('R/a.L0', [0, 20, 0])])], [alone('W')])));
+    for (const [bar, force] of state.forces) expect(Math.abs(force), bar).toBeLessThan(50);
+  });
 });
 
 describe('a roof bay on wall bays', () => {

@@ -218,3 +218,44 @@ describe('two fillet welds of 6 mm, each 100 mm long', () => {
     within(stepOf(both, 'A_w') / stepOf(one, 'A_w'), 2, 1e-12);
   });
 });
+
+describe('one row of bolts in a lap on one side, by EN 1993-1-8 3.6.1(10)', () => {
+  // From memory, sure: 1.5 f_u d t/γ_M2 a bolt at most; 1.5 × 470 × 20 × 6/1.25 = 67.7 kN.
+  const one = (bolts: number) =>
+    kN(
+      questionOf(
+        'en1993',
+        angleOf(70, 70, 6, 9),
+        { fy: 355, fu: 470 },
+        boltedEnd(70, {
+          bolts,
+          boltDiameter: 20,
+          hole: 22,
+          gauge: 30,
+          endDistance: 66,
+          threadsInShear: false,
+        }),
+      ),
+      'bolt bearing',
+    );
+  it('bears no more than that, however far from the end', () => within(one(1), 67.7, 0.05));
+  it('is not held to it with a second bolt behind', () => expect(one(2)).toBeGreaterThan(2 * 67.8));
+});
+
+describe('the correlation factor of welds, EN 1993-1-8 Table 4.1', () => {
+  // From memory, sure: S355 0.9; S420 and S460 1.0.
+  const weld = (fu: number) =>
+    kN(
+      questionOf(
+        'en1993',
+        SECTION,
+        { fy: 355, fu },
+        { ...boltedEnd(100, {}), kind: 'welded', weldLength: 100, weldSize: 6 },
+      ),
+      'weld',
+    );
+  it('is 0.9 up to S355, and 1.0 above', () => {
+    expect(weld(540) / weld(510)).toBeCloseTo((540 / 510) * 0.9, 9);
+    expect(weld(500) / weld(480)).toBeCloseTo(500 / 480, 9);
+  });
+});

@@ -2,7 +2,7 @@ import type { JSX } from 'react';
 import type { Check } from '../../../../core/checks/model.ts';
 import { workingLines } from '../../../../core/documents/workingLines.ts';
 import type { UnitSystem } from '../../../../core/project/model.ts';
-import { showForce } from '../../../../core/units/loads.ts';
+import { showForce, showUse } from '../../../../core/units/loads.ts';
 import { SymbolText } from './SymbolText.tsx';
 
 interface CheckWorkingProps {
@@ -54,7 +54,7 @@ export function CheckWorking({ check, governs, judged, units }: CheckWorkingProp
                 ? `${showForce(demand.force, units)} / ${showForce(resistance.resistance, units)}`
                 : ''}
             </td>
-            <td>{utilisation === null ? '–' : utilisation.toFixed(2)}</td>
+            <td>{showUse(utilisation)}</td>
           </tr>
         </tbody>
       </table>

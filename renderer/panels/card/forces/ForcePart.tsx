@@ -3,7 +3,7 @@ import type { Assessment } from '../../../../core/assessment.ts';
 import type { BarChecks, Check } from '../../../../core/checks/model.ts';
 import type { Bar } from '../../../../core/layout/model.ts';
 import type { UnitSystem } from '../../../../core/project/model.ts';
-import { showForce } from '../../../../core/units/loads.ts';
+import { showForce, showUse } from '../../../../core/units/loads.ts';
 import { STATUS_WORDS, StatusGlyph } from '../../../glyphs/StatusGlyph.tsx';
 import { useActions, useWindow } from '../../../shell/services.tsx';
 import { shownForceState, shownForces } from '../../../store/shownForces.ts';
@@ -107,7 +107,7 @@ function Boxes({
       <li className="reading" data-worst={checks.status === 'over' ? 'breaks' : undefined}>
         <em>used</em>
         <span className="reading-figure">
-          <b>{utilisation === null ? '–' : utilisation.toFixed(2)}</b>
+          <b>{showUse(utilisation)}</b>
         </span>
         {checks.status !== 'no load' && (
           <span className="reading-state">
