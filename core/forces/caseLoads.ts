@@ -4,6 +4,7 @@ import { memberSection } from '../frame/memberSection.ts';
 import { add, scale, type Vec3 } from '../geometry/vector.ts';
 import type { Bar, BarId, BayLayout, Layout } from '../layout/model.ts';
 import type { Load, LoadCase } from '../project/actions.ts';
+import { bowForces } from './bowForces.ts';
 import { gableForces } from './gableForces.ts';
 import type { ActionProblem } from './model.ts';
 import { sideForces } from './sideForces.ts';
@@ -82,6 +83,12 @@ function place(
       const bay = bayCalled(load.bay, layout);
       if (bay?.kind !== 'wall') return `a wall leans on ${load.bay}, which is no wall bay.`;
       for (const [node, force] of sideForces(load, bay, layout)) put(node, force);
+      return null;
+    }
+    case 'bowed': {
+      const bay = bayCalled(load.bay, layout);
+      if (bay?.kind !== 'roof') return `bowed rafters lean on ${load.bay}, which is no roof bay.`;
+      for (const [node, force] of bowForces(load, bay, layout)) put(node, force);
       return null;
     }
     default:

@@ -28,7 +28,7 @@ export function forcesOf(actions: Actions, layout: Layout, practice: Practice): 
       (each, index) => [each.id, caseLoads(each, layout, `actions.cases[${index}]`)] as const,
     ),
   );
-  const problems = [...cases.values()].flatMap((each) => each.problems);
+  const problems = [...[...cases.values()].flatMap((each) => each.problems), ...factorProblems(actions)];
   const parts = framingParts(layout, practice.steel.E).map(partStiffness);
   const { order, carries } = inOrder(parts, actions.carries, layout, problems);
   const takeUp = takeUps(layout, practice);
@@ -59,6 +59,20 @@ export function forcesOf(actions: Actions, layout: Layout, practice: Practice): 
     problems,
     caseLoads: new Map([...cases].map(([id, { nodes }]) => [id, nodes])),
   };
+}
+
+/** A factor for a case that is not there would leave the load out without a word. */
+function factorProblems({ cases, combinations }: Actions): readonly ActionProblem[] {
+  const known = new Set(cases.map(({ id }) => id));
+  return combinations.flatMap(({ id, factors }, index) =>
+    Object.keys(factors)
+      .filter((named) => !known.has(named))
+      .map((named) => ({
+        path: `actions.combinations[${index}].factors.${named}`,
+        what: `Combination ${id} has a factor for ${named}, and no case is called so.`,
+        todo: `Name one of ${cases.map((each) => each.id).join(', ') || 'the cases, once there are any'}.`,
+      })),
+  );
 }
 
 /** Parts in the order in which they hand their forces on. */

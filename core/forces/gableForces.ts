@@ -17,13 +17,11 @@ export function gableForces(
 ): ReadonlyMap<string, Vec3> {
   const along = bay.planes[0]?.right;
   if (!along) return new Map();
-  // Level and square to the bay: the way the gable spreads.
-  const across: Vec3 = [-along[1], along[0], 0];
-  const onRafter = framingNodes(bay, layout).filter(({ key }) => isOnRafter(key, load.rafter, bay));
-  // Both slopes have the ridge.
-  const points = [...new Map(onRafter.map(({ id, at }) => [id, at]))]
-    .map(([id, at]) => ({ id, s: at[0] * across[0] + at[1] * across[1], height: at[2] - load.ground }))
-    .sort((a, b) => a.s - b.s);
+  const points = rafterPoints(bay, layout, load.rafter).map(({ id, at, s }) => ({
+    id,
+    s,
+    height: at[2] - load.ground,
+  }));
   const forces = new Map<string, Vec3>();
   points.forEach(({ id, s, height }, k) => {
     const before = points[k - 1]?.s ?? s;
@@ -34,6 +32,25 @@ export function gableForces(
     forces.set(id, scale(along, load.pressure * 1e-3 * area));
   });
   return forces;
+}
+
+export interface RafterPoint {
+  readonly id: string;
+  readonly at: Vec3;
+  /** mm on plan, across the bay. */
+  readonly s: number;
+}
+
+/** Panel points of a rafter in order across the bay. */
+export function rafterPoints(bay: BayLayout, layout: Layout, rafter: 1 | 2): readonly RafterPoint[] {
+  const along = bay.planes[0]?.right ?? [1, 0, 0];
+  // Level and square to the bay: the way the gable spreads.
+  const across: Vec3 = [-along[1], along[0], 0];
+  const onRafter = framingNodes(bay, layout).filter(({ key }) => isOnRafter(key, rafter, bay));
+  // Both slopes have the ridge.
+  return [...new Map(onRafter.map(({ id, at }) => [id, at]))]
+    .map(([id, at]) => ({ id, at, s: at[0] * across[0] + at[1] * across[1] }))
+    .sort((a, b) => a.s - b.s);
 }
 
 /** Rafter 1 stands at the bay's own X = 0: left on the first slope, right on the second, which is seen from the other side. */

@@ -46,7 +46,13 @@ export function combinationSet(practice: PracticeId, method: ResistanceSettings[
       return {
         source: 'National Building Code of Canada, Table 4.1.3.2',
         confidence: 'from memory, verify',
-        rules: [strength(1.25, 1.5, 0), strength(1.25, 0.5, 1.4), strength(0.9, 0, 1.4), ...SERVICE],
+        rules: [
+          strength(1.25, 1.5, 0),
+          strength(1.25, 1.5, 0.4),
+          strength(1.25, 0.5, 1.4),
+          strength(0.9, 0, 1.4),
+          ...SERVICE,
+        ],
       };
     case 'aisc360':
       return method === 'ASD'
@@ -64,13 +70,19 @@ export function combinationSet(practice: PracticeId, method: ResistanceSettings[
         : {
             source: 'ASCE 7, strength',
             confidence: 'from memory, sure',
-            rules: [strength(1.2, 1.6, 0), strength(1.2, 0.5, 1), strength(0.9, 0, 1), ...SERVICE],
+            rules: [strength(1.2, 1.6, 0), strength(1.2, 1, 1), strength(0.9, 0, 1), ...SERVICE],
           };
     case 'en1993':
       return {
-        source: 'EN 1990, (6.10) with recommended factors, ψ₀ 0.7 for imposed loads',
+        source: 'EN 1990, (6.10) with recommended factors, ψ₀ 0.7 for imposed loads, 0.6 for wind',
         confidence: 'from memory, sure',
-        rules: [strength(1.35, 1.5, 0), strength(1.35, 1.05, 1.5), strength(1, 0, 1.5), ...SERVICE],
+        rules: [
+          strength(1.35, 1.5, 0),
+          strength(1.35, 1.5, 0.9),
+          strength(1.35, 1.05, 1.5),
+          strength(1, 0, 1.5),
+          ...SERVICE,
+        ],
       };
     case 'as4100':
       return {

@@ -72,6 +72,7 @@ export function withActionsFollowing(project: Project, from: string, to: string)
         return { ...load, bar: place(load.bar) };
       case 'gable':
       case 'side':
+      case 'bowed':
         return { ...load, bay: bay(load.bay) };
       default:
         return load satisfies never;

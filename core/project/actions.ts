@@ -49,6 +49,18 @@ export type Load =
       readonly bay: string;
       readonly pressure: number;
       readonly width: number;
+    }
+  /**
+   * Rafters that are not quite straight, kept in line by the bracing of a roof bay: what they push it with when they are squeezed.
+   * kN in each (in a beam the force of its flange), how many lean on this bay, and how far the bracing itself is taken to give way: its span over `gives`.
+   */
+  | {
+      readonly kind: 'bowed';
+      readonly id: string;
+      readonly bay: string;
+      readonly squeeze: number;
+      readonly rafters: number;
+      readonly gives: number;
     };
 export type LoadKind = Load['kind'];
 

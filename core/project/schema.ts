@@ -252,6 +252,14 @@ const load = z.discriminatedUnion('kind', [
     pressure,
     width: millimetres(0, 1_000_000),
   }),
+  z.strictObject({
+    kind: z.literal('bowed'),
+    id: shortId,
+    bay: shortId,
+    squeeze: z.number().min(0).max(100_000),
+    rafters: z.int().min(1).max(1000),
+    gives: z.number().min(50).max(100_000),
+  }),
 ]);
 
 const actions = z.strictObject({

@@ -27,10 +27,21 @@ export function structureProblems(project: Project): readonly ProjectProblem[] {
         todo: 'Give the longer leg first and a thickness below the shorter leg.',
       });
   });
+  problems.push(...actionProblems(project));
   project.bays.forEach((bay, index) => {
     problems.push(...bayProblems(bay, `bays[${index}].recipe`), ...markProblems(bay, `bays[${index}].bars`));
   });
   return problems;
+}
+
+/** Two cases, combinations or loads under one name could not be told apart. */
+function actionProblems({ actions }: Project): readonly ProjectProblem[] {
+  if (!actions) return [];
+  return [
+    ...sameIds(actions.cases, 'actions.cases'),
+    ...sameIds(actions.combinations, 'actions.combinations'),
+    ...actions.cases.flatMap(({ loads }, index) => sameIds(loads, `actions.cases[${index}].loads`)),
+  ];
 }
 
 function bayProblems(bay: Bay, path: string): readonly ProjectProblem[] {

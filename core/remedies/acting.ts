@@ -17,6 +17,25 @@ export function takeAway(assessment: Assessment, finding: Finding): readonly Pro
         edits: [{ kind: 'load', loadCase: loadCase.id, id: named.id, load: null }],
       },
     ];
+  const factor = /^actions\.combinations\[(\d+)\]\.factors\.(.+)$/.exec(finding.path ?? '');
+  const combination = actions?.combinations[Number(factor?.[1])];
+  if (actions && combination && factor?.[2] !== undefined) {
+    const { [factor[2]]: _idle, ...factors } = combination.factors;
+    return [
+      {
+        label: 'Take the factor away',
+        detail: `${factor[2]} out of ${combination.id}`,
+        edits: [
+          {
+            kind: 'combinations',
+            combinations: actions.combinations.map((each) =>
+              each === combination ? { ...each, factors } : each,
+            ),
+          },
+        ],
+      },
+    ];
+  }
   const carry = actions?.carries[Number(/^actions\.carries\[(\d+)\]$/.exec(finding.path ?? '')?.[1])];
   return carry
     ? [

@@ -54,6 +54,8 @@ function loadWords(load: Load, units: UnitSystem): string {
       return `gable of ${load.bay} ${showLoad(load.pressure, 'pressure', units)} on rafter ${load.rafter}`;
     case 'side':
       return `wall on ${load.bay} ${showLoad(load.pressure, 'pressure', units)} over ${showLength(load.width, units, 'spoken')}`;
+    case 'bowed':
+      return `rafters of ${load.bay} not straight: ${load.rafters} with ${showLoad(load.squeeze, 'force', units)} each, bracing gives its span/${load.gives} (EN 1993-1-1 5.3.3, borrowed by other practices; from memory, sure)`;
     default:
       return load satisfies never;
   }

@@ -5,6 +5,7 @@ import { loadUnits } from '../../../core/units/loadUnits.ts';
 import { MM_PER_INCH } from '../../../core/units/unitSystem.ts';
 import { IconButton } from '../../controls/IconButton.tsx';
 import { LengthField } from '../../controls/LengthField.tsx';
+import { NumberField } from '../../controls/NumberField.tsx';
 import { SelectField } from '../../controls/SelectField.tsx';
 import { CloseSign } from '../../glyphs/signs.tsx';
 import { useActions } from '../../shell/services.tsx';
@@ -53,6 +54,7 @@ const WORDS: Readonly<Record<Load['kind'], string>> = {
   shortened: 'draws tight',
   gable: 'gable at',
   side: 'wall at',
+  bowed: 'rafters of',
 };
 
 interface FieldsProps {
@@ -126,6 +128,43 @@ function Fields({ load, name, project, set }: FieldsProps): JSX.Element {
             }
             most={MOST.shortened}
             onChange={(by) => set({ ...load, by })}
+          />
+        </>
+      );
+    case 'bowed':
+      return (
+        <>
+          <PlaceField
+            label={`Bay of ${name}`}
+            value={load.bay}
+            options={bays('roof')}
+            onChange={(bay) => set({ ...load, bay })}
+          />
+          <AmountField
+            label={`Squeeze in each rafter of ${name}`}
+            value={load.squeeze}
+            of={force}
+            most={MOST.force}
+            onChange={(squeeze) => set({ ...load, squeeze: Math.max(0, squeeze) })}
+          />
+          <NumberField
+            bare
+            label={`Rafters that lean on it, ${name}`}
+            unit="rafters"
+            value={load.rafters}
+            least={1}
+            most={1000}
+            onChange={(rafters) => set({ ...load, rafters })}
+          />
+          <NumberField
+            bare
+            label={`Bracing gives its span over, ${name}`}
+            unit="span/"
+            value={load.gives}
+            least={50}
+            most={100_000}
+            step={100}
+            onChange={(gives) => set({ ...load, gives })}
           />
         </>
       );

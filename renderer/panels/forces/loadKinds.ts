@@ -4,6 +4,7 @@ import type { Project } from '../../../core/project/model.ts';
 export const LOAD_KINDS: readonly { readonly kind: Load['kind']; readonly label: string }[] = [
   { kind: 'gable', label: 'wind on a gable' },
   { kind: 'side', label: 'wind on a wall' },
+  { kind: 'bowed', label: 'rafters not straight' },
   { kind: 'node', label: 'force on a node' },
   { kind: 'line', label: 'load along a bar' },
   { kind: 'shortened', label: 'bar drawn tight' },
@@ -13,6 +14,7 @@ export const LOAD_KINDS: readonly { readonly kind: Load['kind']; readonly label:
 export function hasPlaceFor(kind: Load['kind'], { bays }: Project): boolean {
   switch (kind) {
     case 'gable':
+    case 'bowed':
       return bays.some(({ recipe }) => recipe.kind === 'roof');
     case 'side':
       return bays.some(({ recipe }) => recipe.kind === 'wall');
@@ -30,6 +32,10 @@ export function firstLoad(kind: Load['kind'], id: string, { bays }: Project): Lo
     case 'gable': {
       const bay = of('roof');
       return bay === undefined ? null : { kind, id, bay, pressure: 0.5, rafter: 1, ground: 0 };
+    }
+    case 'bowed': {
+      const bay = of('roof');
+      return bay === undefined ? null : { kind, id, bay, squeeze: 100, rafters: 2, gives: 1000 };
     }
     case 'side': {
       const bay = of('wall');

@@ -1,6 +1,7 @@
 /** Forces on the whole framing, against statics by hand. N, mm. */
 import { describe, expect, it } from 'vitest';
 import { stockOf } from '../../../core/catalogue/stock.ts';
+import { bowLoad, initialBow } from '../../../core/forces/bowForces.ts';
 import { forcesOf } from '../../../core/forces/forces.ts';
 import type { ForceState, Forces } from '../../../core/forces/model.ts';
 import { layOut } from '../../../core/layout/layOut.ts';
@@ -190,6 +191,45 @@ describe('loads', () => {
       'actions.cases[0].loads[0]',
       'actions.cases[0].loads[1]',
     ]);
+  });
+
+  it('of rafters that are not straight are those of EN 1993-1-1 5.3.3, and balance themselves', () => {
+    // Practice-facts J3, a consistency check and not external: m 5, L 24 m, N 300 kN: e₀ 37.18 mm; q_d 0.775, 0.975, 1.275 N/mm for δ 0, 9.6 and 24 mm.
+    expect(initialBow(24_000, 5)).toBeCloseTo(37.18, 2);
+    for (const [gives, q] of [
+      [0, 0.775],
+      [9.6, 0.975],
+      [24, 1.275],
+    ] as const)
+      expect(Math.abs(bowLoad(300_000, 5, 24_000, gives) - q)).toBeLessThan(0.0005);
+    const R = bay(
+      roof(6000, 0, [
+        [4000, 'crossed'],
+        [4000, 'crossed'],
+        [4000, 'crossed'],
+      ]),
+      { id: 'R' },
+    );
+    const { found } = forces(
+      [R],
+      acting(
+        [wind([{ kind: 'bowed', id: 'b', bay: 'R', squeeze: 300, rafters: 5, gives: 1000 }])],
+        [alone('W')],
+      ),
+    );
+    const loads = found.caseLoads.get('W');
+    const q = bowLoad(300_000, 5, 12_000, 12);
+    expect(loads?.get('R/a.L1')?.[0]).toBeCloseTo(q * 4000, 6);
+    expect(loads?.get('R/a.L0')?.[0]).toBeCloseTo(q * (2000 - 6000), 6);
+    expect([...(loads?.values() ?? [])].reduce((sum, [x]) => sum + x, 0)).toBeCloseTo(0, 6);
+  });
+
+  it('with a factor for a case that is not there are told of', () => {
+    const { found } = forces(
+      [crossed()],
+      acting([wind([push('B/L1', [1, 0, 0])])], [{ ...alone('W'), factors: { w: 1.5 } }]),
+    );
+    expect(found.problems.map(({ path }) => path)).toEqual(['actions.combinations[0].factors.w']);
   });
 
   it('of a wall that leans go to every level by half the heights beside it', () => {
