@@ -1,6 +1,7 @@
 /** What the checks of resistance show. */
 import type { Check } from '../checks/model.ts';
 import { silentChecks } from '../checks/sectionChecks.ts';
+import { ECCENTRICITY_LEFT_OUT } from '../resistance/compression/compressionResistances.ts';
 import { sayUsed, showForce } from '../units/loads.ts';
 import type { Finding } from './model.ts';
 import { type FindingSubject, grouped, isAre, type Judged, judgedIn, marksInWords } from './subject.ts';
@@ -17,7 +18,12 @@ const blank = {
 export function checkedFindings(subject: FindingSubject): readonly Finding[] {
   return subject.layout.bays.flatMap((bay) => {
     const all = judgedIn(subject, bay);
-    return [...exceeded(subject, all), ...unchecked(subject, all), ...endDetails(all)];
+    return [
+      ...exceeded(subject, all),
+      ...unchecked(subject, all),
+      ...offMiddle(subject, all),
+      ...endDetails(all),
+    ];
   });
 }
 
@@ -82,6 +88,42 @@ function unchecked(subject: FindingSubject, all: readonly Judged[]): readonly Fi
       },
     ];
   });
+}
+
+/** Squeezed, held off its centroid, and judged through it, since no rule for that is met. */
+function offMiddle(subject: FindingSubject, all: readonly Judged[]): readonly Finding[] {
+  const units = subject.project.settings.units;
+  const found = all.filter(
+    ({ checks }) =>
+      checks?.compression && (checks.compressionBy?.note?.includes(ECCENTRICITY_LEFT_OUT) ?? false),
+  );
+  const why = ({ checks }: Judged): string => {
+    const rule = checks?.checks.find(({ resistance }) => resistance.kind === 'compression, one leg');
+    const unmet = (rule?.resistance.conditions ?? []).filter(({ met }) => !met);
+    const said = unmet.map(({ says, found: is }) => (is === null ? says : `${says} (${is})`)).join('; ');
+    return rule
+      ? `The rule for one leg, ${rule.resistance.standard} ${rule.resistance.clause}, does not apply: ${said}.`
+      : 'No rule held here counts with its eccentricity.';
+  };
+  return grouped(found, (judged) => `${judged.angle.spec.section} ${why(judged)}`).flatMap(
+    (group): readonly Finding[] => {
+      const [first] = group;
+      const force = first?.checks?.compression?.force;
+      if (!first || force === undefined) return [];
+      return [
+        {
+          ...blank,
+          id: `off-middle:${first.bar.id}`,
+          kind: 'squeezed off its middle',
+          severity: 'look into',
+          bay: first.bar.bay,
+          bars: group.map(({ bar }) => bar.id),
+          title: `${marksInWords(group)} ${isAre(group)} squeezed off the middle, and judged through it`,
+          detail: `${first.bar.mark} takes ${showForce(force, units)}. ${why(first)} The figure through the centroid leaves the eccentricity out: a beam-column check is still due.`,
+        },
+      ];
+    },
+  );
 }
 
 function whyNot(silent: readonly Check[]): string {

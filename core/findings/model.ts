@@ -35,6 +35,7 @@ export type FindingKind =
   | 'resistance exceeded'
   | 'not checked'
   | 'end detail too small'
+  | 'squeezed off its middle'
   | 'strut too weak'
   | 'strut too slender'
   | 'strut not checked';

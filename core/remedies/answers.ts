@@ -126,6 +126,8 @@ export function proposalsFor(
     case 'moves far before it works':
     case 'both diagonals squeezed':
     case 'loses support when the partner goes slack':
+    case 'squeezed off its middle':
+      return strongerEnds(assessment, finding);
     case 'strut too weak':
     case 'strut too slender':
     case 'strut not checked':

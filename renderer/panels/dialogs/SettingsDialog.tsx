@@ -13,6 +13,7 @@ import { useActions, useWindow } from '../../shell/services.tsx';
 import { presentProject } from '../../store/shown.ts';
 import { refusalText } from '../recipe/useRecipeEdit.ts';
 import { DialogFrame } from './DialogFrame.tsx';
+import { ResistanceFields } from './ResistanceFields.tsx';
 
 const STOCK_LISTS: readonly { readonly value: CatalogueId; readonly label: string }[] = [
   { value: 'en', label: 'European, EN 10056-1' },
@@ -64,6 +65,7 @@ export function SettingsDialog(): JSX.Element {
         />
         <EndFixityFields settings={settings} onChange={set} />
         <SagFields settings={settings} onChange={set} />
+        <ResistanceFields settings={settings} onChange={set} />
         <h3>Stock and units</h3>
         <SelectField
           label="Stock list"

@@ -1,5 +1,5 @@
 import type { JSX } from 'react';
-import type { EndConnection, UnitSystem } from '../../../core/project/model.ts';
+import { BOLT_GRADES, type EndConnection, type UnitSystem } from '../../../core/project/model.ts';
 import { showLength } from '../../../core/units/quantity.ts';
 import { CheckField } from '../../controls/CheckField.tsx';
 import { LengthField } from '../../controls/LengthField.tsx';
@@ -26,7 +26,12 @@ export function EndFields({ ends, units, usualGauge, onChange }: EndFieldsProps)
           { value: 'bolted', label: 'Bolted' },
           { value: 'welded', label: 'Welded' },
         ]}
-        onChange={(kind) => onChange({ kind }, 'end connection')}
+        onChange={(kind) =>
+          onChange(
+            kind === 'welded' && ends.weldLength === 0 ? { kind, weldLength: FIRST_WELD } : { kind },
+            'end connection',
+          )
+        }
       />
       {ends.kind === 'bolted' ? (
         <BoltFields ends={ends} units={units} usualGauge={usualGauge} onChange={onChange} />
@@ -38,6 +43,18 @@ export function EndFields({ ends, units, usualGauge, onChange }: EndFieldsProps)
           most={2000}
           step={10}
           onChange={(weldLength) => onChange({ weldLength }, 'weld length')}
+        />
+      )}
+      {ends.kind === 'welded' && (
+        <LengthField
+          label="Weld size"
+          mm={ends.weldSize ?? 6}
+          units={units}
+          least={2}
+          most={30}
+          step={1}
+          small
+          onChange={(weldSize) => onChange({ weldSize }, 'weld size')}
         />
       )}
       <Segmented
@@ -60,6 +77,9 @@ export function EndFields({ ends, units, usualGauge, onChange }: EndFieldsProps)
     </>
   );
 }
+
+/** mm, along each side of the leg, to begin with. */
+const FIRST_WELD = 100;
 
 function BoltFields({ ends, units, usualGauge, onChange }: EndFieldsProps): JSX.Element {
   return (
@@ -119,6 +139,58 @@ function BoltFields({ ends, units, usualGauge, onChange }: EndFieldsProps): JSX.
           onChange={(gauge) => onChange({ gauge }, 'gauge')}
         />
       )}
+      <SelectField
+        label="Rows along it"
+        value={ends.rows === 2 ? (ends.staggered ? 'staggered' : 'two') : 'one'}
+        options={[
+          { value: 'one', label: 'one' },
+          { value: 'two', label: 'two, side by side' },
+          { value: 'staggered', label: 'two, staggered' },
+        ]}
+        onChange={(rows) =>
+          onChange(
+            rows === 'one'
+              ? { rows: 1, staggered: false }
+              : {
+                  rows: 2,
+                  staggered: rows === 'staggered',
+                  rowSpacing: ends.rowSpacing ?? 3 * ends.boltDiameter,
+                },
+            'rows of bolts',
+          )
+        }
+      />
+      {ends.rows === 2 && (
+        <LengthField
+          label="Rows apart"
+          mm={ends.rowSpacing ?? 3 * ends.boltDiameter}
+          units={units}
+          least={10}
+          most={300}
+          step={5}
+          small
+          onChange={(rowSpacing) => onChange({ rowSpacing }, 'distance of the rows')}
+        />
+      )}
+      <SelectField
+        label="Bolt grade"
+        value={ends.boltGrade ?? 'usual'}
+        options={[
+          ...(ends.boltGrade === undefined ? [{ value: 'usual', label: 'usual' }] : []),
+          ...BOLT_GRADES.map((grade) => ({ value: grade, label: grade })),
+        ]}
+        onChange={(grade) => {
+          const boltGrade = BOLT_GRADES.find((known) => known === grade);
+          if (boltGrade) onChange({ boltGrade }, 'bolt grade');
+        }}
+      />
+      <div className="recipe-checks">
+        <CheckField
+          label="Threads in the plane of shear"
+          checked={ends.threadsInShear ?? true}
+          onChange={(threadsInShear) => onChange({ threadsInShear }, 'where the threads lie')}
+        />
+      </div>
     </>
   );
 }

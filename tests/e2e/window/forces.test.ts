@@ -77,6 +77,36 @@ describe('a beam at the head of a tier', () => {
   });
 });
 
+describe('what a practice leaves to choose', () => {
+  it('is chosen in the settings and at the ends: partial factors, a grade of the project’s own, rows and grade of bolts', async () => {
+    await choose(page, 'D1');
+    const part = page.getByRole('region', { name: 'Forces and resistance of D1' });
+    await command(page, 'File', 'Project settings…');
+    const dialog = page.getByRole('dialog', { name: 'Project settings' });
+    await dialog.getByLabel('Practice', { exact: true }).selectOption({ label: 'EN 1993-1-1' });
+    const gamma = dialog.getByRole('spinbutton', { name: 'γM2' });
+    await gamma.fill('1.5');
+    await gamma.press('Enter');
+    await dialog.getByRole('button', { name: 'Add a grade of my own' }).click();
+    await dialog.getByRole('textbox', { name: 'Name of grade 1' }).fill('old iron');
+    await dialog.getByRole('textbox', { name: 'Name of grade 1' }).press('Enter');
+    await page.keyboard.press('Escape');
+    await part.getByRole('button', { name: /Show the working/ }).click();
+    await expect.poll(() => part.innerText()).toMatch(/γM2[\s\S]*1\.50/);
+
+    const recipe = page.getByRole('region', { name: /^Recipe of/ });
+    await recipe.getByRole('textbox', { name: 'Grade' }).first().fill('old iron');
+    await recipe.getByRole('textbox', { name: 'Grade' }).first().press('Enter');
+    await expect.poll(() => part.innerText()).toMatch(/fy\s*275/);
+
+    await page.locator('summary', { hasText: 'Ends' }).click();
+    await recipe.getByLabel('Bolt grade').selectOption('10.9');
+    await expect.poll(() => part.innerText()).toMatch(/1\s?000 N\/mm²/);
+    await recipe.getByLabel('Rows along it').selectOption('staggered');
+    await recipe.getByRole('spinbutton', { name: 'Rows apart' }).waitFor();
+  });
+});
+
 describe('the faults planted in the example', () => {
   it('are mended by one remedy after another until nothing must be fixed, and the report is made of what is left', async () => {
     const counts = page.getByRole('button', { name: /^Findings: / });

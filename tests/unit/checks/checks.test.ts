@@ -106,6 +106,19 @@ describe('a diagonal that is pulled', () => {
 });
 
 describe('a diagonal counted on in compression too', () => {
+  it('is found squeezed off its middle where the rule for one leg does not apply', () => {
+    const { ends } = bay(wall(5000, [[4000, 'crossed']])).diagonals;
+    const one = pushed(2, { countedOn: 'both', ends: { ...ends, bolts: 1 } }, { practice: 'en1993' });
+    const finding = one.findings.find(({ kind }) => kind === 'squeezed off its middle');
+    expect(finding?.severity).toBe('look into');
+    expect(finding?.detail).toContain('BB.1.2');
+    const two = pushed(2, { countedOn: 'both' }, { practice: 'en1993' });
+    expect(kinds(two)).not.toContain('squeezed off its middle');
+    // AS 4100 8.4.6 is not held here.
+    const as = pushed(2, { countedOn: 'both', grade: '300' }, { practice: 'as4100' });
+    expect(kinds(as)).toContain('squeezed off its middle');
+  });
+
   it('is judged by no more than its critical load', () => {
     const assessment = pushed(2, { countedOn: 'both' });
     const checks = checksOf(assessment);
