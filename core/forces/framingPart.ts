@@ -6,6 +6,7 @@
 import { memberSection } from '../frame/memberSection.ts';
 import { cross, dot, length, scale, subtract, unit, type Vec3 } from '../geometry/vector.ts';
 import type { Bar, BarId, BayLayout, Layout, Plane } from '../layout/model.ts';
+import { rafterPoints } from './gableForces.ts';
 import type { AxialBar } from './model.ts';
 import { structuralMember } from './structuralMember.ts';
 
@@ -20,6 +21,8 @@ export interface FramingPart {
   /** Diagonals, and members between the nodes on them. */
   readonly pieces: readonly Piece[];
   readonly holds: readonly Hold[];
+  /** Both eaves of a frame, which keeps them from spreading. */
+  readonly ties: readonly Tie[];
   /** By node, the level directions along which its bays are braced: what acts square to them is for the frames. */
   readonly braced: readonly (readonly Vec3[])[];
 }
@@ -48,6 +51,12 @@ export interface Hold {
   readonly direction: Vec3;
   /** At the eaves of a roof on walls: the frames take there what is loaded in their own plane, and do not keep the roof from turning in plan. */
   readonly ofFrames: boolean;
+}
+
+export interface Tie {
+  readonly i: number;
+  readonly j: number;
+  readonly direction: Vec3;
 }
 
 /** A turn of 1 in these units moves a point this far away, mm, by 1 mm: keeps turns and displacements alike in size. */
@@ -131,6 +140,7 @@ class PartBuilder {
     const drafts = this.#bays.flatMap((bay) => this.#draftsOf(bay));
     const joints = this.#jointsOf(drafts);
     const pieces = drafts.map((draft) => this.#pieceOf(draft, joints));
+    const holds = this.#holds(drafts);
     return {
       bays: this.#bays,
       nodes: this.#nodes,
@@ -138,7 +148,8 @@ class PartBuilder {
       turns: this.#turns,
       fixed: this.#fixed(),
       pieces,
-      holds: this.#holds(drafts),
+      holds,
+      ties: this.#ties(holds),
       braced: this.#braced(drafts),
     };
   }
@@ -282,6 +293,24 @@ class PartBuilder {
     return [...taken].flatMap(([node, directions]) =>
       leftOver(directions).map((direction) => ({ node, direction, ofFrames: onWalls.has(node) })),
     );
+  }
+
+  /** Rafters that run from eaves to eaves over a ridge push them apart: what takes that is the frame, not the bracing. */
+  #ties(holds: readonly Hold[]): readonly Tie[] {
+    const ofFrames = new Map(holds.flatMap((hold) => (hold.ofFrames ? [[hold.node, hold] as const] : [])));
+    return this.#bays
+      .filter(({ kind }) => kind === 'roof')
+      .flatMap((bay) =>
+        ([1, 2] as const).flatMap((rafter) => {
+          const points = rafterPoints(bay, this.#layout, rafter);
+          const [first, last] = [points[0], points.at(-1)].map(
+            (point) => point && ofFrames.get(this.#indexOf.get(point.id) ?? -1),
+          );
+          return first && last && first !== last
+            ? [{ i: first.node, j: last.node, direction: first.direction }]
+            : [];
+        }),
+      );
   }
 
   /** Nodes at the eaves of a roof that walls of this part stand under. */

@@ -36,7 +36,7 @@ export interface PartStiffness {
 }
 
 export function partStiffness(part: FramingPart): PartStiffness {
-  const bending = [...bendingEntries(part)];
+  const bending = [...bendingEntries(part), ...tieEntries(part)];
   const leansOnFrames = part.holds.some(({ ofFrames }) => ofFrames);
   return {
     part,
@@ -209,6 +209,14 @@ function* holdEntries(part: FramingPart, ofFrames: number): Generator<readonly [
       hold.direction,
       hold.ofFrames ? ofFrames : HELD_BY_THE_BUILDING,
     );
+}
+
+function* tieEntries(part: FramingPart): Generator<readonly [number, number, number]> {
+  for (const { i, j, direction } of part.ties) {
+    const unknowns = [0, 1, 2].flatMap((c) => [3 * i + c, 3 * j + c]);
+    const row = direction.flatMap((part) => [part, -part]);
+    yield* rankOne(unknowns, row, HELD_BY_THE_BUILDING);
+  }
 }
 
 function* rankOne(
