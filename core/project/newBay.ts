@@ -1,6 +1,6 @@
 import type { CatalogueId } from '../catalogue/model.ts';
 import type { Vec3 } from '../geometry/vector.ts';
-import type { Bay, DiagonalSpec, EndConnection, Member, Recipe } from './model.ts';
+import type { Bay, DiagonalSpec, EndConnection, Member, Recipe, Role } from './model.ts';
 
 /** Sizes to begin with; every one is there to be changed. */
 export const COLUMN: Member = {
@@ -38,6 +38,32 @@ export const CHORD: Member = {
   web: 5.7,
   flange: 7.8,
 };
+
+/** What a bar of a freely drawn bay is to begin with, by what it is; null for bars of angle. */
+export function firstMember(role: Role): Member | null {
+  switch (role) {
+    case 'column':
+      return COLUMN;
+    case 'beam':
+      return BEAM;
+    case 'strut':
+      return STRUT;
+    case 'rafter':
+      return RAFTER;
+    case 'purlin':
+      return PURLIN;
+    case 'rail':
+      return RAIL;
+    case 'chord':
+      return CHORD;
+    case 'diagonal':
+    case 'knee':
+    case 'tie':
+      return null;
+    default:
+      return role satisfies never;
+  }
+}
 
 export const TWO_M16: EndConnection = {
   kind: 'bolted',

@@ -1,9 +1,11 @@
 import type { JSX } from 'react';
 import type { Bay, FreeBar, FreeNode, FreeRecipe, UnitSystem } from '../../../core/project/model.ts';
+import { firstMember } from '../../../core/project/newBay.ts';
 import { IconButton } from '../../controls/IconButton.tsx';
 import { LengthField } from '../../controls/LengthField.tsx';
 import { SelectField } from '../../controls/SelectField.tsx';
 import { CloseSign } from '../../glyphs/signs.tsx';
+import { FreeMembers } from './FreeMembers.tsx';
 import { ROLES } from './roles.ts';
 import { freeId } from './tiers.ts';
 import { useRecipeEdit } from './useRecipeEdit.ts';
@@ -20,6 +22,7 @@ export function FreeFields({ bay, recipe, units }: FieldsProps): JSX.Element {
     <>
       <NodeTable bay={bay} recipe={recipe} units={units} />
       <BarTable bay={bay} recipe={recipe} units={units} />
+      <FreeMembers bay={bay} recipe={recipe} units={units} />
     </>
   );
 }
@@ -129,7 +132,7 @@ function BarTable({ bay, recipe }: FieldsProps): JSX.Element {
             label={`Kind of ${bar.id}`}
             value={bar.role}
             options={ROLES}
-            onChange={(role) => setBar({ ...bar, role })}
+            onChange={(role) => setBar({ ...bar, role, member: firstMember(role) })}
           />
           <IconButton
             label={`Remove ${bar.id}`}

@@ -19,4 +19,24 @@ describe('a free bay', () => {
     expect(complaints).toEqual([]);
     await close();
   });
+
+  it('gives a bar that is made a strut a size, and takes another', async () => {
+    const { page, complaints, close } = await stand.open();
+    await command(page, 'File', 'New project');
+    await page.getByRole('button', { name: /^Free bay/ }).click();
+    await row(page, 'D2').waitFor();
+    const recipe = page.getByRole('region', { name: /^Recipe of/ });
+    await recipe
+      .getByLabel(/^Kind of/)
+      .last()
+      .selectOption('strut');
+    const size = recipe.getByRole('group', { name: /^strut/ });
+    const depth = size.getByRole('spinbutton', { name: 'Depth' });
+    await depth.fill('140');
+    await depth.press('Enter');
+    await expect.poll(() => depth.inputValue()).toBe('140');
+    await expect.poll(() => row(page, 'D2').count()).toBe(0);
+    expect(complaints).toEqual([]);
+    await close();
+  });
 });
