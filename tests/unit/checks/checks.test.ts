@@ -103,6 +103,17 @@ describe('a diagonal that is pulled', () => {
     const us = checksOf(pushed(40, {}, { units: 'us' }));
     expect(us.governing?.utilisation).toBe(metric.governing?.utilisation);
   });
+
+  it('uses as much in every check under every practice, whichever units are shown', () => {
+    for (const practice of ['sans10162', 'csaS16', 'aisc360', 'en1993', 'as4100', 'is800'] as const) {
+      const used = (units: 'metric' | 'us') =>
+        checksOf(pushed(40, { countedOn: 'both', section: '100x100x10' }, { practice, units })).checks.map(
+          ({ utilisation }) => utilisation,
+        );
+      expect(used('us'), practice).toEqual(used('metric'));
+      expect(used('metric').filter((each) => each !== null).length, practice).toBeGreaterThan(8);
+    }
+  });
 });
 
 describe('a diagonal counted on in compression too', () => {

@@ -94,6 +94,64 @@ describe('a crossed bay pushed at its head', () => {
     expect(state.residual).toBeLessThan(1e-9);
   });
 
+  it('answers a push at one place at another as much as the other way about, while every bar works both ways', () => {
+    // Maxwell and Betti: displacement along one push under the other is the same as the other way about.
+    const built = crossed(3);
+    const both = { ...built, diagonals: { ...built.diagonals, countedOn: 'both' as const } };
+    const under = (at: string, kN: readonly [number, number, number]) =>
+      only(forces([both], acting([wind([push(at, kN)])], [alone('W')]))).displacements;
+    const places = [
+      ['B/L1', [100, 0, 0]],
+      ['B/R2', [0, 0, -100]],
+      ['B/L3', [60, 0, 80]],
+      ['B/R3', [100, 0, 0]],
+    ] as const;
+    const along = (moved: ReadonlyMap<string, readonly [number, number, number]>, k: number): number => {
+      const [node, [x, , z]] = places[k] ?? places[0];
+      const [dx, , dz] = moved.get(node) ?? [0, 0, 0];
+      return x * dx + z * dz;
+    };
+    for (let a = 0; a < places.length; a++)
+      for (let b = 0; b < a; b++) {
+        const [one, other] = [places[a] ?? places[0], places[b] ?? places[0]];
+        const there = along(under(one[0], one[1]), b);
+        const back = along(under(other[0], other[1]), a);
+        expect(Math.abs(there - back), `${one[0]} ${other[0]}`).toBeLessThan(1e-9 * Math.abs(there) + 1e-9);
+        expect(Math.abs(there)).toBeGreaterThan(1e-3);
+      }
+  });
+
+  it('keeps its pretension in both until V is 2 P₀ cos θ, and works in one beyond', () => {
+    // Practice-facts G2: T = P₀ + V/(2 cos θ), then V/cos θ. Shortened by what draws both to P₀ against the members, found with no load.
+    const cos = 5 / Math.sqrt(41);
+    const drawn = (kN: number) =>
+      only(
+        forces(
+          [crossed()],
+          acting(
+            [
+              wind([
+                { kind: 'shortened', id: 'a', bar: 'B/t1.rise', by: 4 },
+                { kind: 'shortened', id: 'b', bar: 'B/t1.fall', by: 4 },
+                push('B/L1', [kN / 2, 0, 0]),
+                push('B/R1', [kN / 2, 0, 0]),
+              ]),
+            ],
+            [alone('W')],
+          ),
+        ),
+      );
+    const P0 = (drawn(0).forces.get('B/t1.rise') ?? 0) / 1000;
+    expect(P0).toBeGreaterThan(20);
+    const held = 1.6 * P0 * cos;
+    // Members shorten unlike under the push; to half a per cent the diagonals share it evenly.
+    expect((drawn(held).forces.get('B/t1.rise') ?? 0) / 1000 / (P0 + held / (2 * cos))).toBeCloseTo(1, 2);
+    expect(drawn(held).slack.size).toBe(0);
+    const past = 3 * P0 * cos;
+    expect((drawn(past).forces.get('B/t1.rise') ?? 0) / 1000).toBeCloseTo(past / cos, 3);
+    expect([...drawn(past).slack]).toEqual(['B/t1.fall']);
+  });
+
   it('is mirrored when the load is turned round', () => {
     const reversing = wind([push('B/L1', [50, 0, 0]), push('B/R1', [50, 0, 0])], { reverses: true });
     const { found } = forces([crossed()], acting([reversing], [alone('W')]));
