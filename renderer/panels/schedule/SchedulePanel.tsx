@@ -1,6 +1,7 @@
 import { useVirtualizer } from '@tanstack/react-virtual';
 import { type JSX, type KeyboardEvent, useEffect, useMemo, useRef } from 'react';
 import { useFontsLoaded } from '../../controls/useFontsLoaded.ts';
+import { useSize } from '../../controls/useSize.ts';
 import { useActions, useWindow } from '../../shell/services.tsx';
 import { shownAssessment, shownProject } from '../../store/shown.ts';
 import { ROW_DEEP } from './rowDeep.ts';
@@ -8,7 +9,7 @@ import { ScheduleFilter } from './ScheduleFilter.tsx';
 import { ScheduleHead } from './ScheduleHead.tsx';
 import { ScheduleRowView } from './ScheduleRowView.tsx';
 import { COLUMN_SETS } from './scheduleColumns.ts';
-import { scheduleGrid } from './scheduleGrid.ts';
+import { fittingGrid } from './scheduleGrid.ts';
 import { type ScheduleView, seenRows } from './scheduleView.ts';
 import './schedule.css';
 
@@ -25,10 +26,14 @@ export function SchedulePanel({ view, onChange }: SchedulePanelProps): JSX.Eleme
   const units = useWindow((state) => shownProject(state).settings.units);
   const scroller = useRef<HTMLDivElement>(null);
   const rows = useMemo(() => (assessment === null ? [] : seenRows(assessment, view)), [assessment, view]);
-  const columns = COLUMN_SETS[view.columns];
+  const [whole, size] = useSize<HTMLDivElement>();
+  const room = size?.width ?? Number.POSITIVE_INFINITY;
   const fonts = useFontsLoaded();
   // biome-ignore lint/correctness/useExhaustiveDependencies: what was measured before the typefaces came is measured again.
-  const grid = useMemo(() => scheduleGrid(columns, rows, units), [columns, rows, units, fonts]);
+  const { columns, grid } = useMemo(
+    () => fittingGrid(COLUMN_SETS[view.columns], rows, units, room),
+    [view.columns, rows, units, room, fonts],
+  );
   const at = rows.findIndex(({ row }) => row.bar === chosen);
   const virtual = useVirtualizer({
     count: rows.length,
@@ -54,7 +59,7 @@ export function SchedulePanel({ view, onChange }: SchedulePanelProps): JSX.Eleme
   };
 
   return (
-    <div className="schedule-whole">
+    <div ref={whole} className="schedule-whole">
       {view.filtering && (
         <ScheduleFilter
           view={view}

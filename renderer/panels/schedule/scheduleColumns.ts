@@ -42,15 +42,17 @@ export interface Column {
   readonly least: number;
   /** Share of the room left over; 0 takes none. */
   readonly share: number;
+  /** Left out of a table too wide for its room, the first of them first: another set of columns has it. */
+  readonly spare?: number;
 }
 
 export const BRACING_COLUMNS: readonly Column[] = [
   { id: 'mark', head: 'Mark', left: true, least: 54, share: 0 },
   { id: 'bay', head: 'Bay', left: true, least: 44, share: 0 },
   { id: 'section', head: 'Section', left: true, least: 74, share: 1.2 },
-  { id: 'setOut', head: 'Set-out', unit: 'length', least: 56, share: 1 },
-  { id: 'cut', head: 'Cut', unit: 'length', least: 56, share: 1 },
-  { id: 'mass', head: 'Mass', unit: 'mass', least: 50, share: 0.9 },
+  { id: 'setOut', head: 'Set-out', unit: 'length', least: 56, share: 1, spare: 3 },
+  { id: 'cut', head: 'Cut', unit: 'length', least: 56, share: 1, spare: 1 },
+  { id: 'mass', head: 'Mass', unit: 'mass', least: 50, share: 0.9, spare: 2 },
   { id: 'Lx', head: 'L', sub: 'x', unit: 'length', least: 52, share: 0.9 },
   { id: 'Ly', head: 'L', sub: 'y', unit: 'length', least: 52, share: 0.9 },
   { id: 'Lu', head: 'L', sub: 'u', unit: 'length', least: 52, share: 0.9 },

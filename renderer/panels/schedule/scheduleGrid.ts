@@ -37,6 +37,27 @@ export function scheduleGrid(
   };
 }
 
+/** The columns that the room has, and their grid: spare ones give way before the table scrolls. */
+export function fittingGrid(
+  columns: readonly Column[],
+  rows: readonly SeenRow[],
+  units: UnitSystem,
+  room: number,
+): { readonly columns: readonly Column[]; readonly grid: ScheduleGrid } {
+  const grid = scheduleGrid(columns, rows, units);
+  const spare = columns
+    .filter((column) => column.spare !== undefined)
+    .sort((a, b) => (a.spare ?? 0) - (b.spare ?? 0))[0];
+  return grid.least <= room || !spare
+    ? { columns, grid }
+    : fittingGrid(
+        columns.filter((column) => column !== spare),
+        rows,
+        units,
+        room,
+      );
+}
+
 /** Width of a column's widest text, whole px. Only texts of nearly the most letters are measured: there may be a thousand rows. */
 function longest(column: Column, rows: readonly SeenRow[], units: UnitSystem): number {
   const texts = new Set(rows.map((row) => cellText(column, row, units)));
