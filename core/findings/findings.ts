@@ -3,6 +3,7 @@ import { barFindings } from './bars.ts';
 import { bowingFindings } from './bowing.ts';
 import { checkedFindings } from './checked.ts';
 import { crossingFindings } from './crossings.ts';
+import { detailFindings } from './details.ts';
 import { holderFindings } from './holders.ts';
 import { markFindings } from './marks.ts';
 import { memberFindings } from './members.ts';
@@ -33,6 +34,7 @@ export function findingsOf(input: FindingInput): readonly Finding[] {
     ...patternFindings(subject),
     ...bowingFindings(subject),
     ...actingFindings(subject),
+    ...detailFindings(subject),
     ...checkedFindings(subject),
     ...memberFindings(subject),
   ].sort((a, b) => RANK[a.severity] - RANK[b.severity] || place(a) - place(b));

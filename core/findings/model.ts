@@ -35,6 +35,8 @@ export type FindingKind =
   | 'resistance exceeded'
   | 'not checked'
   | 'end detail too small'
+  | 'one bolt at an end'
+  | 'battens too far apart'
   | 'squeezed off its middle'
   | 'strut too weak'
   | 'strut too slender'

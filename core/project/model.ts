@@ -240,6 +240,8 @@ export interface DiagonalSpec {
   readonly arrangement: 'opposite' | 'same side';
   readonly gusset: number;
   readonly ends: EndConnection;
+  /** Of a pair of angles: how many battens or packs join them between the ends, evenly spaced; none unless said. */
+  readonly battens?: number;
 }
 
 export interface EndConnection {

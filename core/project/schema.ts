@@ -132,6 +132,7 @@ const diagonals = z.strictObject({
   arrangement: z.enum(['opposite', 'same side']),
   gusset: millimetres(0, 200),
   ends,
+  battens: z.int().min(0).max(100).optional(),
 });
 
 const override = z.strictObject({

@@ -3,7 +3,7 @@ import type { Assessment } from '../assessment.ts';
 import type { Catalogues } from '../catalogue/model.ts';
 import type { Finding } from '../findings/model.ts';
 import { takeAway } from './acting.ts';
-import { holdTheEnds, knownGrades, strongerEnds, usualDistances } from './ends.ts';
+import { holdTheEnds, knownGrades, moreBattens, strongerEnds, usualDistances } from './ends.ts';
 import {
   boltToLines,
   hangFromLines,
@@ -126,6 +126,10 @@ export function proposalsFor(
     case 'moves far before it works':
     case 'both diagonals squeezed':
     case 'loses support when the partner goes slack':
+    case 'one bolt at an end':
+      return strongerEnds(assessment, finding).slice(0, 1);
+    case 'battens too far apart':
+      return moreBattens(assessment, finding);
     case 'squeezed off its middle':
       return strongerEnds(assessment, finding);
     case 'strut too weak':

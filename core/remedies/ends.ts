@@ -62,6 +62,21 @@ export function usualDistances(assessment: Assessment, finding: Finding): readon
   ];
 }
 
+/** As many battens as bring one angle of the pair within what it may be between them. */
+export function moreBattens(assessment: Assessment, finding: Finding): readonly Proposal[] {
+  const [first] = barsOf(assessment, finding.bars);
+  if (!first?.angle || finding.value === null || finding.limit === null) return [];
+  const present = first.angle.spec.battens ?? 0;
+  const battens = Math.min(100, Math.ceil(((present + 1) * finding.value) / finding.limit) - 1);
+  return [
+    {
+      label: battens === 1 ? 'One batten' : `${battens} battens`,
+      detail: 'evenly spaced between the ends',
+      edits: [{ kind: 'diagonals', bay: first.bay, change: { battens } }],
+    },
+  ];
+}
+
 export function knownGrades(assessment: Assessment, finding: Finding): readonly Proposal[] {
   return usualGrades(assessment.practice.id)
     .slice(0, 3)

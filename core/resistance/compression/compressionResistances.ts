@@ -152,7 +152,7 @@ function shapeNote({ shape, plates }: ResistingSection): string | null {
       return null;
     case 'angles back to back':
     case 'starred angles':
-      return 'The two angles are taken as one bar: that battens or packs stand close enough to make them one is to be checked.';
+      return 'The two angles are taken as one bar, joined closely enough by battens or packs to act so: a finding says where they are not.';
     case 'tee':
     case 'channel':
       return plates ? null : 'Whether its plates are too slender to yield is not looked at.';

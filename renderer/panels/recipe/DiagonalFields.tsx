@@ -3,6 +3,7 @@ import type { Bay, UnitSystem } from '../../../core/project/model.ts';
 import { useFindSection } from '../../assessing/useFindSection.ts';
 import { useStockChoices } from '../../assessing/useStockChoices.ts';
 import { LengthField } from '../../controls/LengthField.tsx';
+import { NumberField } from '../../controls/NumberField.tsx';
 import { SectionField } from '../../controls/SectionField.tsx';
 import { Segmented } from '../../controls/Segmented.tsx';
 import { TextField } from '../../controls/TextField.tsx';
@@ -115,6 +116,15 @@ export function DiagonalFields({
         ]}
         onChange={(countedOn) => edit({ countedOn }, 'what is counted on')}
       />
+      {/^\s*2L/i.test(diagonals.section) && (
+        <NumberField
+          label="Battens"
+          value={diagonals.battens ?? 0}
+          least={0}
+          most={100}
+          onChange={(battens) => edit({ battens }, 'battens')}
+        />
+      )}
       <LengthField
         label="Gusset"
         mm={diagonals.gusset}
