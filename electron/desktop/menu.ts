@@ -37,8 +37,8 @@ export function menuTemplate(setting: MenuSetting): MenuItemConstructorOptions[]
     entry('file.exportCsv', 'Export schedule as CSV…', 'export csv'),
     entry('file.exportJson', 'Export schedule as JSON…', 'export json'),
     line,
-    entry('file.report', 'Report…', 'report', 'CmdOrCtrl+R'),
-    entry('file.print', 'Print report…', 'print', 'CmdOrCtrl+P'),
+    entry('file.report', 'Report…', 'report', 'CmdOrCtrl+P'),
+    entry('file.print', 'Print report…', 'print'),
     entry('file.pdf', 'Save report as PDF…', 'pdf', 'CmdOrCtrl+Shift+P'),
     line,
     { id: 'file.close', label: 'Close', accelerator: 'CmdOrCtrl+W', click: setting.close },
@@ -53,7 +53,7 @@ export function menuTemplate(setting: MenuSetting): MenuItemConstructorOptions[]
     { role: 'paste' },
     { role: 'selectAll' },
     line,
-    entry('edit.find', 'Find', 'find', 'CmdOrCtrl+F'),
+    entry('edit.find', 'Find', 'find', 'CmdOrCtrl+K'),
   ];
 
   const view: MenuItemConstructorOptions[] = [

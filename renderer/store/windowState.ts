@@ -111,7 +111,7 @@ export function firstState(theme: ThemeSetting): WindowState {
       nonce: 0,
       scale: 'doubled',
       bow: true,
-      shape: 'bar',
+      shape: 'marks',
       playing: false,
       push: false,
       trail: true,

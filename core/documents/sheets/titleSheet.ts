@@ -33,8 +33,8 @@ function scopeWords({ layout, diagonals, forces }: Assessment): string {
     `${bars === 1 ? 'One diagonal' : `${bars} diagonals`} of angle in ${many}: their set-out, their joins, the length over which each can bow about each axis, and its slenderness against its limit. ` +
     (forces === null
       ? 'Resistances stand alone, since nothing acts. '
-      : 'Forces by the combinations given, and the resistance of the diagonals and their ends. ') +
-    'Not covered: columns, beams, struts, purlins, footings, gusset plates, and the steps of erection.'
+      : 'Forces by the combinations given, the resistance of the diagonals and their ends, and that of struts and beams to what squeezes them along themselves. ') +
+    'Not covered: bending of struts and beams, columns, rafters, purlins, footings, gusset plates, and the steps of erection.'
   );
 }
 

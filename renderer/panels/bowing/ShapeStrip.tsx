@@ -23,17 +23,20 @@ export function ShapeStrip(): JSX.Element | null {
       ? null
       : (shownAssessment(state)?.diagonals.get(state.selection.bar)?.bowing?.real ?? null),
   );
-  if (study === null || bar === undefined || real === null) return null;
+  // There before the computed shape is, so that the drawing does not move when that comes.
+  if (bar?.angle == null) return null;
   const still = reducedMotion();
-  const bay = study.bay.N;
+  const bay = study?.bay.N ?? null;
   const says =
     view.shape === 'marks'
       ? 'the way that the marks leave free, drawn as a picture of it'
-      : view.shape === 'bar'
-        ? `at ${showForce(real.N, units)}: ${study.modeSays}`
-        : bay === null
-          ? `${bar.bay} can move without resistance`
-          : `at ${showForce(bay, units)} in ${bar.mark}`;
+      : study === null || real === null
+        ? 'no computed shape so far'
+        : view.shape === 'bar'
+          ? `at ${showForce(real.N, units)}: ${study.modeSays}`
+          : bay === null
+            ? `${bar.bay} can move without resistance`
+            : `at ${showForce(bay, units)} in ${bar.mark}`;
   return (
     <div className="view-strip" role="toolbar" aria-label="Shape">
       <Segmented<BowedShape>
@@ -47,7 +50,7 @@ export function ShapeStrip(): JSX.Element | null {
         ]}
         onChange={(shape) => actions.setView({ shape })}
       />
-      {view.shape !== 'marks' && !still && (
+      {view.shape !== 'marks' && study !== null && !still && (
         <button
           type="button"
           className="button strip-play"

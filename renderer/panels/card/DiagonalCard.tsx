@@ -21,7 +21,7 @@ interface DiagonalCardProps {
   readonly assessment: Assessment;
 }
 
-/** In the order of the argument: section, lanes, verdicts, reason, remedies; then what the user sets for this bar alone. */
+/** In the order of the argument: section, lanes, verdicts, reason, remedies; then the other readings, forces, and what the user sets for this bar alone. */
 export function DiagonalCard({ bar, angle, assessment }: DiagonalCardProps): JSX.Element {
   const units = useWindow((state) => shownProject(state).settings.units);
   const before = useWindow((state) => beforeAssessment(state)?.diagonals.get(bar.id) ?? null);
@@ -64,6 +64,7 @@ export function DiagonalCard({ bar, angle, assessment }: DiagonalCardProps): JSX
         </div>
       )}
       <div className="card-after">
+        <RemedyList bar={bar} assessment={assessment} />
         {diagonal !== undefined && (
           <CardReadings bar={bar} diagonal={diagonal} assessment={assessment} units={units} />
         )}
@@ -76,7 +77,6 @@ export function DiagonalCard({ bar, angle, assessment }: DiagonalCardProps): JSX
             units={units}
           />
         )}
-        <RemedyList bar={bar} assessment={assessment} />
         {/* New keys for each bar, so that no field keeps what was typed for another. */}
         <BarMarks key={`marks ${bar.id}`} bar={bar} angle={angle} units={units} />
         <Overrides key={`overrides ${bar.id}`} bar={bar} angle={angle} restraint={restraint} units={units} />

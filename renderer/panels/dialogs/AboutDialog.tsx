@@ -18,8 +18,10 @@ export function AboutDialog(): JSX.Element {
         <li>{CAUTION}</li>
         <li>Check the figures before they are used.</li>
         <li>
-          Holds are judged by the marks: what a join is taken to hold, and whether its holder is itself held.
-          Stiffness, forces, bolts, welds and gussets are not checked.
+          Holds are judged by the marks, by the framing’s stiffness and by critical loads. Forces and
+          resistances follow the loads given: diagonals and their ends, bolts and welds as a first check,
+          struts and beams along themselves. Bending of members, columns, rafters, purlins, gussets and
+          footings are not checked.
         </li>
         <li>Clauses given from memory say so; compare them with the standard before you rely on them.</li>
         <li>

@@ -16,6 +16,10 @@ const MOVING: readonly KeyRow[] = [
   { keys: 'Enter', does: 'Keep what is on trial' },
   { keys: '↑ ↓', does: 'Rows of the schedule and of lists; a step of a number' },
   { keys: 'Page ↑ ↓', does: 'Ten steps of a number, a page of the schedule' },
+  { keys: '↑ ↓ ← →', does: 'In the view: turn it' },
+  { keys: 'Shift ↑ ↓ ← →', does: 'In the view: move it' },
+  { keys: '+ −', does: 'In the view: closer, farther' },
+  { keys: 'Home', does: 'In the view: fit the bay' },
   { keys: '← →', does: 'While pushing: the place on the bar' },
   { keys: 'Shift ↑ ↓ ← →', does: 'While pushing: out of the plane, in the plane' },
   { keys: '← →', does: 'Tabs, choices, stock angles of the shortlist' },
@@ -32,7 +36,7 @@ export function KeyboardDialog(): JSX.Element {
         {MENUS.map((menu) => {
           const rows = COMMANDS.flatMap((command): KeyRow[] =>
             command.menu === menu && command.shortcut !== undefined
-              ? [{ keys: shortcutText(command.shortcut), does: command.label(state).replace('…', '') }]
+              ? [{ keys: shortcutText(command.shortcut), does: plain(command.label(state)) }]
               : [],
           );
           return rows.length === 0 ? null : <KeyTable key={menu} title={menu} rows={rows} />;
@@ -41,6 +45,9 @@ export function KeyboardDialog(): JSX.Element {
     </DialogFrame>
   );
 }
+
+/** Without what the command would do just now: "Undo" of "Undo: Change width". */
+const plain = (label: string): string => label.replace('…', '').replace(/:.*/, '');
 
 function KeyTable({
   title,

@@ -25,7 +25,9 @@ function Banner({ trying }: { readonly trying: Trying }): JSX.Element {
     const from = document.activeElement;
     keep.current?.focus();
     return () => {
+      // What the trial was begun from may be gone with the finding that it answered.
       if (from instanceof HTMLElement && from.isConnected) from.focus();
+      else document.querySelector<HTMLElement>('aside.card')?.focus();
     };
   }, []);
   return (

@@ -75,7 +75,9 @@ export function CombinationFields({ project }: { readonly project: Project }): J
                 </th>
               ))}
               <th>out of plumb</th>
-              <th aria-label="Remove" />
+              <th>
+                <span className="unseen">Remove</span>
+              </th>
             </tr>
           </thead>
           <tbody>

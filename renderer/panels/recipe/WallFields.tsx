@@ -52,7 +52,7 @@ export function WallMore({ bay, recipe, units }: FieldsProps<WallRecipe>): JSX.E
           onChange={(lines, what) => edit({ ...recipe, lines }, what)}
         />
       </Fold>
-      <Fold title="Members" aside="beams checked when squeezed">
+      <Fold title="Members" aside="columns, beams, rails">
         <MemberFields
           word="Columns"
           member={recipe.columns}

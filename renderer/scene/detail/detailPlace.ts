@@ -10,7 +10,7 @@ export const FIGURE_CAPTION = 54;
 const EDGE = 16;
 
 /** A leader that runs across a label or words is as bad as one longer by this, px. */
-const CROSSED = 90;
+const CROSSED = 240;
 
 /** The places tried, by part of the free width and height. */
 const PLACES: readonly Vec2[] = [

@@ -28,8 +28,8 @@ const PARTS = [0.72, 0.28, 0.64, 0.36, 0.8, 0.2, 0.56, 0.44] as const;
 /** Where the label stands from there. */
 const SIDES = ['right', 'left', 'above', 'below'] as const;
 
-/** Length of a leader, px; the longer one where there is no fair place with the shorter. */
-const LEADERS = [16, 40] as const;
+/** Length of a leader, px; a longer one where there is no fair place with the shorter. */
+const LEADERS = [16, 40, 84, 140] as const;
 const OF_A_LEADER = PARTS.length * SIDES.length;
 
 /** Price of a wrong place. Covering a glyph, a ring or words a little costs more than any plain preference; labels never cover one another. */
@@ -78,13 +78,13 @@ export function labelPlaces(
     (a, b) => Number(b.must) - Number(a.must) || (b.weight ?? 0) - (a.weight ?? 0),
   );
   for (const wish of inOrder) {
-    const hadFar = (previous.get(wish.key) ?? 0) >= OF_A_LEADER;
+    const had = Math.floor((previous.get(wish.key) ?? 0) / OF_A_LEADER);
     let best: LabelPlace | null = null;
     let least = Number.POSITIVE_INFINITY;
-    for (const far of [0, 1] as const) {
+    for (const [far, leader] of LEADERS.entries()) {
       // With the longer leader only where the shorter finds nothing fair, or where it stands on a longer one already.
-      if (far === 1 && least <= TOO_DEAR && !hadFar) break;
-      for (const place of candidates(wish, far)) {
+      if (far > had && least <= TOO_DEAR) break;
+      for (const place of candidates(wish, far, leader)) {
         const cost = costOf(wish, place) + far * COST.longer;
         if (cost >= least) continue;
         least = cost;
@@ -99,13 +99,13 @@ export function labelPlaces(
   return places;
 }
 
-function candidates(wish: LabelWish, far: 0 | 1): readonly LabelPlace[] {
+function candidates(wish: LabelWish, far: number, leader: number): readonly LabelPlace[] {
   const [i, j] = wish.bar;
   return PARTS.flatMap((part, p) =>
     SIDES.map((side, s): LabelPlace => {
       const onBar: Vec2 = [i[0] + (j[0] - i[0]) * part, i[1] + (j[1] - i[1]) * part];
       return {
-        ...beside(onBar, side, wish, LEADERS[far]),
+        ...beside(onBar, side, wish, leader),
         onBar,
         candidate: far * OF_A_LEADER + p * SIDES.length + s,
       };

@@ -10,7 +10,7 @@ const TURN = 7.5;
 const MOVE = 40;
 const CLOSER = 1.2;
 
-/** Arrows turn the view, with shift they move the sheet; + and − come closer and go away; Home and F fit the bay. Null: another key. */
+/** Arrows turn the view, with shift they move the sheet; + and − come closer and go away; Home fits the bay. Null: another key. */
 export function viewKey(key: string, shift: boolean): ViewKey | null {
   const arrow = ARROWS[key];
   if (arrow) {
@@ -27,8 +27,6 @@ export function viewKey(key: string, shift: boolean): ViewKey | null {
     case '_':
       return { kind: 'closer', factor: 1 / CLOSER };
     case 'Home':
-    case 'f':
-    case 'F':
       return { kind: 'fit' };
     default:
       return null;

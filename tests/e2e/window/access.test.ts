@@ -30,11 +30,14 @@ describe.each(['light', 'dark'] as const)('in %s', (theme) => {
   it('the window breaks no rule of access, with each table before it and a crossing open', async () => {
     await withWindow(theme, async ({ page }) => {
       await choose(page, 'D2');
-      for (const tab of [/^Schedule/, /^Shortlist/, /^Findings/, /^Bowing/]) {
+      for (const tab of [/^Schedule/, /^Shortlist/, /^Findings/, /^Bowing/, /^Forces/]) {
         await page.getByRole('tab', { name: tab }).click();
         await page.waitForTimeout(300);
         expect(await broken(page)).toEqual([]);
       }
+      await page.getByRole('radio', { name: 'What acts' }).locator('xpath=ancestor::label').click();
+      await page.waitForTimeout(300);
+      expect(await broken(page)).toEqual([]);
       await page.locator('[data-crossing]').first().click();
       await page.getByRole('region', { name: /^Crossing/ }).waitFor();
       expect(await broken(page)).toEqual([]);

@@ -128,6 +128,7 @@ describe('the computed shape', () => {
     await choose(seen, 'D2');
     const curve = seen.locator('.scene-bow').first();
     const play = seen.getByRole('toolbar', { name: 'Shape' }).getByRole('button', { name: /^Play/ });
+    await seen.getByRole('toolbar', { name: 'Shape' }).getByText('computed, D2').click();
     await play.waitFor();
     await settled(curve);
     await play.click();
@@ -168,9 +169,21 @@ async function settled(curve: Locator): Promise<void> {
 
 /** The middle of the ring that marks the pushed place. */
 async function placeOf(shown: Page): Promise<readonly [number, number]> {
-  const ring = await shown.locator('.scene-push-place').boundingBox();
-  if (ring === null) throw new Error('no place is pushed');
-  return [ring.x + ring.width / 2, ring.y + ring.height / 2];
+  const ring = shown.locator('.scene-push-place');
+  let last = '';
+  let same = 0;
+  // The drawing may still be finding its place.
+  await expect
+    .poll(async () => {
+      const now = JSON.stringify(await ring.boundingBox());
+      same = now === last && now !== 'null' ? same + 1 : 0;
+      last = now;
+      return same;
+    })
+    .toBeGreaterThan(2);
+  const box = await ring.boundingBox();
+  if (box === null) throw new Error('no place is pushed');
+  return [box.x + box.width / 2, box.y + box.height / 2];
 }
 
 /** Takes hold of the pushed place and drags it a little way along. */
