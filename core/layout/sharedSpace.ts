@@ -58,23 +58,22 @@ function steelOf(bar: Bar, order: number): Steel | null {
   const { outline } = angle.stock;
   const { heel, x, y } = angle.placement;
   const corners = [heel, add(heel, scale(x, outline.shortLeg)), add(heel, scale(y, outline.longLeg))];
-  const ends = [bar.from, bar.to].flatMap((end) => corners.map((corner) => add(end, corner)));
   return {
     bar,
     angle,
     order,
     corners,
-    low: extreme(ends, Math.min),
-    high: extreme(ends, Math.max),
+    low: reachOf(bar, corners, Math.min),
+    high: reachOf(bar, corners, Math.max),
   };
 }
 
-function extreme(points: readonly Vec3[], of: (...values: number[]) => number): Vec3 {
-  return [
-    of(...points.map((each) => each[0])),
-    of(...points.map((each) => each[1])),
-    of(...points.map((each) => each[2])),
-  ];
+/** Least or greatest coordinates of a bar's steel: those of its ends and of its section come together. */
+function reachOf(bar: Bar, corners: readonly Vec3[], of: (a: number, b: number) => number): Vec3 {
+  const along = (axis: 0 | 1 | 2): number =>
+    of(bar.from[axis], bar.to[axis]) +
+    corners.reduce((most, corner) => of(most, corner[axis]), corners[0]?.[axis] ?? 0);
+  return [along(0), along(1), along(2)];
 }
 
 function longestAxis(steel: readonly Steel[]): 0 | 1 | 2 {
@@ -90,7 +89,14 @@ function longestAxis(steel: readonly Steel[]): 0 | 1 | 2 {
 }
 
 function boxesMeet(p: Steel, q: Steel): boolean {
-  return ([0, 1, 2] as const).every((axis) => p.low[axis] <= q.high[axis] && q.low[axis] <= p.high[axis]);
+  return (
+    p.low[0] <= q.high[0] &&
+    q.low[0] <= p.high[0] &&
+    p.low[1] <= q.high[1] &&
+    q.low[1] <= p.high[1] &&
+    p.low[2] <= q.high[2] &&
+    q.low[2] <= p.high[2]
+  );
 }
 
 function sharedBy(p: Steel, q: Steel): SharedSpace | null {
