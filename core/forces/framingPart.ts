@@ -66,6 +66,9 @@ export const HELD_BY_THE_BUILDING = 1e7;
 /** What is left of it against a roof that turns in plan, N/mm: enough to tell where it stands, too little to share in what walls carry. */
 export const YIELDING = 10;
 
+/** Walls at least so far apart are two lines, mm. */
+const TWO_LINES = 100;
+
 /** Within this angle two members run through, rad. */
 const IN_LINE = Math.sin(Math.PI / 180);
 
@@ -303,24 +306,38 @@ class PartBuilder {
       .flatMap((bay) =>
         ([1, 2] as const).flatMap((rafter) => {
           const points = rafterPoints(bay, this.#layout, rafter);
-          const [first, last] = [points[0], points.at(-1)].map(
-            (point) => point && ofFrames.get(this.#indexOf.get(point.id) ?? -1),
-          );
-          return first && last && first !== last
-            ? [{ i: first.node, j: last.node, direction: first.direction }]
+          const [i, j] = [points[0], points.at(-1)].map((point) => this.#indexOf.get(point?.id ?? ''));
+          // One end may stand in a wall across the building, which holds it by itself.
+          const hold = ofFrames.get(i ?? -1) ?? ofFrames.get(j ?? -1);
+          const overARidge = bay.planes.length > 1;
+          return hold && overARidge && i !== undefined && j !== undefined && i !== j
+            ? [{ i, j, direction: hold.direction }]
             : [];
         }),
       );
   }
 
-  /** Nodes at the eaves of a roof that walls of this part stand under. */
+  /**
+   * Nodes at the eaves of roofs that stand on braced walls along two lines or more, which keep such a roof from turning in plan by statics.
+   * On one line alone only the frames can: there they keep all their stiffness.
+   */
   #eavesOnWalls(roofs: ReadonlySet<string>): ReadonlySet<number> {
     const found = new Set<number>();
     const walls = new Set(this.#bays.filter(({ kind }) => kind === 'wall').flatMap(({ nodes }) => nodes));
-    this.#nodes.forEach((id, k) => {
-      const supports = this.#layout.nodes.get(id)?.supports ?? {};
-      if (walls.has(id) && Object.keys(supports).some((bay) => roofs.has(bay))) found.add(k);
-    });
+    for (const bay of this.#bays) {
+      const along = bay.planes[0]?.right;
+      if (!roofs.has(bay.id) || !along) continue;
+      const shared = bay.nodes.filter((id) => walls.has(id));
+      const across = shared.map((id) => {
+        const [x, y] = this.#layout.nodes.get(id)?.at ?? [0, 0, 0];
+        return y * along[0] - x * along[1];
+      });
+      if (Math.max(...across) - Math.min(...across) < TWO_LINES) continue;
+      for (const id of shared) {
+        const node = this.#indexOf.get(id);
+        if (node !== undefined && this.#layout.nodes.get(id)?.supports[bay.id]) found.add(node);
+      }
+    }
     return found;
   }
 

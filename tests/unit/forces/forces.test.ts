@@ -389,6 +389,14 @@ describe('a roof bay on two unlike walls that share its eaves', () => {
     expect(at('F') / -10_000).toBeCloseTo(1, 2);
   });
 
+  it('leans on its frames where one wall alone stands under it', () => {
+    const state = only(forces([R, near], acting([wind([push('R/a.L1', [20, 0, 0])])], [alone('W')])));
+    expect(state.noWay).toEqual([]);
+    const x = [...state.reactions.values()].reduce((sum, [each]) => sum + each, 0);
+    expect(x).toBeCloseTo(-20_000, 0);
+    for (const [node, moved] of state.displacements) expect(Math.hypot(...moved), node).toBeLessThan(200);
+  });
+
   it('leaves what acts across the building to its frames', () => {
     const state = only(forces([R, near, far], acting([wind([push('R/a.L0', [0, 20, 0])])], [alone('W')])));
     for (const [bar, force] of state.forces) expect(Math.abs(force), bar).toBeLessThan(50);
