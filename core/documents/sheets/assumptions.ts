@@ -19,12 +19,19 @@ export function projectAssumptions(assessment: Assessment): readonly string[] {
       : 'Unbraced lengths run between the centres of the end connections.',
     endsWords(assessment),
     'No load but their own weight acts on the bars between their stations.',
+    ...(assessment.forces === null ? [] : FORCES),
     'Every mark on the drawing is built as it stands there, bolts in place and tight, before the bar is relied on.',
     `Sections are of ${CATALOGUE_NAMES[settings.catalogue]}${project.ownStock.length > 0 ? `, and of the project's own list (${project.ownStock.length} sizes)` : ''}.`,
     ...vouchedLines(assessment),
     ...vouchedPoints(assessment),
   ];
 }
+
+/** What forces rest on. */
+const FORCES: readonly string[] = [
+  'Bars are straight lines between set-out points; members that run through a node bend there in the plane of their bay, and feet are hinged.',
+  'Bays that share nodes carry together. The rest of the building holds, square to its bays, what they do not; frames keep the eaves of a roof from spreading, and keep the roof from turning in plan only where it stands on one braced line alone.',
+];
 
 function limitKey({ limit, source, clause, className }: LimitInForce): string {
   return [limit, source, clause, className].join('|');
