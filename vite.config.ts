@@ -7,6 +7,9 @@ import { defineConfig, type EnvironmentOptions } from 'vite';
 const at = (relative: string): string => path.resolve(import.meta.dirname, relative);
 
 /** One file for Node or Electron, with everything but Electron and Node's own modules inside. */
+const OWN_NAME =
+  "import { fileURLToPath as ownPath } from 'node:url'; const __filename = ownPath(import.meta.url);";
+
 function nodeFile(entry: string, out: string, format: 'cjs' | 'es'): EnvironmentOptions {
   return {
     consumer: 'server',
@@ -21,7 +24,13 @@ function nodeFile(entry: string, out: string, format: 'cjs' | 'es'): Environment
       rolldownOptions: {
         input: { [path.parse(out).name]: at(entry) },
         external: ['electron', ...builtinModules, /^node:/],
-        output: { format, entryFileNames: path.basename(out), codeSplitting: false },
+        output: {
+          format,
+          entryFileNames: path.basename(out),
+          codeSplitting: false,
+          // Packages written for the other format ask for their own file's name.
+          ...(format === 'es' ? { banner: OWN_NAME } : {}),
+        },
       },
     },
   };

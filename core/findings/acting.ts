@@ -47,6 +47,7 @@ function problemFindings(subject: FindingSubject, forces: Forces): readonly Find
     id: `action:${path}`,
     kind: 'load on nothing' as const,
     severity: 'must fix' as const,
+    breaksLimit: true,
     bay: subject.layout.bays[0]?.id ?? '',
     bars: [],
     title: 'A load acts on nothing',

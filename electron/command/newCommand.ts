@@ -196,7 +196,7 @@ async function make(bay: Bay, options: CommonOptions, ending: Ending): Promise<v
   const read = readProject(text);
   if (!read.ok)
     return ending.trouble({ kind: 'no project', file: 'the new project', problems: read.problems });
-  const delivered = await deliver(text, options.out, ending.terminal, options.force ? 'replace' : 'refuse');
+  const delivered = await deliver(text, options.out, ending.terminal, options.force ? 'force' : 'refuse');
   if (!delivered.ok) ending.trouble(delivered.trouble);
 }
 

@@ -1,4 +1,4 @@
-import { stat } from 'node:fs/promises';
+import { readFile, stat } from 'node:fs/promises';
 import { replaceFile } from '../files/replaceFile.ts';
 import { systemWords } from './projectFile.ts';
 import type { Terminal } from './terminal.ts';
@@ -7,13 +7,13 @@ import type { Attempt } from './trouble.ts';
 /**
  * Writes a result to the file of -o, all or nothing, or to the terminal when there is none.
  *
- * @param existing whether a file that is there already may be replaced
+ * @param existing whether a file that is there already may be replaced; a project never is, but by force
  */
 export async function deliver(
   text: string,
   file: string | undefined,
   terminal: Terminal,
-  existing: 'replace' | 'refuse',
+  existing: 'replace' | 'refuse' | 'force',
 ): Promise<Attempt<null>> {
   if (file === undefined) {
     terminal.out(text);
@@ -21,6 +21,8 @@ export async function deliver(
   }
   if (existing === 'refuse' && (await isThere(file)))
     return { ok: false, trouble: { kind: 'would overwrite', file } };
+  if (existing === 'replace' && (await isProject(file)))
+    return { ok: false, trouble: { kind: 'over a project', file } };
   try {
     await replaceFile(file, text);
   } catch (error) {
@@ -28,6 +30,12 @@ export async function deliver(
   }
   terminal.err(`${file}: written.\n`);
   return { ok: true, value: null };
+}
+
+/** By the mark that every project file bears near its beginning. */
+async function isProject(file: string): Promise<boolean> {
+  const text = await readFile(file, 'utf8').catch(() => '');
+  return /^\s*\{\s*"format"\s*:\s*"tautline-project"/.test(text);
 }
 
 async function isThere(file: string): Promise<boolean> {

@@ -15,6 +15,7 @@ export type Trouble =
     }
   | { readonly kind: 'unwritable'; readonly file: string; readonly why: string }
   | { readonly kind: 'would overwrite'; readonly file: string }
+  | { readonly kind: 'over a project'; readonly file: string }
   | { readonly kind: 'no such section'; readonly typed: string; readonly nearest: readonly string[] }
   | {
       readonly kind: 'section in another list';
@@ -52,6 +53,8 @@ export function troubleText(trouble: Trouble): string {
       return `${trouble.file}: cannot be written (${trouble.why}). Check the folder and your rights to it; nothing was changed.`;
     case 'would overwrite':
       return `${trouble.file}: is there already. Choose another name, or give --force to replace it; nothing was changed.`;
+    case 'over a project':
+      return `${trouble.file}: is a project, which this would replace. Choose another name for what is written; nothing was changed.`;
     case 'no such section':
       return `${trouble.typed.trim() === '' ? '“”' : trouble.typed}: in no stock list. ${nearestText(trouble.nearest)}`;
     case 'section in another list':
