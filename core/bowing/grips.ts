@@ -1,6 +1,7 @@
 import type { Vec2 } from '../geometry/vector.ts';
 import { HOLDS_FROM } from '../restraint/claims.ts';
 import { sameDirection } from '../restraint/directions.ts';
+import type { Station } from '../restraint/model.ts';
 import { inertiaFor } from '../section/direction.ts';
 import type { Hold } from '../stability/model.ts';
 import {
@@ -26,14 +27,12 @@ export function offeredStations(bar: BowingBar, steel: Steel, rigidLoad: number)
     const held = found.station.held;
     const hold = (direction: HoldGrip['direction'], way: Vec2): HoldGrip => {
       const stiffness = stiffnessAlong(offered, way);
-      const counted =
-        held.ways === 2 ||
-        (held.ways === 1 && Math.abs(held.direction[0] * way[0] + held.direction[1] * way[1]) >= HOLDS_FROM);
+      const counted = holdsAlong(held, way);
       return {
         direction,
         counted,
         offered: stiffness,
-        ideal: idealStiffness(bar, steel, way, inner.length),
+        ideal: idealStiffness(bar, steel, way, bracesAlong(inner, way)),
         grip: counted ? gripWith(bar, steel, found.at, way, stiffness) / rigidLoad : null,
       };
     };
@@ -46,6 +45,16 @@ export function offeredStations(bar: BowingBar, steel: Steel, rigidLoad: number)
     ];
   });
 }
+
+const holdsAlong = (held: Station['held'], way: Vec2): boolean =>
+  held.ways === 2 ||
+  (held.ways === 1 && Math.abs(held.direction[0] * way[0] + held.direction[1] * way[1]) >= HOLDS_FROM);
+
+/** How many stations hold along `way`; one where none does, for the hold that is asked about. */
+export const bracesAlong = (
+  inner: readonly { readonly station: Pick<Station, 'held'> }[],
+  way: Vec2,
+): number => Math.max(1, inner.filter(({ station }) => holdsAlong(station.held, way)).length);
 
 /** Winter's ideal stiffness for n equal spans of a bar that bends only along `way`: β = N P/Lb with N = 2(1 + cos π/(n + 1)) for n braces. */
 export function idealStiffness(bar: BowingBar, steel: Steel, way: Vec2, braces: number): number {

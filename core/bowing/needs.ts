@@ -3,7 +3,7 @@ import { sameDirection } from '../restraint/directions.ts';
 import type { Hold } from '../stability/model.ts';
 import { type BowingBar, bareBar, innerStations, rigidHolds, type Steel } from './barProblems.ts';
 import { loadOf } from './critical.ts';
-import { idealStiffness } from './grips.ts';
+import { bracesAlong, idealStiffness } from './grips.ts';
 
 /** Stiffness that a hold must have, by three measures, N/mm. */
 export interface NeededStiffness {
@@ -48,7 +48,7 @@ export function neededStiffness(
     return high;
   };
   return {
-    planarIdeal: idealStiffness(bar, steel, way, inner.length),
+    planarIdeal: idealStiffness(bar, steel, way, bracesAlong(inner, way)),
     for95: least(0.95) ?? STIFFEST,
     forAll: least(1 - 1e-9),
   };

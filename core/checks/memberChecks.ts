@@ -79,7 +79,11 @@ export function memberChecks(
     criticalLoad: null,
     system: 'planar',
     joinedBetween: false,
-    loadedAcross: blank.moment > 0,
+    loadedAcross:
+      blank.moment > 0 ||
+      (project.actions?.cases ?? []).some(({ loads }) =>
+        loads.some((load) => load.kind === 'line' && load.bar === bar.id),
+      ),
   };
   const check = checkOf(withConditions(byLengths(question), conditions), demands.compression);
   return {

@@ -2,7 +2,7 @@ import type { Actions, Combination } from '../project/actions.ts';
 import type { CombinationState } from './model.ts';
 
 /** With more cases than this that act either way, they are turned round together only. */
-const MOST_TURNED_SINGLY = 3;
+const MOST_TURNED_SINGLY = 5;
 
 /** Every combination with every way of turning round the cases that act either way, so that no direction is forgotten. */
 export function combinationStates(actions: Actions): readonly CombinationState[] {

@@ -119,7 +119,9 @@ function answerOf(
     if (!piece) return;
     const force = axial[index] ?? 0;
     const known = forces.get(bar);
-    if (known === undefined || Math.abs(force) > Math.abs(known)) forces.set(bar, force);
+    // Of a member in several pieces the one squeezed most is told: that is what it is checked for.
+    const tells = isDiagonal ? Math.abs(force) > Math.abs(known ?? 0) : force < (known ?? 0);
+    if (known === undefined || tells) forces.set(bar, force);
     if (isDiagonal) {
       const stretch = dot(piece.direction, subtract(at(q, piece.j), at(q, piece.i)));
       elongations.set(bar, (elongations.get(bar) ?? 0) + stretch);

@@ -44,7 +44,11 @@ export function studyOf(assessment: Assessment, bar: BarId): BarStudy | null {
     demands:
       studied.angle.spec.countedOn === 'both' && bowing
         ? restraintDemands(assessment.practice.id, {
-            compression: bowing.real.N,
+            // What squeezes it in the combinations, or its critical load where that is more or nothing acts.
+            compression: Math.max(
+              bowing.real.N,
+              assessment.diagonals.get(bar)?.checks?.compression?.force ?? 0,
+            ),
             spacing: studied.restraint.lanes.v.unbraced,
             points: Math.max(1, bowing.stations.length),
             misalignment: studied.restraint.lanes.v.unbraced / 500,
