@@ -1,4 +1,4 @@
-import { MOST_BETWEEN } from '../layout/crossings.ts';
+import { mostBetween } from '../layout/crossings.ts';
 import type { Crossing } from '../layout/model.ts';
 import { showLength } from '../units/quantity.ts';
 import type { Finding } from './model.ts';
@@ -20,7 +20,6 @@ export function crossingFindings(subject: FindingSubject): readonly Finding[] {
 }
 
 function findingsAt(subject: FindingSubject, crossing: Crossing): readonly Finding[] {
-  if (crossing.kind !== 'diagonals') return [];
   const found: Finding[] = [];
   const name = nameOf(subject, crossing);
   const units = subject.project.settings.units;
@@ -31,6 +30,21 @@ function findingsAt(subject: FindingSubject, crossing: Crossing): readonly Findi
     breaksLimit: false,
     path: `${bayPath(subject, crossing.bay)}.joins.${crossing.key}`,
   } as const;
+  if (crossing.tooFarApart && isJoinMarked(crossing)) {
+    const most = mostBetween(crossing.kind);
+    found.push({
+      ...base,
+      id: `apart:${crossing.id}`,
+      kind: 'too far apart to join',
+      severity: 'look into',
+      title: `${name} lie too far apart to be joined`,
+      detail: `There are ${showLength(crossing.gap, units, 'small')} between them, and no ${crossing.kind === 'diagonals' ? 'join of two diagonals' : 'cleat'} is taken to span more than ${showLength(most, units, 'small')} (common practice), so nothing is taken from the mark. Bring the bars nearer, or say that there is no join.`,
+      value: crossing.gap,
+      limit: most,
+      quantity: 'length',
+    });
+  }
+  if (crossing.kind !== 'diagonals') return found;
   if (crossing.join === null)
     found.push({
       ...base,
@@ -51,21 +65,9 @@ function findingsAt(subject: FindingSubject, crossing: Crossing): readonly Findi
       kind: 'clash',
       severity: 'must fix',
       title: `${name} clash`,
-      detail: `Both lie on one side of the gusset and run through each other by ${showLength(-crossing.gap, units, 'small')}. Put one on the other side, or cut one and plate it.`,
+      detail: `${whereTheyLie(subject, crossing)} and run through each other by ${showLength(-crossing.gap, units, 'small')}. Put one on the other side of the gusset or farther away, or cut one and plate it.`,
       value: -crossing.gap,
       limit: 0,
-      quantity: 'length',
-    });
-  if (crossing.tooFarApart && isJoinMarked(crossing))
-    found.push({
-      ...base,
-      id: `apart:${crossing.id}`,
-      kind: 'too far apart to join',
-      severity: 'look into',
-      title: `${name} lie too far apart to be joined`,
-      detail: `There are ${showLength(crossing.gap, units, 'small')} between them, and no join spans more than ${showLength(MOST_BETWEEN, units, 'small')} (common practice), so nothing is taken from the mark. Bring the bars nearer, or say that there is no join.`,
-      value: crossing.gap,
-      limit: MOST_BETWEEN,
       quantity: 'length',
     });
   const fit = packerFit(subject, crossing);
@@ -74,7 +76,13 @@ function findingsAt(subject: FindingSubject, crossing: Crossing): readonly Findi
   return found;
 }
 
-const isJoinMarked = ({ join }: Crossing): boolean => join !== null && join.kind !== 'none';
+function whereTheyLie({ layout }: FindingSubject, { a, b }: Crossing): string {
+  const side = (id: string) => layout.bars.get(id)?.angle?.side;
+  return side(a) === side(b) ? 'Both lie on one side of the gusset' : 'They lie too near each other';
+}
+
+const isJoinMarked = ({ join }: Crossing): boolean =>
+  join !== null && join.kind !== 'none' && join.kind !== 'hung';
 
 function packerFit(
   subject: FindingSubject,

@@ -1,20 +1,18 @@
-import { dot } from '../geometry/vector.ts';
 import type { Bay, Join, JoinKind } from '../project/model.ts';
-import { type AngleDraft, standingLegOf } from './angleBar.ts';
+import { besideMember, betweenDiagonals, type CrossingBar } from './between.ts';
 import type { Meeting } from './meetings.ts';
 import type { Crossing, Plane } from './model.ts';
 import { PlaceGrid } from './placeGrid.ts';
-import type { SketchBar } from './sketch.ts';
-
-/** A bar as a crossing needs to know it. */
-export interface CrossingBar {
-  readonly sketch: SketchBar;
-  readonly angle: AngleDraft | null;
-}
 
 const BETWEEN_DIAGONALS: readonly JoinKind[] = ['none', 'bolted', 'packed', 'cut', 'welded'];
 /** The most that bolts, a packer, a plate or a weld span between two diagonals, mm (common practice, no source). */
-export const MOST_BETWEEN = 60;
+const MOST_BETWEEN_DIAGONALS = 60;
+/** The most that a cleat to a purlin, a rail or another member spans and still holds, mm (common practice, no source). */
+const MOST_TO_A_MEMBER = 400;
+
+/** The most that a join spans there, mm. */
+export const mostBetween = (kind: Crossing['kind']): number =>
+  kind === 'diagonals' ? MOST_BETWEEN_DIAGONALS : MOST_TO_A_MEMBER;
 
 const TO_A_LINE: readonly JoinKind[] = ['none', 'purlin', 'hung'];
 
@@ -32,7 +30,9 @@ export function crossingOf(
   const key = [meeting.a, meeting.b].sort().join('+');
   const choices = kind === 'diagonals' ? BETWEEN_DIAGONALS : TO_A_LINE;
   const join = joinThatFits(bay.joins[key], choices, meeting);
-  const gap = kind === 'member' ? 0 : gapBetween(extentOf(a, plane), extentOf(b, plane), meeting.separation);
+  const gap = b.angle
+    ? betweenDiagonals(a.angle, b.angle, meeting.separation)
+    : besideMember(a.angle, b.sketch, plane, meeting.separation);
   return {
     id: `${bay.id}/${key}`,
     bay: bay.id,
@@ -46,7 +46,7 @@ export function crossingOf(
     angle: meeting.angle,
     gap,
     clash: gap < 0 && join?.kind !== 'cut',
-    tooFarApart: kind === 'diagonals' && gap > MOST_BETWEEN,
+    tooFarApart: gap > mostBetween(kind),
     join,
     choices,
     point: `${bay.id}/${key}`,
@@ -69,26 +69,4 @@ function joinThatFits(join: Join | undefined, choices: readonly JoinKind[], meet
   if (!join || !choices.includes(join.kind)) return null;
   const cutsNone = join.kind === 'cut' && join.cutBar !== meeting.a && join.cutBar !== meeting.b;
   return cutsNone ? null : join;
-}
-
-/** From…to along the normal, measured from the bar's own line, mm. */
-type Extent = readonly [number, number];
-
-function extentOf(bar: CrossingBar, plane: Plane): Extent {
-  if (bar.angle) {
-    const { spec, side, stock } = bar.angle;
-    const face = spec.gusset / 2;
-    const standing = stock ? standingLegOf(stock, spec.legInPlane) : 0;
-    return side === 'near' ? [face, face + standing] : [-face - standing, -face];
-  }
-  const middle = dot(bar.sketch.offset, plane.normal);
-  const half = (bar.sketch.member?.depth ?? 0) / 2;
-  return [middle - half, middle + half];
-}
-
-/** Clear distance; of extents that overlap, minus the overlap. */
-function gapBetween(a: Extent, b: Extent, separation: number): number {
-  const low = b[0] + separation;
-  const high = b[1] + separation;
-  return Math.max(low - a[1], a[0] - high);
 }

@@ -160,11 +160,11 @@ export interface Crossing {
   readonly onB: number;
   /** Acute angle between the bars, degrees. */
   readonly angle: number;
-  /** Clear distance between the faces that meet, mm: what a packer must fill; below 0 they run into each other. */
+  /** Between the parts that a join takes hold of, mm: what a packer must fill between two diagonals, a cleat to a purlin; below 0 they run into each other. */
   readonly gap: number;
   /** Both on one side, neither cut: they cannot both pass. */
   readonly clash: boolean;
-  /** Diagonals with more between them than can be joined: whatever is marked holds nothing. */
+  /** More between them than a join spans: whatever is marked holds nothing. */
   readonly tooFarApart: boolean;
   /** As marked; null: nothing was marked, taken as not joined. */
   readonly join: Join | null;

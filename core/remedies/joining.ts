@@ -22,7 +22,7 @@ export function joinTheCrossings(assessment: Assessment, bars: readonly BarId[])
 
 export function boltToLines(assessment: Assessment, bars: readonly BarId[]): readonly Proposal[] {
   const open = crossingsOn(assessment, bars).filter(
-    (each) => each.kind === 'line' && (unjoined(each) || each.join?.kind === 'hung'),
+    (each) => each.kind === 'line' && !each.tooFarApart && (unjoined(each) || each.join?.kind === 'hung'),
   );
   return open.length === 0
     ? []
@@ -77,15 +77,17 @@ const noJoin = (id: string): Proposal => ({
 });
 
 export function markLines(assessment: Assessment, bay: string): readonly Proposal[] {
-  const open = [...assessment.layout.crossings.values()]
-    .filter((each) => each.bay === bay && each.kind !== 'diagonals' && each.join === null)
-    .map(({ id }) => id);
+  const unmarked = [...assessment.layout.crossings.values()].filter(
+    (each) => each.bay === bay && each.kind !== 'diagonals' && each.join === null,
+  );
+  const open = unmarked.map(({ id }) => id);
+  const bolting: Proposal = {
+    label: 'Bolt all to the purlins or rails',
+    detail: 'one bolt at each',
+    edits: [{ kind: 'join', crossings: open, join: { kind: 'purlin', boltsAcross: 1 } }],
+  };
   return [
-    {
-      label: 'Bolt all to the purlins or rails',
-      detail: 'one bolt at each',
-      edits: [{ kind: 'join', crossings: open, join: { kind: 'purlin', boltsAcross: 1 } }],
-    },
+    ...(unmarked.some(({ tooFarApart }) => tooFarApart) ? [] : [bolting]),
     {
       label: 'Hang all, against sag only',
       detail: 'holds nothing',

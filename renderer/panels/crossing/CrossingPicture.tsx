@@ -1,5 +1,5 @@
 import { type JSX, useId } from 'react';
-import { dot, type Vec2 } from '../../../core/geometry/vector.ts';
+import { add, dot, subtract, type Vec2 } from '../../../core/geometry/vector.ts';
 import type { Bar, BarId, Crossing, Layout } from '../../../core/layout/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
 import { showLength } from '../../../core/units/quantity.ts';
@@ -17,6 +17,8 @@ const MIDDLE = SIZE / 2;
 const RADIUS = 60;
 /** mm between the faces beyond which a picture of both shows neither. */
 const FAR = 60;
+/** mm from leg to leg below which the gusset says on which side the other one lies. */
+const TOUCH = 0.5;
 
 /** The crossing cut through: both legs at their true distance, the packer and the bolt if there are any. */
 export function CrossingPicture({
@@ -107,8 +109,12 @@ function faceTowards(seen: SeenSection, crossing: Crossing, other: Bar, bar: Bar
   const offs = seen.outline.map((point) => along(point, seen.outOfPlane));
   const ins = seen.outline.map((point) => along(point, seen.inPlane));
   const towards = sideOf(seen, other, bar);
-  const face = towards > 0 ? Math.max(...offs) : Math.min(...offs);
   const thick = bar.angle?.stock?.outline.thickness ?? 6;
+  const [least, most] = [Math.min(...offs), Math.max(...offs)];
+  // Away from the gusset a bolt grips the leg from behind, within the angle.
+  const behind =
+    other.angle !== null && bar.angle?.stock?.outline.shape === undefined && towards !== gussetSide(seen);
+  const face = behind ? (towards > 0 ? least + thick : most - thick) : towards > 0 ? most : least;
   const otherThick = other.angle?.stock?.outline.thickness ?? STRIP;
   const gap = Math.max(0, crossing.gap);
   const p = (Math.max(...ins) + Math.min(...ins)) / 2;
@@ -133,11 +139,19 @@ function faceTowards(seen: SeenSection, crossing: Crossing, other: Bar, bar: Bar
   };
 }
 
+const gussetSide = ({ gussetAt }: SeenSection): 1 | -1 => (gussetAt >= 0 ? 1 : -1);
+
 /** On which side of the read bar the other one lies, along "out of plane". */
 function sideOf(seen: SeenSection, other: Bar, bar: Bar): 1 | -1 {
-  if (other.angle !== null) return seen.gussetAt >= 0 ? 1 : -1;
   const out = bar.angle?.placement.outOfPlane;
-  return out === undefined || dot(other.offset, out) >= 0 ? 1 : -1;
+  if (bar.angle === null || out === undefined) return gussetSide(seen);
+  if (other.angle === null) return dot(other.offset, out) >= 0 ? 1 : -1;
+  // Planes may lie apart: what counts is where the legs themselves are.
+  const apart = dot(
+    subtract(add(other.from, other.angle.placement.heel), add(bar.from, bar.angle.placement.heel)),
+    out,
+  );
+  return Math.abs(apart) < TOUCH ? gussetSide(seen) : apart > 0 ? 1 : -1;
 }
 
 function pictureScale(seen: SeenSection, crossing: Crossing): number {

@@ -70,7 +70,7 @@ export function joinPrisms(layout: Layout, crossing: Crossing, angleScale: Angle
     }
     case 'packed': {
       const thickness = crossing.join.packer ?? crossing.gap;
-      return b.angle && thickness > 0 ? [packer(a, a.angle, b.angle, crossing, thickness)] : [];
+      return b.angle && thickness > 0 ? [packer(a, a.angle, b, b.angle, crossing, thickness)] : [];
     }
     case 'purlin':
     case 'hung':
@@ -106,9 +106,18 @@ function splicePlate(bar: Bar, angle: AngleBar, crossing: Crossing, angleScale: 
 }
 
 /** A square piece that fills the room between the legs of two diagonals. */
-function packer(bar: Bar, a: AngleBar, b: AngleBar, crossing: Crossing, thickness: number): Prism {
+function packer(
+  bar: Bar,
+  a: AngleBar,
+  other: Bar,
+  b: AngleBar,
+  crossing: Crossing,
+  thickness: number,
+): Prism {
   const { inPlane, outOfPlane } = a.placement;
-  const middle = (dot(a.placement.heel, outOfPlane) + dot(b.placement.heel, outOfPlane)) / 2;
+  const fromHere = subtract(along(other.from, other.direction, crossing.onB), crossing.at);
+  const heels = [dot(a.placement.heel, outOfPlane), dot(add(fromHere, b.placement.heel), outOfPlane)] as const;
+  const middle = (heels[0] + heels[1]) / 2;
   return block({
     outline: rectangle(-PACKER / 2, PACKER / 2, -PACKER / 2, PACKER / 2),
     origin: along(crossing.at, outOfPlane, middle),
