@@ -51,7 +51,17 @@ export function assessmentOf(
       : { judged: byMarks, movable: new Map<string, readonly NamedMechanism[]>() };
   const checked = withChecks({ project, practice, forces }, judged, depth);
   const members = depth === 'all levels' ? membersChecked({ project, practice, forces }, layout) : new Map();
-  const findings = findingsOf({ project, practice, layout, diagonals: checked, members, forces, movable });
+  const { holdings } = prepared.bowingInput.context;
+  const findings = findingsOf({
+    project,
+    practice,
+    layout,
+    holdings,
+    diagonals: checked,
+    members,
+    forces,
+    movable,
+  });
   const findingIds = idsByBar(findings);
   const diagonals = new Map(
     [...checked].map(

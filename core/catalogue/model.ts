@@ -14,6 +14,11 @@ export interface StockAngle {
   readonly basis: 'computed' | 'published';
   /** kg/m. */
   readonly massPerMetre: number;
+  /**
+   * Of a section carried as published, what its table prints of the major axis: second moment, mm⁴, and angle from axis x, rad. To read: `properties` has them from the
+   * other printed figures, within the table's rounding, so that the radius in every direction agrees with the printed radii.
+   */
+  readonly printed?: { readonly Iu: number; readonly alpha: number };
 }
 
 /** A stock list with where its figures come from. Rows in the order of the source. */

@@ -101,6 +101,10 @@ function publishedRow(row: Fields, id: CatalogueId, where: string): StockAngle {
     properties,
     basis: 'published',
     massPerMetre: numberOf(row, 'weight', where) * KG_PER_METRE_PER_POUND_FOOT,
+    printed: {
+      Iu: inches('Iw', 4),
+      alpha: Math.sign(properties.alpha) * Math.atan(numberOf(row, 'tanAlpha', where)),
+    },
   };
 }
 

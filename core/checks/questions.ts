@@ -115,6 +115,9 @@ export function compressionQuestion(
     ...question,
     length: bar.length,
     unbraced: { x: x.unbraced, y: y.unbraced, u: u.unbraced, v: v.unbraced },
+    lengthsByHand: [x, y, u, v].flatMap(({ axis, override }) =>
+      override ? [{ axis, reason: override.reason }] : [],
+    ),
     twistLength: longestBetween([
       restraint.stations[0]?.at ?? 0,
       ...inner.filter(({ twistHeld }) => twistHeld).map(({ at }) => at),

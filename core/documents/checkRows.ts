@@ -1,6 +1,6 @@
 import type { Assessment } from '../assessment.ts';
 import type { Check, Demand } from '../checks/model.ts';
-import type { Role } from '../project/model.ts';
+import type { LengthOverride, Role } from '../project/model.ts';
 import type { Resistance, Steel } from '../resistance/model.ts';
 
 /** Checks of one diagonal, strut or beam as the command line writes them: N, mm, N/mm². Documented in README.md. */
@@ -14,6 +14,8 @@ export interface CheckRow {
   readonly tension: Demand | null;
   readonly compression: Demand | null;
   readonly slackIn: readonly string[];
+  /** Lengths and factors set by hand, each with its reason. */
+  readonly overrides: readonly LengthOverride[];
   readonly status: string;
   readonly governing: CheckLine | null;
   readonly checks: readonly CheckLine[];
@@ -47,6 +49,7 @@ function diagonalRows({ layout, diagonals }: Assessment): readonly CheckRow[] {
         tension: checks.tension,
         compression: checks.compression,
         slackIn: checks.slackIn,
+        overrides: bar.angle.mark.overrides ?? [],
         status: checks.status,
         governing: checks.governing && lineOf(checks.governing),
         checks: checks.checks.map(lineOf),
@@ -72,6 +75,7 @@ function memberRows({ layout, members }: Assessment): readonly CheckRow[] {
         tension: each.tension,
         compression: each.compression,
         slackIn: [],
+        overrides: [],
         status: each.status,
         governing: line,
         checks: line ? [line] : [],

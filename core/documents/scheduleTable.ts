@@ -1,3 +1,4 @@
+import type { Finding } from '../findings/model.ts';
 import type { UnitSystem } from '../project/model.ts';
 import { endsMarkedFree } from '../restraint/endWords.ts';
 import { AXES } from '../section/model.ts';
@@ -18,9 +19,15 @@ const BY_HAND = '*';
 /**
  * The schedule as a table for the terminal: metres to the centimetre and kg, or feet and inches to the sixteenth and lb.
  * The verdict that the practice asks for stands without brackets, the other within them.
- * What is set by hand follows below with its reason, then the findings, one a line.
+ * What is set by hand follows below with its reason, then the findings, one a line, those of no bar last.
+ *
+ * @param findings of the whole project: those that name no diagonal are told too
  */
-export function scheduleTable(rows: readonly ScheduleRow[], units: UnitSystem): string {
+export function scheduleTable(
+  rows: readonly ScheduleRow[],
+  units: UnitSystem,
+  findings: readonly Finding[] = [],
+): string {
   if (rows.length === 0) return 'No diagonals.\n';
   const loaded = rows.some((row) => row.force !== null);
   const table = textTable(
@@ -30,7 +37,9 @@ export function scheduleTable(rows: readonly ScheduleRow[], units: UnitSystem): 
   const massTotal = rows.reduce((sum, row) => sum + (row.massTotal ?? 0), 0);
   const pieces = rows.reduce((sum, row) => sum + row.numberOff * Math.max(1, row.pieces.length), 0);
   const total = `${pieces} pieces, ${mass(massTotal, units)} ${units === 'us' ? 'lb' : 'kg'} in all`;
-  const below = [handLines(rows, units), findingLines(rows)].filter((lines) => lines.length > 0);
+  const below = [handLines(rows, units), [...findingLines(rows), ...barlessLines(rows, findings)]].filter(
+    (lines) => lines.length > 0,
+  );
   return [table, total, ...below.flatMap((lines) => ['', ...lines])].join('\n').concat('\n');
 }
 
@@ -127,6 +136,14 @@ function findingLines(rows: readonly ScheduleRow[]): readonly string[] {
     for (const { id, severity, title } of row.findings)
       lines.set(id, oneLine(`${severity}: ${row.bay}: ${title}`));
   return [...lines.values()];
+}
+
+/** "must fix: W1: …" of each finding that no row of the schedule tells, as one of a load or of a whole bay. */
+export function barlessLines(rows: readonly ScheduleRow[], findings: readonly Finding[]): readonly string[] {
+  const told = new Set(rows.flatMap((row) => row.findings.map(({ id }) => id)));
+  return findings
+    .filter(({ id }) => !told.has(id))
+    .map(({ severity, bay, title }) => oneLine(`${severity}: ${bay === '' ? '' : `${bay}: `}${title}`));
 }
 
 function length(mm: number, units: UnitSystem): string {

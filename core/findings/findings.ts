@@ -5,6 +5,7 @@ import { checkedFindings } from './checked.ts';
 import { crossingFindings } from './crossings.ts';
 import { detailFindings } from './details.ts';
 import { holderFindings } from './holders.ts';
+import { looseEndFindings } from './looseEnds.ts';
 import { markFindings } from './marks.ts';
 import { memberFindings } from './members.ts';
 import type { Finding, Severity } from './model.ts';
@@ -27,6 +28,7 @@ export function findingsOf(input: FindingInput): readonly Finding[] {
     ...markFindings(subject),
     ...nameFindings(subject),
     ...turningFindings(subject),
+    ...looseEndFindings(subject),
     ...slendernessFindings(subject),
     ...crossingFindings(subject),
     ...sharingFindings(subject),

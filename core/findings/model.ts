@@ -19,6 +19,7 @@ export type FindingKind =
   | 'packer differs'
   | 'bay can move'
   | 'bar can move'
+  | 'end held by nothing'
   | 'hold weaker than claimed'
   | 'rule unsafe here'
   | 'twist governs'

@@ -4,6 +4,7 @@ import type { Forces } from '../forces/model.ts';
 import type { AngleBar, Bar, BarId, BayLayout, Layout } from '../layout/model.ts';
 import type { LimitInForce, Practice, Verdict } from '../practice/model.ts';
 import type { Project } from '../project/model.ts';
+import type { Holdings } from '../restraint/heldNodes.ts';
 import type { Restraint } from '../restraint/model.ts';
 import type { FreeWays } from '../restraint/movable.ts';
 
@@ -33,6 +34,8 @@ export interface FindingInput {
   readonly project: Project;
   readonly practice: Practice;
   readonly layout: Layout;
+  /** Which nodes the bracing holds in place. */
+  readonly holdings: Holdings;
   readonly diagonals: ReadonlyMap<BarId, Judged>;
   /** Struts and beams. */
   readonly members: ReadonlyMap<BarId, MemberChecks>;

@@ -18,6 +18,7 @@ import {
 } from './joining.ts';
 import { clearTheMarks } from './marks.ts';
 import { takeIdleEntriesAway } from './names.ts';
+import { vouchForTheNodes } from './nodes.ts';
 import { changePattern, countOnBoth, crossOpenPanels, kneesOnBothSides } from './patterns.ts';
 import type { Proposal } from './proposal.ts';
 import { handlingSections, heavier, nearestSections, otherSections, turnTheLeg } from './sections.ts';
@@ -90,6 +91,8 @@ export function proposalsFor(
         ...joinTheCrossings(assessment, finding.bars),
         ...boltToLines(assessment, finding.bars),
       ];
+    case 'end held by nothing':
+      return vouchForTheNodes(assessment, finding);
     case 'bay can move':
       return crossOpenPanels(assessment, finding);
     case 'hold weaker than claimed':

@@ -23,6 +23,17 @@ export function endings(bay: BayLayout, layout: Layout): readonly (readonly [Bar
   });
 }
 
+/** Nodes of a bay that lie on one of its bars between that bar's ends. */
+export function nodesOnBars(bay: BayLayout, layout: Layout): ReadonlySet<string> {
+  const nodesBeside = nodesInOrder(bay, layout);
+  const on = new Set<string>();
+  for (const id of bay.bars) {
+    const bar = layout.bars.get(id);
+    if (bar) for (const node of nodesBeside(bar)) if (nodeLiesOn(layout, node, bar)) on.add(node);
+  }
+  return on;
+}
+
 /** Nodes of a bay sorted along its plane, so that in a long row of bars each looks at the nodes beside it alone. */
 function nodesInOrder(bay: BayLayout, layout: Layout): (bar: Bar) => readonly string[] {
   const right = bay.planes[0]?.right ?? [1, 0, 0];

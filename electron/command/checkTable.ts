@@ -1,4 +1,6 @@
 import type { CheckLine, CheckRow } from '../../core/documents/checkRows.ts';
+import { oneLine } from '../../core/documents/oneLine.ts';
+import { overrideWords } from '../../core/documents/overrideWords.ts';
 import { textTable } from '../../core/documents/textTable.ts';
 import type { UnitSystem } from '../../core/project/model.ts';
 import { showForce, showUse } from '../../core/units/loads.ts';
@@ -22,7 +24,10 @@ export function checkTable(rows: readonly CheckRow[], units: UnitSystem): string
   const unknown = rows
     .filter((row) => row.unknown !== null)
     .map((row) => `${nameOf(row)}: ${row.unknown ?? ''}`);
-  return `${[table, ...unknown, SOURCES].join('\n')}\n`;
+  const byHand = rows.flatMap((row) =>
+    row.overrides.map((override) => `* ${nameOf(row)}, set by hand: ${overrideWords(override, units)}`),
+  );
+  return `${[table, ...[...unknown, ...byHand].map(oneLine), SOURCES].join('\n')}\n`;
 }
 
 const SOURCES =
@@ -37,7 +42,7 @@ function lineOf(row: CheckRow, check: CheckLine, units: UnitSystem): readonly st
   return [
     nameOf(row),
     row.section,
-    check.end === null ? check.title : `${check.title}, end ${check.end}`,
+    `${check.title}${check.end === null ? '' : `, end ${check.end}`}${isByHand(row, check) ? ' *' : ''}`,
     `${check.standard} ${check.clause}${check.confidence === 'from memory, verify' ? ' (verify)' : ''}`,
     check.demand === null ? '–' : showForce(check.demand.force, units),
     check.resistance === null ? '–' : showForce(check.resistance, units),
@@ -47,3 +52,7 @@ function lineOf(row: CheckRow, check: CheckLine, units: UnitSystem): readonly st
     ),
   ];
 }
+
+/** A length set by hand goes into what is worked out over lengths. */
+const isByHand = ({ overrides }: CheckRow, { kind }: CheckLine): boolean =>
+  overrides.length > 0 && kind === 'compression, lengths by the practice';

@@ -2,7 +2,7 @@ import { type Command, Option } from 'commander';
 import { assess } from '../../core/assess.ts';
 import { csvFile } from '../../core/documents/csv.ts';
 import { scheduleCsv } from '../../core/documents/scheduleCsv.ts';
-import { scheduleTable } from '../../core/documents/scheduleTable.ts';
+import { barlessLines, scheduleTable } from '../../core/documents/scheduleTable.ts';
 import type { UnitSystem } from '../../core/project/model.ts';
 import { builtInCatalogues } from './catalogues.ts';
 import type { Ending } from './ending.ts';
@@ -43,7 +43,7 @@ export function addScheduleCommand(program: Command, ending: Ending): void {
       const assessment = assess(project.value, builtInCatalogues());
       const units = options.units ?? project.value.settings.units;
       const text = {
-        table: () => scheduleTable(assessment.schedule, units),
+        table: () => scheduleTable(assessment.schedule, units, assessment.findings),
         csv: () => {
           const csv = scheduleCsv(assessment.schedule, units);
           // What goes on to another program begins with its first head.
@@ -53,6 +53,10 @@ export function addScheduleCommand(program: Command, ending: Ending): void {
       }[options.format]();
       const delivered = await deliver(text, options.out, terminal, 'replace');
       if (!delivered.ok) return ending.trouble(delivered.trouble);
+      // Rows have no place for what names no diagonal; it must not be lost where it may break the run.
+      if (options.format !== 'table')
+        for (const line of barlessLines(assessment.schedule, assessment.findings))
+          terminal.err(`${file}: ${line}\n`);
       ending.with(exitCodeFor(assessment, file, terminal));
     });
 }

@@ -46,8 +46,8 @@ export function addSectionCommand(program: Command, ending: Ending): void {
 /** mm, mm², mm⁴, mm⁶, rad, kg/m. */
 function sectionJson(angle: StockAngle) {
   const { designation, catalogue, kind, basis, massPerMetre, outline, properties } = angle;
-  const { area, Ixx, Iyy, Ixy, Iu, Iv, alpha, rx, ry, ru, rv, centroidX, centroidY, shearCentre, J, Iw } =
-    properties;
+  const { area, Ixx, Iyy, Ixy, Iv, rx, ry, ru, rv, centroidX, centroidY, shearCentre, J, Iw } = properties;
+  const { Iu, alpha } = angle.printed ?? properties;
   return {
     designation,
     catalogue,
@@ -81,8 +81,9 @@ function sectionTable({
   massPerMetre,
   outline,
   properties,
+  printed = properties,
 }: StockAngle): string {
-  const p = properties;
+  const p = { ...properties, Iu: printed.Iu, alpha: printed.alpha };
   const { name, standard } = builtInCatalogues()[catalogue === 'own' ? 'en' : catalogue];
   const degrees = (p.alpha * 180) / Math.PI;
   const size = (mm: number): string => String(Number(mm.toFixed(2)));

@@ -6,6 +6,7 @@ import { AS } from './as.ts';
 import { elasticStress } from './elasticStress.ts';
 import { EN } from './en.ts';
 import { IS } from './is.ts';
+import { lengthsByHand } from './lengthsByHand.ts';
 import type { ColumnRule, CompressionPack } from './pack.ts';
 import { CSA, SANS } from './sansAndCsa.ts';
 import { plateRemark, requireStoutWall, withStoutPlates } from './walls.ts';
@@ -87,7 +88,7 @@ function byLengths(question: CompressionQuestion, column: ColumnRule): Resistanc
       standard: column.standard,
       clause: rule.clause,
       confidence: beyondStandards || hasRemark(question, column) ? 'from memory, verify' : rule.confidence,
-      note: noteOf(question, column, beyondStandards ? ALONG_LEG : null),
+      note: noteOf(question, column, [beyondStandards ? ALONG_LEG : null, lengthsByHand(question)]),
     },
     working,
   );
@@ -120,13 +121,13 @@ const hasRemark = (question: CompressionQuestion, column: ColumnRule): boolean =
 function noteOf(
   question: CompressionQuestion,
   column: ColumnRule,
-  ofLengths: string | null = null,
+  ofLengths: readonly (string | null)[] = [],
 ): string | null {
   const { section, loadedAcross } = question;
   const notes = [
     isEccentric(question) ? ECCENTRICITY_LEFT_OUT : null,
     loadedAcross ? 'A load acts across the bar: a check with bending is still due.' : null,
-    ofLengths,
+    ...ofLengths,
     column.remark(question),
     plateRemark(question, column.walls),
     shapeNote(section),

@@ -1,9 +1,11 @@
 /** EN 1993-1-1 6.3.1 and BB.1.2, EN 1993-1-5 4.4. Practice-facts D3. */
+
 import type { CompressionQuestion, ResistingSection, SectionShape } from '../model.ts';
 import { partialFactors } from '../tension/en.ts';
 import { resistance, Working } from '../working.ts';
 import { perry } from './curves.ts';
 import { legsOf, longAndShort } from './legs.ts';
+import { lengthsByHand } from './lengthsByHand.ts';
 import { CROSSED, ONE_LEG, requireFirmEnds, requireNothingAcross, requireSameLeg } from './oneLegTerms.ts';
 import type { CompressionPack } from './pack.ts';
 
@@ -190,7 +192,12 @@ export const EN: CompressionPack = {
       'ratio',
     );
     const slender = class4Remark(question);
-    const notes = [TAKEN_FOR_GRANTED, joinedBetween ? WHOLE_ALONG_LEGS : null, slender];
+    const notes = [
+      TAKEN_FOR_GRANTED,
+      joinedBetween ? WHOLE_ALONG_LEGS : null,
+      slender,
+      lengthsByHand(question),
+    ];
     return resistance(
       {
         ...ONE_LEG,

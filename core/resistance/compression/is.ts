@@ -1,9 +1,11 @@
 /** IS 800:2007 7.1.2 and 7.5.1. Practice-facts D5. */
+
 import type { CompressionQuestion, ResistingEnd, ResistingSection } from '../model.ts';
 import { GAMMA_M0 } from '../tension/is.ts';
 import { resistance, Working } from '../working.ts';
 import { perry } from './curves.ts';
 import { legsOf } from './legs.ts';
+import { lengthsByHand } from './lengthsByHand.ts';
 import { CROSSED, isFirm, ONE_LEG, requireNothingAcross, requireSameLeg } from './oneLegTerms.ts';
 import type { CompressionPack } from './pack.ts';
 
@@ -162,6 +164,7 @@ export const IS: CompressionPack = {
     const lambda = equivalent(question, vv, phi, working);
     const slender = slenderRemark(question);
     const notes = [
+      lengthsByHand(question),
       'Between a fixed and a hinged gusset the standard interpolates.',
       question.joinedBetween ? `${CROSSED}; so the length is that between holds, without relief.` : null,
       slender,

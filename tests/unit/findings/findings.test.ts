@@ -648,3 +648,76 @@ describe('all findings', () => {
     expect(breaksLimit).toBe(false);
   });
 });
+
+describe('a drawn diagonal that ends where nothing holds', () => {
+  const NODES = { a: [0, 0, 0], b: [3000, 0, 0], d: [3000, 0, 3000], e: [5000, 0, 4000] } as const;
+  const drawn = (bars: readonly (readonly [string, string, string])[], loose: readonly string[]) =>
+    bay(free({ ...NODES }, bars, { free: loose }));
+
+  it('is found, breaks the run, and names the place', () => {
+    expect(one(drawn([['b1', 'a', 'd']], ['d']), 'end held by nothing')).toMatchObject({
+      severity: 'must fix',
+      breaksLimit: true,
+      bars: ['B/b1'],
+      title: 'D1 ends where nothing holds: node d',
+    });
+  });
+
+  it('is found of two that lie in one line, and of a chain that leads nowhere', () => {
+    expect(
+      found(
+        bay(
+          free(
+            { a: [0, 0, 0], m: [1500, 0, 1500], d: [3000, 0, 3000] },
+            [
+              ['b1', 'a', 'm'],
+              ['b2', 'd', 'm'],
+            ],
+            { free: ['m'] },
+          ),
+        ),
+        'end held by nothing',
+      ),
+    ).toHaveLength(1);
+    expect(
+      one(
+        drawn(
+          [
+            ['b1', 'a', 'd'],
+            ['b2', 'd', 'e'],
+          ],
+          ['d', 'e'],
+        ),
+        'end held by nothing',
+      ).bars,
+    ).toEqual(['B/b1', 'B/b2']);
+  });
+
+  it('is not found where two bars from held places meet, at a support, on another bar, or in a bay with a frame of its own', () => {
+    expect(
+      found(
+        drawn(
+          [
+            ['b1', 'a', 'd'],
+            ['b2', 'b', 'd'],
+          ],
+          ['d'],
+        ),
+        'end held by nothing',
+      ),
+    ).toEqual([]);
+    expect(found(drawn([['b1', 'a', 'd']], []), 'end held by nothing')).toEqual([]);
+    const onBeam = bay(
+      free(
+        { a: [0, 0, 0], c: [0, 0, 3000], d: [3000, 0, 3000], m: [1500, 0, 3000] },
+        [
+          ['beam', 'c', 'd'],
+          ['b1', 'a', 'm'],
+        ],
+        { free: ['m'] },
+      ),
+    );
+    expect(found(onBeam, 'end held by nothing')).toEqual([]);
+    expect(found(crossed(), 'end held by nothing')).toEqual([]);
+  });
+});
