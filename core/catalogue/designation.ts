@@ -18,7 +18,7 @@ export function designationKey(text: string): string {
 }
 
 /**
- * Sizes from a designation as people type it: "70x70x6", "L70×70×6", "RSA 70 X 70 X 6", "EQ 70x70x6", "70x6" (equal legs), "70 70 6", "70,70,6",
+ * Sizes from a designation as people type it: "70x70x6", "L70×70×6", "RSA 70 X 70 X 6", "EQ 70x70x6", "70x6" (equal legs), "70 70 6", "70,70,6", "L70-70-6", "70/70/6",
  * "90*90*8EA", "L3x3x1/4", "3 x 3 x 0.25", "6 x 3 1/2 x 5/16", "L3½x3x¼", "L31/2X3X1/4". Legs in either order. Null when it does not read as an
  * angle.
  */
@@ -55,7 +55,7 @@ function numbersIn(text: string): readonly number[] | null {
     .replace(/[−–—]/g, '-')
     .replace(/MM|IN\b|["″”]/g, ' ')
     .trim()
-    .replace(/^(?:RSA|EQ(?:UAL)?|UNEQ(?:UAL)?|EA|UA|LL?|∟|∠)[\s:]*/, '')
+    .replace(/^(?:RSA|ISA|ANGLE|EQ(?:UAL)?|UNEQ(?:UAL)?|EA|UA|LL?|∟|∠)[\s:]*/, '')
     .replace(/\s*(?:EA|UA|L)$/, '')
     .trim();
   const sizes = partsOf(body).map(sizeOf);
@@ -63,11 +63,14 @@ function numbersIn(text: string): readonly number[] | null {
   return numbers.length === sizes.length ? numbers : null;
 }
 
-/** Between multiplication signs; of three sizes without any, between spaces, commas or semicolons. */
+/** Between multiplication signs; of three sizes without any, between spaces, commas or semicolons, and of three metric ones between dashes or strokes. */
 function partsOf(body: string): readonly string[] {
   if (!body.includes('X')) {
     const listed = body.split(/\s*[,;]\s*|\s+/);
     if (listed.length === 3) return listed;
+    const dashed = /^(\d{2,3})([-/])(\d{2,3})\2(\d+(?:\.\d+)?)$/.exec(body);
+    if (dashed && Number(dashed[1]) > LARGEST_IN_INCHES)
+      return [dashed[1] ?? '', dashed[3] ?? '', dashed[4] ?? ''];
   }
   return body.split(/\s*X\s*/);
 }

@@ -51,7 +51,9 @@ export function readProjectData(data: unknown): ProjectRead {
   if (typeof version !== 'number' || !Number.isInteger(version) || version < 1)
     return refuse(
       'version',
-      `The version ${shown(version)} is not a whole number from 1.`,
+      version === undefined
+        ? 'The file does not say its version.'
+        : `The version ${shown(version)} is not a whole number from 1.`,
       'Open a backup of the file.',
     );
   if (version > PROJECT_VERSION)

@@ -77,10 +77,17 @@ export function crossedPair(input: CrossedPairInput, section: string | null): At
       ok: false,
       trouble: {
         kind: 'bad value',
-        what: problem?.what ?? 'The bay cannot be made.',
+        what: `${optionFor(problem?.path ?? '')}: ${problem?.what ?? 'The bay cannot be made.'}`,
         todo: problem?.todo ?? '',
       },
     };
   }
   return { ok: true, value: { project: read.project, bar: 'W1/t1.rise' } };
+}
+
+/** The option that a place of the made project comes from. Its width and height are 0.8 and 0.6 of the length. */
+function optionFor(path: string): string {
+  if (path.includes('recipe')) return '--length, of which the made bay takes 0.8 across and 0.6 up';
+  if (path.includes('boltDiameter')) return '--bolt';
+  return path.includes('ownLimit') ? '--limit' : 'The bay made from these options';
 }

@@ -11,7 +11,15 @@ import { writeProject } from '../../core/project/writeProject.ts';
 import { builtInCatalogues, CATALOGUE_IDS } from './catalogues.ts';
 import type { Ending } from './ending.ts';
 import { deliver } from './output.ts';
-import { angleValue, countValue, each, lengthValue, type TierValue, tierValue } from './values.ts';
+import {
+  angleValue,
+  countValue,
+  each,
+  lengthValue,
+  pitchValue,
+  type TierValue,
+  tierValue,
+} from './values.ts';
 
 /** Options that every kind of bay takes. */
 interface CommonOptions {
@@ -77,7 +85,7 @@ function addRoofBay(making: Command, ending: Ending): void {
     making.command('roof-bay').description('two rafters, panels up the slope, purlins across'),
   )
     .option('--width <length>', 'between the rafters', lengthValue, 6000)
-    .option('--pitch <degrees>', 'of the slope', angleValue, 8)
+    .option('--pitch <degrees>', 'of the slope', pitchValue, 8)
     .option(
       '--panel <length:pattern>',
       `a panel, from the eaves up; give it again for the next (${PATTERN_WORDS})`,

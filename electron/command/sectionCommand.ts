@@ -88,16 +88,20 @@ function sectionTable({
   const degrees = (p.alpha * 180) / Math.PI;
   const size = (mm: number): string => String(Number(mm.toFixed(2)));
   const head = [
-    `${designation}, ${name} (${standard})`,
-    `legs ${size(outline.longLeg)} and ${size(outline.shortLeg)}, thickness ${size(outline.thickness)}, root radius ${size(outline.rootRadius)}, toe radius ${size(outline.toeRadius)} mm`,
+    outline.shape
+      ? `${designation}, ${outline.shape.kind}, of no list`
+      : `${designation}, ${name} (${standard})`,
+    outline.shape
+      ? `${size(outline.longLeg)} in the plane of the bay (y), ${size(outline.shortLeg)} out of it (x), mm`
+      : `legs ${size(outline.longLeg)} and ${size(outline.shortLeg)}, thickness ${size(outline.thickness)}, root radius ${size(outline.rootRadius)}, toe radius ${size(outline.toeRadius)} mm`,
     `area ${grouped(p.area, 1)} mm², ${size(massPerMetre)} kg/m, properties ${basis === 'computed' ? 'from the outline' : 'as published'}`,
-    `centroid ${grouped(p.centroidX, 1)} mm from the heel along the shorter leg, ${grouped(p.centroidY, 1)} mm along the longer`,
+    `centroid ${grouped(p.centroidX, 1)} mm from the ${outline.shape ? 'face along x' : 'heel along the shorter leg'}, ${grouped(p.centroidY, 1)} mm along ${outline.shape ? 'y' : 'the longer'}`,
     `u lies ${grouped(degrees, 1)}° from x; Ixy ${grouped(p.Ixy, 0)} mm⁴; J ${grouped(p.J, 0)} mm⁴`,
   ].join('\n');
   const rows = (
     [
-      ['x', p.Ixx, p.rx, 'along the longer leg'],
-      ['y', p.Iyy, p.ry, 'along the shorter leg'],
+      ['x', p.Ixx, p.rx, outline.shape ? 'along y' : 'along the longer leg'],
+      ['y', p.Iyy, p.ry, outline.shape ? 'along x' : 'along the shorter leg'],
       ['u', p.Iu, p.ru, 'along v'],
       ['v', p.Iv, p.rv, 'along u'],
     ] as const

@@ -42,6 +42,14 @@ export function angleValue(typed: string): number {
   return value;
 }
 
+/** Degrees of a slope, from level up to 75. */
+export function pitchValue(typed: string): number {
+  const value = Number(typed);
+  if (!(typed.trim() !== '' && value >= 0 && value <= 75))
+    throw new InvalidArgumentError('An angle in degrees from 0 to 75 is wanted, such as 8.');
+  return value;
+}
+
 export function countValue(typed: string): number {
   const value = Number(typed);
   if (!(Number.isInteger(value) && value > 0))

@@ -97,6 +97,48 @@ describe('a section that is in no stock list', () => {
   });
 });
 
+describe('findings that name no bar', () => {
+  /** A mark of a crossing that is not there: a note of the whole bay. */
+  const idle = () =>
+    projectFile(BOLTED, (text) =>
+      text.replace('"joins": {', '"joins": {"t9.fall+t9.rise": {"kind": "bolted"},'),
+    );
+
+  it('stand below the schedule, and on the error stream where its rows have no place for them', async () => {
+    const says = 'note: W1: An entry of W1 names what is not there';
+    expect((await run('schedule', await idle())).out).toContain(says);
+    for (const format of ['json', 'csv']) {
+      const { out, err } = await run('schedule', await idle(), '--format', format);
+      expect(err).toContain(says);
+      expect(out).not.toContain(says);
+    }
+  });
+});
+
+describe('a length set by hand', () => {
+  it('shows its reason in the checks, in the note of what is worked out with it', async () => {
+    const reason = 'the sheeting holds it, drawing 7';
+    const file = await projectFile(BOLTED, (text) =>
+      text
+        .replace('"countedOn": "tension"', '"countedOn": "both"')
+        .replace(
+          '"bars": {}',
+          `"bars": {"t1.rise": {"overrides": [{"axis": "v", "length": 1200, "factor": 0.85, "reason": "${reason}"}]}}`,
+        ),
+    );
+    const table = (await run('check', file)).out;
+    expect(table).toContain(`D1, set by hand: v: 1.20 m × 0.85, because ${reason}`);
+    expect(table).toMatch(/Compression over the unbraced lengths[^\n]* \*/);
+    const { bars } = JSON.parse((await run('check', file, '-f', 'json')).out);
+    expect(bars[0].overrides).toEqual([{ axis: 'v', length: 1200, factor: 0.85, reason }]);
+    const byLengths = bars[0].checks.find(
+      ({ kind }: { kind: string }) => kind === 'compression, lengths by the practice',
+    );
+    expect(byLengths.note).toContain(`the length about v is set by hand, because ${reason}`);
+    expect(bars[1].overrides).toEqual([]);
+  });
+});
+
 describe('schedule', () => {
   it('has every documented key, lengths in mm with nothing rounded', async () => {
     const { out } = await run('schedule', await projectFile(BOLTED), '--format', 'json');
