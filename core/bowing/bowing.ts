@@ -1,9 +1,10 @@
 import type { Crossing } from '../layout/model.ts';
 import { criticalLoad } from '../stability/criticalLoad.ts';
-import { type PairProblem, pairCriticalLoad } from '../stability/pair.ts';
+import { type PairBar, type PairProblem, pairCriticalLoad } from '../stability/pair.ts';
 import {
   type BowingBar,
   bareBar,
+  gripOf,
   pairBar,
   realProblem,
   rigidHolds,
@@ -31,24 +32,44 @@ export function bowingOf(bar: BowingBar, partner: Partner | null, steel: Steel):
   const bare = bareBar(bar, steel);
   const rigidProblem = { ...bare, holds: rigidHolds(bar) };
   const rigidLoad = loadOf(rigidProblem);
-  const springProblem = realProblem(bar, steel);
-  const springLoad = loadOf(springProblem);
-  const twist = twistEffect(bar, steel, springProblem, springLoad);
-  const pair = partner ? pairProblem(bar, partner, steel) : null;
-  const bowing = pair ? (pairCriticalLoad(pair).N ?? springLoad) : springLoad;
-  const twisting = twist.governs ? twist.ratio : 1;
+  const { N, twist } = (partner && pairLoad(bar, partner, steel)) ?? singleLoad(bar, steel);
   const { slenderness } = bar.restraint.governing;
   const byRule = (Math.PI ** 2 * steel.E * bar.section.area) / ruleSlenderness(bar) ** 2;
   return {
     bar: bar.bar.id,
     stations: offeredStations(bar, steel, rigidLoad),
     rigid: criticalOf(rigidLoad, bar.section, steel.E),
-    real: criticalOf(bowing * twisting, bar.section, steel.E),
+    real: criticalOf(N, bar.section, steel.E),
     ruleError: slenderness > 0 ? (byRule / rigidLoad - 1) * 100 : 0,
     twist,
-    partner: partner ? stateOf(bar, partner, steel, twisting) : null,
+    partner: partner ? stateOf(bar, partner, steel) : null,
     unsupported: null,
   };
+}
+
+/** A critical load with what twist takes of it, where it takes enough to count. */
+export interface RealLoad {
+  readonly N: number;
+  readonly twist: TwistEffect;
+}
+
+/** The bar on springs as soft as its holds are. */
+export function singleLoad(bar: BowingBar, steel: Steel): RealLoad {
+  const problem = realProblem(bar, steel);
+  const bowing = loadOf(problem);
+  return realLoad(bowing, criticalLoad(withTwist(problem, bar, steel), { second: false }).N);
+}
+
+/** The bar and its partner together, each with its own bowing, twist and force; null when nothing presses either of them. */
+export function pairLoad(bar: BowingBar, partner: Partner, steel: Steel): RealLoad | null {
+  const bowing = pairCriticalLoad(pairProblem(bar, partner, steel)).N;
+  return bowing === null ? null : realLoad(bowing, pairCriticalLoad(twistingPair(bar, partner, steel)).N);
+}
+
+function realLoad(bowing: number, twisting: number | null): RealLoad {
+  const ratio = bowing > 0 ? (twisting ?? bowing) / bowing : 1;
+  const governs = ratio < 1 - TWIST_COUNTS;
+  return { N: governs ? bowing * ratio : bowing, twist: { ratio, governs } };
 }
 
 /** The rule itself, whatever the user sets by hand. */
@@ -57,18 +78,7 @@ function ruleSlenderness({ restraint }: BowingBar): number {
   return Math.max(spans, restraint.bound?.slenderness ?? 0);
 }
 
-function twistEffect(
-  bar: BowingBar,
-  steel: Steel,
-  problem: ReturnType<typeof bareBar>,
-  without: number,
-): TwistEffect {
-  const { N } = criticalLoad(withTwist(problem, bar, steel), { second: false });
-  const ratio = (N ?? without) / without;
-  return { ratio, governs: ratio < 1 - TWIST_COUNTS };
-}
-
-/** The pair as the bar in question sees it. */
+/** The pair as the bar in question sees it, bowing alone. */
 export function pairProblem(bar: BowingBar, partner: Partner, steel: Steel): PairProblem {
   const normal = bar.angle.placement.outOfPlane;
   return {
@@ -77,18 +87,26 @@ export function pairProblem(bar: BowingBar, partner: Partner, steel: Steel): Pai
   };
 }
 
-/** @param twisting what twist leaves of a load, as in the real figure */
-function stateOf(bar: BowingBar, partner: Partner, steel: Steel, twisting: number): PartnerState {
+/** And with twist: each bar is gripped at its bolts, by its partner and by whatever else holds it. */
+export function twistingPair(bar: BowingBar, partner: Partner, steel: Steel): PairProblem {
+  const pair = pairProblem(bar, partner, steel);
+  const twisting = (one: PairBar, of: BowingBar): PairBar => ({
+    ...one,
+    problem: withTwist(one.problem, of, steel),
+    grip: gripOf(of),
+  });
+  return { bar: twisting(pair.bar, bar), partner: twisting(pair.partner, partner.bar) };
+}
+
+function stateOf(bar: BowingBar, partner: Partner, steel: Steel): PartnerState {
   const { bar: other, crossing, tensionShare } = partner;
   const cutBar = crossing.join?.kind === 'cut' ? crossing.join.cutBar : null;
-  const slack =
-    tensionShare > 0 ? pairCriticalLoad(pairProblem(bar, { ...partner, tensionShare: 0 }, steel)).N : null;
   return {
     bar: other.bar.id,
     crossing: crossing.id,
     tensionShare,
     shareFrom: partner.shareFrom,
     cut: cutBar === null ? 'neither' : cutBar === bar.bar.key ? 'this bar' : 'partner',
-    slackLoad: slack === null ? null : slack * twisting,
+    slackLoad: tensionShare > 0 ? (pairLoad(bar, { ...partner, tensionShare: 0 }, steel)?.N ?? null) : null,
   };
 }

@@ -1,7 +1,6 @@
 import { radiusFor } from '../section/direction.ts';
-import { pairCriticalLoad } from '../stability/pair.ts';
 import { type BowingBar, bareBar, lengthOf, planeWays, type Steel } from './barProblems.ts';
-import { type Partner, pairProblem } from './bowing.ts';
+import { type Partner, pairLoad } from './bowing.ts';
 import { loadOf } from './critical.ts';
 
 export interface CurvePoint {
@@ -19,8 +18,7 @@ export function loadAgainstPartner(
 ): readonly CurvePoint[] {
   return Array.from({ length: steps + 1 }, (_, k) => {
     const at = -1 + (2 * k) / steps;
-    const { N } = pairCriticalLoad(pairProblem(bar, { ...partner, tensionShare: at }, steel));
-    return { at, N: N ?? 0 };
+    return { at, N: pairLoad(bar, { ...partner, tensionShare: at }, steel)?.N ?? 0 };
   });
 }
 

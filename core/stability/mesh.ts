@@ -121,7 +121,7 @@ function endNode(problem: BarProblem, fields: 2 | 3, at: number, end: 'i' | 'j')
 function endDisplacements(problem: BarProblem, fields: 2 | 3, end: 'i' | 'j'): readonly Way[] {
   const stays = problem.endsStay?.[end];
   if (!stays) return NONE;
-  const held = stays.map((direction) => rowOf(problem, fields, { at: 0, direction, stiffness: 'rigid' }));
+  const held = stays.map((direction) => rowOf(problem, fields, { direction }));
   return freeWays(fields === 3 ? [...held, [0, 0, 1]] : held, [], fields);
 }
 
@@ -152,7 +152,11 @@ function nearestOf(stops: readonly number[], at: number): number {
 }
 
 /** What the movement in the hold's direction, at the point where it grips, is in terms of the fields. */
-function rowOf({ section }: BarProblem, fields: 2 | 3, { direction, grip }: Hold): Way {
+export function rowOf(
+  { section }: Pick<BarProblem, 'section'>,
+  fields: 2 | 3,
+  { direction, grip }: Pick<Hold, 'direction' | 'grip'>,
+): Way {
   const { weak, strong } = principalMotions(section.alpha);
   const [dx, dy] = direction;
   const a = dx * weak[0] + dy * weak[1];

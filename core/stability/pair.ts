@@ -1,14 +1,15 @@
 /**
- * Two bars that cross and are joined there: each with its own holds and force, sharing the displacement out of the plane at the crossing. The forces grow together:
+ * Two bars that cross and are joined there: each with its own holds and force, sharing the displacement out of the plane at the crossing, with twist that of the points where they grip each other. The forces grow together:
  * a taut partner stiffens the bar in question, a compressed one softens it. METHODS.md, "Taut partner".
  */
 import type { Vec2 } from '../geometry/vector.ts';
 import { LoadedSystem } from './assembly.ts';
 import { largestShare, RootSearch } from './criticalLoad.ts';
-import { type Mesh, type MeshNode, meshOf, principalMotions } from './mesh.ts';
+import { type Mesh, type MeshNode, meshOf, rowOf } from './mesh.ts';
 import { largestMovement, modeOf, nullShape, PARTS } from './mode.ts';
 import { type BarProblem, type BucklingMode, type CriticalLoad, PINNED } from './model.ts';
 import { type SpecialNode, unknownsOf } from './unknowns.ts';
+import type { Way } from './ways.ts';
 
 /** One of the two bars as the crossing sees it. */
 export interface PairBar {
@@ -18,6 +19,8 @@ export interface PairBar {
   readonly crossingAt: number;
   /** Out of the plane, in its own section plane; unit vector. */
   readonly outOfPlane: Vec2;
+  /** Where its partner grips it, relative to the centroid, mm. The centroid when left out; counts only where twist is looked at, which both bars do or neither. */
+  readonly grip?: Vec2;
   /** Cut at the crossing and plated: a hinge out of the plane. */
   readonly cut: boolean;
 }
@@ -91,16 +94,18 @@ function withPlace(bar: PairBar): BarProblem {
   return { ...problem, holds: [...problem.holds, { at: crossingAt, direction: outOfPlane, stiffness: 0 }] };
 }
 
-function fieldsDirection({ problem, outOfPlane: [x, y] }: PairBar): readonly number[] {
-  const { weak, strong } = principalMotions(problem.section.alpha);
-  return [x * weak[0] + y * weak[1], x * strong[0] + y * strong[1]];
-}
-
-function specialNode(bar: PairBar, { nodes }: Mesh, index: number): SpecialNode {
-  const direction = fieldsDirection(bar);
+function specialNode(bar: PairBar, { nodes, fields }: Mesh, index: number): SpecialNode {
+  const { problem, outOfPlane: direction, grip } = bar;
+  const row = rowOf(problem, fields, grip ? { direction, grip } : { direction });
   const away = ({ at }: MeshNode): number => Math.abs(at - bar.crossingAt);
   const node = nodes.reduce((best, each, k) => (away(each) < away(nodes[best] ?? each) ? k : best), 0);
-  return { node, shared: { direction, index }, hinge: bar.cut ? direction : null };
+  // A plate is a hinge out of the plane; twist goes through it.
+  return { node, shared: { row, index }, hinge: bar.cut ? slopeRow(problem, fields, direction) : null };
+}
+
+function slopeRow({ section }: BarProblem, fields: 2 | 3, direction: Vec2): Way {
+  const row = rowOf({ section }, 2, { direction });
+  return fields === 3 ? [...row, 0] : row;
 }
 
 /** Two bars in one plane of bending, as in the published theory of crossed pairs: N, mm. */

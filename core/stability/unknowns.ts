@@ -17,11 +17,12 @@ export interface Unknowns {
   readonly ofNode: readonly (readonly Unknown[])[];
 }
 
-/** What is special about the node at a crossing. Directions are unit vectors over the fields. */
+/** What is special about the node at a crossing. */
 export interface SpecialNode {
   readonly node: number;
-  /** A displacement that another bar has too, under one index. */
-  readonly shared: { readonly direction: Way; readonly index: number };
+  /** A displacement that another bar has too, under one index: the fields times `row`, which with twist has the arm of the grip in it. */
+  readonly shared: { readonly row: Way; readonly index: number };
+  /** Unit vector over the fields. */
   readonly hinge: Way | null;
 }
 
@@ -31,8 +32,9 @@ export function unknownsOf(mesh: Mesh, first = 0, special: SpecialNode | null = 
   const ofNode = mesh.nodes.map((node, k): readonly Unknown[] => {
     const list: Unknown[] = [];
     const here = special?.node === k ? special : null;
-    if (here) list.push(sharedUnknown(node.displacements, here));
-    for (const weights of here ? besides(here.shared.direction, node.displacements) : node.displacements)
+    const shared = here && sharedUnknown(node.displacements, here);
+    if (shared) list.push(shared);
+    for (const weights of shared ? besides(shared.weights, node.displacements) : node.displacements)
       list.push({ index: end++, of: 'displacement', weights, side: 'both' });
     const hinge = here?.hinge ?? null;
     if (hinge)
@@ -45,16 +47,26 @@ export function unknownsOf(mesh: Mesh, first = 0, special: SpecialNode | null = 
   return { end, ofNode };
 }
 
-function sharedUnknown(free: readonly Way[], { shared: { direction, index } }: SpecialNode): Unknown {
-  const inside = free.reduce((sum, way) => sum + dotOf(way, direction) ** 2, 0);
-  if (inside < 1 - 1e-9) throw new Error('the shared displacement of a crossing must not be held rigidly');
-  return { index, of: 'displacement', weights: direction, side: 'both' };
+/** Less than this share of the row left free is none. */
+const HELD = 1e-9;
+
+/** The fields per unit of the shared displacement, in what is free at the node and square to all else that is. */
+function sharedUnknown(free: readonly Way[], { shared: { row, index } }: SpecialNode): Unknown {
+  const parts = free.map((way) => dotOf(way, row));
+  const inside = row.map((_, field) =>
+    free.reduce((sum, way, k) => sum + (parts[k] ?? 0) * (way[field] ?? 0), 0),
+  );
+  const size = dotOf(inside, inside);
+  if (size < HELD * dotOf(row, row))
+    throw new Error('the shared displacement of a crossing must not be held rigidly');
+  return { index, of: 'displacement', weights: inside.map((part) => part / size), side: 'both' };
 }
 
 /** The rest of a space of ways when one direction in it is taken out. */
 function besides(direction: Way, ways: readonly Way[]): readonly Way[] {
+  const size = Math.sqrt(dotOf(direction, direction));
   const rest = freeWays(
-    [direction],
+    [direction.map((part) => part / size)],
     ways.map((row) => ({ row, stiffness: 1 })),
     direction.length,
   );

@@ -1,6 +1,13 @@
 import type { Assessment } from '../assessment.ts';
-import { type BowingBar, planeWays, realProblem, type Steel, stiffnessAlong } from '../bowing/barProblems.ts';
-import { type Partner, pairProblem } from '../bowing/bowing.ts';
+import {
+  type BowingBar,
+  planeWays,
+  realProblem,
+  type Steel,
+  stiffnessAlong,
+  withTwist,
+} from '../bowing/barProblems.ts';
+import { type Partner, pairLoad, pairProblem, singleLoad, twistingPair } from '../bowing/bowing.ts';
 import { type BayBowing, bayBowing } from '../bowing/bowings.ts';
 import { loadAgainstPartner, loadAgainstPosition } from '../bowing/curves.ts';
 import { neededStiffness } from '../bowing/needs.ts';
@@ -108,13 +115,16 @@ function sceneOf(assessment: Assessment, id: BarId): Scene | null {
     : null;
 }
 
+/** The shape at the load that is shown: with twist where twist counts. */
 function realMode(bar: BowingBar, partner: Partner | null, steel: Steel): BucklingMode {
-  if (partner) {
-    const pair = pairProblem(bar, partner, steel);
+  const paired = partner && pairLoad(bar, partner, steel);
+  if (partner && paired) {
+    const pair = (paired.twist.governs ? twistingPair : pairProblem)(bar, partner, steel);
     const { factor } = pairCriticalLoad(pair);
     if (factor !== null) return pairMode(pair, factor);
   }
-  const problem = realProblem(bar, steel);
+  const bowing = realProblem(bar, steel);
+  const problem = singleLoad(bar, steel).twist.governs ? withTwist(bowing, bar, steel) : bowing;
   const { factor } = criticalLoad(problem, { second: false });
   if (factor === null) throw new Error('a bar without compression has no mode');
   return bucklingMode(problem, factor);

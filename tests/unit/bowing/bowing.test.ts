@@ -16,7 +16,7 @@ import type { Bay, DiagonalSpec, EndFixity, Join } from '../../../core/project/m
 import { restraintContext } from '../../../core/restraint/restraint.ts';
 import { pushOf } from '../../../core/study/study.ts';
 import { bisected } from '../../published/bisected.ts';
-import { BEAM, bay, COLUMN, project, wall } from '../assess/given/bays.ts';
+import { BEAM, bay, COLUMN, ENDS, project, wall } from '../assess/given/bays.ts';
 import { CATALOGUES, propertiesOf } from '../assess/given/catalogues.ts';
 import { HINGED } from '../frame/bayGiven.ts';
 
@@ -31,14 +31,20 @@ interface Given {
   readonly taut?: number;
   readonly section?: string;
   readonly legInPlane?: DiagonalSpec['legInPlane'];
+  /** Heel to the line of bolts, mm. */
+  readonly gauge?: number;
 }
 
 /** A crossed tier whose diagonals have a length, by three, four and five. */
-function crossedBay(length: number, { join, taut, section, legInPlane }: Given = {}): Bay {
+function crossedBay(length: number, { join, taut, section, legInPlane, gauge }: Given = {}): Bay {
   return bay(wall(length * 0.8, [[length * 0.6, 'crossed']]), {
     joins: { [KEY]: join ?? { kind: 'bolted' } },
     ...(taut === undefined ? {} : { tensionShares: { [KEY]: taut } }),
-    diagonals: { section: section ?? '70x70x6', legInPlane: legInPlane ?? 'longer' },
+    diagonals: {
+      section: section ?? '70x70x6',
+      legInPlane: legInPlane ?? 'longer',
+      ...(gauge === undefined ? {} : { ends: { ...ENDS, gauge } }),
+    },
   });
 }
 const assessed = (length: number, given: Given = {}): Assessment =>
@@ -171,6 +177,31 @@ describe('the state of the partner', () => {
     expect(bowing(L, cut, FALL).partner?.cut).toBe('this bar');
     // The hinge in the cut bar itself: less than the one that runs through.
     expect(bowing(L, cut, FALL).real.N).toBeLessThan(load(0));
+  });
+});
+
+describe('twist of a crossed pair', () => {
+  // tests/unit/stability/pairTwist.test.ts: finite elements of both bars, held rigidly in the plane at the middle; here by their partner's own stiffness.
+  it.each([
+    ['100x100x8', 55, -1, 259_692, 276_213],
+    ['100x100x8', 55, -0.5, 340_650, 366_677],
+    ['120x120x10', 65, -1, 544_998, 596_722],
+    ['120x120x10', 65, 0, 939_966, 992_942],
+  ])(
+    'of %s on a gauge of %d at T/C %d is that of both bars together',
+    (section, gauge, taut, twisting, bowingAlone) => {
+      const { real, twist } = bowing(3201.562, { section, gauge, taut });
+      expect(twist.governs).toBe(true);
+      expect(Math.abs(real.N / twisting - 1)).toBeLessThan(0.005);
+      expect(Math.abs(twist.ratio / (twisting / bowingAlone) - 1)).toBeLessThan(0.005);
+    },
+  );
+
+  it('is in the plot against the partner, and in what is left when it goes slack', () => {
+    const given = { section: '100x75x8', taut: 0.4 } as const;
+    const { real, partner } = bowing(4000, given);
+    expect(partner?.slackLoad).toBeCloseTo(bowing(4000, { ...given, taut: 0 }).real.N, 3);
+    expect(real.N).toBeGreaterThan(partner?.slackLoad ?? 0);
   });
 });
 
