@@ -21,7 +21,25 @@ export function readCases(data: unknown): CasesRead {
         todo: 'Give an object with the list “cases”, or the list itself.',
       },
     };
-  return { ok: true, cases: list.list().map(({ value }, k) => readCase(value, k)) };
+  return { ok: true, cases: withoutDoubles(list.list().map(({ value }, k) => readCase(value, k))) };
+}
+
+/** Results go by their id: a second case of one name could not be told from the first. */
+function withoutDoubles(cases: readonly CaseRead[]): readonly CaseRead[] {
+  const seen = new Set<string>();
+  return cases.map((each): CaseRead => {
+    const id = each.ok ? each.case.id : each.id;
+    if (!seen.has(id)) {
+      seen.add(id);
+      return each;
+    }
+    const problem = {
+      path: 'id',
+      what: 'Another case before this one has the same id.',
+      todo: 'Give each an id of its own.',
+    };
+    return { ok: false, id, problems: [...(each.ok ? [] : each.problems), problem] };
+  });
 }
 
 function readCase(value: unknown, index: number): CaseRead {

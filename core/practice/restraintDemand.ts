@@ -11,6 +11,8 @@ export interface RestraintCase {
   readonly points: number;
   /** Initial misalignment of the point held, mm; spacing/500 as a rule. */
   readonly misalignment: number;
+  /** What the softest of the holds offers, N/mm: how far the bracing gives, where a rule asks. Left out: it does not give. */
+  readonly offered?: number;
 }
 
 export interface RestraintDemand {
@@ -23,8 +25,12 @@ export interface RestraintDemand {
   readonly confidence: Confidence;
 }
 
-/** All the rules of one practice that apply to a point hold; the first is the one to show where there is room for one. */
+/** All the rules of one practice that apply to a point hold, the first the one to show where there is room for one; last, for comparison, BS 5950. */
 export function restraintDemands(practice: PracticeId, given: RestraintCase): readonly RestraintDemand[] {
+  return [...ownDemands(practice, given), bsOnePerCent(given)];
+}
+
+function ownDemands(practice: PracticeId, given: RestraintCase): readonly RestraintDemand[] {
   switch (practice) {
     case 'aisc360':
       return [aiscPoint(given), aiscPanel(given)];
@@ -33,7 +39,7 @@ export function restraintDemands(practice: PracticeId, given: RestraintCase): re
     case 'csaS16':
       return [twoPerCent(given, 'CSA S16 9.2.5'), detailed(given, 'CSA S16 9.2.6')];
     case 'en1993':
-      return [enStabilising(given, 1, 0)];
+      return [enStabilising(given, 1, enDeflection(given))];
     case 'as4100':
       return [share(given, 0.025, '2.5 % of the compression', 'AS 4100 6.6', 'from memory, sure')];
     case 'is800':
@@ -109,6 +115,17 @@ function share(
 export const bowReduction = (members: number): number => Math.sqrt(0.5 * (1 + 1 / members));
 
 /**
+ * How far one point gives under its share of the stabilising load of one member, mm: δ = F/k with F = 8N(e0 + δ)s/L², so δ = e0/(k/c − 1), c = 8Ns/L².
+ * Infinite where the bracing is too soft for any balance.
+ */
+export function enDeflection({ compression, spacing, points, offered }: RestraintCase): number {
+  if (offered === undefined) return 0;
+  const length = spacing * (points + 1);
+  const c = (8 * compression * spacing) / length ** 2;
+  return offered > c ? (bowReduction(1) * length) / 500 / (offered / c - 1) : Number.POSITIVE_INFINITY;
+}
+
+/**
  * EN 1993-1-1 5.3.3 (5.12), (5.13): the uniform load q = N·8(e0 + δ)/L² of a bracing over the whole length, here as the force on one of its points.
  * @param members compressed members that the bracing holds, each with the given compression
  * @param deflection of the bracing under that load and the outer ones, mm
@@ -118,7 +135,9 @@ export function enStabilising(given: RestraintCase, members: number, deflection:
   const bow = (bowReduction(members) * length) / 500;
   const q = (members * given.compression * 8 * (bow + deflection)) / length ** 2;
   return {
-    rule: `stabilising load ${q.toPrecision(3)} N/mm over the length, as a force at one point`,
+    rule: Number.isFinite(q)
+      ? `stabilising load ${q.toPrecision(3)} N/mm over the length, as a force at one point; ${members === 1 ? 'this bar alone' : `${members} bars`}, bracing that gives ${deflection.toFixed(1)} mm`
+      : 'stabilising load: the bracing gives so much that no force is in balance with it',
     force: q * given.spacing,
     stiffness: null,
     clause: 'EN 1993-1-1 5.3.3, (5.12), (5.13)',
@@ -128,5 +147,11 @@ export function enStabilising(given: RestraintCase, members: number, deflection:
 
 /** BS 5950-1:2000 4.7.1.2: shown for comparison. */
 export function bsOnePerCent(given: RestraintCase): RestraintDemand {
-  return share(given, 0.01, '1 % of the compression', 'BS 5950-1 4.7.1.2', 'from memory, verify');
+  return share(
+    given,
+    0.01,
+    'for comparison: 1 % of the compression',
+    'BS 5950-1 4.7.1.2',
+    'from memory, verify',
+  );
 }

@@ -16,10 +16,18 @@ export interface BarStudy {
   readonly againstPartner: { readonly points: readonly CurvePoint[]; readonly present: number } | null;
   /** Critical load against the place of a crossing, as a share of the length; null without a partner. */
   readonly againstPosition: { readonly points: readonly PositionPoint[]; readonly present: number } | null;
-  /** What the practice asks of a hold when the bar carries its critical load; empty for a bar in tension only. */
-  readonly demands: readonly RestraintDemand[];
+  /** What the practice asks of a hold when the bar is squeezed; null for a bar in tension only. */
+  readonly demands: HoldDemands | null;
   /** The whole bay under this bar's compression and its partner's share. */
   readonly bay: BayStudy;
+}
+
+export interface HoldDemands {
+  /** N. */
+  readonly compression: number;
+  /** What squeezes it so: a combination by name, or its own critical load, where that is more or nothing acts. */
+  readonly from: { readonly kind: 'combination'; readonly name: string } | { readonly kind: 'critical load' };
+  readonly each: readonly RestraintDemand[];
 }
 
 /** A shape in space: displacements square to the bar, largest 1. */

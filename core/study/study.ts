@@ -10,6 +10,7 @@ import {
 import { type Partner, pairLoad, pairProblem, singleLoad, twistingPair } from '../bowing/bowing.ts';
 import { type BayBowing, bayBowing } from '../bowing/bowings.ts';
 import { loadAgainstPartner, loadAgainstPosition } from '../bowing/curves.ts';
+import type { Bowing } from '../bowing/model.ts';
 import { neededStiffness } from '../bowing/needs.ts';
 import { bayCriticalLoad } from '../frame/bayCriticalLoad.ts';
 import { bayFrame } from '../frame/bayFrame.ts';
@@ -23,7 +24,7 @@ import { criticalLoad } from '../stability/criticalLoad.ts';
 import { bucklingMode } from '../stability/mode.ts';
 import type { BucklingMode } from '../stability/model.ts';
 import { pairCriticalLoad, pairMode } from '../stability/pair.ts';
-import type { BarStudy, BayStudy, ModeInSpace, StationNeed } from './model.ts';
+import type { BarStudy, BayStudy, HoldDemands, ModeInSpace, StationNeed } from './model.ts';
 import { modeInWords } from './modeWords.ts';
 
 /** A closer look at one bar; null when it is not assessed. */
@@ -48,20 +49,33 @@ export function studyOf(assessment: Assessment, bar: BarId): BarStudy | null {
           present: placeOf(studied, partner) / studied.bar.length,
         }
       : null,
-    demands:
-      studied.angle.spec.countedOn === 'both' && bowing
-        ? restraintDemands(assessment.practice.id, {
-            // What squeezes it in the combinations, or its critical load where that is more or nothing acts.
-            compression: Math.max(
-              bowing.real.N,
-              assessment.diagonals.get(bar)?.checks?.compression?.force ?? 0,
-            ),
-            spacing: studied.restraint.lanes.v.unbraced,
-            points: Math.max(1, bowing.stations.length),
-            misalignment: studied.restraint.lanes.v.unbraced / 500,
-          })
-        : [],
+    demands: bowing ? demandsOf(assessment, studied, bowing) : null,
     bay: bayStudy(assessment, bay, scene),
+  };
+}
+
+function demandsOf(
+  assessment: Assessment,
+  { bar, angle, restraint }: BowingBar,
+  bowing: Bowing,
+): HoldDemands | null {
+  if (angle.spec.countedOn !== 'both') return null;
+  const squeezed = assessment.diagonals.get(bar.id)?.checks?.compression ?? null;
+  const critical = bowing.real.N;
+  const byLoads = squeezed !== null && squeezed.force >= critical ? squeezed : null;
+  const compression = byLoads?.force ?? critical;
+  const spacing = restraint.lanes.v.unbraced;
+  const counted = bowing.stations.flatMap(({ holds }) => holds.filter((hold) => hold.counted));
+  return {
+    compression,
+    from: byLoads ? { kind: 'combination', name: byLoads.name } : { kind: 'critical load' },
+    each: restraintDemands(assessment.practice.id, {
+      compression,
+      spacing,
+      points: Math.max(1, bowing.stations.length),
+      misalignment: spacing / 500,
+      ...(counted.length > 0 ? { offered: Math.min(...counted.map(({ offered }) => offered)) } : {}),
+    }),
   };
 }
 

@@ -30,8 +30,15 @@ export function pushTable(test: Pushed, units: UnitSystem): string {
     ...(inPlace ? [] : ['It can move there without resistance.']),
     ...(offered ? [] : ['Nothing is joined to it there, so the rest of the bay offers nothing.']),
     ...(rows.length > 0 ? ['', table] : ['']),
+    ...(inPlace ? [IN_PLACE] : []),
+    ...(offered ? [OFFERED] : []),
   ].join('\n');
 }
+
+/** The two are measured differently, and neither is a share of the other. */
+const IN_PLACE = 'Bar in place: the whole bay gives under the push, the ends of the bar too.\n';
+const OFFERED =
+  'Offered by the rest: the bending of the bar left out and its ends held still, so that what is joined to it there answers alone.\n';
 
 function rowOf(name: string, s: PushedStiffness, units: UnitSystem): readonly string[] {
   const figure = (value: number): string => showStiffness(value, units, 'bare');

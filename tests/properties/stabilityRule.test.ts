@@ -44,7 +44,9 @@ function exact(section: SectionProperties, marks: readonly Mark[]): number {
   return Math.PI * Math.sqrt((E * section.area) / (N ?? 0));
 }
 
-const section = fc.constantFrom(...CATALOGUES.en.angles.map(({ properties }) => properties));
+const section = fc.constantFrom(
+  ...[...CATALOGUES.en.angles, ...CATALOGUES.au.angles].map(({ properties }) => properties),
+);
 /** At places that are all different: two marks at one place hold together, which is another matter. */
 const marksOf = (way: fc.Arbitrary<Way>, most = 4): fc.Arbitrary<readonly Mark[]> =>
   fc

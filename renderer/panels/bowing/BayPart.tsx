@@ -43,11 +43,18 @@ export function BayPart({ bar, study, practice, units }: BayPartProps): JSX.Elem
           {ratio !== null && `, ${againstBar(ratio)}`}.
         </p>
       )}
-      {study.demands.length > 0 && (
+      {study.demands !== null && (
         <>
           <h3>Asked of a hold by {practice.name}</h3>
+          <p className="second">
+            While {bar.mark} is squeezed by {showForce(study.demands.compression, units)},{' '}
+            {study.demands.from.kind === 'critical load'
+              ? 'its critical load'
+              : `in ${study.demands.from.name}`}
+            .
+          </p>
           <ul className="demands">
-            {study.demands.map((demand) => (
+            {study.demands.each.map((demand) => (
               <Demand key={`${demand.clause} ${demand.rule}`} demand={demand} units={units} />
             ))}
           </ul>
@@ -71,7 +78,7 @@ function Demand({
 }): JSX.Element {
   return (
     <li>
-      <b>{showForce(force, units)}</b>
+      <b>{Number.isFinite(force) ? showForce(force, units) : 'too soft'}</b>
       {stiffness !== null && <b>{showStiffness(stiffness, units)}</b>}
       <span className="demand-rule">{rule}</span>
       <span className="second">

@@ -60,7 +60,7 @@ export function PositionPart({
             at: part,
             label: part === 0 ? 'i' : part === 1 ? 'j' : grouped(part, 2),
           }))}
-          words={['', 'held in plane alone', '']}
+          words={['', 'held in the plane alone, no more from its partner', '']}
           lines={[
             {
               look: 'rule',

@@ -125,8 +125,8 @@ function Station({
       </div>
       <div className="station-ways">
         <p className="bowing-note">
-          {bar.mark} left out. Long is soft, short is stiff; dashed a full hold, dotted all that is needed. In{' '}
-          {unitNames(units).stiffness}.
+          {bar.mark} left out, its ends still. Long is soft, short is stiff; dashed a full hold, dotted all
+          that is needed. In {unitNames(units).stiffness}.
         </p>
         {offered.holds.map((hold) => (
           <div key={hold.direction} className="station-way">

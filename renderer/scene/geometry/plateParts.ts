@@ -116,7 +116,10 @@ function packer(
 ): Prism {
   const { inPlane, outOfPlane } = a.placement;
   const fromHere = subtract(along(other.from, other.direction, crossing.onB), crossing.at);
-  const heels = [dot(a.placement.heel, outOfPlane), dot(add(fromHere, b.placement.heel), outOfPlane)] as const;
+  const heels = [
+    dot(a.placement.heel, outOfPlane),
+    dot(add(fromHere, b.placement.heel), outOfPlane),
+  ] as const;
   const middle = (heels[0] + heels[1]) / 2;
   return block({
     outline: rectangle(-PACKER / 2, PACKER / 2, -PACKER / 2, PACKER / 2),

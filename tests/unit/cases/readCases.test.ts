@@ -29,6 +29,14 @@ describe('a file of cases', () => {
     ]);
   });
 
+  it('takes the first of two cases of one id, and says that the other cannot be told from it', () => {
+    const read = readCases([BAR, { ...PAIR, id: 'one' }, PAIR]);
+    if (!read.ok) throw new Error('no list');
+    expect(
+      read.cases.map((each) => (each.ok ? each.case.type : `not ${each.id}: ${each.problems[0]?.what}`)),
+    ).toEqual(['bar', 'not one: Another case before this one has the same id.', 'xbrace-planar']);
+  });
+
   it('takes numbers for ids, and passes over results, checks and whatever else is there', () => {
     const read = readCases([{ ...BAR, id: 7, result: { N_cr: 'nonsense' }, check: [], remarks: {} }]);
     expect(read.ok && read.cases[0]?.ok && read.cases[0].case.id).toBe('7');
