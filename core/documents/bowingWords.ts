@@ -182,7 +182,7 @@ function difference(case_: Case): string {
   if (Math.abs(change) < AGREE) return `${agreement(case_)}${twistToo(bowing)}`;
   return change < 0
     ? `${safeSide(case_)}: the marks are on the safe side by ${percent(-change)} of slenderness.${twistToo(bowing)}`
-    : `${unsafeSide(case_)}: the marks are on the unsafe side by ${percent(change)} of slenderness.${isMostlyTwist(case_) ? '' : twistToo(bowing)}`;
+    : `${unsafeSide(case_)}: the marks are on the unsafe side by ${percent(change)} of slenderness.${isForTwist(case_) ? '' : twistToo(bowing)}`;
 }
 
 function agreement({ bar, bowing }: Case): string {
@@ -239,7 +239,7 @@ function unsafeSide(case_: Case): string {
   const weak = weakest(bowing);
   if (weak !== null)
     return `${labelOf(case_, weak.offered)} gives only ${showStiffness(weak.hold.offered, units)} ${weak.hold.direction} and keeps ${percent(weak.hold.grip ?? 0)} of what a rigid hold would; ${reads}`;
-  if (isMostlyTwist(case_))
+  if (isForTwist(case_))
     return `Bowing and twisting together take ${percent(1 - bowing.twist.ratio)} of the load; ${reads}`;
   const { partner } = bowing;
   if (partner !== null && partner.tensionShare < 0)
@@ -249,11 +249,13 @@ function unsafeSide(case_: Case): string {
   return `It bows about both its axes at once, which no span alone shows; ${reads}`;
 }
 
-/** Without twist less than half of what is lost would be. */
-function isMostlyTwist({ bowing, inService }: Case): boolean {
-  const { real, twist } = bowing;
+/** Twist takes more than the rest does, or there is nothing else to name. */
+function isForTwist({ bowing, inService }: Case): boolean {
+  const { real, twist, partner } = bowing;
+  if (!twist.governs || weakest(bowing) !== null) return false;
+  if (partner === null || (partner.tensionShare >= 0 && partner.cut === 'neither')) return true;
   const bowingAlone = real.slenderness * Math.sqrt(twist.ratio);
-  return twist.governs && bowingAlone - inService.slenderness < real.slenderness - bowingAlone;
+  return bowingAlone - inService.slenderness < real.slenderness - bowingAlone;
 }
 
 function weakest(bowing: Bowing): Told | null {
