@@ -18,6 +18,8 @@ export interface FramingPart {
   /** Node of each turning unknown. Turns are counted in mm at `TURN_ARM`. */
   readonly turns: readonly number[];
   readonly fixed: ReadonlySet<number>;
+  /** Nodes that stand on something outside: fixed, or held as the eaves of a roof are. */
+  readonly standing: ReadonlySet<number>;
   /** Diagonals, and members between the nodes on them. */
   readonly pieces: readonly Piece[];
   readonly holds: readonly Hold[];
@@ -49,7 +51,7 @@ export interface Bending {
 export interface Hold {
   readonly node: number;
   readonly direction: Vec3;
-  /** At the eaves of a roof on walls: the frames take there what is loaded in their own plane, and do not keep the roof from turning in plan. */
+  /** At the eaves of a roof that is held on two lines: the frames take there what is loaded in their own plane, and do not keep the roof from turning in plan. */
   readonly ofFrames: boolean;
 }
 
@@ -57,6 +59,15 @@ export interface Tie {
   readonly i: number;
   readonly j: number;
   readonly direction: Vec3;
+}
+
+/** A node at the eaves of a roof that walls or supports hold along two lines. */
+interface Eaves {
+  readonly node: number;
+  /** On a support of the roof's own, and not on a wall. */
+  readonly onSupport: boolean;
+  /** Unit vector along the building. */
+  readonly along: Vec3;
 }
 
 /** A turn of 1 in these units moves a point this far away, mm, by 1 mm: keeps turns and displacements alike in size. */
@@ -68,6 +79,10 @@ export const YIELDING = 10;
 
 /** Walls at least so far apart are two lines, mm. */
 const TWO_LINES = 100;
+
+/** A wall lies along a roof's eaves within 45°, and is a wall if its plane leans no more than 60° from upright. */
+const ALONG = Math.SQRT1_2;
+const UPRIGHT = Math.sin(Math.PI / 3);
 
 /** Within this angle two members run through, rad. */
 const IN_LINE = Math.sin(Math.PI / 180);
@@ -143,13 +158,20 @@ class PartBuilder {
     const drafts = this.#bays.flatMap((bay) => this.#draftsOf(bay));
     const joints = this.#jointsOf(drafts);
     const pieces = drafts.map((draft) => this.#pieceOf(draft, joints));
-    const holds = this.#holds(drafts);
+    const supports = this.#supports();
+    const eaves = this.#eavesByStatics(supports);
+    const holds = this.#holds(drafts, eaves);
     return {
       bays: this.#bays,
       nodes: this.#nodes,
       indexOf: this.#indexOf,
       turns: this.#turns,
-      fixed: this.#fixed(),
+      fixed: new Set(
+        [...supports]
+          .filter((node) => !eaves.has(node))
+          .flatMap((node) => [3 * node, 3 * node + 1, 3 * node + 2]),
+      ),
+      standing: supports,
       pieces,
       holds,
       ties: this.#ties(holds),
@@ -266,36 +288,40 @@ class PartBuilder {
     };
   }
 
-  #fixed(): ReadonlySet<number> {
-    const fixed = new Set<number>();
+  /** Nodes that stand on something outside this part. */
+  #supports(): ReadonlySet<number> {
+    const supports = new Set<number>();
     const own = new Set(this.#bays.map(({ id }) => id));
     const standing = new Set(this.#bays.filter(({ kind }) => kind !== 'roof').flatMap(({ nodes }) => nodes));
     this.#nodes.forEach((id, k) => {
-      const supports = this.#layout.nodes.get(id)?.supports ?? {};
-      const holds = Object.entries(supports).some(
-        ([bay, { kind }]) => own.has(bay) && (kind !== 'eaves' || !standing.has(id)),
-      );
-      if (holds) for (let c = 0; c < 3; c++) fixed.add(3 * k + c);
+      const kinds = Object.entries(this.#layout.nodes.get(id)?.supports ?? {});
+      if (kinds.some(([bay, { kind }]) => own.has(bay) && (kind !== 'eaves' || !standing.has(id))))
+        supports.add(k);
     });
-    return fixed;
+    return supports;
   }
 
   /** What no plane at a node takes. The eaves of a roof give it no hold up the slope: frames hold them across the building. */
-  #holds(drafts: readonly Draft[]): readonly Hold[] {
+  #holds(drafts: readonly Draft[], eaves: ReadonlyMap<number, Eaves>): readonly Hold[] {
     const taken = new Map<number, Vec3[]>();
     const roofs = new Set(this.#bays.filter(({ kind }) => kind === 'roof').map(({ id }) => id));
     for (const { bar, plane, from, to } of drafts)
       for (const node of [from, to]) {
         const here = taken.get(node) ?? [];
         taken.set(node, here);
-        const eaves =
+        const atEaves =
           roofs.has(bar.bay) && this.#layout.nodes.get(this.#nodes[node] ?? '')?.supports[bar.bay];
-        here.push(...(eaves ? [plane.right] : [plane.right, plane.up]));
+        here.push(...(atEaves ? [plane.right] : [plane.right, plane.up]));
       }
-    const onWalls = this.#eavesOnWalls(roofs);
-    return [...taken].flatMap(([node, directions]) =>
-      leftOver(directions).map((direction) => ({ node, direction, ofFrames: onWalls.has(node) })),
-    );
+    return [...taken].flatMap(([node, directions]) => {
+      const byStatics = eaves.get(node);
+      if (byStatics?.onSupport) return supportHolds(node, byStatics.along);
+      return leftOver(directions).map((direction) => ({
+        node,
+        direction,
+        ofFrames: byStatics !== undefined,
+      }));
+    });
   }
 
   /** Rafters that run from eaves to eaves over a ridge push them apart: what takes that is the frame, not the bracing. */
@@ -318,27 +344,47 @@ class PartBuilder {
   }
 
   /**
-   * Nodes at the eaves of roofs that stand on braced walls along two lines or more, which keep such a roof from turning in plan by statics.
-   * On one line alone only the frames can: there they keep all their stiffness.
+   * Eaves of roofs that are held along the building on two lines or more, by walls or by supports that the project vouches for. Such a roof is kept from
+   * turning in plan by statics: each line takes its share by lever arms, whatever its stiffness, and the frames keep it across the building
+   * without clamping it. On one line alone only the frames can keep it from turning: there they have all their stiffness.
    */
-  #eavesOnWalls(roofs: ReadonlySet<string>): ReadonlySet<number> {
-    const found = new Set<number>();
-    const walls = new Set(this.#bays.filter(({ kind }) => kind === 'wall').flatMap(({ nodes }) => nodes));
+  #eavesByStatics(supports: ReadonlySet<number>): ReadonlyMap<number, Eaves> {
+    const found = new Map<number, Eaves>();
     for (const bay of this.#bays) {
       const along = bay.planes[0]?.right;
-      if (!roofs.has(bay.id) || !along) continue;
-      const shared = bay.nodes.filter((id) => walls.has(id));
-      const across = shared.map((id) => {
-        const [x, y] = this.#layout.nodes.get(id)?.at ?? [0, 0, 0];
+      if (bay.kind !== 'roof' || !along) continue;
+      const braced = this.#nodesBracedAlong(along);
+      const heldAlong = bay.nodes.flatMap((id): Eaves[] => {
+        const node = this.#indexOf.get(id);
+        if (node === undefined) return [];
+        const onSupport = supports.has(node) && !braced.has(id);
+        return onSupport || braced.has(id) ? [{ node, onSupport, along }] : [];
+      });
+      const across = heldAlong.map(({ node }) => {
+        const [x, y] = this.#at(node);
         return y * along[0] - x * along[1];
       });
       if (Math.max(...across) - Math.min(...across) < TWO_LINES) continue;
-      for (const id of shared) {
-        const node = this.#indexOf.get(id);
-        if (node !== undefined && this.#layout.nodes.get(id)?.supports[bay.id]) found.add(node);
-      }
+      for (const each of heldAlong)
+        if (this.#layout.nodes.get(this.#nodes[each.node] ?? '')?.supports[bay.id])
+          found.set(each.node, each);
     }
     return found;
+  }
+
+  /** Nodes of walls, drawn freely or not, that lie along a direction. */
+  #nodesBracedAlong(along: Vec3): ReadonlySet<string> {
+    return new Set(
+      this.#bays
+        .filter(
+          ({ kind, planes }) =>
+            (kind === 'wall' || kind === 'free') &&
+            planes.some(
+              ({ right, normal }) => Math.abs(dot(right, along)) > ALONG && Math.abs(normal[2]) < UPRIGHT,
+            ),
+        )
+        .flatMap(({ nodes }) => nodes),
+    );
   }
 
   #braced(drafts: readonly Draft[]): readonly (readonly Vec3[])[] {
@@ -354,6 +400,16 @@ class PartBuilder {
 
 const planeKey = (bar: Bar, plane: Plane): string => `${bar.bay} ${plane.id}`;
 const inLine = (joint: Joint, bar: Bar): boolean => length(cross(joint.direction, bar.direction)) < IN_LINE;
+
+/** Held upright and along the building; across it by the frames. */
+function supportHolds(node: number, along: Vec3): readonly Hold[] {
+  const upright: Vec3 = [0, 0, 1];
+  return [
+    { node, direction: along, ofFrames: false },
+    { node, direction: upright, ofFrames: false },
+    { node, direction: cross(upright, along), ofFrames: true },
+  ];
+}
 
 /** Unit vectors square to each other and to all of the given. */
 function leftOver(directions: readonly Vec3[]): readonly Vec3[] {

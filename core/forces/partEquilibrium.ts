@@ -66,6 +66,7 @@ export function partEquilibrium(
     const own = bars === 'as counted on' ? axial : { ...axial, tensionOnly: false };
     return short === undefined ? own : { ...own, preset: short };
   });
+  const applied = load.slice();
   const problem = { nodes: part.nodes.length, turns: part.turns, held: part.fixed, bars: working };
   if (withFrames) {
     const own = tensionOnlyEquilibrium(
@@ -77,7 +78,7 @@ export function partEquilibrium(
   }
   const found = tensionOnlyEquilibrium({ ...problem, rest, load }, start, pattern);
   if (found.kind === 'no way to carry') return noWay(part, working, found.motion);
-  return answerOf(part, working, found.displacement, found.forces, found.residual, load, found.slack);
+  return answerOf(part, working, found.displacement, found.forces, found.residual, applied, found.slack);
 }
 
 /** The part of the load that is square to the bracing at each node. */
@@ -137,7 +138,7 @@ function answerOf(
   });
   const reactions = new Map<string, Vec3>();
   part.nodes.forEach((id, k) => {
-    if (!part.fixed.has(3 * k)) return;
+    if (!part.standing.has(k)) return;
     reactions.set(id, subtract(at(internal, k), at(load, k)));
   });
   return {

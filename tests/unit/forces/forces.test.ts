@@ -10,7 +10,7 @@ import type { Layout } from '../../../core/layout/model.ts';
 import { practiceFor } from '../../../core/practice/practices.ts';
 import type { Actions, Combination, Load, LoadCase } from '../../../core/project/actions.ts';
 import type { Bay, Project } from '../../../core/project/model.ts';
-import { bay, project, roof, wall } from '../assess/given/bays.ts';
+import { bay, free, project, roof, wall } from '../assess/given/bays.ts';
 import { CATALOGUES } from '../assess/given/catalogues.ts';
 
 const laidOut = (given: Project): Layout => layOut(given, stockOf('en', [], CATALOGUES));
@@ -400,6 +400,78 @@ describe('a roof bay on two unlike walls that share its eaves', () => {
   it('leaves what acts across the building to its frames', () => {
     const state = only(forces([R, near, far], acting([wind([push('R/a.L0', [0, 20, 0])])], [alone('W')])));
     for (const [bar, force] of state.forces) expect(Math.abs(force), bar).toBeLessThan(50);
+  });
+});
+
+describe('a roof bay held along two lines', () => {
+  // Two slopes of 6 m at 6°: the ridge at half the width, a.L1 at a quarter of it.
+  const slope = {
+    ...roof(5000, 6, [
+      [3000, 'crossed'],
+      [3000, 'crossed'],
+    ]),
+  };
+  const [first] = slope.slopes;
+  if (!first) throw new Error('no slope');
+  const R = bay(
+    { ...slope, slopes: [first, { ...first, id: 'b' }] },
+    { id: 'R', place: { origin: [0, 0, 8000], turn: 0 } },
+  );
+  const span = 12_000 * Math.cos((6 * Math.PI) / 180);
+  const near = bay(wall(5000, [[8000, 'crossed']]), { id: 'N' });
+  const beside = bay(wall(5000, [[8000, 'crossed']]), {
+    id: 'Q',
+    place: { origin: [0, 20_000, 0], turn: 0 },
+  });
+  const drawn = (id: string, y: number): Bay =>
+    bay(
+      free(
+        { a: [0, y, 0], b: [5000, y, 0], c: [0, y, 8000], d: [5000, y, 8000] },
+        [
+          ['x1', 'a', 'd'],
+          ['x2', 'b', 'c'],
+          ['c1', 'a', 'c', 'column'],
+          ['c2', 'b', 'd', 'column'],
+          ['bm', 'c', 'd', 'beam'],
+        ],
+        { free: ['c', 'd'] },
+      ),
+      { id },
+    );
+  const carry = { from: 'R', to: 'Q', eaves: 2 } as const;
+
+  it.each<[string, readonly Bay[], Actions['carries'], string, string]>([
+    ['by its own supports alone', [R], [], 'R/a', 'R/b'],
+    ['by a wall and by its own supports', [R, near], [], 'N', 'R/b'],
+    ['by a wall and by what another carries', [R, near, beside], [carry], 'N', 'R/b'],
+    ['by a wall and by one drawn freely', [R, near, drawn('F', span)], [], 'N', 'F'],
+    ['by two drawn freely', [R, drawn('E', 0), drawn('F', span)], [], 'E', 'F'],
+  ])('%s shares wind by lever arms, three quarters to the nearer', (_, bays, carries, nearer, farther) => {
+    const state = only(forces(bays, acting([wind([push('R/a.L1', [20, 0, 0])])], [alone('W')], carries)));
+    expect(state.noWay).toEqual([]);
+    const at = (of: string): number =>
+      [...state.reactions].reduce((sum, [node, [x]]) => (node.startsWith(of) ? sum + x : sum), 0);
+    expect(at(nearer) / -15_000).toBeCloseTo(1, 2);
+    expect(at(farther) / -5000).toBeCloseTo(1, 2);
+    for (const [node, moved] of state.displacements) expect(Math.hypot(...moved), node).toBeLessThan(20);
+  });
+
+  it('keeps its eaves from spreading under its own weight, and stands in balance', () => {
+    const weight = [push('R/a.L2', [0, 0, -20]), push('R/a.R2', [0, 0, -20])];
+    const state = only(forces([R], acting([wind(weight)], [alone('W')])));
+    const [x, y, z] = [...state.reactions.values()].reduce(
+      ([a, b, c], [p, q, r]) => [a + p, b + q, c + r],
+      [0, 0, 0],
+    );
+    expect(x).toBeCloseTo(0, 3);
+    expect(y).toBeCloseTo(0, 3);
+    expect(z).toBeCloseTo(40_000, 2);
+    // Half of each rafter's 20 kN at its eaves, by a thrust of 10/tan 6° along the level.
+    const thrust = [...state.reactions].filter(([node]) => node.startsWith('R/a')).map(([, [, way]]) => way);
+    expect(thrust.reduce((sum, each) => sum + each, 0)).toBeCloseTo(
+      20_000 / Math.tan((6 * Math.PI) / 180),
+      -2,
+    );
   });
 });
 
