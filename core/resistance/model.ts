@@ -202,6 +202,8 @@ export interface CompressionQuestion extends Omit<TensionQuestion, 'ends'> {
   readonly joinedBetween: boolean;
   /** A load acts across it between its ends, own weight apart. Left out: none does. */
   readonly loadedAcross?: boolean;
+  /** A plate is too slender to yield, and `steel` already has the yield stress that it allows. */
+  readonly slenderPlate?: boolean;
   /** Of lengths that the user set by hand: the axis, and why. Left out: none is. */
   readonly lengthsByHand?: readonly { readonly axis: string; readonly reason: string }[];
 }

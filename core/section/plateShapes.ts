@@ -23,8 +23,8 @@ export function iProperties({ depth, width, web, flange }: PlatedSizes): Section
   });
 }
 
-/** Outer radius of the corners over the wall; the inner one is the wall. As EN 10219-2 has them for the properties of cold-formed tubes up to 6 mm thick. */
-const CORNER = 2;
+/** Outer radius of the corners over the wall; the inner one is a wall less. As EN 10219-2 has them for the properties of cold-formed tubes (Annex B, from memory). */
+const cornerOf = (wall: number): number => (wall <= 6 ? 2 : wall <= 10 ? 2.5 : 3);
 
 /**
  * A rectangular tube with rounded corners. Torsion by Bredt on the middle line, corners left square: 4A²t/s.
@@ -32,8 +32,9 @@ const CORNER = 2;
  */
 export function boxProperties(depth: number, width: number, wall: number): SectionProperties {
   const [d, b] = [depth - 2 * wall, width - 2 * wall];
-  const outer = spandrel(Math.min(CORNER * wall, depth / 2, width / 2));
-  const inner = spandrel(Math.min((CORNER - 1) * wall, d / 2, b / 2));
+  const corner = cornerOf(wall);
+  const outer = spandrel(Math.min(corner * wall, depth / 2, width / 2));
+  const inner = spandrel(Math.min((corner - 1) * wall, d / 2, b / 2));
   const about = (deep: number, wide: number, deepIn: number, wideIn: number): number =>
     (wide * deep ** 3 - wideIn * deepIn ** 3) / 12 -
     4 * (outer.own + outer.area * (deep / 2 - outer.centroid) ** 2) +

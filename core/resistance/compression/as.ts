@@ -5,12 +5,16 @@ import { memberReduction } from './curves.ts';
 import { legsOf } from './legs.ts';
 import { ONE_LEG } from './oneLegTerms.ts';
 import type { CompressionPack } from './pack.ts';
+import { plateRemark } from './walls.ts';
 
 const PHI = 0.9;
 /** Table 6.2.4: plate elements of hot-rolled sections held along one edge. */
 const YIELD_LIMIT = 16;
 /** k_f from which on nothing is lost, rounding apart. */
 const FULL = 1 - 1e-9;
+
+/** Any k_f of a section with a plate beyond the yield limit: which one matters to the column constant no further. */
+const BELOW = 0.99;
 
 /** 6.2.2: what slender legs leave of the section. */
 function formFactor({ section, steel }: CompressionQuestion, working: Working): number {
@@ -43,8 +47,8 @@ function formFactor({ section, steel }: CompressionQuestion, working: Working): 
 
 /** α_b 1 below k_f = 1 is less sure than the rest. */
 const slenderRemark = (question: CompressionQuestion): string | null =>
-  formFactor(question, new Working()) < FULL
-    ? 'A leg is beyond the yield limit, so k_f is below 1: α_b is then 1.0, from memory, verify.'
+  formFactor(question, new Working()) < FULL || plateRemark(question, AS.column.walls) !== null
+    ? 'A plate is beyond the yield limit, so k_f is below 1: α_b is then 1.0, from memory, verify.'
     : null;
 
 /** Table 6.3.3: 0 for a rolled I with flanges up to 40 mm, 0.5 for angles, tees, channels and what is not named, with k_f = 1; 1.0 below (verify). Tubes as cold formed, −0.5. */
@@ -89,7 +93,12 @@ export const AS: CompressionPack = {
         slender * Math.sqrt(kf) * Math.sqrt(fy / 250),
         'slenderness',
       );
-      const alphaB = working.given('section constant', 'α_b', constantOf(section.shape, kf), 'factor');
+      const alphaB = working.given(
+        'section constant',
+        'α_b',
+        constantOf(section.shape, question.slenderPlate ? Math.min(kf, BELOW) : kf),
+        'factor',
+      );
       const { alphaA, lambda, eta, xi, alphaC } = memberReduction(lambdaN, alphaB);
       working.step(
         'slenderness added, α_b 1',

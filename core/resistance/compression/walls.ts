@@ -51,7 +51,7 @@ export function withStoutPlates(
     steel.fy / over ** 2,
     'stress',
   );
-  return { ...question, steel: { ...steel, fy } };
+  return { ...question, steel: { ...steel, fy }, slenderPlate: true };
 }
 
 /** Says that a plate is slender, and what is done about it; null where none is. */

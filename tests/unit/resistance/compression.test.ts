@@ -379,6 +379,23 @@ describe('other shapes', () => {
     expect(alpha('is800', 'channel', 'α')).toBe(0.49);
   });
 
+  it('take the curve of slender plates by AS 4100 where one is beyond the yield limit', () => {
+    // AS 4100 Table 6.3.3 below k_f = 1, from memory: 1.0. A web of 150 × 3 is 50 times as wide as thick, beyond 45 at f_y 250.
+    const channel = (web: number) =>
+      compressionOf(
+        compressed(
+          'as4100',
+          { ...round, shape: 'channel', plates: [{ name: 'web', width: 150, thickness: web }] },
+          1000,
+          { fy: 250, more: { criticalLoad: 1e5 } },
+        ),
+        CRITICAL,
+      );
+    expect(stepOf(channel(4), 'α_b')).toBe(0.5);
+    expect(stepOf(channel(3), 'α_b')).toBe(1);
+    expect(channel(3).note).toContain('k_f is below 1');
+  });
+
   it('say what is not looked at in them', () => {
     const note = (shape: SectionShape) =>
       compressionOf(compressed('csaS16', { ...round, shape }, 1000, { fy: 300 }), CRITICAL).note;
