@@ -1,4 +1,5 @@
 /** What the forces of the combinations show: of the assumption "tension only", of what carries, and of how far it moves. */
+import { MOST_IN_EVERY_CHOICE, turnedInPart } from '../forces/combinationStates.ts';
 import type { ForceState, Forces } from '../forces/model.ts';
 import { motionInWords } from '../forces/motionWords.ts';
 import type { Bar, BarId } from '../layout/model.ts';
@@ -16,6 +17,7 @@ export function actingFindings(subject: FindingSubject): readonly Finding[] {
   if (!forces) return [];
   return [
     ...problemFindings(subject, forces),
+    ...turningsLeftOut(subject),
     ...noWayFindings(subject, forces),
     ...subject.layout.bays.flatMap((bay) => {
       const all = judgedIn(subject, bay);
@@ -54,6 +56,25 @@ function problemFindings(subject: FindingSubject, forces: Forces): readonly Find
     detail: `${what} ${todo} Until then it is left out.`,
     path,
   }));
+}
+
+function turningsLeftOut({ project, layout }: FindingSubject): readonly Finding[] {
+  const inPart = project.actions ? turnedInPart(project.actions) : [];
+  if (inPart.length === 0) return [];
+  const names = inPart.map(({ id, name }) => name.trim() || id);
+  return [
+    {
+      ...blank,
+      id: 'turnings-left-out',
+      kind: 'turnings left out',
+      severity: 'look into',
+      bay: layout.bays[0]?.id ?? '',
+      bars: [],
+      title: `Not every way of turning loads round is looked at in ${names.join(', ')}`,
+      detail: `More than ${MOST_IN_EVERY_CHOICE} cases act either way there. All together, each by itself and all but each are turned round, and no other choice of them. Part the combination if others can be worse.`,
+      path: 'actions.combinations',
+    },
+  ];
 }
 
 /** One for each motion: the same bays, with all states that find no way. */

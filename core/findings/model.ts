@@ -26,6 +26,7 @@ export type FindingKind =
   | 'both diagonals squeezed'
   | 'loses support when the partner goes slack'
   | 'load on nothing'
+  | 'turnings left out'
   | 'no way to carry a load'
   | 'reversed load not carried'
   | 'beam bends under the pull'

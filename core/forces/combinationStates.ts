@@ -1,16 +1,27 @@
 import type { Actions, Combination } from '../project/actions.ts';
 import type { CombinationState } from './model.ts';
 
-/** With more cases than this that act either way, they are turned round together only. */
-const MOST_TURNED_SINGLY = 5;
+/** With more cases than this that act either way, not every choice of them is turned round. */
+export const MOST_IN_EVERY_CHOICE = 5;
 
 /** Every combination with every way of turning round the cases that act either way, so that no direction is forgotten. */
 export function combinationStates(actions: Actions): readonly CombinationState[] {
   return actions.combinations.flatMap((combination) => statesOf(combination, actions));
 }
 
+/** Combinations of which not every choice of turnings is looked at. */
+export function turnedInPart(actions: Actions): readonly Combination[] {
+  return actions.combinations.filter(
+    (combination) =>
+      actingIn(combination, actions).filter(({ reverses }) => reverses).length > MOST_IN_EVERY_CHOICE,
+  );
+}
+
+const actingIn = ({ factors }: Combination, { cases }: Actions): Actions['cases'] =>
+  cases.filter(({ id }) => (factors[id] ?? 0) !== 0);
+
 function statesOf(combination: Combination, actions: Actions): readonly CombinationState[] {
-  const acting = actions.cases.filter(({ id }) => (combination.factors[id] ?? 0) !== 0);
+  const acting = actingIn(combination, actions);
   const either = acting.filter((each) => each.reverses).map(({ id }) => id);
   const named =
     combination.name.trim() ||
@@ -37,9 +48,15 @@ function statesOf(combination: Combination, actions: Actions): readonly Combinat
   );
 }
 
-/** As given, and turned round in every choice of them. */
+/** As given, and turned round in every choice of them; of many, all together, each by itself, and all but each. */
 function turnings(either: readonly string[]): readonly (readonly string[])[] {
-  if (either.length > MOST_TURNED_SINGLY) return [[], either];
+  if (either.length > MOST_IN_EVERY_CHOICE)
+    return [
+      [],
+      either,
+      ...either.map((id) => [id]),
+      ...either.map((id) => either.filter((other) => other !== id)),
+    ];
   return either.reduce<readonly (readonly string[])[]>(
     (found, id) => found.flatMap((turned) => [turned, [...turned, id]]),
     [[]],

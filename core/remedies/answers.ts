@@ -125,16 +125,17 @@ export function proposalsFor(
       return knownGrades(assessment, finding);
     case 'end detail too small':
       return usualDistances(assessment, finding);
-    case 'pretension lost':
-    case 'moves far before it works':
-    case 'both diagonals squeezed':
-    case 'loses support when the partner goes slack':
     case 'one bolt at an end':
       return strongerEnds(assessment, finding).slice(0, 1);
     case 'battens too far apart':
       return moreBattens(assessment, finding);
     case 'squeezed off its middle':
       return strongerEnds(assessment, finding);
+    case 'pretension lost':
+    case 'moves far before it works':
+    case 'both diagonals squeezed':
+    case 'loses support when the partner goes slack':
+    case 'turnings left out':
     case 'strut too weak':
     case 'strut too slender':
     case 'strut not checked':

@@ -1,8 +1,10 @@
 /** Forces on the whole framing, against statics by hand. N, mm. */
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
+import { assess } from '../../../core/assess.ts';
 import { stockOf } from '../../../core/catalogue/stock.ts';
 import { bowLoad, initialBow } from '../../../core/forces/bowForces.ts';
+import { combinationStates, turnedInPart } from '../../../core/forces/combinationStates.ts';
 import { forcesOf } from '../../../core/forces/forces.ts';
 import type { ForceState, Forces } from '../../../core/forces/model.ts';
 import { layOut } from '../../../core/layout/layOut.ts';
@@ -400,6 +402,31 @@ describe('a roof bay on two unlike walls that share its eaves', () => {
   it('leaves what acts across the building to its frames', () => {
     const state = only(forces([R, near, far], acting([wind([push('R/a.L0', [0, 20, 0])])], [alone('W')])));
     for (const [bar, force] of state.forces) expect(Math.abs(force), bar).toBeLessThan(50);
+  });
+});
+
+describe('loads that act either way', () => {
+  const cases = (count: number): readonly LoadCase[] =>
+    Array.from({ length: count }, (_, k) => wind([], { id: `W${k + 1}`, reverses: true }));
+  const all = (count: number): Actions =>
+    acting(cases(count), [
+      alone('W1', { factors: Object.fromEntries(cases(count).map(({ id }) => [id, 1])) }),
+    ]);
+  const turned = (count: number) => combinationStates(all(count)).map((state) => state.turned.length);
+
+  it('are turned round in every choice up to five of them', () => {
+    expect(turned(3)).toHaveLength(8);
+    expect(turned(5)).toHaveLength(32);
+    expect(turnedInPart(all(5))).toEqual([]);
+  });
+
+  it('beyond five all together, each by itself and all but each, and it is told that this is not every choice', () => {
+    expect([...turned(6)].sort()).toEqual([0, 1, 1, 1, 1, 1, 1, 5, 5, 5, 5, 5, 5, 6]);
+    expect(turnedInPart(all(6))).toHaveLength(1);
+    const { findings } = assess({ ...project([crossed()]), actions: all(6) }, CATALOGUES);
+    expect(findings.filter(({ kind }) => kind === 'turnings left out')).toMatchObject([
+      { severity: 'look into', breaksLimit: false },
+    ]);
   });
 });
 
