@@ -1,4 +1,5 @@
 import type { EndsHold } from '../restraint/endWords.ts';
+import type { BarShape } from '../section/barShape.ts';
 import type { Axis } from '../section/model.ts';
 
 /** One line of the bracing schedule: one diagonal. The JSON form of the command line; lengths mm, masses kg. Documented in README.md. */
@@ -18,6 +19,8 @@ export interface ScheduleRow {
   /** Lengths of the pieces of a cut bar; one entry otherwise. */
   readonly pieces: readonly number[];
   readonly crossingHoles: readonly number[];
+  /** Of anything but a single angle: what it is. */
+  readonly shape: BarShape['kind'] | null;
   readonly legInPlane: 'longer' | 'shorter';
   readonly heel: 'up' | 'down';
   readonly side: 'near' | 'far';

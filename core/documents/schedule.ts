@@ -71,6 +71,7 @@ function rowOf(
     cutLength: cut.total,
     pieces: cut.pieces.map((piece) => piece.to - piece.from),
     crossingHoles: cut.holes.map(({ fromEndA }) => fromEndA),
+    shape: angle.stock?.outline.shape?.kind ?? null,
     legInPlane: spec.legInPlane,
     heel: spec.heel,
     side: angle.side,

@@ -63,7 +63,7 @@ export function extentOf(shape: BarShape): readonly [number, number] {
 }
 
 /** Whether the gusset goes through the middle of the shape, or lies against its face. */
-export function isCentred({ kind }: BarShape): boolean {
+export function isCentred({ kind }: Pick<BarShape, 'kind'>): boolean {
   return kind !== 'flat' && kind !== 'tee' && kind !== 'channel';
 }
 

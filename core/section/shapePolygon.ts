@@ -2,7 +2,7 @@ import type { Vec2 } from '../geometry/vector.ts';
 import { type BarShape, extentOf } from './barShape.ts';
 import type { AngleOutline } from './model.ts';
 
-/** A shape as one closed run of straight pieces for drawing, anticlockwise; tubes solid, the two angles of a pair joined by the gap's width. */
+/** A shape as one closed run of straight pieces for drawing, anticlockwise; tubes solid (see `hollowOf`), the two angles of a pair joined by the gap's width. */
 export function shapePolygon(
   shape: BarShape,
   angleOf: (outline: AngleOutline) => readonly Vec2[],
@@ -66,4 +66,15 @@ export function shapePolygon(
     default:
       return shape satisfies never;
   }
+}
+
+/** What a tube leaves empty inside, as a closed run; null for what is solid. */
+export function hollowOf(shape: BarShape): readonly Vec2[] | null {
+  if (shape.kind !== 'round tube' && shape.kind !== 'square tube') return null;
+  const [wide] = extentOf(shape);
+  const shrunk = 1 - (2 * shape.wall) / wide;
+  const middle = wide / 2;
+  return shapePolygon(shape, () => []).map(
+    ([x, y]): Vec2 => [middle + (x - middle) * shrunk, middle + (y - middle) * shrunk],
+  );
 }

@@ -5,6 +5,7 @@ import { outlinePolygon } from '../../section/outlinePath.ts';
 import { showLength } from '../../units/quantity.ts';
 import { listed } from '../listed.ts';
 import { type Markup, markup } from '../markup.ts';
+import { placedText } from '../placedText.ts';
 import { joinName } from '../words.ts';
 import { closedPath } from './path.ts';
 import { acrossOf, type Point } from './view.ts';
@@ -129,7 +130,10 @@ function labelPlace(outline: readonly Point[], onSheet: (at: Point) => Point): P
 
 function captionOf(cuts: readonly Cut[], { join, clash, gap }: Crossing): string {
   const placed = cuts
-    .map(({ bar, angle }) => `${bar.mark} ${angle.side} side, heel ${angle.spec.heel}`)
+    .map(({ bar, angle }) => {
+      const shape = angle.stock?.outline.shape?.kind ?? null;
+      return `${bar.mark} ${placedText({ shape, side: angle.side, heel: angle.spec.heel })}`;
+    })
     .join('; ');
   if (clash)
     return `${placed}. Both cannot pass: they run into each other by ${Math.round(-gap)} mm. ${sentence(joinName(join))}.`;

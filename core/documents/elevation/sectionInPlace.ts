@@ -2,6 +2,7 @@ import { add, cross, dot, scale, type Vec3 } from '../../geometry/vector.ts';
 import type { AngleBar, Bar, Plane } from '../../layout/model.ts';
 import type { Restraint } from '../../restraint/model.ts';
 import { outlinePolygon } from '../../section/outlinePath.ts';
+import { hollowOf } from '../../section/shapePolygon.ts';
 import { type Markup, markup } from '../markup.ts';
 import { closedPath } from './path.ts';
 import { acrossOf, type Point } from './view.ts';
@@ -33,6 +34,10 @@ export function sectionInPlace(bar: Bar, angle: AngleBar, plane: Plane, restrain
   const outline = outlinePolygon(stock.outline, ARC_STEPS).map(([x, y]) =>
     flat(inSpace(x - centroidX, y - centroidY)),
   );
+  const { shape } = stock.outline;
+  const hollow = ((shape && hollowOf(shape)) ?? []).map(([x, y]) =>
+    flat(inSpace(x - centroidX, y - centroidY)),
+  );
   const reach = Math.max(...outline.map(([x, y]) => Math.hypot(x, y)));
   const pxPerMm = (RING - 14) / reach;
   const onSheet = ([x, y]: Point): Point => [MIDDLE + x * pxPerMm, MIDDLE - y * pxPerMm];
@@ -46,7 +51,7 @@ export function sectionInPlace(bar: Bar, angle: AngleBar, plane: Plane, restrain
   const { freeDirection } = restraint.governing;
   const free = freeDirection && flat(inSpace(freeDirection[0], freeDirection[1]));
   const gusset = gussetBeside(angle, plane, flat, inSpace(centroidX, centroidY), onSheet);
-  return markup`<svg width="${SIZE}" height="${SIZE}" viewBox="0 0 ${SIZE} ${SIZE}" role="img" aria-label="Section of ${bar.mark} in place">${gusset}<path class="cutnear dotted" d="${closedPath(outline.map(onSheet))}"/>${axes.map(([name, direction]) => axisLine(name, direction))}<circle cx="${MIDDLE}" cy="${MIDDLE}" r="2"/>${ring(free)}</svg>`;
+  return markup`<svg width="${SIZE}" height="${SIZE}" viewBox="0 0 ${SIZE} ${SIZE}" role="img" aria-label="Section of ${bar.mark} in place">${gusset}<path class="cutnear dotted" fill-rule="evenodd" d="${closedPath(outline.map(onSheet))}${hollow.length === 0 ? '' : closedPath(hollow.map(onSheet))}"/>${axes.map(([name, direction]) => axisLine(name, direction))}<circle cx="${MIDDLE}" cy="${MIDDLE}" r="2"/>${ring(free)}</svg>`;
 }
 
 /** What the ring cuts off is left out; all rings are the same, so that one clip serves a document. */

@@ -4,6 +4,7 @@ import type { Verdict } from '../../practice/model.ts';
 import type { EndConnection, LengthOverride, UnitSystem } from '../../project/model.ts';
 import { endsHoldOf, endsMarkedFree } from '../../restraint/endWords.ts';
 import type { Restraint } from '../../restraint/model.ts';
+import { isCentred } from '../../section/barShape.ts';
 import { AXES, type Axis } from '../../section/model.ts';
 import { grouped } from '../../units/figures.ts';
 import { showLength, showMass, showMassPerMetre, showRadius, showSlenderness } from '../../units/quantity.ts';
@@ -127,7 +128,14 @@ function placedWords(bar: Bar, angle: AngleBar, { layout }: Assessment, units: U
   const area = stock
     ? ` ${stock.basis === 'published' ? 'Properties as published' : 'Properties from the outline'}, ${showMassPerMetre(stock.massPerMetre, units)}.`
     : ' Not in stock: no properties.';
-  return `From ${i} (i) to ${j} (j). ${side === 'near' ? 'Near' : 'Far'} side of the gusset, heel ${spec.heel}, ${leg} in the plane${roll}. ${counted}, ${spec.grade}. Ends: i ${endWords(angle.ends.i, units)}; j ${endWords(angle.ends.j, units)}. Cut ${showLength(cut.total, units, 'spoken')}${weight}.${area}`;
+  const shape = stock?.outline.shape;
+  const onSide = `${side === 'near' ? 'Near' : 'Far'} side of the gusset`;
+  const placed = shape
+    ? isCentred(shape)
+      ? 'The gusset through its middle'
+      : onSide
+    : `${onSide}, heel ${spec.heel}, ${leg} in the plane`;
+  return `From ${i} (i) to ${j} (j). ${placed}${roll}. ${counted}, ${spec.grade}. Ends: i ${endWords(angle.ends.i, units)}; j ${endWords(angle.ends.j, units)}. Cut ${showLength(cut.total, units, 'spoken')}${weight}.${area}`;
 }
 
 function endWords(end: EndConnection, units: UnitSystem): string {

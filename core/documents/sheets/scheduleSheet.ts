@@ -7,6 +7,7 @@ import { inlineSign, statusSign } from '../elevation/signs.ts';
 import { nearnessFill } from '../hatches.ts';
 import { type Markup, markup } from '../markup.ts';
 import type { RowVerdict, ScheduleRow } from '../model.ts';
+import { placedText } from '../placedText.ts';
 import type { ReportOptions } from '../reportOptions.ts';
 import { designationText } from '../words.ts';
 import { axisName } from './axisName.ts';
@@ -39,10 +40,10 @@ export function scheduleSheet(assessment: Assessment, bay: BayLayout, { units }:
 /** Side and heel, and which leg lies in the plane where the legs differ. */
 function placed(row: ScheduleRow, { layout }: Assessment): Markup {
   const leg =
-    layout.bars.get(row.bar)?.angle?.stock?.kind === 'equal'
+    row.shape !== null || layout.bars.get(row.bar)?.angle?.stock?.kind === 'equal'
       ? null
       : markup`<br>${row.legInPlane} leg in plane`;
-  return markup`${row.side}, heel ${row.heel}${leg}`;
+  return markup`${placedText(row)}${leg}`;
 }
 
 function emphasised(text: string, strong: boolean): Markup {

@@ -106,7 +106,7 @@ export function TautPart({
           )}
           {diagonal.bowing?.twist.governs === true && (
             <p className="bowing-note">
-              By bowing alone; twist takes {grouped((1 - diagonal.bowing.twist.ratio) * 100, 1)} % more.
+              With twist, which takes {grouped((1 - diagonal.bowing.twist.ratio) * 100, 1)} % of it now.
             </p>
           )}
         </>

@@ -35,6 +35,7 @@ export function BarMarks({ bar, angle, units }: BarMarksProps): JSX.Element {
   const find = useFindSection();
   const trying = useWindow((state) => state.trying !== null);
   const { spec, mark } = angle;
+  const shape = angle.stock?.outline.shape;
   const own = OWN.filter((key) => mark[key] !== undefined);
   const edit = (change: BarMark, what: string): string | null =>
     refusalText(actions.edit({ kind: 'bars', bars: [bar.id], change }, `Change ${what} of ${bar.mark}`));
@@ -75,24 +76,28 @@ export function BarMarks({ bar, angle, units }: BarMarksProps): JSX.Element {
           ]}
           onChange={(countedOn) => edit({ countedOn }, 'what is counted on')}
         />
-        <Segmented
-          label="Leg in plane"
-          value={spec.legInPlane}
-          options={[
-            { value: 'longer', label: 'Longer' },
-            { value: 'shorter', label: 'Shorter' },
-          ]}
-          onChange={(legInPlane) => edit({ legInPlane }, 'leg in plane')}
-        />
-        <Segmented
-          label="Heel"
-          value={spec.heel}
-          options={[
-            { value: 'up', label: 'Up' },
-            { value: 'down', label: 'Down' },
-          ]}
-          onChange={(heel) => edit({ heel }, 'heel')}
-        />
+        {shape === undefined && (
+          <>
+            <Segmented
+              label="Leg in plane"
+              value={spec.legInPlane}
+              options={[
+                { value: 'longer', label: 'Longer' },
+                { value: 'shorter', label: 'Shorter' },
+              ]}
+              onChange={(legInPlane) => edit({ legInPlane }, 'leg in plane')}
+            />
+            <Segmented
+              label="Heel"
+              value={spec.heel}
+              options={[
+                { value: 'up', label: 'Up' },
+                { value: 'down', label: 'Down' },
+              ]}
+              onChange={(heel) => edit({ heel }, 'heel')}
+            />
+          </>
+        )}
         <Segmented
           label="Side of gusset"
           value={angle.side}

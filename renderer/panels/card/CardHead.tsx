@@ -35,8 +35,8 @@ export function CardHead({ bar, angle, assessment, units }: CardHeadProps): JSX.
       </div>
       <p className="second">
         {bay === undefined ? bar.bay : `${bay.id} ${bay.name}`}.{' '}
-        {phrases.map((phrase, index) => (
-          <Phrase key={phrase} phrase={phrase} was={phrasesWas[index] ?? phrase} first={index === 0} />
+        {phrases.map(({ about, says }, index) => (
+          <Phrase key={about} phrase={says} was={phrasesWas[index]?.says ?? says} first={index === 0} />
         ))}
         .
       </p>

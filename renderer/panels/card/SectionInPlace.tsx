@@ -42,7 +42,13 @@ export function SectionInPlace({
       <g clipPath={`url(#${clip})`}>
         <path className="section-gusset" d={closed(gussetCorners(seen, gusset).map(onSheet))} />
         {partner !== null && <path className="section-partner" d={closed(partner.map(onSheet))} />}
-        <path className="section-angle" d={closed(seen.outline.map(onSheet))} />
+        <path
+          className="section-angle"
+          fillRule="evenodd"
+          d={
+            closed(seen.outline.map(onSheet)) + (seen.hollow === null ? '' : closed(seen.hollow.map(onSheet)))
+          }
+        />
       </g>
       {(['x', 'y', 'u', 'v'] as const).map((axis) => (
         <AxisLine key={axis} name={axis} direction={seen.axes[axis]} />

@@ -4,10 +4,13 @@ import type { StockAngle } from '../../../core/catalogue/model.ts';
 import { cross, dot, scale, subtract, type Vec2, type Vec3 } from '../../../core/geometry/vector.ts';
 import type { AngleBar, Bar } from '../../../core/layout/model.ts';
 import { outlinePolygon } from '../../../core/section/outlinePath.ts';
+import { hollowOf } from '../../../core/section/shapePolygon.ts';
 
 export interface SeenSection {
   /** Outline of the angle. */
   readonly outline: readonly Vec2[];
+  /** What a tube leaves empty inside; null for what is solid. */
+  readonly hollow: readonly Vec2[] | null;
   /** Directions of the axes x, y, u, v in the picture, unit length. */
   readonly axes: Readonly<Record<'x' | 'y' | 'u' | 'v', Vec2>>;
   /** Unit vectors of "in plane, across the bar" and "out of plane" in the picture. */
@@ -29,10 +32,11 @@ export function seenSection(bar: Bar, angle: AngleBar, stock: StockAngle): SeenS
   const inPicture = ([x, y]: Vec2): Vec2 => flat(mixed(placement.x, x, placement.y, y));
   const heelToCentroid = mixed(placement.x, centroidX, placement.y, centroidY);
   const centroid = subtract(placement.heel, scale(heelToCentroid, -1));
+  const fromCentroid = ([x, y]: Vec2): Vec2 => inPicture([x - centroidX, y - centroidY]);
+  const { shape } = stock.outline;
   return {
-    outline: outlinePolygon(stock.outline, STEPS_PER_ARC).map(([x, y]) =>
-      inPicture([x - centroidX, y - centroidY]),
-    ),
+    outline: outlinePolygon(stock.outline, STEPS_PER_ARC).map(fromCentroid),
+    hollow: (shape && hollowOf(shape)?.map(fromCentroid)) ?? null,
     axes: {
       x: inPicture([1, 0]),
       y: inPicture([0, 1]),

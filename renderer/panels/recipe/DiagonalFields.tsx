@@ -1,5 +1,6 @@
 import type { JSX } from 'react';
 import type { Bay, UnitSystem } from '../../../core/project/model.ts';
+import { isCentred } from '../../../core/section/barShape.ts';
 import { useFindSection } from '../../assessing/useFindSection.ts';
 import { useStockChoices } from '../../assessing/useStockChoices.ts';
 import { LengthField } from '../../controls/LengthField.tsx';
@@ -36,6 +37,12 @@ export function DiagonalFields({
     const layout = shownAssessment(state)?.layout;
     const first = layout?.bays.find(({ id }) => id === bay.id)?.diagonals[0];
     return layout?.bars.get(first ?? '')?.angle?.placement.gauge ?? 40;
+  });
+  // Only an angle has legs and a heel, and what the gusset goes through lies on neither side of it.
+  const shape = useWindow((state) => {
+    const layout = shownAssessment(state)?.layout;
+    const first = layout?.bays.find(({ id }) => id === bay.id)?.diagonals[0];
+    return layout?.bars.get(first ?? '')?.angle?.stock?.outline.shape?.kind ?? null;
   });
   const own = Object.keys(bay.bars).filter((key) => bay.bars[key]?.section !== undefined);
   return (
@@ -79,34 +86,40 @@ export function DiagonalFields({
         check={(text) => (text === '' ? 'Name the grade, such as S355JR.' : null)}
         onChange={(grade) => edit({ grade }, 'grade')}
       />
-      <Segmented
-        label={bay.recipe.kind === 'roof' ? 'Leg in slope' : 'Leg in plane'}
-        value={diagonals.legInPlane}
-        was={was !== null && was.legInPlane !== diagonals.legInPlane ? was.legInPlane : null}
-        options={[
-          { value: 'longer', label: 'Longer' },
-          { value: 'shorter', label: 'Shorter' },
-        ]}
-        onChange={(legInPlane) => edit({ legInPlane }, 'leg in plane')}
-      />
-      <Segmented
-        label="Bars placed"
-        value={diagonals.arrangement}
-        options={[
-          { value: 'opposite', label: 'Back to back' },
-          { value: 'same side', label: 'One side' },
-        ]}
-        onChange={(arrangement) => edit({ arrangement }, 'bars placed')}
-      />
-      <Segmented
-        label="Heel"
-        value={diagonals.heel}
-        options={[
-          { value: 'up', label: 'Up' },
-          { value: 'down', label: 'Down' },
-        ]}
-        onChange={(heel) => edit({ heel }, 'heel')}
-      />
+      {shape === null && (
+        <Segmented
+          label={bay.recipe.kind === 'roof' ? 'Leg in slope' : 'Leg in plane'}
+          value={diagonals.legInPlane}
+          was={was !== null && was.legInPlane !== diagonals.legInPlane ? was.legInPlane : null}
+          options={[
+            { value: 'longer', label: 'Longer' },
+            { value: 'shorter', label: 'Shorter' },
+          ]}
+          onChange={(legInPlane) => edit({ legInPlane }, 'leg in plane')}
+        />
+      )}
+      {(shape === null || !isCentred({ kind: shape })) && (
+        <Segmented
+          label="Bars placed"
+          value={diagonals.arrangement}
+          options={[
+            { value: 'opposite', label: 'Back to back' },
+            { value: 'same side', label: 'One side' },
+          ]}
+          onChange={(arrangement) => edit({ arrangement }, 'bars placed')}
+        />
+      )}
+      {shape === null && (
+        <Segmented
+          label="Heel"
+          value={diagonals.heel}
+          options={[
+            { value: 'up', label: 'Up' },
+            { value: 'down', label: 'Down' },
+          ]}
+          onChange={(heel) => edit({ heel }, 'heel')}
+        />
+      )}
       <Segmented
         label="Counted on"
         value={diagonals.countedOn}

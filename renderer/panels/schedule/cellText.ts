@@ -1,5 +1,7 @@
 /** What each cell of the schedule says, on screen and when the table is copied. */
+
 import type { ScheduleRow } from '../../../core/documents/model.ts';
+import { placedText } from '../../../core/documents/placedText.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
 import { grouped } from '../../../core/units/figures.ts';
 import { showForce } from '../../../core/units/loads.ts';
@@ -30,9 +32,9 @@ export function cellText({ id, unit }: Column, seen: SeenRow, units: UnitSystem)
     case 'hand':
       return row.hand;
     case 'leg':
-      return row.legInPlane;
+      return row.shape === null ? row.legInPlane : '–';
     case 'placed':
-      return `${row.side}, heel ${row.heel}`;
+      return placedText(row);
     case 'governing':
       return governingText(row);
     case 'limit':
