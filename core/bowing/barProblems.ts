@@ -143,7 +143,11 @@ export function gripOf({ angle, section }: Pick<BowingBar, 'angle' | 'section'>)
 }
 
 /** With twist: holds grip at the bolts, twist is held where two bolts across hold it. */
-export function withTwist(problem: BarProblem, bar: BowingBar, steel: Steel): BarProblem {
+export function withTwist(
+  problem: BarProblem,
+  bar: Pick<BowingBar, 'angle' | 'section' | 'restraint'>,
+  steel: Steel,
+): BarProblem {
   const grip = gripOf(bar);
   return {
     ...problem,

@@ -60,6 +60,15 @@ export function singleLoad(bar: BowingBar, steel: Steel): RealLoad {
   return realLoad(bowing, criticalLoad(withTwist(problem, bar, steel), { second: false }).N);
 }
 
+/** With all counted holds rigid, and twist: what a bar is worth before its framing is known, N. */
+export function rigidLoadWithTwist(
+  bar: Pick<BowingBar, 'angle' | 'section' | 'restraint'>,
+  steel: Steel,
+): number {
+  const problem = { ...bareBar(bar, steel), holds: rigidHolds(bar) };
+  return Math.min(loadOf(problem), loadOf(withTwist(problem, bar, steel)));
+}
+
 /** The bar and its partner together, each with its own bowing, twist and force; null when nothing presses either of them. */
 export function pairLoad(bar: BowingBar, partner: Partner, steel: Steel): RealLoad | null {
   const bowing = pairCriticalLoad(pairProblem(bar, partner, steel)).N;

@@ -1,3 +1,5 @@
+import { rigidLoadWithTwist } from '../bowing/bowing.ts';
+import { loadAtSlenderness } from '../bowing/critical.ts';
 import { type InServiceReading, inServiceSlenderness } from '../bowing/exactSlenderness.ts';
 import type { Catalogues, Stock, StockAngle } from '../catalogue/model.ts';
 import { stockOf } from '../catalogue/stock.ts';
@@ -187,7 +189,7 @@ interface Used {
   readonly says: string;
 }
 
-/** What acts on each bar against the candidate in its place, with the present bolts. The critical load is that of the in-service slenderness. */
+/** What acts on each bar against the candidate in its place, with the present bolts. The critical load is that of the in-service slenderness, or with rigid holds and twist where that is less. */
 function mostUsed(
   { project, practice, forces }: ShortlistSubject,
   readings: readonly Reading[],
@@ -199,11 +201,15 @@ function mostUsed(
     if (!seat.demands) return [];
     const steel = steelOf(input, seat.angle.spec.grade, stock.outline.thickness);
     if (!steel) return [];
-    const criticalLoad = (Math.PI ** 2 * steel.E * stock.properties.area) / inService.slenderness ** 2;
     const turned = withLeg(seat.angle, leg);
     const width = leg === 'longer' ? stock.outline.longLeg : stock.outline.shortLeg;
     const { gauge } = usualGauge(width, stock.catalogue === 'us' ? 'us' : 'metric');
     const angle = { ...turned, placement: { ...turned.placement, gauge } };
+    const bySlenderness = loadAtSlenderness(inService.slenderness, stock.properties.area, steel.E);
+    // Twist is asked of what is squeezed alone: it costs more than all the rest.
+    const criticalLoad = seat.demands.compression
+      ? Math.min(bySlenderness, rigidLoadWithTwist({ angle, section: stock.properties, restraint }, steel))
+      : bySlenderness;
     const found = sectionChecks(
       input,
       { bar: seat.bar, angle, stock, steel, restraint, criticalLoad },

@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { assess } from '../../../core/assess.ts';
 import type { Assessment } from '../../../core/assessment.ts';
 import { type BowingBar, planeWays, type Steel } from '../../../core/bowing/barProblems.ts';
+import { rigidLoadWithTwist } from '../../../core/bowing/bowing.ts';
 import { bayBowing } from '../../../core/bowing/bowings.ts';
 import { loadAgainstPartner, loadAgainstPosition } from '../../../core/bowing/curves.ts';
 import { BowingMemory } from '../../../core/bowing/memory.ts';
@@ -196,6 +197,19 @@ describe('twist of a crossed pair', () => {
       expect(Math.abs(twist.ratio / (twisting / bowingAlone) - 1)).toBeLessThan(0.005);
     },
   );
+
+  it('is in what a shortlist takes for a squeezed bar, its holds rigid: less than bowing alone, and that of the cut pair with nothing from its partner', () => {
+    const assessment = assessed(3201.562, { section: '120x120x10', gauge: 65 });
+    const restraint = assessment.diagonals.get(RISE)?.restraint;
+    const placed = assessment.layout.bars.get(RISE)?.angle;
+    if (!restraint || !placed?.stock) throw new Error('no bar');
+    const N = rigidLoadWithTwist(
+      { angle: placed, restraint, section: placed.stock.properties },
+      { E, G: 77_000 },
+    );
+    // One bar held in its plane alone is what is left of a pair squeezed alike: finite elements as above.
+    expect(Math.abs(N / 544_998 - 1)).toBeLessThan(1e-4);
+  });
 
   it('is in the plot against the partner, and in what is left when it goes slack', () => {
     const given = { section: '100x75x8', taut: 0.4 } as const;
