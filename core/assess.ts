@@ -10,7 +10,6 @@ import { memberChecks } from './checks/memberChecks.ts';
 import { memberLengths, squeezedMembers } from './checks/memberRuns.ts';
 import type { MemberChecks } from './checks/model.ts';
 import { governingSentence } from './documents/governingSentence.ts';
-import { scheduleRows } from './documents/schedule.ts';
 import { findingsOf } from './findings/findings.ts';
 import type { Finding, Severity } from './findings/model.ts';
 import type { Judged } from './findings/subject.ts';
@@ -18,6 +17,7 @@ import { turningSentence } from './findings/turning.ts';
 import type { BarId, BayLayout, Layout } from './layout/model.ts';
 import type { Practice } from './practice/model.ts';
 import type { Pattern, Project } from './project/model.ts';
+import { scheduleRows } from './schedule/scheduleRows.ts';
 
 /** By the marks alone, or with stiffness and critical loads beside them. */
 export type AssessmentDepth = 'by the marks' | 'all levels';

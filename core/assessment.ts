@@ -1,6 +1,5 @@
 import type { Bowing } from './bowing/model.ts';
 import type { BarChecks, MemberChecks } from './checks/model.ts';
-import type { ScheduleRow } from './documents/model.ts';
 import type { Finding, Severity } from './findings/model.ts';
 import type { Forces } from './forces/model.ts';
 import type { BarId, Layout } from './layout/model.ts';
@@ -8,6 +7,7 @@ import type { LimitInForce, Practice, Verdict } from './practice/model.ts';
 import type { Project } from './project/model.ts';
 import type { Restraint } from './restraint/model.ts';
 import type { FreeWays } from './restraint/movable.ts';
+import type { ScheduleRow } from './schedule/model.ts';
 
 /** Everything derived from a project. Plain data (Maps included): it crosses to and from workers as it is. */
 export interface Assessment {

@@ -1,10 +1,10 @@
 import type { UnitSystem } from '../project/model.ts';
 import { endsMarkedFree } from '../restraint/endWords.ts';
+import type { RowVerdict, ScheduleRow } from '../schedule/model.ts';
 import { AXES } from '../section/model.ts';
 import { forceIn } from '../units/loads.ts';
 import { KG_PER_POUND, MM_PER_INCH } from '../units/unitSystem.ts';
 import { type CsvCell, csvText } from './csv.ts';
-import type { RowVerdict, ScheduleRow } from './model.ts';
 import { overrideWords } from './overrideWords.ts';
 
 /** One column: its head, with the unit where it has one, and what stands under it. */

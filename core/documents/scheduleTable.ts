@@ -1,12 +1,12 @@
 import type { Finding } from '../findings/model.ts';
 import type { UnitSystem } from '../project/model.ts';
 import { endsMarkedFree } from '../restraint/endWords.ts';
+import type { RowVerdict, ScheduleRow } from '../schedule/model.ts';
 import { AXES } from '../section/model.ts';
 import { grouped } from '../units/figures.ts';
 import { showForce, showUse } from '../units/loads.ts';
 import { showLength, showSlenderness } from '../units/quantity.ts';
 import { KG_PER_POUND, unitNames } from '../units/unitSystem.ts';
-import type { RowVerdict, ScheduleRow } from './model.ts';
 import { oneLine } from './oneLine.ts';
 import { overrideWords } from './overrideWords.ts';
 import { type TextColumn, textTable } from './textTable.ts';

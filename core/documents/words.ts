@@ -1,8 +1,6 @@
 /** The words that every document and screen uses for joins, statuses and reasons. Chosen here once. */
 import type { CatalogueId } from '../catalogue/model.ts';
-import type { Crossing } from '../layout/model.ts';
 import { JOIN_NAMES } from '../project/joinNames.ts';
-import type { Join } from '../project/model.ts';
 import type { Claim, HoldDirection, HoldReason, TrailStep } from '../restraint/model.ts';
 
 /** A designation as it is printed: "70×70×6" for "70x70x6". */
@@ -14,19 +12,6 @@ export function designationText(designation: string): string {
 export function joinKindName(join: Claim['join']): string {
   if (join === 'end') return 'end connection';
   return join === 'bar end' ? 'end of another bar' : JOIN_NAMES[join];
-}
-
-export const UNMARKED = 'unmarked, taken as not joined';
-
-/** The name of a crossing's join; "unmarked…" where the user has marked nothing. */
-export function joinName(join: Join | null): string {
-  return join === null ? UNMARKED : JOIN_NAMES[join.kind];
-}
-
-/** The join as one of its two bars meets it: of a cut join, whether this bar is the one that is cut. */
-export function joinNameFor(crossing: Crossing, barKey: string): string {
-  if (crossing.join?.kind !== 'cut') return joinName(crossing.join);
-  return crossing.join.cutBar === barKey ? 'cut and plated' : 'runs through, partner cut';
 }
 
 export type Status = 'over' | 'near' | 'within' | 'unknown';

@@ -1,7 +1,7 @@
 import { assess } from '../assess.ts';
 import type { Assessment } from '../assessment.ts';
 import type { Catalogues } from '../catalogue/model.ts';
-import { joinName } from '../documents/words.ts';
+import { joinName } from '../layout/joinWords.ts';
 import type { BarId, Crossing } from '../layout/model.ts';
 import { applyEdit } from '../project/applyEdit.ts';
 import type { Reliance } from './model.ts';

@@ -14,6 +14,7 @@ export const ROOMS: readonly (readonly string[])[] = [
   ['checks'],
   ['cases', 'shortlist'],
   ['findings'],
+  ['schedule'],
   ['documents'],
   ['assess'],
   ['remedies', 'study'],

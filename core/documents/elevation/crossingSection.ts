@@ -1,4 +1,5 @@
 import { add, dot, scale, type Vec3 } from '../../geometry/vector.ts';
+import { joinName } from '../../layout/joinWords.ts';
 import type { AngleBar, Bar, Crossing, Layout, Plane } from '../../layout/model.ts';
 import type { UnitSystem } from '../../project/model.ts';
 import { outlinePolygon } from '../../section/outlinePath.ts';
@@ -6,7 +7,6 @@ import { showLength } from '../../units/quantity.ts';
 import { listed } from '../listed.ts';
 import { type Markup, markup } from '../markup.ts';
 import { placedText } from '../placedText.ts';
-import { joinName } from '../words.ts';
 import { closedPath } from './path.ts';
 import { acrossOf, type Point } from './view.ts';
 

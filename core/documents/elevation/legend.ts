@@ -1,6 +1,7 @@
+import { UNMARKED } from '../../layout/joinWords.ts';
 import { JOIN_NAMES } from '../../project/joinNames.ts';
 import { type Markup, markup } from '../markup.ts';
-import { STATUS_NAMES, UNMARKED } from '../words.ts';
+import { STATUS_NAMES } from '../words.ts';
 import type { Elevation } from './elevation.ts';
 import { type JoinShape, joinGlyph } from './joinGlyph.ts';
 import { inlineSign, statusSign } from './signs.ts';

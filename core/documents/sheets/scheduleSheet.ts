@@ -1,12 +1,12 @@
 import type { Assessment } from '../../assessment.ts';
 import type { BayLayout } from '../../layout/model.ts';
+import type { RowVerdict, ScheduleRow } from '../../schedule/model.ts';
 import { AXES } from '../../section/model.ts';
 import { grouped } from '../../units/figures.ts';
 import { showLength, showMass, showSlenderness } from '../../units/quantity.ts';
 import { inlineSign, statusSign } from '../elevation/signs.ts';
 import { nearnessFill } from '../hatches.ts';
 import { type Markup, markup } from '../markup.ts';
-import type { RowVerdict, ScheduleRow } from '../model.ts';
 import { placedText } from '../placedText.ts';
 import type { ReportOptions } from '../reportOptions.ts';
 import { designationText } from '../words.ts';

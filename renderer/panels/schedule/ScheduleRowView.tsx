@@ -1,6 +1,6 @@
 import type { JSX } from 'react';
-import type { ScheduleRow } from '../../../core/documents/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
+import type { ScheduleRow } from '../../../core/schedule/model.ts';
 import { NearnessChip } from '../../glyphs/NearnessChip.tsx';
 import { SeverityGlyph } from '../../glyphs/SeverityGlyph.tsx';
 import { STATUS_WORDS, StatusGlyph } from '../../glyphs/StatusGlyph.tsx';

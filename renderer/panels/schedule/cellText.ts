@@ -1,8 +1,8 @@
 /** What each cell of the schedule says, on screen and when the table is copied. */
 
-import type { ScheduleRow } from '../../../core/documents/model.ts';
 import { placedText } from '../../../core/documents/placedText.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
+import type { ScheduleRow } from '../../../core/schedule/model.ts';
 import { grouped } from '../../../core/units/figures.ts';
 import { showForce } from '../../../core/units/loads.ts';
 import { showLength, showMass, showSlenderness } from '../../../core/units/quantity.ts';

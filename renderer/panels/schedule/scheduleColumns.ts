@@ -1,5 +1,5 @@
 /** The columns of the schedule, with how wide each is and what it is sorted by. */
-import type { ScheduleRow } from '../../../core/documents/model.ts';
+import type { ScheduleRow } from '../../../core/schedule/model.ts';
 import type { SeenRow } from './seenRow.ts';
 
 export type ColumnId =

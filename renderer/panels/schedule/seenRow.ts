@@ -1,5 +1,5 @@
 import type { Bowing } from '../../../core/bowing/model.ts';
-import type { ScheduleRow } from '../../../core/documents/model.ts';
+import type { ScheduleRow } from '../../../core/schedule/model.ts';
 import type { Status } from '../../glyphs/StatusGlyph.tsx';
 
 /** A row of the schedule with how it stands. */

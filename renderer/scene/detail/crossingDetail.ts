@@ -1,6 +1,6 @@
-import { joinName } from '../../../core/documents/words.ts';
 import type { Vec2, Vec3 } from '../../../core/geometry/vector.ts';
 import { along, cross, dot, subtract } from '../../../core/geometry/vector.ts';
+import { joinName } from '../../../core/layout/joinWords.ts';
 import type { AngleBar, Bar, BarId, BayLayout, Crossing, Layout } from '../../../core/layout/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
 import { showLength } from '../../../core/units/quantity.ts';

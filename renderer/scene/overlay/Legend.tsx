@@ -1,5 +1,5 @@
 import type { RefObject } from 'react';
-import { UNMARKED } from '../../../core/documents/words.ts';
+import { UNMARKED } from '../../../core/layout/joinWords.ts';
 import type { Crossing } from '../../../core/layout/model.ts';
 import { JOIN_NAMES } from '../../../core/project/joinNames.ts';
 import type { JoinKind } from '../../../core/project/model.ts';

@@ -1,5 +1,5 @@
 import { type RefObject, useCallback, useImperativeHandle, useLayoutEffect, useRef } from 'react';
-import { joinName } from '../../../core/documents/words.ts';
+import { joinName } from '../../../core/layout/joinWords.ts';
 import type { Bar, Crossing, Layout } from '../../../core/layout/model.ts';
 import { JoinGlyph } from '../../glyphs/JoinGlyph.tsx';
 import { StatusGlyph } from '../../glyphs/StatusGlyph.tsx';

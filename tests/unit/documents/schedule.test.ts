@@ -1,8 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { assess } from '../../../core/assess.ts';
-import type { ScheduleRow } from '../../../core/documents/model.ts';
 import { scheduleCsv } from '../../../core/documents/scheduleCsv.ts';
 import { scheduleTable } from '../../../core/documents/scheduleTable.ts';
+import type { ScheduleRow } from '../../../core/schedule/model.ts';
 import { bay, line, project, roof } from '../assess/given/bays.ts';
 import { CATALOGUES } from '../assess/given/catalogues.ts';
 import { crossedTier, RISE } from './given.ts';

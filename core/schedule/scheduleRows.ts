@@ -1,5 +1,6 @@
 import type { BarChecks } from '../checks/model.ts';
 import type { Finding } from '../findings/model.ts';
+import { joinNameFor } from '../layout/joinWords.ts';
 import type { AngleBar, Bar, BarId, BayLayout, Crossing, Layout } from '../layout/model.ts';
 import type { LimitInForce, Verdict } from '../practice/model.ts';
 import type { Project } from '../project/model.ts';
@@ -7,7 +8,6 @@ import { endsHoldOf } from '../restraint/endWords.ts';
 import type { Lane, Restraint } from '../restraint/model.ts';
 import type { Axis } from '../section/model.ts';
 import type { RowVerdict, ScheduleRow } from './model.ts';
-import { joinNameFor } from './words.ts';
 
 /** What the schedule needs to know of one diagonal; `DiagonalAssessment` has it and more. */
 export interface ScheduledDiagonal {
