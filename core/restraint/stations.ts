@@ -107,7 +107,9 @@ export function endHolds(marked: EndHolds, direction: 'in plane' | 'out of plane
 
 function labelAcross(layout: Layout, crossing: Crossing, bar: Bar): string {
   const other = layout.bars.get(crossing.a === bar.id ? crossing.b : crossing.a);
-  return other ? (other.angle || other.line ? other.mark : other.role) : '?';
+  if (!other) return '?';
+  const named = other.angle || other.line || other.role === 'purlin' || other.role === 'rail';
+  return named ? other.mark : other.role;
 }
 
 /** A bar that ends on this one holds it along itself, if its other end is held: a knee or fly brace, "as its geometry gives". */

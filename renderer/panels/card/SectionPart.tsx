@@ -38,7 +38,7 @@ export function SectionPart({
   const partner = partnerOf(bar, crossing, layout);
   const seen = seenSection(bar, angle, stock);
   const compass = compassOf(restraint, chosenCrossing);
-  const partnerOutline = partner?.angle == null ? null : seenPartner(bar, angle, stock, partner.angle);
+  const partnerOutline = partner === null ? null : seenPartner(bar, angle, stock, partner);
   return (
     <div className="section-part">
       <SectionInPlace

@@ -55,17 +55,19 @@ export function seenPartner(
   bar: Bar,
   angle: AngleBar,
   stock: StockAngle,
-  partner: AngleBar,
+  other: Bar,
 ): readonly Vec2[] | null {
-  if (partner.stock === null) return null;
+  const partner = other.angle;
+  if (partner?.stock == null) return null;
   const mine = seenSection(bar, angle, stock);
   const { placement } = partner;
   const { outOfPlane, inPlane } = placement;
   // The partner runs another way; it is drawn by how far it stands off the gusset and how it lies in the plane.
+  const planesApart = dot(subtract(other.from, bar.from), angle.placement.outOfPlane);
   const sameSide = dot(outOfPlane, angle.placement.outOfPlane) < 0 ? -1 : 1;
   const points = outlinePolygon(partner.stock.outline, STEPS_PER_ARC).map(([x, y]): Vec2 => {
     const at = subtract(placement.heel, scale(mixed(placement.x, x, placement.y, y), -1));
-    return [dot(at, outOfPlane) * sameSide, dot(at, inPlane)];
+    return [planesApart + dot(at, outOfPlane) * sameSide, dot(at, inPlane)];
   });
   const heights = points.map(([, along]) => along);
   const middle = (Math.max(...heights) + Math.min(...heights)) / 2;

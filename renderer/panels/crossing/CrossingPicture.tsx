@@ -1,7 +1,9 @@
 import { type JSX, useId } from 'react';
+import type { StockAngle } from '../../../core/catalogue/model.ts';
 import { add, dot, subtract, type Vec2 } from '../../../core/geometry/vector.ts';
 import type { Bar, BarId, Crossing, Layout } from '../../../core/layout/model.ts';
 import type { UnitSystem } from '../../../core/project/model.ts';
+import { isCentred } from '../../../core/section/barShape.ts';
 import { showLength } from '../../../core/units/quantity.ts';
 import { type SeenSection, seenPartner, seenSection } from '../card/sectionGeometry.ts';
 
@@ -31,6 +33,8 @@ export function CrossingPicture({
   const bar = layout.bars.get(readBar);
   const other = layout.bars.get(crossing.a === readBar ? crossing.b : crossing.a);
   if (bar?.angle?.stock == null || other === undefined) return null;
+  if (!isBoltedFaceToFace(bar.angle.stock) || (other.angle?.stock && !isBoltedFaceToFace(other.angle.stock)))
+    return <p className="crossing-far">{withoutPicture(crossing, bar, other, units)}</p>;
   if (crossing.gap > FAR)
     return (
       <p className="crossing-far">
@@ -46,8 +50,7 @@ export function CrossingPicture({
     MIDDLE + (x - centre[0]) * scale,
     MIDDLE - (y - centre[1]) * scale,
   ];
-  const partner =
-    other.angle === null ? facing.strip : seenPartner(bar, bar.angle, bar.angle.stock, other.angle);
+  const partner = other.angle === null ? facing.strip : seenPartner(bar, bar.angle, bar.angle.stock, other);
   const { join } = crossing;
   return (
     <div className="crossing-picture">
@@ -81,6 +84,19 @@ export function CrossingPicture({
       </div>
     </div>
   );
+}
+
+/** Rods, tubes and pairs have the gusset through their middle: they meet otherwise than face to face. */
+function isBoltedFaceToFace({ outline: { shape } }: StockAngle): boolean {
+  return shape === undefined || !isCentred(shape);
+}
+
+function withoutPicture({ clash, gap }: Crossing, bar: Bar, other: Bar, units: UnitSystem): string {
+  if (clash)
+    return `${bar.mark} and ${other.mark} run through each other by ${showLength(-gap, units, 'small')}: the gusset goes through the middle of both. Cut one and plate it.`;
+  return gap < TOUCH
+    ? `${bar.mark} and ${other.mark} touch, or are bent past each other.`
+    : `${showLength(gap, units, 'small')} between ${bar.mark} and ${other.mark}.`;
 }
 
 function gapText({ gap }: Crossing, units: UnitSystem): string {

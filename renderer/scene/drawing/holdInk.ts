@@ -73,6 +73,17 @@ function clearest(notes: readonly Note[], taken: readonly Box[]): Note | undefin
   return notes.map((note) => ({ note, cost: covers(note) })).toSorted((a, b) => a.cost - b.cost)[0]?.note;
 }
 
+/** What holds there, by name; other bars that meet at the place and hold nothing are not named. */
+function holderNames({ claims, label }: Station): string {
+  const names = claims.flatMap(({ counted, direction, reason }) => {
+    if (!counted || direction === 'twist') return [];
+    if ('partner' in reason) return [reason.partner];
+    if ('line' in reason) return [reason.line];
+    return 'bar' in reason ? [reason.bar] : [];
+  });
+  return [...new Set(names)].join(' and ') || label;
+}
+
 /** A pair of arrows against stop bars: moving this way the bar is stopped. The words stand at either arrow. */
 function heldNotes(view: SheetView, bar: Bar, angle: AngleBar, station: Station): readonly Note[] {
   if (station.held.ways !== 1) return [];
@@ -80,7 +91,7 @@ function heldNotes(view: SheetView, bar: Bar, angle: AngleBar, station: Station)
   const way = heading(directionOnSheet(view, direction), 0.2 * view.pxPerMm);
   const at = onSheet(view, along(bar.from, bar.direction, station.at));
   const key = `held ${station.at}`;
-  const words = [`held ${named(angle, direction)}`, `by ${station.label}`];
+  const words = [`held ${named(angle, direction)}`, `by ${holderNames(station)}`];
   if (way === null) return [caption(key, 'scene-words strong', plus(at, [0, -22]), [0, -1], words)];
   const ways = upFirst(way);
   const arrow = (out: Vec2): string => line(from(at, out, TAIL), from(at, out, TIP + 6));

@@ -126,4 +126,18 @@ describe('glyphs of crossings', () => {
     expect(own?.[0]).toBeCloseTo(450, 6);
     expect(own?.[1]).toBeCloseTo(350, 6);
   });
+
+  it('stand apart where crossings lie behind each other: all tiers of a wall seen from above', () => {
+    const wall = crossedWall();
+    const { recipe } = wall;
+    if (recipe.kind !== 'wall') throw new Error('no wall');
+    const tiers = ['t1', 't2', 't3', 't4'].map((id) => ({ id, height: 3000, pattern: 'crossed' as const }));
+    const high = laidOut({ ...wall, recipe: { ...recipe, tiers } });
+    const crossings = [...high.crossings.values()];
+    expect(crossings).toHaveLength(4);
+    const places = [...crossingPlaces(sheet('plan'), high, crossings).values()];
+    for (const [index, a] of places.entries())
+      for (const b of places.slice(index + 1))
+        expect(Math.hypot(a[0] - b[0], a[1] - b[1])).toBeGreaterThan(22);
+  });
 });
