@@ -8,6 +8,7 @@ import { endsHoldOf } from '../restraint/endWords.ts';
 import type { Held, Restraint, Station } from '../restraint/model.ts';
 import { bothEndsHold } from '../restraint/rule.ts';
 import { endHolds } from '../restraint/stations.ts';
+import { isCentred } from '../section/barShape.ts';
 import type { SectionProperties } from '../section/model.ts';
 import { type BarProblem, type Hold, PINNED } from '../stability/model.ts';
 import type { PairBar } from '../stability/pair.ts';
@@ -135,9 +136,11 @@ export function stiffnessAlong({ ellipse }: Pick<StationStiffness, 'ellipse'>, w
   return 1 / flexibility;
 }
 
-/** Where a bolt of the leg in the plane grips the section, from the centroid, mm: on the gauge line, at the face of the leg. */
+/** Where a bolt grips the section, from the centroid, mm: on the gauge line, at the face against the gusset, or in the middle where the gusset goes through it. */
 export function gripOf({ angle, section }: Pick<BowingBar, 'angle' | 'section'>): Vec2 {
   const { gauge } = angle.placement;
+  const shape = angle.stock?.outline.shape;
+  if (shape && isCentred(shape)) return [0, gauge - section.centroidY];
   const [x, y] = angle.spec.legInPlane === 'longer' ? [0, gauge] : [gauge, 0];
   return [x - section.centroidX, y - section.centroidY];
 }

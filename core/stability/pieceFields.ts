@@ -41,15 +41,22 @@ function bowingFields({ E, section }: BarProblem): FieldsAt {
   };
 }
 
-function twistFields({ E, section }: BarProblem, G: number): FieldsAt {
+/**
+ * Solid bars and tubes hardly warp: their warping constant is 0 in the tables, and without any the twist is no bar that bends. So much of their torsion stiffness stands in
+ * for it, over the length squared, that it adds π² of these parts to what resists a half-wave of twist.
+ */
+const LEAST_WARPING = 1e-6;
+
+function twistFields({ E, length, section }: BarProblem, G: number): FieldsAt {
   const { weak, strong } = principalMotions(section.alpha);
   const [sx, sy] = section.shearCentre;
   // Shear centre in principal directions: a along the weak motion, b along the strong.
   const a = sx * weak[0] + sy * weak[1];
   const b = sx * strong[0] + sy * strong[1];
   const polar = a * a + b * b + (section.Iu + section.Iv) / section.area;
-  const root = [Math.sqrt(E * section.Iv), Math.sqrt(E * section.Iu), Math.sqrt(E * section.Iw)] as const;
   const torsion = G * section.J;
+  const warping = Math.max(E * section.Iw, LEAST_WARPING * torsion * length * length);
+  const root = [Math.sqrt(E * section.Iv), Math.sqrt(E * section.Iu), Math.sqrt(warping)] as const;
   const fields = {
     count: 3,
     EI: Float64Array.of(1, 1, 1),

@@ -198,6 +198,17 @@ describe('twist of a crossed pair', () => {
     },
   );
 
+  it.each(['ROD 20', 'CHS 76.1x4', 'SHS 60x4', 'FL 80x8'])(
+    'takes nothing from %s, which bows long before it twists, gripped through its middle or at its face',
+    (section) => {
+      const { twist, real, rigid } = bowing(3200, { section });
+      expect(twist.governs).toBe(false);
+      expect(twist.ratio).toBeCloseTo(1, 4);
+      // An equal slack partner that runs through: K = .713 (METHODS.md, "Taut partner").
+      expect(Math.sqrt(rigid.N / real.N)).toBeCloseTo(0.713, 3);
+    },
+  );
+
   it('is in what a shortlist takes for a squeezed bar, its holds rigid: less than bowing alone, and that of the cut pair with nothing from its partner', () => {
     const assessment = assessed(3201.562, { section: '120x120x10', gauge: 65 });
     const restraint = assessment.diagonals.get(RISE)?.restraint;
