@@ -57,6 +57,7 @@ function noLength(subject: FindingSubject, { bar, angle }: Judged): Finding {
     id: `length:${bar.id}`,
     kind: 'no length left',
     severity: 'must fix',
+    breaksLimit: true,
     bay: bar.bay,
     bars: [bar.id],
     title: `The ends of ${bar.mark} leave no steel`,

@@ -12,6 +12,7 @@ export type FindingKind =
   | 'no partner'
   | 'beam takes the pull'
   | 'steep or flat'
+  | 'out of the plane'
   | 'sag'
   | 'override in force'
   | 'section unknown'

@@ -22,7 +22,11 @@ export function patternFindings(subject: FindingSubject): readonly Finding[] {
     const bay = subject.project.bays[subject.places.get(layout.id) ?? -1];
     if (!bay) return [];
     const all = judgedIn(subject, layout);
-    return [...tensionFindings(subject, bay, layout, all), ...slopeFindings(layout, all)];
+    return [
+      ...tensionFindings(subject, bay, layout, all),
+      ...slopeFindings(layout, all),
+      ...outOfPlane(subject, layout, all),
+    ];
   });
 }
 
@@ -150,6 +154,36 @@ function slopeFindings(layout: BayLayout, all: readonly Judged[]): readonly Find
       limit: worst.angle.inclination < 45 ? FLATTEST : STEEPEST,
       quantity: 'angle',
       path: null,
+    },
+  ];
+}
+
+/** A diagonal this far out of the plane of its bay is not one of it: sin 10°, as directions count as one. */
+const OUT_OF_PLANE = Math.sin((10 * Math.PI) / 180);
+
+/** A bay drawn freely has one plane: crossings, legs and ways are read in it. Knees and ties may leave it. */
+function outOfPlane(subject: FindingSubject, bay: BayLayout, all: readonly Judged[]): readonly Finding[] {
+  const [plane] = bay.planes;
+  if (bay.kind !== 'free' || !plane) return [];
+  const out = all.filter(
+    ({ bar }) => bar.role === 'diagonal' && Math.abs(dot(bar.direction, plane.normal)) > OUT_OF_PLANE,
+  );
+  if (out.length === 0) return [];
+  return [
+    {
+      id: `out-of-plane:${bay.id}`,
+      kind: 'out of the plane',
+      severity: 'look into',
+      breaksLimit: false,
+      bay: bay.id,
+      bars: out.map(({ bar }) => bar.id),
+      crossing: null,
+      title: `${marksInWords(out)} ${isAre(out)} out of the plane of ${bay.id}`,
+      detail: `A bay drawn freely has one plane, in which crossings are found and “in plane” and “out of plane” are read; ${marksInWords(out)} ${out.length > 1 ? 'leave' : 'leaves'} it. Draw what lies in another plane as another bay: nodes at one place are one.`,
+      value: null,
+      limit: null,
+      quantity: 'none',
+      path: `${bayPath(subject, bay.id)}.recipe.bars`,
     },
   ];
 }

@@ -5,7 +5,7 @@
 
 import { memberSection } from '../frame/memberSection.ts';
 import { cross, dot, length, scale, subtract, unit, type Vec3 } from '../geometry/vector.ts';
-import type { Bar, BarId, BayLayout, Layout, Plane } from '../layout/model.ts';
+import type { Bar, BarId, BayLayout, Layout, NodeSupport, Plane } from '../layout/model.ts';
 import { rafterPoints } from './gableForces.ts';
 import type { AxialBar } from './model.ts';
 import { structuralMember } from './structuralMember.ts';
@@ -295,8 +295,9 @@ class PartBuilder {
     const standing = new Set(this.#bays.filter(({ kind }) => kind !== 'roof').flatMap(({ nodes }) => nodes));
     this.#nodes.forEach((id, k) => {
       const kinds = Object.entries(this.#layout.nodes.get(id)?.supports ?? {});
-      if (kinds.some(([bay, { kind }]) => own.has(bay) && (kind !== 'eaves' || !standing.has(id))))
-        supports.add(k);
+      const holds = (kind: NodeSupport['kind']): boolean =>
+        kind === 'eaves' ? !standing.has(id) : kind !== 'standing';
+      if (kinds.some(([bay, { kind }]) => own.has(bay) && holds(kind))) supports.add(k);
     });
     return supports;
   }

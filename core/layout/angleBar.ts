@@ -58,7 +58,7 @@ export function angleDraft(
     ends,
     stock: angle,
     nearest: found.ok ? [] : found.nearest,
-    inclination: (Math.acos(Math.min(1, Math.abs(dot(direction, plane.right)))) * 180) / Math.PI,
+    inclination: inclinationOf(direction, plane),
     placement: placementOf({
       direction,
       plane,
@@ -69,6 +69,15 @@ export function angleDraft(
       standsOff: shape && isCentred(shape) ? -extentOf(shape)[0] / 2 : spec.gusset / 2,
     }),
   };
+}
+
+/** To the level in an upright plane, whatever way the bar runs; along the eaves in a slope. Degrees. */
+function inclinationOf(direction: Vec3, plane: Plane): number {
+  const upright = Math.abs(plane.normal[2]) < 1e-6;
+  const angle = upright
+    ? Math.asin(Math.min(1, Math.abs(direction[2])))
+    : Math.acos(Math.min(1, Math.abs(dot(direction, plane.right))));
+  return (angle * 180) / Math.PI;
 }
 
 export function legInPlaneOf(angle: StockAngle, legInPlane: DiagonalSpec['legInPlane']): number {

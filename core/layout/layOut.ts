@@ -21,6 +21,7 @@ import type {
 } from './model.ts';
 import { placedSketch } from './placed.ts';
 import type { BaySketch, SketchBar } from './sketch.ts';
+import { withFeetOnBays } from './standing.ts';
 
 /** Sets a project out: every bay placed, nodes merged, bars with their sections, crossings found with their marks. */
 export function layOut(project: Project, stock: Stock): Layout {
@@ -34,7 +35,7 @@ export function layOut(project: Project, stock: Stock): Layout {
     for (const crossing of set.crossings) crossings.set(crossing.id, crossing);
     return set.layout;
   });
-  return { bays, nodes: register.all(), bars, crossings };
+  return { bays, nodes: withFeetOnBays(register.all(), bays), bars, crossings };
 }
 
 /** D1, D2, … by place. A bar with a mark of its own keeps its place in the count, so that naming it renames no other. */

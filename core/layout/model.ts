@@ -62,6 +62,8 @@ export interface Node {
 
 export type NodeSupport =
   | { readonly kind: 'foundation' }
+  /** The foot of a wall that stands on another bay: held if that bay holds this node. */
+  | { readonly kind: 'standing' }
   /** The eaves of a roof bay: held if the bays below hold this node; vouched for if there are none. */
   | { readonly kind: 'eaves' }
   | { readonly kind: 'vouched' };

@@ -140,6 +140,7 @@ export function proposalsFor(
     case 'strut too slender':
     case 'strut not checked':
     case 'steep or flat':
+    case 'out of the plane':
     case 'no length left':
       return [];
     default:

@@ -23,13 +23,18 @@ export function endings(bay: BayLayout, layout: Layout): readonly (readonly [Bar
   });
 }
 
-/** Nodes of a bay that lie on one of its bars between that bar's ends. */
-export function nodesOnBars(bay: BayLayout, layout: Layout): ReadonlySet<string> {
+/** Nodes of a bay that lie on one of its bars between that bar's ends, of the bars that count. */
+export function nodesOnBars(
+  bay: BayLayout,
+  layout: Layout,
+  counts: (bar: Bar) => boolean,
+): ReadonlySet<string> {
   const nodesBeside = nodesInOrder(bay, layout);
   const on = new Set<string>();
   for (const id of bay.bars) {
     const bar = layout.bars.get(id);
-    if (bar) for (const node of nodesBeside(bar)) if (nodeLiesOn(layout, node, bar)) on.add(node);
+    if (bar && counts(bar))
+      for (const node of nodesBeside(bar)) if (nodeLiesOn(layout, node, bar)) on.add(node);
   }
   return on;
 }

@@ -19,7 +19,7 @@ export interface Arm {
 export interface BayHolding {
   readonly bay: BayLayout;
   readonly held: ReadonlyMap<string, NodeHolding>;
-  /** Eaves whose bay below does not hold them: node to that bay. */
+  /** Eaves and feet whose bay below does not hold them: node to that bay. */
   readonly freeBelow: ReadonlyMap<string, string>;
   /** Trails from nodes, kept as they are followed: hundreds of holds lead down the same few. */
   readonly trails: Map<string, readonly TrailStep[]>;
@@ -30,11 +30,24 @@ export type Holdings = ReadonlyMap<string, BayHolding>;
 /** Below this angle two bars count as one direction. */
 const SAME_DIRECTION = Math.sin((10 * Math.PI) / 180);
 
-/** Roofs come last: their eaves stand on what the walls hold. */
+/** From the lowest up, and roofs last: what stands on another bay is held as that one holds it. */
 export function holdingsOf(layout: Layout): Holdings {
   const standsOn = baysBelow(layout);
   const holdings = new Map<string, BayHolding>();
-  const order = [...layout.bays].sort((a, b) => Number(a.kind === 'roof') - Number(b.kind === 'roof'));
+  const lowest = new Map(
+    layout.bays.map((bay) => [
+      bay.id,
+      bay.nodes.reduce(
+        (least, id) => Math.min(least, layout.nodes.get(id)?.at[2] ?? least),
+        Number.POSITIVE_INFINITY,
+      ),
+    ]),
+  );
+  const order = [...layout.bays].sort(
+    (a, b) =>
+      Number(a.kind === 'roof') - Number(b.kind === 'roof') ||
+      (lowest.get(a.id) ?? 0) - (lowest.get(b.id) ?? 0),
+  );
   for (const bay of order) holdings.set(bay.id, grown(bay, layout, standsOn, holdings));
   return holdings;
 }
@@ -69,7 +82,8 @@ function grown(
   for (const id of bay.nodes) {
     const support = layout.nodes.get(id)?.supports[bay.id];
     if (!support) continue;
-    const bays = support.kind === 'eaves' ? (standsOn.get(id) ?? []) : [];
+    const onBays = support.kind === 'eaves' || support.kind === 'standing';
+    const bays = onBays ? (standsOn.get(id) ?? []).filter((other) => other !== bay.id) : [];
     const holder = bays.find((other) => holdings.get(other)?.held.has(id));
     if (bays.length > 0 && holder === undefined) freeBelow.set(id, bays[0] ?? '');
     else hold(id, { kind: 'support', support, below: holder ?? null });

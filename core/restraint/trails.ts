@@ -1,6 +1,6 @@
 /** The way from a hold to a support, step by step, for the screen and the checker. */
 import { cross, length, subtract } from '../geometry/vector.ts';
-import type { Bar, BarId, Layout } from '../layout/model.ts';
+import type { Bar, BarId, Layout, NodeSupport } from '../layout/model.ts';
 import type { Arm, BayHolding, Holdings } from './heldNodes.ts';
 import type { TrailStep } from './model.ts';
 
@@ -46,10 +46,11 @@ function shorterArm(holding: BayHolding, by: readonly [Arm, Arm]): Arm {
   return depth(by[1]) < depth(by[0]) ? by[1] : by[0];
 }
 
-function supportText(kind: 'foundation' | 'eaves' | 'vouched', below: string | null): string {
+function supportText(kind: NodeSupport['kind'], below: string | null): string {
   switch (kind) {
     case 'foundation':
       return 'on its foundation';
+    case 'standing':
     case 'eaves':
       return below ? `held by ${below} below` : 'taken as carried down by what stands below';
     case 'vouched':

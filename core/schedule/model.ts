@@ -16,7 +16,7 @@ export interface ScheduleRow {
   readonly setBackI: number;
   readonly setBackJ: number;
   readonly cutLength: number;
-  /** Lengths of the pieces of a cut bar; one entry otherwise. */
+  /** Lengths of the pieces of a cut bar; one entry otherwise, and none where no steel is left. */
   readonly pieces: readonly number[];
   readonly crossingHoles: readonly number[];
   /** Of anything but a single angle: what it is. */
@@ -31,7 +31,7 @@ export interface ScheduleRow {
   readonly mass: number | null;
   /** What is done at each crossing, in words. */
   readonly joins: readonly string[];
-  /** Null where the section is not in stock. */
+  /** Null where the section is not in stock, or no steel is left. */
   readonly unbraced: Readonly<Record<Axis, number>> | null;
   readonly radius: Readonly<Record<Axis, number>> | null;
   readonly slenderness: Readonly<Record<Axis, number>> | null;

@@ -69,7 +69,7 @@ function rowOf(
     setBackI: ends.i.setBack,
     setBackJ: ends.j.setBack,
     cutLength: cut.total,
-    pieces: cut.pieces.map((piece) => piece.to - piece.from),
+    pieces: cut.total > 0 ? cut.pieces.map((piece) => piece.to - piece.from) : [],
     crossingHoles: cut.holes.map(({ fromEndA }) => fromEndA),
     shape: angle.stock?.outline.shape?.kind ?? null,
     legInPlane: spec.legInPlane,

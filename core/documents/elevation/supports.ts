@@ -20,7 +20,7 @@ export function nodeMarks(
 
 /** Whether a point is held by something else than a foundation, which has a sign of its own. */
 export function isHeldPoint(kind: NodeSupport['kind'] | undefined): boolean {
-  return kind === 'eaves' || kind === 'vouched';
+  return kind === 'standing' || kind === 'eaves' || kind === 'vouched';
 }
 
 function supportMark(kind: NodeSupport['kind'], x: number, y: number, plane: Plane): Markup {

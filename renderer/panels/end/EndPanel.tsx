@@ -121,6 +121,8 @@ function heldText(support: NodeSupport | undefined): string {
   switch (support?.kind) {
     case 'foundation':
       return 'The node stands on its foundation.';
+    case 'standing':
+      return 'The node stands on the bay below, as far as that holds it.';
     case 'eaves':
       return 'The node is at the eaves, held by the bays below.';
     case 'vouched':

@@ -693,6 +693,22 @@ describe('a drawn diagonal that ends where nothing holds', () => {
     ).toEqual(['B/b1', 'B/b2']);
   });
 
+  it('is found on a bar that nothing holds either', () => {
+    const tee = (loose: readonly string[]) =>
+      bay(
+        free(
+          { a: [0, 0, 0], c: [0, 0, 3000], d: [3000, 0, 3000], m: [1500, 0, 3000] },
+          [
+            ['beam', 'c', 'd', 'beam'],
+            ['b1', 'a', 'm'],
+          ],
+          { free: ['m', ...loose] },
+        ),
+      );
+    expect(found(tee([]), 'end held by nothing')).toEqual([]);
+    expect(one(tee(['c', 'd']), 'end held by nothing').bars).toEqual(['B/b1']);
+  });
+
   it('is not found where two bars from held places meet, at a support, on another bar, or in a bay with a frame of its own', () => {
     expect(
       found(
@@ -719,5 +735,29 @@ describe('a drawn diagonal that ends where nothing holds', () => {
     );
     expect(found(onBeam, 'end held by nothing')).toEqual([]);
     expect(found(crossed(), 'end held by nothing')).toEqual([]);
+  });
+});
+
+describe('a drawn diagonal out of the plane of its bay', () => {
+  const NODES = {
+    a: [0, 0, 0],
+    b: [5000, 0, 4000],
+    c: [5000, 0, 0],
+    d: [0, 0, 4000],
+    e: [0, 5000, 4000],
+  } as const;
+  const drawn = (
+    more: readonly (readonly [string, string, string, 'knee'] | readonly [string, string, string])[],
+  ) => bay(free({ ...NODES }, [['b1', 'a', 'b'], ['b2', 'c', 'd'], ...more]));
+
+  it('is found, with its true slope, and a knee is let be', () => {
+    expect(one(drawn([['b3', 'a', 'e']]), 'out of the plane')).toMatchObject({
+      bars: ['B/b3'],
+      severity: 'look into',
+    });
+    // 4000 up over 5000: 38.7°, as usual as the others.
+    expect(found(drawn([['b3', 'a', 'e']]), 'steep or flat')).toEqual([]);
+    expect(found(drawn([['k1', 'a', 'e', 'knee']]), 'out of the plane')).toEqual([]);
+    expect(found(drawn([]), 'out of the plane')).toEqual([]);
   });
 });
